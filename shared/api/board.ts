@@ -1,0 +1,48 @@
+import { z } from 'zod';
+import { HOUSE_RULES, type HouseRuleKey } from '../rules/houseRules.ts';
+import { RULE_IDS } from '../rules/vocabulary.ts';
+import { batch } from './batch.ts';
+import { brewery, season } from './brewery.ts';
+import { chain } from './chain.ts';
+import * as f from './fields.ts';
+import { abilities, member, role } from './people.ts';
+import { vessel } from './vessel.ts';
+import { yeast } from './yeast.ts';
+
+const keys = Object.keys(HOUSE_RULES) as HouseRuleKey[];
+/** Only what differs from the default. Bounds and the order of limits: `shared/rules/houseRules`. */
+export const houseRuleChanges = z.strictObject({
+  ...Object.fromEntries(
+    keys.map((key) => [
+      key,
+      (key === 'jumpHold'
+        ? z.number().min(HOUSE_RULES[key].min).max(HOUSE_RULES[key].max).nullable()
+        : z.number().min(HOUSE_RULES[key].min).max(HOUSE_RULES[key].max)
+      ).optional(),
+    ]),
+  ),
+  softened: z.array(z.enum(RULE_IDS)).optional(),
+}) as unknown as z.ZodType<HouseRuleChanges>;
+export type HouseRuleChanges = { [K in Exclude<HouseRuleKey, 'jumpHold'>]?: number } & {
+  jumpHold?: number | null;
+  softened?: (typeof RULE_IDS)[number][];
+};
+
+/** A season's board, whole: one request. The verdicts are computed from it by `shared/chain`. */
+export const board = z.strictObject({
+  brewery,
+  season,
+  /** Today in the brewery's time zone. */
+  today: f.day,
+  me: z.strictObject({ personId: f.id, role, can: abilities }),
+  houseRules: houseRuleChanges,
+  members: z.array(member),
+  yeasts: z.array(yeast),
+  vessels: z.array(vessel),
+  chains: z.array(chain),
+  batches: z.array(batch),
+  /** The newest of one's own changes that can be undone, and the newest undone one. */
+  undo: z.strictObject({ id: f.id, what: z.string() }).nullable(),
+  redo: z.strictObject({ id: f.id, what: z.string() }).nullable(),
+});
+export type Board = z.infer<typeof board>;

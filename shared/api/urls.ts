@@ -1,0 +1,34 @@
+/** Addresses of the API, in one place for server, pages and tests. `:brewery` is the slug. */
+const b = (slug: string) => `/api/breweries/${encodeURIComponent(slug)}`;
+
+export const api = {
+  account: '/api/account',
+  session: '/api/session',
+  join: (token: string) => `/api/join/${encodeURIComponent(token)}`,
+  brewery: (slug: string) => b(slug),
+  members: (slug: string) => `${b(slug)}/members`,
+  joinLinks: (slug: string) => `${b(slug)}/join-links`,
+  joinLink: (slug: string, id: string) => `${b(slug)}/join-links/${id}`,
+  board: (slug: string) => `${b(slug)}/board`,
+  season: (slug: string, id: string) => `${b(slug)}/seasons/${id}`,
+  yeasts: (slug: string) => `${b(slug)}/yeasts`,
+  yeast: (slug: string, id: string) => `${b(slug)}/yeasts/${id}`,
+  vessels: (slug: string) => `${b(slug)}/vessels`,
+  vessel: (slug: string, id: string) => `${b(slug)}/vessels/${id}`,
+  chains: (slug: string) => `${b(slug)}/chains`,
+  chain: (slug: string, id: string) => `${b(slug)}/chains/${id}`,
+  batches: (slug: string) => `${b(slug)}/batches`,
+  batch: (slug: string, id: string) => `${b(slug)}/batches/${id}`,
+  batchStage: (slug: string, id: string) => `${b(slug)}/batches/${id}/stage`,
+  /** The link from the batch before to this one. */
+  link: (slug: string, id: string) => `${b(slug)}/batches/${id}/link`,
+  acceptance: (slug: string, id: string) => `${b(slug)}/batches/${id}/link/acceptance`,
+  moves: (slug: string) => `${b(slug)}/moves`,
+  undo: (slug: string) => `${b(slug)}/undo`,
+  redo: (slug: string) => `${b(slug)}/redo`,
+  checkChain: '/api/check/chain',
+  openapi: '/api/openapi.json',
+  health: '/api/health',
+  ready: '/api/ready',
+  clientErrors: '/api/client-errors',
+} as const;
