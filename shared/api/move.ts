@@ -26,6 +26,10 @@ export const moveRequest = z
   });
 export type MoveRequest = z.infer<typeof moveRequest>;
 
+/** Undo or redo of the change that the person saw, so that a repeated request does it once. */
+export const undoRequest = z.strictObject({ changeId: f.id });
+export type UndoRequest = z.infer<typeof undoRequest>;
+
 export const shiftedDate = z.strictObject({
   batchId: f.id,
   from: f.day.nullable(),
