@@ -1,10 +1,18 @@
-import type { Config } from '../config.ts';
+interface Settings {
+  readonly mode: string;
+  readonly host: string;
+  readonly publicUrl: string | null;
+  readonly databaseUrl: string;
+  readonly sessionKeys: readonly string[];
+  readonly demo: boolean;
+  readonly testNow: Date | null;
+}
 
 const LOOPBACK = new Set(['127.0.0.1', '::1', '[::1]', 'localhost']);
 export const isLoopback = (host: string): boolean => LOOPBACK.has(host);
 
 /** What must not stand in front of people: a sentence for each setting that is missing or weak. */
-export function weakSettings(config: Config): string[] {
+export function weakSettings(config: Settings): string[] {
   const sentences = demoAbroad(config);
   if (config.testNow !== null && config.mode !== 'test')
     sentences.push('TEST_NOW belongs to tests.');
@@ -18,7 +26,7 @@ export function weakSettings(config: Config): string[] {
   return sentences;
 }
 
-function demoAbroad(config: Config): string[] {
+function demoAbroad(config: Settings): string[] {
   if (!config.demo) return [];
   if (config.mode === 'serve') {
     return ['DEMO makes accounts whose password is public: it has no place in a deployment.'];
@@ -47,7 +55,7 @@ function weakKeys(keys: readonly string[]): string[] {
     : [];
 }
 
-function weakAddress(config: Config): string[] {
+function weakAddress(config: Settings): string[] {
   if (config.publicUrl === null) {
     return ['Set PUBLIC_URL to the address that people use, such as https://brews.example.'];
   }
@@ -57,7 +65,7 @@ function weakAddress(config: Config): string[] {
     : ['PUBLIC_URL must begin with https://: over plain http a session could be read on the way.'];
 }
 
-function weakDatabase(config: Config): string[] {
+function weakDatabase(config: Settings): string[] {
   if (!URL.canParse(config.databaseUrl)) {
     return ['DATABASE_URL cannot be read: write special characters in the password as %XX.'];
   }

@@ -1,0 +1,38 @@
+import type { Server } from 'node:http';
+import type { Log } from './log.ts';
+
+const PATIENCE_MS = 10_000;
+
+/**
+ * Stops cleanly, once, on SIGTERM, SIGINT, or when the launcher that started this process is gone:
+ * requests under way are answered, then everything is closed in the order given.
+ */
+export function stopCleanly(
+  server: Server,
+  log: Log,
+  close: readonly (() => Promise<void>)[],
+): void {
+  let stopping = false;
+  const stop = async (why: string) => {
+    if (stopping) return;
+    stopping = true;
+    log.info({ why }, 'Stopping');
+    const lastResort = setTimeout(() => server.closeAllConnections(), PATIENCE_MS);
+    await new Promise<void>((done) => {
+      server.close(() => done());
+      server.closeIdleConnections();
+    });
+    clearTimeout(lastResort);
+    for (const each of close) await each();
+    log.info('Stopped');
+    process.exit(0);
+  };
+  const stopOrFail = (why: string) =>
+    void stop(why).catch((error: unknown) => {
+      log.error({ err: error }, 'Stopping failed');
+      process.exit(1);
+    });
+  process.on('SIGTERM', () => stopOrFail('SIGTERM'));
+  process.on('SIGINT', () => stopOrFail('SIGINT'));
+  if (process.connected) process.on('disconnect', () => stopOrFail('the launcher ended'));
+}
