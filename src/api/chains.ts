@@ -1,0 +1,28 @@
+import { useMutation } from '@tanstack/react-query';
+import { chain, type ChainCreate, type ChainPatch } from '#shared/api/chain.ts';
+import { api } from '#shared/api/urls.ts';
+import { request, requestNothing } from './client.ts';
+import { useBoardChanged } from './boardChanged.ts';
+
+export function useChainCreate(slug: string) {
+  return useMutation({
+    mutationFn: (body: ChainCreate) => request(chain, 'POST', api.chains(slug), { body }),
+    ...useBoardChanged(slug),
+  });
+}
+
+export function useChainPatch(slug: string) {
+  return useMutation({
+    mutationFn: ({ id, version, patch }: { id: string; version: number; patch: ChainPatch }) =>
+      request(chain, 'PATCH', api.chain(slug, id), { body: patch, ifMatch: version }),
+    ...useBoardChanged(slug),
+  });
+}
+
+export function useChainDelete(slug: string) {
+  return useMutation({
+    mutationFn: ({ id, version }: { id: string; version: number }) =>
+      requestNothing('DELETE', api.chain(slug, id), { ifMatch: version }),
+    ...useBoardChanged(slug),
+  });
+}

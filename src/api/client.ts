@@ -1,0 +1,66 @@
+import type { z } from 'zod';
+import { problem } from '#shared/api/problem.ts';
+import { setReachable } from './connection.ts';
+import { OfflineError, ProblemError, UnexpectedAnswerError } from './errors.ts';
+
+export interface RequestOptions {
+  body?: unknown;
+  /** Row version that this change was made from. */
+  ifMatch?: number;
+  signal?: AbortSignal;
+}
+
+type Method = 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
+
+/**
+ * Asks the server and parses its answer. Throws `ProblemError` for a problem document and
+ * `OfflineError` when no answer came.
+ */
+export async function request<T>(
+  schema: z.ZodType<T>,
+  method: Method,
+  url: string,
+  options: RequestOptions = {},
+): Promise<T> {
+  const response = await send(method, url, options);
+  const content: unknown = await response.json().catch(() => undefined);
+  if (!response.ok) throw problemOf(response, content);
+  const parsed = schema.safeParse(content);
+  if (!parsed.success)
+    throw new UnexpectedAnswerError(`${method} ${url}: ${parsed.error.issues[0]?.message ?? ''}`);
+  return parsed.data;
+}
+
+/** For answers without content. */
+export async function requestNothing(method: Method, url: string, options: RequestOptions = {}) {
+  const response = await send(method, url, options);
+  if (response.ok) return;
+  throw problemOf(response, await response.json().catch(() => undefined));
+}
+
+async function send(method: Method, url: string, { body, ifMatch, signal }: RequestOptions) {
+  const headers: Record<string, string> = { Accept: 'application/json' };
+  if (body !== undefined) headers['Content-Type'] = 'application/json';
+  if (ifMatch !== undefined) headers['If-Match'] = `"${ifMatch}"`;
+  try {
+    const response = await fetch(url, {
+      method,
+      headers,
+      credentials: 'same-origin',
+      ...(body !== undefined && { body: JSON.stringify(body) }),
+      ...(signal && { signal }),
+    });
+    setReachable(true);
+    return response;
+  } catch (error) {
+    if (error instanceof DOMException && error.name === 'AbortError') throw error;
+    setReachable(false);
+    throw new OfflineError();
+  }
+}
+
+function problemOf(response: Response, content: unknown): Error {
+  const parsed = problem.safeParse(content);
+  if (parsed.success) return new ProblemError(parsed.data);
+  return new UnexpectedAnswerError(`${response.url} answered ${response.status}`);
+}

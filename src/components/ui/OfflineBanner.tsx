@@ -1,0 +1,39 @@
+import { useQueryClient } from '@tanstack/react-query';
+import { useEffect } from 'react';
+import { setReachable } from '../../api/connection.ts';
+import { api } from '#shared/api/urls.ts';
+import { useOnline } from '../../app/useOnline.ts';
+
+export const OFFLINE_SENTENCE =
+  'No connection. You can read what is here; nothing can be changed until it is back.';
+
+/** Says that the connection is gone and looks for it again. */
+export function OfflineBanner() {
+  const online = useOnline();
+  useComeBack(online);
+  return (
+    <div aria-live="polite">
+      {!online && (
+        <p className="bg-mind-l px-7 py-2 text-center font-semibold text-mind max-tablet:px-4">
+          {OFFLINE_SENTENCE}
+        </p>
+      )}
+    </div>
+  );
+}
+
+function useComeBack(online: boolean) {
+  const client = useQueryClient();
+  useEffect(() => {
+    if (online) return;
+    const look = async () => {
+      const answer = await fetch(api.health, { cache: 'no-store' }).catch(() => null);
+      if (answer) setReachable(true);
+    };
+    const timer = window.setInterval(look, 5_000);
+    return () => {
+      window.clearInterval(timer);
+      void client.invalidateQueries();
+    };
+  }, [online, client]);
+}

@@ -1,0 +1,81 @@
+import { createBrowserRouter } from 'react-router-dom';
+import { lazyPage } from './app/lazyPage.ts';
+import { Root } from './app/Root.tsx';
+import { ErrorPage } from './routes/error/ErrorPage.tsx';
+import { NotFoundPage } from './routes/error/NotFoundPage.tsx';
+import { WelcomePage } from './routes/welcome/WelcomePage.tsx';
+
+/** Every page but the first is a chunk of its own, so that the front page stays light. */
+export const router = createBrowserRouter([
+  {
+    element: <Root />,
+    errorElement: <ErrorPage />,
+    HydrateFallback: () => null,
+    children: [
+      { index: true, element: <WelcomePage /> },
+      {
+        path: 'sign-in',
+        lazy: () =>
+          lazyPage(async () => (await import('./routes/sign-in/SignInPage.tsx')).SignInPage),
+      },
+      {
+        path: 'sign-up',
+        lazy: () =>
+          lazyPage(async () => (await import('./routes/sign-up/SignUpPage.tsx')).SignUpPage),
+      },
+      {
+        path: 'join/:token',
+        lazy: () => lazyPage(async () => (await import('./routes/join/JoinPage.tsx')).JoinPage),
+      },
+      {
+        path: 'about/checks',
+        lazy: () =>
+          lazyPage(async () => (await import('./routes/checks/ChecksPage.tsx')).ChecksPage),
+      },
+      {
+        path: 'account',
+        lazy: () =>
+          lazyPage(async () => (await import('./routes/account/ToAccount.tsx')).ToAccount),
+      },
+      {
+        path: 'b/:brewery',
+        lazy: () => lazyPage(async () => (await import('./routes/shell/Shell.tsx')).Shell),
+        errorElement: <ErrorPage />,
+        children: [
+          {
+            index: true,
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/board/BoardPage.tsx')).BoardPage),
+          },
+          {
+            path: 'yeasts',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/yeasts/YeastsPage.tsx')).YeastsPage),
+          },
+          {
+            path: 'vessels',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/vessels/VesselsPage.tsx')).VesselsPage),
+          },
+          {
+            path: 'people',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/people/PeoplePage.tsx')).PeoplePage),
+          },
+          {
+            path: 'season',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/season/SeasonPage.tsx')).SeasonPage),
+          },
+          {
+            path: 'account',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/account/AccountPage.tsx')).AccountPage),
+          },
+          { path: '*', element: <NotFoundPage /> },
+        ],
+      },
+      { path: '*', element: <NotFoundPage /> },
+    ],
+  },
+]);

@@ -1,0 +1,67 @@
+import { useQuery } from '@tanstack/react-query';
+import { Link, useNavigate } from 'react-router-dom';
+import { boardQuery } from '../../api/board.ts';
+import { useSession, useSignOut } from '../../api/session.ts';
+import { useBrewery } from '../../app/useBrewery.ts';
+import { Avatar } from '../../components/drawn/Avatar.tsx';
+import { Menu, MenuItem, MenuLabel, MenuSeparator } from '../../components/ui/Menu.tsx';
+import { say } from '../../components/ui/Toast.tsx';
+import { sentenceOf } from '../../api/errors.ts';
+import { initialsOf } from './initials.ts';
+
+export function AccountMenu() {
+  const brewery = useBrewery();
+  const { data: me } = useSession();
+  const { data: board } = useQuery(boardQuery(brewery.slug));
+  const navigate = useNavigate();
+  const signOut = useSignOut();
+  if (!me) return null;
+  const place = board?.members.findIndex((member) => member.personId === me.id) ?? -1;
+  const initials = board?.members[place]?.initials ?? initialsOf(me.name);
+  const leave = () =>
+    signOut.mutate(undefined, {
+      onSuccess: () => navigate('/'),
+      onError: (error) => say(sentenceOf(error)),
+    });
+  return (
+    <Menu
+      trigger={
+        <button
+          type="button"
+          aria-label={`Account of ${me.name}`}
+          className="grid min-h-8 place-items-center rounded-full max-tablet:size-11"
+        >
+          <Avatar initials={initials} name={me.name} place={Math.max(0, place)} />
+        </button>
+      }
+    >
+      <MenuLabel>{me.name}</MenuLabel>
+      <MenuItem asChild>
+        <Link to={brewery.path('account')}>Account and units</Link>
+      </MenuItem>
+      <MenuItem asChild>
+        <Link to="/about/checks">How the checks work</Link>
+      </MenuItem>
+      <OtherBreweries />
+      <MenuSeparator />
+      <MenuItem onSelect={leave}>Sign out</MenuItem>
+    </Menu>
+  );
+}
+
+function OtherBreweries() {
+  const { slug } = useBrewery();
+  const others = useSession().data?.breweries.filter((m) => m.brewery.slug !== slug) ?? [];
+  if (others.length === 0) return null;
+  return (
+    <>
+      <MenuSeparator />
+      <MenuLabel>Other breweries</MenuLabel>
+      {others.map(({ brewery }) => (
+        <MenuItem asChild key={brewery.id}>
+          <Link to={`/b/${brewery.slug}`}>{brewery.name}</Link>
+        </MenuItem>
+      ))}
+    </>
+  );
+}
