@@ -1,6 +1,41 @@
+import type { LinkInput } from '../rules/linkInput.ts';
+import { daysBetween } from '../units/day.ts';
 import type { BoardFacts } from './board.ts';
+import { linkInput, sightOf } from './boardLink.ts';
 
-/** Placeholder until links are read. */
-export function lapses(_before: BoardFacts, _after: BoardFacts): string[] {
-  return [];
+/**
+ * The batches whose accepted link is no longer the one that was accepted: a fact of it, or its
+ * place in the descent of the yeast, differs between the two boards. Names and a shift of the
+ * whole link in the calendar change nothing that was accepted.
+ */
+export function lapses(before: BoardFacts, after: BoardFacts): string[] {
+  const accepted = after.batches.filter((batch) => batch.link.acceptance !== null);
+  if (accepted.length === 0) return [];
+  const [was, is] = [sightOf(before), sightOf(after)];
+  return accepted.flatMap(({ id }) => {
+    const [old, now] = [linkInput(id, was), linkInput(id, is)];
+    return old && now && gist(old) === gist(now) ? [] : [id];
+  });
 }
+
+/** A link's facts as text, its days counted from each other. */
+function gist({ earlier, later, pour, board, rules: _, units: __, ...rest }: LinkInput): string {
+  const { name: _a, brewOn: brewedOn, ...earlierFacts } = earlier;
+  const { name: _b, brewOn, ...laterFacts } = later;
+  const { takenOn, ...pourFacts } = pour;
+  return JSON.stringify({
+    ...rest,
+    earlier: earlierFacts,
+    later: laterFacts,
+    pour: pourFacts,
+    taken: board?.vesselTakenBy !== undefined,
+    cakeCheck: board?.cakeCheck,
+    untilTaken: between(brewedOn, takenOn),
+    untilBrewed: between(brewedOn, brewOn),
+    // With no day to count from, the day itself is the fact.
+    days: brewedOn === undefined ? [takenOn, brewOn] : [],
+  });
+}
+
+const between = (from: string | undefined, to: string | undefined): number | null =>
+  from === undefined || to === undefined ? null : daysBetween(from, to);

@@ -1,0 +1,132 @@
+import type { Batch } from '../api/batch.ts';
+import type { UnitPrefs } from '../api/units.ts';
+import type { BatchFacts, BoardContext, PourFacts } from '../rules/facts.ts';
+import type { LinkInput } from '../rules/linkInput.ts';
+import { DEFAULT_HOUSE_RULES, resolveHouseRules, type HouseRules } from '../rules/resolve.ts';
+import { factsOf, pourFactsOf, vesselFactsOf, yeastFactsOf } from './batchFacts.ts';
+import { indexBoard, type BoardFacts, type BoardIndex, type Layout } from './board.ts';
+import { descents, type Descent } from './descent.ts';
+import { inherit } from './inherit.ts';
+import { staysByVessel, useOfVessel, type VesselUse } from './vesselUse.ts';
+
+/** All that the links of one layout of a board are read with. */
+export interface Sight {
+  index: BoardIndex;
+  layout: Layout;
+  rules: HouseRules;
+  units: UnitPrefs | undefined;
+  facts(batch: Batch): BatchFacts;
+  descent(batch: Batch): Descent;
+  use(batchId: string): VesselUse | undefined;
+}
+
+/** The board as it stands, read once. */
+export function sightOf(board: BoardFacts, units?: UnitPrefs): Sight {
+  const index = indexBoard(board);
+  const facts = remembered(factsOf);
+  return {
+    index,
+    layout: index,
+    rules: rulesOf(board),
+    units,
+    facts,
+    descent: descents(index, (before, earlier) => inherit(before, facts(earlier))),
+    use: usesOf(index),
+  };
+}
+
+/** The brewery's house rules; the defaults where what is stored cannot stand. */
+export function rulesOf(board: Pick<BoardFacts, 'houseRules'>): HouseRules {
+  const resolved = resolveHouseRules(board.houseRules);
+  return resolved.ok ? resolved.rules : DEFAULT_HOUSE_RULES;
+}
+
+export function remembered<K extends object, V>(make: (key: K) => V): (key: K) => V {
+  const made = new Map<K, V>();
+  return (key) => {
+    const known = made.get(key);
+    if (known !== undefined) return known;
+    const value = make(key);
+    made.set(key, value);
+    return value;
+  };
+}
+
+function usesOf(index: BoardIndex): (batchId: string) => VesselUse | undefined {
+  const uses = new Map<string, VesselUse>();
+  for (const [vesselId, stays] of staysByVessel(index)) {
+    const cleanedOn = index.vessels.get(vesselId)?.cleanedOn ?? null;
+    for (const [id, use] of useOfVessel(stays, cleanedOn)) uses.set(id, use);
+  }
+  return (batchId) => uses.get(batchId);
+}
+
+/** What the engine is told of the link into a batch; null where no cake goes under it. */
+export function linkInput(laterId: string, sight: Sight): LinkInput | null {
+  const later = sight.layout.batch(laterId);
+  const earlier = later ? sight.layout.predecessor(laterId) : null;
+  return later && earlier ? linkBetween(earlier, later, sight) : null;
+}
+
+/** The link of two batches that stand together; null where the yeast is not on the board. */
+export function linkBetween(earlier: Batch, later: Batch, sight: Sight): LinkInput | null {
+  const { index, layout } = sight;
+  const yeasts = yeastsOf(earlier, later, sight);
+  if (!yeasts) return null;
+  const { generation, inherited } = sight.descent(later);
+  const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
+  const vessel = chain?.vesselId ? index.vessels.get(chain.vesselId) : undefined;
+  const pour = pourOf(earlier, later, sight, yeasts.other);
+  const taken = sight.use(later.id)?.takenBy;
+  return {
+    earlier: sight.facts(earlier),
+    later: sight.facts(later),
+    pour,
+    yeast: yeasts.cake,
+    inherited,
+    rules: sight.rules,
+    board: boardContext(earlier, taken),
+    ...(vessel ? { vessel: vesselFactsOf(vessel) } : {}),
+    ...(generation === null ? {} : { generation }),
+    ...(sight.units ? { units: sight.units } : {}),
+    ...(earlier.link.keepWhole && layout.predecessor(earlier.id) ? { wholeCakeBefore: true } : {}),
+  };
+}
+
+/** The yeast of the cake, and the one the later batch asks for where that is another. */
+function yeastsOf(earlier: Batch, later: Batch, { index, layout }: Sight) {
+  const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
+  const source = earlier.chainId === null ? undefined : layout.chain(earlier.chainId);
+  const cake = index.yeasts.get((source ?? chain)?.yeastId ?? '');
+  if (!cake) return null;
+  const wanted = index.yeasts.get(later.yeastId ?? chain?.yeastId ?? '');
+  const other =
+    wanted && wanted.id !== cake.id ? { kind: wanted.kind, character: wanted.character } : null;
+  return { cake: yeastFactsOf(cake), other };
+}
+
+function pourOf(
+  earlier: Batch,
+  later: Batch,
+  sight: Sight,
+  otherYeast: PourFacts['otherYeast'] | null,
+): PourFacts {
+  const own = later.vesselId ? sight.index.vessels.get(later.vesselId) : undefined;
+  const beersSinceCleaning = sight.use(later.id)?.beersSinceCleaning;
+  return {
+    ...pourFactsOf(later, earlier),
+    ...(otherYeast ? { otherYeast } : {}),
+    ...(own ? { vessel: vesselFactsOf(own) } : {}),
+    ...(beersSinceCleaning === undefined ? {} : { beersSinceCleaning }),
+  };
+}
+
+/** The cake check has no record yet; a cell count of the cake speaks for itself. */
+function boardContext(earlier: Batch, vesselTakenBy: string | undefined): BoardContext {
+  const living = earlier.cake?.measured?.viability ?? null;
+  return {
+    ...(vesselTakenBy === undefined ? {} : { vesselTakenBy }),
+    ...(living === null ? {} : { cakeCheck: { dueWithinADay: false, dead: 1 - living } }),
+  };
+}
+
