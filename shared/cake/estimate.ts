@@ -99,8 +99,7 @@ const orElse = (measured: number | undefined, estimate: () => Interval): Interva
  */
 export function estimateCake(cake: CakeFacts): CakeEstimate {
   const { volumeL, massKg, viability, cellsPerMl } = cake.measured ?? {};
-  const perLitre =
-    1000 * (cellsPerMl ?? CELLS_PER_ML_CAKE * (1 - TRUB_SHARE[cake.trub ?? 'some']));
+  const perLitre = 1000 * (cellsPerMl ?? CELLS_PER_ML_CAKE * (1 - TRUB_SHARE[cake.trub ?? 'some']));
   const measuredL = volumeL ?? (massKg === undefined ? undefined : massKg / CAKE_KG_PER_L);
   const grown = grownCells(cake);
   const settledCells =

@@ -20,7 +20,7 @@ export function recommendedKeep({
   cake,
   need,
 }: {
-  cake: Pick<CakeEstimate, 'viableCells' | 'volumeL' | 'massKg'>;
+  cake: Omit<CakeEstimate, 'settledCells'>;
   need: number;
 }): KeptPart {
   const meetsNeed = cake.viableCells.low >= need;

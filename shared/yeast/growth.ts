@@ -22,8 +22,7 @@ export function yieldShare(plato: number): number {
   let [fromP, fromShare]: readonly [number, number] = TAPER[0];
   if (plato <= fromP) return fromShare;
   for (const [toP, toShare] of TAPER) {
-    if (plato <= toP)
-      return fromShare + ((toShare - fromShare) * (plato - fromP)) / (toP - fromP);
+    if (plato <= toP) return fromShare + ((toShare - fromShare) * (plato - fromP)) / (toP - fromP);
     [fromP, fromShare] = [toP, toShare];
   }
   return fromShare;

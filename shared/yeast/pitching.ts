@@ -5,7 +5,10 @@ import { platoFromSg, points } from '../units/gravity.ts';
  * Viable cells per mL and °P: Fix, *Analysis of Brewing Techniques* 1997, as quoted in the trade
  * (suppliers publish 0.75–1.5e6 by strain).
  */
-export const CELLS_PER_ML_PLATO: Readonly<Record<YeastKind, number>> = { ale: 0.75e6, lager: 1.5e6 };
+export const CELLS_PER_ML_PLATO: Readonly<Record<YeastKind, number>> = {
+  ale: 0.75e6,
+  lager: 1.5e6,
+};
 
 /** A quarter more from 18 °P (1.074), after the step from 2.3 to 2.9e6 of Suihko et al. 1993. */
 const STRONG_FROM_POINTS = 74;
