@@ -7,7 +7,7 @@ import { factsOf, pourFactsOf, vesselFactsOf, yeastFactsOf } from './batchFacts.
 import { indexBoard, type BoardFacts, type BoardIndex, type Layout } from './board.ts';
 import { descents, type Descent } from './descent.ts';
 import { inherit } from './inherit.ts';
-import { staysByVessel, useOfVessel, type VesselUse } from './vesselUse.ts';
+import { staysByVessel, useOfVessel, type Stay, type VesselUse } from './vesselUse.ts';
 
 /** All that the links of one layout of a board are read with. */
 export interface Sight {
@@ -17,6 +17,8 @@ export interface Sight {
   units: UnitPrefs | undefined;
   facts(batch: Batch): BatchFacts;
   descent(batch: Batch): Descent;
+  /** By vessel. */
+  stays: ReadonlyMap<string, readonly Stay[]>;
   use(batchId: string): VesselUse | undefined;
 }
 
@@ -24,6 +26,7 @@ export interface Sight {
 export function sightOf(board: BoardFacts, units?: UnitPrefs): Sight {
   const index = indexBoard(board);
   const facts = remembered(factsOf);
+  const stays = staysByVessel(index);
   return {
     index,
     layout: index,
@@ -31,7 +34,8 @@ export function sightOf(board: BoardFacts, units?: UnitPrefs): Sight {
     units,
     facts,
     descent: descents(index, (before, earlier) => inherit(before, facts(earlier))),
-    use: usesOf(index),
+    stays,
+    use: usesOf(index, stays),
   };
 }
 
@@ -52,9 +56,12 @@ export function remembered<K extends object, V>(make: (key: K) => V): (key: K) =
   };
 }
 
-function usesOf(index: BoardIndex): (batchId: string) => VesselUse | undefined {
+function usesOf(
+  index: BoardIndex,
+  byVessel: Sight['stays'],
+): (batchId: string) => VesselUse | undefined {
   const uses = new Map<string, VesselUse>();
-  for (const [vesselId, stays] of staysByVessel(index)) {
+  for (const [vesselId, stays] of byVessel) {
     const cleanedOn = index.vessels.get(vesselId)?.cleanedOn ?? null;
     for (const [id, use] of useOfVessel(stays, cleanedOn)) uses.set(id, use);
   }
@@ -129,4 +136,3 @@ function boardContext(earlier: Batch, vesselTakenBy: string | undefined): BoardC
     ...(living === null ? {} : { cakeCheck: { dueWithinADay: false, dead: 1 - living } }),
   };
 }
-

@@ -83,9 +83,7 @@ export function pullAlong(
 const MOST_CHAINS = 1000;
 
 const beforePlace = (draft: Draft, chainId: string, place: number): Batch | null =>
-  place > 0
-    ? (draft.batchesOf(chainId)[place - 1] ?? null)
-    : sourceOf(draft, draft.chain(chainId));
+  place > 0 ? (draft.batchesOf(chainId)[place - 1] ?? null) : sourceOf(draft, draft.chain(chainId));
 
 const hasShifted = (index: BoardIndex, batch: Batch): boolean =>
   index.batch(batch.id)?.brewOn !== batch.brewOn;

@@ -16,6 +16,7 @@ export type HandDown = (before: Inheritance, earlier: Batch) => Inheritance;
 
 const UNKNOWN_INHERITED: Inheritance = {
   ...NOTHING_INHERITED,
+  ogUnknown: true,
   allergensUnknown: true,
   culturesUnknown: true,
 };

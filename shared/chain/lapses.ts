@@ -19,12 +19,18 @@ export function lapses(before: BoardFacts, after: BoardFacts): string[] {
 }
 
 /** A link's facts as text, its days counted from each other. */
-function gist({ earlier, later, pour, board, rules: _, units: __, ...rest }: LinkInput): string {
+function gist(input: LinkInput): string {
+  const { earlier, later, pour, board, inherited, rules: _, units: __, ...rest } = input;
   const { name: _a, brewOn: brewedOn, ...earlierFacts } = earlier;
   const { name: _b, brewOn, ...laterFacts } = later;
   const { takenOn, ...pourFacts } = pour;
   return JSON.stringify({
     ...rest,
+    inherited: {
+      ...inherited,
+      allergens: inherited.allergens.toSorted(),
+      cultures: inherited.cultures.toSorted(),
+    },
     earlier: earlierFacts,
     later: laterFacts,
     pour: pourFacts,

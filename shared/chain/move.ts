@@ -1,9 +1,10 @@
 import type { Batch } from '../api/batch.ts';
-import type { Chain, ChainCreate } from '../api/chain.ts';
+import type { Chain } from '../api/chain.ts';
 import type { MoveRequest, ShiftedDate } from '../api/move.ts';
 import { indexBoard, isPencilled, type BoardFacts, type BoardIndex } from './board.ts';
 import { shiftedDates } from './dates.ts';
 import { lapses } from './lapses.ts';
+import { asLastShelf } from './newShelf.ts';
 import { isSettled, lockOf, planMove, withoutBatch, type Plan, type Target } from './plan.ts';
 import { renumbered } from './places.ts';
 
@@ -12,12 +13,7 @@ export type MoveWish = Pick<
   'batchId' | 'toChainId' | 'afterBatchId' | 'expectedChainId' | 'dates' | 'newChain'
 >;
 
-export type MoveRefusal =
-  | 'not-found'
-  | 'moved-elsewhere'
-  | 'place-taken'
-  | 'locked'
-  | 'own-branch';
+export type MoveRefusal = 'not-found' | 'moved-elsewhere' | 'place-taken' | 'locked' | 'own-branch';
 
 export type MoveResult =
   | {
@@ -58,16 +54,8 @@ function targetOf(index: BoardIndex, wish: MoveWish): Target | null {
     return index.chain(wish.toChainId) ? { chainId: wish.toChainId, afterId, added: null } : null;
   if (!wish.newChain) return null;
   const { id } = wish.newChain;
-  const added = index.chain(id) ? null : madeChain(index, wish.newChain);
+  const added = index.chain(id) ? null : asLastShelf(index, wish.newChain);
   return { chainId: id, afterId: null, added };
-}
-
-/** A chain as a move makes it: last on the board. Its line is its source's, else its own. */
-function madeChain(index: BoardIndex, create: ChainCreate): Chain {
-  const last = index.chains.at(-1);
-  const sourceId = create.start.kind === 'cake' ? index.batch(create.start.batchId)?.chainId : null;
-  const lineId = (sourceId ? index.chain(sourceId)?.lineId : undefined) ?? create.id;
-  return { ...create, version: 1, lineId, position: last ? last.position + 1 : 0 };
 }
 
 const matesAt = (index: BoardIndex, chainId: string | null): readonly Batch[] =>
@@ -93,13 +81,19 @@ function refusal(
     return refuse('moved-elsewhere', `${batch.name} is now ${whereabouts(index, batch)}.`);
   const mates = matesAt(index, target.chainId);
   if (target.afterId !== null && !mates.some((mate) => mate.id === target.afterId))
-    return refuse('place-taken', 'The batch it should come after has moved. Look and choose again.');
+    return refuse(
+      'place-taken',
+      'The batch it should come after has moved. Look and choose again.',
+    );
   const start = target.added?.start;
   if (start?.kind === 'cake' && !isLive(index, start.batchId))
     return refuse('not-found', 'The batch whose cake should start this shelf is not on the board.');
   const lock = lockOf(index, batch, target);
   if (lock === 'poured')
-    return refuse('locked', 'A batch further along there is already poured, so this place is closed.');
+    return refuse(
+      'locked',
+      'A batch further along there is already poured, so this place is closed.',
+    );
   if (lock === 'own-branch')
     return refuse('own-branch', `That shelf comes of the cake of ${batch.name}.`);
   return null;
@@ -118,7 +112,12 @@ function carryOut(
   what: string,
 ): MoveResult {
   const plan = planMove(index, batch, target, wish.dates);
-  const rows = renumbered(index, plan.draft, [batch.chainId, target.chainId], benchOrder(index, batch, target));
+  const rows = renumbered(
+    index,
+    plan.draft,
+    [batch.chainId, target.chainId],
+    benchOrder(index, batch, target),
+  );
   const chains = target.added ? [target.added] : [];
   const lapsed = new Set(lapses(index.board, withRows(index.board, rows, chains)));
   const batches = rows.map((row) =>

@@ -21,7 +21,8 @@ export interface VesselUse {
 
 /** The vessel a batch is brewed in: its own, else the chain's. */
 export const vesselIdOf = (batch: Batch, layout: Pick<Layout, 'chain'>): string | null =>
-  batch.vesselId ?? (batch.chainId === null ? null : (layout.chain(batch.chainId)?.vesselId ?? null));
+  batch.vesselId ??
+  (batch.chainId === null ? null : (layout.chain(batch.chainId)?.vesselId ?? null));
 
 export function stayOf(batch: Batch): Stay | null {
   if (batch.brewOn === null || !isScheduled(batch)) return null;
@@ -56,7 +57,7 @@ export function useOfVessel(
   let longest: Stay | null = null;
   let second: Stay | null = null;
   let beers = 0;
-  for (let at = 0; at < stays.length; ) {
+  for (let at = 0; at < stays.length;) {
     const day = stays[at]?.from ?? '';
     const together = stays.slice(at, endOfDay(stays, at, day));
     for (const stay of together) {

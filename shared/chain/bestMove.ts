@@ -1,0 +1,125 @@
+import { isPencilled, type BoardFacts, type BoardIndex } from './board.ts';
+import { rankGaps, weighGaps, type Gap, type WeighedGap } from './gaps.ts';
+import { chainsThatCanHelp } from './reachOfMoves.ts';
+import { scalesOf, type ChangedLink, type Scales } from './weigh.ts';
+
+/** Links of the season by their verdict. */
+export interface Tally {
+  holds: number;
+  minds: number;
+}
+
+export interface BestMove {
+  batchId: string;
+  gap: Gap;
+  before: Tally;
+  after: Tally;
+  what: string;
+}
+
+/**
+ * The single relocation that would help the season most: the largest fall of held links, then of
+ * minded ones; among equals the fewest findings, no new shelf, then the best gap. Null where no
+ * move lowers them. The bench is no answer: it only puts the beer away.
+ */
+export function bestMove(board: BoardFacts): BestMove | null {
+  const scales = scalesOf(board);
+  const { index } = scales.sight;
+  const before = seasonOf(scales);
+  if (before.holds + before.minds === 0) return null;
+  const helpful = chainsThatCanHelp(
+    index,
+    (id) => (scales.standing(id)?.verdict ?? 'pour') !== 'pour',
+  );
+  let best: Option | null = null;
+  for (const batch of index.board.batches.filter(isPencilled)) {
+    const fromHelpful =
+      (batch.chainId !== null && helpful.has(batch.chainId)) ||
+      index.branchesOf(batch.id).some((branch) => helpful.has(branch.id));
+    const weighed = weighGaps(
+      scales,
+      batch.id,
+      (place) =>
+        place.key !== 'bench' && !place.here && (fromHelpful || helpful.has(place.toChainId)),
+    );
+    for (const option of optionsOf(batch.id, weighed))
+      if (helps(option.fall) && (best === null || isBetter(option, best))) best = option;
+  }
+  return best && told(index, before, best);
+}
+
+/** [held links, minded links, hold findings, mind findings] that go. */
+type Fall = readonly [number, number, number, number];
+
+interface Option {
+  batchId: string;
+  gap: Gap;
+  fall: Fall;
+}
+
+function optionsOf(batchId: string, weighed: readonly WeighedGap[]): Option[] {
+  const ranked = rankGaps(weighed.map(({ gap }) => gap));
+  const changedBy = new Map(weighed.map(({ gap, changed }) => [gap, changed]));
+  return ranked.map((gap) => ({ batchId, gap, fall: fallOf(changedBy.get(gap) ?? []) }));
+}
+
+function fallOf(changed: readonly ChangedLink[]): Fall {
+  const fall: [number, number, number, number] = [0, 0, 0, 0];
+  const add = (link: ChangedLink['after'], sign: 1 | -1) => {
+    if (!link) return;
+    if (link.verdict === 'hold') fall[0] += sign;
+    if (link.verdict === 'mind') fall[1] += sign;
+    fall[2] += sign * link.holds;
+    fall[3] += sign * link.minds;
+  };
+  for (const { before, after } of changed) {
+    add(before, 1);
+    add(after, -1);
+  }
+  return fall;
+}
+
+const helps = ([holds, minds]: Fall): boolean => holds > 0 || (holds === 0 && minds > 0);
+
+function isBetter(option: Option, than: Option): boolean {
+  const isNew = ({ gap }: Option) => Number(gap.key === 'new');
+  const difference =
+    option.fall[0] - than.fall[0] ||
+    option.fall[1] - than.fall[1] ||
+    option.fall[2] - than.fall[2] ||
+    option.fall[3] - than.fall[3] ||
+    isNew(than) - isNew(option);
+  return difference > 0;
+}
+
+function seasonOf({ sight, standing }: Scales): Tally {
+  const tally = { holds: 0, minds: 0 };
+  for (const chain of sight.index.chains)
+    for (const { id } of sight.index.batchesOf(chain.id)) {
+      const verdict = standing(id)?.verdict;
+      if (verdict === 'hold') tally.holds += 1;
+      if (verdict === 'mind') tally.minds += 1;
+    }
+  return tally;
+}
+
+function told(index: BoardIndex, before: Tally, { batchId, gap, fall }: Option): BestMove {
+  const after = { holds: before.holds - fall[0], minds: before.minds - fall[1] };
+  const name = index.batch(batchId)?.name ?? '';
+  const what = `Move ${name} ${whither(index, gap)}: ${said(after)} in the season instead of ${said(before)}.`;
+  return { batchId, gap: { ...gap, best: true }, before, after, what };
+}
+
+function whither(index: BoardIndex, gap: Gap): string {
+  if (gap.key === 'new') return 'to a new shelf, with one more pack';
+  const after = gap.afterBatchId === null ? undefined : index.batch(gap.afterBatchId);
+  return after
+    ? `after ${after.name}`
+    : `to the start of ${index.chain(gap.toChainId)?.name ?? 'the shelf'}`;
+}
+
+const said = ({ holds, minds }: Tally): string =>
+  `${counted(holds, 'hold')} and ${counted(minds, 'mind')}`;
+
+const counted = (count: number, word: string): string =>
+  count === 0 ? `no ${word}` : `${count} ${word}${count === 1 ? '' : 's'}`;

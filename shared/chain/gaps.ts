@@ -1,0 +1,133 @@
+import type { Batch } from '../api/batch.ts';
+import type { Day, Verdict } from '../rules/vocabulary.ts';
+import { isPencilled, order, type BoardFacts } from './board.ts';
+import { nextBrewDay } from './dates.ts';
+import { placesFor, type Place } from './gapPlaces.ts';
+import { countsAtGap, differs, gapVerdict } from './gapVerdict.ts';
+import { planMove, type Lock } from './plan.ts';
+import { scalesOf, type ChangedLink, type Scales } from './weigh.ts';
+
+/** A place for a lifted batch, judged as the drop would make it. */
+export interface Gap {
+  /** `chainId:afterId`, `chainId:first`, `new` or `bench`. */
+  key: string;
+  /** A chain, `new` or `bench`. */
+  toChainId: string;
+  /** Null: first there. */
+  afterBatchId: string | null;
+  /** The batch stands here now. */
+  here: boolean;
+  /** Why nothing can be put here; then nothing else is judged. */
+  locked: Lock | null;
+  /** The worst over the links that the drop would change. */
+  verdict: Verdict;
+  /** Findings over those links. */
+  holds: number;
+  minds: number;
+  /** When the lifted batch would be brewed; null: not known. */
+  brewOn: Day | null;
+  /** Short titles, worst first. */
+  reasons: string[];
+  /** Largest ΔE00 over those links; 0 without a link; null where one is not known. */
+  colourShift: number | null;
+  best: boolean;
+  /** Of the lifted batch there; null: not known, or the bench. */
+  generation: number | null;
+  /** Links that would come about, or be judged otherwise than now; `pour` where a link ends. */
+  changes: { laterId: string; verdict: Verdict }[];
+}
+
+/**
+ * Every place that a lifted batch could have: each gap of each shelf in their order, a new shelf,
+ * the bench. A gap is judged over the links that come about by the drop (before the batch, behind
+ * it, and where it was) and those that the drop makes worse (generation, inheritance, dates,
+ * vessels). Nothing for a batch that is not pencilled.
+ */
+export function judgeGaps(board: BoardFacts, batchId: string): Gap[] {
+  const gaps = weighGaps(scalesOf(board), batchId).map(({ gap }) => gap);
+  const best = bestOf(gaps);
+  return gaps.map((gap) => (gap === best ? { ...gap, best: true } : gap));
+}
+
+/** The same without the best marked, with each link that a drop touches. */
+export function weighGaps(
+  scales: Scales,
+  batchId: string,
+  wanted: (place: Place) => boolean = () => true,
+): WeighedGap[] {
+  const { index } = scales.sight;
+  const batch = index.batch(batchId);
+  if (!batch || !isPencilled(batch)) return [];
+  let own: { day: Day | null } | null = null;
+  const ownDay = () => (own ??= { day: nextBrewDay(index, batchId) }).day;
+  return placesFor(index, batch)
+    .filter(wanted)
+    .map((place) => gapAt(scales, batch, place, ownDay));
+}
+
+export interface WeighedGap {
+  gap: Gap;
+  changed: readonly ChangedLink[];
+}
+
+function gapAt(scales: Scales, batch: Batch, place: Place, ownDay: () => Day | null): WeighedGap {
+  const { key, toChainId, afterId, here, locked } = place;
+  const empty = { key, toChainId, afterBatchId: afterId, here, locked, best: false };
+  if (locked) {
+    const nothing = { brewOn: null, generation: null, changes: [] };
+    return { gap: { ...empty, ...gapVerdict([]), ...nothing }, changed: [] };
+  }
+  if (here) return { gap: { ...empty, ...asItStands(scales, batch) }, changed: [] };
+  const plan = planMove(scales.sight.index, batch, place, 'pull', ownDay);
+  const { changed, descent } = scales.weigh(plan);
+  const row = plan.draft.batch(batch.id) ?? batch;
+  const gap = {
+    ...empty,
+    ...gapVerdict(changed.filter(countsAtGap)),
+    brewOn: row.brewOn,
+    generation: row.chainId === null ? null : descent(row).generation,
+    changes: changed
+      .filter(differs)
+      .map(({ laterId, after }) => ({ laterId, verdict: after?.verdict ?? 'pour' })),
+  };
+  return { gap, changed };
+}
+
+/** The place where the batch is: the links before and behind it as they are. */
+function asItStands({ sight, standing }: Scales, batch: Batch) {
+  const mates = batch.chainId === null ? [] : sight.index.batchesOf(batch.chainId);
+  const next = mates[mates.findIndex((mate) => mate.id === batch.id) + 1];
+  const links = [batch.id, ...(next ? [next.id] : [])].map((laterId) => {
+    const now = standing(laterId);
+    return { laterId, before: now, after: now, relinked: true };
+  });
+  const generation = batch.chainId === null ? null : sight.descent(batch).generation;
+  return { ...gapVerdict(links), brewOn: batch.brewOn, generation, changes: [] };
+}
+
+/**
+ * Best first: fewest holds, then fewest minds, smallest colour shift, earliest date, order on the
+ * board. A new shelf costs a pack, so it stands behind every gap that holds no more than it; the
+ * bench puts a beer nowhere and comes last. Locked places are left out.
+ */
+export function rankGaps(gaps: readonly Gap[]): Gap[] {
+  return gaps.filter((gap) => gap.locked === null).toSorted(compareGaps);
+}
+
+/** The best gap; null where every shelf is closed to the batch. */
+function bestOf(gaps: readonly Gap[]): Gap | null {
+  const [first] = rankGaps(gaps);
+  return first && first.key !== 'bench' ? first : null;
+}
+
+const compareGaps = (a: Gap, b: Gap): number =>
+  Number(a.key === 'bench') - Number(b.key === 'bench') ||
+  a.holds - b.holds ||
+  Number(a.key === 'new') - Number(b.key === 'new') ||
+  a.minds - b.minds ||
+  shiftOf(a) - shiftOf(b) ||
+  order(a.brewOn ?? LATEST, b.brewOn ?? LATEST);
+
+/** What is not known does not win. */
+const LATEST = '9999-12-31';
+const shiftOf = (gap: Gap): number => gap.colourShift ?? Number.MAX_VALUE;
