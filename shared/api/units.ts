@@ -16,5 +16,6 @@ export type Theme = z.infer<typeof theme>;
  * as it was typed. `unit` is the unit the field showed (`L`, `gal`, `SG`, `°P`, `SRM`, `EBC`, …).
  */
 export const typedText = z.strictObject({ text: z.string().max(40), unit: z.string().max(12) });
+export type TypedText = z.infer<typeof typedText>;
 export const typed = z.record(z.string().max(40), typedText);
 export type Typed = z.infer<typeof typed>;
