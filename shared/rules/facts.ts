@@ -69,7 +69,7 @@ export interface PourFacts {
   /** A starter is made from the waiting cake. */
   starter?: boolean;
   /** B asks for this yeast instead of the chain's. */
-  otherYeast?: { kind: YeastKind; character: boolean };
+  otherYeast?: { kind: YeastKind; character?: boolean };
   /** B would be the nth beer since the vessel was cleaned; absent: no cleaning is recorded. */
   beersSinceCleaning?: number;
   /** B's own vessel; absent: the chain's. */
@@ -78,8 +78,8 @@ export interface PourFacts {
 
 export interface YeastFacts {
   kind: YeastKind;
-  /** Marked character: phenolic, estery, a yeast one would taste. */
-  character: boolean;
+  /** Marked character: phenolic, estery, a yeast one would taste. Absent: unknown. */
+  character?: boolean;
   fermentMinC?: number;
   fermentMaxC?: number;
   pourMinC?: number;
@@ -99,6 +99,8 @@ export interface Inheritance {
   cultures: readonly Culture[];
   /** Highest original gravity of the beers before B, A included, if any is known. */
   strongestOg?: number;
+  /** True where a beer before B was brewed at an unknown original gravity. */
+  ogUnknown?: boolean;
   /** True where an earlier beer's allergens (or cultures) are unknown. */
   allergensUnknown?: boolean;
   culturesUnknown?: boolean;

@@ -1,0 +1,41 @@
+import type { BatchFacts, PourFacts } from './facts.ts';
+
+/** Names of unknown facts, as the check contract calls them. */
+
+type Key = 'volumeL' | 'og' | 'fg' | 'srm' | 'ibu' | 'fermentC' | 'daysUnderBeer' | 'brewOn';
+
+export function missingOf(facts: BatchFacts, ...keys: Key[]): string[] {
+  return keys.filter((key) => facts[key] === undefined);
+}
+
+/** What a cake's size is worked out from. */
+export const missingForCake = (earlier: BatchFacts): string[] =>
+  missingOf(earlier, 'volumeL', 'og', 'fg');
+
+/** What a blend is worked out from. */
+export const missingForBlend = (earlier: BatchFacts, later: BatchFacts): string[] =>
+  together(missingForCake(earlier), missingOf(later, 'volumeL'));
+
+/** What the day on which the yeast is taken is worked out from. */
+export const missingForTaking = (earlier: BatchFacts, pour: PourFacts): string[] =>
+  pour.takenOn === undefined ? missingOf(earlier, 'brewOn', 'daysUnderBeer') : [];
+
+/** What the wait of a cake is worked out from. */
+export const missingForWait = (earlier: BatchFacts, later: BatchFacts, pour: PourFacts): string[] =>
+  together(missingForTaking(earlier, pour), missingOf(later, 'brewOn'));
+
+/** What the survival of that wait is worked out from. */
+export const missingForSurvival = (
+  earlier: BatchFacts,
+  later: BatchFacts,
+  pour: PourFacts,
+): string[] =>
+  together(
+    missingForWait(earlier, later, pour),
+    pour.cakeC === undefined ? missingOf(earlier, 'fermentC') : [],
+  );
+
+/** Each name once. */
+export function together(...lists: string[][]): string[] {
+  return [...new Set(lists.flat())];
+}

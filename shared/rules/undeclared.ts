@@ -1,0 +1,25 @@
+import { hold, PASSED, unchecked, type Outcome } from './outcome.ts';
+
+/** What travelled down with the yeast and is not declared on the new beer. */
+export interface Undeclared<T> {
+  left: T[];
+}
+
+/**
+ * @param inherited what the earlier beers are known to hand down
+ * @param more some earlier beer's are unknown
+ * @param declared B's own; undefined where unknown
+ * @param all the closed set: a beer that declares all of it has nothing left to declare
+ */
+export function undeclared<T>(
+  inherited: readonly T[],
+  more: boolean,
+  declared: readonly T[] | undefined,
+  all: readonly T[],
+  field: string,
+): Outcome<Undeclared<T>> {
+  if (declared === undefined) return inherited.length === 0 && !more ? PASSED : unchecked([field]);
+  const left = inherited.filter((one) => !declared.includes(one));
+  if (left.length > 0) return hold({ left });
+  return more && !all.every((one) => declared.includes(one)) ? unchecked([field]) : PASSED;
+}
