@@ -1,0 +1,68 @@
+import { and, eq, gt, lt } from 'drizzle-orm';
+import type { Request } from 'express';
+import type { Db, Tx } from '../db/client.ts';
+import { person, session } from '../db/schema/people.ts';
+import type { Clock } from '../clock.ts';
+import { giveCookie, SESSION_MS, takeCookie, tokenIn } from './cookie.ts';
+import { hashToken, newToken } from './tokens.ts';
+
+export type PersonRow = typeof person.$inferSelect;
+
+export interface SignedIn {
+  person: PersonRow;
+  tokenHash: string;
+}
+
+/** Signs somebody in: a row with the token's hash, and the token as a cookie. Ends the one before. */
+export async function startSession(
+  db: Db | Tx,
+  clock: Clock,
+  req: Request,
+  personId: string,
+): Promise<void> {
+  const now = clock.now();
+  const before = tokenIn(req);
+  if (before !== null) await db.delete(session).where(eq(session.tokenHash, hashToken(before)));
+  await db.delete(session).where(and(eq(session.personId, personId), lt(session.expiresAt, now)));
+  const token = newToken();
+  await db.insert(session).values({
+    tokenHash: hashToken(token),
+    personId,
+    createdAt: now,
+    expiresAt: new Date(now.getTime() + SESSION_MS),
+  });
+  giveCookie(req, token);
+}
+
+export async function endSession(db: Db, req: Request): Promise<void> {
+  const token = tokenIn(req);
+  if (token !== null) await db.delete(session).where(eq(session.tokenHash, hashToken(token)));
+  takeCookie(req);
+}
+
+const MS_A_DAY = 24 * 60 * 60 * 1000;
+
+/** Who is signed in. The 30 days start again with use, written at most once a day. */
+export async function findSignedIn(db: Db, clock: Clock, req: Request): Promise<SignedIn | null> {
+  const token = tokenIn(req);
+  if (token === null) return null;
+  const tokenHash = hashToken(token);
+  const now = clock.now();
+  const [found] = await db
+    .select({ person, expiresAt: session.expiresAt })
+    .from(session)
+    .innerJoin(person, eq(person.id, session.personId))
+    .where(and(eq(session.tokenHash, tokenHash), gt(session.expiresAt, now)));
+  if (!found) return null;
+  if (found.expiresAt.getTime() < now.getTime() + SESSION_MS - MS_A_DAY) {
+    const expiresAt = new Date(now.getTime() + SESSION_MS);
+    await db.update(session).set({ expiresAt }).where(eq(session.tokenHash, tokenHash));
+    giveCookie(req, token);
+  }
+  return { person: found.person, tokenHash };
+}
+
+/** Sessions that have run out are of no use to anybody. */
+export async function purgeSessions(db: Db, clock: Clock): Promise<void> {
+  await db.delete(session).where(lt(session.expiresAt, clock.now()));
+}

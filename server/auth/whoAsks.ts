@@ -1,0 +1,53 @@
+import { and, eq } from 'drizzle-orm';
+import type { Request } from 'express';
+import type { Role } from '#shared/api/people.ts';
+import type { Deps } from '../deps.ts';
+import { brewery, membership } from '../db/schema/brewery.ts';
+import { season } from '../db/schema/season.ts';
+import { notFound, problem } from '../problems.ts';
+import { findSignedIn, type PersonRow, type SignedIn } from './sessions.ts';
+
+export type { SignedIn } from './sessions.ts';
+
+export type Who = 'anyone' | 'signed-in' | 'member';
+
+/** Somebody in the brewery that the address names. */
+export interface Member {
+  person: PersonRow;
+  role: Role;
+  brewery: typeof brewery.$inferSelect;
+  /** The season that is worked on. */
+  seasonId: string;
+}
+
+export async function whoAsks(
+  who: Who,
+  deps: Pick<Deps, 'db' | 'clock'>,
+  req: Request,
+): Promise<{ signedIn: SignedIn | null; member: Member | null }> {
+  if (who === 'anyone') return { signedIn: null, member: null };
+  const signedIn = await findSignedIn(deps.db, deps.clock, req);
+  if (!signedIn) throw problem('not-signed-in');
+  if (who === 'signed-in') return { signedIn, member: null };
+  return { signedIn, member: await findMember(deps, req, signedIn.person) };
+}
+
+/** Another's brewery does not exist: the answer is the same as for a name that nobody has. */
+async function findMember(
+  { db }: Pick<Deps, 'db'>,
+  req: Request,
+  person: PersonRow,
+): Promise<Member> {
+  const slug = req.params.brewery;
+  if (typeof slug !== 'string' || slug.length > 80 || slug.includes('\0')) throw notFound();
+  const [found] = await db
+    .select({ brewery, role: membership.role, seasonId: season.id })
+    .from(brewery)
+    .innerJoin(membership, eq(membership.breweryId, brewery.id))
+    .innerJoin(season, eq(season.breweryId, brewery.id))
+    .where(and(eq(brewery.slug, slug), eq(membership.personId, person.id)))
+    .orderBy(season.createdAt)
+    .limit(1);
+  if (!found) throw notFound();
+  return { person, ...found };
+}

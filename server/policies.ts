@@ -1,0 +1,28 @@
+import type { Abilities, Role } from '#shared/api/people.ts';
+
+/** Whoever is in a brewery, in a role. One function an action, for the routes and for the pages. */
+export interface InRole {
+  role: Role;
+}
+
+const isHead = ({ role }: InRole) => role === 'head-brewer';
+const brews = ({ role }: InRole) => role === 'head-brewer' || role === 'brewer';
+
+export const canRead = (_member: InRole) => true;
+export const canEditBatches = brews;
+export const canMoveBatches = brews;
+export const canEditChains = brews;
+export const canEditYeastsAndVessels = isHead;
+export const canEditSeason = isHead;
+export const canAcceptHolds = isHead;
+export const canInvite = isHead;
+
+export const abilitiesOf = (member: InRole): Abilities => ({
+  editBatches: canEditBatches(member),
+  moveBatches: canMoveBatches(member),
+  editChains: canEditChains(member),
+  editYeastsAndVessels: canEditYeastsAndVessels(member),
+  editSeason: canEditSeason(member),
+  acceptHolds: canAcceptHolds(member),
+  invite: canInvite(member),
+});

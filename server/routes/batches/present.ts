@@ -1,0 +1,64 @@
+import type { Batch, Link } from '#shared/api/batch.ts';
+import type { batch } from '../../db/schema/chain.ts';
+import type { cake } from '../../db/schema/cake.ts';
+
+export type BatchRow = typeof batch.$inferSelect;
+export type CakeRow = typeof cake.$inferSelect;
+
+/** The one place where a batch's rows become its contract. */
+export function presentBatch(row: BatchRow, itsCake: CakeRow | null): Batch {
+  return {
+    id: row.id,
+    version: row.version,
+    name: row.name,
+    style: row.style,
+    volumeL: row.volumeL,
+    og: row.og,
+    fg: row.fg,
+    srm: row.srm,
+    ibu: row.ibu,
+    fermentC: row.fermentC,
+    daysUnderBeer: row.daysUnderBeer,
+    brewOn: row.brewOn,
+    wantedOn: row.wantedOn,
+    dryHops: row.dryHops,
+    additions: row.additions,
+    allergens: row.allergens,
+    cultures: row.cultures,
+    trub: row.trub,
+    vesselId: row.vesselId,
+    yeastId: row.yeastId,
+    notes: row.notes,
+    typed: row.typed,
+    chainId: row.chainId,
+    place: row.place ?? 0,
+    stage: row.stage,
+    read: {
+      volumeL: row.readVolumeL,
+      og: row.readOg,
+      fg: row.readFg,
+      rackedOn: row.rackedOn,
+    },
+    cake: itsCake && { state: itsCake.state, measured: itsCake.measured },
+    link: presentLink(row),
+  };
+}
+
+function presentLink(row: BatchRow): Link {
+  const { acceptance } = row;
+  return {
+    takenOn: row.takenOn,
+    keepL: row.keepL,
+    keepWhole: row.keepWhole,
+    leftAboveL: row.leftAboveL,
+    cakeC: row.cakeC,
+    starter: row.starter,
+    typed: row.linkTyped,
+    acceptance: acceptance && {
+      reason: acceptance.reason,
+      rules: acceptance.rules,
+      by: acceptance.by,
+      at: acceptance.at,
+    },
+  };
+}
