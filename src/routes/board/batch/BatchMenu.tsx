@@ -1,0 +1,51 @@
+import { Ellipsis } from 'lucide-react';
+import { useState } from 'react';
+import type { Batch } from '#shared/api/batch.ts';
+import { Menu, MenuItem, MenuSeparator } from '../../../components/ui/Menu.tsx';
+import { useBoardPanel } from '../view/useBoardPanel.ts';
+import { DeleteBatch } from './DeleteBatch.tsx';
+import { StageDialog } from './StageDialog.tsx';
+import { nextStages, STAGE_ACTIONS, type NextStage } from './stages.ts';
+import { useDuplicate } from './useDuplicate.ts';
+
+type Asked = NextStage | 'delete' | null;
+
+/** Edit, duplicate, the stages that come next, scrap, delete. */
+export function BatchMenu({ batch }: { batch: Batch }) {
+  const [asked, setAsked] = useState<Asked>(null);
+  const { open } = useBoardPanel();
+  const duplicate = useDuplicate();
+  const close = () => setAsked(null);
+  return (
+    <>
+      <Menu
+        trigger={
+          <button
+            type="button"
+            aria-label={`More for ${batch.name}`}
+            className="grid size-[26px] place-items-center rounded-md text-ink3 hover:bg-line2 hover:text-ink max-tablet:size-11"
+          >
+            <Ellipsis size={18} aria-hidden />
+          </button>
+        }
+      >
+        <MenuItem onSelect={() => open({ kind: 'batch', batchId: batch.id })}>Edit</MenuItem>
+        <MenuItem onSelect={() => duplicate(batch)}>Duplicate</MenuItem>
+        <MenuSeparator />
+        {nextStages(batch.stage).map((stage) => (
+          <MenuItem key={stage} onSelect={() => setAsked(stage)}>
+            {STAGE_ACTIONS[stage].menu}
+          </MenuItem>
+        ))}
+        <MenuSeparator />
+        <MenuItem danger onSelect={() => setAsked('delete')}>
+          Delete
+        </MenuItem>
+      </Menu>
+      {asked === 'delete' && <DeleteBatch batch={batch} onClose={close} />}
+      {asked !== null && asked !== 'delete' && (
+        <StageDialog batch={batch} to={asked} onClose={close} />
+      )}
+    </>
+  );
+}

@@ -1,0 +1,52 @@
+import { Link } from 'react-router-dom';
+import { useBrewery } from '../../../app/useBrewery.ts';
+import { Button } from '../../../components/ui/Button.tsx';
+import { UndoButtons } from '../lift/UndoButtons.tsx';
+import { useBoardView } from '../view/BoardView.tsx';
+import { useBoardPanel } from '../view/useBoardPanel.ts';
+import { seasonLine } from '../view/words.ts';
+import { BestMove } from './BestMove.tsx';
+
+/** The season, its sum in one line, and what begins from here. */
+export function BoardHead() {
+  const { board, judged, can } = useBoardView();
+  const { open } = useBoardPanel();
+  return (
+    <header className="flex flex-wrap items-end gap-x-5 gap-y-3 px-7 pt-5 pb-2">
+      <div className="min-w-0 flex-1 basis-80">
+        <h1 className="text-h1 tracking-[-0.025em]">
+          <SeasonName />
+        </h1>
+        <p className="mt-0.5 text-ink2">{seasonLine(judged.totals)}</p>
+      </div>
+      <div className="flex flex-wrap items-center gap-2.5">
+        {can.moveBatches && <UndoButtons />}
+        {can.editChains && (
+          <Button onClick={() => open({ kind: 'new', what: 'chain' })}>New shelf</Button>
+        )}
+        {can.editBatches && (
+          <Button look="first" onClick={() => open({ kind: 'new', what: 'batch' })}>
+            New batch
+          </Button>
+        )}
+      </div>
+      {can.moveBatches && <BestMove key={board.season.revision} />}
+    </header>
+  );
+}
+
+/** The head brewer renames the season on its page. */
+function SeasonName() {
+  const { board, can } = useBoardView();
+  const { path } = useBrewery();
+  if (!can.editSeason) return board.season.name;
+  return (
+    <Link
+      to={path('season')}
+      title="Name, brew days and blocked days"
+      className="decoration-2 underline-offset-4 hover:underline"
+    >
+      {board.season.name}
+    </Link>
+  );
+}

@@ -1,0 +1,51 @@
+import { useEffect, useRef, type ReactNode } from 'react';
+import { SHELF, SHELF_HEIGHT } from '../view/drawing.ts';
+
+/** Marks which edges hide something; written to the element, so that scrolling draws nothing anew. */
+function useHiddenEdges() {
+  const ref = useRef<HTMLDivElement>(null);
+  useEffect(() => {
+    const run = ref.current;
+    if (!run) return;
+    const mark = () => {
+      const rest = run.scrollWidth - run.clientWidth - run.scrollLeft;
+      run.toggleAttribute('data-more-after', rest > 4);
+      run.toggleAttribute('data-more-before', run.scrollLeft > 4);
+    };
+    mark();
+    const observer = new ResizeObserver(mark);
+    observer.observe(run);
+    if (run.firstElementChild) observer.observe(run.firstElementChild);
+    run.addEventListener('scroll', mark, { passive: true });
+    return () => {
+      observer.disconnect();
+      run.removeEventListener('scroll', mark);
+    };
+  }, []);
+  return ref;
+}
+
+/**
+ * The shelf's board with what stands on it. Longer than the page is wide, it scrolls inside itself
+ * and fades where it goes on. The room before the first vessel lets its lamp shine past the edge.
+ */
+export function ShelfRun({ label, children }: { label: string; children: ReactNode }) {
+  const ref = useHiddenEdges();
+  return (
+    <div
+      ref={ref}
+      className="shelf-run thumb-slim relative -ml-10 overflow-x-auto overflow-y-hidden overscroll-x-contain"
+    >
+      <div className="relative w-max min-w-full pl-11" style={{ height: SHELF_HEIGHT }}>
+        <div
+          aria-hidden
+          className="shelf-line absolute right-0 left-10"
+          style={{ top: SHELF.top, height: SHELF.board }}
+        />
+        <ol aria-label={label} className="flex">
+          {children}
+        </ol>
+      </div>
+    </div>
+  );
+}

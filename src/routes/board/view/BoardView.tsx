@@ -1,0 +1,60 @@
+import { createContext, use, useMemo, type ReactNode } from 'react';
+import type { Board } from '#shared/api/board.ts';
+import type { Abilities } from '#shared/api/people.ts';
+import type { UnitPrefs } from '#shared/api/units.ts';
+import { indexBoard, type BoardIndex } from '#shared/chain/board.ts';
+import type { JudgedBoard } from '#shared/chain/judgeBoard.ts';
+import { useBoard, useBoardSlug, useJudged } from '../../../api/board.ts';
+import { useOnline } from '../../../app/useOnline.ts';
+import { useUnits } from '../../../app/useUnits.ts';
+
+export interface BoardViewValue {
+  board: Board;
+  index: BoardIndex;
+  judged: JudgedBoard;
+  units: UnitPrefs;
+  slug: string;
+  /** What this person may do now; nothing while there is no connection. */
+  can: Abilities;
+  online: boolean;
+}
+
+const BoardView = createContext<BoardViewValue | null>(null);
+
+const NOTHING: Abilities = {
+  editBatches: false,
+  moveBatches: false,
+  editChains: false,
+  editYeastsAndVessels: false,
+  editSeason: false,
+  acceptHolds: false,
+  invite: false,
+};
+
+/** The board, its order and its verdicts, worked out once for all that is drawn from them. */
+export function BoardViewProvider({ children }: { children: ReactNode }) {
+  const board = useBoard();
+  const judged = useJudged();
+  const units = useUnits();
+  const slug = useBoardSlug();
+  const online = useOnline();
+  const value = useMemo(
+    () => ({
+      board,
+      index: indexBoard(board),
+      judged,
+      units,
+      slug,
+      can: online ? board.me.can : NOTHING,
+      online,
+    }),
+    [board, judged, units, slug, online],
+  );
+  return <BoardView value={value}>{children}</BoardView>;
+}
+
+export function useBoardView(): BoardViewValue {
+  const value = use(BoardView);
+  if (!value) throw new Error('Only inside the board');
+  return value;
+}

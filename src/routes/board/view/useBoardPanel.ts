@@ -1,0 +1,46 @@
+import { useCallback, useMemo } from 'react';
+import { useSearchParams } from 'react-router-dom';
+
+export type BoardPanel =
+  | { kind: 'link'; laterId: string }
+  | { kind: 'batch'; batchId: string }
+  | { kind: 'new'; what: 'batch' | 'chain' };
+
+export function panelOf(params: URLSearchParams): BoardPanel | null {
+  const laterId = params.get('link');
+  if (laterId) return { kind: 'link', laterId };
+  const batchId = params.get('batch');
+  if (batchId) return { kind: 'batch', batchId };
+  const what = params.get('new');
+  return what === 'batch' || what === 'chain' ? { kind: 'new', what } : null;
+}
+
+const search = (panel: BoardPanel): Record<string, string> => {
+  switch (panel.kind) {
+    case 'link':
+      return { link: panel.laterId };
+    case 'batch':
+      return { batch: panel.batchId };
+    case 'new':
+      return { new: panel.what };
+  }
+};
+
+/**
+ * What stands open beside the shelves lives in the address: it can be linked to and the browser's
+ * back closes it. Another panel takes the place of the one that is open.
+ */
+export function useBoardPanel() {
+  const [params, setParams] = useSearchParams();
+  const panel = useMemo(() => panelOf(params), [params]);
+  const isOpen = panel !== null;
+  const open = useCallback(
+    (next: BoardPanel) => setParams(search(next), { replace: isOpen, preventScrollReset: true }),
+    [setParams, isOpen],
+  );
+  const close = useCallback(
+    () => setParams({}, { replace: true, preventScrollReset: true }),
+    [setParams],
+  );
+  return { panel, open, close };
+}
