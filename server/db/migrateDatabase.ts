@@ -19,15 +19,19 @@ export class ForeignSchemaError extends Error {
  * @returns how many migrations were applied.
  * @throws ForeignSchemaError
  */
-export async function migrateDatabase(pool: pg.Pool, backup: () => Promise<void>): Promise<number> {
+export async function migrateDatabase(
+  pool: pg.Pool,
+  backup: () => Promise<void>,
+  folder = MIGRATIONS,
+): Promise<number> {
   const client = await pool.connect();
   try {
     await client.query('set statement_timeout = 0');
     await client.query('select pg_advisory_lock($1)', [LOCK]);
-    const state = await schemaState(client);
+    const state = await schemaState(client, folder);
     if (state.kind === 'foreign') throw new ForeignSchemaError(state.why);
     if (state.kind === 'behind') await backup();
-    if (state.pending > 0) await migrate(drizzle(client), { migrationsFolder: MIGRATIONS });
+    if (state.pending > 0) await migrate(drizzle(client), { migrationsFolder: folder });
     return state.pending;
   } finally {
     // The connection is closed, not given back: its lock and its time limit end with it.

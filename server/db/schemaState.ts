@@ -12,8 +12,11 @@ export type SchemaState =
   | { readonly kind: 'empty' | 'current' | 'behind'; readonly pending: number }
   | { readonly kind: 'foreign'; readonly why: string };
 
-export async function schemaState(pool: pg.Pool | pg.PoolClient): Promise<SchemaState> {
-  const ours = readMigrationFiles({ migrationsFolder: MIGRATIONS }).map((each) => each.hash);
+export async function schemaState(
+  pool: pg.Pool | pg.PoolClient,
+  folder = MIGRATIONS,
+): Promise<SchemaState> {
+  const ours = readMigrationFiles({ migrationsFolder: folder }).map((each) => each.hash);
   const applied = await appliedMigrations(pool);
   if (applied === null || applied.length === 0) {
     return (await hasTables(pool))
@@ -31,7 +34,7 @@ async function appliedMigrations(pool: pg.Pool | pg.PoolClient): Promise<string[
   const found = await pool.query<{ table: string | null }>(
     `select to_regclass('drizzle.__drizzle_migrations')::text as table`,
   );
-  if (found.rows[0]?.table == null) return null;
+  if (!found.rows[0]?.table) return null;
   const rows = await pool.query<{ hash: string }>(
     'select hash from drizzle.__drizzle_migrations order by created_at, id',
   );
