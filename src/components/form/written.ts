@@ -1,4 +1,4 @@
-import type { Typed, UnitPrefs } from '#shared/api/units.ts';
+import type { Typed, TypedText, UnitPrefs } from '#shared/api/units.ts';
 import { readerOf, type NumberKind } from './readers.ts';
 
 /**
@@ -12,7 +12,7 @@ export interface Written {
   value: number | null;
   why: string | null;
   /** What to store beside the number; absent until somebody typed it. */
-  typed: Typed[string] | undefined;
+  typed: TypedText | undefined;
 }
 
 /** A field as it opens: the text that was once typed if it still agrees with the stored number. */
@@ -20,7 +20,7 @@ export function written(
   kind: NumberKind,
   value: number | null,
   prefs: UnitPrefs,
-  typed?: Typed[string],
+  typed?: TypedText,
 ): Written {
   const reader = readerOf(kind, prefs);
   const text = value === null ? '' : reader.write(value, typed);

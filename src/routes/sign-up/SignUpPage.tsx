@@ -1,0 +1,88 @@
+import { useForm } from 'react-hook-form';
+import { Navigate, useNavigate } from 'react-router-dom';
+import { signUpRequest } from '#shared/api/people.ts';
+import { useSession, useSignUp } from '../../api/session.ts';
+import { useTitle } from '../../app/useTitle.ts';
+import { contractResolver } from '../../components/form/contractResolver.ts';
+import { Form } from '../../components/form/Form.tsx';
+import { PasswordField } from '../../components/form/PasswordField.tsx';
+import { TextField } from '../../components/form/TextField.tsx';
+import { TextLink } from '../../components/ui/TextLink.tsx';
+import { homeOf } from '../public/home.ts';
+import { PublicForm } from '../public/PublicForm.tsx';
+import { optionalText } from '../public/optionalText.ts';
+
+/** An empty brewery name is left out: the server then names it after the person. */
+const contract = signUpRequest.extend({
+  breweryName: optionalText(signUpRequest.shape.breweryName),
+});
+
+export function SignUpPage() {
+  useTitle('Start a brewery');
+  const { data: me } = useSession();
+  if (me) return <Navigate to={homeOf(me)} replace />;
+  return (
+    <PublicForm
+      title="Start a brewery"
+      lead="One shelf for your yeasts, your beers and the people you brew with."
+    >
+      <SignUpForm />
+      <p className="mt-6 text-touch">
+        Already in?{' '}
+        <TextLink to="/sign-in" className="inline-block py-2">
+          Sign in
+        </TextLink>
+      </p>
+    </PublicForm>
+  );
+}
+
+function SignUpForm() {
+  const navigate = useNavigate();
+  const signUp = useSignUp();
+  const form = useForm({
+    resolver: contractResolver(contract),
+    defaultValues: {
+      name: '',
+      email: '',
+      password: '',
+      breweryName: '',
+      timeZone: Intl.DateTimeFormat().resolvedOptions().timeZone,
+    },
+  });
+  return (
+    <Form
+      form={form}
+      wide
+      action="Start a brewery"
+      busyAction="Setting it up"
+      onSubmit={async (values) => {
+        const who = await signUp.mutateAsync(values);
+        await navigate(homeOf(who), { replace: true });
+      }}
+    >
+      <TextField name="name" label="Your name" autoComplete="name" />
+      <TextField
+        name="email"
+        label="E-mail"
+        type="email"
+        autoComplete="username"
+        autoCapitalize="none"
+        spellCheck={false}
+        hint="To sign in with. Nothing is sent to it."
+      />
+      <PasswordField
+        name="password"
+        label="Password"
+        autoComplete="new-password"
+        hint="At least 10 characters; a short sentence is easiest to keep."
+      />
+      <TextField
+        name="breweryName"
+        label="Name of the brewery (optional)"
+        autoComplete="organization"
+        hint="It can be changed later."
+      />
+    </Form>
+  );
+}
