@@ -1,0 +1,28 @@
+import { cpus } from 'node:os';
+import { engine } from './engine.ts';
+import type { Part, Row } from './row.ts';
+
+/** Each part of the bench; one may be asked for by name. */
+const PARTS: readonly Part[] = [engine];
+
+async function main(names: readonly string[]): Promise<void> {
+  const unknown = names.filter((name) => !PARTS.some((part) => part.name === name));
+  if (unknown.length > 0) throw new Error(`There is no part ${unknown.join(', ')}.`);
+  const rows: Row[] = [];
+  for (const part of PARTS)
+    if (names.length === 0 || names.includes(part.name)) rows.push(...(await part.run()));
+  console.log(`${cpus().length} × ${cpus()[0]?.model ?? 'processor'}, Node ${process.version}\n`);
+  console.log(table(rows));
+  if (rows.some((row) => !row.holds)) process.exitCode = 1;
+}
+
+function table(rows: readonly Row[]): string {
+  const lines = [
+    ['what', 'reach', 'measured', 'holds'],
+    ['---', '---', '---', '---'],
+    ...rows.map((row) => [row.what, row.reach, row.measured, row.holds ? 'yes' : 'no']),
+  ];
+  return lines.map((cells) => `| ${cells.join(' | ')} |`).join('\n');
+}
+
+await main(process.argv.slice(2));
