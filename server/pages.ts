@@ -6,9 +6,11 @@ import express, { type RequestHandler } from 'express';
 /** Whatever answers the addresses that are not the API's. */
 export type Pages = RequestHandler;
 
+const isApi = (path: string) => /^\/api(\/|$)/.test(path);
+
 /** A page's address, as opposed to a file's or the API's. */
 function wantsPage(method: string, path: string): boolean {
-  return (method === 'GET' || method === 'HEAD') && !/^\/(api|assets)(\/|$)/.test(path);
+  return (method === 'GET' || method === 'HEAD') && !isApi(path) && !/\.[a-z0-9]{2,5}$/i.test(path);
 }
 
 /**
@@ -35,7 +37,7 @@ export function builtPages(distDir: string): Pages {
     }),
   );
   router.use((req, res, next) => {
-    if (!wantsPage(req.method, req.path) || /\.[a-z0-9]{2,5}$/i.test(req.path)) return next();
+    if (!wantsPage(req.method, req.path)) return next();
     res.setHeader('Cache-Control', 'no-cache');
     res.sendFile('index.html', { root }, (error) => (error ? next(error) : undefined));
   });
@@ -58,6 +60,7 @@ export async function vitePages(
     logLevel: 'warn',
   });
   const pages: Pages = (req, res, next) => {
+    if (isApi(req.path)) return next();
     // Vite needs inline scripts and a socket, which the content policy of the product forbids.
     res.removeHeader('Content-Security-Policy');
     dev.middlewares(req, res, next);

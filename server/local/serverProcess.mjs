@@ -2,7 +2,6 @@ import { spawn } from 'node:child_process';
 import { openSync, readFileSync, renameSync, statSync, closeSync } from 'node:fs';
 import { join } from 'node:path';
 import { root } from './places.mjs';
-import { pause } from './run.mjs';
 import { Sentence } from './say.mjs';
 
 /** @typedef {{url: string, ended: Promise<number>, stop: () => Promise<void>, pid: number}} ServerProcess */
@@ -45,12 +44,9 @@ export async function startServer(settings, logFile) {
   });
   const stop = async () => {
     child.kill('SIGTERM');
-    const stopped = await Promise.race([
-      ended.then(() => true),
-      pause(PATIENCE_MS).then(() => false),
-    ]);
-    if (!stopped) child.kill('SIGKILL');
+    const lastResort = setTimeout(() => child.kill('SIGKILL'), PATIENCE_MS);
     await ended;
+    clearTimeout(lastResort);
   };
   return { url, ended, stop, pid: child.pid ?? 0 };
 }

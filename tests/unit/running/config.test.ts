@@ -10,7 +10,7 @@ const deployment = {
   PUBLIC_URL: 'https://brews.example/',
 };
 
-function refusal(env: Record<string, string>): readonly string[] {
+function refusal(env: Record<string, string | undefined>): readonly string[] {
   try {
     parseConfig(env);
   } catch (error) {
