@@ -30,7 +30,7 @@ const blowOff: Piece = ({ kept: { ratio = 0 } }) =>
 
 const surplus: Piece = ({ kept: { keptL, share }, cake }, _names, say) =>
   keptL !== undefined && share !== undefined && share > 0 && share < 0.99 && cake !== undefined
-    ? `The other ${say.volume(cake.volumeL.likely - keptL)} of cake could be jarred, lid loose. ` +
+    ? `The other ${say.part(cake.volumeL.likely - keptL)} of cake could be jarred, lid loose. ` +
       'Too much yeast does less harm than too little, but it flattens character.'
     : null;
 
@@ -43,7 +43,7 @@ const measureCake: Piece = ({ cake, kept: { ratio, share }, need }, { b }) => {
 
 const clamped: Piece = ({ kept, cake }, _names, say) =>
   kept.clamped && cake !== undefined
-    ? `More was asked for than there is: the whole cake is about ${say.volume(cake.volumeL.likely)}.`
+    ? `More was asked for than there is: the whole cake is about ${say.part(cake.volumeL.likely)}.`
     : null;
 
 const darkUnseen: Piece = (link, { a, b }) => {

@@ -72,7 +72,7 @@ function lessCake(link: LinkState, now: Graded, say: Say): string | undefined {
   const shift = link.shiftTo(linkBlend(link.a, link.b, less.retainedL).srm);
   if (shift === undefined || !milder(now, standingAt(shift, link))) return undefined;
   return (
-    `Keep ${say.volume(less.keptL)} of the cake: the wort needs no more, and the shift ` +
+    `Keep ${say.part(less.keptL)} of the cake: the wort needs no more, and the shift ` +
     `falls to ΔE00 ${atMost(shift, 1)}.`
   );
 }

@@ -98,7 +98,7 @@ function lessCake(
   if (shift === undefined || !milder(now, standingAt(shift, toHundredth(ibuA - ibuB), link)))
     return undefined;
   return (
-    `Keep ${say.volume(less.keptL)} of the cake: the wort needs no more, and the shift ` +
+    `Keep ${say.part(less.keptL)} of the cake: the wort needs no more, and the shift ` +
     `falls to ${atMost(Math.abs(shift), 1)} IBU.`
   );
 }

@@ -40,7 +40,7 @@ export const pitchAmount: Rule<Detail> = {
     const { b } = namesOf(link);
     const { ratio, limit, why } = detail;
     const part = link.kept.keptL;
-    const kept = part === undefined ? 'The cake' : `The ${say.volume(part)} of cake that is kept`;
+    const kept = part === undefined ? 'The cake' : `The ${say.part(part)} of cake that is kept`;
     const because = {
       none: `Nothing of the cake is kept, so ${b} would get no yeast.`,
       little: `${kept} holds about ${atMost(ratio, 2)} times the living cells that ${b} needs.`,
@@ -61,7 +61,7 @@ function lessCake(link: LinkState, say: Say): string {
   const litres = link.recommended?.litres;
   return litres === undefined
     ? 'Keep less of the cake.'
-    : `Keep ${say.volume(litres)} of the cake, which is enough at the low end of the estimate.`;
+    : `Keep ${say.part(litres)} of the cake, which is enough at the low end of the estimate.`;
 }
 
 /** Keep more where there is more, else brew less. */
@@ -75,7 +75,7 @@ function moreYeast(link: LinkState, { why }: Detail, say: Say): string {
     whole !== undefined
   )
     return whole >= rules.pitchMind || why === 'none'
-      ? `Keep ${say.volume(recommended.litres)} of the cake.`
+      ? `Keep ${say.part(recommended.litres)} of the cake.`
       : `Keep the whole cake, and add fresh yeast.`;
   const ratio = kept.ratio ?? kept.ratioAtMost ?? 0;
   if (why === 'none' || link.b.volumeL === undefined) return 'Keep a part of the cake.';

@@ -1,16 +1,8 @@
 import type { UnitPrefs } from '../api/units.ts';
 import { formatDay } from '../units/day.ts';
 import { platoFromSg } from '../units/gravity.ts';
-import { format } from '../units/quantity.ts';
+import { DEFAULT_UNITS, format } from '../units/quantity.ts';
 import type { Day } from './vocabulary.ts';
-
-/** How figures are written in sentences where nobody chose otherwise. */
-export const DEFAULT_UNITS: UnitPrefs = {
-  system: 'metric',
-  gravity: 'sg',
-  colour: 'srm',
-  temperature: 'c',
-};
 
 /** Writes the figures of a finding's sentences, with units, in the reader's own. */
 export interface Say {
@@ -23,6 +15,8 @@ export interface Say {
   /** A difference of temperatures. */
   degrees(c: number): string;
   volume(litres: number): string;
+  /** A part of a cake. */
+  part(litres: number): string;
   rate(gramsPerLitre: number): string;
   percent(share: number): string;
   day(day: Day): string;
@@ -38,8 +32,9 @@ export function sayIn(units: UnitPrefs): Say {
     colour: (srm) => format('colour', srm, units),
     bitterness: (ibu) => format('bitterness', ibu, units),
     temperature: (c) => format('temperature', c, units),
-    degrees: (c) => (units.temperature === 'f' ? `${atMost(c * 1.8, 1)} °F` : `${atMost(c, 1)} °C`),
+    degrees: (c) => format('temperatureStep', c, units),
     volume: (litres) => format('volume', litres, units),
+    part: (litres) => format('smallVolume', litres, units),
     rate: (gramsPerLitre) => format('hopRate', gramsPerLitre, units),
     percent: (share) => `${atMost(share * 100, share < 0.1 ? 1 : 0)} %`,
     day: formatDay,
