@@ -1,0 +1,85 @@
+import { queryOptions, useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
+import { useMemo, useSyncExternalStore } from 'react';
+import { useParams } from 'react-router-dom';
+import { board as boardContract, type Board } from '#shared/api/board.ts';
+import type { UnitPrefs } from '#shared/api/units.ts';
+import { api } from '#shared/api/urls.ts';
+import { judgeBoard, type JudgedBoard } from '#shared/chain/judgeBoard.ts';
+import { useUnits } from '../app/useUnits.ts';
+import { request } from './client.ts';
+import { withPending } from './pendingMoves.ts';
+import { pendingOf } from './pendingStore.ts';
+import { boardStillness } from './stillness.ts';
+
+/** A season's board as the server tells it. The only owner of its key. */
+export function boardQuery(slug: string) {
+  const queryKey = ['board', slug] as const;
+  return queryOptions({
+    queryKey,
+    queryFn: async ({ client, signal }): Promise<Board> => {
+      const before = client.getQueryData<Board>(queryKey);
+      const fresh = await request(boardContract, 'GET', api.board(slug), { signal });
+      await boardStillness.quiet();
+      return newest(before, client.getQueryData<Board>(queryKey), fresh);
+    },
+    staleTime: 30_000,
+    refetchOnWindowFocus: 'always',
+    networkMode: 'always',
+  });
+}
+
+/** A move may be answered while a slower read is under way; the read is then the older of the two. */
+function newest(before: Board | undefined, now: Board | undefined, fresh: Board): Board {
+  const isOvertaken = now && now !== before && now.season.revision > fresh.season.revision;
+  return isOvertaken ? now : fresh;
+}
+
+/** Results for one board, kept for as long as that board is: many components ask for the same. */
+const shown = new WeakMap<Board, { pending: readonly unknown[]; board: Board }>();
+const judged = new WeakMap<Board, Map<string, JudgedBoard>>();
+
+function shownBoard(board: Board, pending: Parameters<typeof withPending>[1]): Board {
+  if (pending.length === 0) return board;
+  const known = shown.get(board);
+  if (known && known.pending === pending) return known.board;
+  const result = withPending(board, pending);
+  shown.set(board, { pending, board: result });
+  return result;
+}
+
+function judgedBoard(board: Board, units: UnitPrefs): JudgedBoard {
+  const byUnits = judged.get(board) ?? new Map<string, JudgedBoard>();
+  const key = [units.system, units.gravity, units.colour, units.temperature].join();
+  const result = byUnits.get(key) ?? judgeBoard(board, units);
+  judged.set(board, byUnits.set(key, result));
+  return result;
+}
+
+export function useBoardSlug(): string {
+  const { brewery } = useParams();
+  if (!brewery) throw new Error('A board is shown under the address of its brewery');
+  return brewery;
+}
+
+/** The board of the brewery in the address, with the moves that are still on their way. */
+export function useBoard(): Board {
+  const slug = useBoardSlug();
+  const { data } = useSuspenseQuery(boardQuery(slug));
+  const { get, subscribe } = pendingOf(slug);
+  const pending = useSyncExternalStore(subscribe, get);
+  return shownBoard(data, pending);
+}
+
+/** The same board outside of drawing: what the page shows, or is about to show. */
+export function readBoard(client: QueryClient, slug: string): Board {
+  const board = client.getQueryData(boardQuery(slug).queryKey);
+  if (!board) throw new Error('The board has not arrived yet');
+  return shownBoard(board, pendingOf(slug).get());
+}
+
+/** Every verdict of the board, in the person's units. */
+export function useJudged(): JudgedBoard {
+  const board = useBoard();
+  const units = useUnits();
+  return useMemo(() => judgedBoard(board, units), [board, units]);
+}

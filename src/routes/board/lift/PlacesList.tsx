@@ -1,0 +1,96 @@
+import clsx from 'clsx';
+import { memo, useState } from 'react';
+import type { Gap } from '#shared/chain/gaps.ts';
+import type { BoardFacts } from '#shared/chain/board.ts';
+import { VerdictPill } from '../../../components/drawn/VerdictPill.tsx';
+import { Button } from '../../../components/ui/Button.tsx';
+import { isOpen } from './places.ts';
+import { gapDay, gapWord, placeTitle, placeWords, reasonWords } from './words.ts';
+
+interface PlacesListProps {
+  board: BoardFacts;
+  batchId: string;
+  ranked: readonly Gap[];
+  /** The place that the keys or the pointer are on. */
+  over: string | null;
+  onPut: (gap: Gap) => void;
+}
+
+/** As many as can be read; the rest opens on demand, or when the keys walk there. */
+const SHOWN = 12;
+
+/** Ranked places as buttons: all that the gaps on the shelves say, without a drag. */
+export function PlacesList({ board, batchId, ranked, over, onPut }: PlacesListProps) {
+  const [all, setAll] = useState(false);
+  const walkedTo = ranked.findIndex((gap) => gap.key === over) + 1;
+  const shown = all ? ranked : ranked.slice(0, Math.max(SHOWN, walkedTo));
+  const rest = ranked.length - shown.length;
+  return (
+    <>
+      <ol className="-mx-3.5 list-none">
+        {shown.map((gap) => (
+          <PlaceRow
+            key={gap.key}
+            {...{ gap, onPut }}
+            title={placeTitle(board, gap)}
+            where={placeWords(board, gap, batchId)}
+            reason={reasonWords(board, gap)}
+            isOver={gap.key === over}
+          />
+        ))}
+      </ol>
+      {rest > 0 && (
+        <Button look="text" size="small" className="mt-1" onClick={() => setAll(true)}>
+          Show {rest} more {rest === 1 ? 'place' : 'places'}
+        </Button>
+      )}
+    </>
+  );
+}
+
+interface PlaceRowProps {
+  gap: Gap;
+  title: string;
+  where: string;
+  reason: string;
+  isOver: boolean;
+  onPut: (gap: Gap) => void;
+}
+
+const PlaceRow = memo(function PlaceRow(props: PlaceRowProps) {
+  const { gap, title, where, reason, isOver, onPut } = props;
+  return (
+    <li
+      ref={(row) => (isOver ? row?.scrollIntoView({ block: 'nearest' }) : undefined)}
+      className={clsx(
+        'flex items-center gap-3 px-3.5 py-2.5',
+        gap.best
+          ? 'mb-1 rounded-xl border-2 border-bottle bg-pour-l'
+          : 'border-b border-line last:border-b-0',
+        isOver && 'rounded-xl bg-bottle-l outline-3 -outline-offset-2 outline-bottle',
+      )}
+    >
+      <div className="min-w-0 grow text-small leading-[1.3] text-ink2">
+        <p className="flex flex-wrap items-center gap-x-2.5">
+          <VerdictPill verdict={gap.verdict} word={gapWord(gap)} />
+          <span className="font-semibold">{gapDay(gap)}</span>
+          {gap.best && <b className="text-bottle">Best gap</b>}
+        </p>
+        <p className="mt-1 font-bold text-ink [overflow-wrap:anywhere]">{title}</p>
+        <p>{reason}</p>
+      </div>
+      {isOpen(gap) ? (
+        <Button
+          size="small"
+          look={gap.best ? 'first' : 'plain'}
+          aria-label={`Put here: ${where}`}
+          onClick={() => onPut(gap)}
+        >
+          Put here
+        </Button>
+      ) : (
+        <span className="shrink-0 text-small">here now</span>
+      )}
+    </li>
+  );
+});

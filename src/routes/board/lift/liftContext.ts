@@ -1,0 +1,60 @@
+import { createContext, use, useSyncExternalStore } from 'react';
+import type { Gap } from '#shared/chain/gaps.ts';
+import type { Lifting } from './lifting.ts';
+import type { LiftState, LiftStore } from './liftState.ts';
+import type { Putting } from './putting.ts';
+
+export interface LiftMachine {
+  store: LiftStore;
+  lifting: Lifting;
+  putting: Putting;
+}
+
+/** Never changes while the board is open, so that nothing is drawn anew through it. */
+export const LiftContext = createContext<LiftMachine | null>(null);
+
+export function useLiftMachine(): LiftMachine {
+  const machine = use(LiftContext);
+  if (!machine) throw new Error('Lifting needs a LiftProvider around it');
+  return machine;
+}
+
+/** One fact of the lift; who asks is drawn anew only when that fact changes. */
+export function useLiftState<T>(select: (state: LiftState) => T): T {
+  const { store } = useLiftMachine();
+  return useSyncExternalStore(store.subscribe, () => select(store.get()));
+}
+
+export const useIsLifted = (batchId: string) =>
+  useLiftState((state) => state.lifted?.batchId === batchId);
+
+/** Which of the two panels the board should show beside it, if any. */
+export const useLiftPanel = (): 'places' | 'changes' | null =>
+  useLiftState((state) => {
+    if (state.lifted) return 'places';
+    return state.change || state.refusal ? 'changes' : null;
+  });
+
+const NO_GAPS: ReadonlyMap<string, Gap> = new Map();
+
+/** Everything of a lift. For the parts of the board that are many, take `useIsLifted`. */
+export function useLift() {
+  const machine = useLiftMachine();
+  const lifted = useLiftState((state) => state.lifted);
+  return {
+    lifted: lifted?.batchId ?? null,
+    gaps: lifted?.gaps ?? NO_GAPS,
+    lift: machine.lifting.lift,
+    cancel: machine.lifting.cancel,
+    drop: (key: string) => drop(machine, key),
+  };
+}
+
+/** Puts the lifted batch into a place, or back where that place is not open. */
+export function drop({ store, lifting, putting }: LiftMachine, key: string | null) {
+  const { lifted } = store.get();
+  const gap = key === null ? undefined : lifted?.gaps.get(key);
+  if (!lifted || !gap) return lifting.cancel();
+  lifting.release();
+  putting.put(lifted.batchId, gap);
+}

@@ -1,0 +1,63 @@
+import { indexBoard, type BoardFacts } from '#shared/chain/board.ts';
+import type { Gap } from '#shared/chain/gaps.ts';
+import type { Intent } from './keys.ts';
+
+export const gapKey = (chainId: string, afterBatchId: string | null) =>
+  `${chainId}:${afterBatchId ?? 'first'}`;
+
+/** Keys of every place, shelf by shelf from the top, then a new shelf and the bench. */
+function everyKey(board: BoardFacts): string[] {
+  const { chains, batchesOf } = indexBoard(board);
+  const onShelves = chains.flatMap((chain) => [
+    gapKey(chain.id, null),
+    ...batchesOf(chain.id).map((batch) => gapKey(chain.id, batch.id)),
+  ]);
+  return [...onShelves, 'new', 'bench'];
+}
+
+/** True where the lifted batch can be put down. */
+export const isOpen = (gap: Gap) => gap.locked === null && !gap.here;
+
+/** The places that the keys walk. Locked ones are left out: nothing can be put there. */
+export interface Walk {
+  alongShelves: readonly string[];
+  ranked: readonly string[];
+  /** How many places of `alongShelves` lie before the one that the batch was lifted from. */
+  start: number;
+}
+
+export function walkOf(board: BoardFacts, ranked: readonly Gap[], batchId: string): Walk {
+  const open = new Set(ranked.filter(isOpen).map((gap) => gap.key));
+  const keys = everyKey(board);
+  const chainId = board.batches.find((batch) => batch.id === batchId)?.chainId ?? null;
+  const from = keys.indexOf(chainId === null ? 'bench' : gapKey(chainId, batchId));
+  return {
+    alongShelves: keys.filter((key) => open.has(key)),
+    ranked: ranked.map((gap) => gap.key).filter((key) => open.has(key)),
+    start: keys.slice(0, from).filter((key) => open.has(key)).length,
+  };
+}
+
+const at = (keys: readonly string[], index: number) =>
+  keys[Math.min(Math.max(index, 0), keys.length - 1)] ?? null;
+
+/** The place that a step leads to; at either end of a row it stays where it is. */
+export function step(walk: Walk, over: string | null, intent: Intent): string | null {
+  const { alongShelves, ranked, start } = walk;
+  const here = over === null ? -1 : alongShelves.indexOf(over);
+  switch (intent) {
+    case 'next':
+      return at(alongShelves, here === -1 ? start : here + 1);
+    case 'previous':
+      return at(alongShelves, (here === -1 ? start : here) - 1);
+    case 'worse':
+      return at(ranked, over === null ? 0 : ranked.indexOf(over) + 1);
+    case 'better':
+      return at(ranked, over === null ? 0 : ranked.indexOf(over) - 1);
+    case 'best':
+      return at(ranked, 0);
+    case 'put-down':
+    case 'put-back':
+      return over;
+  }
+}

@@ -1,0 +1,18 @@
+import type { Board } from '#shared/api/board.ts';
+import type { Mover } from '../../../api/moves.ts';
+
+/** What lifting needs of the page around it. */
+export interface LiftPorts extends Mover {
+  /** The board as it is shown now. */
+  board(): Board;
+  isOnline(): boolean;
+  /** Keeps what arrives from elsewhere off the board; the answer ends it. */
+  holdStill(): () => void;
+  say(words: string): void;
+  /** Gives the focus back to a batch's handle once it is drawn. */
+  focusBatch(batchId: string): void;
+  newId(): string;
+  /** Keys of all gaps on the page, nearest to the batch first. */
+  gapsAround(batchId: string): string[];
+  nextFrame(run: () => void): void;
+}
