@@ -7,7 +7,7 @@ import { Sentence } from './say.mjs';
 /**
  * A file that says which process works in a folder. The process's birth stands in it too, so that
  * neither a killed process nor another one that was given its number keeps anybody out.
- * @typedef {{pid: number, birth: string | null, what: string, url?: string}} Holder
+ * @typedef {{pid: number, birth: string | null, what: string, url?: string, stopping?: boolean}} Holder
  * @typedef {{note: (more: Partial<Holder>) => void, release: () => void}} Lock
  */
 
@@ -39,15 +39,22 @@ export function tryLock(path, what) {
 }
 
 /**
+ * Takes it at once, or after a holder that is just stopping; refuses when somebody means to keep it.
  * @param {string} path
  * @param {string} what
  * @param {(holder: Holder) => string} refusal
- * @returns {Lock}
+ * @param {number} [graceMs] how long a holder may take to say that it is stopping
+ * @returns {Promise<Lock>}
  */
-export function takeLock(path, what, refusal) {
-  const got = tryLock(path, what);
-  if ('pid' in got) throw new Sentence(refusal(got));
-  return got;
+export async function takeLock(path, what, refusal, graceMs = 1500) {
+  const started = Date.now();
+  for (;;) {
+    const got = tryLock(path, what);
+    if (!('pid' in got)) return got;
+    const patience = got.stopping === true ? 20_000 : graceMs;
+    if (Date.now() - started > patience) throw new Sentence(refusal(got));
+    await pause(100);
+  }
 }
 
 /**

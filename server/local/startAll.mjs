@@ -6,6 +6,7 @@ import { removeCluster, startCluster } from './cluster.mjs';
 import { takeLock } from './lock.mjs';
 import { ensurePackages } from './packages.mjs';
 import { home, root } from './places.mjs';
+import { pause } from './run.mjs';
 import { confirm, readArguments, say, Sentence } from './say.mjs';
 import { sessionKeys } from './secrets.mjs';
 import { lastLines, startServer } from './serverProcess.mjs';
@@ -26,7 +27,7 @@ export async function start(args) {
   const options = readArguments(args, ['--dev', '--reset', '--yes'], 0);
   const dev = options.has('--dev');
   const stopAsked = onceAsked();
-  const lock = takeLock(join(home, 'lock'), 'npm start', (holder) =>
+  const lock = await takeLock(join(home, 'lock'), 'npm start', (holder) =>
     holder.url === undefined
       ? `Another ${holder.what} is at work in ${home} (process ${holder.pid}).`
       : `Barmkin already runs here: ${holder.url} (process ${holder.pid}).`,
@@ -47,6 +48,7 @@ export async function start(args) {
     if (why === 'ended')
       say(`The server ended by itself. Its log, ${logFile}, ends:\n${lastLines(logFile)}`);
     else say('Stopping');
+    lock.note({ stopping: true });
     await server.stop();
     return why === 'ended' ? 1 : 0;
   } finally {
@@ -86,21 +88,32 @@ async function reset(yes) {
   say('Deleted; starting anew');
 }
 
-/** Said before the long steps, not after them. */
+/** Said before the long steps, not after them. The server of a killed start may need a moment to leave. */
 async function refuseTakenPort() {
   const port = Number(process.env.PORT || 4600);
-  const host = process.env.HOST || '127.0.0.1';
-  if (!Number.isInteger(port)) return;
-  const code = await new Promise((resolve) => {
-    const probe = createServer();
-    probe.on('error', (/** @type {NodeJS.ErrnoException} */ error) => resolve(error.code));
-    probe.listen(port, host, () => probe.close(() => resolve(null)));
-  });
-  if (code === 'EADDRINUSE') {
-    throw new Sentence(
-      `Port ${port} is taken by another program: PORT=${port + 1} npm start uses the next one.`,
-    );
+  if (!Number.isInteger(port) || port < 0 || port > 65_535) return;
+  for (let tries = 1; await isTaken(port, process.env.HOST || '127.0.0.1'); tries += 1) {
+    if (tries < 15) await pause(200);
+    else
+      throw new Sentence(
+        `Port ${port} is taken by another program: PORT=${port + 1} npm start uses the next one.`,
+      );
   }
+}
+
+/**
+ * @param {number} port
+ * @param {string} host
+ * @returns {Promise<boolean>}
+ */
+function isTaken(port, host) {
+  return new Promise((resolve) => {
+    const probe = createServer();
+    probe.on('error', (/** @type {NodeJS.ErrnoException} */ error) =>
+      resolve(error.code === 'EADDRINUSE'),
+    );
+    probe.listen(port, host, () => probe.close(() => resolve(false)));
+  });
 }
 
 /** Waits for Ctrl-C and its kin. A second one does not hurry the first: everything is to be stopped in order. */
@@ -114,6 +127,25 @@ function onceAsked() {
         resolve(signal);
       });
     }
+    whenOrphaned(() => {
+      asked = true;
+      resolve('npm ended');
+    });
   });
   return { promise, already: () => asked };
+}
+
+/**
+ * When npm is killed, nobody is left to press Ctrl-C: then a start ends too.
+ * @param {() => void} then
+ */
+function whenOrphaned(then) {
+  if (process.env.npm_lifecycle_event === undefined) return;
+  const parent = process.ppid;
+  const watch = setInterval(() => {
+    if (process.ppid === parent) return;
+    clearInterval(watch);
+    then();
+  }, 300);
+  watch.unref();
 }

@@ -21,8 +21,8 @@ function hold(pid: number, birth: string | null): void {
   );
 }
 
-test('a free lock is taken, says who has it, and is given back', () => {
-  const lock = takeLock(path, 'a test', () => 'taken');
+test('a free lock is taken, says who has it, and is given back', async () => {
+  const lock = await takeLock(path, 'a test', () => 'taken');
   lock.note({ url: 'http://127.0.0.1:1' });
   expect(readHolder(path)).toMatchObject({
     pid: process.pid,
@@ -33,14 +33,14 @@ test('a free lock is taken, says who has it, and is given back', () => {
   expect(readdirSync(folder)).toEqual([]);
 });
 
-test('a lock of a process at work is refused with what it said', () => {
+test('a lock of a process at work is refused with what it said', async () => {
   const child = spawn(process.execPath, ['-e', 'setTimeout(() => {}, 60_000)']);
   try {
     const pid = child.pid ?? 0;
     hold(pid, birthOf(pid));
-    expect(() => takeLock(path, 'a test', (holder) => `it runs at ${holder.url}`)).toThrow(
-      'it runs at http://127.0.0.1:4600',
-    );
+    await expect(
+      takeLock(path, 'a test', (holder) => `it runs at ${holder.url}`, 50),
+    ).rejects.toThrow('it runs at http://127.0.0.1:4600');
   } finally {
     child.kill('SIGKILL');
   }
