@@ -35,7 +35,7 @@ const scaled = (
 });
 
 const roughly = (size: number): number => (size < 10 ? 2 : size < 100 ? 1 : 0);
-const finely = (size: number): number => (size < 1 ? 3 : size < 10 ? 2 : 1);
+const finely = (size: number): number => (size < 0.1 ? 3 : 2);
 const tenths = (): number => 1;
 const tenthsIfSmall = (size: number): number => (size < 10 ? 1 : 0);
 

@@ -9,6 +9,16 @@
 const LN_RATE_AT_0C = -4.319;
 const LN_RATE_PER_C = 0.107;
 
+const rate = (celsius: number): number => Math.exp(LN_RATE_AT_0C + LN_RATE_PER_C * celsius);
+
 /** Share of living cells left, 0–1, after `days` (below 0 counts as 0) at a temperature in °C. */
 export const survival = (days: number, celsius: number): number =>
-  Math.exp(-Math.exp(LN_RATE_AT_0C + LN_RATE_PER_C * celsius) * Math.max(0, days));
+  Math.exp(-rate(celsius) * Math.max(0, days));
+
+const WARM_FROM_C = 10;
+
+/** Within what the share may lie: the uncertainty of the half-life, chosen to cover what is published. */
+export function survivalRange(days: number, celsius: number): { low: number; high: number } {
+  const [shorter, longer] = celsius >= WARM_FROM_C ? [2, 3] : [2.5, 10];
+  return { low: survival(days * shorter, celsius), high: survival(days / longer, celsius) };
+}
