@@ -123,7 +123,7 @@ export const checkChainRequest = alsoWhenFaulty(
       firstGeneration: maybe(z.number().int().min(1).max(60)),
       /** Highest original gravity of beers on this yeast before the first batch. */
       strongestEarlierOg: maybe(f.originalGravity),
-      houseRules: orderedHouseRules().optional(),
+      houseRules: maybe(orderedHouseRules()),
       batches: z
         .array(batch)
         .min(1, 'Give at least one batch')

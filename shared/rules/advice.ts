@@ -52,7 +52,7 @@ const darkUnseen: Piece = (link, { a, b }) => {
   if (toHundredth(toHundredth(earlier.srm) - toHundredth(later.srm)) < rules.darkSrm) return null;
   const shift = link.colourShift;
   return shift !== undefined && shift < rules.colourShiftMind
-    ? `${a} is darker than ${b}, though nobody will see it in the glass (ΔE00 ${atMost(shift, 1)}).`
+    ? `${a} is darker than ${b}, though nobody will see it in the glass (a difference of ${atMost(shift, 1)}).`
     : null;
 };
 

@@ -72,7 +72,10 @@ const SAID: Record<Why, { title: string; because: string }> = {
     title: 'Many dead cells',
     because: 'A cell count found many dead cells in the cake of {a}.',
   },
-  'with-care': { title: 'Cake wants care', because: 'The cake of {a} was judged “with care”.' },
+  'with-care': {
+    title: 'Cake wants care',
+    because: 'The cake of {a} was judged to be used with care.',
+  },
   unjudged: {
     title: 'Cake not judged',
     because: 'The pour is due within a day, and nobody has judged the cake of {a}.',

@@ -53,7 +53,7 @@ export const fermentationTemperature: Rule<Detail> = {
           : [measure('New beer', toTenth(link.b.fermentC ?? 0), '°C', outB > 0 ? max : min)]),
       ],
       basis: own
-        ? 'The yeast’s own range'
+        ? 'Own range of the yeast'
         : `Usual range of ${link.yeast.kind} yeast: Handbook of Brewing, 3rd ed.`,
     };
   },

@@ -39,7 +39,7 @@ export const hopsInCake: Rule<Detail> = {
         measure('Dry hops on the cake', load, 'g/L', standing === 'hold' ? heldAt : rules.hopsMind),
       ],
       basis:
-        'Harvesting before dry hopping is yeast makers’ advice; the limits are common practice.',
+        'Harvesting before dry hopping: advice of a yeast maker; the limits are common practice.',
     };
   },
 };

@@ -33,17 +33,17 @@ export const lightToDark: Rule<Detail> = {
   },
 
   describe({ standing, detail: { srmA, srmB, shift } }, link, say) {
-    const { a, b, A, B } = namesOf(link);
+    const { a, b, A } = namesOf(link);
     const { darkSrm, colourShiftMind, colourShiftHold } = link.rules;
     const blended = link.blend.srm ?? srmB;
     return {
       title: 'Dark before light',
       because:
         `${A} has ${say.colour(srmA)} and ${b} ${say.colour(srmB)}: the beer in the cake moves ` +
-        `${B === b ? b : 'it'} to ${say.colour(blended)}, a shift of ΔE00 ${atMost(shift, 1)} in the glass.`,
+        `it to ${say.colour(blended)}, a difference of ${atMost(shift, 1)} in the glass.`,
       do: lessCake(link, standing, say) ?? `Brew ${b} before ${a}, or give it fresh yeast.`,
       measures: [
-        measure('Colour of the cake’s beer', srmA, 'SRM', toHundredth(srmB + darkSrm)),
+        measure('Colour of the earlier beer', srmA, 'SRM', toHundredth(srmB + darkSrm)),
         measure('Colour of the new beer', srmB, 'SRM'),
         measure('Colour as poured', toHundredth(blended), 'SRM'),
         measure(
@@ -54,7 +54,7 @@ export const lightToDark: Rule<Detail> = {
         ),
       ],
       basis:
-        'Order: common practice. Colour: beer’s mean spectrum (deLange 2016, from memory) seen ' +
+        'Order: common practice. Colour: mean spectrum of beer (deLange 2016, from memory) seen ' +
         'through 5 cm and compared by CIEDE2000; about 1 is just visible.',
     };
   },
@@ -72,7 +72,7 @@ function lessCake(link: LinkState, now: Graded, say: Say): string | undefined {
   const shift = link.shiftTo(linkBlend(link.a, link.b, less.retainedL).srm);
   if (shift === undefined || !milder(now, standingAt(shift, link))) return undefined;
   return (
-    `Keep ${say.part(less.keptL)} of the cake: the wort needs no more, and the shift ` +
-    `falls to ΔE00 ${atMost(shift, 1)}.`
+    `Keep ${say.part(less.keptL)} of the cake: the wort needs no more, and the ` +
+    `difference falls to ${atMost(shift, 1)}.`
   );
 }

@@ -79,7 +79,7 @@ function measures(standing: Graded, { ibuA, ibuB, shift }: Detail, { rules }: Li
   const gapLimit = held ? rules.bitterGapHold : rules.bitterGapMind;
   const shiftLimit = held ? rules.bitterShiftHold : rules.bitterShiftMind;
   return [
-    measure('Bitterness of the cake’s beer', ibuA, 'IBU', alone ? null : ibuB + gapLimit),
+    measure('Bitterness of the earlier beer', ibuA, 'IBU', alone ? null : ibuB + gapLimit),
     measure('Bitterness of the new beer', ibuB, 'IBU'),
     measure('Bitterness shift', shift, 'IBU', alone ? rules.bitterShiftAlone : shiftLimit),
   ];

@@ -41,7 +41,7 @@ export const strongBeforeWeak: Rule<Detail> = {
         ),
       ],
       basis:
-        'Rising strength and flavour: Brew Your Own, “Repitching yeast”; the limits are common practice.',
+        'Rising strength and flavour: Brew Your Own on repitching yeast; the limits are common practice.',
     };
   },
 };
