@@ -21,6 +21,8 @@ export interface RowFormProps<R extends Row, C extends FieldValues & { id: strin
   keepsTyped: boolean;
   /** What the fields show at first, with the row's id or a new one. */
   values: FieldValues & { id: string };
+  /** Turns what the fields hold into what the contract wants, where the two differ. */
+  shape?: (body: Record<string, unknown>) => Record<string, unknown>;
   create: (body: C) => Promise<unknown>;
   patch: (change: {
     id: string;
@@ -47,7 +49,10 @@ function useContractForm<R extends Row, C extends FieldValues & { id: string }>(
   props: RowFormProps<R, C>,
 ) {
   return useForm<FieldValues, unknown, C>({
-    resolver: contractResolver<FieldValues, C>(props.contract, { typed: props.keepsTyped }),
+    resolver: contractResolver<FieldValues, C>(props.contract, {
+      typed: props.keepsTyped,
+      shape: props.shape,
+    }),
     defaultValues: props.values as DefaultValues<FieldValues>,
   });
 }

@@ -17,9 +17,12 @@ export interface SelectFieldProps {
   /** Offers a first entry that stands for nothing chosen (null). */
   none?: string;
   className?: string;
+  /** Told of a choice, after the form knows it. */
+  onPicked?: (value: string | null) => void;
 }
 
-export function SelectField({ name, label, options, hint, none, className }: SelectFieldProps) {
+export function SelectField(props: SelectFieldProps) {
+  const { name, label, options, hint, none, className, onPicked } = props;
   const state = useField(name, hint !== undefined);
   const { field } = useController({ name });
   return (
@@ -29,7 +32,11 @@ export function SelectField({ name, label, options, hint, none, className }: Sel
         {...state.aria}
         {...field}
         value={(field.value as string | null) ?? ''}
-        onChange={(event) => field.onChange(event.target.value || (none === undefined ? '' : null))}
+        onChange={(event) => {
+          const value = event.target.value || (none === undefined ? '' : null);
+          field.onChange(value);
+          onPicked?.(value || null);
+        }}
         className={fieldClass(state.message !== undefined)}
       >
         {none !== undefined && <option value="">{none}</option>}

@@ -6,6 +6,8 @@ import { collect } from './written.ts';
 export interface ContractOptions {
   /** The contract has a `typed` record, which the number fields fill. */
   typed?: boolean;
+  /** Turns what the fields hold into what the contract wants, where the two differ. */
+  shape?: ((body: Record<string, unknown>) => Record<string, unknown>) | undefined;
 }
 
 /**
@@ -14,12 +16,12 @@ export interface ContractOptions {
  */
 export function contractResolver<Values extends FieldValues, Output extends FieldValues>(
   schema: z.ZodType<Output>,
-  { typed: hasTyped = false }: ContractOptions = {},
+  { typed: hasTyped = false, shape = (body) => body }: ContractOptions = {},
 ): Resolver<Values, unknown, Output> {
   return (values, _context, options) => {
     const { body, typed, faults } = collect(values);
-    const whole = hasTyped && typeof body === 'object' ? { ...body, typed } : body;
-    const parsed = schema.safeParse(whole);
+    const shaped = shape(body as Record<string, unknown>);
+    const parsed = schema.safeParse(hasTyped ? { ...shaped, typed } : shaped);
     const flat: Record<string, { type: string; message: string }> = {};
     if (!parsed.success)
       for (const issue of parsed.error.issues)
