@@ -1,7 +1,7 @@
 import { isPencilled, type BoardFacts, type BoardIndex } from './board.ts';
 import { rankGaps, weighGaps, type Gap, type WeighedGap } from './gaps.ts';
 import { chainsThatCanHelp } from './reachOfMoves.ts';
-import { scalesOf, type ChangedLink, type Scales } from './weigh.ts';
+import { Scales, type ChangedLink } from './weigh.ts';
 
 /** Links of the season by their verdict. */
 export interface Tally {
@@ -23,7 +23,7 @@ export interface BestMove {
  * move lowers them. The bench is no answer: it only puts the beer away.
  */
 export function bestMove(board: BoardFacts): BestMove | null {
-  const scales = scalesOf(board);
+  const scales = new Scales(board);
   const { index } = scales.sight;
   const before = seasonOf(scales);
   if (before.holds + before.minds === 0) return null;
@@ -92,11 +92,12 @@ function isBetter(option: Option, than: Option): boolean {
   return difference > 0;
 }
 
-function seasonOf({ sight, standing }: Scales): Tally {
+function seasonOf(scales: Scales): Tally {
   const tally = { holds: 0, minds: 0 };
-  for (const chain of sight.index.chains)
-    for (const { id } of sight.index.batchesOf(chain.id)) {
-      const verdict = standing(id)?.verdict;
+  const { index } = scales.sight;
+  for (const chain of index.chains)
+    for (const { id } of index.batchesOf(chain.id)) {
+      const verdict = scales.standing(id)?.verdict;
       if (verdict === 'hold') tally.holds += 1;
       if (verdict === 'mind') tally.minds += 1;
     }

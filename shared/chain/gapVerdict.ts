@@ -1,4 +1,5 @@
 import type { Verdict } from '../rules/vocabulary.ts';
+import type { Judgement } from './linkMemo.ts';
 import { isWorse, type ChangedLink } from './weigh.ts';
 
 /** A link that the brewer is told of at the gap: it comes about by the drop, or gets worse by it. */
@@ -12,29 +13,39 @@ export const differs = ({ relinked, before, after }: ChangedLink): boolean =>
   before?.holds !== after?.holds ||
   before?.minds !== after?.minds;
 
-export interface GapVerdict {
-  verdict: Verdict;
-  holds: number;
-  minds: number;
-  reasons: string[];
-  colourShift: number | null;
+/**
+ * The worst over some links as they would be. The short reasons and the colour shift are worked
+ * out when they are first asked for: a lifted batch has hundreds of gaps, and few are read.
+ */
+export class GapVerdict {
+  readonly verdict: Verdict;
+  readonly holds: number;
+  readonly minds: number;
+  readonly #links: readonly Judgement[];
+
+  constructor(links: readonly ChangedLink[]) {
+    this.#links = links.flatMap((link) => link.after ?? []);
+    this.holds = sum(this.#links, (link) => link.holds);
+    this.minds = sum(this.#links, (link) => link.minds);
+    this.verdict = this.holds > 0 ? 'hold' : this.minds > 0 ? 'mind' : 'pour';
+  }
+
+  /** Titles, worst first. */
+  reasons(): string[] {
+    const worstFirst = this.#links.toSorted((a, b) => b.holds - a.holds || b.minds - a.minds);
+    return [...new Set(worstFirst.flatMap((link) => link.reason ?? []))];
+  }
+
+  /** Largest ΔE00; 0 without a link; null where one is not known. */
+  colourShift(): number | null {
+    let largest = 0;
+    for (const { deltaE00 } of this.#links) {
+      if (deltaE00 === null) return null;
+      largest = Math.max(largest, deltaE00);
+    }
+    return largest;
+  }
 }
 
-/** The worst over some links as they would be, with the short reasons, worst first. */
-export function gapVerdict(links: readonly ChangedLink[]): GapVerdict {
-  const after = links.flatMap((link) => link.after ?? []);
-  const holds = after.reduce((sum, link) => sum + link.holds, 0);
-  const minds = after.reduce((sum, link) => sum + link.minds, 0);
-  const worstFirst = after.toSorted((a, b) => b.holds - a.holds || b.minds - a.minds);
-  const reasons = worstFirst.flatMap((link) =>
-    link.verdict === 'pour' ? [] : (link.reason ?? []),
-  );
-  const shifts = after.map((link) => link.deltaE00);
-  return {
-    verdict: holds > 0 ? 'hold' : minds > 0 ? 'mind' : 'pour',
-    holds,
-    minds,
-    reasons: [...new Set(reasons)],
-    colourShift: shifts.includes(null) ? null : Math.max(0, ...shifts.map((shift) => shift ?? 0)),
-  };
-}
+const sum = <T>(all: readonly T[], figure: (one: T) => number): number =>
+  all.reduce((total, one) => total + figure(one), 0);

@@ -3,9 +3,9 @@ import type { Day, Verdict } from '../rules/vocabulary.ts';
 import { isPencilled, order, type BoardFacts } from './board.ts';
 import { nextBrewDay } from './dates.ts';
 import { placesFor, type Place } from './gapPlaces.ts';
-import { countsAtGap, differs, gapVerdict } from './gapVerdict.ts';
+import { countsAtGap, differs, GapVerdict } from './gapVerdict.ts';
 import { planMove, type Lock } from './plan.ts';
-import { scalesOf, type ChangedLink, type Scales } from './weigh.ts';
+import { Scales, type ChangedLink } from './weigh.ts';
 
 /** A place for a lifted batch, judged as the drop would make it. */
 export interface Gap {
@@ -44,9 +44,15 @@ export interface Gap {
  * vessels). Nothing for a batch that is not pencilled.
  */
 export function judgeGaps(board: BoardFacts, batchId: string): Gap[] {
-  const gaps = weighGaps(scalesOf(board), batchId).map(({ gap }) => gap);
+  const gaps = weighGaps(new Scales(board), batchId).map(({ gap }) => gap);
   const best = bestOf(gaps);
-  return gaps.map((gap) => (gap === best ? { ...gap, best: true } : gap));
+  if (best) best.best = true;
+  return gaps;
+}
+
+export interface WeighedGap {
+  gap: Gap;
+  changed: readonly ChangedLink[];
 }
 
 /** The same without the best marked, with each link that a drop touches. */
@@ -65,44 +71,58 @@ export function weighGaps(
     .map((place) => gapAt(scales, batch, place, ownDay));
 }
 
-export interface WeighedGap {
-  gap: Gap;
-  changed: readonly ChangedLink[];
-}
-
 function gapAt(scales: Scales, batch: Batch, place: Place, ownDay: () => Day | null): WeighedGap {
-  const { key, toChainId, afterId, here, locked } = place;
-  const empty = { key, toChainId, afterBatchId: afterId, here, locked, best: false };
-  if (locked) {
-    const nothing = { brewOn: null, generation: null, changes: [] };
-    return { gap: { ...empty, ...gapVerdict([]), ...nothing }, changed: [] };
-  }
-  if (here) return { gap: { ...empty, ...asItStands(scales, batch) }, changed: [] };
+  if (place.locked) return { gap: gapOf(place, [], null, null), changed: [] };
+  if (place.here) return { gap: asItStands(scales, batch, place), changed: [] };
   const plan = planMove(scales.sight.index, batch, place, 'pull', ownDay);
   const { changed, descent } = scales.weigh(plan);
   const row = plan.draft.batch(batch.id) ?? batch;
-  const gap = {
-    ...empty,
-    ...gapVerdict(changed.filter(countsAtGap)),
-    brewOn: row.brewOn,
-    generation: row.chainId === null ? null : descent(row).generation,
+  const generation = row.chainId === null ? null : descent(row).generation;
+  return { gap: gapOf(place, changed, row.brewOn, generation), changed };
+}
+
+/** The place where the batch is: the links before and behind it as they are. */
+function asItStands(scales: Scales, batch: Batch, place: Place): Gap {
+  const { sight } = scales;
+  const mates = batch.chainId === null ? [] : sight.index.batchesOf(batch.chainId);
+  const next = mates[mates.findIndex((mate) => mate.id === batch.id) + 1];
+  const links = [batch.id, ...(next ? [next.id] : [])].map((laterId) => {
+    const now = scales.standing(laterId);
+    return { laterId, before: now, after: now, relinked: true };
+  });
+  const generation = batch.chainId === null ? null : sight.descent(batch).generation;
+  return { ...gapOf(place, links, batch.brewOn, generation), changes: [] };
+}
+
+function gapOf(
+  place: Place,
+  changed: readonly ChangedLink[],
+  brewOn: Day | null,
+  generation: number | null,
+): Gap {
+  const worst = new GapVerdict(changed.filter(countsAtGap));
+  return {
+    key: place.key,
+    toChainId: place.toChainId,
+    afterBatchId: place.afterId,
+    here: place.here,
+    locked: place.locked,
+    verdict: worst.verdict,
+    holds: worst.holds,
+    minds: worst.minds,
+    brewOn,
+    get reasons() {
+      return worst.reasons();
+    },
+    get colourShift() {
+      return worst.colourShift();
+    },
+    best: false,
+    generation,
     changes: changed
       .filter(differs)
       .map(({ laterId, after }) => ({ laterId, verdict: after?.verdict ?? 'pour' })),
   };
-  return { gap, changed };
-}
-
-/** The place where the batch is: the links before and behind it as they are. */
-function asItStands({ sight, standing }: Scales, batch: Batch) {
-  const mates = batch.chainId === null ? [] : sight.index.batchesOf(batch.chainId);
-  const next = mates[mates.findIndex((mate) => mate.id === batch.id) + 1];
-  const links = [batch.id, ...(next ? [next.id] : [])].map((laterId) => {
-    const now = standing(laterId);
-    return { laterId, before: now, after: now, relinked: true };
-  });
-  const generation = batch.chainId === null ? null : sight.descent(batch).generation;
-  return { ...gapVerdict(links), brewOn: batch.brewOn, generation, changes: [] };
 }
 
 /**

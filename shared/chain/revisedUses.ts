@@ -1,43 +1,77 @@
+import type { Batch } from '../api/batch.ts';
 import type { Sight } from './boardLink.ts';
 import type { Draft } from './draft.ts';
 import { stayOf, useOfVessel, vesselIdOf, type Stay, type VesselUse } from './vesselUse.ts';
 
-/** What changes of the vessels' use in a draft: by batch, only where it differs from the board. */
-export function revisedUses(
-  { index, stays, use }: Pick<Sight, 'index' | 'stays' | 'use'>,
-  draft: Draft,
-): Map<string, VesselUse> {
-  const revised = new Map<string, VesselUse>();
-  for (const [vesselId, news] of changedStays(index, draft)) {
-    const kept = (stays.get(vesselId) ?? []).filter((stay) => !news.gone.has(stay.batchId));
-    const cleanedOn = index.vessels.get(vesselId)?.cleanedOn ?? null;
-    for (const [id, now] of useOfVessel([...kept, ...news.come], cleanedOn)) {
-      const before = use(id);
-      const same =
-        (before?.takenBy === undefined) === (now.takenBy === undefined) &&
-        before?.beersSinceCleaning === now.beersSinceCleaning;
-      if (!same) revised.set(id, now);
-    }
-  }
-  return revised;
+interface Change {
+  /** Batches whose stay ends or changes. */
+  gone: Set<string>;
+  /** Stays that come, or as they are changed. */
+  come: Stay[];
+  key: string;
 }
 
-/** By vessel: stays that go or change, and stays that come or have changed. */
-function changedStays(index: Sight['index'], draft: Draft) {
-  const changed = new Map<string, { gone: Set<string>; come: Stay[] }>();
-  const at = (vesselId: string) => {
-    const entry = changed.get(vesselId) ?? { gone: new Set<string>(), come: [] };
-    changed.set(vesselId, entry);
-    return entry;
-  };
-  for (const row of draft.rows.values()) {
-    const was = index.batch(row.id);
-    if (!was || (was.brewOn === row.brewOn && was.chainId === row.chainId)) continue;
-    const before = vesselIdOf(was, index);
-    const after = vesselIdOf(row, draft);
-    const stay = stayOf(row);
-    if (before !== null) at(before).gone.add(row.id);
-    if (after !== null && stay) at(after).come.push(stay);
+/** What drafts of one board change of the use of its vessels. The same change is met once. */
+export class RevisedUses {
+  readonly #base: Sight;
+  readonly #known = new Map<string, ReadonlyMap<string, VesselUse>>();
+
+  constructor(base: Sight) {
+    this.#base = base;
   }
-  return changed;
+
+  /** By batch, only where the draft differs from the board. */
+  in(draft: Draft): ReadonlyMap<string, VesselUse> {
+    const revised = new Map<string, VesselUse>();
+    for (const [vesselId, change] of this.#changes(draft))
+      for (const [id, use] of this.#revised(vesselId, change)) revised.set(id, use);
+    return revised;
+  }
+
+  #changes(draft: Draft): Map<string, Change> {
+    const changes = new Map<string, Change>();
+    for (const row of draft.rows.values()) {
+      const was = this.#base.index.batch(row.id);
+      if (!was || (was.brewOn === row.brewOn && was.chainId === row.chainId)) continue;
+      this.#add(changes, was, row, draft);
+    }
+    return changes;
+  }
+
+  #add(changes: Map<string, Change>, was: Batch, row: Batch, draft: Draft): void {
+    const at = (vesselId: string): Change => {
+      const known = changes.get(vesselId) ?? { gone: new Set(), come: [], key: vesselId };
+      changes.set(vesselId, known);
+      return known;
+    };
+    const before = vesselIdOf(was, this.#base.index);
+    const after = vesselIdOf(row, draft);
+    if (before !== null) {
+      const change = at(before);
+      change.gone.add(row.id);
+      change.key += `-${row.id}`;
+    }
+    const stay = after === null ? null : stayOf(row);
+    if (after !== null && stay) {
+      const change = at(after);
+      change.come.push(stay);
+      change.key += `+${row.id}${stay.from}`;
+    }
+  }
+
+  #revised(vesselId: string, change: Change): ReadonlyMap<string, VesselUse> {
+    const known = this.#known.get(change.key);
+    if (known) return known;
+    const { index, stays, use } = this.#base;
+    const kept = (stays.get(vesselId) ?? []).filter((stay) => !change.gone.has(stay.batchId));
+    const cleanedOn = index.vessels.get(vesselId)?.cleanedOn ?? null;
+    const uses = useOfVessel([...kept, ...change.come], cleanedOn);
+    for (const [id, now] of uses) if (isSame(use(id), now)) uses.delete(id);
+    this.#known.set(change.key, uses);
+    return uses;
+  }
 }
+
+const isSame = (was: VesselUse | undefined, now: VesselUse): boolean =>
+  (was?.takenBy === undefined) === (now.takenBy === undefined) &&
+  was?.beersSinceCleaning === now.beersSinceCleaning;

@@ -1,7 +1,7 @@
 import type { Batch } from '../api/batch.ts';
 import type { Day } from '../rules/vocabulary.ts';
-import { isScheduled, rackDay } from './dates.ts';
 import { push, type BoardIndex, type Layout } from './board.ts';
+import { isScheduled, rackDay } from './dates.ts';
 
 /** A beer in a vessel from its brew day until the day it is racked, when the vessel is free. */
 export interface Stay {
@@ -14,9 +14,9 @@ export interface Stay {
 
 export interface VesselUse {
   /** Name of the batch that still lies in the vessel on this batch's brew day. */
-  takenBy?: string;
+  takenBy: string | undefined;
   /** This batch is the nth beer since the vessel was cleaned. */
-  beersSinceCleaning?: number;
+  beersSinceCleaning: number | undefined;
 }
 
 /** The vessel a batch is brewed in: its own, else the chain's. */
@@ -53,29 +53,39 @@ export function useOfVessel(
 ): Map<string, VesselUse> {
   const stays = [...unordered].sort(byDay);
   const uses = new Map<string, VesselUse>();
-  // The two longest stays among those begun so far: one of them is never the batch itself.
-  let longest: Stay | null = null;
-  let second: Stay | null = null;
+  const longest = new LongestStays();
   let beers = 0;
   for (let at = 0; at < stays.length;) {
     const day = stays[at]?.from ?? '';
-    const together = stays.slice(at, endOfDay(stays, at, day));
-    for (const stay of together) {
-      if (stay.until !== null && outlasts(stay, longest)) [longest, second] = [stay, longest];
-      else if (stay.until !== null && outlasts(stay, second)) second = stay;
-    }
+    const end = endOfDay(stays, at, day);
+    for (let i = at; i < end; i += 1) longest.add(stays[i]);
     const counted = cleanedOn !== null && day >= cleanedOn;
-    for (const stay of together) {
-      const other: Stay | null = longest?.batchId === stay.batchId ? second : longest;
+    for (const stay of stays.slice(at, end))
       uses.set(stay.batchId, {
-        ...(other?.until && other.until > day ? { takenBy: other.name } : {}),
-        ...(counted ? { beersSinceCleaning: beers + 1 } : {}),
+        takenBy: longest.inTheWayOf(stay),
+        beersSinceCleaning: counted ? beers + 1 : undefined,
       });
-    }
-    if (counted) beers += together.length;
-    at += together.length;
+    if (counted) beers += end - at;
+    at = end;
   }
   return uses;
+}
+
+/** The two longest stays of those begun so far: one of them is never the batch itself. */
+class LongestStays {
+  #first: Stay | null = null;
+  #second: Stay | null = null;
+
+  add(stay: Stay | undefined): void {
+    if (!stay || stay.until === null) return;
+    if (outlasts(stay, this.#first)) [this.#first, this.#second] = [stay, this.#first];
+    else if (outlasts(stay, this.#second)) this.#second = stay;
+  }
+
+  inTheWayOf(stay: Stay): string | undefined {
+    const other = this.#first?.batchId === stay.batchId ? this.#second : this.#first;
+    return other?.until && other.until > stay.from ? other.name : undefined;
+  }
 }
 
 const outlasts = (stay: Stay, other: Stay | null): boolean =>

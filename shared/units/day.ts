@@ -3,6 +3,7 @@ import type { Day } from '../rules/vocabulary.ts';
 /** Arithmetic on calendar days, `YYYY-MM-DD`. No clock and no time zone takes part in it. */
 
 const DAY_MS = 86_400_000;
+const DAY = /^\d{4}-\d{2}-\d{2}$/;
 const WEEKDAYS = ['Mon', 'Tue', 'Wed', 'Thu', 'Fri', 'Sat', 'Sun'] as const;
 const MONTHS = [
   'January',
@@ -19,18 +20,36 @@ const MONTHS = [
   'December',
 ] as const;
 
-/** Days since 1 January 1970. Throws a RangeError where the text is no day. */
+/**
+ * Days are few and asked for again and again (a season's board asks thousands of times): each is
+ * worked out once. Dropped when there are too many, so that no odd input fills the memory.
+ */
+const MOST_DAYS = 20_000;
+const numbers = new Map<Day, number>();
+const days = new Map<number, Day>();
+
+function remember<K, V>(known: Map<K, V>, key: K, value: V): V {
+  if (known.size >= MOST_DAYS) known.clear();
+  known.set(key, value);
+  return value;
+}
+
+/** Days since 1 January 1970. Throws a RangeError where the text is not written as a day. */
 function dayNumber(day: Day): number {
+  return numbers.get(day) ?? remember(numbers, day, countDays(day));
+}
+
+function countDays(day: Day): number {
   const number = Date.UTC(
     Number(day.slice(0, 4)),
     Number(day.slice(5, 7)) - 1,
     Number(day.slice(8, 10)),
   );
-  if (Number.isNaN(number)) throw new RangeError(`Not a day: ${day}`);
   return number / DAY_MS;
 }
 
-const dayOf = (number: number): Day => new Date(number * DAY_MS).toISOString().slice(0, 10);
+const dayOf = (number: number): Day =>
+  days.get(number) ?? remember(days, number, new Date(number * DAY_MS).toISOString().slice(0, 10));
 
 /** The day n days later; n may be negative. */
 export const addDays = (day: Day, n: number): Day => dayOf(dayNumber(day) + n);
