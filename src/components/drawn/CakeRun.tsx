@@ -8,6 +8,9 @@ interface CakeRunProps {
   hops?: boolean;
 }
 
+/** Where a torn run breaks off and goes on, px below the vessel's foot. */
+const TORN = [34, 58] as const;
+
 function Stretch({ from, to }: { from: number; to: number }) {
   const height = to - from;
   const edge = sideEdge(height);
@@ -23,7 +26,7 @@ function Stretch({ from, to }: { from: number; to: number }) {
 
 /** The cake running down the page on a phone. */
 export const CakeRun = memo(function CakeRun({ height, verdict, hops = false }: CakeRunProps) {
-  const gap = verdict === 'hold' ? ([height * 0.36, height * 0.58] as const) : null;
+  const gap = verdict === 'hold' ? TORN : null;
   return (
     <svg
       aria-hidden

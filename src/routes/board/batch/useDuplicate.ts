@@ -1,3 +1,4 @@
+import { newId } from '../../../app/newId.ts';
 import { useCallback } from 'react';
 import type { Batch, BatchCreate } from '#shared/api/batch.ts';
 import { useBatchCreate } from '../../../api/batches.ts';
@@ -23,7 +24,7 @@ export function useDuplicate() {
   const { mutate } = useBatchCreate(slug);
   return useCallback(
     (batch: Batch) =>
-      mutate(copyOf(batch, crypto.randomUUID()), {
+      mutate(copyOf(batch, newId()), {
         onSuccess: (made) => say(`${made.name} is on the bench`),
         onError: (error) => say(sentenceOf(error)),
       }),

@@ -1,18 +1,18 @@
 import { Button } from '../../../components/ui/Button.tsx';
-import { useLiftMachine } from '../lift/liftContext.ts';
+import { usePut } from '../lift/usePut.ts';
 import { useBestMove } from './useBestMove.ts';
 
 /** The move that would help most, as a quiet line with the button that makes it. */
 export function BestMove() {
   const move = useBestMove();
-  const { putting } = useLiftMachine();
+  const put = usePut();
   if (!move) return null;
   return (
     <p className="flex basis-full flex-wrap items-center gap-x-3 gap-y-1 text-small text-ink2">
       <span>
         <b className="text-ink">The move that would help most:</b> {move.what}
       </span>
-      <Button size="small" look="quiet" onClick={() => putting.put(move.batchId, move.gap)}>
+      <Button size="small" look="quiet" onClick={() => put(move.batchId, move.gap)}>
         Move it
       </Button>
     </p>

@@ -42,6 +42,7 @@ function BenchBatch({ batch }: { batch: Batch }) {
   const { gravity } = beerFacts(batch, units);
   return (
     <li
+      data-batch={batch.id}
       data-lift-batch={batch.id}
       className="flex max-w-[300px] flex-none items-center gap-2.5 rounded-xl border-[1.5px] border-line bg-white py-1.5 pr-2 pl-2.5 text-small text-ink2"
     >

@@ -22,6 +22,7 @@ export function ShelfBatch({ batch, next, chainId }: ShelfBatchProps) {
   const link = next && judged.links.get(next.id);
   return (
     <li
+      data-batch={batch.id}
       data-lift-batch={batch.id}
       className="relative flex-none"
       style={{ width: SHELF.cell, height: SHELF.top + SHELF.board + SHELF.foot }}

@@ -1,0 +1,60 @@
+import { Suspense } from 'react';
+import { useTitle } from '../../app/useTitle.ts';
+import { BoardForms } from './BoardForms.tsx';
+import { EmptyBoard } from './empty/EmptyBoard.tsx';
+import { BoardHead } from './head/BoardHead.tsx';
+import { LiftProvider } from './lift/LiftProvider.tsx';
+import { SidePanel } from './panel/SidePanel.tsx';
+import { PhoneBoard } from './phone/PhoneBoard.tsx';
+import { Bench } from './shelf/Bench.tsx';
+import { Shelves } from './shelf/Shelves.tsx';
+import { BoardFault } from './states/BoardFault.tsx';
+import { BoardSkeleton } from './states/BoardSkeleton.tsx';
+import { BoardViewProvider, useBoardView } from './view/BoardView.tsx';
+import { usePhone } from './view/useMedia.ts';
+
+/** The season's board: shelves, bench, and what is opened beside them. */
+export function BoardPage() {
+  useTitle('Board');
+  return (
+    <BoardFault>
+      <Suspense fallback={<BoardSkeleton />}>
+        <BoardViewProvider>
+          <OpenBoard />
+        </BoardViewProvider>
+      </Suspense>
+    </BoardFault>
+  );
+}
+
+function OpenBoard() {
+  const { board } = useBoardView();
+  const phone = usePhone();
+  const isEmpty = board.chains.length === 0 && board.batches.length === 0;
+  if (isEmpty)
+    return (
+      <>
+        <EmptyBoard />
+        <BoardForms />
+      </>
+    );
+  return (
+    <LiftProvider>
+      {phone ? <PhoneBoard /> : <ShelfBoard />}
+      <BoardForms />
+    </LiftProvider>
+  );
+}
+
+function ShelfBoard() {
+  return (
+    <div className="flex min-w-0 grow">
+      <main id="main" className="flex min-w-0 flex-1 flex-col outline-none">
+        <BoardHead />
+        <Shelves />
+        <Bench />
+      </main>
+      <SidePanel />
+    </div>
+  );
+}

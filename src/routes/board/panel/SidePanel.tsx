@@ -1,0 +1,75 @@
+import { useEffect } from 'react';
+import { ChangesPanel } from '../lift/ChangesPanel.tsx';
+import { useLiftMachine, useLiftPanel } from '../lift/liftContext.ts';
+import { PlacesPanel } from '../lift/PlacesPanel.tsx';
+import { useBoardPanel } from '../view/useBoardPanel.ts';
+import { useWide } from '../view/useMedia.ts';
+import { AttentionPanel } from './AttentionPanel.tsx';
+import { LinkPanel } from './LinkPanel.tsx';
+
+/** The newest wins: a lift closes what stands open, opening something puts the last change away. */
+function useOneAtATime(openLink: string | null, isLifted: boolean, close: () => void) {
+  const { store } = useLiftMachine();
+  useEffect(() => {
+    if (openLink) store.set({ change: null, refusal: null });
+  }, [openLink, store]);
+  useEffect(() => {
+    if (isLifted && openLink) close();
+  }, [isLifted, openLink, close]);
+}
+
+/** Beside the shelves where there is room; over them, from the side or the foot, where not. */
+export function SidePanel() {
+  const wide = useWide();
+  const lift = useLiftPanel();
+  const { panel, close } = useBoardPanel();
+  const openLink = panel?.kind === 'link' ? panel.laterId : null;
+  useOneAtATime(openLink, lift === 'places', close);
+  const link = openLink !== null && lift !== 'places' ? <LinkPanel laterId={openLink} /> : null;
+  if (wide)
+    return (
+      <aside
+        aria-label="Beside the shelves"
+        className="thumb-slim sticky top-0 h-dvh w-[372px] shrink-0 overflow-y-auto border-l border-line bg-paper"
+      >
+        {link ?? <AtRest lift={lift} />}
+      </aside>
+    );
+  if (link)
+    return (
+      <aside
+        aria-label="Opened link"
+        className="fixed inset-y-0 right-0 z-40 w-full overflow-y-auto overscroll-contain border-l border-line bg-paper shadow-card tablet:w-[404px]"
+      >
+        {link}
+      </aside>
+    );
+  return <Below lift={lift} />;
+}
+
+function AtRest({ lift }: { lift: ReturnType<typeof useLiftPanel> }) {
+  if (lift === 'places') return <Lifting lift={lift} />;
+  return (
+    <>
+      {lift === 'changes' && <Lifting lift={lift} />}
+      <AttentionPanel />
+    </>
+  );
+}
+
+/** Without room at the side, lifting tells its places and its changes along the foot. */
+function Below({ lift }: { lift: ReturnType<typeof useLiftPanel> }) {
+  if (lift === null) return null;
+  return (
+    <aside
+      aria-label="Lifting"
+      className="thumb-slim fixed inset-x-0 bottom-0 z-30 max-h-[38dvh] overflow-y-auto overscroll-contain rounded-t-2xl border-t border-line bg-paper shadow-card max-tablet:bottom-[72px] tablet:right-4 tablet:left-auto tablet:w-[404px] tablet:rounded-2xl tablet:border"
+    >
+      <Lifting lift={lift} />
+    </aside>
+  );
+}
+
+function Lifting({ lift }: { lift: 'places' | 'changes' }) {
+  return <div className="px-6 py-5">{lift === 'places' ? <PlacesPanel /> : <ChangesPanel />}</div>;
+}

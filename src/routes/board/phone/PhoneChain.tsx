@@ -1,0 +1,58 @@
+import type { Chain } from '#shared/api/chain.ts';
+import { formatMoney } from '#shared/units/money.ts';
+import { BestMove } from '../head/BestMove.tsx';
+import { UndoButtons } from '../lift/UndoButtons.tsx';
+import { ChainMenu } from '../shelf/ChainMenu.tsx';
+import { useBoardView } from '../view/BoardView.tsx';
+import { count, generationLine, seasonLine, yeastLine } from '../view/words.ts';
+import { PhoneBatch } from './PhoneBatch.tsx';
+import { PhoneHead } from './PhoneHead.tsx';
+
+export function PhoneChain({ chain }: { chain: Chain }) {
+  const { board, index, judged, units, can } = useBoardView();
+  const batches = index.batchesOf(chain.id);
+  const verdicts = judged.chains.get(chain.id);
+  const yeast = index.yeasts.get(chain.yeastId);
+  const cost = verdicts?.costPerBatch ?? null;
+  const facts = [
+    count(batches.length, 'batch', 'batches'),
+    ...(verdicts?.generations
+      ? [generationLine(verdicts.generations, verdicts.generationLimit)]
+      : []),
+    ...(cost === null ? [] : [`${formatMoney(cost, board.brewery.currency)} each`]),
+  ];
+  return (
+    <>
+      <PhoneHead title={chain.name}>
+        <p>{facts.join(' · ')}</p>
+        {yeast && <p>{yeastLine(yeast, units)}</p>}
+      </PhoneHead>
+      {can.editChains && (
+        <div className="px-3">
+          <ChainMenu chain={chain} />
+        </div>
+      )}
+      <ol className="mt-3 ml-[18px]" aria-label={`Batches on ${chain.name}`}>
+        {batches.map((batch, place) => (
+          <PhoneBatch key={batch.id} batch={batch} next={batches[place + 1]} />
+        ))}
+      </ol>
+      {batches.length === 0 && (
+        <p className="mx-[18px] mt-2 rounded-xl border-[1.5px] border-dashed border-edge px-4 py-3 text-ink2">
+          No batch yet. Take one from the bench and move it here.
+        </p>
+      )}
+      <footer className="mx-[18px] mt-6 grid gap-3 border-t border-line pt-4 text-small text-ink2">
+        <p>
+          <b className="text-ink">{board.season.name}:</b> {seasonLine(judged.totals)}
+        </p>
+        {can.moveBatches && (
+          <>
+            <BestMove />
+            <UndoButtons />
+          </>
+        )}
+      </footer>
+    </>
+  );
+}
