@@ -86,8 +86,24 @@ function narrowed(likely: number, spread: number, grown: Interval): Interval {
   };
 }
 
-const orElse = (measured: number | undefined, estimate: () => Interval): Interval =>
-  measured === undefined ? estimate() : around(measured, READING_SPREAD);
+/** Litres that so many cells fill; a cake is never larger than the batch it came from. */
+function litresOf(cells: Interval, cellsPerLitre: number, batchL: number): Interval {
+  const fill = (n: number): number => Math.min(n / cellsPerLitre || 0, batchL);
+  return { low: fill(cells.low), likely: fill(cells.likely), high: fill(cells.high) };
+}
+
+/** Cells of the cake: from its measured litres, or grown, as far as a counted density allows. */
+function settledIn(
+  measuredL: number | undefined,
+  perLitre: number,
+  estimatedL: Interval,
+  cake: CakeFacts,
+): Interval {
+  const grown = grownCells(cake);
+  const counted = cake.measured?.cellsPerMl !== undefined;
+  if (measuredL === undefined) return counted ? times(estimatedL, perLitre) : grown;
+  return narrowed(measuredL * perLitre, counted ? COUNT_SPREAD : DENSITY_SPREAD, grown);
+}
 
 /**
  * The cake that a beer leaves. A measured volume or mass gives the cells in place of growth; a count
@@ -101,16 +117,9 @@ export function estimateCake(cake: CakeFacts): CakeEstimate {
   const { volumeL, massKg, viability, cellsPerMl } = cake.measured ?? {};
   const perLitre = 1000 * (cellsPerMl ?? CELLS_PER_ML_CAKE * (1 - TRUB_SHARE[cake.trub ?? 'some']));
   const measuredL = volumeL ?? (massKg === undefined ? undefined : massKg / CAKE_KG_PER_L);
-  const grown = grownCells(cake);
-  const settledCells =
-    measuredL === undefined
-      ? grown
-      : narrowed(
-          measuredL * perLitre,
-          cellsPerMl === undefined ? DENSITY_SPREAD : COUNT_SPREAD,
-          grown,
-        );
-  const volume = orElse(measuredL, () => times(settledCells, perLitre > 0 ? 1 / perLitre : 0));
+  const estimatedL = litresOf(grownCells(cake), perLitre, cake.volumeL);
+  const settledCells = settledIn(measuredL, perLitre, estimatedL, cake);
+  const volume = measuredL === undefined ? estimatedL : around(measuredL, READING_SPREAD);
   return {
     settledCells,
     viableCells: times(settledCells, (viability ?? VIABILITY) * cake.survival),

@@ -40,6 +40,7 @@ function dayNumber(day: Day): number {
 }
 
 function countDays(day: Day): number {
+  if (!DAY.test(day)) throw new RangeError(`Not a day: ${day}`);
   const number = Date.UTC(
     Number(day.slice(0, 4)),
     Number(day.slice(5, 7)) - 1,

@@ -16,7 +16,7 @@ describe('in-sample: the four points of the fit (looked up)', () => {
     // "Up to 68 % lost at 10 to 25 °C": taken as the value at 25 °C, which is our reading.
     [6, 25, 0.32, MCCAIG_2],
     [5, 1, 0.92, MCCAIG_1],
-  ] as const)('%d days at %d °C leave %d: %s', (days, celsius, left) => {
+  ] as const)('%d days at %d °C leave %d: %s', (days, celsius, left, _source) => {
     expect(Math.abs(survival(days, celsius) - left)).toBeLessThanOrEqual(0.03);
   });
 });
@@ -26,7 +26,7 @@ describe('in-sample: the stated range, chosen to cover these', () => {
     [14, 22, 0.05, 'C. White 2001, yeast in sterile water at room temperature (looked up)'],
     [30, 4, 0.94, 'seven slurries counted by a home brewer, 2012 (second-hand)'],
     [30, 4, 0.49, 'a supplier: under half after a month in the cold (second-hand)'],
-  ] as const)('%d days at %d °C may leave %d: %s', (days, celsius, left) => {
+  ] as const)('%d days at %d °C may leave %d: %s', (days, celsius, left, _source) => {
     const { low, high } = survivalRange(days, celsius);
     expect(left).toBeGreaterThanOrEqual(low);
     expect(left).toBeLessThanOrEqual(high + 0.001);
