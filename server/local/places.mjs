@@ -20,3 +20,15 @@ export const testHome = resolve(
 );
 
 export const isRoot = process.getuid?.() === 0;
+
+/** Pages built for tests: not those that a start may be serving. */
+export const testDist = join(root, '.cache/test-dist');
+
+/** A port that the same folder always gets, so that every process of a test run agrees on it. */
+export const testPort = Number(
+  process.env.BARMKIN_TEST_PORT ||
+    20_000 + (parseInt(shortHash(testHome).slice(0, 6), 16) % 20_000),
+);
+
+/** What the browser tests must know of their server. */
+export const testServerFile = join(testHome, 'server.json');

@@ -1,0 +1,76 @@
+import { test as base, expect, type BrowserContext, type Page } from '@playwright/test';
+import type { Role } from '#shared/api/people.ts';
+import { connect, type Db } from '../../server/db/client.ts';
+import { leaveBrewery, writeBrewery, type TestBrewery } from './brewery.ts';
+import { writeBoard, type BoardPlan, type WrittenBoard } from './board.ts';
+import { sessionCookies, sharedServer, type RunningServer } from './server.ts';
+
+interface Brewing extends TestBrewery {
+  /** Puts shelves and batches on the board. */
+  write(plan: BoardPlan): Promise<WrittenBoard>;
+  /** Signs a browser in as the member of a role. */
+  signIn(context: BrowserContext, role: Role): Promise<void>;
+}
+
+interface Fixtures {
+  /** Console errors that this test expects; anything else on the console fails it. */
+  expectedErrors: RegExp[];
+  brewery: Brewing;
+  /** The page, signed in as the brewery's head brewer. */
+  board: Page;
+  watch: void;
+}
+
+interface WorkerFixtures {
+  server: RunningServer;
+  db: Db;
+}
+
+/** Every test gets a brewery of its own, so that none depends on another or on their order. */
+export const test = base.extend<Fixtures, WorkerFixtures>({
+  server: [async ({}, use) => use(sharedServer()), { scope: 'worker' }],
+  db: [
+    async ({ server }, use) => {
+      const { db, pool } = connect(server.databaseUrl, { max: 2 });
+      await use(db);
+      await pool.end();
+    },
+    { scope: 'worker' },
+  ],
+  expectedErrors: [[], { option: true }],
+  watch: [
+    async ({ context, expectedErrors }, use) => {
+      const errors = watchErrors(context);
+      await use();
+      const unexpected = errors.filter((text) => !expectedErrors.some((each) => each.test(text)));
+      expect(unexpected, 'errors on the console').toEqual([]);
+    },
+    { auto: true },
+  ],
+  brewery: async ({ db, server }, use) => {
+    const made = await writeBrewery(db);
+    await use({
+      ...made,
+      write: (plan) => writeBoard(db, made, plan),
+      signIn: (context, role) =>
+        context.addCookies(sessionCookies(server, made.members[role].token)),
+    });
+    await leaveBrewery(db, made);
+  },
+  board: async ({ brewery, context, page }, use) => {
+    await brewery.signIn(context, 'head-brewer');
+    await use(page);
+  },
+});
+
+/** What any page of a browser writes to the console as an error, or throws. */
+export function watchErrors(context: BrowserContext): string[] {
+  const errors: string[] = [];
+  context.on('console', (message) => {
+    if (message.type() === 'error') errors.push(`${message.text()} (${message.location().url})`);
+  });
+  context.on('weberror', (error) => errors.push(String(error.error())));
+  return errors;
+}
+
+export { expect };

@@ -1,0 +1,64 @@
+import { join } from 'node:path';
+import { testDist, testHome } from './places.mjs';
+import { must } from './run.mjs';
+import { startServer } from './serverProcess.mjs';
+import { joinCluster } from './sharedCluster.mjs';
+
+/** The keys sign the cookies of fixtures too, which is how a test is signed in without a form. */
+const KEYS = 'a-key-for-tests-only-1,a-key-for-tests-only-2';
+
+/** Tests come from one address and sign in often; the limits have tests of their own. */
+const LIMITS = Object.fromEntries(
+  [
+    'signInByAccountAndAddress',
+    'signInByAddress',
+    'signUpByAddress',
+    'joinByAddress',
+    'clientErrorsByAddress',
+    'checksByPerson',
+  ].map((name) => [name, { points: 100_000, seconds: 60 }]),
+);
+
+/**
+ * A server process with a database of its own on the tests' cluster.
+ * @param {{port: number, logFile: string, settings?: Record<string, string>}} options port 0: any free one
+ */
+export async function startTestServer({ port, logFile, settings = {} }) {
+  const { cluster, leave } = await joinCluster(testHome);
+  const name = `e2e_${process.pid}_${Date.now().toString(36)}`;
+  const sql = (/** @type {string} */ statement) =>
+    must(
+      'A test database',
+      join(cluster.bin, 'psql'),
+      ['-X', '-q', '-d', 'postgres', '-c', statement],
+      {
+        env: cluster.env,
+      },
+    );
+  await sql(`create database ${name}`);
+  const databaseUrl = cluster.url(name);
+  const start = (/** @type {number} */ on) =>
+    startServer(
+      {
+        BARMKIN_MODE: 'test',
+        DATABASE_URL: databaseUrl,
+        SESSION_KEYS: KEYS,
+        LIMITS: JSON.stringify(LIMITS),
+        BARMKIN_DIST: testDist,
+        DEMO: 'no',
+        HOST: '127.0.0.1',
+        PORT: String(on),
+        PUBLIC_URL: '',
+        NODE_ENV: 'production',
+        ...settings,
+      },
+      logFile,
+    );
+  const server = await start(port);
+  const close = async () => {
+    await server.stop();
+    await sql(`drop database if exists ${name} with (force)`);
+    await leave();
+  };
+  return { ...server, databaseUrl, keys: KEYS, startAgain: start, close };
+}
