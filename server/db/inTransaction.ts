@@ -1,12 +1,16 @@
 import pg from 'pg';
 import type { Db, Tx } from './client.ts';
 
-/** Two changes that met: a deadlock, or two rows that wanted one place (compared at the end). */
+/** Two changes that met: a deadlock, or two rows that wanted one place or one name. */
 const MET = new Set(['40001', '40P01']);
-const PLACES = new Set(['batch_place', 'chain_position']);
+const PLACES = new Set(['batch_place', 'chain_position', 'change_pkey']);
 const TRIES = 6;
 
+/** Thrown by a command that finds its rows changed under it: it is run again. */
+export class RowsMoved extends Error {}
+
 function met(error: unknown): boolean {
+  if (error instanceof RowsMoved) return true;
   const cause = error instanceof Error && error.cause instanceof Error ? error.cause : error;
   if (!(cause instanceof pg.DatabaseError)) return false;
   return (

@@ -22,6 +22,7 @@ const pointerTo = (path: readonly PropertyKey[]) =>
 
 /** Values that a schema let through and the database refuses: the sender's fault, not the server's. */
 const REFUSED_VALUE = /^22/;
+const STILL_REFERRED_TO = '23503';
 /** Two at once, or a database that is restarting: the same request may succeed in a moment. */
 const PASSING = /^(40001|40P01|53|55P03|57|08)/;
 const LOST_CONNECTION =
@@ -35,6 +36,7 @@ function fromDatabase(error: unknown): ProblemError | null {
   const cause = rootCause(error);
   if (cause instanceof pg.DatabaseError) {
     if (REFUSED_VALUE.test(cause.code ?? '')) return problem('invalid-request');
+    if (cause.code === STILL_REFERRED_TO) return problem('in-use');
     if (PASSING.test(cause.code ?? '')) return problem('busy', { retryAfter: 1 });
   }
   if (cause instanceof Error && LOST_CONNECTION.test(cause.message))

@@ -1,13 +1,33 @@
 import type { Route } from '../http/operation.ts';
 import { accountRoutes } from './account/router.ts';
+import { batchRoutes } from './batches/router.ts';
 import { boardRoutes } from './board/router.ts';
+import { breweryRoutes } from './brewery/router.ts';
+import { chainRoutes } from './chains/router.ts';
+import { checkRoutes } from './check/router.ts';
+import { joinRoutes } from './join/router.ts';
+import { moveRoutes } from './moves/router.ts';
+import { peopleRoutes } from './people/router.ts';
+import { seasonRoutes } from './season/router.ts';
 import { sessionRoutes } from './session/router.ts';
 import { systemRoutes } from './system/router.ts';
+import { vesselRoutes } from './vessels/router.ts';
+import { yeastRoutes } from './yeasts/router.ts';
 
 /** Every operation of the API. */
 export const routes: readonly Route[] = [
   ...systemRoutes,
   ...sessionRoutes,
   ...accountRoutes,
+  ...joinRoutes,
+  ...breweryRoutes,
+  ...peopleRoutes,
   ...boardRoutes,
+  ...seasonRoutes,
+  ...yeastRoutes,
+  ...vesselRoutes,
+  ...chainRoutes,
+  ...batchRoutes,
+  ...moveRoutes,
+  ...checkRoutes,
 ];

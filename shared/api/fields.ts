@@ -2,7 +2,8 @@ import { z } from 'zod';
 
 /** Fields that several contracts share. Every number is in the one stored unit. */
 
-export const id = z.uuid();
+/** Written small, so that one id is always one text. */
+export const id = z.uuid().toLowerCase();
 export const slug = z.string().regex(/^[a-z0-9][a-z0-9-]{1,79}$/);
 
 /** A calendar day that exists, `YYYY-MM-DD`, 1900 to 2199. */

@@ -13,9 +13,9 @@ import {
   uuid,
   type AnyPgColumn,
 } from 'drizzle-orm/pg-core';
-import type { Stage } from '#shared/api/batch.ts';
+import type { Acceptance, Stage } from '#shared/api/batch.ts';
 import type { Addition, DryHop } from '#shared/rules/facts.ts';
-import type { Allergen, Culture, RuleId, TrubLevel } from '#shared/rules/vocabulary.ts';
+import type { Allergen, Culture, TrubLevel } from '#shared/rules/vocabulary.ts';
 import { id, madeAt, note, quantity, typedTexts, version } from './columns.ts';
 import { season } from './season.ts';
 import { vessel, yeast, yeastLine } from './stock.ts';
@@ -77,15 +77,6 @@ export const chain = pgTable(
   ],
 );
 
-/** A hold that the head brewer accepted. The name stays readable after its bearer has left. */
-export interface StoredAcceptance {
-  reason: string;
-  rules: RuleId[];
-  personId: string;
-  by: string;
-  at: string;
-}
-
 const planned = {
   name: text().notNull(),
   style: text().notNull().default(''),
@@ -127,7 +118,7 @@ const link = {
   cakeC: quantity(),
   starter: boolean().notNull().default(false),
   linkTyped: typedTexts(),
-  acceptance: jsonb().$type<StoredAcceptance>(),
+  acceptance: jsonb().$type<Acceptance>(),
 };
 
 export const batch = pgTable(

@@ -45,7 +45,6 @@ export function presentBatch(row: BatchRow, itsCake: CakeRow | null): Batch {
 }
 
 function presentLink(row: BatchRow): Link {
-  const { acceptance } = row;
   return {
     takenOn: row.takenOn,
     keepL: row.keepL,
@@ -54,11 +53,6 @@ function presentLink(row: BatchRow): Link {
     cakeC: row.cakeC,
     starter: row.starter,
     typed: row.linkTyped,
-    acceptance: acceptance && {
-      reason: acceptance.reason,
-      rules: acceptance.rules,
-      by: acceptance.by,
-      at: acceptance.at,
-    },
+    acceptance: row.acceptance,
   };
 }

@@ -1,0 +1,16 @@
+import { eq } from 'drizzle-orm';
+import type { CakeState } from '#shared/api/batch.ts';
+import { cake } from '../../db/schema/cake.ts';
+import type { Hand } from '../board/changeBoard.ts';
+
+/** A cake is there from the brew day on; what was measured of it stays with it. */
+export async function setCake({ tx }: Hand, batchId: string, state: CakeState): Promise<void> {
+  await tx
+    .insert(cake)
+    .values({ batchId, state })
+    .onConflictDoUpdate({ target: cake.batchId, set: { state } });
+}
+
+export async function dropCake({ tx }: Hand, batchId: string): Promise<void> {
+  await tx.delete(cake).where(eq(cake.batchId, batchId));
+}

@@ -1,0 +1,75 @@
+import { and, eq, inArray, sql } from 'drizzle-orm';
+import type { Member } from '../../auth/whoAsks.ts';
+import type { Tx } from '../../db/client.ts';
+import { inTransaction } from '../../db/inTransaction.ts';
+import { batch } from '../../db/schema/chain.ts';
+import type { Deps } from '../../deps.ts';
+import type { BoardFacts } from '#shared/chain/board.ts';
+import { lapses } from '#shared/chain/lapses.ts';
+import { notFound } from '../../problems.ts';
+import { dayIn } from '../../today.ts';
+import { loadBoardRows, type BoardRows } from './load.ts';
+import { lockSeason, lockShelves } from './locks.ts';
+import { raiseRevision, writeEntry, type Entry } from './record.ts';
+
+/** What a command has in hand: the transaction, and the board as it stands under the locks. */
+export interface Hand {
+  tx: Tx;
+  member: Member;
+  board: BoardNow;
+  now: Date;
+}
+
+export type BoardNow = BoardRows & Pick<BoardFacts, 'today'>;
+
+/** Null: there was nothing to change. */
+export type Command = (hand: Hand) => Promise<Omit<Entry, 'kind'> | null>;
+
+/**
+ * Runs an edit of anything on a season's board: under the locks, with the acceptances that it made
+ * lapse, the revision raised and the change recorded, all or nothing.
+ * @param shelves ids of the chains whose order the edit touches.
+ * @returns the board as the edit left it.
+ */
+export function changeBoard(
+  deps: Pick<Deps, 'db' | 'clock'>,
+  member: Member,
+  shelves: readonly string[] | 'all',
+  command: Command,
+): Promise<BoardNow> {
+  return inTransaction(deps.db, async (tx) => {
+    await lockShelves(tx, member.seasonId, shelves);
+    await lockSeason(tx, member.seasonId);
+    const now = deps.clock.now();
+    const board = await readBoard(tx, member, now);
+    const entry = await command({ tx, member, board, now });
+    if (!entry) return board;
+    const revision = await raiseRevision(tx, member.seasonId);
+    await writeEntry(tx, member, now, { kind: 'edit', ...entry });
+    const edited = { ...(await readBoard(tx, member, now)) };
+    const after = await withoutLapsed(tx, board, edited);
+    return { ...after, season: { ...after.season, revision } };
+  });
+}
+
+export async function readBoard(tx: Tx, member: Member, now: Date): Promise<BoardNow> {
+  const rows = await loadBoardRows(tx, member.brewery.id, member.seasonId);
+  if (!rows) throw notFound();
+  return { ...rows, today: dayIn(member.brewery.timeZone, now) };
+}
+
+/** An acceptance speaks of the link as it was; where that changed it is taken away. */
+async function withoutLapsed(tx: Tx, before: BoardNow, after: BoardNow): Promise<BoardNow> {
+  const lapsed = lapses(before, after);
+  if (lapsed.length === 0) return after;
+  await tx
+    .update(batch)
+    .set({ acceptance: null, version: sql`${batch.version} + 1` })
+    .where(and(eq(batch.seasonId, after.season.id), inArray(batch.id, lapsed)));
+  const batches = after.batches.map((row) =>
+    lapsed.includes(row.id)
+      ? { ...row, version: row.version + 1, link: { ...row.link, acceptance: null } }
+      : row,
+  );
+  return { ...after, batches };
+}

@@ -1,0 +1,23 @@
+import { checkChainAnswer, checkChainRequest } from '#shared/api/check.ts';
+import { api } from '#shared/api/urls.ts';
+import { checkChain } from '#shared/chain/checkChain.ts';
+import { forSignedIn } from '../../http/route.ts';
+
+export const checkRoutes = [
+  forSignedIn(
+    {
+      name: 'checkChain',
+      method: 'post',
+      path: api.checkChain,
+      summary: 'The engine’s answer for a chain of batches; nothing is stored',
+      body: checkChainRequest,
+      answer: checkChainAnswer,
+      status: 200,
+      problems: ['too-many'],
+    },
+    async ({ body, tries }, { person }) => {
+      await tries.count('checksByPerson', person.id);
+      return { body: checkChain(body) };
+    },
+  ),
+];

@@ -1,0 +1,54 @@
+import { moved, moveRequest, undoRequest } from '#shared/api/move.ts';
+import { api } from '#shared/api/urls.ts';
+import { pathOf } from '../../http/pathOf.ts';
+import { forMember } from '../../http/route.ts';
+import { canMoveBatches } from '../../policies.ts';
+import { move } from './move.ts';
+import { takeBack } from './undo.ts';
+
+const makeMove = forMember(
+  {
+    name: 'moveBatch',
+    method: 'post',
+    path: pathOf(api.moves(':brewery')),
+    summary: 'Move a batch after another one, to another shelf, a new one, or the bench',
+    body: moveRequest,
+    answer: moved,
+    status: 200,
+    problems: ['moved-elsewhere', 'place-taken', 'already-exists'],
+  },
+  canMoveBatches,
+  async (asked, member) => ({ body: await move(asked, member, asked.body) }),
+);
+
+const undo = forMember(
+  {
+    name: 'undo',
+    method: 'post',
+    path: pathOf(api.undo(':brewery')),
+    summary: 'Undo one’s newest move',
+    body: undoRequest,
+    answer: moved,
+    status: 200,
+    problems: ['not-undoable'],
+  },
+  canMoveBatches,
+  async (asked, member) => ({ body: await takeBack(asked, member, 'undo', asked.body.changeId) }),
+);
+
+const redo = forMember(
+  {
+    name: 'redo',
+    method: 'post',
+    path: pathOf(api.redo(':brewery')),
+    summary: 'Redo the move that was undone last',
+    body: undoRequest,
+    answer: moved,
+    status: 200,
+    problems: ['not-undoable'],
+  },
+  canMoveBatches,
+  async (asked, member) => ({ body: await takeBack(asked, member, 'redo', asked.body.changeId) }),
+);
+
+export const moveRoutes = [makeMove, undo, redo];

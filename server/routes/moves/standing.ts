@@ -1,0 +1,82 @@
+import type { Batch, Link } from '#shared/api/batch.ts';
+import type { Chain } from '#shared/api/chain.ts';
+import { indexBoard, type BoardFacts, type BoardIndex } from '#shared/chain/board.ts';
+import { isDeepStrictEqual } from 'node:util';
+
+/** How one batch stands: all that a move may change of it. */
+export interface Standing {
+  id: string;
+  chainId: string | null;
+  /** The batch before it on its shelf; null: first. */
+  afterId: string | null;
+  brewOn: string | null;
+  link: Link;
+}
+
+/** One side of a move, as the change record keeps it. The moved batch comes first. */
+export interface Side {
+  batches: Standing[];
+  /** The shelf that is there on this side only. */
+  chain: Chain | null;
+  /** Where the moved batch stands among those on the bench, if it does; null: first, or not there. */
+  benchAfterId: string | null;
+}
+
+export interface Sides {
+  before: Side;
+  after: Side;
+}
+
+/**
+ * What differs between two boards, seen from each. Batches that only moved up in their row do not
+ * differ: they still stand after the same one.
+ */
+export function sidesOf(before: BoardFacts, after: BoardFacts, movedId: string): Sides {
+  const [was, is] = [standingsOf(before), standingsOf(after)];
+  const differs = [...is.values()]
+    .filter((row) => row.id !== movedId && !isDeepStrictEqual(row, was.get(row.id)))
+    .map(({ id }) => id);
+  const ids = [movedId, ...differs];
+  return {
+    before: sideOf(before, was, ids, onlyIn(before, after)),
+    after: sideOf(after, is, ids, onlyIn(after, before)),
+  };
+}
+
+function sideOf(
+  board: BoardFacts,
+  standings: ReadonlyMap<string, Standing>,
+  ids: readonly string[],
+  chain: Chain | null,
+): Side {
+  const index = indexBoard(board);
+  const moved = index.batch(ids[0] ?? '');
+  return {
+    batches: ids.flatMap((id) => standings.get(id) ?? []),
+    chain,
+    benchAfterId: moved?.chainId === null ? mateBefore(index, moved) : null,
+  };
+}
+
+const onlyIn = (one: BoardFacts, other: BoardFacts): Chain | null =>
+  one.chains.find(({ id }) => !other.chains.some((chain) => chain.id === id)) ?? null;
+
+export function standingsOf(board: BoardFacts): Map<string, Standing> {
+  const index = indexBoard(board);
+  return new Map(
+    board.batches
+      .filter(({ stage }) => stage !== 'scrapped')
+      .map((batch) => [batch.id, standingOf(index, batch)]),
+  );
+}
+
+function standingOf(index: BoardIndex, batch: Batch): Standing {
+  const { id, chainId, brewOn, link } = batch;
+  // On the bench the order means nothing to anybody's yeast.
+  return { id, chainId, afterId: chainId === null ? null : mateBefore(index, batch), brewOn, link };
+}
+
+function mateBefore(index: BoardIndex, { id, chainId }: Batch): string | null {
+  const mates = chainId === null ? index.bench : index.batchesOf(chainId);
+  return mates[mates.findIndex((mate) => mate.id === id) - 1]?.id ?? null;
+}

@@ -1,0 +1,127 @@
+import { and, desc, eq, gt, sql } from 'drizzle-orm';
+import type { Moved } from '#shared/api/move.ts';
+import { withRows } from '#shared/chain/move.ts';
+import type { Member } from '../../auth/whoAsks.ts';
+import { inTransaction } from '../../db/inTransaction.ts';
+import { change } from '../../db/schema/change.ts';
+import { person } from '../../db/schema/people.ts';
+import type { Deps } from '../../deps.ts';
+import { problem } from '../../problems.ts';
+import { readBoard, type Hand } from '../board/changeBoard.ts';
+import { lockSeason, lockShelves } from '../board/locks.ts';
+import { raiseRevision, writeEntry } from '../board/record.ts';
+import { insertChainRow } from '../chains/commands.ts';
+import { answerAgain, answerMove, shiftedBetween } from './answer.ts';
+import { newestOwn } from './newest.ts';
+import { revert, type Reverted } from './revert.ts';
+import { sidesOf, type Side } from './standing.ts';
+import { dropChain, storeRows } from './store.ts';
+
+type Way = 'undo' | 'redo';
+type ChangeRow = typeof change.$inferSelect;
+
+/** Takes one's newest move back, or does the one again that was taken back last. */
+export function takeBack(
+  deps: Pick<Deps, 'db' | 'clock'>,
+  member: Member,
+  way: Way,
+  changeId: string,
+): Promise<Moved> {
+  return inTransaction(deps.db, async (tx) => {
+    await lockShelves(tx, member.seasonId, 'all');
+    await lockSeason(tx, member.seasonId);
+    const now = deps.clock.now();
+    const hand = { tx, member, board: await readBoard(tx, member, now), now };
+    const newest = await newestOwn(tx, member.seasonId, member.person.id);
+    if (newest[way]?.id === changeId) return carryOut(hand, way, await rowOf(hand, changeId));
+    const done = await doneAlready(hand, way, changeId);
+    if (done) return answerAgain(hand, done);
+    throw problem('not-undoable', { detail: notNewest(way, newest[way]?.what) });
+  });
+}
+
+const notNewest = (way: Way, what: string | undefined) =>
+  what === undefined ? `There is nothing to ${way}` : `The newest change to ${way} is: ${what}`;
+
+async function rowOf({ tx }: Hand, id: string): Promise<ChangeRow> {
+  const [row] = await tx.select().from(change).where(eq(change.id, id));
+  if (!row) throw problem('not-undoable');
+  return row;
+}
+
+/** The same request again: its answer was lost, and what it asked for stands. */
+async function doneAlready({ tx, member }: Hand, way: Way, changeId: string) {
+  const [last] = await tx
+    .select()
+    .from(change)
+    .where(and(eq(change.ofChange, changeId), eq(change.personId, member.person.id)))
+    .orderBy(desc(change.seq))
+    .limit(1);
+  return last?.kind === way ? last : null;
+}
+
+async function carryOut(hand: Hand, way: Way, row: ChangeRow): Promise<Moved> {
+  const [before, after] = [row.before as Side, row.after as Side];
+  const [from, to] = way === 'undo' ? [after, before] : [before, after];
+  const result = revert(hand.board, from, to);
+  if (!result.ok) throw await refusal(hand, row, result);
+  return store(hand, way, row, result);
+}
+
+type Granted = Extract<Reverted, { ok: true }>;
+
+async function store(hand: Hand, way: Way, row: ChangeRow, result: Granted): Promise<Moved> {
+  const { tx, member, board, now } = hand;
+  const { rows, added, removedChainId } = result;
+  const revision = await raiseRevision(tx, member.seasonId);
+  if (added) await insertChainRow(hand, added);
+  const batches = await storeRows(hand, rows);
+  if (removedChainId !== null) await dropChain(hand, removedChainId);
+  const withAdded = withRows(board, rows, added ? [added] : []);
+  const after = {
+    ...withAdded,
+    chains: withAdded.chains.filter(({ id }) => id !== removedChainId),
+  };
+  const sides = sidesOf(board, after, row.touches[0] ?? '');
+  const what = `${way === 'undo' ? 'Undone' : 'Redone'}: ${row.what}`;
+  await writeEntry(tx, member, now, {
+    kind: way,
+    what,
+    ...sides,
+    touches: sides.after.batches.map(({ id }) => id),
+    ofChange: row.id,
+  });
+  return answerMove(hand, {
+    changeId: row.id,
+    what,
+    revision,
+    batches,
+    chains: added ? [added] : [],
+    removedChainIds: removedChainId === null ? [] : [removedChainId],
+    shifted: shiftedBetween(sides.before, sides.after),
+  });
+}
+
+/** Names who changed the same thing since, and what they did. */
+async function refusal(
+  { tx, board }: Hand,
+  row: ChangeRow,
+  { detail, touched }: Extract<Reverted, { ok: false }>,
+) {
+  const [since] = await tx
+    .select({ who: person.name, what: change.what })
+    .from(change)
+    .innerJoin(person, eq(person.id, change.personId))
+    .where(
+      and(
+        eq(change.seasonId, board.season.id),
+        gt(change.seq, row.seq),
+        sql`${touched}::uuid = any(${change.touches})`,
+      ),
+    )
+    .orderBy(desc(change.seq))
+    .limit(1);
+  const current = board.batches.find(({ id }) => id === touched);
+  const said = since ? `${detail}. ${since.who}: ${since.what}` : detail;
+  return problem('not-undoable', { detail: said, current });
+}

@@ -1,0 +1,88 @@
+import { and, desc, eq, isNull } from 'drizzle-orm';
+import { alias } from 'drizzle-orm/pg-core';
+import type { JoinLink, JoinLinkMade, Role } from '#shared/api/people.ts';
+import { hashToken, newToken } from '../../auth/tokens.ts';
+import type { Member } from '../../auth/whoAsks.ts';
+import type { Clock } from '../../clock.ts';
+import type { Db } from '../../db/client.ts';
+import { joinLink } from '../../db/schema/brewery.ts';
+import { person } from '../../db/schema/people.ts';
+import { problem } from '../../problems.ts';
+
+const GOOD_FOR_MS = 7 * 24 * 60 * 60 * 1000;
+
+const maker = alias(person, 'maker');
+const user = alias(person, 'user_of_it');
+
+export async function listJoinLinks(db: Db, { brewery }: Member): Promise<JoinLink[]> {
+  const rows = await db
+    .select({ link: joinLink, createdBy: maker.name, usedBy: user.name })
+    .from(joinLink)
+    .innerJoin(maker, eq(maker.id, joinLink.createdBy))
+    .leftJoin(user, eq(user.id, joinLink.usedBy))
+    .where(eq(joinLink.breweryId, brewery.id))
+    .orderBy(desc(joinLink.createdAt));
+  return rows.map(({ link, createdBy, usedBy }) => ({
+    id: link.id,
+    role: link.role,
+    createdBy,
+    expiresAt: link.expiresAt.toISOString(),
+    usedAt: link.usedAt?.toISOString() ?? null,
+    usedBy,
+  }));
+}
+
+/**
+ * Asked again under the same id (the answer was lost), it gives a new token for the same link: the
+ * first one cannot be told again, since only its hash is stored.
+ */
+export async function makeJoinLink(
+  db: Db,
+  clock: Clock,
+  { brewery, person: head }: Member,
+  { id, role }: { id: string; role: Role },
+): Promise<JoinLinkMade> {
+  const token = newToken();
+  const now = clock.now();
+  const expiresAt = new Date(now.getTime() + GOOD_FOR_MS);
+  const [made] = await db
+    .insert(joinLink)
+    .values({
+      id,
+      role,
+      breweryId: brewery.id,
+      tokenHash: hashToken(token),
+      createdBy: head.id,
+      createdAt: now,
+      expiresAt,
+    })
+    .onConflictDoUpdate({
+      target: joinLink.id,
+      set: { tokenHash: hashToken(token) },
+      setWhere: and(
+        eq(joinLink.breweryId, brewery.id),
+        eq(joinLink.createdBy, head.id),
+        eq(joinLink.role, role),
+        isNull(joinLink.usedAt),
+      ),
+    })
+    .returning();
+  if (!made) throw problem('already-exists', { detail: 'This id is in use: make a new one' });
+  return {
+    id,
+    role,
+    createdBy: head.name,
+    expiresAt: made.expiresAt.toISOString(),
+    usedAt: null,
+    usedBy: null,
+    token,
+  };
+}
+
+export async function withdrawJoinLink(db: Db, { brewery }: Member, id: string): Promise<boolean> {
+  const gone = await db
+    .delete(joinLink)
+    .where(and(eq(joinLink.breweryId, brewery.id), eq(joinLink.id, id)))
+    .returning({ id: joinLink.id });
+  return gone.length > 0;
+}

@@ -1,0 +1,60 @@
+import { and, eq, sql } from 'drizzle-orm';
+import { vesselCreate, type VesselCreate, type VesselPatch } from '#shared/api/vessel.ts';
+import { vessel } from '../../db/schema/stock.ts';
+import { demandMade, isRepeated } from '../../http/create.ts';
+import { demandVersion } from '../../http/etag.ts';
+import { merged } from '../../http/patch.ts';
+import { problem } from '../../problems.ts';
+import type { Command, Hand } from '../board/changeBoard.ts';
+import { one } from '../board/find.ts';
+
+export const addVessel =
+  (body: VesselCreate): Command =>
+  async ({ tx, board, member }) => {
+    if (
+      isRepeated(
+        board.vessels.find(({ id }) => id === body.id),
+        body,
+      )
+    )
+      return null;
+    const values = { ...body, breweryId: member.brewery.id };
+    demandMade(
+      await tx.insert(vessel).values(values).onConflictDoNothing().returning({ id: vessel.id }),
+    );
+    return { what: `Added ${body.name}`, before: null, after: body, touches: [body.id] };
+  };
+
+export const editVessel =
+  (id: string, version: number, patch: VesselPatch): Command =>
+  async ({ tx, board, member }) => {
+    const row = one(board.vessels, id);
+    demandVersion(version, row.version, row);
+    const { id: _, ...fields } = merged(vesselCreate, Object.keys(vesselCreate.shape), row, patch);
+    await tx
+      .update(vessel)
+      .set({ ...fields, version: sql`${vessel.version} + 1` })
+      .where(and(eq(vessel.breweryId, member.brewery.id), eq(vessel.id, id)));
+    return { what: `Changed ${row.name}`, before: row, after: patch, touches: [id] };
+  };
+
+export const removeVessel =
+  (id: string, version: number): Command =>
+  async (hand) => {
+    const row = one(hand.board.vessels, id);
+    demandVersion(version, row.version, row);
+    const users = usersOf(hand, id);
+    if (users.length > 0)
+      throw problem('in-use', { detail: `${row.name} is used by ${users.join(', ')}` });
+    await hand.tx
+      .delete(vessel)
+      .where(and(eq(vessel.breweryId, hand.member.brewery.id), eq(vessel.id, id)));
+    return { what: `Deleted ${row.name}`, before: row, after: null, touches: [id] };
+  };
+
+/** Names of the shelves and batches that would be left without it. */
+function usersOf({ board }: Hand, id: string): string[] {
+  return [...board.chains, ...board.batches]
+    .filter((user) => user.vesselId === id)
+    .map((user) => user.name);
+}
