@@ -10,10 +10,13 @@ export interface SegmentedFieldProps {
   options: readonly Option[];
   hint?: ReactNode;
   className?: string;
+  /** Told of a choice, after the form knows it. */
+  onPicked?: (value: string) => void;
 }
 
 /** One of two to four, all in sight: radio buttons drawn as one bar. */
-export function SegmentedField({ name, label, options, hint, className }: SegmentedFieldProps) {
+export function SegmentedField(props: SegmentedFieldProps) {
+  const { name, label, options, hint, className, onPicked } = props;
   const state = useField(name, hint !== undefined);
   const { field } = useController({ name });
   return (
@@ -31,7 +34,10 @@ export function SegmentedField({ name, label, options, hint, className }: Segmen
               name={state.id}
               value={option.value}
               checked={field.value === option.value}
-              onChange={() => field.onChange(option.value)}
+              onChange={() => {
+                field.onChange(option.value);
+                onPicked?.(option.value);
+              }}
               className="sr-only"
             />
             {option.label}

@@ -1,6 +1,7 @@
 import { toNestErrors } from '@hookform/resolvers';
 import type { FieldErrors, FieldValues, Resolver } from 'react-hook-form';
 import type { z } from 'zod';
+import { issueWords } from './issueWords.ts';
 import { collect } from './written.ts';
 
 export interface ContractOptions {
@@ -25,7 +26,7 @@ export function contractResolver<Values extends FieldValues, Output extends Fiel
     const flat: Record<string, { type: string; message: string }> = {};
     if (!parsed.success)
       for (const issue of parsed.error.issues)
-        flat[issue.path.join('.')] ??= { type: issue.code, message: issue.message };
+        flat[issue.path.join('.')] ??= { type: issue.code, message: issueWords(issue, values) };
     for (const fault of faults) flat[fault.path] = { type: 'unreadable', message: fault.why };
     if (parsed.success && faults.length === 0) return { values: parsed.data, errors: {} };
     const errors = toNestErrors(flat as FieldErrors<Values>, options);

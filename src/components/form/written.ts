@@ -13,6 +13,8 @@ export interface Written {
   why: string | null;
   /** What to store beside the number; absent until somebody typed it. */
   typed: TypedText | undefined;
+  /** Units in which it is shown and read. */
+  prefs: UnitPrefs;
 }
 
 /** A field as it opens: the text that was once typed if it still agrees with the stored number. */
@@ -24,14 +26,14 @@ export function written(
 ): Written {
   const reader = readerOf(kind, prefs);
   const text = value === null ? '' : reader.write(value, typed);
-  return { kind, text, unit: reader.unit, value, why: null, typed };
+  return { kind, text, unit: reader.unit, value, why: null, typed, prefs };
 }
 
 /** A field after somebody typed. Empty is no number, and no fault. */
 export function rewrite(before: Written, text: string, prefs: UnitPrefs): Written {
   const reader = readerOf(before.kind, prefs);
   const typed = { text: text.trim(), unit: reader.unit };
-  const start = { ...before, text, unit: reader.unit, typed };
+  const start = { ...before, text, unit: reader.unit, typed, prefs };
   if (text.trim() === '') return { ...start, value: null, why: null };
   const reading = reader.read(text);
   return reading.ok
@@ -39,7 +41,7 @@ export function rewrite(before: Written, text: string, prefs: UnitPrefs): Writte
     : { ...start, value: null, why: reading.why };
 }
 
-const isWritten = (value: unknown): value is Written =>
+export const isWritten = (value: unknown): value is Written =>
   typeof value === 'object' &&
   value !== null &&
   'why' in value &&

@@ -4,7 +4,7 @@ import { useUnits } from '../../app/useUnits.ts';
 import { moneyKind } from '../../components/form/plainNumbers.ts';
 import { SelectField } from '../../components/form/SelectField.tsx';
 import { TextField } from '../../components/form/TextField.tsx';
-import { written } from '../../components/form/written.ts';
+import { written, type Written } from '../../components/form/written.ts';
 import { StartFields } from './StartFields.tsx';
 
 export function ChainFields({ chainId }: { chainId: string }) {
@@ -36,13 +36,16 @@ export function ChainFields({ chainId }: { chainId: string }) {
 function useTakeYeast() {
   const { yeasts, brewery } = useBoard();
   const units = useUnits();
-  const { getValues, setValue, getFieldState } = useFormContext();
+  const { getValues, setValue } = useFormContext();
+  const priceOf = (packPrice: number | null) =>
+    written(moneyKind(brewery.currency), packPrice, units);
   return (yeastId: string | null) => {
     const yeast = yeasts.find((one) => one.id === yeastId);
     if (!yeast) return;
     const named = String(getValues('name')).trim();
     if (named === '' || yeasts.some((one) => one.name === named)) setValue('name', yeast.name);
-    if (!getFieldState('start.price').isDirty)
-      setValue('start.price', written(moneyKind(brewery.currency), yeast.packPrice, units));
+    const price = (getValues('start.price') as Written).text;
+    if (price === '' || yeasts.some((one) => priceOf(one.packPrice).text === price))
+      setValue('start.price', priceOf(yeast.packPrice));
   };
 }
