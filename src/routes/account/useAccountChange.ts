@@ -1,0 +1,25 @@
+import { useMutation } from '@tanstack/react-query';
+import { person, type AccountPatch, type Person } from '#shared/api/people.ts';
+import { useAccountPatch } from '../../api/account.ts';
+import { isProblem } from '../../api/errors.ts';
+
+/**
+ * Changes one's own account. It has one owner, so a change made meanwhile in another window is no
+ * quarrel: this one is made on top of it.
+ */
+export function useAccountChange(me: Person) {
+  const patch = useAccountPatch();
+  return useMutation({
+    mutationFn: async (change: AccountPatch) => {
+      try {
+        return await patch.mutateAsync({ version: me.version, patch: change });
+      } catch (error) {
+        const now = isProblem(error, 'changed-since')
+          ? person.safeParse(error.problem.current)
+          : null;
+        if (!now?.success) throw error;
+        return patch.mutateAsync({ version: now.data.version, patch: change });
+      }
+    },
+  });
+}
