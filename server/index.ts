@@ -56,13 +56,18 @@ function listen(server: Server, config: Config): Promise<string> {
   });
 }
 
+function fail(error: unknown): void {
+  const log = createLog('info');
+  const sentences = explain(error);
+  for (const sentence of sentences) log.error(sentence);
+  // Connections that are open by now would keep the process alive.
+  const exit = () => process.exit(1);
+  if (process.send === undefined) exit();
+  else process.send({ type: 'failed', sentences }, exit);
+}
+
 try {
   await main();
 } catch (error) {
-  const log = createLog('info');
-  for (const sentence of explain(error)) log.error(sentence);
-  if (process.env.LOG_LEVEL === 'debug') log.error({ err: error });
-  process.send?.({ type: 'failed', sentences: explain(error) });
-  process.exitCode = 1;
-  if (process.connected) process.disconnect();
+  fail(error);
 }

@@ -10,7 +10,8 @@ const isApi = (path: string) => /^\/api(\/|$)/.test(path);
 
 /** A page's address, as opposed to a file's or the API's. */
 function wantsPage(method: string, path: string): boolean {
-  return (method === 'GET' || method === 'HEAD') && !isApi(path) && !/\.[a-z0-9]{2,5}$/i.test(path);
+  const isFile = /^\/assets(\/|$)/.test(path) || /\.[a-z0-9]{2,5}$/i.test(path);
+  return (method === 'GET' || method === 'HEAD') && !isApi(path) && !isFile;
 }
 
 /**
