@@ -4,6 +4,7 @@ import type { VesselShape } from '#shared/api/vessel.ts';
 import type { Gap } from '#shared/chain/gaps.ts';
 import { Silhouette } from '../../../components/drawn/Silhouette.tsx';
 import { VerdictMark } from '../../../components/drawn/VerdictMark.tsx';
+import { SHELF } from '../view/drawing.ts';
 import { OUTLINE_TONE, WORD_TONE } from './gapTones.ts';
 import { gapDay, gapWord } from './words.ts';
 
@@ -13,8 +14,8 @@ interface GapFaceProps {
   shape: VesselShape;
 }
 
-/** Height above the shelf's edge and of the edge itself, as the shelves are drawn. */
-const ABOVE = 140;
+/** Height down to the foot of a vessel on the shelf, and of what is under it before the tag. */
+const ABOVE = SHELF.top + 2;
 const EDGE = 13;
 
 /** An open place: the vessel that would stand there, the verdict in shape and word, day, reason. */
@@ -23,14 +24,14 @@ export const GapFace = memo(function GapFace({ gap, isOver, shape }: GapFaceProp
   return (
     <div
       className={clsx(
-        'gap-open absolute inset-x-[3px] top-1 -bottom-1 rounded-xl',
+        'gap-open absolute inset-x-[3px] top-1 bottom-px rounded-xl',
         gap.best ? 'bg-pour-l' : isOver ? 'bg-white' : 'bg-white/55',
-        isMarked && 'outline-3 outline-bottle',
+        isMarked && 'outline-3 -outline-offset-3 outline-bottle',
         gap.best && isOver && 'ring-4 ring-bottle/30',
       )}
     >
       {gap.best && (
-        <span className="absolute -top-3 left-2 z-10 rounded-verdict bg-bottle px-3 py-[3px] text-label leading-[1.2] font-bold whitespace-nowrap text-on-bottle">
+        <span className="absolute top-2 left-1/2 z-10 -translate-x-1/2 rounded-verdict bg-bottle px-3 py-[3px] text-label leading-[1.2] font-bold whitespace-nowrap text-on-bottle">
           Best gap
         </span>
       )}

@@ -1,4 +1,3 @@
-import { useDroppable } from '@dnd-kit/core';
 import { memo, useEffect, useRef } from 'react';
 import type { VesselShape } from '#shared/api/vessel.ts';
 import { BarFace } from './BarFace.tsx';
@@ -29,8 +28,6 @@ function useInSight(isOver: boolean) {
   return ref;
 }
 
-const NO_MEASURING = { disabled: true };
-
 /**
  * A place between two batches. It fills the room that the board keeps for it, is nothing while no
  * batch is lifted, and is drawn anew only when its own judgement or its own turn comes.
@@ -42,17 +39,12 @@ export const GapSlot = memo(function GapSlot({ gapKey, vesselShape, layout }: Ga
   const locked = useLiftState(({ lifted }) => lifted?.locks.get(gapKey));
   const isOver = useLiftState((state) => state.over === gapKey);
   const shape = useLiftState(({ lifted }) => lifted?.shape) ?? vesselShape;
-  const { setNodeRef } = useDroppable({ id: gapKey, resizeObserverConfig: NO_MEASURING });
   const ref = useInSight(isOver);
-  const attach = (node: HTMLDivElement | null) => {
-    setNodeRef(node);
-    ref.current = node;
-  };
   const isBar = layout === 'bar' || gapKey === 'bench';
   return (
     <div
-      ref={attach}
-      className="absolute inset-0"
+      ref={ref}
+      className="absolute inset-0 scroll-mx-12 scroll-mt-20 scroll-mb-32"
       data-gap={gapKey}
       data-gap-open={gap && isOpen(gap) ? gapKey : undefined}
     >

@@ -1,40 +1,28 @@
-import { useDraggable } from '@dnd-kit/core';
-import type { PointerEvent, ReactNode } from 'react';
-import { useLiftMachine, useLiftState } from './liftContext.ts';
+import type { PointerEvent, ReactNode, RefObject } from 'react';
 import { useBoard } from '../../../api/board.ts';
 import { useOnline } from '../../../app/useOnline.ts';
+import type { Grab } from './Hand.tsx';
+import { useLiftMachine, useLiftState } from './liftContext.ts';
 import { whyFixed } from './lifting.ts';
+import { pressed } from './pointer.ts';
 
-/** Things inside a batch that are pressed for themselves. */
-const OWN_PRESS = 'a, button:not([data-lift-handle]), input, select, textarea, summary, label';
-
-/** The batch that a press would lift. A finger lifts by the handle only, so that it can scroll. */
-function pressed(event: PointerEvent): { batchId: string; node: HTMLElement } | null {
-  if (!(event.target instanceof Element) || event.target.closest(OWN_PRESS)) return null;
-  const handle = event.target.closest<HTMLElement>('[data-lift-handle]');
-  if (event.pointerType !== 'mouse' && !handle) return null;
-  const node = event.target.closest<HTMLElement>('[data-batch]') ?? handle;
-  const batchId = node?.dataset.batch ?? node?.dataset.liftHandle;
-  return node && batchId ? { batchId, node } : null;
+interface LiftSurfaceProps {
+  grab: RefObject<Grab | null>;
+  children: ReactNode;
 }
 
-/**
- * The board as one draggable for all of its batches: a press says which one it is. With a
- * draggable for each, two hundred of them would be drawn anew at every gap that is passed.
- */
-export function LiftSurface({ children }: { children: ReactNode }) {
+/** Everything that can be lifted from or put into; marks the page while a batch is lifted. */
+export function LiftSurface({ grab, children }: LiftSurfaceProps) {
   const board = useBoard();
   const online = useOnline();
   const { store, lifting } = useLiftMachine();
   const isLifting = useLiftState((state) => state.lifted !== null);
-  const { setNodeRef, listeners } = useDraggable({ id: 'hand' });
 
   const onPointerDown = (event: PointerEvent) => {
-    const press = pressed(event);
+    const press = pressed(event.target, event.pointerType);
     if (!press || !online || store.get().lifted || whyFixed(board, press.batchId)) return;
     lifting.press(press.batchId);
-    setNodeRef(press.node);
-    listeners?.onPointerDown?.(event);
+    grab.current?.(event, press.node);
   };
 
   return (

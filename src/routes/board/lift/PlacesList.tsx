@@ -13,6 +13,8 @@ interface PlacesListProps {
   ranked: readonly Gap[];
   /** The place that the keys or the pointer are on. */
   over: string | null;
+  /** Brings that place into sight in the list; not under a moving pointer. */
+  follow?: boolean;
   onPut: (gap: Gap) => void;
 }
 
@@ -20,9 +22,10 @@ interface PlacesListProps {
 const SHOWN = 12;
 
 /** Ranked places as buttons: all that the gaps on the shelves say, without a drag. */
-export function PlacesList({ board, batchId, ranked, over, onPut }: PlacesListProps) {
+export function PlacesList(props: PlacesListProps) {
+  const { board, batchId, ranked, over, follow = false, onPut } = props;
   const [all, setAll] = useState(false);
-  const walkedTo = ranked.findIndex((gap) => gap.key === over) + 1;
+  const walkedTo = !follow ? 0 : ranked.findIndex((gap) => gap.key === over) + 1;
   const shown = all ? ranked : ranked.slice(0, Math.max(SHOWN, walkedTo));
   const rest = ranked.length - shown.length;
   return (
@@ -31,7 +34,7 @@ export function PlacesList({ board, batchId, ranked, over, onPut }: PlacesListPr
         {shown.map((gap) => (
           <PlaceRow
             key={gap.key}
-            {...{ gap, onPut }}
+            {...{ gap, onPut, follow }}
             title={placeTitle(board, gap)}
             where={placeWords(board, gap, batchId)}
             reason={reasonWords(board, gap)}
@@ -54,14 +57,15 @@ interface PlaceRowProps {
   where: string;
   reason: string;
   isOver: boolean;
+  follow: boolean;
   onPut: (gap: Gap) => void;
 }
 
 const PlaceRow = memo(function PlaceRow(props: PlaceRowProps) {
-  const { gap, title, where, reason, isOver, onPut } = props;
+  const { gap, title, where, reason, isOver, follow, onPut } = props;
   return (
     <li
-      ref={(row) => (isOver ? row?.scrollIntoView({ block: 'nearest' }) : undefined)}
+      ref={(row) => (isOver && follow ? row?.scrollIntoView({ block: 'nearest' }) : undefined)}
       className={clsx(
         'flex items-center gap-3 px-3.5 py-2.5',
         gap.best

@@ -16,10 +16,14 @@ export function PlacesPanel() {
     <section aria-label={`Where ${lifted.name} can go`} className="flex flex-col">
       <h2 className="text-h2 [overflow-wrap:anywhere]">Where {lifted.name} can go</h2>
       <PlacesLead batchId={batchId} />
-      <div className="mt-3.5">
-        <PlacesList {...{ board, batchId, ranked, over }} onPut={(gap) => drop(machine, gap.key)} />
-      </div>
       {by === 'keys' && <KeyLegend />}
+      <div className="mt-3.5">
+        <PlacesList
+          {...{ board, batchId, ranked, over }}
+          follow={by === 'keys'}
+          onPut={(gap) => drop(machine, gap.key)}
+        />
+      </div>
       <HoldsCanBeChosen />
     </section>
   );
@@ -27,7 +31,7 @@ export function PlacesPanel() {
 
 function KeyLegend() {
   return (
-    <dl className="mt-4 flex flex-wrap gap-x-4 gap-y-1.5 text-small text-ink2">
+    <dl className="mt-3 flex flex-wrap gap-x-4 gap-y-1.5 text-small text-ink2">
       {KEY_LEGEND.map(({ keys, does }) => (
         <div key={does} className="flex items-center gap-1.5 whitespace-nowrap">
           <dt className="flex gap-1">

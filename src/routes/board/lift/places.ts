@@ -38,24 +38,30 @@ export function walkOf(board: BoardFacts, ranked: readonly Gap[], batchId: strin
   };
 }
 
-const at = (keys: readonly string[], index: number) =>
+const clamped = (keys: readonly string[], index: number) =>
   keys[Math.min(Math.max(index, 0), keys.length - 1)] ?? null;
 
-/** The place that a step leads to; at either end of a row it stays where it is. */
+const around = (keys: readonly string[], index: number) =>
+  keys.at(keys.length === 0 ? 0 : index % keys.length) ?? null;
+
+/**
+ * The place that a step leads to. Along the shelves the walk goes round, from the last place to
+ * the first; the ranked list has a best and a worst end.
+ */
 export function step(walk: Walk, over: string | null, intent: Intent): string | null {
   const { alongShelves, ranked, start } = walk;
   const here = over === null ? -1 : alongShelves.indexOf(over);
   switch (intent) {
     case 'next':
-      return at(alongShelves, here === -1 ? start : here + 1);
+      return around(alongShelves, here === -1 ? start : here + 1);
     case 'previous':
-      return at(alongShelves, (here === -1 ? start : here) - 1);
+      return around(alongShelves, (here === -1 ? start : here) - 1);
     case 'worse':
-      return at(ranked, over === null ? 0 : ranked.indexOf(over) + 1);
+      return clamped(ranked, over === null ? 0 : ranked.indexOf(over) + 1);
     case 'better':
-      return at(ranked, over === null ? 0 : ranked.indexOf(over) - 1);
+      return clamped(ranked, over === null ? 0 : ranked.indexOf(over) - 1);
     case 'best':
-      return at(ranked, 0);
+      return clamped(ranked, 0);
     case 'put-down':
     case 'put-back':
       return over;

@@ -1,29 +1,33 @@
-import {
-  AutoScrollActivator,
-  MeasuringStrategy,
-  type CollisionDetection,
-  type Modifier,
-} from '@dnd-kit/core';
+import type { Modifier } from '@dnd-kit/core';
 
 /** How far the pointer goes, in pixels, before a press becomes a lift. */
 const ACTIVATION_PX = 6;
 export const POINTER = { activationConstraint: { distance: ACTIVATION_PX } };
 
-/**
- * The open gap under the pointer. One hit test of the browser instead of two hundred rectangles:
- * it costs the same on any board and is right while a shelf scrolls.
- */
-export const gapUnderPointer: CollisionDetection = ({
-  pointerCoordinates,
-  droppableContainers,
-}) => {
-  if (!pointerCoordinates) return [];
-  const { x, y } = pointerCoordinates;
-  const key = document.elementFromPoint(x, y)?.closest<HTMLElement>('[data-gap-open]')
-    ?.dataset.gapOpen;
-  const found = droppableContainers.find((container) => container.id === key);
-  return found ? [{ id: found.id }] : [];
-};
+/** Things inside a batch that are pressed for themselves. */
+const OWN_PRESS = 'a, button:not([data-lift-handle]), input, select, textarea, summary, label';
+
+/** The batch that a press would lift. A finger lifts by the handle only, so that it can scroll. */
+export function pressed(
+  target: EventTarget | null,
+  pointerType: string,
+): { batchId: string; node: HTMLElement } | null {
+  if (!(target instanceof Element) || target.closest(OWN_PRESS)) return null;
+  const handle = target.closest<HTMLElement>('[data-lift-handle]');
+  if (pointerType !== 'mouse' && !handle) return null;
+  const node = target.closest<HTMLElement>('[data-batch]') ?? handle;
+  const batchId = node?.dataset.batch ?? node?.dataset.liftHandle;
+  return node && batchId ? { batchId, node } : null;
+}
+
+export interface Point {
+  x: number;
+  y: number;
+}
+
+/** The open gap that an element belongs to. */
+export const gapIn = (element: Element | null): string | null =>
+  element?.closest<HTMLElement>('[data-gap-open]')?.dataset.gapOpen ?? null;
 
 /** Where the pointer holds the carried card, from its corner. */
 const GRIP = { x: 22, y: 96 };
@@ -39,14 +43,6 @@ export const AT_POINTER: Modifier[] = [
     };
   },
 ];
-
-/** Gaps lie in reserved room and do not move: they are measured once. */
-export const MEASURING = { droppable: { strategy: MeasuringStrategy.BeforeDragging } };
-
-export const AUTO_SCROLL = {
-  activator: AutoScrollActivator.Pointer,
-  threshold: { x: 0.12, y: 0.14 },
-};
 
 const nothing = () => undefined;
 

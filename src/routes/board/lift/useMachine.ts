@@ -20,16 +20,26 @@ function focusBatch(batchId: string) {
   requestAnimationFrame(() => requestAnimationFrame(focus));
 }
 
-/** Every gap on the page, nearest to the batch first. */
+/** Height of a box above or below a line; 0 where the line crosses it. */
+const away = ({ top, bottom }: DOMRect, y: number) => Math.max(top - y, y - bottom, 0);
+
+/**
+ * Every gap on the page, those of the nearest shelf first. Only shelves are measured: what is out
+ * of sight inside them is not laid out, and asking for its place would make it so.
+ */
 function gapsAround(batchId: string): string[] {
-  const box = (handleOf(batchId) ?? document.body).getBoundingClientRect();
-  const nodes = [...document.querySelectorAll<HTMLElement>('[data-gap]')];
-  const distances = nodes.map((node) => {
-    const { left, top, width, height } = node.getBoundingClientRect();
-    const away = Math.hypot(left + width / 2 - box.left, top + height / 2 - box.top);
-    return { key: node.dataset.gap ?? '', away };
-  });
-  return distances.toSorted((a, b) => a.away - b.away).map(({ key }) => key);
+  const y = handleOf(batchId)?.getBoundingClientRect().top ?? 0;
+  const distances = new Map<Element, number>();
+  const distance = (node: Element) => {
+    const shelf = node.closest('[data-chain]') ?? node;
+    const known = distances.get(shelf) ?? away(shelf.getBoundingClientRect(), y);
+    distances.set(shelf, known);
+    return known;
+  };
+  return [...document.querySelectorAll<HTMLElement>('[data-gap]')]
+    .map((node) => ({ key: node.dataset.gap ?? '', distance: distance(node) }))
+    .toSorted((a, b) => a.distance - b.distance)
+    .map(({ key }) => key);
 }
 
 function portsOf(client: QueryClient, slug: string, say: (words: string) => void): LiftPorts {

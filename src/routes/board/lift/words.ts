@@ -7,6 +7,8 @@ const nameOf = (rows: readonly { id: string; name: string }[], id: string | null
 
 export const batchName = (board: BoardFacts, id: string) => nameOf(board.batches, id);
 
+const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
+
 export const plural = (count: number, one: string, many: string) =>
   `${count} ${count === 1 ? one : many}`;
 
@@ -97,7 +99,7 @@ export function liftedWords(board: BoardFacts, batchId: string, best: Gap | unde
 
 export function walkedWords(board: BoardFacts, gap: Gap, batchId: string): string {
   const best = gap.best ? 'Best gap. ' : '';
-  return `${best}${placeWords(board, gap, batchId)}. ${judgementWords(gap)}.`;
+  return `${best}${capital(placeWords(board, gap, batchId))}. ${judgementWords(gap)}.`;
 }
 
 export function droppedWords(
