@@ -1,9 +1,10 @@
 import { cpus } from 'node:os';
 import { engine } from './engine.ts';
+import { pages } from './pages.ts';
 import type { Part, Row } from './row.ts';
 
 /** Each part of the bench; one may be asked for by name. */
-const PARTS: readonly Part[] = [engine];
+const PARTS: readonly Part[] = [engine, pages];
 
 async function main(names: readonly string[]): Promise<void> {
   const unknown = names.filter((name) => !PARTS.some((part) => part.name === name));
