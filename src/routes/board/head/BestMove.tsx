@@ -8,9 +8,9 @@ export function BestMove() {
   const put = usePut();
   if (!move) return null;
   return (
-    <p className="flex basis-full flex-wrap items-center gap-x-3 gap-y-1 text-small text-ink2">
-      <span>
-        <b className="text-ink">The move that would help most:</b> {move.what}
+    <p className="flex basis-full items-center gap-3 text-small text-ink2">
+      <span className="min-w-0">
+        <b className="text-ink">The move that would help most:</b> {move.what.replace(/^Move /, '')}
       </span>
       <Button size="small" look="quiet" onClick={() => put(move.batchId, move.gap)}>
         Move it

@@ -12,7 +12,7 @@ export function BoardHead() {
   const { board, judged, can } = useBoardView();
   const { open } = useBoardPanel();
   return (
-    <header className="flex flex-wrap items-end gap-x-5 gap-y-3 px-7 pt-5 pb-2">
+    <header className="flex flex-wrap items-end gap-x-5 gap-y-3 px-7 pt-4 pb-1.5">
       <div className="min-w-0 flex-1 basis-80">
         <h1 className="text-h1 tracking-[-0.025em]">
           <SeasonName />

@@ -27,9 +27,11 @@ export function BlendTable({ earlier, later, answer }: BlendTableProps) {
   return (
     <table className="mt-3 mb-1 w-full border-collapse text-[0.90625rem]">
       <thead>
-        <tr className="text-small text-ink2 *:border-b *:border-line2 *:py-[5px] *:text-right *:font-semibold">
+        <tr className="text-small text-ink2 *:border-b *:border-line2 *:py-[5px] *:pl-2 *:text-right *:font-semibold *:whitespace-nowrap">
           <td />
-          <th scope="col">beer on the cake</th>
+          <th scope="col">
+            <span className="sr-only">beer </span>on the cake
+          </th>
           <th scope="col">new wort</th>
           <th scope="col">as poured</th>
         </tr>

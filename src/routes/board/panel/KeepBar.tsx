@@ -1,7 +1,8 @@
 import { useRef } from 'react';
 import type { LinkAnswer } from '#shared/rules/answer.ts';
-import { format, formatBare } from '#shared/units/quantity.ts';
+import { format } from '#shared/units/quantity.ts';
 import { useBoardView } from '../view/BoardView.tsx';
+import { spanWords } from './keepWords.ts';
 
 interface KeepBarProps {
   answer: LinkAnswer;
@@ -23,9 +24,7 @@ export function KeepBar({ answer, kept, onTry, onKeep }: KeepBarProps) {
   const enough = answer.keep.recommendedL;
   const at = enough === null ? null : share(enough, whole) * 100;
   const { volumeInterval } = answer.cake;
-  const interval = volumeInterval
-    ? ` (${formatBare('smallVolume', volumeInterval.low, units)}–${formatBare('smallVolume', volumeInterval.high, units)})`
-    : '';
+  const interval = volumeInterval ? ` (${spanWords(volumeInterval, units)})` : '';
   return (
     <div className="mt-1.5 text-small">
       {at !== null && enough !== null && (

@@ -27,7 +27,7 @@ export function KeepCake({ draft }: { draft: LinkDraft }) {
     );
   const kept = answer.keep.keptL ?? whole;
   const mayChange = can.editBatches && later.stage === 'pencilled';
-  const notes = [enoughWords(answer), surplusWords(answer, units), thumbWords(answer, units)];
+  const notes = [enoughWords(answer), surplusWords(answer), thumbWords(answer, units)];
   return (
     <PanelPart title="How much cake to keep">
       <KeepBar
@@ -37,7 +37,7 @@ export function KeepCake({ draft }: { draft: LinkDraft }) {
       />
       {mayChange && (
         <div className="mt-2 flex flex-wrap items-end gap-2">
-          <div className="w-36">
+          <div className="w-28">
             <InlineQuantity
               kind="smallVolume"
               label="Kept part"
@@ -72,13 +72,19 @@ function KeepChoices({ kept, save }: { kept: Kept; save: Save }) {
   return (
     <>
       <Button
+        size="small"
         look="quiet"
         disabled={kept === 'recommended'}
         onClick={() => save('recommended', null)}
       >
-        As recommended
+        Recommended
       </Button>
-      <Button look="quiet" disabled={kept === 'whole'} onClick={() => save('whole', null)}>
+      <Button
+        size="small"
+        look="quiet"
+        disabled={kept === 'whole'}
+        onClick={() => save('whole', null)}
+      >
         Keep all
       </Button>
     </>

@@ -1,5 +1,5 @@
 import type { UnitPrefs } from '#shared/api/units.ts';
-import type { LinkAnswer } from '#shared/rules/answer.ts';
+import type { Interval, LinkAnswer } from '#shared/rules/answer.ts';
 import { format } from '#shared/units/quantity.ts';
 
 const times = (n: number): string => (n >= 10 ? n.toFixed(0) : String(Number(n.toFixed(1))));
@@ -15,13 +15,9 @@ export function enoughWords({ cake, need, keep }: LinkAnswer): string {
   return parts.length > 0 ? `${parts.join('; ')}.` : '';
 }
 
-/** What is left over and may go into a jar; null where all is kept. */
-export function surplusWords({ cake, keep }: LinkAnswer, units: UnitPrefs): string | null {
-  if (cake.volumeL === null || keep.keptL === null) return null;
-  const rest = cake.volumeL - keep.keptL;
-  if (rest < 0.05) return null;
-  return `Jar the rest, about ${format('smallVolume', rest, units)}: lid loose, kept cold, opened cold with the eyes covered.`;
-}
+/** What may be done with the rest, as the advice on this link has it. */
+export const surplusWords = ({ advice }: LinkAnswer): string | undefined =>
+  advice.find(({ id }) => id === 'jar-the-rest')?.text;
 
 /** The trade's rule of thumb by weight beside ours, and why the two differ. */
 export function thumbWords({ keep }: LinkAnswer, units: UnitPrefs): string | null {
@@ -31,4 +27,12 @@ export function thumbWords({ keep }: LinkAnswer, units: UnitPrefs): string | nul
   const thumb = `The trade's rule of thumb by weight is ${range} of slurry (common practice).`;
   if (recommendedKg === null) return thumb;
   return `${thumb} Ours is ${format('mass', recommendedKg, units)}: it meets the need even at the low end of the estimate.`;
+}
+
+/** "1.05–2.94 L": the two ends of an interval, with the unit once where both share it. */
+export function spanWords({ low, high }: Pick<Interval, 'low' | 'high'>, units: UnitPrefs): string {
+  const from = format('smallVolume', low, units);
+  const to = format('smallVolume', high, units);
+  const unit = to.slice(to.lastIndexOf(' '));
+  return `${from.endsWith(unit) ? from.slice(0, -unit.length) : from}–${to}`;
 }

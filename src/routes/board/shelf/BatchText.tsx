@@ -20,7 +20,7 @@ export function BatchText({ batch }: { batch: Batch }) {
           {batch.style}
         </p>
       )}
-      <p className="mt-0.5 text-label leading-[1.25] tracking-[-0.01em] text-ink2">
+      <p className="mt-0.5 text-[0.8125rem] leading-[1.3] tracking-[-0.015em] text-ink2">
         <b className="text-ink">{gravity}</b> {rest.join(' ')}
       </p>
       <p className="mt-0.5 flex items-center gap-1.5 text-small whitespace-nowrap text-ink2">

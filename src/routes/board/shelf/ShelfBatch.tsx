@@ -44,7 +44,7 @@ export function ShelfBatch({ batch, next, chainId }: ShelfBatchProps) {
       </div>
       <div
         className="lift-fade absolute z-[3] flex flex-col justify-end"
-        style={{ left: SHELF.vessel + 5, width: SHELF.gap - 9, top: 0, height: SHELF.top - 18 }}
+        style={{ left: SHELF.vessel + 3, width: SHELF.gap - 4, top: 0, height: SHELF.top - 18 }}
       >
         <BatchText batch={batch} />
       </div>
@@ -78,11 +78,14 @@ function Foot({ batch }: { batch: Batch }) {
   const { gravity, rest } = beerFacts(batch, units);
   return (
     <div
-      className="absolute left-0 z-[4] flex flex-col items-center text-center"
+      className="pointer-events-none absolute left-0 z-[6] flex flex-col items-center text-center"
       style={{ width: SHELF.vessel, top: SHELF.top + SHELF.board + 7 }}
     >
       <DateTag day={batch.brewOn} />
-      <div aria-hidden className="lift-show mt-1 w-[96px] text-label leading-[1.2] text-ink2">
+      <div
+        aria-hidden
+        className="lift-show mt-1 w-[96px] text-[0.8125rem] leading-[1.2] tracking-[-0.015em] text-ink2"
+      >
         <b className="line-clamp-2 text-ink">{batch.name}</b>
         {gravity} · {rest[0]}
       </div>

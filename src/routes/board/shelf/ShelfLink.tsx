@@ -28,7 +28,7 @@ export function ShelfLink({ earlier, later, link }: ShelfLinkProps) {
       type="button"
       aria-expanded={isOpen}
       onClick={() => open({ kind: 'link', laterId: later.id })}
-      className="flex w-[141px] flex-col items-start gap-[3px] rounded-chip text-left outline-offset-0"
+      className="flex w-[141px] flex-col items-start gap-[5px] rounded-chip text-left outline-offset-0"
     >
       <span className="sr-only">
         {later.name} onto {earlier.name}:

@@ -12,7 +12,7 @@ export const SHELF = {
   cell: 219,
   gap: 141,
   start: 141,
-  top: 138,
+  top: 128,
   board: 10,
   foot: 82,
 } as const;
