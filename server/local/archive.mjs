@@ -1,5 +1,6 @@
 import { createHash } from 'node:crypto';
 import {
+  chmodSync,
   cpSync,
   existsSync,
   mkdirSync,
@@ -56,6 +57,8 @@ export async function writeBackup(database, photosDir, file) {
     await must('The backup', 'tar', ['-cf', beside, '-C', folder, MANIFEST, DUMP, PHOTOS], {
       env: { ...process.env, LC_ALL: 'C' },
     });
+    // It holds addresses and hashes of passwords: for its owner's eyes.
+    chmodSync(beside, 0o600);
     renameSync(beside, file);
   });
 }
