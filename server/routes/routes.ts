@@ -10,12 +10,12 @@ import { moveRoutes } from './moves/router.ts';
 import { peopleRoutes } from './people/router.ts';
 import { seasonRoutes } from './season/router.ts';
 import { sessionRoutes } from './session/router.ts';
+import { openApiRoute } from './system/openapi.ts';
 import { systemRoutes } from './system/router.ts';
 import { vesselRoutes } from './vessels/router.ts';
 import { yeastRoutes } from './yeasts/router.ts';
 
-/** Every operation of the API. */
-export const routes: readonly Route[] = [
+const resources: readonly Route[] = [
   ...systemRoutes,
   ...sessionRoutes,
   ...accountRoutes,
@@ -31,3 +31,6 @@ export const routes: readonly Route[] = [
   ...moveRoutes,
   ...checkRoutes,
 ];
+
+/** Every operation of the API. */
+export const routes: readonly Route[] = [openApiRoute(resources), ...resources];
