@@ -18,7 +18,7 @@ const NEW_SHELF = 'new';
 /** Each gap of each shelf in their order, a new shelf, the bench. */
 export function placesFor(index: BoardIndex, batch: Batch): Place[] {
   const shelves = index.chains.flatMap(({ id }) => shelfPlaces(index, batch, id));
-  return [...shelves, newShelfPlace(index, batch), benchPlace(batch)];
+  return [...shelves, newShelfPlace(index, batch), benchPlace(index, batch)];
 }
 
 function shelfPlaces(index: BoardIndex, batch: Batch, chainId: string): Place[] {
@@ -47,12 +47,17 @@ function newShelfPlace(index: BoardIndex, batch: Batch): Place {
   };
 }
 
-const benchPlace = (batch: Batch): Place => ({
-  key: 'bench',
-  toChainId: 'bench',
-  chainId: null,
-  afterId: null,
-  added: null,
-  here: batch.chainId === null,
-  locked: null,
-});
+/** Last on the bench; where a batch of the bench stands, its own place. */
+function benchPlace(index: BoardIndex, batch: Batch): Place {
+  const at = index.bench.findIndex((mate) => mate.id === batch.id);
+  const before = at < 0 ? index.bench.at(-1) : index.bench[at - 1];
+  return {
+    key: 'bench',
+    toChainId: 'bench',
+    chainId: null,
+    afterId: before?.id ?? null,
+    added: null,
+    here: at >= 0,
+    locked: null,
+  };
+}
