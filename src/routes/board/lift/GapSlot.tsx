@@ -33,8 +33,8 @@ function useInSight(isOver: boolean) {
  * batch is lifted, and is drawn anew only when its own judgement or its own turn comes.
  */
 export const GapSlot = memo(function GapSlot({ gapKey, vesselShape, layout }: GapSlotProps) {
-  const gap = useLiftState(({ lifted, opened }) =>
-    opened.has(gapKey) ? lifted?.gaps.get(gapKey) : undefined,
+  const gap = useLiftState(({ lifted, opened, over }) =>
+    opened.has(gapKey) || over === gapKey ? lifted?.gaps.get(gapKey) : undefined,
   );
   const locked = useLiftState(({ lifted }) => lifted?.locks.get(gapKey));
   const isOver = useLiftState((state) => state.over === gapKey);

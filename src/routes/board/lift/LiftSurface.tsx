@@ -16,7 +16,7 @@ export function LiftSurface({ grab, children }: LiftSurfaceProps) {
   const board = useBoard();
   const online = useOnline();
   const { store, lifting } = useLiftMachine();
-  const isLifting = useLiftState((state) => state.lifted !== null);
+  const isLifting = useLiftState((state) => state.isUnfolded);
 
   const onPointerDown = (event: PointerEvent) => {
     const press = pressed(event.target, event.pointerType);

@@ -31,7 +31,7 @@ export const useIsLifted = (batchId: string) =>
 /** Which of the two panels the board should show beside it, if any. */
 export const useLiftPanel = (): 'places' | 'changes' | null =>
   useLiftState((state) => {
-    if (state.lifted) return 'places';
+    if (state.isUnfolded) return 'places';
     return state.change || state.refusal ? 'changes' : null;
   });
 

@@ -33,6 +33,8 @@ export interface Change {
 
 export interface LiftState {
   lifted: Lifted | null;
+  /** The page has given way to the gaps. */
+  isUnfolded: boolean;
   /** Gaps that are drawn by now: they open from the hand outward, a few more in each frame. */
   opened: ReadonlySet<string>;
   /** The place under the pointer or under the keys. */
@@ -48,6 +50,7 @@ export interface LiftState {
 
 export const AT_REST: LiftState = {
   lifted: null,
+  isUnfolded: false,
   opened: new Set(),
   over: null,
   placesFor: null,

@@ -56,11 +56,13 @@ export interface Lifting {
 export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
   let pressed: string | null = null;
   let letGo = () => {};
+  let fold = () => {};
 
   const release = () => {
-    store.set({ lifted: null, over: null, opened: new Set() });
+    store.set({ lifted: null, over: null, opened: new Set(), isUnfolded: false });
     letGo();
-    letGo = () => {};
+    fold();
+    letGo = fold = () => {};
   };
 
   const lift = (batchId: string, by: Lifted['by']) => {
@@ -74,7 +76,7 @@ export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
     const shape = board.vessels.find((row) => row.id === batch.vesselId)?.shape ?? null;
     const lifted = { batchId, by, name: batch.name, chainId: batch.chainId, shape, ...places };
     store.set({ lifted, over: null, change: null, refusal: null });
-    openOutward(store, ports, batchId);
+    fold = openOutward(store, ports, batchId);
     const best = places.ranked.find((gap) => gap.best);
     ports.say(liftedWords(board, batchId, best));
   };

@@ -4,14 +4,37 @@ import type { LiftPorts } from './ports.ts';
 /** Gaps of the first frame; each frame after it opens twice as many as the one before. */
 const FIRST = 6;
 
-/** Opens the gaps around a lifted batch, so that no frame has to draw two hundred of them. */
-export function openOutward(store: LiftStore, ports: LiftPorts, batchId: string): void {
-  const keys = ports.gapsAround(batchId);
-  const lifted = store.get().lifted;
-  const open = (count: number, step: number) => {
-    if (store.get().lifted?.batchId !== lifted?.batchId || lifted === null) return;
-    store.set({ opened: new Set(keys.slice(0, count)) });
-    if (count < keys.length) ports.nextFrame(() => open(count + step * 2, step * 2));
+/**
+ * Unfolds a lift frame by frame: first the page gives way, then the gaps in sight open from the
+ * batch outward, and more of them as shelves scroll into sight. No frame draws them all, and what
+ * is out of sight costs nothing. The answer ends it.
+ */
+export function openOutward(store: LiftStore, ports: LiftPorts, batchId: string): () => void {
+  let hasEnded = false;
+  let isBusy = false;
+
+  const open = (count: number) => {
+    if (hasEnded) return;
+    const { opened } = store.get();
+    const closed = ports.gapsInSight(batchId).filter((key) => !opened.has(key));
+    isBusy = closed.length > 0;
+    if (!isBusy) return;
+    store.set({ opened: new Set([...opened, ...closed.slice(0, count)]) });
+    ports.nextFrame(() => open(count * 2));
   };
-  open(FIRST, FIRST);
+
+  const unfold = () => {
+    if (hasEnded) return;
+    store.set({ isUnfolded: true });
+    ports.nextFrame(() => open(FIRST));
+  };
+
+  ports.nextFrame(() => ports.nextFrame(unfold));
+  const stop = ports.onScroll(() => {
+    if (!isBusy) open(FIRST * 2);
+  });
+  return () => {
+    hasEnded = true;
+    stop();
+  };
 }

@@ -12,7 +12,9 @@ export interface LiftPorts extends Mover {
   /** Gives the focus back to a batch's handle once it is drawn. */
   focusBatch(batchId: string): void;
   newId(): string;
-  /** Keys of all gaps on the page, nearest to the batch first. */
-  gapsAround(batchId: string): string[];
+  /** Keys of the gaps on shelves in sight, those of the nearest shelf to the batch first. */
+  gapsInSight(batchId: string): string[];
+  /** Calls when shelves may have come into sight; the answer ends it. */
+  onScroll(run: () => void): () => void;
   nextFrame(run: () => void): void;
 }

@@ -6,40 +6,16 @@ import { isOnline } from '../../../api/connection.ts';
 import { moverOf } from '../../../api/moves.ts';
 import { boardStillness } from '../../../api/stillness.ts';
 import { createLifting } from './lifting.ts';
+import { gapsInSight, handleOf, onScroll } from './inSight.ts';
 import type { LiftMachine } from './liftContext.ts';
 import { createLiftStore } from './liftState.ts';
 import type { LiftPorts } from './ports.ts';
 import { createPutting } from './putting.ts';
 
-export const handleOf = (batchId: string) =>
-  document.querySelector<HTMLElement>(`[data-lift-handle="${CSS.escape(batchId)}"]`);
-
 /** Waits for the drawing, and for a closing dialog that would give the focus elsewhere. */
 function focusBatch(batchId: string) {
   const focus = () => handleOf(batchId)?.focus();
   requestAnimationFrame(() => requestAnimationFrame(focus));
-}
-
-/** Height of a box above or below a line; 0 where the line crosses it. */
-const away = ({ top, bottom }: DOMRect, y: number) => Math.max(top - y, y - bottom, 0);
-
-/**
- * Every gap on the page, those of the nearest shelf first. Only shelves are measured: what is out
- * of sight inside them is not laid out, and asking for its place would make it so.
- */
-function gapsAround(batchId: string): string[] {
-  const y = handleOf(batchId)?.getBoundingClientRect().top ?? 0;
-  const distances = new Map<Element, number>();
-  const distance = (node: Element) => {
-    const shelf = node.closest('[data-chain]') ?? node;
-    const known = distances.get(shelf) ?? away(shelf.getBoundingClientRect(), y);
-    distances.set(shelf, known);
-    return known;
-  };
-  return [...document.querySelectorAll<HTMLElement>('[data-gap]')]
-    .map((node) => ({ key: node.dataset.gap ?? '', distance: distance(node) }))
-    .toSorted((a, b) => a.distance - b.distance)
-    .map(({ key }) => key);
 }
 
 function portsOf(client: QueryClient, slug: string, say: (words: string) => void): LiftPorts {
@@ -51,7 +27,8 @@ function portsOf(client: QueryClient, slug: string, say: (words: string) => void
     say,
     focusBatch,
     newId: () => crypto.randomUUID(),
-    gapsAround,
+    gapsInSight,
+    onScroll,
     nextFrame: (run) => requestAnimationFrame(run),
   };
 }

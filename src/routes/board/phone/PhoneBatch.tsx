@@ -5,10 +5,13 @@ import { StageMark } from '../../../components/drawn/StageMark.tsx';
 import { Vessel } from '../../../components/drawn/Vessel.tsx';
 import { BatchMenu } from '../batch/BatchMenu.tsx';
 import { BatchName } from '../batch/BatchName.tsx';
+import { GapSlot } from '../lift/GapSlot.tsx';
+import { useIsLifted } from '../lift/liftContext.ts';
+import { LiftHandle } from '../lift/LiftHandle.tsx';
 import { MoveButtons } from '../lift/MoveButtons.tsx';
 import { MoveMenu } from '../lift/MoveMenu.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
-import { drawnVessel } from '../view/drawing.ts';
+import { drawnVessel, shapeOf } from '../view/drawing.ts';
 import { beerFacts, stageLine } from '../view/words.ts';
 import { PhoneLink } from './PhoneLink.tsx';
 
@@ -24,8 +27,9 @@ const RUN = 320;
 export function PhoneBatch({ batch, next }: PhoneBatchProps) {
   const { index, judged, board } = useBoardView();
   const link = next && judged.links.get(next.id);
+  const isLifted = useIsLifted(batch.id);
   return (
-    <li data-batch={batch.id} className="relative">
+    <li data-batch={batch.id} data-in-hand={isLifted || undefined} className="relative">
       {link && (
         <div className="absolute top-[80px] -bottom-4 left-[28px] overflow-hidden">
           <CakeRun
@@ -44,11 +48,16 @@ export function PhoneBatch({ batch, next }: PhoneBatchProps) {
         </div>
         <BatchFacts batch={batch} />
       </div>
-      {next && link ? (
-        <PhoneLink earlier={batch} later={next} link={link} />
-      ) : (
-        <div className="h-3" />
-      )}
+      <div className="relative min-h-14">
+        {next && link && <PhoneLink earlier={batch} later={next} link={link} />}
+        <div className="pointer-events-none absolute inset-y-0 right-[18px] left-[84px] z-[2] lifting:pointer-events-auto">
+          <GapSlot
+            layout="bar"
+            gapKey={`${batch.chainId ?? ''}:${batch.id}`}
+            vesselShape={shapeOf(batch, index)}
+          />
+        </div>
+      </div>
     </li>
   );
 }
@@ -74,7 +83,12 @@ function BatchFacts({ batch }: { batch: Batch }) {
       <div className="flex shrink-0 flex-col items-end">
         {can.moveBatches && <MoveButtons batchId={batch.id} />}
         <span className="flex">
-          {can.moveBatches && batch.stage === 'pencilled' && <MoveMenu batchId={batch.id} />}
+          {can.moveBatches && batch.stage === 'pencilled' && (
+            <>
+              <LiftHandle batchId={batch.id} />
+              <MoveMenu batchId={batch.id} />
+            </>
+          )}
           {can.editBatches && <BatchMenu batch={batch} />}
         </span>
       </div>

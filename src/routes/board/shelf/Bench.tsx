@@ -3,6 +3,7 @@ import { Swatch } from '../../../components/drawn/Swatch.tsx';
 import { BatchActions } from '../batch/BatchActions.tsx';
 import { BatchName } from '../batch/BatchName.tsx';
 import { GapSlot } from '../lift/GapSlot.tsx';
+import { useIsLifted } from '../lift/liftContext.ts';
 import { useBoardView } from '../view/BoardView.tsx';
 import { beerFacts } from '../view/words.ts';
 
@@ -40,10 +41,11 @@ export function Bench() {
 function BenchBatch({ batch }: { batch: Batch }) {
   const { units } = useBoardView();
   const { gravity } = beerFacts(batch, units);
+  const isLifted = useIsLifted(batch.id);
   return (
     <li
       data-batch={batch.id}
-      data-lift-batch={batch.id}
+      data-in-hand={isLifted || undefined}
       className="flex max-w-[300px] flex-none items-center gap-2.5 rounded-xl border-[1.5px] border-line bg-white py-1.5 pr-2 pl-2.5 text-small text-ink2"
     >
       <Swatch srm={batch.srm} size="glass" />

@@ -3,6 +3,7 @@ import { CakeBand } from '../../../components/drawn/CakeBand.tsx';
 import { DateTag } from '../../../components/drawn/DateTag.tsx';
 import { Vessel } from '../../../components/drawn/Vessel.tsx';
 import { GapSlot } from '../lift/GapSlot.tsx';
+import { useIsLifted } from '../lift/liftContext.ts';
 import { useBoardView } from '../view/BoardView.tsx';
 import { drawnVessel, SHELF, shapeOf } from '../view/drawing.ts';
 import { beerFacts } from '../view/words.ts';
@@ -20,10 +21,11 @@ interface ShelfBatchProps {
 export function ShelfBatch({ batch, next, chainId }: ShelfBatchProps) {
   const { index, judged, board } = useBoardView();
   const link = next && judged.links.get(next.id);
+  const isLifted = useIsLifted(batch.id);
   return (
     <li
       data-batch={batch.id}
-      data-lift-batch={batch.id}
+      data-in-hand={isLifted || undefined}
       className="relative flex-none"
       style={{ width: SHELF.cell, height: SHELF.top + SHELF.board + SHELF.foot }}
     >
@@ -43,7 +45,7 @@ export function ShelfBatch({ batch, next, chainId }: ShelfBatchProps) {
         <Vessel {...drawnVessel(batch, index, judged, board.today)} width={SHELF.vessel} />
       </div>
       <div
-        className="lift-fade absolute z-[3] flex flex-col justify-end"
+        className="lift-fade absolute z-[3] flex flex-col justify-end *:shrink-0"
         style={{ left: SHELF.vessel + 3, width: SHELF.gap - 4, top: 0, height: SHELF.top - 18 }}
       >
         <BatchText batch={batch} />
