@@ -11,7 +11,7 @@ export interface LinkTimes {
   underBeerDays: number | undefined;
   /** B's brew day less the day the yeast was taken; may be negative. */
   waitDays: number | undefined;
-  /** Temperature at which the cake waits, °C. */
+  /** Temperature at which the cake waits, °C: as told, else the cold store's for a crop, else A's. */
   waitC: number | undefined;
   /** Share of the living cells that outlives the wait, 0–1. */
   survival: number | undefined;
@@ -22,7 +22,7 @@ export function linkTimes(a: BatchFacts, b: BatchFacts, pour: PourFacts): LinkTi
   const takenOn = pour.takenOn ?? rackOn;
   const waitDays =
     takenOn === undefined || b.brewOn === undefined ? undefined : daysBetween(takenOn, b.brewOn);
-  const waitC = pour.cakeC ?? a.fermentC;
+  const waitC = pour.cakeC ?? (cropped(pour, rackOn) ? CROP_STORE_C : a.fermentC);
   return {
     takenOn,
     underBeerDays: underBeer(a, pour),
@@ -31,6 +31,15 @@ export function linkTimes(a: BatchFacts, b: BatchFacts, pour: PourFacts): LinkTi
     survival: survivalOf(waitDays, waitC),
   };
 }
+
+/**
+ * Yeast that is cropped from under the beer leaves the vessel and goes into the cold, °C; a cake that
+ * is bared by racking stays where it fermented. Common practice (2–4 °C, Quain).
+ */
+const CROP_STORE_C = 4;
+
+const cropped = ({ takenOn }: PourFacts, rackOn: Day | undefined): boolean =>
+  takenOn !== undefined && rackOn !== undefined && takenOn < rackOn;
 
 /** Racking day: brew day and the days under beer. */
 export function rackDay(batch: BatchFacts): Day | undefined {
