@@ -6,7 +6,9 @@ const KEY = 'barmkin-reloaded-for';
  * Loads a page's chunk. After a new release the old chunk is gone: the page is then reloaded,
  * once for an address, so that a real fault does not go round in circles.
  */
-export async function lazyPage(load: () => Promise<ComponentType>) {
+export async function lazyPage<Props extends object = object>(
+  load: () => Promise<ComponentType<Props>>,
+) {
   try {
     const Component = await load();
     sessionStorage.removeItem(KEY);

@@ -151,7 +151,7 @@ export const Vessel = memo(function Vessel(props: VesselProps) {
       )}
       <path d={OUTLINES[shape]} className="fill-glass" />
       <g clipPath={`url(#${id}c)`}>
-        <Beer srm={srm} top={top} paint={`${id}b`} />
+        {fill > 0 && <Beer srm={srm} top={top} paint={`${id}b`} />}
         {foam && <Foam top={top} />}
         {cake !== null && <Strata top={cakeTop(shape, cake)} hops={hops} />}
         <rect width="84" height="132" fill={`url(#${id}g)`} />

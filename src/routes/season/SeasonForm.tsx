@@ -76,7 +76,7 @@ function Fields({ season, onDone }: { season: Season; onDone: () => void }) {
         name="brewsPerDay"
         label="Brews a day"
         hint="A day with this many brews is full."
-        className="max-w-48"
+        className="max-w-64"
       />
     </RowForm>
   );

@@ -24,13 +24,15 @@ export function SeasonPage() {
               <SeasonForm season={board.season} />
             </div>
           </Card>
-          <BlockedDays season={board.season} />
-          <Card>
-            <CardTitle>The brewery</CardTitle>
-            <div className="mt-4">
-              <BreweryForm brewery={board.brewery} />
-            </div>
-          </Card>
+          <div className="space-y-4">
+            <BlockedDays season={board.season} />
+            <Card>
+              <CardTitle>The brewery</CardTitle>
+              <div className="mt-4">
+                <BreweryForm brewery={board.brewery} />
+              </div>
+            </Card>
+          </div>
         </div>
       ) : (
         <>

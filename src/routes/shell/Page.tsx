@@ -5,7 +5,7 @@ export function Page({ children }: { children: ReactNode }) {
   return (
     <main
       id="main"
-      className="mx-auto w-full max-w-[1240px] grow px-7 pt-7 pb-16 outline-none max-tablet:px-[18px] max-tablet:pt-5"
+      className="mx-auto w-full max-w-[1440px] grow px-7 pt-7 pb-16 outline-none max-tablet:px-[18px] max-tablet:pt-5"
     >
       {children}
     </main>

@@ -31,18 +31,18 @@ function Cell({ beer, next }: { beer: ExampleBeer; next: ExampleLink | undefined
   return (
     <li className="relative flex items-end gap-2">
       {next && (
-        <div className="absolute bottom-0 left-[66px] w-full overflow-x-clip">
+        <div className="absolute bottom-0 left-[75px] w-full overflow-x-clip">
           <CakeBand width={BAND} verdict={next.verdict} hops={next.hops} />
         </div>
       )}
-      <div className="relative z-[1] w-[132px] shrink-0">
+      <div className="relative z-[1] w-[150px] shrink-0">
         <Vessel
           shape="bucket"
           srm={beer.facts.srm}
           fill={beer.fill}
           cake={beer.cake}
           stage={beer.pencilled ? 'pencilled' : 'fermenting'}
-          width={132}
+          width={150}
         />
         <div className="absolute top-full left-1/2 -translate-x-1/2 pt-6">
           <DateTag day={beer.facts.brewOn} large />
@@ -52,7 +52,7 @@ function Cell({ beer, next }: { beer: ExampleBeer; next: ExampleLink | undefined
         <ExampleFacts beer={beer} />
       </div>
       {next && (
-        <div className="absolute top-full left-[140px] w-44 pt-7">
+        <div className="absolute top-full left-[158px] w-44 pt-7">
           <VerdictPill verdict={next.verdict} large />
           <p className="mt-1 text-body leading-tight text-ink2">{next.reason}</p>
         </div>

@@ -33,7 +33,7 @@ export function WelcomePage() {
 function Hero() {
   return (
     <div className="flex flex-wrap items-end justify-between gap-x-10 gap-y-4 px-14 pt-8 max-wide:px-10 max-tablet:px-5 max-tablet:pt-4">
-      <h1 className="max-w-[820px] text-hero font-[740] tracking-hero outline-none max-tablet:text-[2.6875rem]">
+      <h1 className="max-w-[820px] text-hero text-wrap font-[740] tracking-hero outline-none max-tablet:text-[2.6875rem]">
         Plan which beer goes onto which yeast cake.
       </h1>
       <div className="max-w-[400px]">
