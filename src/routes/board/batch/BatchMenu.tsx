@@ -6,7 +6,6 @@ import { useBoardPanel } from '../view/useBoardPanel.ts';
 import { DeleteBatch } from './DeleteBatch.tsx';
 import { StageDialog } from './StageDialog.tsx';
 import { nextStages, STAGE_ACTIONS, type NextStage } from './stages.ts';
-import { useDuplicate } from './useDuplicate.ts';
 
 type Asked = NextStage | 'delete' | null;
 
@@ -14,7 +13,6 @@ type Asked = NextStage | 'delete' | null;
 export function BatchMenu({ batch }: { batch: Batch }) {
   const [asked, setAsked] = useState<Asked>(null);
   const { open } = useBoardPanel();
-  const duplicate = useDuplicate();
   const close = () => setAsked(null);
   return (
     <>
@@ -30,7 +28,9 @@ export function BatchMenu({ batch }: { batch: Batch }) {
         }
       >
         <MenuItem onSelect={() => open({ kind: 'batch', batchId: batch.id })}>Edit</MenuItem>
-        <MenuItem onSelect={() => duplicate(batch)}>Duplicate</MenuItem>
+        <MenuItem onSelect={() => open({ kind: 'new', what: 'batch', likeId: batch.id })}>
+          Duplicate
+        </MenuItem>
         <MenuSeparator />
         {nextStages(batch.stage).map((stage) => (
           <MenuItem key={stage} onSelect={() => setAsked(stage)}>

@@ -9,7 +9,7 @@ import { BestMove } from './BestMove.tsx';
 
 /** The season, its sum in one line, and what begins from here. */
 export function BoardHead() {
-  const { board, judged, can } = useBoardView();
+  const { judged, can } = useBoardView();
   const { open } = useBoardPanel();
   return (
     <header className="flex flex-wrap items-end gap-x-5 gap-y-3 px-7 pt-4 pb-1.5">
@@ -30,7 +30,7 @@ export function BoardHead() {
           </Button>
         )}
       </div>
-      {can.moveBatches && <BestMove key={board.season.revision} />}
+      {can.moveBatches && <BestMove />}
     </header>
   );
 }

@@ -1,20 +1,50 @@
 import { useEffect, useState } from 'react';
+import type { Board } from '#shared/api/board.ts';
 import type { BestMove } from '#shared/chain/bestMove.ts';
-import { bestMove } from '#shared/chain/bestMove.ts';
+import type { BoardFacts } from '#shared/chain/board.ts';
 import { useBoardView } from '../view/BoardView.tsx';
 
 const WAIT_MS = 250;
 
+const factsOf = (board: Board): BoardFacts => ({
+  season: board.season,
+  today: board.today,
+  houseRules: board.houseRules,
+  yeasts: board.yeasts,
+  vessels: board.vessels,
+  chains: board.chains,
+  batches: board.batches,
+});
+
+/** Asks the worker; the answer is how to stop it, which is right when the board has changed. */
+function weigh(board: Board, tell: (move: BestMove | null) => void): () => void {
+  const worker = new Worker(new URL('./bestMove.worker.ts', import.meta.url), { type: 'module' });
+  worker.addEventListener('message', ({ data }: MessageEvent<BestMove | null>) => {
+    worker.terminate();
+    tell(data);
+  });
+  worker.postMessage(factsOf(board));
+  return () => worker.terminate();
+}
+
 /**
- * The one move that would help most. Looked for once the page stands still: it weighs every batch
- * against every place and must not hold up a drag or the first paint.
+ * The one move that would help most. It is weighed in a thread of its own once the board stands
+ * still: on a large season it takes longer than a page may.
  */
 export function useBestMove(): BestMove | null {
-  const { board } = useBoardView();
-  const [found, setFound] = useState<{ board: typeof board; move: BestMove | null } | null>(null);
+  const { board, judged } = useBoardView();
+  const [found, setFound] = useState<{ board: Board; move: BestMove | null } | null>(null);
+  const isAllPour = judged.totals.hold + judged.totals.mind === 0;
   useEffect(() => {
-    const timer = window.setTimeout(() => setFound({ board, move: bestMove(board) }), WAIT_MS);
-    return () => window.clearTimeout(timer);
-  }, [board]);
+    if (isAllPour) return;
+    let stop = () => {};
+    const timer = window.setTimeout(() => {
+      stop = weigh(board, (move) => setFound({ board, move }));
+    }, WAIT_MS);
+    return () => {
+      window.clearTimeout(timer);
+      stop();
+    };
+  }, [board, isAllPour]);
   return found?.board === board ? found.move : null;
 }

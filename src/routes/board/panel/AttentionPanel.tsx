@@ -64,7 +64,7 @@ function LinkRow({ later, earlier, link }: OpenLink) {
         className="block w-full rounded-lg py-2.5 text-left hover:bg-line2"
       >
         <VerdictPill verdict={link.verdict} findings={countedFindings(link)} />
-        <b className="mt-1 block leading-tight">
+        <b className="mt-1 block leading-tight wrap-anywhere">
           {later.name} onto {earlier.name}
         </b>
         <span className="text-small text-ink2">

@@ -27,7 +27,7 @@ export function PanelFrame({ label, onClose, children }: PanelFrameProps) {
       onKeyDown={(event) => {
         if (event.key === 'Escape' && !event.defaultPrevented) onClose();
       }}
-      className="relative animate-panel-in px-6 pt-5 pb-10 outline-none max-tablet:px-[18px]"
+      className="relative animate-panel-in wrap-anywhere px-6 pt-5 pb-10 outline-none max-tablet:px-[18px]"
     >
       <button
         type="button"

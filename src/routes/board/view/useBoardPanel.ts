@@ -4,7 +4,8 @@ import { useSearchParams } from 'react-router-dom';
 export type BoardPanel =
   | { kind: 'link'; laterId: string }
   | { kind: 'batch'; batchId: string }
-  | { kind: 'new'; what: 'batch' | 'chain' };
+  /** `likeId`: a copy of that batch. */
+  | { kind: 'new'; what: 'batch' | 'chain'; likeId?: string };
 
 export function panelOf(params: URLSearchParams): BoardPanel | null {
   const laterId = params.get('link');
@@ -12,7 +13,9 @@ export function panelOf(params: URLSearchParams): BoardPanel | null {
   const batchId = params.get('batch');
   if (batchId) return { kind: 'batch', batchId };
   const what = params.get('new');
-  return what === 'batch' || what === 'chain' ? { kind: 'new', what } : null;
+  if (what !== 'batch' && what !== 'chain') return null;
+  const likeId = params.get('like');
+  return { kind: 'new', what, ...(likeId && { likeId }) };
 }
 
 const search = (panel: BoardPanel): Record<string, string> => {
@@ -22,7 +25,7 @@ const search = (panel: BoardPanel): Record<string, string> => {
     case 'batch':
       return { batch: panel.batchId };
     case 'new':
-      return { new: panel.what };
+      return { new: panel.what, ...(panel.likeId && { like: panel.likeId }) };
   }
 };
 
