@@ -77,7 +77,7 @@ async function writeShelf(
     fermentMinC: lager ? 8 : 18,
     fermentMaxC: lager ? 14 : 22,
     generationLimit: 7,
-    attenuation: 75,
+    attenuation: 0.75,
     packPrice: 900,
   });
   await tx.insert(vessel).values({
