@@ -64,13 +64,14 @@ function measured(cake: Nullable<MeasuredCake>): MeasuredCake | null {
  */
 export function pourFactsOf({ link }: Batch, earlier: Batch): PourFacts {
   const { read, brewOn } = earlier;
-  const keepL = link.keepWhole ? null : (link.keepL ?? 'recommended');
   // Without a brew day the engine cannot count to racking, but the day itself was read.
   const takenOn = link.takenOn ?? (brewOn === null ? read.rackedOn : null);
-  return {
-    starter: link.starter,
-    ...known({ takenOn, keepL, leftAboveL: link.leftAboveL, cakeC: link.cakeC }),
-  };
+  const pour: PourFacts = { starter: link.starter };
+  if (takenOn !== null) pour.takenOn = takenOn;
+  if (!link.keepWhole) pour.keepL = link.keepL ?? 'recommended';
+  if (link.leftAboveL !== null) pour.leftAboveL = link.leftAboveL;
+  if (link.cakeC !== null) pour.cakeC = link.cakeC;
+  return pour;
 }
 
 export function yeastFactsOf(yeast: Yeast): YeastFacts {

@@ -1,6 +1,7 @@
 import type { Batch } from '../api/batch.ts';
 import type { UnitPrefs } from '../api/units.ts';
-import type { BatchFacts, BoardContext, PourFacts } from '../rules/facts.ts';
+import type { Yeast } from '../api/yeast.ts';
+import type { BatchFacts, BoardContext, PourFacts, YeastFacts } from '../rules/facts.ts';
 import type { LinkInput } from '../rules/linkInput.ts';
 import { DEFAULT_HOUSE_RULES, resolveHouseRules, type HouseRules } from '../rules/resolve.ts';
 import { factsOf, pourFactsOf, vesselFactsOf, yeastFactsOf } from './batchFacts.ts';
@@ -16,6 +17,7 @@ export interface Sight {
   rules: HouseRules;
   units: UnitPrefs | undefined;
   facts(batch: Batch): BatchFacts;
+  yeastFacts(yeast: Yeast): YeastFacts;
   descent(batch: Batch): Descent;
   /** By vessel. */
   stays: ReadonlyMap<string, readonly Stay[]>;
@@ -33,6 +35,7 @@ export function sightOf(board: BoardFacts, units?: UnitPrefs): Sight {
     rules: rulesOf(board),
     units,
     facts,
+    yeastFacts: remembered(yeastFactsOf),
     descent: descents(index, (before, earlier) => inherit(before, facts(earlier))),
     stays,
     use: usesOf(index, stays),
@@ -101,7 +104,7 @@ export function linkBetween(earlier: Batch, later: Batch, sight: Sight): LinkInp
 }
 
 /** The yeast of the cake, and the one the later batch asks for where that is another. */
-function yeastsOf(earlier: Batch, later: Batch, { index, layout }: Sight) {
+function yeastsOf(earlier: Batch, later: Batch, { index, layout, yeastFacts }: Sight) {
   const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
   const source = earlier.chainId === null ? undefined : layout.chain(earlier.chainId);
   const cake = index.yeasts.get((source ?? chain)?.yeastId ?? '');
@@ -109,7 +112,7 @@ function yeastsOf(earlier: Batch, later: Batch, { index, layout }: Sight) {
   const wanted = index.yeasts.get(later.yeastId ?? chain?.yeastId ?? '');
   const other =
     wanted && wanted.id !== cake.id ? { kind: wanted.kind, character: wanted.character } : null;
-  return { cake: yeastFactsOf(cake), other };
+  return { cake: yeastFacts(cake), other };
 }
 
 function pourOf(

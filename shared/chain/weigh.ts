@@ -1,5 +1,5 @@
 import type { Batch } from '../api/batch.ts';
-import type { Inheritance } from '../rules/facts.ts';
+import type { BatchFacts, Inheritance } from '../rules/facts.ts';
 import type { Verdict } from '../rules/vocabulary.ts';
 import type { BoardFacts, Layout } from './board.ts';
 import { sightOf, type Sight } from './boardLink.ts';
@@ -61,6 +61,7 @@ export class Scales {
     const sight: Sight = {
       ...this.sight,
       layout: draft,
+      facts: (batch) => this.#redated(batch),
       descent: descents(draft, this.#handDown, (id) => this.#settled(id, behind)),
       use: (id) => uses.get(id) ?? this.sight.use(id),
     };
@@ -78,6 +79,14 @@ export class Scales {
     const later = sight.layout.batch(laterId);
     const earlier = sight.layout.predecessor(laterId);
     return later && earlier ? this.#memo.judge(earlier, later, sight) : null;
+  }
+
+  /** Of a batch's facts a draft changes only the brew day. Without a new day none is changed. */
+  #redated(batch: Batch): BatchFacts {
+    const was = this.sight.index.batch(batch.id) ?? batch;
+    const facts = this.sight.facts(was);
+    if (batch.brewOn === null || batch.brewOn === was.brewOn) return facts;
+    return { ...facts, brewOn: batch.brewOn };
   }
 
   /** The descent of a batch that stands before every change is the board's. */
