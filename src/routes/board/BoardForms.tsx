@@ -1,19 +1,52 @@
+import { Dialog } from '../../components/ui/Dialog.tsx';
 import { BatchFormDialog } from '../batch-form/BatchFormDialog.tsx';
 import { ChainFormDialog } from '../chain-form/ChainFormDialog.tsx';
+import { BatchFacts } from './batch/BatchFacts.tsx';
 import { useBoardView } from './view/BoardView.tsx';
-import { useBoardPanel } from './view/useBoardPanel.ts';
+import { useBoardPanel, type BoardPanel } from './view/useBoardPanel.ts';
 
-/** The form that the address asks for, if any. */
+/** The form that the address asks for, if any; whoever may not write sees the facts. */
 export function BoardForms() {
   const { panel, close } = useBoardPanel();
-  const { board, can } = useBoardView();
-  if (panel?.kind === 'new' && panel.what === 'chain' && can.editChains)
-    return <ChainFormDialog chain={null} onClose={close} />;
-  if (panel?.kind === 'new' && panel.what === 'batch' && can.editBatches)
-    return <BatchFormDialog mode="new" onClose={close} />;
-  if (panel?.kind === 'batch' && can.editBatches) {
-    const batch = board.batches.find(({ id }) => id === panel.batchId);
-    if (batch) return <BatchFormDialog key={batch.id} mode="edit" batch={batch} onClose={close} />;
+  switch (panel?.kind) {
+    case 'batch':
+      return <OpenedBatch key={panel.batchId} batchId={panel.batchId} onClose={close} />;
+    case 'new':
+      return <NewRow panel={panel} onClose={close} />;
+    default:
+      return null;
   }
-  return null;
+}
+
+/** A lost connection closes no form: what was typed waits in it. */
+function OpenedBatch({ batchId, onClose }: { batchId: string; onClose: () => void }) {
+  const { board, index } = useBoardView();
+  const batch = index.batch(batchId);
+  if (!batch)
+    return (
+      <Dialog open onClose={onClose} title="This batch is not on the board">
+        <p className="text-ink2">Somebody deleted it, or the address is of another season.</p>
+      </Dialog>
+    );
+  if (!board.me.can.editBatches) return <BatchFacts batch={batch} onClose={onClose} />;
+  return <BatchFormDialog mode="edit" batch={batch} onClose={onClose} />;
+}
+
+interface NewRowProps {
+  panel: Extract<BoardPanel, { kind: 'new' }>;
+  onClose: () => void;
+}
+
+function NewRow({ panel, onClose }: NewRowProps) {
+  const { board, index } = useBoardView();
+  const may = board.me.can;
+  if (panel.what === 'chain')
+    return may.editChains ? <ChainFormDialog chain={null} onClose={onClose} /> : null;
+  if (!may.editBatches) return null;
+  const like = index.batch(panel.likeId ?? '');
+  return like ? (
+    <BatchFormDialog mode="duplicate" batch={like} onClose={onClose} />
+  ) : (
+    <BatchFormDialog mode="new" onClose={onClose} />
+  );
 }

@@ -1,6 +1,8 @@
+import { useState } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import type { JudgedLink } from '#shared/chain/judgeBoard.ts';
 import { VerdictPill } from '../../../components/drawn/VerdictPill.tsx';
+import { Button } from '../../../components/ui/Button.tsx';
 import { useBoardView, type BoardViewValue } from '../view/BoardView.tsx';
 import { useBoardPanel } from '../view/useBoardPanel.ts';
 import { count, countedFindings, shortReason } from '../view/words.ts';
@@ -36,11 +38,7 @@ export function AttentionPanel() {
         {links.length === 0 ? 'Nothing on hold' : 'What to look at'}
       </h2>
       <p className="mt-0.5 text-ink2">{sumWords(pour, unchecked)}</p>
-      <ul className="mt-3">
-        {links.map((item) => (
-          <LinkRow key={item.later.id} {...item} />
-        ))}
-      </ul>
+      <LinkRows links={links} />
       <ConflictList />
       <p className="mt-4 border-t border-line pt-3 text-small text-ink2">
         Choose a verdict to see why, in numbers, and what to do about it.
@@ -50,8 +48,31 @@ export function AttentionPanel() {
 }
 
 function sumWords(pour: number, unchecked: number): string {
-  const words = `${count(pour, 'link')} may be poured as planned`;
+  const links = pour === 0 ? 'No link' : count(pour, 'link');
+  const words = `${links} may be poured as planned`;
   return unchecked === 0 ? words : `${words}; ${count(unchecked, 'link')} not fully checked`;
+}
+
+const FIRST = 12;
+
+/** The first dozen; a season in disorder has hundreds, and nobody reads those at once. */
+function LinkRows({ links }: { links: readonly OpenLink[] }) {
+  const [isAll, setIsAll] = useState(false);
+  const shown = isAll ? links : links.slice(0, FIRST);
+  return (
+    <>
+      <ul className="mt-3">
+        {shown.map((item) => (
+          <LinkRow key={item.later.id} {...item} />
+        ))}
+      </ul>
+      {shown.length < links.length && (
+        <Button size="small" look="quiet" onClick={() => setIsAll(true)}>
+          Show all {links.length}
+        </Button>
+      )}
+    </>
+  );
 }
 
 function LinkRow({ later, earlier, link }: OpenLink) {

@@ -66,31 +66,29 @@ function BatchFacts({ batch }: { batch: Batch }) {
   const { board, units, can } = useBoardView();
   const { gravity, rest } = beerFacts(batch, units);
   return (
-    <div className="flex min-w-0 flex-1 gap-2 pr-[18px]">
-      <div className="min-w-0 flex-1 text-body text-ink2">
-        <h2 className="text-[1.1875rem] leading-[1.15] text-ink">
-          <BatchName batch={batch} className="line-clamp-3 min-h-7" />
-        </h2>
-        <p className="truncate">{batch.style}</p>
-        <p>
-          <b className="text-ink">{gravity}</b> · {rest.join(' · ')}
-        </p>
-        <p className="mt-0.5 flex items-center gap-2">
-          <StageMark stage={batch.stage} />
-          {stageLine(batch, board.today)}
-        </p>
-      </div>
-      <div className="flex shrink-0 flex-col items-end">
+    <div className="min-w-0 flex-1 pr-[18px] text-body text-ink2">
+      <div className="flex items-start gap-2">
+        <div className="min-w-0 flex-1">
+          <h2 className="text-[1.1875rem] leading-[1.15] text-ink">
+            <BatchName batch={batch} className="line-clamp-3 min-h-7" />
+          </h2>
+          <p className="truncate">{batch.style}</p>
+        </div>
         {can.moveBatches && <MoveButtons batchId={batch.id} />}
-        <span className="flex">
-          {can.moveBatches && batch.stage === 'pencilled' && (
-            <>
-              <LiftHandle batchId={batch.id} />
-              <MoveMenu batchId={batch.id} />
-            </>
-          )}
-          {can.editBatches && <BatchMenu batch={batch} />}
-        </span>
+      </div>
+      <p>
+        <b className="text-ink">{gravity}</b> · {rest.join(' · ')}
+      </p>
+      <div className="flex min-h-11 items-center gap-2">
+        <StageMark stage={batch.stage} />
+        <span className="min-w-0 flex-1">{stageLine(batch, board.today)}</span>
+        {can.moveBatches && batch.stage === 'pencilled' && (
+          <>
+            <LiftHandle batchId={batch.id} />
+            <MoveMenu batchId={batch.id} />
+          </>
+        )}
+        {can.editBatches && <BatchMenu batch={batch} />}
       </div>
     </div>
   );

@@ -34,7 +34,7 @@ export function ShelfRun({ label, children }: { label: string; children: ReactNo
   return (
     <div
       ref={ref}
-      className="shelf-run thumb-slim relative -ml-10 overflow-x-auto overflow-y-hidden overscroll-x-contain"
+      className="shelf-run thumb-slim relative -mt-3 -ml-10 pt-3 overflow-x-auto overflow-y-hidden overscroll-x-contain"
     >
       <div className="relative w-max min-w-full pl-11" style={{ height: SHELF_HEIGHT }}>
         <div
