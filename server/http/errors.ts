@@ -67,10 +67,18 @@ export function toProblem(error: unknown): ProblemError {
   return fromDatabase(error) ?? fromHttp(error) ?? problem('unexpected');
 }
 
+/** Without the values of the statement, which may be anybody's. */
+function loggable(error: unknown): unknown {
+  const cause = rootCause(error);
+  if (!(cause instanceof pg.DatabaseError)) return cause;
+  const { message, code, table, column, constraint, routine, stack } = cause;
+  return { message, code, table, column, constraint, routine, stack };
+}
+
 /** The last word on every failed request: a problem document, and for the unknown a line in the log. */
 export const answerErrors: ErrorRequestHandler = (error: unknown, req, res, next) => {
   const known = toProblem(error);
-  if (PROBLEMS[known.kind].status >= 500) req.log.error({ err: error }, 'Request failed');
+  if (known.kind === 'unexpected') req.log.error({ err: loggable(error) }, 'Request failed');
   if (res.headersSent) return next(error);
   if (known.options.retryAfter !== undefined)
     res.setHeader('Retry-After', String(known.options.retryAfter));

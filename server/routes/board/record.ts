@@ -29,10 +29,12 @@ export async function raiseRevision(tx: Tx, seasonId: string): Promise<number> {
 }
 
 export async function writeEntry(tx: Tx, member: Member, at: Date, entry: Entry): Promise<string> {
-  const { id = randomUUID(), touches, ...rest } = entry;
+  const { id = randomUUID(), touches, before, after, ...rest } = entry;
   await tx.insert(change).values({
     id,
     ...rest,
+    before: stored(before),
+    after: stored(after),
     touches: [...touches],
     breweryId: member.brewery.id,
     seasonId: member.seasonId,
@@ -41,3 +43,6 @@ export async function writeEntry(tx: Tx, member: Member, at: Date, entry: Entry)
   });
   return id;
 }
+
+/** What was not there, or is no longer: JSON's null, since the record has no gaps. */
+const stored = (side: unknown) => side ?? sql`'null'::jsonb`;
