@@ -27,11 +27,14 @@ function weigh(board: Board, tell: (move: BestMove | null) => void): () => void 
   return () => worker.terminate();
 }
 
+/** `weighing` until it is known; null where no single move would help. */
+export type BestMoveState = BestMove | 'weighing' | null;
+
 /**
  * The one move that would help most. It is weighed in a thread of its own once the board stands
  * still: on a large season it takes longer than a page may.
  */
-export function useBestMove(): BestMove | null {
+export function useBestMove(): BestMoveState {
   const { board, judged } = useBoardView();
   const [found, setFound] = useState<{ board: Board; move: BestMove | null } | null>(null);
   const isAllPour = judged.totals.hold + judged.totals.mind === 0;
@@ -46,5 +49,6 @@ export function useBestMove(): BestMove | null {
       stop();
     };
   }, [board, isAllPour]);
-  return found?.board === board ? found.move : null;
+  if (isAllPour) return null;
+  return found?.board === board ? found.move : 'weighing';
 }

@@ -16,7 +16,7 @@ export function Shelf({ chain }: { chain: Chain }) {
     <section
       aria-labelledby={headingId}
       data-chain={chain.id}
-      className="grid grid-cols-[148px_minmax(0,1fr)] [contain-intrinsic-size:auto_230px] [content-visibility:auto]"
+      className="grid grid-cols-[148px_minmax(0,1fr)] pt-3 [contain-intrinsic-size:auto_230px] [content-visibility:auto]"
     >
       <ShelfLabel chain={chain} headingId={headingId} />
       <ShelfRun label={`Batches on ${chain.name}`}>

@@ -5,7 +5,7 @@ import { Shelf } from './Shelf.tsx';
 export function Shelves() {
   const { index } = useBoardView();
   return (
-    <div className="grid pt-2.5 pb-4 pl-7 *:not-first:-mt-1">
+    <div className="grid pb-4 pl-7 *:not-first:-mt-4">
       {index.chains.map((chain) => (
         <Shelf key={chain.id} chain={chain} />
       ))}
