@@ -114,6 +114,9 @@ export function droppedWords(
   return `${batchName(board, batchId)} put down ${where}.${verdict}${dates}`;
 }
 
+export const keptDatesWords = (board: BoardFacts, batchId: string) =>
+  `${batchName(board, batchId)} is ${standing(board, batchId)}, with every date as it was before.`;
+
 export const putBackWords = (board: BoardFacts, batchId: string) =>
   `${batchName(board, batchId)} put back ${standing(board, batchId)}.`;
 
