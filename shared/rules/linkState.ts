@@ -95,3 +95,6 @@ export class LinkState {
     return keptCake(this, asked);
   }
 }
+
+/** The part of a link that the rules on descent read: all that a longer line of beers changes. */
+export type Lineage = Pick<LinkState, 'b' | 'yeast' | 'rules' | 'generation' | 'inherited'>;
