@@ -1,7 +1,7 @@
 import { useEffect } from 'react';
 import { lazyPart } from '../../../app/lazyPart.tsx';
 import { ChangesPanel } from '../lift/ChangesPanel.tsx';
-import { useLiftMachine, useLiftPanel } from '../lift/liftContext.ts';
+import { useLiftMachine, useLiftPanel, useLiftState } from '../lift/liftContext.ts';
 import { PlacesPanel } from '../lift/PlacesPanel.tsx';
 import { useBoardPanel } from '../view/useBoardPanel.ts';
 import { useWide } from '../view/useMedia.ts';
@@ -62,7 +62,9 @@ function AtRest({ lift }: { lift: ReturnType<typeof useLiftPanel> }) {
 
 /** Without room at the side, lifting tells its places and its changes along the foot. */
 function Below({ lift }: { lift: ReturnType<typeof useLiftPanel> }) {
-  if (lift === null) return null;
+  const by = useLiftState((state) => state.lifted?.by);
+  // A pointer sees the gaps themselves; the list would lie over some of them.
+  if (lift === null || (lift === 'places' && by === 'pointer')) return null;
   return (
     <aside
       aria-label="Lifting"
