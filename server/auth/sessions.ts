@@ -14,7 +14,10 @@ export interface SignedIn {
   tokenHash: string;
 }
 
-/** Signs somebody in: a row with the token's hash, and the token as a cookie. Ends the one before. */
+/**
+ * Signs somebody in: a row with the token's hash, and the token as a cookie. Ends the session before
+ * it, and sweeps out those that have run out.
+ */
 export async function startSession(
   db: Db | Tx,
   clock: Clock,
@@ -24,7 +27,7 @@ export async function startSession(
   const now = clock.now();
   const before = tokenIn(req);
   if (before !== null) await db.delete(session).where(eq(session.tokenHash, hashToken(before)));
-  await db.delete(session).where(and(eq(session.personId, personId), lt(session.expiresAt, now)));
+  await db.delete(session).where(lt(session.expiresAt, now));
   const token = newToken();
   await db.insert(session).values({
     tokenHash: hashToken(token),
@@ -72,8 +75,3 @@ const sessionQuery = oncePer((db: Db) =>
     )
     .prepare('session'),
 );
-
-/** Sessions that have run out are of no use to anybody. */
-export async function purgeSessions(db: Db, clock: Clock): Promise<void> {
-  await db.delete(session).where(lt(session.expiresAt, clock.now()));
-}

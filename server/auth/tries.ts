@@ -29,7 +29,7 @@ export function createTries(pool: pg.Pool, limits: Limits): Tries {
       keyPrefix: what,
       points: limits[what].points,
       duration: limits[what].seconds,
-      clearExpiredByTimeout: false,
+      clearExpiredByTimeout: true,
     });
     limiters.set(what, made);
     return made;

@@ -26,7 +26,12 @@ const STILL_REFERRED_TO = '23503';
 /** Two at once, or a database that is restarting: the same request may succeed in a moment. */
 const PASSING = /^(40001|40P01|53|55P03|57|08)/;
 const LOST_CONNECTION =
-  /ECONNREFUSED|ECONNRESET|Connection terminated|timeout exceeded when trying to connect/;
+  /ECONNREFUSED|ECONNRESET|EPIPE|ETIMEDOUT|Connection terminated|connection error|timeout exceeded when trying to connect/;
+
+/** Node names the fault in `code`, the database's client in a sentence. */
+const isLostConnection = (error: unknown): boolean =>
+  error instanceof Error &&
+  LOST_CONNECTION.test(`${'code' in error ? error.code : ''} ${error.message}`);
 
 function rootCause(error: unknown): unknown {
   return error instanceof Error && error.cause instanceof Error ? rootCause(error.cause) : error;
@@ -39,8 +44,7 @@ function fromDatabase(error: unknown): ProblemError | null {
     if (cause.code === STILL_REFERRED_TO) return problem('in-use');
     if (PASSING.test(cause.code ?? '')) return problem('busy', { retryAfter: 1 });
   }
-  if (cause instanceof Error && LOST_CONNECTION.test(cause.message))
-    return problem('busy', { retryAfter: 2 });
+  if (isLostConnection(cause)) return problem('busy', { retryAfter: 2 });
   return null;
 }
 

@@ -12,7 +12,7 @@ import { presentBrewery } from '../brewery/present.ts';
 import { newestOwn } from '../moves/newest.ts';
 import { loadBoardRows } from './load.ts';
 
-/** A season's board, whole, in three queries. */
+/** A season's board, whole, in two queries. */
 async function readBoard(db: Db, clock: Clock, member: Member): Promise<Board> {
   const { brewery, seasonId, person, role } = member;
   const [rows, newest] = await Promise.all([
