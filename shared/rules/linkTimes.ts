@@ -22,7 +22,7 @@ export function linkTimes(a: BatchFacts, b: BatchFacts, pour: PourFacts): LinkTi
   const takenOn = pour.takenOn ?? rackOn;
   const waitDays =
     takenOn === undefined || b.brewOn === undefined ? undefined : daysBetween(takenOn, b.brewOn);
-  const waitC = pour.cakeC ?? (cropped(pour, rackOn) ? CROP_STORE_C : a.fermentC);
+  const waitC = pour.cakeC ?? usualWaitC(a, pour, rackOn);
   return {
     takenOn,
     underBeerDays: underBeer(a, pour),
@@ -38,8 +38,16 @@ export function linkTimes(a: BatchFacts, b: BatchFacts, pour: PourFacts): LinkTi
  */
 const CROP_STORE_C = 4;
 
-const cropped = ({ takenOn }: PourFacts, rackOn: Day | undefined): boolean =>
-  takenOn !== undefined && rackOn !== undefined && takenOn < rackOn;
+/** Where it cannot be told whether the yeast is a crop or a bare cake, it is not known. */
+function usualWaitC(
+  a: BatchFacts,
+  { takenOn }: PourFacts,
+  rackOn: Day | undefined,
+): number | undefined {
+  if (takenOn === undefined) return a.fermentC;
+  if (rackOn === undefined) return undefined;
+  return takenOn < rackOn ? CROP_STORE_C : a.fermentC;
+}
 
 /** Racking day: brew day and the days under beer. */
 export function rackDay(batch: BatchFacts): Day | undefined {

@@ -32,7 +32,8 @@ export const missingForSurvival = (
 ): string[] =>
   together(
     missingForWait(earlier, later, pour),
-    pour.cakeC === undefined ? missingOf(earlier, 'fermentC') : [],
+    // A day of its own may be a crop, kept cold, or a bare cake: the racking day tells.
+    pour.cakeC === undefined ? missingOf(earlier, 'brewOn', 'daysUnderBeer', 'fermentC') : [],
   );
 
 /** Each name once. */

@@ -1,9 +1,9 @@
 import { describe, expect, test } from 'vitest';
 import { addDays } from '#shared/units/day.ts';
-import type { PourFacts } from '#shared/rules/facts.ts';
+import type { BatchFacts, PourFacts } from '#shared/rules/facts.ts';
 import { blonde, checkAsDated, missingFor, paleAle, standing } from '../../support/links.ts';
 
-const answer = (wait: number, pour: PourFacts = {}, a = blonde()) =>
+const answer = (wait: number, pour: PourFacts = {}, a: BatchFacts = blonde()) =>
   checkAsDated({ a, b: { ...paleAle(), brewOn: addDays('2027-03-20', wait) }, pour });
 const at = (...of: Parameters<typeof answer>) => standing(answer(...of), 'cake-wait');
 
@@ -40,6 +40,12 @@ describe('cake-wait', () => {
     expect(at(-2, { takenOn: '2027-03-16' })).toBe('passed');
     expect(at(-2, { takenOn: '2027-03-16', cakeC: 20 })).toBe('mind');
     expect(at(2, { takenOn: '2027-03-20' })).toBe('mind');
+  });
+
+  test('a crop or a bare cake, if the racking day is unknown', () => {
+    const { daysUnderBeer: _d, ...open } = blonde();
+    const link = answer(-2, { takenOn: '2027-03-16' }, open);
+    expect(missingFor(link, 'cake-wait')).toEqual(['daysUnderBeer']);
   });
 
   test('an unknown temperature matters only where the cake waits', () => {
