@@ -26,7 +26,7 @@ export function Dialog({ open, onClose, title, lead, children, wide = false }: D
           onPointerDownOutside={(event) => event.preventDefault()}
           onInteractOutside={(event) => event.preventDefault()}
           {...(lead ? {} : { 'aria-describedby': undefined })}
-          className={`fixed z-40 max-h-[92dvh] overflow-y-auto overscroll-contain border border-line bg-paper p-5 text-ink shadow-2xl max-tablet:inset-x-0 max-tablet:bottom-0 max-tablet:rounded-t-2xl tablet:top-1/2 tablet:left-1/2 tablet:w-[calc(100vw-3rem)] tablet:-translate-1/2 tablet:rounded-card tablet:p-7 ${wide ? 'tablet:max-w-3xl' : 'tablet:max-w-xl'}`}
+          className={`fixed z-40 max-h-[92dvh] overflow-y-auto overscroll-contain outline-none border border-line bg-paper p-5 text-ink shadow-2xl max-tablet:inset-x-0 max-tablet:bottom-0 max-tablet:rounded-t-2xl tablet:top-1/2 tablet:left-1/2 tablet:w-[calc(100vw-3rem)] tablet:-translate-1/2 tablet:rounded-card tablet:p-7 ${wide ? 'tablet:max-w-3xl' : 'tablet:max-w-xl'}`}
         >
           <div className="flex items-start gap-4">
             <Radix.Title className="grow font-display text-h2 font-bold tracking-[-.02em]">

@@ -7,8 +7,11 @@ import { useRef } from 'react';
 export function useFocusBack() {
   const opener = useRef<Element | null>(null);
   return {
-    onOpenAutoFocus: () => {
+    onOpenAutoFocus: (event: Event) => {
       opener.current = document.activeElement;
+      // The dialog itself, not its Close button: the title is read, and Tab goes on from there.
+      event.preventDefault();
+      if (event.currentTarget instanceof HTMLElement) event.currentTarget.focus();
     },
     onCloseAutoFocus: (event: Event) => {
       event.preventDefault();

@@ -41,6 +41,7 @@ export function StageDialog({ batch, to, onClose }: StageDialogProps) {
         }}
       >
         <StageFields to={to} />
+        {CAUTIONS[to] && <p className="text-small text-ink2">{CAUTIONS[to]}</p>}
       </Form>
     </Dialog>
   );
@@ -52,6 +53,15 @@ const LEADS: Record<NextStage, string> = {
   racked:
     'Its cake lies bare from then on, so pour soon or keep it cold. Leave a reading empty if you did not take it.',
   scrapped: 'It leaves its shelf and stays on the record. Its cake is not poured on.',
+};
+
+/** The usual caution of the hour, in one sentence or two. */
+const CAUTIONS: Partial<Record<NextStage, string>> = {
+  fermenting:
+    'Hot wort burns, shatters cold glass and kills yeast: chill it first. Lid on, blow-off tube, never a blocked airlock.',
+  racked:
+    'Carbon dioxide lies low: open the door of a cellar, closet or chest freezer before leaning in. Never seal what may still ferment.',
+  scrapped: 'Dumped cake and spent hops are dangerous to dogs.',
 };
 
 function StageFields({ to }: { to: NextStage }) {
