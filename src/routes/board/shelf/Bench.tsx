@@ -51,7 +51,7 @@ function BenchBatch({ batch }: { batch: Batch }) {
       <Swatch srm={batch.srm} size="glass" />
       <div className="min-w-0">
         <h3 className="font-sans text-body leading-[1.25] font-bold tracking-normal text-ink">
-          <BatchName batch={batch} className="block max-w-full truncate" />
+          <BatchName batch={batch} className="block min-h-6 max-w-full truncate" />
         </h3>
         <p className="truncate">{[batch.style, gravity].filter(Boolean).join(' · ')}</p>
       </div>
