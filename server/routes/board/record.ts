@@ -18,30 +18,39 @@ export interface Entry {
 }
 
 /** Raises the season's revision. It locks the season, so it comes after the locks of shelves. */
-export async function raiseRevision(tx: Tx, seasonId: string): Promise<number> {
+export async function raiseRevision(tx: Tx, seasonId: string, by = 1): Promise<number> {
   const [raised] = await tx
     .update(season)
-    .set({ revision: sql`${season.revision} + 1` })
+    .set({ revision: sql`${season.revision} + ${by}` })
     .where(eq(season.id, seasonId))
     .returning({ revision: season.revision });
   if (!raised) throw new Error('The season went away under its own change');
   return raised.revision;
 }
 
-export async function writeEntry(tx: Tx, member: Member, at: Date, entry: Entry): Promise<string> {
-  const { id = randomUUID(), touches, before, after, ...rest } = entry;
-  await tx.insert(change).values({
-    id,
-    ...rest,
-    before: stored(before),
-    after: stored(after),
-    touches: [...touches],
-    breweryId: member.brewery.id,
-    seasonId: member.seasonId,
-    personId: member.person.id,
-    at,
-  });
-  return id;
+export async function writeEntry(tx: Tx, member: Member, at: Date, entry: Entry): Promise<void> {
+  await writeEntries(tx, at, [{ member, entry }]);
+}
+
+/** In the order in which they are given. */
+export async function writeEntries(
+  tx: Tx,
+  at: Date,
+  entries: readonly { member: Member; entry: Entry }[],
+): Promise<void> {
+  await tx.insert(change).values(
+    entries.map(({ member, entry: { id = randomUUID(), touches, before, after, ...rest } }) => ({
+      id,
+      ...rest,
+      before: stored(before),
+      after: stored(after),
+      touches: [...touches],
+      breweryId: member.brewery.id,
+      seasonId: member.seasonId,
+      personId: member.person.id,
+      at,
+    })),
+  );
 }
 
 /** What was not there, or is no longer: JSON's null, since the record has no gaps. */

@@ -1,88 +1,83 @@
-import { eq } from 'drizzle-orm';
+import { inArray } from 'drizzle-orm';
 import type { Moved, MoveRequest } from '#shared/api/move.ts';
-import { moveBatch, withRows, type MoveRefusal, type MoveResult } from '#shared/chain/move.ts';
 import type { Member } from '../../auth/whoAsks.ts';
 import { inTransaction } from '../../db/inTransaction.ts';
+import { oncePer } from '../../db/oncePer.ts';
 import { change } from '../../db/schema/change.ts';
+import type { Db, Tx } from '../../db/client.ts';
 import type { Deps } from '../../deps.ts';
-import { notFound, problem } from '../../problems.ts';
-import { readBoard, type Hand } from '../board/changeBoard.ts';
+import { readBoard } from '../board/changeBoard.ts';
 import { lockSeason, lockShelves } from '../board/locks.ts';
-import { raiseRevision, writeEntry } from '../board/record.ts';
-import { insertChain } from '../chains/commands.ts';
-import { answerAgain, answerMove } from './answer.ts';
-import { sidesOf } from './standing.ts';
-import { storeRows } from './store.ts';
+import { createLane, type Lane, type Outcome } from './lane.ts';
+import { MoveGroup } from './moveGroup.ts';
 
-/** One move: order and dates together, in one transaction under the locks of its shelves. */
-export function move(
-  deps: Pick<Deps, 'db' | 'clock'>,
-  member: Member,
-  wish: MoveRequest,
-): Promise<Moved> {
+export interface Wish {
+  deps: Pick<Deps, 'db' | 'clock'>;
+  member: Member;
+  request: MoveRequest;
+}
+
+/**
+ * One move: order and dates together. Moves of one season that are wished at the same time are made
+ * one after the other in one transaction: they would only wait for each other's locks.
+ */
+export function move(deps: Wish['deps'], member: Member, request: MoveRequest): Promise<Moved> {
+  return laneOf(deps.db, member.seasonId).add({ deps, member, request });
+}
+
+const lanesOf = oncePer((_db: Db) => new Map<string, Lane<Wish, Moved>>());
+
+function laneOf(db: Db, seasonId: string): Lane<Wish, Moved> {
+  const lanes = lanesOf(db);
+  for (const [id, lane] of lanes) if (lane.isEmpty()) lanes.delete(id);
+  const lane = lanes.get(seasonId) ?? createLane({ grant, goesWith });
+  lanes.set(seasonId, lane);
+  return lane;
+}
+
+const MOST = 32;
+
+/** A new shelf is a row of its own, and a repeated request must see what became of the first. */
+function goesWith({ request }: Wish, group: readonly Wish[]): boolean {
+  const isPlain = (other: MoveRequest) => other.newChain === undefined;
+  return (
+    group.length < MOST &&
+    isPlain(request) &&
+    group.every(({ request: other }) => isPlain(other) && other.id !== request.id)
+  );
+}
+
+async function grant(group: readonly Wish[]): Promise<Outcome<Moved>[]> {
+  const [first] = group;
+  if (!first) return [];
+  const { deps, member } = first;
   return inTransaction(deps.db, async (tx) => {
-    const { seasonId } = member;
-    await lockShelves(tx, seasonId, shelvesOf(wish));
-    // The bench and the order of the shelves have no row of their own: the season's stands for them.
-    if (touchesSeason(wish)) await lockSeason(tx, seasonId);
+    await lockShelves(tx, member.seasonId, shelvesOf(group));
+    await lockSeason(tx, member.seasonId);
     const now = deps.clock.now();
     const board = await readBoard(tx, member, now);
-    const hand = { tx, member, board, now };
-    const [again] = await tx.select().from(change).where(eq(change.id, wish.id));
-    if (again) return answerAgain(hand, again);
-    const result = moveBatch(board, wish);
-    if (!result.ok) throw refused(hand, wish, result);
-    return result.batches.length === 0
-      ? answerMove(hand, { changeId: wish.id, what: result.what, revision: board.season.revision })
-      : store(hand, wish, result);
+    const made = new MoveGroup({ tx, board, now }, await madeBefore(tx, group));
+    for (const wish of group) await made.add(wish);
+    return made.store();
   });
 }
 
-const shelvesOf = ({ toChainId, expectedChainId }: MoveRequest): string[] =>
-  [toChainId, expectedChainId].filter(
-    (id): id is string => id !== null && id !== 'bench' && id !== 'new',
-  );
+const shelvesOf = (group: readonly Wish[]): string[] => [
+  ...new Set(
+    group
+      .flatMap(({ request }) => [request.toChainId, request.expectedChainId])
+      .filter((id): id is string => id !== null && id !== 'bench' && id !== 'new'),
+  ),
+];
 
-const touchesSeason = ({ toChainId, expectedChainId }: MoveRequest): boolean =>
-  toChainId === 'bench' || toChainId === 'new' || expectedChainId === null;
-
-type Granted = Extract<MoveResult, { ok: true }>;
-
-async function store(hand: Hand, wish: MoveRequest, result: Granted): Promise<Moved> {
-  const { tx, member, board, now } = hand;
-  const revision = await raiseRevision(tx, member.seasonId);
-  if (wish.newChain && result.chains.length > 0)
-    await insertChain(hand, wish.newChain, '/newChain');
-  const batches = await storeRows(hand, result.batches);
-  const after = withRows(board, result.batches, result.chains);
-  const sides = sidesOf(board, after, wish.batchId);
-  await writeEntry(tx, member, now, {
-    id: wish.id,
-    kind: 'move',
-    what: result.what,
-    ...sides,
-    touches: sides.after.batches.map(({ id }) => id),
-  });
-  const { chains, shifted, cleared, what } = result;
-  const own = { undo: { id: wish.id, what }, redo: null };
-  return answerMove(hand, {
-    changeId: wish.id,
-    what,
-    revision,
-    batches,
-    chains,
-    shifted,
-    cleared,
-    own,
-  });
-}
-
-function refused(
-  { board }: Hand,
-  wish: MoveRequest,
-  { why, detail }: { why: MoveRefusal; detail: string },
-) {
-  const current = board.batches.find(({ id }) => id === wish.batchId);
-  if (!current) return notFound();
-  return problem(why === 'moved-elsewhere' ? why : 'place-taken', { detail, current });
-}
+/** Changes that have one of these ids already: the requests are repeated ones. */
+const madeBefore = (tx: Tx, group: readonly Wish[]) =>
+  tx
+    .select()
+    .from(change)
+    .where(
+      inArray(
+        change.id,
+        group.map(({ request }) => request.id),
+      ),
+    );

@@ -32,7 +32,8 @@ export interface Sides {
  * differ: they still stand after the same one.
  */
 export function sidesOf(before: BoardFacts, after: BoardFacts, movedId: string): Sides {
-  const [was, is] = [standingsOf(before), standingsOf(after)];
+  const shelves = touchedShelves(before, after);
+  const [was, is] = [standingsOf(before, shelves), standingsOf(after, shelves)];
   const differs = [...is.values()]
     .filter((row) => row.id !== movedId && !isDeepStrictEqual(row, was.get(row.id)))
     .map(({ id }) => id);
@@ -41,6 +42,13 @@ export function sidesOf(before: BoardFacts, after: BoardFacts, movedId: string):
     before: sideOf(before, was, ids, onlyIn(before, after)),
     after: sideOf(after, is, ids, onlyIn(after, before)),
   };
+}
+
+/** Shelves (null: the bench) of which any row is another one: only there can a standing differ. */
+function touchedShelves(before: BoardFacts, after: BoardFacts): Set<string | null> {
+  const known = new Map(before.batches.map((row) => [row.id, row]));
+  const changed = after.batches.filter((row) => known.get(row.id) !== row);
+  return new Set(changed.flatMap((row) => [row.chainId, known.get(row.id)?.chainId ?? null]));
 }
 
 function sideOf(
@@ -61,11 +69,15 @@ function sideOf(
 const onlyIn = (one: BoardFacts, other: BoardFacts): Chain | null =>
   one.chains.find(({ id }) => !other.chains.some((chain) => chain.id === id)) ?? null;
 
-export function standingsOf(board: BoardFacts): Map<string, Standing> {
+/** By batch; of all shelves, or of some. */
+export function standingsOf(
+  board: BoardFacts,
+  shelves?: ReadonlySet<string | null>,
+): Map<string, Standing> {
   const index = indexBoard(board);
   return new Map(
     board.batches
-      .filter(({ stage }) => stage !== 'scrapped')
+      .filter(({ stage, chainId }) => stage !== 'scrapped' && (shelves?.has(chainId) ?? true))
       .map((batch) => [batch.id, standingOf(index, batch)]),
   );
 }

@@ -15,7 +15,7 @@ import { answerAgain, answerMove, shiftedBetween } from './answer.ts';
 import { newestOwn } from './newest.ts';
 import { revert, type Reverted } from './revert.ts';
 import { sidesOf, type Side } from './standing.ts';
-import { dropChain, storeRows } from './store.ts';
+import { dropChain, storeRows, withNewVersions } from './store.ts';
 
 type Way = 'undo' | 'redo';
 type ChangeRow = typeof change.$inferSelect;
@@ -75,7 +75,8 @@ async function store(hand: Hand, way: Way, row: ChangeRow, result: Granted): Pro
   const { rows, added, removedChainId } = result;
   const revision = await raiseRevision(tx, member.seasonId);
   if (added) await insertChainRow(hand, added);
-  const batches = await storeRows(hand, rows);
+  const batches = withNewVersions(board, rows);
+  await storeRows(hand, batches);
   if (removedChainId !== null) await dropChain(hand, removedChainId);
   const withAdded = withRows(board, rows, added ? [added] : []);
   const after = {

@@ -20,8 +20,9 @@ export function initialsOf(name: string): string {
   return letters.toUpperCase().slice(0, 3);
 }
 
-/** Whole letters: accents and the like stay with theirs. */
+/** Whole letters: accents and the like stay with theirs. Of plain ones each is whole by itself. */
 function firstOf(word: string, count: number): string {
+  if (/^[\x20-\x7e]*$/.test(word)) return word.slice(0, count);
   const segments = Array.from(characters.segment(word), ({ segment }) => segment);
   return segments.slice(0, count).join('');
 }

@@ -34,6 +34,7 @@ async function fire(target: Target, connections: number, duration: number): Prom
   const failed = result.non2xx + result.errors + result.timeouts;
   if (failed > 0 || times.length === 0) throw new Error(`${failed} requests were not answered 200`);
   const [least, most] = [Math.min(...sizes), Math.max(...sizes)];
-  if (least < most * 0.98) throw new Error(`answers of ${least} to ${most} bytes: not all are whole`);
+  if (least < most * 0.98)
+    throw new Error(`answers of ${least} to ${most} bytes: not all are whole`);
   return { rate: times.length / result.duration, p95: percentile(times, 0.95) };
 }

@@ -1,0 +1,117 @@
+import type { Batch } from '#shared/api/batch.ts';
+import type { Moved, MoveRequest } from '#shared/api/move.ts';
+import { moveBatch, withRows, type MoveRefusal, type MoveResult } from '#shared/chain/move.ts';
+import type { Member } from '../../auth/whoAsks.ts';
+import type { change } from '../../db/schema/change.ts';
+import { notFound, problem } from '../../problems.ts';
+import type { Hand } from '../board/changeBoard.ts';
+import { raiseRevision, writeEntries, type Entry } from '../board/record.ts';
+import { insertChain } from '../chains/commands.ts';
+import { answerAgain, answerMove } from './answer.ts';
+import type { Outcome } from './lane.ts';
+import { sidesOf } from './standing.ts';
+import { storeRows, withNewVersions } from './store.ts';
+
+type Granted = Extract<MoveResult, { ok: true }>;
+type Change = typeof change.$inferSelect;
+
+interface Asked {
+  member: Member;
+  request: MoveRequest;
+}
+
+/** Moves made one after the other on the board as it stands under the locks, and stored together. */
+export class MoveGroup {
+  readonly #hand: Omit<Hand, 'member'>;
+  readonly #madeBefore: readonly Change[];
+  readonly #outcomes: Outcome<Moved>[] = [];
+  readonly #entries: { member: Member; entry: Entry }[] = [];
+  /** Rows as the moves so far leave them, with their new versions. */
+  readonly #rows = new Map<string, Batch>();
+  /** The board after the moves so far. */
+  #board: Hand['board'];
+
+  constructor(hand: Omit<Hand, 'member'>, madeBefore: readonly Change[]) {
+    this.#hand = hand;
+    this.#board = hand.board;
+    this.#madeBefore = madeBefore;
+  }
+
+  async add(asked: Asked): Promise<void> {
+    try {
+      this.#outcomes.push({ answer: await this.#make(asked) });
+    } catch (refusal) {
+      if (!(refusal instanceof Refused)) throw refusal;
+      this.#outcomes.push({ refusal: refusal.problem });
+    }
+  }
+
+  /** Writes what the moves changed; an outcome for each, in their order. */
+  async store(): Promise<Outcome<Moved>[]> {
+    if (this.#entries.length === 0) return this.#outcomes;
+    const { tx, board, now } = this.#hand;
+    await raiseRevision(tx, board.season.id, this.#entries.length);
+    await storeRows(this.#hand, [...this.#rows.values()]);
+    await writeEntries(tx, now, this.#entries);
+    return this.#outcomes;
+  }
+
+  async #make({ member, request }: Asked): Promise<Moved> {
+    const board = this.#board;
+    const hand = { ...this.#hand, board, member };
+    const again = this.#madeBefore.find(({ id }) => id === request.id);
+    if (again) return answerAgain(hand, again).catch(refuse);
+    const result = moveBatch(board, request);
+    if (!result.ok) throw new Refused(refused(hand, request, result));
+    const { what } = result;
+    if (result.batches.length === 0) {
+      const { revision } = board.season;
+      return answerMove(hand, { changeId: request.id, what, revision });
+    }
+    if (request.newChain && result.chains.length > 0)
+      await insertChain(hand, request.newChain, '/newChain');
+    return answerMove(hand, this.#take({ member, request }, result));
+  }
+
+  /** Takes a granted move into the board and the record. */
+  #take({ member, request }: Asked, result: Granted) {
+    const { what, chains, shifted, cleared } = result;
+    const before = this.#board;
+    const batches = withNewVersions(before, result.batches);
+    for (const row of batches) this.#rows.set(row.id, row);
+    const revision = before.season.revision + 1;
+    const after = { ...before, ...withRows(before, batches, chains) };
+    this.#board = { ...after, season: { ...before.season, revision } };
+    const sides = sidesOf(before, after, request.batchId);
+    const touches = sides.after.batches.map(({ id }) => id);
+    this.#entries.push({
+      member,
+      entry: { id: request.id, kind: 'move', what, ...sides, touches },
+    });
+    const own = { undo: { id: request.id, what }, redo: null };
+    return { changeId: request.id, what, revision, batches, chains, shifted, cleared, own };
+  }
+}
+
+/** Says no to one wish; anything else that is thrown undoes the whole group. */
+class Refused extends Error {
+  readonly problem: unknown;
+  constructor(why: unknown) {
+    super('Refused');
+    this.problem = why;
+  }
+}
+
+function refuse(why: unknown): never {
+  throw new Refused(why);
+}
+
+function refused(
+  { board }: Pick<Hand, 'board'>,
+  wish: MoveRequest,
+  { why, detail }: { why: MoveRefusal; detail: string },
+) {
+  const current = board.batches.find(({ id }) => id === wish.batchId);
+  if (!current) return notFound();
+  return problem(why === 'moved-elsewhere' ? why : 'place-taken', { detail, current });
+}
