@@ -5,6 +5,7 @@ import { readBoard, useBoardSlug } from '../../../api/board.ts';
 import { isOnline } from '../../../api/connection.ts';
 import { moverOf } from '../../../api/moves.ts';
 import { boardStillness } from '../../../api/stillness.ts';
+import { newId } from '../../../app/newId.ts';
 import { createLifting } from './lifting.ts';
 import { gapsInSight, handleOf, onScroll } from './inSight.ts';
 import type { LiftMachine } from './liftContext.ts';
@@ -26,7 +27,7 @@ function portsOf(client: QueryClient, slug: string, say: (words: string) => void
     holdStill: boardStillness.hold,
     say,
     focusBatch,
-    newId: () => crypto.randomUUID(),
+    newId,
     gapsInSight,
     onScroll,
     nextFrame: (run) => requestAnimationFrame(run),
