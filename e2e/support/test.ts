@@ -14,10 +14,12 @@ export interface Brewing extends TestBrewery {
 
 export interface Fixtures {
   /** Console errors that this test expects; anything else on the console fails it. */
-  expectedErrors: RegExp[];
+  expectedErrors: RegExp | null;
   brewery: Brewing;
   /** The page, signed in as the brewery's head brewer. */
   board: Page;
+  /** A second browser, in which the brewer is signed in. */
+  partner: Page;
   watch: void;
 }
 
@@ -37,13 +39,12 @@ export const test = base.extend<Fixtures, WorkerFixtures>({
     },
     { scope: 'worker' },
   ],
-  expectedErrors: [[], { option: true }],
+  expectedErrors: [null, { option: true }],
   watch: [
     async ({ context, expectedErrors }, use) => {
       const errors = watchErrors(context);
       await use();
-      const unexpected = errors.filter((text) => !expectedErrors.some((each) => each.test(text)));
-      expect(unexpected, 'errors on the console').toEqual([]);
+      expect(others(errors, expectedErrors), 'errors on the console').toEqual([]);
     },
     { auto: true },
   ],
@@ -61,7 +62,18 @@ export const test = base.extend<Fixtures, WorkerFixtures>({
     await brewery.signIn(context, 'head-brewer');
     await use(page);
   },
+  partner: async ({ brewery, browser, expectedErrors, contextOptions, baseURL }, use) => {
+    const context = await browser.newContext({ ...contextOptions, baseURL: baseURL ?? '' });
+    const errors = watchErrors(context);
+    await brewery.signIn(context, 'brewer');
+    await use(await context.newPage());
+    await context.close();
+    expect(others(errors, expectedErrors), "errors on the partner's console").toEqual([]);
+  },
 });
+
+const others = (errors: readonly string[], expected: RegExp | null) =>
+  errors.filter((text) => !expected?.test(text));
 
 /** Whoever is not signed in asks who is, and is told nobody: the browser calls every 401 an error. */
 const NOBODY_SIGNED_IN = /status of 401 .*\/api\/session\)$/;
