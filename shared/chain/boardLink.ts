@@ -24,6 +24,11 @@ export interface Sight {
   use(batchId: string): VesselUse | undefined;
 }
 
+/** What of it one link is read with. */
+export type LinkSight = Omit<Sight, 'layout' | 'stays'> & {
+  layout: Pick<Layout, 'chain' | 'predecessor'>;
+};
+
 /** The board as it stands, read once. */
 export function sightOf(board: BoardFacts, units?: UnitPrefs): Sight {
   const index = indexBoard(board);
@@ -79,9 +84,9 @@ export function linkInput(laterId: string, sight: Sight): LinkInput | null {
 }
 
 /** The link of two batches that stand together; null where the yeast is not on the board. */
-export function linkBetween(earlier: Batch, later: Batch, sight: Sight): LinkInput | null {
+export function linkBetween(earlier: Batch, later: Batch, sight: LinkSight): LinkInput | null {
   const { index, layout } = sight;
-  const yeast = cakeYeastOf(later, sight);
+  const yeast = cakeYeastOf(earlier, later, sight);
   if (!yeast) return null;
   const { generation, inherited } = sight.descent(later);
   const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
@@ -104,26 +109,31 @@ export function linkBetween(earlier: Batch, later: Batch, sight: Sight): LinkInp
 }
 
 /** The yeast of the cake that goes under a batch: its source's, which is its chain's but for branches. */
-export function cakeYeastOf(later: Batch, { index, layout, yeastFacts }: Sight): YeastFacts | null {
-  const yeast = index.yeasts.get(cakeYeastId(later, layout) ?? '');
-  return yeast ? yeastFacts(yeast) : null;
+function cakeYeastOf(earlier: Batch, later: Batch, sight: LinkSight): YeastFacts | null {
+  const yeast = sight.index.yeasts.get(cakeYeastId(earlier, later, sight) ?? '');
+  return yeast ? sight.yeastFacts(yeast) : null;
 }
 
-function cakeYeastId(later: Batch, layout: Layout): string | undefined {
-  const chainId = layout.predecessor(later.id)?.chainId ?? later.chainId;
+function cakeYeastId(earlier: Batch, later: Batch, { layout }: LinkSight): string | undefined {
+  const chainId = earlier.chainId ?? later.chainId;
   return chainId === null ? undefined : layout.chain(chainId)?.yeastId;
 }
 
 /** The yeast that the later batch asks for where that is not the cake's. */
-function otherYeastOf(later: Batch, { index, layout }: Sight): PourFacts['otherYeast'] | null {
+function otherYeastOf(
+  earlier: Batch,
+  later: Batch,
+  sight: LinkSight,
+): PourFacts['otherYeast'] | null {
+  const { index, layout } = sight;
   const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
   const wanted = index.yeasts.get(later.yeastId ?? chain?.yeastId ?? '');
-  if (!wanted || wanted.id === cakeYeastId(later, layout)) return null;
+  if (!wanted || wanted.id === cakeYeastId(earlier, later, sight)) return null;
   return { kind: wanted.kind, character: wanted.character };
 }
 
-function pourOf(earlier: Batch, later: Batch, sight: Sight): PourFacts {
-  const otherYeast = otherYeastOf(later, sight);
+function pourOf(earlier: Batch, later: Batch, sight: LinkSight): PourFacts {
+  const otherYeast = otherYeastOf(earlier, later, sight);
   const own = later.vesselId ? sight.index.vessels.get(later.vesselId) : undefined;
   const beersSinceCleaning = sight.use(later.id)?.beersSinceCleaning;
   return {

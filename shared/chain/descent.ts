@@ -14,7 +14,8 @@ export interface Descent {
 /** Hands the allergens, cultures and strength of one beer down to the next. */
 export type HandDown = (before: Inheritance, earlier: Batch) => Inheritance;
 
-const UNKNOWN_INHERITED: Inheritance = {
+/** Nobody knows what came before. */
+export const UNKNOWN_INHERITED: Inheritance = {
   ...NOTHING_INHERITED,
   ogUnknown: true,
   allergensUnknown: true,

@@ -1,7 +1,7 @@
 import type { Batch } from '../api/batch.ts';
 import type { BoardIndex } from './board.ts';
 import { asLastShelf, proposeShelf } from './newShelf.ts';
-import { lockOf, withoutBatch, type Lock, type Target } from './plan.ts';
+import { descendsFrom, firstOpenPlace, type Lock, type Target } from './plan.ts';
 
 /** A place that a lifted batch could have, before anything is judged. */
 export interface Place extends Target {
@@ -23,15 +23,18 @@ export function placesFor(index: BoardIndex, batch: Batch): Place[] {
 
 function shelfPlaces(index: BoardIndex, batch: Batch, chainId: string): Place[] {
   const all = index.batchesOf(chainId);
-  const at = all.findIndex((mate) => mate.id === batch.id);
-  const standsAfter = at > 0 ? all[at - 1]?.id : at === 0 ? null : undefined;
-  const afters = [null, ...withoutBatch(all, batch.id).map((mate) => mate.id)];
-  return afters.map((afterId) => {
-    const target = { chainId, afterId, added: null };
-    const here = afterId === standsAfter;
-    const locked = here ? null : lockOf(index, batch, target);
-    return { ...target, key: `${chainId}:${afterId ?? 'first'}`, toChainId: chainId, here, locked };
-  });
+  const standsAt = all.indexOf(batch);
+  const mates = standsAt < 0 ? all : all.toSpliced(standsAt, 1);
+  const open = firstOpenPlace(mates);
+  const isOwnBranch = descendsFrom(index, chainId, batch.id, null);
+  const place = (at: number): Place => {
+    const afterId = at === 0 ? null : (mates[at - 1]?.id ?? null);
+    const here = at === standsAt;
+    const locked = here ? null : at < open ? 'poured' : isOwnBranch ? 'own-branch' : null;
+    const key = `${chainId}:${afterId ?? 'first'}`;
+    return { key, chainId, toChainId: chainId, afterId, added: null, here, locked };
+  };
+  return Array.from({ length: mates.length + 1 }, (_, at) => place(at));
 }
 
 function newShelfPlace(index: BoardIndex, batch: Batch): Place {

@@ -1,17 +1,14 @@
 import type { Verdict } from '../rules/vocabulary.ts';
-import type { Judgement } from './linkMemo.ts';
-import { isWorse, type ChangedLink } from './weigh.ts';
+import type { Judgement } from './trial/judgement.ts';
+import type { ChangedLink } from './weigh.ts';
 
 /** A link that the brewer is told of at the gap: it comes about by the drop, or gets worse by it. */
 export const countsAtGap = ({ relinked, before, after }: ChangedLink): boolean =>
-  after !== null && (relinked || isWorse(after, before));
+  after !== null && (relinked || after.counts > (before?.counts ?? -1));
 
 /** A link that comes about, ends, or is judged otherwise than now. */
 export const differs = ({ relinked, before, after }: ChangedLink): boolean =>
-  relinked ||
-  before?.verdict !== after?.verdict ||
-  before?.holds !== after?.holds ||
-  before?.minds !== after?.minds;
+  relinked || before?.counts !== after?.counts;
 
 /**
  * The worst over some links as they would be. The short reasons and the colour shift are worked

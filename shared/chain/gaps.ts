@@ -1,10 +1,14 @@
 import type { Batch } from '../api/batch.ts';
 import type { Day, Verdict } from '../rules/vocabulary.ts';
+import { dayNumber, dayOf } from '../units/day.ts';
 import { isPencilled, order, type BoardFacts } from './board.ts';
 import { nextBrewDay } from './dates.ts';
 import { placesFor, type Place } from './gapPlaces.ts';
 import { countsAtGap, differs, GapVerdict } from './gapVerdict.ts';
-import { planMove, type Lock } from './plan.ts';
+import type { Lock } from './plan.ts';
+import { NONE } from './trial/numbers.ts';
+import { newShelfOf } from './trial/roster.ts';
+import type { TrialPlace } from './trial/trial.ts';
 import { Scales, type ChangedLink } from './weigh.ts';
 
 /** A place for a lifted batch, judged as the drop would make it. */
@@ -41,10 +45,11 @@ export interface Gap {
  * Every place that a lifted batch could have: each gap of each shelf in their order, a new shelf,
  * the bench. A gap is judged over the links that come about by the drop (before the batch, behind
  * it, and where it was) and those that the drop makes worse (generation, inheritance, dates,
- * vessels). Nothing for a batch that is not pencilled.
+ * vessels). Nothing for a batch that is not pencilled. Who judges several batches of one board gives
+ * its scales, which remember what they weighed.
  */
-export function judgeGaps(board: BoardFacts, batchId: string): Gap[] {
-  const gaps = weighGaps(new Scales(board), batchId).map(({ gap }) => gap);
+export function judgeGaps(board: BoardFacts, batchId: string, scales = new Scales(board)): Gap[] {
+  const gaps = weighGaps(scales, batchId).map(({ gap }) => gap);
   const best = bestOf(gaps);
   if (best) best.best = true;
   return gaps;
@@ -64,33 +69,46 @@ export function weighGaps(
   const { index } = scales.sight;
   const batch = index.batch(batchId);
   if (!batch || !isPencilled(batch)) return [];
-  let own: { day: Day | null } | null = null;
-  const ownDay = () => (own ??= { day: nextBrewDay(index, batchId) }).day;
+  let own: number | undefined;
+  const ownDay = () => (own ??= numberOr(nextBrewDay(index, batchId)));
   return placesFor(index, batch)
     .filter(wanted)
     .map((place) => gapAt(scales, batch, place, ownDay));
 }
 
-function gapAt(scales: Scales, batch: Batch, place: Place, ownDay: () => Day | null): WeighedGap {
+const numberOr = (day: Day | null): number => (day === null ? NONE : dayNumber(day));
+
+function gapAt(scales: Scales, batch: Batch, place: Place, ownDay: () => number): WeighedGap {
   if (place.locked) return { gap: gapOf(place, [], null, null), changed: [] };
   if (place.here) return { gap: asItStands(scales, batch, place), changed: [] };
-  const plan = planMove(scales.sight.index, batch, place, 'pull', ownDay);
-  const { changed, descent } = scales.weigh(plan);
-  const row = plan.draft.batch(batch.id) ?? batch;
-  const generation = row.chainId === null ? null : descent(row).generation;
-  return { gap: gapOf(place, changed, row.brewOn, generation), changed };
+  const number = scales.roster.numberOf(batch.id);
+  const { changed, brewDay, generation } = scales.weigh(number, trialPlace(scales, place, ownDay));
+  const brewOn = brewDay === NONE ? null : dayOf(brewDay);
+  return { gap: gapOf(place, changed, brewOn, generationAt(place.chainId, generation)), changed };
 }
+
+function trialPlace({ roster }: Scales, place: Place, ownDay: () => number): TrialPlace {
+  const { chainId, afterId, added } = place;
+  const shelf =
+    chainId === null ? NONE : added ? newShelfOf(roster) : roster.shelfNumberOf(chainId);
+  const after = afterId === null ? NONE : roster.numberOf(afterId);
+  return { shelf, after, added, ownDay };
+}
+
+/** The bench is no place in a descent. */
+const generationAt = (chainId: string | null, generation: number): number | null =>
+  chainId === null || generation === NONE ? null : generation;
 
 /** The place where the batch is: the links before and behind it as they are. */
 function asItStands(scales: Scales, batch: Batch, place: Place): Gap {
-  const { sight } = scales;
-  const mates = batch.chainId === null ? [] : sight.index.batchesOf(batch.chainId);
+  const { index } = scales.sight;
+  const mates = batch.chainId === null ? [] : index.batchesOf(batch.chainId);
   const next = mates[mates.findIndex((mate) => mate.id === batch.id) + 1];
   const links = [batch.id, ...(next ? [next.id] : [])].map((laterId) => {
     const now = scales.standing(laterId);
     return { laterId, before: now, after: now, relinked: true };
   });
-  const generation = batch.chainId === null ? null : sight.descent(batch).generation;
+  const generation = generationAt(batch.chainId, scales.generationOf(batch.id));
   return { ...gapOf(place, links, batch.brewOn, generation), changes: [] };
 }
 
@@ -136,11 +154,13 @@ export function rankGaps(gaps: readonly Gap[]): Gap[] {
 
 /** The best gap; null where every shelf is closed to the batch. */
 function bestOf(gaps: readonly Gap[]): Gap | null {
-  const [first] = rankGaps(gaps);
-  return first && first.key !== 'bench' ? first : null;
+  let best: Gap | null = null;
+  for (const gap of gaps)
+    if (gap.locked === null && (best === null || compareGaps(gap, best) < 0)) best = gap;
+  return best?.key === 'bench' ? null : best;
 }
 
-const compareGaps = (a: Gap, b: Gap): number =>
+export const compareGaps = (a: Gap, b: Gap): number =>
   Number(a.key === 'bench') - Number(b.key === 'bench') ||
   a.holds - b.holds ||
   Number(a.key === 'new') - Number(b.key === 'new') ||

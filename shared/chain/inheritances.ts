@@ -1,36 +1,32 @@
 import type { Inheritance } from '../rules/facts.ts';
 
-/** Inheritances kept once each, so that equal ones are the same object and bear one number. */
+/** Inheritances kept once each, so that equal ones bear one number. */
 export class Inheritances {
-  readonly #byContent = new Map<string, Inheritance>();
-  readonly #numbers = new Map<Inheritance, number>();
-  readonly #followers = new Map<Inheritance, Map<string, Inheritance>>();
+  readonly #all: Inheritance[] = [];
+  readonly #byContent = new Map<string, number>();
+  /** By the inheritance before, then by the beer. */
+  readonly #followers: number[][] = [];
 
-  /** What follows on `before` after one beer, made once for each beer. */
-  after(before: Inheritance, batchId: string, make: () => Inheritance): Inheritance {
-    let known = this.#followers.get(before);
-    if (!known) this.#followers.set(before, (known = new Map()));
-    const done = known.get(batchId);
-    if (done) return done;
-    const after = this.#only(make());
-    known.set(batchId, after);
-    return after;
+  of(number: number): Inheritance {
+    const known = this.#all[number];
+    if (!known) throw new RangeError(`No inheritance ${number}`);
+    return known;
   }
 
   number(inheritance: Inheritance): number {
-    const known = this.#numbers.get(inheritance);
+    const content = contentOf(inheritance);
+    const known = this.#byContent.get(content);
     if (known !== undefined) return known;
-    const number = this.#numbers.size;
-    this.#numbers.set(inheritance, number);
+    const number = this.#all.push(inheritance) - 1;
+    this.#byContent.set(content, number);
+    this.#followers.push([]);
     return number;
   }
 
-  #only(inheritance: Inheritance): Inheritance {
-    const content = contentOf(inheritance);
-    const known = this.#byContent.get(content);
-    if (known) return known;
-    this.#byContent.set(content, inheritance);
-    return inheritance;
+  /** What follows after one more beer, made once for each beer. */
+  follower(before: number, beer: number, make: (before: Inheritance) => Inheritance): number {
+    const followers = this.#followers[before] ?? [];
+    return (followers[beer] ??= this.number(make(this.of(before))));
   }
 }
 

@@ -27,12 +27,21 @@ export function lockOf(index: BoardIndex, batch: Batch, target: Target): Lock | 
   if (target.chainId === null) return null;
   const mates = withoutBatch(index.batchesOf(target.chainId), batch.id);
   const place = placeAfter(mates, target.afterId);
-  if (mates.slice(place).some((mate) => !isPencilled(mate))) return 'poured';
+  if (place < firstOpenPlace(mates)) return 'poured';
   return descendsFrom(index, target.chainId, batch.id, target.added) ? 'own-branch' : null;
 }
 
+/** Nothing is put before a batch that is poured. */
+export const firstOpenPlace = (mates: readonly Batch[]): number =>
+  mates.findLastIndex((mate) => !isPencilled(mate)) + 1;
+
 /** True where a chain starts from this batch's cake, itself or through the chains it came from. */
-function descendsFrom(index: BoardIndex, chainId: string, batchId: string, added: Chain | null) {
+export function descendsFrom(
+  index: BoardIndex,
+  chainId: string,
+  batchId: string,
+  added: Chain | null,
+): boolean {
   const seen = new Set<string>();
   let chain = added?.id === chainId ? added : index.chain(chainId);
   while (chain?.start.kind === 'cake' && !seen.has(chain.id)) {

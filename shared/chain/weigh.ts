@@ -1,17 +1,16 @@
 import type { Batch } from '../api/batch.ts';
-import type { BatchFacts, Inheritance } from '../rules/facts.ts';
-import { lineageStanding } from '../rules/lineage.ts';
-import type { Verdict } from '../rules/vocabulary.ts';
-import type { BoardFacts, Layout } from './board.ts';
-import { cakeYeastOf, sightOf, type Sight } from './boardLink.ts';
-import { descents, type Descent } from './descent.ts';
-import { inherit } from './inherit.ts';
-import { Inheritances } from './inheritances.ts';
-import { daysFrom, LinkMemo, type Judgement } from './linkMemo.ts';
-import type { Plan } from './plan.ts';
-import { RevisedUses } from './revisedUses.ts';
+import type { BoardFacts } from './board.ts';
+import { sightOf, type Sight } from './boardLink.ts';
+import { countDescent, countVessel } from './trial/counting.ts';
+import { Descents } from './trial/descents.ts';
+import { Judgement } from './trial/judgement.ts';
+import { at, column, NONE } from './trial/numbers.ts';
+import { Pairs, type Pair } from './trial/pairs.ts';
+import { rosterOf, type Roster } from './trial/roster.ts';
+import { Trial, type TrialPlace } from './trial/trial.ts';
+import { findIn, membersOf, vesselsChanged } from './trial/vesselDays.ts';
 
-/** One link of a board that a plan touches, before and after. */
+/** One link of a board that a move changes. */
 export interface ChangedLink {
   laterId: string;
   /** Null: no link before (or after). */
@@ -22,145 +21,156 @@ export interface ChangedLink {
 }
 
 export interface Weighed {
+  /** Links that come about or end, or of which verdict, holds or minds change. */
   changed: ChangedLink[];
-  descent(batch: Batch): Descent;
+  /** Of the moved batch; `NONE`: not known. */
+  brewDay: number;
+  generation: number;
+}
+
+/** What a link was last judged by; `judgement` is null where no cake goes under the batch. */
+interface Standing {
+  pair: Pair | null;
+  inherited: number;
+  generation: number;
+  find: number;
+  judgement: Judgement | null;
 }
 
 /**
- * Judges a board's links as they stand and as plans would make them, each plan only as far as it
- * differs: what stands behind a changed place or date, what hangs on that, and what shares a vessel
- * with it. The board must not change meanwhile.
+ * Judges a board's links as they stand and as moves would make them. A move is tried on plain
+ * numbers and judged only as far as it reaches: what stands behind a changed place, and what shares
+ * a vessel with a changed day. The board must not change meanwhile.
  */
 export class Scales {
   readonly sight: Sight;
-  readonly #inheritances = new Inheritances();
-  readonly #memo = new LinkMemo(this.#inheritances);
-  readonly #uses: RevisedUses;
-  readonly #standing = new Map<string, Judgement | null>();
+  readonly roster: Roster;
+  readonly #trial: Trial;
+  readonly #descents: Descents;
+  readonly #pairs: Pairs;
+  /** What each batch finds in its vessel, on the board and in the trial. */
+  readonly #baseFinds: Int32Array;
+  readonly #finds: Int32Array;
+  readonly #standing: Standing[] = [];
+  /** The trial in which a batch was last reached. */
+  readonly #reached: Int32Array;
+  #trials = 0;
 
   constructor(board: BoardFacts) {
-    const base = sightOf(board);
-    this.sight = { ...base, descent: descents(base.layout, this.#handDown) };
-    this.#uses = new RevisedUses(this.sight);
+    this.sight = sightOf(board);
+    this.roster = rosterOf(this.sight.index);
+    const { batches } = this.roster;
+    this.#trial = new Trial(this.roster);
+    this.#descents = new Descents(this.#trial, (batch) => this.#factsOf(batch));
+    this.#pairs = new Pairs(this.#trial, this.sight);
+    this.#baseFinds = Int32Array.from(batches, (_, batch) => this.#findOf(batch));
+    this.#finds = this.#baseFinds.slice();
+    this.#reached = column(batches.length);
+    batches.forEach((_, batch) => this.#standing.push(this.#judge(batch, undefined)));
   }
-
-  readonly #handDown = (before: Inheritance, earlier: Batch): Inheritance =>
-    this.#inheritances.after(before, earlier.id, () => inherit(before, this.sight.facts(earlier)));
 
   /** A link as it stands; null where no cake goes under the batch. */
   standing(batchId: string): Judgement | null {
-    const known = this.#standing.get(batchId);
-    if (known !== undefined) return known;
-    const judgement = this.#judge(batchId, this.sight);
-    this.#standing.set(batchId, judgement);
-    return judgement;
+    return this.#standing[this.roster.numberOf(batchId)]?.judgement ?? null;
   }
 
-  weigh({ draft, relinked }: Plan): Weighed {
-    const behind = behindChanges(this.sight.layout, draft);
-    const uses = this.#uses.in(draft);
-    const sight: Sight = {
-      ...this.sight,
-      layout: draft,
-      facts: (batch) => this.#redated(batch),
-      descent: descents(draft, this.#handDown, (id) => this.#settled(id, behind)),
-      use: (id) => uses.get(id) ?? this.sight.use(id),
+  /** The generation of a batch as it stands; `NONE`: not known. */
+  generationOf(batchId: string): number {
+    return at(this.#descents.generation, this.roster.numberOf(batchId));
+  }
+
+  /** What putting a batch somewhere would change. */
+  weigh(batch: number, place: TrialPlace): Weighed {
+    this.#trial.put(batch, place);
+    const reached = this.#reach(batch);
+    this.#descents.trace(reached);
+    const found = this.#findAnew(reached);
+    const changed = reached.flatMap((one) => this.#change(one) ?? []);
+    const brewDay = at(this.#trial.now.brewDay, batch);
+    const generation = at(this.#descents.generation, batch);
+    this.#descents.undo(reached);
+    for (const one of found) this.#finds[one] = at(this.#baseFinds, one);
+    this.#trial.undo();
+    return { changed, brewDay, generation };
+  }
+
+  /** The moved batch, those that stand on another cake, and all that descend from them. */
+  #reach(batch: number): number[] {
+    this.#trials += 1;
+    const reached: number[] = [];
+    this.#take(batch, reached);
+    for (const one of this.#trial.relinked) this.#take(one, reached);
+    for (let next = 0; next < reached.length; next += 1)
+      this.#trial.eachFollower(reached[next] ?? NONE, (one) => this.#take(one, reached));
+    return reached;
+  }
+
+  #take(batch: number, reached: number[]): void {
+    if (this.#reached[batch] === this.#trials) return;
+    this.#reached[batch] = this.#trials;
+    reached.push(batch);
+  }
+
+  /** Looks into the vessels whose days changed; what is found otherwise there is reached too. */
+  #findAnew(reached: number[]): number[] {
+    const trial = this.#trial;
+    const found: number[] = [];
+    const find = (batch: number, members: readonly number[]) => {
+      const now = findIn(trial, members, batch);
+      if (now === this.#baseFinds[batch]) return;
+      this.#finds[batch] = now;
+      found.push(batch);
+      this.#take(batch, reached);
     };
-    const changed: ChangedLink[] = [];
-    for (const laterId of new Set([...behind, ...relinked, ...uses.keys()])) {
-      if (!uses.has(laterId) && this.#onlyDescends(laterId, sight)) continue;
-      const after = this.#judge(laterId, sight);
-      const before = this.standing(laterId);
-      if (before ?? after)
-        changed.push({ laterId, before, after, relinked: relinked.includes(laterId) });
+    find(trial.moved, membersOf(trial, at(trial.now.vessel, trial.moved)));
+    for (const vessel of vesselsChanged(trial)) {
+      const members = membersOf(trial, vessel);
+      for (const batch of members) if (batch !== trial.moved) find(batch, members);
     }
-    return { changed, descent: sight.descent };
+    return found;
   }
 
-  #judge(laterId: string, sight: Sight): Judgement | null {
-    const later = sight.layout.batch(laterId);
-    const earlier = sight.layout.predecessor(laterId);
-    return later && earlier ? this.#memo.judge(earlier, later, sight) : null;
+  #change(batch: number): ChangedLink | null {
+    const was = this.#standing[batch];
+    const { judgement: after } = this.#judge(batch, was);
+    const before = was?.judgement ?? null;
+    const relinked = this.#trial.relinked.includes(batch);
+    if (!(before ?? after) || (after === before && !relinked)) return null;
+    return { laterId: this.roster.batches[batch]?.id ?? '', before, after, relinked };
   }
 
-  /** True of a link in which at most its descent is new, and no rule stands otherwise for that. */
-  #onlyDescends(laterId: string, sight: Sight): boolean {
-    const [was, now] = [this.sight.index.batch(laterId), sight.layout.batch(laterId)];
-    const before = this.sight.layout.predecessor(laterId);
-    const earlier = sight.layout.predecessor(laterId);
-    if (!was || !now || !before || before.id !== earlier?.id) return false;
-    if (was.chainId !== now.chainId || before.chainId !== earlier.chainId) return false;
-    if (!sameDays(before, was, earlier, now)) return false;
-    return this.#lineage(was, this.sight) === this.#lineage(now, sight);
+  /** Judges a link as the trial stands; the known standing where nothing of it differs. */
+  #judge(batch: number, known: Standing | undefined): Standing {
+    const cake = at(this.#trial.now.before, batch);
+    const pair = cake === NONE ? null : this.#pairs.judge(cake, batch);
+    if (!pair) return NO_LINK;
+    const inherited = at(this.#descents.inherited, batch);
+    const generation = at(this.#descents.generation, batch);
+    const find = at(this.#finds, batch);
+    const isOld = known?.pair === pair && known.inherited === inherited;
+    if (isOld && known.generation === generation && known.find === find) return known;
+    const around = { generation, inherited: this.#descents.inheritance(inherited), find };
+    const counts = pair.counts + countDescent(pair, around) + countVessel(pair, around);
+    if (isOld && known.judgement?.counts === counts) return known;
+    const judgement = new Judgement(counts, pair, around);
+    return { pair, inherited, generation, find, judgement };
   }
 
-  #lineage(later: Batch, sight: Sight): string {
-    const { generation, inherited } = sight.descent(later);
-    const yeast = cakeYeastOf(later, sight);
-    if (!yeast) return '';
-    return lineageStanding({
-      b: this.sight.facts(this.sight.index.batch(later.id) ?? later),
-      yeast,
-      rules: sight.rules,
-      generation: generation ?? undefined,
-      inherited,
-    });
+  #findOf(batch: number): number {
+    return findIn(this.#trial, membersOf(this.#trial, at(this.#trial.now.vessel, batch)), batch);
   }
 
-  /** Of a batch's facts a draft changes only the brew day. Without a new day none is changed. */
-  #redated(batch: Batch): BatchFacts {
-    const was = this.sight.index.batch(batch.id) ?? batch;
-    const facts = this.sight.facts(was);
-    if (batch.brewOn === null || batch.brewOn === was.brewOn) return facts;
-    return { ...facts, brewOn: batch.brewOn };
-  }
-
-  /** The descent of a batch that stands before every change is the board's. */
-  #settled(batchId: string, behind: ReadonlySet<string>): Descent | undefined {
-    const batch = behind.has(batchId) ? undefined : this.sight.layout.batch(batchId);
-    return batch && this.sight.descent(batch);
+  #factsOf(batch: number) {
+    const row: Batch | undefined = this.roster.batches[batch];
+    if (!row) throw new RangeError(`No batch ${batch}`);
+    return this.sight.facts(row);
   }
 }
 
-/** Batches at and behind the first difference of each chain, and of chains that hang on them. */
-function behindChanges(base: Layout, draft: Plan['draft']): Set<string> {
-  const behind = new Set<string>();
-  const takeFrom = (batches: readonly Batch[], first: number): void => {
-    for (let at = first; at < batches.length; at += 1) {
-      const id = batches[at]?.id;
-      if (id === undefined || behind.has(id)) continue;
-      behind.add(id);
-      hangOn(id);
-    }
-  };
-  const hangOn = (batchId: string): void => {
-    for (const branch of draft.branchesOf(batchId)) takeFrom(draft.batchesOf(branch.id), 0);
-  };
-  for (const [chainId, now] of draft.orders) {
-    const was = base.batchesOf(chainId);
-    const first = now.findIndex((batch, place) => batch !== was[place]);
-    if (first >= 0) takeFrom(now, first);
-  }
-  for (const id of draft.rows.keys()) {
-    behind.add(id);
-    hangOn(id);
-  }
-  return behind;
-}
-
-/** True where the days from brew day to brew day, and to the taking, are as they were. */
-function sameDays(before: Batch, was: Batch, earlier: Batch, now: Batch): boolean {
-  return (
-    daysFrom(before, was.brewOn) === daysFrom(earlier, now.brewOn) &&
-    daysFrom(before, was.link.takenOn) === daysFrom(earlier, now.link.takenOn)
-  );
-}
-
-const RANK: Record<Verdict, number> = { pour: 0, mind: 1, hold: 2 };
-
-/** Whether a link's verdict, or else the number of its holds and minds, is worse than before. */
-export function isWorse(after: Judgement, before: Judgement | null): boolean {
-  if (!before) return true;
-  const byVerdict = RANK[after.verdict] - RANK[before.verdict];
-  return (byVerdict || after.holds - before.holds || after.minds - before.minds) > 0;
-}
+const NO_LINK: Standing = {
+  pair: null,
+  inherited: NONE,
+  generation: NONE,
+  find: 0,
+  judgement: null,
+};

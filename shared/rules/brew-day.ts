@@ -1,5 +1,6 @@
 import { missingForWait } from './missing.ts';
 import { namesOf } from './names.ts';
+import type { VesselDays } from './linkState.ts';
 import { hold, measure, PASSED, unchecked, type Rule } from './outcome.ts';
 import { days } from './say.ts';
 
@@ -10,10 +11,10 @@ interface Detail {
 }
 
 /** B is brewed before A's yeast is taken; or, on the board, before its vessel is free. */
-export const brewDay: Rule<Detail> = {
+export const brewDay = {
   id: 'brew-day',
 
-  judge({ a, b, pour, times: { waitDays }, board }) {
+  judge({ a, b, pour, times: { waitDays }, board }: VesselDays) {
     if (waitDays !== undefined && waitDays < 0) return hold({ takenBy: null, waitDays });
     if (board?.vesselTakenBy !== undefined)
       return hold({ takenBy: board.vesselTakenBy, waitDays: waitDays ?? 0 });
@@ -41,4 +42,4 @@ export const brewDay: Rule<Detail> = {
       basis: 'Arithmetic of the dates',
     };
   },
-};
+} satisfies Rule<Detail>;

@@ -1,9 +1,8 @@
 import { points } from '../units/gravity.ts';
 import { abv } from '../units/alcohol.ts';
-import { beerLab, GLASS_CM, type Lab } from '../units/colour.ts';
-import { deltaE00 } from '../units/deltaE.ts';
 import { pitchNeed } from '../yeast/pitching.ts';
 import { inherit } from '../chain/inherit.ts';
+import { colourShift } from './colourShift.ts';
 import { keptCake, type KeptCake } from './keptCake.ts';
 import { linkCake, recommendedFor, type LinkCake } from './linkCake.ts';
 import { linkTimes, type LinkTimes } from './linkTimes.ts';
@@ -40,7 +39,6 @@ export class LinkState {
   readonly need: number | undefined;
   readonly kept: KeptCake;
   readonly blend: LinkBlend;
-  #plannedLab: Lab | undefined;
   #shift: number | undefined | null = null;
   #recommended: { litres: number; kg: number } | undefined | null = null;
 
@@ -78,11 +76,7 @@ export class LinkState {
 
   /** ΔE00 between B as planned and B at another colour, SRM. */
   shiftTo(srm: number | undefined): number | undefined {
-    const planned = this.b.srm;
-    if (planned === undefined || srm === undefined) return undefined;
-    if (srm === planned) return 0;
-    this.#plannedLab ??= beerLab(planned, GLASS_CM);
-    return withoutNoise(deltaE00(this.#plannedLab, beerLab(srm, GLASS_CM)));
+    return colourShift(this.b.srm, srm);
   }
 
   /** The part to keep whose low-end estimate meets the need; undefined where unknown. */
@@ -97,6 +91,9 @@ export class LinkState {
     return keptCake(this, asked);
   }
 }
+
+/** The part of a link that the rules on the vessel's days read. */
+export type VesselDays = Pick<LinkState, 'a' | 'b' | 'pour' | 'times' | 'rules' | 'board'>;
 
 /** The part of a link that the rules on descent read: all that a longer line of beers changes. */
 export type Lineage = Pick<LinkState, 'b' | 'yeast' | 'rules' | 'generation' | 'inherited'>;

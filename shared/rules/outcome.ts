@@ -28,6 +28,12 @@ export interface Sentences {
   basis: string;
 }
 
+/** The part of a rule that says where it stands, from as much of a link as it reads. */
+export interface Judge<L> {
+  readonly id: RuleId;
+  judge(link: L): Outcome<unknown>;
+}
+
 /** One rule. `judge` is cheap and writes nothing; `describe` is asked only for what it found. */
 export interface Rule<D> {
   readonly id: RuleId;

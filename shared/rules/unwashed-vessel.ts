@@ -1,3 +1,4 @@
+import type { VesselDays } from './linkState.ts';
 import { namesOf } from './names.ts';
 import { measure, mind, NOWHERE, PASSED, type Rule } from './outcome.ts';
 
@@ -6,10 +7,10 @@ interface Detail {
 }
 
 /** Several beers in one vessel without a cleaning. Stands nowhere where none is recorded. */
-export const unwashedVessel: Rule<Detail> = {
+export const unwashedVessel = {
   id: 'unwashed-vessel',
 
-  judge({ pour: { beersSinceCleaning: beers }, rules }) {
+  judge({ pour: { beersSinceCleaning: beers }, rules }: VesselDays) {
     if (beers === undefined) return NOWHERE;
     return beers >= rules.beersSinceCleaning ? mind({ beers }) : PASSED;
   },
@@ -24,4 +25,4 @@ export const unwashedVessel: Rule<Detail> = {
       basis: 'Common practice',
     };
   },
-};
+} satisfies Rule<Detail>;

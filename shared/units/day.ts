@@ -35,7 +35,7 @@ function remember<K, V>(known: Map<K, V>, key: K, value: V): V {
 }
 
 /** Days since 1 January 1970. Throws a RangeError where the text is not written as a day. */
-function dayNumber(day: Day): number {
+export function dayNumber(day: Day): number {
   return numbers.get(day) ?? remember(numbers, day, countDays(day));
 }
 
@@ -49,7 +49,8 @@ function countDays(day: Day): number {
   return number / DAY_MS;
 }
 
-const dayOf = (number: number): Day =>
+/** The day that is so many days after 1 January 1970. */
+export const dayOf = (number: number): Day =>
   days.get(number) ?? remember(days, number, new Date(number * DAY_MS).toISOString().slice(0, 10));
 
 /** The day n days later; n may be negative. */

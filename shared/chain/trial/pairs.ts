@@ -1,0 +1,159 @@
+import type { Batch } from '../../api/batch.ts';
+import { countRules, type Counts } from '../../rules/counts.ts';
+import type { LinkInput } from '../../rules/linkInput.ts';
+import { LinkState } from '../../rules/linkState.ts';
+import type { LinkTimes } from '../../rules/linkTimes.ts';
+import { PAIR_RULES } from '../../rules/list.ts';
+import { dayOf } from '../../units/day.ts';
+import { UNSETTLED_LINK } from '../board.ts';
+import { linkBetween, type LinkSight, type Sight } from '../boardLink.ts';
+import { NOTHING_INHERITED } from '../inherit.ts';
+import { at, NONE } from './numbers.ts';
+import type { Trial } from './trial.ts';
+
+/** Two beers that stand together, judged by the rules that read nothing else. */
+export interface Pair {
+  /** What it was judged by beside the two batches. */
+  readonly meeting: Meeting;
+  readonly counts: Counts;
+  /** Without descent and vessel days. */
+  readonly input: LinkInput;
+  readonly times: LinkTimes;
+  readonly blendedSrm: number | undefined;
+  /** ΔE00 once it was asked for; null: not known. */
+  shift: number | null | undefined;
+}
+
+/** How two batches meet. What else is read of a link belongs to the batches themselves. */
+interface Meeting {
+  cakeShelf: number;
+  shelf: number;
+  /** Days from the earlier brew day; where there is none, the day itself, far off. */
+  brewedAfter: number;
+  takenAfter: number;
+}
+
+/**
+ * Judges pairs, each once: two batches that meet again on the same shelves with the same days
+ * between them get the same answer, wherever in the calendar they stand. The link facts of a pair
+ * need no look: they go exactly when it is not the one that stands on the board.
+ */
+export class Pairs {
+  readonly #trial: Trial;
+  readonly #sight: LinkSight;
+  readonly #known = new Map<number, Pair[]>();
+
+  constructor(trial: Trial, sight: Sight) {
+    this.#trial = trial;
+    this.#sight = pairSight(trial, sight);
+  }
+
+  /** Null where the yeast is not on the board. */
+  judge(cake: number, batch: number): Pair | null {
+    const number = cake * this.#trial.roster.batches.length + batch;
+    let known = this.#known.get(number);
+    if (!known) this.#known.set(number, (known = []));
+    const met = meetingOf(this.#trial, cake, batch);
+    for (const pair of known) if (isSame(pair.meeting, met)) return pair;
+    const pair = this.#judged(cake, batch, met);
+    if (pair) known.push(pair);
+    return pair;
+  }
+
+  #judged(cake: number, batch: number, meeting: Meeting): Pair | null {
+    const [earlier, later] = this.#rowsOf(cake, batch, meeting);
+    const input = earlier && later ? linkBetween(earlier, later, this.#sight) : null;
+    if (!input) return null;
+    const link = new LinkState(input);
+    const { times, blend } = link;
+    const counts = countRules(PAIR_RULES, link);
+    return { meeting, counts, input, times, blendedSrm: blend.srm, shift: undefined };
+  }
+
+  /** The two rows, shifted so that the earlier has its day on the board if it has one there. */
+  #rowsOf(cake: number, batch: number, { brewedAfter, takenAfter }: Meeting) {
+    const { roster, now, relinked } = this.#trial;
+    const planned = at(roster.standing.brewDay, cake);
+    const from = planned === NONE ? at(now.brewDay, cake) : planned;
+    const [earlier, later] = [roster.batches[cake], roster.batches[batch]];
+    if (!earlier || !later) return [];
+    const link = relinked.includes(batch) ? UNSETTLED_LINK : later.link;
+    const takenOn = dayAfter(from, takenAfter);
+    return [
+      withRow(earlier, this.#chainId(cake), dayAfter(from, 0), earlier.link),
+      withRow(
+        later,
+        this.#chainId(batch),
+        dayAfter(from, brewedAfter),
+        link.takenOn === takenOn ? link : { ...link, takenOn },
+      ),
+    ];
+  }
+
+  #chainId(batch: number): string | null {
+    const { now, roster } = this.#trial;
+    const shelf = at(now.shelf, batch);
+    if (shelf === NONE) return null;
+    return this.#trial.chain(shelf)?.id ?? roster.batches[batch]?.chainId ?? null;
+  }
+}
+
+/** Nothing of descent and vessel days is seen; of a batch's facts a trial changes only its day. */
+function pairSight(trial: Trial, sight: Sight): LinkSight {
+  const { index } = sight;
+  return {
+    ...sight,
+    layout: {
+      chain: (id) => index.chain(id) ?? (trial.added?.id === id ? trial.added : undefined),
+      predecessor: () => null,
+    },
+    descent: () => ({ generation: null, inherited: NOTHING_INHERITED }),
+    use: () => undefined,
+    facts(row) {
+      const was = index.batch(row.id) ?? row;
+      const facts = sight.facts(was);
+      return row.brewOn === null || row.brewOn === was.brewOn
+        ? facts
+        : { ...facts, brewOn: row.brewOn };
+    },
+  };
+}
+
+function meetingOf({ now }: Trial, cake: number, batch: number): Meeting {
+  const from = at(now.brewDay, cake);
+  return {
+    cakeShelf: at(now.shelf, cake),
+    shelf: at(now.shelf, batch),
+    brewedAfter: daysFrom(from, at(now.brewDay, batch)),
+    takenAfter: daysFrom(from, at(now.takenDay, batch)),
+  };
+}
+
+const isSame = (a: Meeting, b: Meeting): boolean =>
+  a.brewedAfter === b.brewedAfter &&
+  a.shelf === b.shelf &&
+  a.cakeShelf === b.cakeShelf &&
+  a.takenAfter === b.takenAfter;
+
+/** Further than any two days lie apart. */
+const FAR = 10_000_000;
+
+const daysFrom = (from: number, day: number): number =>
+  day === NONE ? NONE : from === NONE ? day + FAR : day - from;
+
+function dayAfter(from: number, days: number): string | null {
+  if (days === NONE) return null;
+  if (from === NONE) return days === 0 ? null : dayOf(days - FAR);
+  return dayOf(from + days);
+}
+
+function withRow(
+  row: Batch,
+  chainId: string | null,
+  brewOn: string | null,
+  link: Batch['link'],
+): Batch {
+  return row.chainId === chainId && row.brewOn === brewOn && row.link === link
+    ? row
+    : { ...row, chainId, brewOn, link };
+}
