@@ -1,6 +1,8 @@
+import type { Batch } from '../api/batch.ts';
 import { isPencilled, type BoardFacts, type BoardIndex } from './board.ts';
-import { rankGaps, weighGaps, type Gap, type WeighedGap } from './gaps.ts';
+import { compareGaps, gapOf, weighPlaces, type Gap } from './gaps.ts';
 import { chainsThatCanHelp } from './reachOfMoves.ts';
+import type { Judgement } from './trial/judgement.ts';
 import { Scales, type ChangedLink } from './weigh.ts';
 
 /** Links of the season by their verdict. */
@@ -23,6 +25,18 @@ export interface BestMove {
  * move lowers them. The bench is no answer: it only puts the beer away.
  */
 export function bestMove(board: BoardFacts): BestMove | null {
+  const steps = bestMoveSteps(board);
+  for (;;) {
+    const step = steps.next();
+    if (step.done) return step.value;
+  }
+}
+
+/**
+ * The same in short steps, one for reading the board and one for each batch, for a page that has
+ * only moments to spare. The board must not change meanwhile.
+ */
+export function* bestMoveSteps(board: BoardFacts): Generator<void, BestMove | null, void> {
   const scales = new Scales(board);
   const { index } = scales.sight;
   const before = seasonOf(scales);
@@ -33,17 +47,9 @@ export function bestMove(board: BoardFacts): BestMove | null {
   );
   let best: Option | null = null;
   for (const batch of index.board.batches.filter(isPencilled)) {
-    const fromHelpful =
-      (batch.chainId !== null && helpful.has(batch.chainId)) ||
-      index.branchesOf(batch.id).some((branch) => helpful.has(branch.id));
-    const weighed = weighGaps(
-      scales,
-      batch.id,
-      (place) =>
-        place.key !== 'bench' && !place.here && (fromHelpful || helpful.has(place.toChainId)),
-    );
-    for (const option of optionsOf(batch.id, weighed))
-      if (helps(option.fall) && (best === null || isBetter(option, best))) best = option;
+    yield;
+    const option = bestOf(scales, batch, helpful);
+    if (option && (best === null || isBetter(option, best))) best = option;
   }
   return best && told(index, before, best);
 }
@@ -57,26 +63,42 @@ interface Option {
   fall: Fall;
 }
 
-function optionsOf(batchId: string, weighed: readonly WeighedGap[]): Option[] {
-  const ranked = rankGaps(weighed.map(({ gap }) => gap));
-  const changedBy = new Map(weighed.map(({ gap, changed }) => [gap, changed]));
-  return ranked.map((gap) => ({ batchId, gap, fall: fallOf(changedBy.get(gap) ?? []) }));
+/** The place where one batch would help most; null where it helps nowhere. */
+function bestOf(scales: Scales, batch: Batch, helpful: ReadonlySet<string>): Option | null {
+  const fromHelpful =
+    (batch.chainId !== null && helpful.has(batch.chainId)) ||
+    scales.sight.index.branchesOf(batch.id).some((branch) => helpful.has(branch.id));
+  const weighed = weighPlaces(
+    scales,
+    batch.id,
+    ({ here, locked, toChainId }) =>
+      !here && !locked && toChainId !== 'bench' && (fromHelpful || helpful.has(toChainId)),
+  );
+  let best: Option | null = null;
+  for (const place of weighed) {
+    const fall = fallOf(place.changed);
+    if (!helps(fall)) continue;
+    const option = { batchId: batch.id, gap: gapOf(place), fall };
+    if (best === null || isBetter(option, best)) best = option;
+    else if (!isBetter(best, option) && compareGaps(option.gap, best.gap) < 0) best = option;
+  }
+  return best;
 }
 
 function fallOf(changed: readonly ChangedLink[]): Fall {
   const fall: [number, number, number, number] = [0, 0, 0, 0];
-  const add = (link: ChangedLink['after'], sign: 1 | -1) => {
-    if (!link) return;
-    if (link.verdict === 'hold') fall[0] += sign;
-    if (link.verdict === 'mind') fall[1] += sign;
-    fall[2] += sign * link.holds;
-    fall[3] += sign * link.minds;
-  };
   for (const { before, after } of changed) {
-    add(before, 1);
-    add(after, -1);
+    if (before) addTo(fall, before, 1);
+    if (after) addTo(fall, after, -1);
   }
   return fall;
+}
+
+function addTo(fall: [number, number, number, number], link: Judgement, sign: 1 | -1): void {
+  if (link.verdict === 'hold') fall[0] += sign;
+  if (link.verdict === 'mind') fall[1] += sign;
+  fall[2] += sign * link.holds;
+  fall[3] += sign * link.minds;
 }
 
 const helps = ([holds, minds]: Fall): boolean => holds > 0 || (holds === 0 && minds > 0);

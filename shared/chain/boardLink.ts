@@ -93,7 +93,7 @@ export function linkBetween(earlier: Batch, later: Batch, sight: LinkSight): Lin
   const vessel = chain?.vesselId ? index.vessels.get(chain.vesselId) : undefined;
   const pour = pourOf(earlier, later, sight);
   const taken = sight.use(later.id)?.takenBy;
-  return {
+  const input: LinkInput = {
     earlier: sight.facts(earlier),
     later: sight.facts(later),
     pour,
@@ -101,11 +101,12 @@ export function linkBetween(earlier: Batch, later: Batch, sight: LinkSight): Lin
     inherited,
     rules: sight.rules,
     board: boardContext(earlier, taken),
-    ...(vessel ? { vessel: vesselFactsOf(vessel) } : {}),
-    ...(generation === null ? {} : { generation }),
-    ...(sight.units ? { units: sight.units } : {}),
-    ...(earlier.link.keepWhole && layout.predecessor(earlier.id) ? { wholeCakeBefore: true } : {}),
   };
+  if (vessel) input.vessel = vesselFactsOf(vessel);
+  if (generation !== null) input.generation = generation;
+  if (sight.units) input.units = sight.units;
+  if (earlier.link.keepWhole && layout.predecessor(earlier.id)) input.wholeCakeBefore = true;
+  return input;
 }
 
 /** The yeast of the cake that goes under a batch: its source's, which is its chain's but for branches. */
@@ -136,19 +137,18 @@ function pourOf(earlier: Batch, later: Batch, sight: LinkSight): PourFacts {
   const otherYeast = otherYeastOf(earlier, later, sight);
   const own = later.vesselId ? sight.index.vessels.get(later.vesselId) : undefined;
   const beersSinceCleaning = sight.use(later.id)?.beersSinceCleaning;
-  return {
-    ...pourFactsOf(later, earlier),
-    ...(otherYeast ? { otherYeast } : {}),
-    ...(own ? { vessel: vesselFactsOf(own) } : {}),
-    ...(beersSinceCleaning === undefined ? {} : { beersSinceCleaning }),
-  };
+  const pour = pourFactsOf(later, earlier);
+  if (otherYeast) pour.otherYeast = otherYeast;
+  if (own) pour.vessel = vesselFactsOf(own);
+  if (beersSinceCleaning !== undefined) pour.beersSinceCleaning = beersSinceCleaning;
+  return pour;
 }
 
 /** The cake check has no record yet; a cell count of the cake speaks for itself. */
 function boardContext(earlier: Batch, vesselTakenBy: string | undefined): BoardContext {
   const living = earlier.cake?.measured?.viability ?? null;
-  return {
-    ...(vesselTakenBy === undefined ? {} : { vesselTakenBy }),
-    ...(living === null ? {} : { cakeCheck: { dueWithinADay: false, dead: 1 - living } }),
-  };
+  const context: BoardContext = {};
+  if (vesselTakenBy !== undefined) context.vesselTakenBy = vesselTakenBy;
+  if (living !== null) context.cakeCheck = { dueWithinADay: false, dead: 1 - living };
+  return context;
 }

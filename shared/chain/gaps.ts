@@ -4,7 +4,7 @@ import { dayNumber, dayOf } from '../units/day.ts';
 import { isPencilled, order, type BoardFacts } from './board.ts';
 import { nextBrewDay } from './dates.ts';
 import { placesFor, type Place } from './gapPlaces.ts';
-import { countsAtGap, differs, GapVerdict } from './gapVerdict.ts';
+import { GapVerdict } from './gapVerdict.ts';
 import type { Lock } from './plan.ts';
 import { NONE } from './trial/numbers.ts';
 import { newShelfOf } from './trial/roster.ts';
@@ -45,27 +45,29 @@ export interface Gap {
  * Every place that a lifted batch could have: each gap of each shelf in their order, a new shelf,
  * the bench. A gap is judged over the links that come about by the drop (before the batch, behind
  * it, and where it was) and those that the drop makes worse (generation, inheritance, dates,
- * vessels). Nothing for a batch that is not pencilled. Who judges several batches of one board gives
- * its scales, which remember what they weighed.
+ * vessels). Nothing for a batch that is not pencilled.
  */
-export function judgeGaps(board: BoardFacts, batchId: string, scales = new Scales(board)): Gap[] {
-  const gaps = weighGaps(scales, batchId).map(({ gap }) => gap);
+export function judgeGaps(board: BoardFacts, batchId: string): Gap[] {
+  const gaps = weighPlaces(new Scales(board), batchId).map(gapOf);
   const best = bestOf(gaps);
   if (best) best.best = true;
   return gaps;
 }
 
-export interface WeighedGap {
-  gap: Gap;
+/** A place and what putting the batch there would change. */
+export interface WeighedPlace {
+  place: Place;
   changed: readonly ChangedLink[];
+  /** Of the batch there. */
+  brewOn: Day | null;
+  generation: number | null;
 }
 
-/** The same without the best marked, with each link that a drop touches. */
-export function weighGaps(
+export function weighPlaces(
   scales: Scales,
   batchId: string,
   wanted: (place: Place) => boolean = () => true,
-): WeighedGap[] {
+): WeighedPlace[] {
   const { index } = scales.sight;
   const batch = index.batch(batchId);
   if (!batch || !isPencilled(batch)) return [];
@@ -73,18 +75,27 @@ export function weighGaps(
   const ownDay = () => (own ??= numberOr(nextBrewDay(index, batchId)));
   return placesFor(index, batch)
     .filter(wanted)
-    .map((place) => gapAt(scales, batch, place, ownDay));
+    .map((place) => weighPlace(scales, batch, place, ownDay));
 }
 
 const numberOr = (day: Day | null): number => (day === null ? NONE : dayNumber(day));
 
-function gapAt(scales: Scales, batch: Batch, place: Place, ownDay: () => number): WeighedGap {
-  if (place.locked) return { gap: gapOf(place, [], null, null), changed: [] };
-  if (place.here) return { gap: asItStands(scales, batch, place), changed: [] };
+function weighPlace(
+  scales: Scales,
+  batch: Batch,
+  place: Place,
+  ownDay: () => number,
+): WeighedPlace {
+  if (place.locked) return { place, changed: [], brewOn: null, generation: null };
+  if (place.here) return asItStands(scales, batch, place);
   const number = scales.roster.numberOf(batch.id);
   const { changed, brewDay, generation } = scales.weigh(number, trialPlace(scales, place, ownDay));
-  const brewOn = brewDay === NONE ? null : dayOf(brewDay);
-  return { gap: gapOf(place, changed, brewOn, generationAt(place.chainId, generation)), changed };
+  return {
+    place,
+    changed,
+    brewOn: brewDay === NONE ? null : dayOf(brewDay),
+    generation: generationAt(place.chainId, generation),
+  };
 }
 
 function trialPlace({ roster }: Scales, place: Place, ownDay: () => number): TrialPlace {
@@ -100,25 +111,20 @@ const generationAt = (chainId: string | null, generation: number): number | null
   chainId === null || generation === NONE ? null : generation;
 
 /** The place where the batch is: the links before and behind it as they are. */
-function asItStands(scales: Scales, batch: Batch, place: Place): Gap {
+function asItStands(scales: Scales, batch: Batch, place: Place): WeighedPlace {
   const { index } = scales.sight;
   const mates = batch.chainId === null ? [] : index.batchesOf(batch.chainId);
-  const next = mates[mates.findIndex((mate) => mate.id === batch.id) + 1];
-  const links = [batch.id, ...(next ? [next.id] : [])].map((laterId) => {
+  const next = mates[mates.indexOf(batch) + 1];
+  const changed = [batch.id, ...(next ? [next.id] : [])].map((laterId) => {
     const now = scales.standing(laterId);
     return { laterId, before: now, after: now, relinked: true };
   });
   const generation = generationAt(batch.chainId, scales.generationOf(batch.id));
-  return { ...gapOf(place, links, batch.brewOn, generation), changes: [] };
+  return { place, changed, brewOn: batch.brewOn, generation };
 }
 
-function gapOf(
-  place: Place,
-  changed: readonly ChangedLink[],
-  brewOn: Day | null,
-  generation: number | null,
-): Gap {
-  const worst = new GapVerdict(changed.filter(countsAtGap));
+export function gapOf({ place, changed, brewOn, generation }: WeighedPlace): Gap {
+  const worst = new GapVerdict(changed);
   return {
     key: place.key,
     toChainId: place.toChainId,
@@ -137,11 +143,12 @@ function gapOf(
     },
     best: false,
     generation,
-    changes: changed
-      .filter(differs)
-      .map(({ laterId, after }) => ({ laterId, verdict: after?.verdict ?? 'pour' })),
+    changes: place.here ? [] : changesOf(changed),
   };
 }
+
+const changesOf = (changed: readonly ChangedLink[]): Gap['changes'] =>
+  changed.map(({ laterId, after }) => ({ laterId, verdict: after?.verdict ?? 'pour' }));
 
 /**
  * Best first: fewest holds, then fewest minds, smallest colour shift, earliest date, order on the

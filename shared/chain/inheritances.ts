@@ -26,9 +26,22 @@ export class Inheritances {
   /** What follows after one more beer, made once for each beer. */
   follower(before: number, beer: number, make: (before: Inheritance) => Inheritance): number {
     const followers = this.#followers[before] ?? [];
-    return (followers[beer] ??= this.number(make(this.of(before))));
+    const known = followers[beer];
+    if (known !== undefined) return known;
+    const was = this.of(before);
+    const is = make(was);
+    return (followers[beer] = isSame(was, is) ? before : this.number(is));
   }
 }
+
+/** True where a beer handed nothing down that was not there; its lists are then those before. */
+const isSame = (was: Inheritance, is: Inheritance): boolean =>
+  was.allergens === is.allergens &&
+  was.cultures === is.cultures &&
+  was.strongestOg === is.strongestOg &&
+  was.ogUnknown === is.ogUnknown &&
+  was.allergensUnknown === is.allergensUnknown &&
+  was.culturesUnknown === is.culturesUnknown;
 
 /** The order in which allergens and cultures came in does not matter. */
 const contentOf = ({ allergens, cultures, ...rest }: Inheritance): string =>

@@ -135,7 +135,8 @@ export class Scales {
     const { judgement: after } = this.#judge(batch, was);
     const before = was?.judgement ?? null;
     const relinked = this.#trial.relinked.includes(batch);
-    if (!(before ?? after) || (after === before && !relinked)) return null;
+    if (!(before ?? after)) return null;
+    if (!relinked && after?.counts === before?.counts) return null;
     return { laterId: this.roster.batches[batch]?.id ?? '', before, after, relinked };
   }
 
