@@ -1,4 +1,9 @@
-import { queryOptions, useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
+import {
+  queryOptions,
+  replaceEqualDeep,
+  useSuspenseQuery,
+  type QueryClient,
+} from '@tanstack/react-query';
 import { useMemo, useSyncExternalStore } from 'react';
 import { useParams } from 'react-router-dom';
 import { board as boardContract, type Board } from '#shared/api/board.ts';
@@ -50,10 +55,29 @@ function shownBoard(board: Board, pending: Parameters<typeof withPending>[1]): B
 function judgedBoard(board: Board, units: UnitPrefs): JudgedBoard {
   const byUnits = judged.get(board) ?? new Map<string, JudgedBoard>();
   const key = [units.system, units.gravity, units.colour, units.temperature].join();
-  const result = byUnits.get(key) ?? judgeBoard(board, units);
+  const known = byUnits.get(key);
+  if (known) return known;
+  const { before } = newestJudged;
+  const result = withEqualKept(judgeBoard(board, units), before);
+  newestJudged.before = result;
   judged.set(board, byUnits.set(key, result));
   return result;
 }
+
+const newestJudged: { before: JudgedBoard | null } = { before: null };
+
+/** What is judged as it was before stays the same object, so that it need not be drawn anew. */
+function withEqualKept(now: JudgedBoard, before: JudgedBoard | null): JudgedBoard {
+  if (!before) return now;
+  return {
+    ...now,
+    links: equalKept(now.links, before.links),
+    chains: equalKept(now.chains, before.chains),
+  };
+}
+
+const equalKept = <T>(now: ReadonlyMap<string, T>, before: ReadonlyMap<string, T>) =>
+  new Map([...now].map(([id, one]): [string, T] => [id, replaceEqualDeep(before.get(id), one)]));
 
 export function useBoardSlug(): string {
   const { brewery } = useParams();

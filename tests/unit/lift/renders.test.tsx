@@ -12,6 +12,7 @@ import { GapSlot } from '../../../src/routes/board/lift/GapSlot.tsx';
 import { LiftHandle } from '../../../src/routes/board/lift/LiftHandle.tsx';
 import { LiftProvider } from '../../../src/routes/board/lift/LiftProvider.tsx';
 import { PlacesPanel } from '../../../src/routes/board/lift/PlacesPanel.tsx';
+import { BoardViewProvider } from '../../../src/routes/board/view/BoardView.tsx';
 import { ALE, beer, twoShelves } from './board.ts';
 
 let vessels = 0;
@@ -53,10 +54,12 @@ function open(board: Board) {
           <Route
             path="/b/:brewery"
             element={
-              <LiftProvider>
-                <Shelf />
-                <PlacesPanel />
-              </LiftProvider>
+              <BoardViewProvider>
+                <LiftProvider>
+                  <Shelf />
+                  <PlacesPanel />
+                </LiftProvider>
+              </BoardViewProvider>
             }
           />
         </Routes>

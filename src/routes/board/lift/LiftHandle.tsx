@@ -1,21 +1,19 @@
 import { GripVertical } from 'lucide-react';
 import { memo, type KeyboardEvent } from 'react';
-import { useBoard } from '../../../api/board.ts';
-import { useOnline } from '../../../app/useOnline.ts';
+import { useBoardView } from '../view/BoardView.tsx';
 import { OFFLINE_WORDS } from './failure.ts';
 import { isLiftKey } from './keys.ts';
 import { useIsLifted, useLiftMachine } from './liftContext.ts';
-import { whyFixed } from './lifting.ts';
-import { batchName } from './words.ts';
+import { whyBatchFixed } from './lifting.ts';
 
 /** Why a batch stays where it is, and its name; for handles, move buttons and menus. */
 export function useMovable(batchId: string) {
-  const board = useBoard();
-  const online = useOnline();
+  const { board, index, online } = useBoardView();
+  const batch = index.batch(batchId);
   return {
-    name: batchName(board, batchId),
+    name: batch?.name ?? '',
     mayMove: board.me.can.moveBatches,
-    why: whyFixed(board, batchId) ?? (online ? null : OFFLINE_WORDS),
+    why: whyBatchFixed(board, batch) ?? (online ? null : OFFLINE_WORDS),
   };
 }
 

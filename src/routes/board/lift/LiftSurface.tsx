@@ -2,7 +2,7 @@ import type { PointerEvent, ReactNode, RefObject } from 'react';
 import { useBoard } from '../../../api/board.ts';
 import { useOnline } from '../../../app/useOnline.ts';
 import type { Grab } from './Hand.tsx';
-import { useLiftMachine, useLiftState } from './liftContext.ts';
+import { useLiftMachine } from './liftContext.ts';
 import { whyFixed } from './lifting.ts';
 import { pressed } from './pointer.ts';
 
@@ -11,12 +11,11 @@ interface LiftSurfaceProps {
   children: ReactNode;
 }
 
-/** Everything that can be lifted from or put into; marks the page while a batch is lifted. */
+/** Everything that can be lifted from or put into. */
 export function LiftSurface({ grab, children }: LiftSurfaceProps) {
   const board = useBoard();
   const online = useOnline();
   const { store, lifting } = useLiftMachine();
-  const isLifting = useLiftState((state) => state.isUnfolded);
 
   const onPointerDown = (event: PointerEvent) => {
     const press = pressed(event.target, event.pointerType);
@@ -26,7 +25,7 @@ export function LiftSurface({ grab, children }: LiftSurfaceProps) {
   };
 
   return (
-    <div className="contents" onPointerDown={onPointerDown} data-lifting={isLifting || undefined}>
+    <div className="contents" onPointerDown={onPointerDown}>
       {children}
     </div>
   );

@@ -5,7 +5,7 @@ import { useOnline } from '../../../app/useOnline.ts';
 import { OFFLINE_WORDS } from './failure.ts';
 import { useLiftMachine } from './liftContext.ts';
 import { useMovable } from './LiftHandle.tsx';
-import { judgedPlaces } from './lifting.ts';
+import { judgedPlaces } from './judging.ts';
 import { neighbours, type Neighbour } from './neighbours.ts';
 
 /** One step earlier or later on the shelf, for a thumb. */

@@ -1,7 +1,7 @@
 import { useMemo } from 'react';
 import { useBoard } from '../../../api/board.ts';
 import { Dialog } from '../../../components/ui/Dialog.tsx';
-import { judgedPlaces } from './lifting.ts';
+import { judgedPlaces } from './judging.ts';
 import { useLiftMachine, useLiftState } from './liftContext.ts';
 import { PlacesLead } from './PlacesLead.tsx';
 import { PlacesList } from './PlacesList.tsx';

@@ -33,10 +33,12 @@ export interface Change {
 
 export interface LiftState {
   lifted: Lifted | null;
-  /** The page has given way to the gaps. */
+  /** The panel has given way to the places. */
   isUnfolded: boolean;
   /** Gaps that are drawn by now: they open from the hand outward, a few more in each frame. */
   opened: ReadonlySet<string>;
+  /** Parts of the board (a chain, `new`, `bench`) that have given way to their gaps. */
+  unfolded: ReadonlySet<string>;
   /** The place under the pointer or under the keys. */
   over: string | null;
   /** A batch whose list of places is open. */
@@ -52,6 +54,7 @@ export const AT_REST: LiftState = {
   lifted: null,
   isUnfolded: false,
   opened: new Set(),
+  unfolded: new Set(),
   over: null,
   placesFor: null,
   yeastFor: null,

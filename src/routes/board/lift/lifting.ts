@@ -1,42 +1,30 @@
+import type { Batch } from '#shared/api/batch.ts';
 import type { Board } from '#shared/api/board.ts';
-import { judgeGaps, rankGaps } from '#shared/chain/gaps.ts';
 import { OFFLINE_WORDS } from './failure.ts';
 import type { Intent } from './keys.ts';
 import type { Lifted, LiftStore } from './liftState.ts';
 import { openOutward } from './openOutward.ts';
-import { step, walkOf } from './places.ts';
+import { createForesight } from './judging.ts';
+import { step } from './places.ts';
 import type { LiftPorts } from './ports.ts';
-import {
-  goneWords,
-  liftedWords,
-  lockWords,
-  movedAwayWords,
-  putBackWords,
-  walkedWords,
-} from './words.ts';
-
-/** Judges every place for a batch, once; the pointer then only looks the answers up. */
-export function judgedPlaces(board: Board, batchId: string) {
-  const gaps = judgeGaps(board, batchId);
-  const ranked = rankGaps(gaps);
-  const locked = gaps.filter((gap) => gap.locked !== null);
-  return {
-    gaps: new Map(gaps.map((gap) => [gap.key, gap])),
-    ranked,
-    locks: new Map(locked.map((gap) => [gap.key, lockWords(board, gap)])),
-    walk: walkOf(board, ranked, batchId),
-  };
-}
+import { goneWords, liftedWords, movedAwayWords, putBackWords, walkedWords } from './words.ts';
 
 /** Why a batch cannot be lifted; null where it can. */
-export function whyFixed(board: Board, batchId: string): string | null {
-  const batch = board.batches.find((row) => row.id === batchId);
+export const whyFixed = (board: Board, batchId: string): string | null =>
+  whyBatchFixed(
+    board,
+    board.batches.find((row) => row.id === batchId),
+  );
+
+export function whyBatchFixed({ me }: Pick<Board, 'me'>, batch: Batch | undefined): string | null {
   if (!batch) return 'It is no longer on this board';
-  if (!board.me.can.moveBatches) return 'Your role reads the board and moves nothing';
+  if (!me.can.moveBatches) return 'Your role reads the board and moves nothing';
   if (batch.stage === 'fermenting') return 'It is fermenting, so it stays where it was poured';
   if (batch.stage === 'racked') return 'It is racked, so it stays where it was poured';
   return batch.stage === 'scrapped' ? 'It is scrapped' : null;
 }
+
+const NONE: ReadonlySet<string> = new Set();
 
 export interface Lifting {
   /** The pointer is down on a batch; it is lifted when the pointer has gone a little. */
@@ -55,11 +43,12 @@ export interface Lifting {
 
 export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
   let pressed: string | null = null;
+  const placesOf = createForesight();
   let letGo = () => {};
   let fold = () => {};
 
   const release = () => {
-    store.set({ lifted: null, over: null, opened: new Set(), isUnfolded: false });
+    store.set({ lifted: null, over: null, opened: NONE, unfolded: NONE, isUnfolded: false });
     letGo();
     fold();
     letGo = fold = () => {};
@@ -71,7 +60,7 @@ export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
     if (why) return ports.say(why);
     const batch = board.batches.find((row) => row.id === batchId);
     if (!batch) return;
-    const places = judgedPlaces(board, batchId);
+    const places = placesOf(board, batchId);
     if (by === 'pointer') letGo = ports.holdStill();
     const shape = board.vessels.find((row) => row.id === batch.vesselId)?.shape ?? null;
     const lifted = { batchId, by, name: batch.name, chainId: batch.chainId, shape, ...places };
@@ -106,7 +95,7 @@ export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
       ports.say(batch ? movedAwayWords(board, batch.id) : goneWords(lifted.name));
       return;
     }
-    const places = judgedPlaces(board, lifted.batchId);
+    const places = placesOf(board, lifted.batchId);
     const isStillThere = over !== null && places.walk.ranked.includes(over);
     store.set({ lifted: { ...lifted, ...places }, over: isStillThere ? over : null });
   };
@@ -114,6 +103,8 @@ export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
   return {
     press(batchId) {
       pressed = batchId;
+      // A press becomes a lift some frames later: the places are judged in between.
+      ports.nextFrame(() => placesOf(ports.board(), batchId));
     },
     liftPressed() {
       if (pressed !== null) lift(pressed, 'pointer');

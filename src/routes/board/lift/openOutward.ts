@@ -1,37 +1,43 @@
 import type { LiftStore } from './liftState.ts';
+import { partOf } from './places.ts';
 import type { LiftPorts } from './ports.ts';
 
-/** Gaps of the first frame; each frame after it opens twice as many as the one before. */
-const FIRST = 6;
+/** Gaps of one frame: a usual shelf. */
+const MOST = 12;
 
 /**
- * Unfolds a lift frame by frame: first the page gives way, then the gaps in sight open from the
- * batch outward, and more of them as shelves scroll into sight. No frame draws them all, and what
- * is out of sight costs nothing. The answer ends it.
+ * Unfolds a lift frame by frame: first the panel gives way, then the gaps in sight open shelf by
+ * shelf from the batch outward, and more of them as shelves scroll into sight. No frame draws them
+ * all, and what is out of sight costs nothing. The answer ends it.
  */
 export function openOutward(store: LiftStore, ports: LiftPorts, batchId: string): () => void {
   let hasEnded = false;
   let isBusy = false;
 
-  const open = (count: number) => {
+  const open = () => {
     if (hasEnded) return;
-    const { opened } = store.get();
-    const closed = ports.gapsInSight(batchId).filter((key) => !opened.has(key));
-    isBusy = closed.length > 0;
-    if (!isBusy) return;
-    store.set({ opened: new Set([...opened, ...closed.slice(0, count)]) });
-    ports.nextFrame(() => open(count * 2));
+    const { opened, unfolded } = store.get();
+    const [first, ...rest] = ports.gapsInSight(batchId).filter((key) => !opened.has(key));
+    isBusy = first !== undefined;
+    if (first === undefined) return;
+    const part = partOf(first);
+    const mates = rest.filter((key) => partOf(key) === part).slice(0, MOST - 1);
+    store.set({
+      opened: new Set([...opened, first, ...mates]),
+      unfolded: new Set([...unfolded, part]),
+    });
+    ports.nextFrame(open);
   };
 
   const unfold = () => {
     if (hasEnded) return;
     store.set({ isUnfolded: true });
-    ports.nextFrame(() => open(FIRST));
+    ports.nextFrame(open);
   };
 
   ports.nextFrame(() => ports.nextFrame(unfold));
   const stop = ports.onScroll(() => {
-    if (!isBusy) open(FIRST * 2);
+    if (!isBusy) open();
   });
   return () => {
     hasEnded = true;

@@ -12,6 +12,7 @@ import type { LiftMachine } from './liftContext.ts';
 import { createLiftStore } from './liftState.ts';
 import type { LiftPorts } from './ports.ts';
 import { createPutting } from './putting.ts';
+import { useRehearsal } from './useRehearsal.ts';
 
 /** Waits for the drawing, and for a closing dialog that would give the focus elsewhere. */
 function focusBatch(batchId: string) {
@@ -46,5 +47,6 @@ export function useMachine(board: Board, say: (words: string) => void): LiftMach
   const machine = useMemo(() => createMachine(portsOf(client, slug, say)), [client, slug, say]);
   useEffect(() => machine.lifting.boardChanged(board), [board, machine]);
   useEffect(() => machine.lifting.release, [machine]);
+  useRehearsal(board, machine.store);
   return machine;
 }

@@ -2,6 +2,7 @@ import type { Chain } from '#shared/api/chain.ts';
 import { formatMoney } from '#shared/units/money.ts';
 import { BestMove } from '../head/BestMove.tsx';
 import { UndoButtons } from '../lift/UndoButtons.tsx';
+import { useUnfolding } from '../lift/useUnfolding.ts';
 import { ChainMenu } from '../shelf/ChainMenu.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { count, generationLine, seasonLine, yeastLine } from '../view/words.ts';
@@ -10,6 +11,7 @@ import { PhoneHead } from './PhoneHead.tsx';
 
 export function PhoneChain({ chain }: { chain: Chain }) {
   const { board, index, judged, units, can } = useBoardView();
+  const ref = useUnfolding<HTMLOListElement>(chain.id);
   const batches = index.batchesOf(chain.id);
   const verdicts = judged.chains.get(chain.id);
   const yeast = index.yeasts.get(chain.yeastId);
@@ -32,7 +34,7 @@ export function PhoneChain({ chain }: { chain: Chain }) {
           <ChainMenu chain={chain} />
         </div>
       )}
-      <ol className="mt-3 ml-[18px]" aria-label={`Batches on ${chain.name}`}>
+      <ol ref={ref} className="mt-3 ml-[18px]" aria-label={`Batches on ${chain.name}`}>
         {batches.map((batch, place) => (
           <PhoneBatch key={batch.id} batch={batch} next={batches[place + 1]} />
         ))}

@@ -4,14 +4,17 @@ import { BatchActions } from '../batch/BatchActions.tsx';
 import { BatchName } from '../batch/BatchName.tsx';
 import { GapSlot } from '../lift/GapSlot.tsx';
 import { useIsLifted } from '../lift/liftContext.ts';
+import { useUnfolding } from '../lift/useUnfolding.ts';
 import { useBoardView } from '../view/BoardView.tsx';
 import { beerFacts } from '../view/words.ts';
 
 /** Batches that are on no chain yet, along the foot of the page. */
 export function Bench() {
   const { index, can } = useBoardView();
+  const ref = useUnfolding<HTMLElement>('bench');
   return (
     <section
+      ref={ref}
       aria-labelledby="bench"
       className="sticky bottom-0 z-20 mt-auto flex items-center gap-3 border-t-[3px] border-shelf2 bg-bench px-7 pt-2.5 pb-3"
     >

@@ -1,10 +1,16 @@
 import { GapSlot } from '../lift/GapSlot.tsx';
+import { useUnfolding } from '../lift/useUnfolding.ts';
 import { SHELF, SHELF_HEIGHT } from '../view/drawing.ts';
 
 /** The room under the last shelf in which a new one can be begun; only there while a batch is lifted. */
 export function NewShelfRow() {
+  const ref = useUnfolding<HTMLElement>('new');
   return (
-    <section aria-label="New shelf" className="hidden grid-cols-[148px_minmax(0,1fr)] lifting:grid">
+    <section
+      ref={ref}
+      aria-label="New shelf"
+      className="hidden grid-cols-[148px_minmax(0,1fr)] lifting:grid"
+    >
       <p className="pt-3 font-display text-shelf font-[680] tracking-[-0.02em] text-ink2">
         New shelf
       </p>

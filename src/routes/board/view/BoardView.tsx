@@ -53,6 +53,11 @@ export function BoardViewProvider({ children }: { children: ReactNode }) {
   return <BoardView value={value}>{children}</BoardView>;
 }
 
+/** For a part of the board: the view that it is drawn from. */
+export function BoardPartView({ view, children }: { view: BoardViewValue; children: ReactNode }) {
+  return <BoardView value={view}>{children}</BoardView>;
+}
+
 export function useBoardView(): BoardViewValue {
   const value = use(BoardView);
   if (!value) throw new Error('Only inside the board');
