@@ -86,10 +86,16 @@ function narrowed(likely: number, spread: number, grown: Interval): Interval {
   };
 }
 
+const filled = (cells: number, cellsPerLitre: number, batchL: number): number =>
+  Math.min(cells / cellsPerLitre || 0, batchL);
+
 /** Litres that so many cells fill; a cake is never larger than the batch it came from. */
 function litresOf(cells: Interval, cellsPerLitre: number, batchL: number): Interval {
-  const fill = (n: number): number => Math.min(n / cellsPerLitre || 0, batchL);
-  return { low: fill(cells.low), likely: fill(cells.likely), high: fill(cells.high) };
+  return {
+    low: filled(cells.low, cellsPerLitre, batchL),
+    likely: filled(cells.likely, cellsPerLitre, batchL),
+    high: filled(cells.high, cellsPerLitre, batchL),
+  };
 }
 
 /** Cells of the cake: from its measured litres, or grown, as far as a counted density allows. */
@@ -97,9 +103,9 @@ function settledIn(
   measuredL: number | undefined,
   perLitre: number,
   estimatedL: Interval,
+  grown: Interval,
   cake: CakeFacts,
 ): Interval {
-  const grown = grownCells(cake);
   const counted = cake.measured?.cellsPerMl !== undefined;
   if (measuredL === undefined) return counted ? times(estimatedL, perLitre) : grown;
   return narrowed(measuredL * perLitre, counted ? COUNT_SPREAD : DENSITY_SPREAD, grown);
@@ -117,14 +123,15 @@ export function estimateCake(cake: CakeFacts): CakeEstimate {
   const { volumeL, massKg, viability, cellsPerMl } = cake.measured ?? {};
   const perLitre = 1000 * (cellsPerMl ?? CELLS_PER_ML_CAKE * (1 - TRUB_SHARE[cake.trub ?? 'some']));
   const measuredL = volumeL ?? (massKg === undefined ? undefined : massKg / CAKE_KG_PER_L);
-  const estimatedL = litresOf(grownCells(cake), perLitre, cake.volumeL);
-  const settledCells = settledIn(measuredL, perLitre, estimatedL, cake);
+  const grown = grownCells(cake);
+  const estimatedL = litresOf(grown, perLitre, cake.volumeL);
+  const settledCells = settledIn(measuredL, perLitre, estimatedL, grown, cake);
   const volume = measuredL === undefined ? estimatedL : around(measuredL, READING_SPREAD);
   return {
     settledCells,
     viableCells: times(settledCells, (viability ?? VIABILITY) * cake.survival),
     volumeL: volume,
     massKg: massKg === undefined ? times(volume, CAKE_KG_PER_L) : around(massKg, READING_SPREAD),
-    measured: [volumeL, massKg, viability, cellsPerMl].some((fact) => fact !== undefined),
+    measured: (volumeL ?? massKg ?? viability ?? cellsPerMl) !== undefined,
   };
 }

@@ -21,8 +21,9 @@ export function inherit(before: Inheritance, batch: BatchFacts): Inheritance {
 }
 
 function union<T>(before: readonly T[], more: readonly T[] = []): readonly T[] {
-  const added = more.filter((one) => !before.includes(one));
-  return added.length === 0 ? before : [...before, ...added];
+  for (const one of more)
+    if (!before.includes(one)) return [...before, ...more.filter((each) => !before.includes(each))];
+  return before;
 }
 
 function higher(a: number | undefined, b: number | undefined): number | undefined {

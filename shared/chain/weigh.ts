@@ -85,7 +85,7 @@ export class Scales {
     const reached = this.#reach(batch);
     this.#descents.trace(reached);
     const found = this.#findAnew(reached);
-    const changed = reached.flatMap((one) => this.#change(one) ?? []);
+    const changed = this.#changes(reached);
     const brewDay = at(this.#trial.now.brewDay, batch);
     const generation = at(this.#descents.generation, batch);
     this.#descents.undo(reached);
@@ -115,29 +115,35 @@ export class Scales {
   #findAnew(reached: number[]): number[] {
     const trial = this.#trial;
     const found: number[] = [];
-    const find = (batch: number, members: readonly number[]) => {
-      const now = findIn(trial, members, batch);
-      if (now === this.#baseFinds[batch]) return;
-      this.#finds[batch] = now;
-      found.push(batch);
-      this.#take(batch, reached);
-    };
-    find(trial.moved, membersOf(trial, at(trial.now.vessel, trial.moved)));
+    const mates = membersOf(trial, at(trial.now.vessel, trial.moved));
+    if (this.#find(trial.moved, mates)) found.push(trial.moved);
     for (const vessel of vesselsChanged(trial)) {
       const members = membersOf(trial, vessel);
-      for (const batch of members) if (batch !== trial.moved) find(batch, members);
+      for (const batch of members)
+        if (batch !== trial.moved && this.#find(batch, members)) found.push(batch);
     }
+    for (const batch of found) this.#take(batch, reached);
     return found;
   }
 
-  #change(batch: number): ChangedLink | null {
-    const was = this.#standing[batch];
-    const { judgement: after } = this.#judge(batch, was);
-    const before = was?.judgement ?? null;
-    const relinked = this.#trial.relinked.includes(batch);
-    if (!(before ?? after)) return null;
-    if (!relinked && after?.counts === before?.counts) return null;
-    return { laterId: this.roster.batches[batch]?.id ?? '', before, after, relinked };
+  /** True where the batch finds its vessel otherwise than on the board. */
+  #find(batch: number, members: readonly number[]): boolean {
+    const find = findIn(this.#trial, members, batch);
+    this.#finds[batch] = find;
+    return find !== this.#baseFinds[batch];
+  }
+
+  #changes(reached: readonly number[]): ChangedLink[] {
+    const changes: ChangedLink[] = [];
+    for (const batch of reached) {
+      const was = this.#standing[batch];
+      const { judgement: after } = this.#judge(batch, was);
+      const before = was?.judgement ?? null;
+      const relinked = this.#trial.relinked.includes(batch);
+      if (relinked ? before !== after : before?.counts !== after?.counts)
+        changes.push({ laterId: this.roster.batches[batch]?.id ?? '', before, after, relinked });
+    }
+    return changes;
   }
 
   /** Judges a link as the trial stands; the known standing where nothing of it differs. */

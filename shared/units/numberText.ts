@@ -21,5 +21,5 @@ export function readNumber(text: string): NumberText | null {
 export function writeNumber(value: number, digits: number, keepZeros: boolean): string {
   const rounded = value.toFixed(digits);
   const text = keepZeros || digits === 0 ? rounded : rounded.replace(/\.?0+$/, '');
-  return Number(text) === 0 ? text.replace('-', '') : text;
+  return value < 0 && Number(text) === 0 ? text.replace('-', '') : text;
 }

@@ -41,21 +41,20 @@ interface Meeting {
 export class Pairs {
   readonly #trial: Trial;
   readonly #sight: LinkSight;
-  readonly #known = new Map<number, Pair[]>();
+  /** By the earlier batch, then by the later. */
+  readonly #known: Pair[][][];
 
   constructor(trial: Trial, sight: Sight) {
     this.#trial = trial;
     this.#sight = pairSight(trial, sight);
+    this.#known = trial.roster.batches.map(() => []);
   }
 
   /** Null where the yeast is not on the board. */
   judge(cake: number, batch: number): Pair | null {
-    const number = cake * this.#trial.roster.batches.length + batch;
-    let known = this.#known.get(number);
-    if (!known) this.#known.set(number, (known = []));
-    const met = meetingOf(this.#trial, cake, batch);
-    for (const pair of known) if (isSame(pair.meeting, met)) return pair;
-    const pair = this.#judged(cake, batch, met);
+    const known = ((this.#known[cake] ??= [])[batch] ??= []);
+    for (const pair of known) if (isStill(pair.meeting, this.#trial, cake, batch)) return pair;
+    const pair = this.#judged(cake, batch, meetingOf(this.#trial, cake, batch));
     if (pair) known.push(pair);
     return pair;
   }
@@ -129,11 +128,16 @@ function meetingOf({ now }: Trial, cake: number, batch: number): Meeting {
   };
 }
 
-const isSame = (a: Meeting, b: Meeting): boolean =>
-  a.brewedAfter === b.brewedAfter &&
-  a.shelf === b.shelf &&
-  a.cakeShelf === b.cakeShelf &&
-  a.takenAfter === b.takenAfter;
+/** True where two batches meet in a trial as they did before. */
+function isStill(meeting: Meeting, { now }: Trial, cake: number, batch: number): boolean {
+  const from = at(now.brewDay, cake);
+  return (
+    meeting.brewedAfter === daysFrom(from, at(now.brewDay, batch)) &&
+    meeting.shelf === now.shelf[batch] &&
+    meeting.cakeShelf === now.shelf[cake] &&
+    meeting.takenAfter === daysFrom(from, at(now.takenDay, batch))
+  );
+}
 
 /** Further than any two days lie apart. */
 const FAR = 10_000_000;
