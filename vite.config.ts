@@ -26,8 +26,6 @@ export default defineConfig({
   plugins: [react(), tailwindcss(), toastStylesAsFile],
   // In development it would be bundled beforehand, past the plugin.
   optimizeDeps: { exclude: ['sonner'] },
-  // Another part that brings an inline style, under the dialogs.
-  resolve: { alias: { 'react-remove-scroll': `${root}src/components/ui/holdScroll.tsx` } },
   publicDir: 'src/public',
   build: {
     outDir: process.env.BARMKIN_DIST ?? 'dist',

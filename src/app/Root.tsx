@@ -1,6 +1,5 @@
 import { Outlet } from 'react-router-dom';
 import { FocusOnNavigation } from './FocusOnNavigation.tsx';
-import { MENUS } from './menus.ts';
 import { SkipLink } from './SkipLink.tsx';
 
 export function Root() {
@@ -9,7 +8,6 @@ export function Root() {
       <SkipLink />
       <FocusOnNavigation />
       <Outlet />
-      <section id={MENUS} aria-label="Open menu" />
     </>
   );
 }

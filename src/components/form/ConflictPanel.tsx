@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import { sentenceOf } from '../../api/errors.ts';
 import { useOnline } from '../../app/useOnline.ts';
+import { useUnsaved } from '../../app/unsaved.ts';
 import { Button } from '../ui/Button.tsx';
 import { Notice } from '../ui/Notice.tsx';
 import type { Conflict } from './useRowEdit.ts';
@@ -21,6 +22,7 @@ export function ConflictPanel<Facts>(props: ConflictPanelProps<Facts>) {
   const [failure, setFailure] = useState<string | null>(null);
   const [busy, setBusy] = useState(false);
   const online = useOnline();
+  useUnsaved(!busy);
   const choose = (key: keyof Facts, isTheirs: boolean) => {
     const next = new Set(theirs);
     if (isTheirs) next.add(key);

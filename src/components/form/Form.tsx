@@ -1,6 +1,7 @@
 import { useState, type ReactNode } from 'react';
 import { FormProvider, type FieldValues, type UseFormReturn } from 'react-hook-form';
 import { reportClientError } from '../../api/clientErrors.ts';
+import { useUnsaved } from '../../app/unsaved.ts';
 import { FormFoot } from './FormFoot.tsx';
 import { showServerErrors } from './serverErrors.ts';
 
@@ -22,6 +23,8 @@ export interface FormProps<V extends FieldValues, C, O extends FieldValues> {
 
 export function Form<V extends FieldValues, C, O extends FieldValues>(props: FormProps<V, C, O>) {
   const { form, onSubmit, children } = props;
+  const { isDirty, isSubmitting } = form.formState;
+  useUnsaved(isDirty && !isSubmitting);
   const [failure, setFailure] = useState<string | null>(null);
   const submit = form.handleSubmit(async (values) => {
     setFailure(null);
@@ -36,7 +39,7 @@ export function Form<V extends FieldValues, C, O extends FieldValues>(props: For
     <FormProvider {...form}>
       <form noValidate onSubmit={submit} className="space-y-5">
         {children}
-        <FormFoot {...props} failure={failure} busy={form.formState.isSubmitting} />
+        <FormFoot {...props} failure={failure} busy={isSubmitting} />
       </form>
     </FormProvider>
   );

@@ -1,4 +1,5 @@
-import type { ReactNode } from 'react';
+import { use, type ReactNode } from 'react';
+import { EnclosingDialog } from '../../app/unsaved.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { Button } from '../ui/Button.tsx';
 import { Notice } from '../ui/Notice.tsx';
@@ -17,9 +18,10 @@ export interface FormFootProps {
 export function FormFoot(props: FormFootProps) {
   const { action, busyAction = 'Saving', onCancel, wide = false, aside, failure, busy } = props;
   const online = useOnline();
+  const dialog = use(EnclosingDialog);
   return (
     // In a dialog the foot stays in sight, however long the form is.
-    <div className="space-y-4 in-[[role=dialog]]:sticky in-[[role=dialog]]:-bottom-7 in-[[role=dialog]]:-mx-7 in-[[role=dialog]]:-mb-7 in-[[role=dialog]]:border-t in-[[role=dialog]]:border-line in-[[role=dialog]]:bg-paper in-[[role=dialog]]:px-7 in-[[role=dialog]]:py-4 max-tablet:in-[[role=dialog]]:-bottom-5 max-tablet:in-[[role=dialog]]:-mx-5 max-tablet:in-[[role=dialog]]:-mb-5 max-tablet:in-[[role=dialog]]:px-5">
+    <div className="space-y-4 in-[dialog]:sticky in-[dialog]:-bottom-7 in-[dialog]:-mx-7 in-[dialog]:-mb-7 in-[dialog]:border-t in-[dialog]:border-line in-[dialog]:bg-paper in-[dialog]:px-7 in-[dialog]:py-4 max-tablet:in-[dialog]:-bottom-5 max-tablet:in-[dialog]:-mx-5 max-tablet:in-[dialog]:-mb-5 max-tablet:in-[dialog]:px-5">
       <ErrorSummary />
       <div aria-live="assertive" className="empty:hidden">
         {failure && <Notice kind="hold">{failure}</Notice>}
@@ -32,7 +34,7 @@ export function FormFoot(props: FormFootProps) {
       <div className="flex flex-wrap items-center justify-end gap-3">
         {aside && <div className="mr-auto">{aside}</div>}
         {onCancel && (
-          <Button look="quiet" onClick={onCancel}>
+          <Button look="quiet" onClick={dialog?.leave ?? onCancel}>
             Leave it
           </Button>
         )}

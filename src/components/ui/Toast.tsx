@@ -1,8 +1,19 @@
 import { lazy, Suspense } from 'react';
 
+const LAYER = 'toasts';
+
+/** Lifts the toasts above whatever dialog stands open now: the newest in the top layer is uppermost. */
+function raise() {
+  const layer = document.getElementById(LAYER);
+  if (!layer) return;
+  layer.hidePopover();
+  layer.showPopover();
+}
+
 /** Short word of what was done. What went wrong stands where it went wrong, not here. */
 export async function say(sentence: string): Promise<void> {
   const { toast } = await import('sonner');
+  raise();
   toast(sentence);
 }
 
@@ -10,17 +21,19 @@ export async function say(sentence: string): Promise<void> {
 const Sonner = lazy(async () => ({ default: (await import('sonner')).Toaster }));
 
 export const Toaster = () => (
-  <Suspense>
-    <Sonner
-      position="bottom-center"
-      duration={5000}
-      offset={24}
-      mobileOffset={84}
-      toastOptions={{
-        unstyled: true,
-        className:
-          'w-full rounded-xl border border-line bg-ink px-4 py-3 font-sans text-body font-medium text-stone shadow-card',
-      }}
-    />
-  </Suspense>
+  <div id={LAYER} popover="manual" className="fixed inset-auto size-0 overflow-visible">
+    <Suspense>
+      <Sonner
+        position="bottom-center"
+        duration={5000}
+        offset={24}
+        mobileOffset={84}
+        toastOptions={{
+          unstyled: true,
+          className:
+            'w-full rounded-xl border border-line bg-ink px-4 py-3 font-sans text-body font-medium text-stone shadow-card',
+        }}
+      />
+    </Suspense>
+  </div>
 );

@@ -1,10 +1,10 @@
 import { useQuery } from '@tanstack/react-query';
-import { Link, useNavigate } from 'react-router-dom';
+import { useNavigate } from 'react-router-dom';
 import { boardQuery } from '../../api/board.ts';
 import { useSession, useSignOut } from '../../api/session.ts';
 import { useBrewery } from '../../app/useBrewery.ts';
 import { Avatar } from '../../components/drawn/Avatar.tsx';
-import { Menu, MenuItem, MenuLabel, MenuSeparator } from '../../components/ui/Menu.tsx';
+import { Menu, MenuItem, MenuLabel, MenuLink, MenuSeparator } from '../../components/ui/Menu.tsx';
 import { say } from '../../components/ui/Toast.tsx';
 import { sentenceOf } from '../../api/errors.ts';
 import { initialsOf } from './initials.ts';
@@ -25,23 +25,15 @@ export function AccountMenu() {
     });
   return (
     <Menu
-      trigger={
-        <button
-          type="button"
-          aria-label={`Account of ${me.name}`}
-          className="grid min-h-8 place-items-center rounded-full max-tablet:size-11"
-        >
-          <Avatar initials={initials} name={me.name} place={Math.max(0, place)} />
-        </button>
-      }
+      button={{
+        'aria-label': `Account of ${me.name}`,
+        className: 'grid min-h-8 place-items-center rounded-full max-tablet:size-11',
+        children: <Avatar initials={initials} name={me.name} place={Math.max(0, place)} />,
+      }}
     >
       <MenuLabel>{me.name}</MenuLabel>
-      <MenuItem asChild>
-        <Link to={brewery.path('account')}>Account and units</Link>
-      </MenuItem>
-      <MenuItem asChild>
-        <Link to="/about/checks">How the checks work</Link>
-      </MenuItem>
+      <MenuLink to={brewery.path('account')}>Account and units</MenuLink>
+      <MenuLink to="/about/checks">How the checks work</MenuLink>
       <OtherBreweries />
       <MenuSeparator />
       <MenuItem onSelect={leave}>Sign out</MenuItem>
@@ -58,9 +50,9 @@ function OtherBreweries() {
       <MenuSeparator />
       <MenuLabel>Other breweries</MenuLabel>
       {others.map(({ brewery }) => (
-        <MenuItem asChild key={brewery.id}>
-          <Link to={`/b/${brewery.slug}`}>{brewery.name}</Link>
-        </MenuItem>
+        <MenuLink key={brewery.id} to={`/b/${brewery.slug}`}>
+          {brewery.name}
+        </MenuLink>
       ))}
     </>
   );

@@ -1,9 +1,9 @@
 import clsx from 'clsx';
 import { Beaker, Ellipsis, Microscope } from 'lucide-react';
 import type { ReactNode } from 'react';
-import { Link, NavLink, useLocation } from 'react-router-dom';
+import { NavLink, useLocation } from 'react-router-dom';
 import { useBrewery } from '../../app/useBrewery.ts';
-import { Menu, MenuItem } from '../../components/ui/Menu.tsx';
+import { Menu, MenuLink } from '../../components/ui/Menu.tsx';
 import { ShelfIcon } from './ShelfIcon.tsx';
 
 const CELL =
@@ -59,21 +59,14 @@ function More() {
   const active = /\/(people|season|account)$/.test(pathname);
   return (
     <Menu
-      trigger={
-        <button type="button" className={clsx(CELL, active ? 'text-bottle' : 'text-ink2')}>
-          <TabFace active={active} icon={<Ellipsis size={22} aria-hidden />} name="More" />
-        </button>
-      }
+      button={{
+        className: clsx(CELL, active ? 'text-bottle' : 'text-ink2'),
+        children: <TabFace active={active} icon={<Ellipsis size={22} aria-hidden />} name="More" />,
+      }}
     >
-      <MenuItem asChild>
-        <Link to={brewery.path('people')}>People</Link>
-      </MenuItem>
-      <MenuItem asChild>
-        <Link to={brewery.path('season')}>Season</Link>
-      </MenuItem>
-      <MenuItem asChild>
-        <Link to={brewery.path('account')}>Account and units</Link>
-      </MenuItem>
+      <MenuLink to={brewery.path('people')}>People</MenuLink>
+      <MenuLink to={brewery.path('season')}>Season</MenuLink>
+      <MenuLink to={brewery.path('account')}>Account and units</MenuLink>
     </Menu>
   );
 }

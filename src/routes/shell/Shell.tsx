@@ -2,6 +2,7 @@ import { Suspense } from 'react';
 import { Navigate, Outlet, useLocation, useParams } from 'react-router-dom';
 import { sentenceOf } from '../../api/errors.ts';
 import { useSession } from '../../api/session.ts';
+import { LeaveGuard } from '../../app/LeaveGuard.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
 import { OfflineBanner } from '../../components/ui/OfflineBanner.tsx';
 import { Skeleton } from '../../components/ui/Skeleton.tsx';
@@ -39,6 +40,7 @@ export function Shell() {
         </Suspense>
       </div>
       <BottomBar />
+      <LeaveGuard />
       <Toaster />
     </div>
   );

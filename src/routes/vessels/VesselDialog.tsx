@@ -25,8 +25,6 @@ export function VesselDialog({ vessel, onClose }: VesselDialogProps) {
   const patch = useVesselPatch(slug);
   const [values] = useState(() => vesselValues(vessel, units));
   const [deleting, setDeleting] = useState(false);
-  if (deleting && vessel)
-    return <DeleteVessel vessel={vessel} onClose={() => setDeleting(false)} onDone={onClose} />;
   return (
     <Dialog open onClose={onClose} title={vessel ? `Edit ${vessel.name}` : 'New vessel'}>
       <RowForm
@@ -53,6 +51,9 @@ export function VesselDialog({ vessel, onClose }: VesselDialogProps) {
       >
         <VesselFields />
       </RowForm>
+      {deleting && vessel && (
+        <DeleteVessel vessel={vessel} onClose={() => setDeleting(false)} onDone={onClose} />
+      )}
     </Dialog>
   );
 }

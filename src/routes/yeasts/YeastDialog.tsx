@@ -27,8 +27,6 @@ export function YeastDialog({ yeast, onClose }: YeastDialogProps) {
   const patch = useYeastPatch(slug);
   const [values] = useState(() => yeastValues(yeast, units, currency));
   const [deleting, setDeleting] = useState(false);
-  if (deleting && yeast)
-    return <DeleteYeast yeast={yeast} onClose={() => setDeleting(false)} onDone={onClose} />;
   return (
     <Dialog open onClose={onClose} title={yeast ? `Edit ${yeast.name}` : 'New yeast'}>
       <RowForm
@@ -55,6 +53,9 @@ export function YeastDialog({ yeast, onClose }: YeastDialogProps) {
       >
         <YeastFields currency={currency} />
       </RowForm>
+      {deleting && yeast && (
+        <DeleteYeast yeast={yeast} onClose={() => setDeleting(false)} onDone={onClose} />
+      )}
     </Dialog>
   );
 }

@@ -20,15 +20,12 @@ export function BatchMenu({ batch }: { batch: Batch }) {
   return (
     <>
       <Menu
-        trigger={
-          <button
-            type="button"
-            aria-label={`More for ${batch.name}`}
-            className="grid size-[26px] place-items-center rounded-md text-ink3 hover:bg-line2 hover:text-ink max-tablet:size-11"
-          >
-            <Ellipsis size={18} aria-hidden />
-          </button>
-        }
+        button={{
+          'aria-label': `More for ${batch.name}`,
+          className:
+            'grid size-[26px] place-items-center rounded-md text-ink3 hover:bg-line2 hover:text-ink max-tablet:size-11',
+          children: <Ellipsis size={18} aria-hidden />,
+        }}
       >
         <MenuItem onSelect={() => open({ kind: 'batch', batchId: batch.id })}>Edit</MenuItem>
         <MenuItem onSelect={() => open({ kind: 'new', what: 'batch', likeId: batch.id })}>

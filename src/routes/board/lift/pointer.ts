@@ -5,7 +5,8 @@ const ACTIVATION_PX = 6;
 export const POINTER = { activationConstraint: { distance: ACTIVATION_PX } };
 
 /** Things inside a batch that are pressed for themselves. */
-const OWN_PRESS = 'a, button:not([data-lift-handle]), input, select, textarea, summary, label';
+const OWN_PRESS =
+  'a, button:not([data-lift-handle]), input, select, textarea, summary, label, [popover]';
 
 /** The batch that a press would lift. A finger lifts by the handle only, so that it can scroll. */
 export function pressed(

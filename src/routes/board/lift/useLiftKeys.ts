@@ -2,7 +2,7 @@ import { useEffect } from 'react';
 import { intentOf, undoKeyOf } from './keys.ts';
 import { drop, type LiftMachine } from './liftContext.ts';
 
-const TYPING = 'input, textarea, select, [contenteditable="true"], [role="dialog"]';
+const TYPING = 'input, textarea, select, [contenteditable="true"], dialog';
 
 const isTyping = (target: EventTarget | null) =>
   target instanceof Element && target.closest(TYPING) !== null;

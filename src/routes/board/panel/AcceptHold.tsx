@@ -4,6 +4,7 @@ import { holdsOf, mayBeAccepted, NEVER_ACCEPTED } from '#shared/chain/acceptance
 import type { LinkAnswer } from '#shared/rules/answer.ts';
 import { sentenceOf } from '../../../api/errors.ts';
 import { useAcceptance } from '../../../api/links.ts';
+import { useUnsaved } from '../../../app/unsaved.ts';
 import { FieldError } from '../../../components/form/FieldError.tsx';
 import { fieldClass } from '../../../components/form/fieldClass.ts';
 import { Button } from '../../../components/ui/Button.tsx';
@@ -59,6 +60,7 @@ function AcceptForm({ later }: { later: Batch }) {
   const id = useId();
   const [reason, setReason] = useState('');
   const [why, setWhy] = useState<string>();
+  useUnsaved(reason.trim() !== '' && !accept.isPending && !accept.isSuccess);
   const submit = () => {
     const parsed = acceptanceRequest.safeParse({ reason });
     setWhy(parsed.error?.issues[0]?.message);

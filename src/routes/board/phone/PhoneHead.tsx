@@ -23,15 +23,12 @@ function AddMenu() {
   if (!can.editBatches && !can.editChains) return null;
   return (
     <Menu
-      trigger={
-        <button
-          type="button"
-          aria-label="New batch or shelf"
-          className="grid size-[46px] shrink-0 place-items-center rounded-[14px] bg-bottle text-on-bottle"
-        >
-          <Plus size={24} strokeWidth={2.4} aria-hidden />
-        </button>
-      }
+      button={{
+        'aria-label': 'New batch or shelf',
+        className:
+          'grid size-[46px] shrink-0 place-items-center rounded-[14px] bg-bottle text-on-bottle',
+        children: <Plus size={24} strokeWidth={2.4} aria-hidden />,
+      }}
     >
       {can.editBatches && (
         <MenuItem onSelect={() => open({ kind: 'new', what: 'batch' })}>New batch</MenuItem>

@@ -12,27 +12,25 @@ import { usePullDates } from './usePullDates.ts';
 /** Edit the shelf, pull its dates along, delete it. */
 export function ChainMenu({ chain }: { chain: Chain }) {
   const [asked, setAsked] = useState<'edit' | 'delete' | null>(null);
-  const pull = usePullDates(chain);
   const close = () => setAsked(null);
   return (
     <>
       <Menu
         align="start"
-        trigger={
-          <button
-            type="button"
-            aria-label={`Shelf ${chain.name}`}
-            className="flex min-h-[26px] items-center gap-1 rounded-md px-1.5 text-small text-ink2 hover:bg-line2 hover:text-ink max-tablet:min-h-11"
-          >
-            Shelf
-            <ChevronDown size={15} aria-hidden />
-          </button>
-        }
+        button={{
+          'aria-label': `Shelf ${chain.name}`,
+          className:
+            'flex min-h-[26px] items-center gap-1 rounded-md px-1.5 text-small text-ink2 hover:bg-line2 hover:text-ink max-tablet:min-h-11',
+          children: (
+            <>
+              Shelf
+              <ChevronDown size={15} aria-hidden />
+            </>
+          ),
+        }}
       >
         <MenuItem onSelect={() => setAsked('edit')}>Edit the shelf</MenuItem>
-        <MenuItem disabled={pull.shifts === 0} onSelect={pull.run}>
-          {pull.shifts === 0 ? 'Dates follow the cake' : `Pull ${count(pull.shifts, 'date')} along`}
-        </MenuItem>
+        <PullItem chain={chain} />
         <MenuSeparator />
         <MenuItem danger onSelect={() => setAsked('delete')}>
           Delete the shelf
@@ -41,6 +39,16 @@ export function ChainMenu({ chain }: { chain: Chain }) {
       {asked === 'edit' && <ChainFormDialog chain={chain} onClose={close} />}
       {asked === 'delete' && <DeleteChain chain={chain} onClose={close} />}
     </>
+  );
+}
+
+/** Worked out when the menu is open, from the whole board as it is then. */
+function PullItem({ chain }: { chain: Chain }) {
+  const { shifts, run } = usePullDates(chain);
+  return (
+    <MenuItem disabled={shifts === 0} onSelect={run}>
+      {shifts === 0 ? 'Dates follow the cake' : `Pull ${count(shifts, 'date')} along`}
+    </MenuItem>
   );
 }
 

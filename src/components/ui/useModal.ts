@@ -1,0 +1,39 @@
+import { useEffect, useLayoutEffect, useRef } from 'react';
+
+/** Whether the page has a scrollbar, whose room is to stay while the page is held. */
+const hasGutter = () => window.innerWidth > document.documentElement.clientWidth;
+
+/**
+ * Opens the browser's own modal dialog over everything else, with the focus on its title. Every
+ * way that the browser has to close it (Escape, back on a phone) asks `onLeave` instead.
+ */
+export function useModal(onLeave: () => void) {
+  const dialog = useRef<HTMLDialogElement>(null);
+  const title = useRef<HTMLHeadingElement>(null);
+  const leave = useRef(onLeave);
+  useEffect(() => {
+    leave.current = onLeave;
+  });
+  useLayoutEffect(() => {
+    const modal = dialog.current;
+    if (!modal) return;
+    const opener = document.activeElement;
+    if (hasGutter()) modal.dataset.gutter = '';
+    modal.showModal();
+    title.current?.focus({ preventScroll: true });
+    const ask = () => leave.current();
+    // A browser may close it without asking, when it was asked once before.
+    const reopen = () => {
+      modal.showModal();
+      ask();
+    };
+    modal.addEventListener('close', reopen);
+    return () => {
+      modal.removeEventListener('close', reopen);
+      modal.close();
+      if (opener instanceof HTMLElement && opener.isConnected)
+        opener.focus({ preventScroll: true });
+    };
+  }, []);
+  return { dialog, title };
+}
