@@ -4,11 +4,11 @@ import { openBoard, openBrowser } from './support/boardPage.ts';
 import { carry, putDown } from './support/carry.ts';
 import { percentile } from './support/percentile.ts';
 import { CATEGORIES, readTrace, type Timeline } from './support/trace.ts';
-import { countVessels, vesselRenders } from './support/vesselRenders.ts';
+import { countVessels, vesselRenders } from '../../e2e/support/vesselRenders.ts';
 import type { Part, Row } from './row.ts';
 
 const SIZE = { chains: 25, perChain: 8, bench: 0, seed: 3 };
-const PAGES = 2;
+const PAGES = 1;
 const DRAGS = 2;
 const WHAT = 'dragging over 200 batches on 25 shelves, from lift to the saved drop';
 
