@@ -7,7 +7,7 @@ import {
   useSensors,
 } from '@dnd-kit/core';
 import { useImperativeHandle, useMemo, type PointerEvent, type RefObject } from 'react';
-import { drop, useLiftMachine, type LiftMachine } from './liftContext.ts';
+import { useLiftMachine, type LiftMachine } from './liftContext.ts';
 import { LiftedCard } from './LiftedCard.tsx';
 import { AT_POINTER, POINTER, SILENT } from './pointer.ts';
 import { watchPointer, type Watch } from './watchPointer.ts';
@@ -49,7 +49,12 @@ function createDrag(machine: LiftMachine) {
     },
     onDragEnd() {
       const key = watch?.stop() ?? null;
-      drop(machine, key);
+      const { lifted } = machine.store.get();
+      const gap = key === null ? undefined : lifted?.gaps.get(key);
+      if (!lifted || !gap) return machine.lifting.cancel();
+      // The hand opens in this frame, the board changes in the next: both at once would be felt.
+      machine.lifting.release();
+      requestAnimationFrame(() => machine.putting.put(lifted.batchId, gap));
     },
     onDragCancel() {
       watch?.stop();

@@ -48,7 +48,7 @@ export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
   let fold = () => {};
 
   const release = () => {
-    store.set({ lifted: null, over: null, opened: NONE, unfolded: NONE, isUnfolded: false });
+    store.set({ lifted: null, over: null, opened: NONE, isUnfolded: false });
     letGo();
     fold();
     letGo = fold = () => {};

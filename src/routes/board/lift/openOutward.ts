@@ -5,10 +5,19 @@ import type { LiftPorts } from './ports.ts';
 /** Gaps of one frame: a usual shelf. */
 const MOST = 12;
 
+/** Closes what was unfolded, a part a frame, unless something is lifted again. */
+function foldBack(store: LiftStore, ports: LiftPorts) {
+  const { lifted, unfolded } = store.get();
+  const [, ...rest] = unfolded;
+  if (lifted || unfolded.size === 0) return;
+  store.set({ unfolded: new Set(rest) });
+  ports.nextFrame(() => foldBack(store, ports));
+}
+
 /**
  * Unfolds a lift frame by frame: first the panel gives way, then the gaps in sight open shelf by
  * shelf from the batch outward, and more of them as shelves scroll into sight. No frame draws them
- * all, and what is out of sight costs nothing. The answer ends it.
+ * all, and what is out of sight costs nothing. The answer ends it, and folds part after part.
  */
 export function openOutward(store: LiftStore, ports: LiftPorts, batchId: string): () => void {
   let hasEnded = false;
@@ -42,5 +51,6 @@ export function openOutward(store: LiftStore, ports: LiftPorts, batchId: string)
   return () => {
     hasEnded = true;
     stop();
+    foldBack(store, ports);
   };
 }
