@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { bestMove } from '#shared/chain/bestMove.ts';
+import { bestMove, bestMoveSteps } from '#shared/chain/bestMove.ts';
 import { indexBoard, isPencilled, type BoardFacts } from '#shared/chain/board.ts';
 import { judgeGaps, rankGaps, type Gap } from '#shared/chain/gaps.ts';
 import { judgeBoard, type JudgedLink } from '#shared/chain/judgeBoard.ts';
@@ -22,6 +22,12 @@ function wishFor(board: BoardFacts, batchId: string, gap: Gap): MoveWish {
 }
 
 const NEW_ID = 'd0000000-0000-4000-8000-0000000000ff';
+
+/**
+ * A whole board is judged at each step, so a failure is told as it was met: to make it small would
+ * take minutes. The seed and path that are told find it again.
+ */
+const SEARCH = { endOnFailure: true };
 
 const number = (link: JudgedLink | undefined, verdict: 'hold' | 'mind') =>
   link?.findings.filter((finding) => finding.verdict === verdict).length ?? 0;
@@ -82,7 +88,7 @@ describe('the gaps of a lifted batch', () => {
           expect(gap.verdict).toBe(holds > 0 ? 'hold' : minds > 0 ? 'mind' : 'pour');
         }
       }),
-      { numRuns: 60 },
+      { ...SEARCH, numRuns: 60 },
     );
   });
 
@@ -97,6 +103,7 @@ describe('the gaps of a lifted batch', () => {
           if (gap.here && result.ok) expect(result.batches).toEqual([]);
         }
       }),
+      SEARCH,
     );
   });
 
@@ -113,9 +120,15 @@ describe('the gaps of a lifted batch', () => {
           if (best[0] && !gap.locked && gap.key !== 'bench')
             expect(gap.holds).toBeGreaterThanOrEqual(best[0].holds);
       }),
+      SEARCH,
     );
   });
 });
+
+/** Each step's value, the answer last. */
+function* stepsOf(board: BoardFacts) {
+  yield yield* bestMoveSteps(board);
+}
 
 type Fall = [holds: number, minds: number];
 
@@ -136,6 +149,9 @@ describe('the move that would help most', () => {
             if (isLarger(fall, most)) most = fall;
           }
         const best = bestMove(board);
+        const steps = [...stepsOf(board)];
+        expect(JSON.stringify(steps.at(-1))).toBe(JSON.stringify(best));
+        expect(steps.length).toBeLessThanOrEqual(board.batches.length + 1);
         if (!best) {
           expect(most).toEqual([0, 0]);
           return;
@@ -147,7 +163,7 @@ describe('the move that would help most', () => {
         const end = totals(after(board, moveBatch(board, wishFor(board, best.batchId, best.gap))));
         expect(best.after).toEqual({ holds: end.hold, minds: end.mind });
       }),
-      { numRuns: 15 },
+      { ...SEARCH, numRuns: 15 },
     );
   });
 });

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { PourFacts } from '#shared/rules/facts.ts';
-import { ale, blonde, check, paleAle } from '../../support/links.ts';
+import { blonde, check, paleAle } from '../../support/links.ts';
 
 const jarring = (pour: PourFacts, b = paleAle()): string | undefined =>
   check({ a: blonde(), b, pour }).advice.find(({ id }) => id === 'jar-the-rest')?.text;
