@@ -8,7 +8,7 @@ import { countVessels, vesselRenders } from '../../e2e/support/vesselRenders.ts'
 import type { Part, Row } from './row.ts';
 
 const SIZE = { chains: 25, perChain: 8, bench: 0, seed: 3 };
-const PAGES = 1;
+const PAGES = 2;
 const DRAGS = 2;
 const WHAT = 'dragging over 200 batches on 25 shelves, from lift to the saved drop';
 
@@ -38,8 +38,6 @@ async function tracedDrags(browser: Browser, at: AtWork): Promise<Timeline[]> {
     await carry(page, nth * 3);
     await putDown(page);
     const trace = (await browser.stopTracing()).toString();
-    if (process.env.TRACE_DIR)
-      (await import('node:fs')).writeFileSync(`${process.env.TRACE_DIR}/${Date.now()}.json`, trace);
     traces.push(readTrace(trace));
   }
   await page.context().close();

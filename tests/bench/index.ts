@@ -1,4 +1,4 @@
-import { cpus } from 'node:os';
+import { cpus, loadavg } from 'node:os';
 import { board } from './board.ts';
 import { drag } from './drag.ts';
 import { engine } from './engine.ts';
@@ -12,10 +12,14 @@ const PARTS: readonly Part[] = [engine, board, moves, pages, drag];
 async function main(names: readonly string[]): Promise<void> {
   const unknown = names.filter((name) => !PARTS.some((part) => part.name === name));
   if (unknown.length > 0) throw new Error(`There is no part ${unknown.join(', ')}.`);
+  // What else the machine has to do: above about 1.5 the figures say more of that than of Barmkin.
+  const load = loadavg()[0] ?? 0;
   const rows: Row[] = [];
   for (const part of PARTS)
     if (names.length === 0 || names.includes(part.name)) rows.push(...(await part.run()));
-  console.log(`${cpus().length} × ${cpus()[0]?.model ?? 'processor'}, Node ${process.version}\n`);
+  console.log(
+    `${cpus().length} × ${cpus()[0]?.model ?? 'processor'}, Node ${process.version}, load ${load.toFixed(1)}\n`,
+  );
   console.log(table(rows));
   if (rows.some((row) => !row.holds)) process.exitCode = 1;
 }

@@ -9,7 +9,13 @@ interface Chunk {
 }
 type Manifest = Readonly<Record<string, Chunk>>;
 
-const PUBLIC = ['welcome/WelcomePage', 'sign-in/SignInPage', 'sign-up/SignUpPage', 'join/JoinPage'];
+const PUBLIC = [
+  'welcome/WelcomePage',
+  'sign-in/SignInPage',
+  'sign-up/SignUpPage',
+  'join/JoinPage',
+  'checks/ChecksPage',
+];
 const BOARD = ['board/BoardPage'];
 
 /** How much JavaScript a page needs before it stands there. */
