@@ -21,9 +21,26 @@ const toastStylesAsFile: Plugin = {
   },
 };
 
+/** The contracts bring a maker of JSON schemas along, 16 kB that no page has a use for: it stays on the server. */
+const noJsonSchemas: Plugin = {
+  name: 'no-json-schemas',
+  apply: 'build',
+  transform: {
+    filter: { id: /node_modules\/zod\/v4\/core\/(json-schema-processors|to-json-schema)\.js$/ },
+    handler(code) {
+      const names = [...code.matchAll(/^export (?:const|function|class) (\w+)/gm)].map(
+        ([, name]) => `export const ${name} = () => none;`,
+      );
+      if (names.length === 0) throw new Error('zod keeps its JSON schemas elsewhere: see where');
+      const none = `const none = () => { throw new Error('Pages make no JSON schemas'); };`;
+      return { code: [none, ...names].join('\n'), map: null };
+    },
+  },
+};
+
 export default defineConfig({
   root,
-  plugins: [react(), tailwindcss(), toastStylesAsFile],
+  plugins: [react(), tailwindcss(), toastStylesAsFile, noJsonSchemas],
   // In development it would be bundled beforehand, past the plugin.
   optimizeDeps: { exclude: ['sonner'] },
   publicDir: 'src/public',

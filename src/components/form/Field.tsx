@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import { FieldError } from './FieldError.tsx';
-import type { FieldState } from './useField.ts';
+import type { FieldState } from './fieldState.ts';
 
 export interface FieldProps {
   label: ReactNode;

@@ -23,7 +23,7 @@ export interface FormProps<V extends FieldValues, C, O extends FieldValues> {
 
 export function Form<V extends FieldValues, C, O extends FieldValues>(props: FormProps<V, C, O>) {
   const { form, onSubmit, children } = props;
-  const { isDirty, isSubmitting } = form.formState;
+  const { isDirty, isSubmitting, submitCount, errors } = form.formState;
   useUnsaved(isDirty && !isSubmitting);
   const [failure, setFailure] = useState<string | null>(null);
   const submit = form.handleSubmit(async (values) => {
@@ -39,8 +39,20 @@ export function Form<V extends FieldValues, C, O extends FieldValues>(props: For
     <FormProvider {...form}>
       <form noValidate onSubmit={submit} className="space-y-5">
         {children}
-        <FormFoot {...props} failure={failure} busy={isSubmitting} />
+        <FormFoot
+          {...props}
+          messages={submitCount === 0 ? [] : messagesOf(errors)}
+          failure={failure}
+          busy={isSubmitting}
+        />
       </form>
     </FormProvider>
   );
+}
+
+/** Every sentence of the errors, however deep. */
+function messagesOf(errors: unknown): string[] {
+  if (typeof errors !== 'object' || errors === null) return [];
+  if ('message' in errors && typeof errors.message === 'string') return [errors.message];
+  return Object.entries(errors).flatMap(([key, value]) => (key === 'ref' ? [] : messagesOf(value)));
 }

@@ -11,18 +11,29 @@ export interface FormFootProps {
   onCancel?: () => void;
   wide?: boolean;
   aside?: ReactNode;
+  /** What the contract found at the fields. */
+  messages: readonly string[];
   failure: string | null;
   busy: boolean;
 }
 
 export function FormFoot(props: FormFootProps) {
-  const { action, busyAction = 'Saving', onCancel, wide = false, aside, failure, busy } = props;
+  const {
+    action,
+    busyAction = 'Saving',
+    onCancel,
+    wide = false,
+    aside,
+    messages,
+    failure,
+    busy,
+  } = props;
   const online = useOnline();
   const dialog = use(EnclosingDialog);
   return (
     // In a dialog the foot stays in sight, however long the form is.
     <div className="space-y-4 in-[dialog]:sticky in-[dialog]:-bottom-7 in-[dialog]:-mx-7 in-[dialog]:-mb-7 in-[dialog]:border-t in-[dialog]:border-line in-[dialog]:bg-paper in-[dialog]:px-7 in-[dialog]:py-4 max-tablet:in-[dialog]:-bottom-5 max-tablet:in-[dialog]:-mx-5 max-tablet:in-[dialog]:-mb-5 max-tablet:in-[dialog]:px-5">
-      <ErrorSummary />
+      <ErrorSummary messages={messages} />
       <div aria-live="assertive" className="empty:hidden">
         {failure && <Notice kind="hold">{failure}</Notice>}
       </div>

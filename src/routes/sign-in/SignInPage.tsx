@@ -1,13 +1,11 @@
-import { useForm } from 'react-hook-form';
 import { Navigate, useNavigate, useSearchParams } from 'react-router-dom';
 import { signInRequest } from '#shared/api/people.ts';
 import { useSession, useSignIn } from '../../api/session.ts';
 import { useTitle } from '../../app/useTitle.ts';
-import { contractResolver } from '../../components/form/contractResolver.ts';
-import { Form } from '../../components/form/Form.tsx';
-import { PasswordField } from '../../components/form/PasswordField.tsx';
-import { TextField } from '../../components/form/TextField.tsx';
 import { TextLink } from '../../components/ui/TextLink.tsx';
+import { EmailField } from '../public/EntryField.tsx';
+import { EntryForm } from '../public/EntryForm.tsx';
+import { PasswordField } from '../public/PasswordField.tsx';
 import { homeOf, safeNext } from '../public/home.ts';
 import { PublicForm } from '../public/PublicForm.tsx';
 
@@ -32,14 +30,9 @@ export function SignInPage() {
 function SignInForm({ next }: { next: string | null }) {
   const navigate = useNavigate();
   const signIn = useSignIn();
-  const form = useForm({
-    resolver: contractResolver(signInRequest),
-    defaultValues: { email: '', password: '' },
-  });
   return (
-    <Form
-      form={form}
-      wide
+    <EntryForm
+      contract={signInRequest}
       action="Sign in"
       busyAction="Signing in"
       onSubmit={async (values) => {
@@ -47,15 +40,8 @@ function SignInForm({ next }: { next: string | null }) {
         await navigate(next ?? homeOf(who), { replace: true });
       }}
     >
-      <TextField
-        name="email"
-        label="E-mail"
-        type="email"
-        autoComplete="username"
-        autoCapitalize="none"
-        spellCheck={false}
-      />
+      <EmailField />
       <PasswordField name="password" label="Password" autoComplete="current-password" />
-    </Form>
+    </EntryForm>
   );
 }

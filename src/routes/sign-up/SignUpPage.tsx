@@ -1,14 +1,12 @@
-import { useForm } from 'react-hook-form';
 import { Navigate, useNavigate } from 'react-router-dom';
 import { signUpRequest } from '#shared/api/people.ts';
 import { useSession, useSignUp } from '../../api/session.ts';
 import { useTitle } from '../../app/useTitle.ts';
-import { contractResolver } from '../../components/form/contractResolver.ts';
-import { Form } from '../../components/form/Form.tsx';
-import { PasswordField } from '../../components/form/PasswordField.tsx';
-import { TextField } from '../../components/form/TextField.tsx';
 import { TextLink } from '../../components/ui/TextLink.tsx';
 import { homeOf } from '../public/home.ts';
+import { EmailField, EntryField } from '../public/EntryField.tsx';
+import { EntryForm } from '../public/EntryForm.tsx';
+import { PasswordField } from '../public/PasswordField.tsx';
 import { PublicForm } from '../public/PublicForm.tsx';
 import { optionalText } from '../public/optionalText.ts';
 
@@ -40,49 +38,31 @@ export function SignUpPage() {
 function SignUpForm() {
   const navigate = useNavigate();
   const signUp = useSignUp();
-  const form = useForm({
-    resolver: contractResolver(contract),
-    defaultValues: {
-      name: '',
-      email: '',
-      password: '',
-      breweryName: '',
-      timeZone: Intl.DateTimeFormat().resolvedOptions().timeZone,
-    },
-  });
   return (
-    <Form
-      form={form}
-      wide
+    <EntryForm
+      contract={contract}
       action="Start a brewery"
       busyAction="Setting it up"
       onSubmit={async (values) => {
-        const who = await signUp.mutateAsync(values);
+        const { timeZone } = Intl.DateTimeFormat().resolvedOptions();
+        const who = await signUp.mutateAsync({ ...values, timeZone });
         await navigate(homeOf(who), { replace: true });
       }}
     >
-      <TextField name="name" label="Your name" autoComplete="name" />
-      <TextField
-        name="email"
-        label="E-mail"
-        type="email"
-        autoComplete="username"
-        autoCapitalize="none"
-        spellCheck={false}
-        hint="To sign in with. Nothing is sent to it."
-      />
+      <EntryField name="name" label="Your name" autoComplete="name" />
+      <EmailField hint="To sign in with. Nothing is sent to it." />
       <PasswordField
         name="password"
         label="Password"
         autoComplete="new-password"
         hint="At least 10 characters; a short sentence is easiest to keep."
       />
-      <TextField
+      <EntryField
         name="breweryName"
         label="Name of the brewery (optional)"
         autoComplete="organization"
         hint="It can be changed later."
       />
-    </Form>
+    </EntryForm>
   );
 }

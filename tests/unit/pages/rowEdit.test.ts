@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { pathOf } from '../../../src/components/form/serverErrors.ts';
+import { pathOf } from '../../../src/components/form/sortErrors.ts';
 import { changesFrom, conflictsOf, mergeTyped } from '../../../src/components/form/rowEdit.ts';
 
 const base = { name: 'Keel', og: 1.052, dryHops: [] as string[], notes: '' };

@@ -1,8 +1,7 @@
 import { useState, type ReactNode } from 'react';
-import { useFormContext } from 'react-hook-form';
-import { Field } from './Field.tsx';
-import { fieldClass } from './fieldClass.ts';
-import { useField } from './useField.ts';
+import { Field } from '../../components/form/Field.tsx';
+import { fieldClass } from '../../components/form/fieldClass.ts';
+import { useEntryField } from './EntryForm.tsx';
 
 export interface PasswordFieldProps {
   name: string;
@@ -13,8 +12,7 @@ export interface PasswordFieldProps {
 }
 
 export function PasswordField({ name, label, hint, autoComplete }: PasswordFieldProps) {
-  const { register } = useFormContext();
-  const state = useField(name, hint !== undefined);
+  const state = useEntryField(name, hint !== undefined);
   const [shown, setShown] = useState(false);
   return (
     <Field label={label} hint={hint} state={state}>
@@ -26,7 +24,7 @@ export function PasswordField({ name, label, hint, autoComplete }: PasswordField
           autoCapitalize="none"
           spellCheck={false}
           {...state.aria}
-          {...register(name)}
+          name={name}
           className={fieldClass(state.message !== undefined, 'pr-20')}
         />
         <button
