@@ -1,6 +1,7 @@
 import type { Batch } from '../api/batch.ts';
 import { isPencilled, type BoardFacts, type BoardIndex } from './board.ts';
-import { compareGaps, gapOf, weighPlaces, type Gap } from './gaps.ts';
+import { compareGaps, gapOf, weigherOf, type Gap } from './gaps.ts';
+import { placesFor, type Place } from './gapPlaces.ts';
 import { chainsThatCanHelp } from './reachOfMoves.ts';
 import type { Judgement } from './trial/judgement.ts';
 import { Scales, type ChangedLink } from './weigh.ts';
@@ -32,9 +33,12 @@ export function bestMove(board: BoardFacts): BestMove | null {
   }
 }
 
+/** Places weighed in one step: two or three milliseconds. */
+const PLACES_A_STEP = 60;
+
 /**
- * The same in short steps, one for reading the board and one for each batch, for a page that has
- * only moments to spare. The board must not change meanwhile.
+ * The same in short steps, one for reading the board and the others for some places of one batch,
+ * for a page that has only moments to spare. The board must not change meanwhile.
  */
 export function* bestMoveSteps(board: BoardFacts): Generator<void, BestMove | null, void> {
   const scales = new Scales(board);
@@ -47,8 +51,7 @@ export function* bestMoveSteps(board: BoardFacts): Generator<void, BestMove | nu
   );
   let best: Option | null = null;
   for (const batch of index.board.batches.filter(isPencilled)) {
-    yield;
-    const option = bestOf(scales, batch, helpful);
+    const option = yield* bestOf(scales, batch, helpful);
     if (option && (best === null || isBetter(option, best))) best = option;
   }
   return best && told(index, before, best);
@@ -64,25 +67,34 @@ interface Option {
 }
 
 /** The place where one batch would help most; null where it helps nowhere. */
-function bestOf(scales: Scales, batch: Batch, helpful: ReadonlySet<string>): Option | null {
-  const fromHelpful =
-    (batch.chainId !== null && helpful.has(batch.chainId)) ||
-    scales.sight.index.branchesOf(batch.id).some((branch) => helpful.has(branch.id));
-  const weighed = weighPlaces(
-    scales,
-    batch.id,
-    ({ here, locked, toChainId }) =>
-      !here && !locked && toChainId !== 'bench' && (fromHelpful || helpful.has(toChainId)),
-  );
+function* bestOf(
+  scales: Scales,
+  batch: Batch,
+  helpful: ReadonlySet<string>,
+): Generator<void, Option | null, void> {
+  const weigh = weigherOf(scales, batch);
   let best: Option | null = null;
-  for (const place of weighed) {
-    const fall = fallOf(place.changed);
+  for (const [count, place] of placesThatCanHelp(scales.sight.index, batch, helpful).entries()) {
+    if (count % PLACES_A_STEP === 0) yield;
+    const weighed = weigh(place);
+    const fall = fallOf(weighed.changed);
     if (!helps(fall)) continue;
-    const option = { batchId: batch.id, gap: gapOf(place), fall };
+    const option = { batchId: batch.id, gap: gapOf(weighed), fall };
     if (best === null || isBetter(option, best)) best = option;
     else if (!isBetter(best, option) && compareGaps(option.gap, best.gap) < 0) best = option;
   }
+  scales.forget();
   return best;
+}
+
+function placesThatCanHelp(index: BoardIndex, batch: Batch, helpful: ReadonlySet<string>): Place[] {
+  const fromHelpful =
+    (batch.chainId !== null && helpful.has(batch.chainId)) ||
+    index.branchesOf(batch.id).some((branch) => helpful.has(branch.id));
+  return placesFor(index, batch).filter(
+    ({ here, locked, toChainId }) =>
+      !here && !locked && toChainId !== 'bench' && (fromHelpful || helpful.has(toChainId)),
+  );
 }
 
 function fallOf(changed: readonly ChangedLink[]): Fall {

@@ -48,7 +48,11 @@ export interface Gap {
  * vessels). Nothing for a batch that is not pencilled.
  */
 export function judgeGaps(board: BoardFacts, batchId: string): Gap[] {
-  const gaps = weighPlaces(new Scales(board), batchId).map(gapOf);
+  const scales = new Scales(board);
+  const { index } = scales.sight;
+  const batch = index.batch(batchId);
+  if (!batch || !isPencilled(batch)) return [];
+  const gaps = placesFor(index, batch).map(weigherOf(scales, batch)).map(gapOf);
   const best = bestOf(gaps);
   if (best) best.best = true;
   return gaps;
@@ -63,19 +67,11 @@ export interface WeighedPlace {
   generation: number | null;
 }
 
-export function weighPlaces(
-  scales: Scales,
-  batchId: string,
-  wanted: (place: Place) => boolean = () => true,
-): WeighedPlace[] {
-  const { index } = scales.sight;
-  const batch = index.batch(batchId);
-  if (!batch || !isPencilled(batch)) return [];
+/** Weighs the places of one pencilled batch. */
+export function weigherOf(scales: Scales, batch: Batch): (place: Place) => WeighedPlace {
   let own: number | undefined;
-  const ownDay = () => (own ??= numberOr(nextBrewDay(index, batchId)));
-  return placesFor(index, batch)
-    .filter(wanted)
-    .map((place) => weighPlace(scales, batch, place, ownDay));
+  const ownDay = () => (own ??= numberOr(nextBrewDay(scales.sight.index, batch.id)));
+  return (place) => weighPlace(scales, batch, place, ownDay);
 }
 
 const numberOr = (day: Day | null): number => (day === null ? NONE : dayNumber(day));

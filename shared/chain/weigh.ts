@@ -5,7 +5,7 @@ import { countDescent, countVessel } from './trial/counting.ts';
 import { Descents } from './trial/descents.ts';
 import { Judgement } from './trial/judgement.ts';
 import { at, column, NONE } from './trial/numbers.ts';
-import { Pairs, type Pair } from './trial/pairs.ts';
+import { isStill, Pairs, type Pair } from './trial/pairs.ts';
 import { rosterOf, type Roster } from './trial/roster.ts';
 import { Trial, type TrialPlace } from './trial/trial.ts';
 import { findIn, membersOf, vesselsChanged } from './trial/vesselDays.ts';
@@ -79,6 +79,11 @@ export class Scales {
     return at(this.#descents.generation, this.roster.numberOf(batchId));
   }
 
+  /** To be called between one batch's places and the next one's, so that memory stays small. */
+  forget(): void {
+    this.#pairs.forget();
+  }
+
   /** What putting a batch somewhere would change. */
   weigh(batch: number, place: TrialPlace): Weighed {
     this.#trial.put(batch, place);
@@ -149,7 +154,7 @@ export class Scales {
   /** Judges a link as the trial stands; the known standing where nothing of it differs. */
   #judge(batch: number, known: Standing | undefined): Standing {
     const cake = at(this.#trial.now.before, batch);
-    const pair = cake === NONE ? null : this.#pairs.judge(cake, batch);
+    const pair = cake === NONE ? null : this.#pairOf(cake, batch, known?.pair);
     if (!pair) return NO_LINK;
     const inherited = at(this.#descents.inherited, batch);
     const generation = at(this.#descents.generation, batch);
@@ -161,6 +166,13 @@ export class Scales {
     if (isOld && known.judgement?.counts === counts) return known;
     const judgement = new Judgement(counts, pair, around);
     return { pair, inherited, generation, find, judgement };
+  }
+
+  #pairOf(cake: number, batch: number, known: Pair | null | undefined): Pair | null {
+    const trial = this.#trial;
+    return known && !trial.relinked.includes(batch) && isStill(known, trial, cake, batch)
+      ? known
+      : this.#pairs.judge(cake, batch);
   }
 
   #findOf(batch: number): number {

@@ -151,7 +151,6 @@ describe('the move that would help most', () => {
         const best = bestMove(board);
         const steps = [...stepsOf(board)];
         expect(JSON.stringify(steps.at(-1))).toBe(JSON.stringify(best));
-        expect(steps.length).toBeLessThanOrEqual(board.batches.length + 1);
         if (!best) {
           expect(most).toEqual([0, 0]);
           return;

@@ -42,18 +42,22 @@ export class Pairs {
   readonly #trial: Trial;
   readonly #sight: LinkSight;
   /** By the earlier batch, then by the later. */
-  readonly #known: Pair[][][];
+  #known: Pair[][][] = [];
 
   constructor(trial: Trial, sight: Sight) {
     this.#trial = trial;
     this.#sight = pairSight(trial, sight);
-    this.#known = trial.roster.batches.map(() => []);
+  }
+
+  /** Lets go of what was judged: other batches' trials seldom meet it again. */
+  forget(): void {
+    this.#known = [];
   }
 
   /** Null where the yeast is not on the board. */
   judge(cake: number, batch: number): Pair | null {
     const known = ((this.#known[cake] ??= [])[batch] ??= []);
-    for (const pair of known) if (isStill(pair.meeting, this.#trial, cake, batch)) return pair;
+    for (const pair of known) if (isStill(pair, this.#trial, cake, batch)) return pair;
     const pair = this.#judged(cake, batch, meetingOf(this.#trial, cake, batch));
     if (pair) known.push(pair);
     return pair;
@@ -129,7 +133,7 @@ function meetingOf({ now }: Trial, cake: number, batch: number): Meeting {
 }
 
 /** True where two batches meet in a trial as they did before. */
-function isStill(meeting: Meeting, { now }: Trial, cake: number, batch: number): boolean {
+export function isStill({ meeting }: Pair, { now }: Trial, cake: number, batch: number): boolean {
   const from = at(now.brewDay, cake);
   return (
     meeting.brewedAfter === daysFrom(from, at(now.brewDay, batch)) &&
