@@ -13,7 +13,7 @@ export function TopBar() {
       <Link to={brewery.path()} aria-label="Barmkin, to the board" className="rounded-lg">
         <Wordmark />
       </Link>
-      <nav aria-label="Pages" className="flex gap-1 max-tablet:hidden">
+      <nav aria-label="Pages" className="flex gap-1 max-tablet:hidden print:hidden">
         {PAGES.map((page) => (
           <NavLink
             key={page.name}

@@ -9,7 +9,7 @@ export function BatchActions({ batch }: { batch: Batch }) {
   const { can } = useBoardView();
   if (!can.moveBatches && !can.editBatches) return null;
   return (
-    <div className="mb-0.5 -ml-1.5 flex items-center">
+    <div className="mb-0.5 -ml-1.5 flex items-center print:hidden">
       {can.moveBatches && batch.stage === 'pencilled' && (
         <>
           <LiftHandle batchId={batch.id} />

@@ -13,7 +13,7 @@ export function BestMove() {
   const put = usePut();
   if (judged.totals.hold + judged.totals.mind === 0) return null;
   return (
-    <div className="flex min-h-9 basis-full items-center gap-3 text-small text-ink2">
+    <div className="flex min-h-9 basis-full print:hidden items-center gap-3 text-small text-ink2">
       {move === null && <p>No move of a single batch would leave fewer holds or minds.</p>}
       {move !== null && move !== 'weighing' && (
         <>

@@ -19,7 +19,7 @@ export function BoardHead() {
         </h1>
         <p className="mt-0.5 text-ink2">{seasonLine(judged.totals)}</p>
       </div>
-      <div className="flex flex-wrap items-center gap-2.5">
+      <div className="flex flex-wrap items-center gap-2.5 print:hidden">
         {can.moveBatches && <UndoButtons />}
         {can.editChains && (
           <Button onClick={() => open({ kind: 'new', what: 'chain' })}>New shelf</Button>

@@ -33,7 +33,7 @@ export function SidePanel() {
     return (
       <aside
         aria-label="Beside the shelves"
-        className="thumb-slim sticky top-0 h-dvh w-[372px] shrink-0 overflow-y-auto border-l border-line bg-paper"
+        className="thumb-slim print:hidden sticky top-0 h-dvh w-[372px] shrink-0 overflow-y-auto border-l border-line bg-paper"
       >
         {link ?? <AtRest lift={lift} />}
       </aside>
@@ -42,7 +42,7 @@ export function SidePanel() {
     return (
       <aside
         aria-label="Opened link"
-        className="fixed inset-y-0 right-0 z-40 w-full overflow-y-auto overscroll-contain border-l border-line bg-paper shadow-card tablet:w-[404px]"
+        className="print:hidden fixed inset-y-0 right-0 z-40 w-full overflow-y-auto overscroll-contain border-l border-line bg-paper shadow-card tablet:w-[404px]"
       >
         {link}
       </aside>
@@ -68,7 +68,7 @@ function Below({ lift }: { lift: ReturnType<typeof useLiftPanel> }) {
   return (
     <aside
       aria-label="Lifting"
-      className="thumb-slim fixed inset-x-0 bottom-0 z-30 max-h-[38dvh] overflow-y-auto overscroll-contain rounded-t-2xl border-t border-line bg-paper shadow-card max-tablet:bottom-[72px] tablet:right-4 tablet:left-auto tablet:w-[404px] tablet:rounded-2xl tablet:border"
+      className="thumb-slim print:hidden fixed inset-x-0 bottom-0 z-30 max-h-[38dvh] overflow-y-auto overscroll-contain rounded-t-2xl border-t border-line bg-paper shadow-card max-tablet:bottom-[72px] tablet:right-4 tablet:left-auto tablet:w-[404px] tablet:rounded-2xl tablet:border"
     >
       <Lifting lift={lift} />
     </aside>

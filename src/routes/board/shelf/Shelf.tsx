@@ -34,7 +34,7 @@ function ShelfRow({ chain, batches }: { chain: Chain; batches: readonly Batch[] 
       ref={ref}
       aria-labelledby={headingId}
       data-chain={chain.id}
-      className="grid grid-cols-[148px_minmax(0,1fr)] pt-3 [contain-intrinsic-size:auto_230px] [content-visibility:auto]"
+      className="grid grid-cols-[148px_minmax(0,1fr)] pt-3 [contain-intrinsic-size:auto_230px] [content-visibility:auto] print:break-inside-avoid print:[content-visibility:visible]"
     >
       <ShelfLabel chain={chain} headingId={headingId} />
       <ShelfRun label={`Batches on ${chain.name}`}>

@@ -34,15 +34,18 @@ export function ShelfRun({ label, children }: { label: string; children: ReactNo
   return (
     <div
       ref={ref}
-      className="shelf-run thumb-slim relative -mt-3 -ml-10 pt-3 overflow-x-auto overflow-y-hidden overscroll-x-contain"
+      className="shelf-run thumb-slim relative -mt-4 -ml-10 pt-4 overflow-x-auto overflow-y-hidden overscroll-x-contain"
     >
-      <div className="relative w-max min-w-full pl-11" style={{ height: SHELF_HEIGHT }}>
+      <div
+        className="relative w-max min-w-full pl-11 print:w-full"
+        style={{ minHeight: SHELF_HEIGHT }}
+      >
         <div
           aria-hidden
-          className="shelf-line absolute right-0 left-10"
+          className="shelf-line absolute right-0 left-10 print:hidden"
           style={{ top: SHELF.top, height: SHELF.board }}
         />
-        <ol aria-label={label} className="flex">
+        <ol aria-label={label} className="flex print:flex-wrap">
           {children}
         </ol>
       </div>
