@@ -13,7 +13,7 @@ interface ChainChipsProps {
 export function ChainChips({ chosen, onChoose }: ChainChipsProps) {
   const { index, judged } = useBoardView();
   return (
-    <nav aria-label="Shelves" className="overflow-x-auto [scrollbar-width:none]">
+    <nav aria-label="Shelves" className="relative overflow-x-auto [scrollbar-width:none]">
       <ul className="flex w-max gap-2 px-[18px] pt-3 pb-2.5">
         {index.chains.map((chain) => (
           <Chip
