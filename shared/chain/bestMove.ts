@@ -1,6 +1,7 @@
 import type { Batch } from '../api/batch.ts';
 import { isPencilled, type BoardFacts, type BoardIndex } from './board.ts';
-import { compareGaps, gapOf, weigherOf, type Gap } from './gaps.ts';
+import { compareGaps, weigherOf, type Gap } from './gaps.ts';
+import { JudgedGap } from './judgedGap.ts';
 import { placesFor, type Place } from './gapPlaces.ts';
 import { chainsThatCanHelp } from './reachOfMoves.ts';
 import type { Judgement } from './trial/judgement.ts';
@@ -79,7 +80,7 @@ function* bestOf(
     const weighed = weigh(place);
     const fall = fallOf(weighed.changed);
     if (!helps(fall)) continue;
-    const option = { batchId: batch.id, gap: gapOf(weighed), fall };
+    const option = { batchId: batch.id, gap: new JudgedGap(weighed), fall };
     if (best === null || isBetter(option, best)) best = option;
     else if (!isBetter(best, option) && compareGaps(option.gap, best.gap) < 0) best = option;
   }
@@ -139,10 +140,11 @@ function seasonOf(scales: Scales): Tally {
 }
 
 function told(index: BoardIndex, before: Tally, { batchId, gap, fall }: Option): BestMove {
+  gap.best = true;
   const after = { holds: before.holds - fall[0], minds: before.minds - fall[1] };
   const name = index.batch(batchId)?.name ?? '';
   const what = `Move ${name} ${whither(index, gap)}: ${said(after)} in the season instead of ${said(before)}.`;
-  return { batchId, gap: { ...gap, best: true }, before, after, what };
+  return { batchId, gap, before, after, what };
 }
 
 function whither(index: BoardIndex, gap: Gap): string {

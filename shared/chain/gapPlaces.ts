@@ -27,14 +27,15 @@ function shelfPlaces(index: BoardIndex, batch: Batch, chainId: string): Place[] 
   const mates = standsAt < 0 ? all : all.toSpliced(standsAt, 1);
   const open = firstOpenPlace(mates);
   const isOwnBranch = descendsFrom(index, chainId, batch.id, null);
-  const place = (at: number): Place => {
+  const places: Place[] = [];
+  for (let at = 0; at <= mates.length; at += 1) {
     const afterId = at === 0 ? null : (mates[at - 1]?.id ?? null);
     const here = at === standsAt;
     const locked = here ? null : at < open ? 'poured' : isOwnBranch ? 'own-branch' : null;
     const key = `${chainId}:${afterId ?? 'first'}`;
-    return { key, chainId, toChainId: chainId, afterId, added: null, here, locked };
-  };
-  return Array.from({ length: mates.length + 1 }, (_, at) => place(at));
+    places.push({ key, chainId, toChainId: chainId, afterId, added: null, here, locked });
+  }
+  return places;
 }
 
 function newShelfPlace(index: BoardIndex, batch: Batch): Place {

@@ -4,12 +4,12 @@ import { dayNumber, dayOf } from '../units/day.ts';
 import { isPencilled, order, type BoardFacts } from './board.ts';
 import { nextBrewDay } from './dates.ts';
 import { placesFor, type Place } from './gapPlaces.ts';
-import { GapVerdict } from './gapVerdict.ts';
+import { JudgedGap, type WeighedPlace } from './judgedGap.ts';
 import type { Lock } from './plan.ts';
 import { NONE } from './trial/numbers.ts';
 import { newShelfOf } from './trial/roster.ts';
 import type { TrialPlace } from './trial/trial.ts';
-import { Scales, type ChangedLink } from './weigh.ts';
+import { Scales } from './weigh.ts';
 
 /** A place for a lifted batch, judged as the drop would make it. */
 export interface Gap {
@@ -52,19 +52,12 @@ export function judgeGaps(board: BoardFacts, batchId: string): Gap[] {
   const { index } = scales.sight;
   const batch = index.batch(batchId);
   if (!batch || !isPencilled(batch)) return [];
-  const gaps = placesFor(index, batch).map(weigherOf(scales, batch)).map(gapOf);
+  const gaps = placesFor(index, batch)
+    .map(weigherOf(scales, batch))
+    .map((weighed) => new JudgedGap(weighed));
   const best = bestOf(gaps);
   if (best) best.best = true;
   return gaps;
-}
-
-/** A place and what putting the batch there would change. */
-export interface WeighedPlace {
-  place: Place;
-  changed: readonly ChangedLink[];
-  /** Of the batch there. */
-  brewOn: Day | null;
-  generation: number | null;
 }
 
 /** Weighs the places of one pencilled batch. */
@@ -118,33 +111,6 @@ function asItStands(scales: Scales, batch: Batch, place: Place): WeighedPlace {
   const generation = generationAt(batch.chainId, scales.generationOf(batch.id));
   return { place, changed, brewOn: batch.brewOn, generation };
 }
-
-export function gapOf({ place, changed, brewOn, generation }: WeighedPlace): Gap {
-  const worst = new GapVerdict(changed);
-  return {
-    key: place.key,
-    toChainId: place.toChainId,
-    afterBatchId: place.afterId,
-    here: place.here,
-    locked: place.locked,
-    verdict: worst.verdict,
-    holds: worst.holds,
-    minds: worst.minds,
-    brewOn,
-    get reasons() {
-      return worst.reasons();
-    },
-    get colourShift() {
-      return worst.colourShift();
-    },
-    best: false,
-    generation,
-    changes: place.here ? [] : changesOf(changed),
-  };
-}
-
-const changesOf = (changed: readonly ChangedLink[]): Gap['changes'] =>
-  changed.map(({ laterId, after }) => ({ laterId, verdict: after?.verdict ?? 'pour' }));
 
 /**
  * Best first: fewest holds, then fewest minds, smallest colour shift, earliest date, order on the

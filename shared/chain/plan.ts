@@ -132,5 +132,5 @@ export const withoutBatch = (batches: readonly Batch[], id: string): Batch[] =>
   batches.filter((batch) => batch.id !== id);
 
 /** The place behind a batch; first where there is none. −1 never comes of a batch in the list. */
-export const placeAfter = (batches: readonly Batch[], afterId: string | null): number =>
+const placeAfter = (batches: readonly Batch[], afterId: string | null): number =>
   afterId === null ? 0 : batches.findIndex((batch) => batch.id === afterId) + 1;

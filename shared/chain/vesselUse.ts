@@ -24,7 +24,7 @@ export const vesselIdOf = (batch: Batch, layout: Pick<Layout, 'chain'>): string 
   batch.vesselId ??
   (batch.chainId === null ? null : (layout.chain(batch.chainId)?.vesselId ?? null));
 
-export function stayOf(batch: Batch): Stay | null {
+function stayOf(batch: Batch): Stay | null {
   if (batch.brewOn === null || !isScheduled(batch)) return null;
   return { batchId: batch.id, name: batch.name, from: batch.brewOn, until: rackDay(batch) };
 }
