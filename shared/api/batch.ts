@@ -114,6 +114,8 @@ export const batch = z.strictObject({
   /** Place in its chain or on the bench, from 0. */
   place: z.number().int().min(0),
   stage,
+  /** What went wrong, of a scrapped batch; else empty. */
+  scrapReason: f.note,
   read: readFacts,
   /** Null while pencilled. */
   cake: cake.nullable(),

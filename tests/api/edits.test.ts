@@ -162,9 +162,10 @@ describe('a stage', () => {
     expect(await now(a, { stage: 'scrapped', reason: 'Smelt of plaster' })).toMatchObject({
       stage: 'scrapped',
       chainId: null,
+      scrapReason: 'Smelt of plaster',
     });
     expect(await namesOn(head(), season.slug, season.chainA)).toEqual(['B']);
-    await now(a, { stage: 'pencilled' });
+    expect(await now(a, { stage: 'pencilled' })).toMatchObject({ scrapReason: '' });
     expect(await namesOn(head(), season.slug, null)).toEqual(['A']);
   });
 });

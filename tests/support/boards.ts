@@ -143,6 +143,7 @@ export function makeBatch(number: number, own: Partial<Batch> = {}): Batch {
     chainId: null,
     place: 0,
     stage: 'pencilled',
+    scrapReason: '',
     read: { volumeL: null, og: null, fg: null, rackedOn: null },
     cake: null,
     link: UNSETTLED_LINK,

@@ -5,7 +5,7 @@ import type { cake } from '../../db/schema/cake.ts';
 /** A batch's columns that anybody sees. */
 export type BatchRow = Omit<
   typeof batch.$inferSelect,
-  'breweryId' | 'seasonId' | 'shelfId' | 'createdAt' | 'scrapReason'
+  'breweryId' | 'seasonId' | 'shelfId' | 'createdAt'
 >;
 export type CakeRow = typeof cake.$inferSelect;
 
@@ -37,6 +37,7 @@ export function presentBatch(row: BatchRow, itsCake: CakeRow | null): Batch {
     chainId: row.chainId,
     place: row.place ?? 0,
     stage: row.stage,
+    scrapReason: row.scrapReason,
     read: {
       volumeL: row.readVolumeL,
       og: row.readOg,

@@ -39,7 +39,7 @@ export async function loadBoardRows(
 }
 
 /** Columns that a board does not show. */
-const UNSEEN = ['breweryId', 'seasonId', 'shelfId', 'createdAt', 'scrapReason'];
+const UNSEEN = ['breweryId', 'seasonId', 'shelfId', 'createdAt'];
 
 const LISTS = {
   blockedDays: jsonList<string>('d.day', 'blocked_day d where d.season_id = season.id', 'd.day'),

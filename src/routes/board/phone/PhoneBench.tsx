@@ -2,6 +2,7 @@ import type { Batch } from '#shared/api/batch.ts';
 import { Swatch } from '../../../components/drawn/Swatch.tsx';
 import { BatchMenu } from '../batch/BatchMenu.tsx';
 import { BatchName } from '../batch/BatchName.tsx';
+import { Scrapped } from '../batch/Scrapped.tsx';
 import { MoveMenu } from '../lift/MoveMenu.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { beerFacts, count } from '../view/words.ts';
@@ -15,7 +16,7 @@ export function PhoneBench() {
       <PhoneHead title="On the bench">
         {count(index.bench.length, 'batch', 'batches')} without a cake
       </PhoneHead>
-      <ul className="mt-4 grid gap-2.5 px-[18px]">
+      <ul className="mt-4 grid grid-cols-1 gap-2.5 px-[18px]">
         {index.bench.map((batch) => (
           <BenchRow key={batch.id} batch={batch} />
         ))}
@@ -25,6 +26,9 @@ export function PhoneBench() {
           Nothing waits here. New batches stay on the bench until they are moved to a shelf.
         </p>
       )}
+      <div className="mt-5 px-[18px]">
+        <Scrapped />
+      </div>
     </>
   );
 }

@@ -2,6 +2,7 @@ import type { Batch } from '#shared/api/batch.ts';
 import { Swatch } from '../../../components/drawn/Swatch.tsx';
 import { BatchActions } from '../batch/BatchActions.tsx';
 import { BatchName } from '../batch/BatchName.tsx';
+import { Scrapped } from '../batch/Scrapped.tsx';
 import { GapSlot } from '../lift/GapSlot.tsx';
 import { useIsLifted } from '../lift/liftContext.ts';
 import { useUnfolding } from '../lift/useUnfolding.ts';
@@ -16,7 +17,7 @@ export function Bench() {
     <section
       ref={ref}
       aria-labelledby="bench"
-      className="sticky bottom-0 z-20 mt-auto flex items-center gap-3 border-t-[3px] border-shelf2 bg-bench px-7 pt-2.5 pb-3"
+      className="sticky print:static bottom-0 z-20 mt-auto flex items-center gap-3 border-t-[3px] border-shelf2 bg-bench px-7 pt-2.5 pb-3"
     >
       <h2 id="bench" className="w-[136px] shrink-0 text-h3 leading-[1.15]">
         On the bench
@@ -24,7 +25,7 @@ export function Bench() {
           {can.moveBatches ? 'lift onto a shelf' : 'without a cake'}
         </small>
       </h2>
-      <ul className="thumb-slim flex min-w-0 flex-1 gap-3 overflow-x-auto py-1">
+      <ul className="thumb-slim flex min-w-0 flex-1 gap-3 overflow-x-auto py-1 print:flex-wrap">
         {index.bench.map((batch) => (
           <BenchBatch key={batch.id} batch={batch} />
         ))}
@@ -34,6 +35,7 @@ export function Bench() {
           </li>
         )}
       </ul>
+      <Scrapped />
       <div className="pointer-events-none absolute inset-0 lifting:pointer-events-auto">
         <GapSlot gapKey="bench" chainId="bench" afterBatchId={null} vesselShape="bucket" />
       </div>
