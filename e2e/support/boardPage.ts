@@ -20,7 +20,7 @@ export class BoardPage {
 
   async open(slug: string): Promise<void> {
     await this.page.goto(`/b/${slug}`);
-    await expect(this.page.locator('[data-batch]').first()).toBeVisible();
+    await expect(this.page.locator('[data-batch]').first()).toBeVisible({ timeout: 20_000 });
   }
 
   shelf(name: string): Locator {
