@@ -5,14 +5,14 @@ import { leaveBrewery, writeBrewery, type TestBrewery } from './brewery.ts';
 import { writeBoard, type BoardPlan, type WrittenBoard } from './board.ts';
 import { sessionCookies, sharedServer, type RunningServer } from './server.ts';
 
-interface Brewing extends TestBrewery {
+export interface Brewing extends TestBrewery {
   /** Puts shelves and batches on the board. */
   write(plan: BoardPlan): Promise<WrittenBoard>;
   /** Signs a browser in as the member of a role. */
   signIn(context: BrowserContext, role: Role): Promise<void>;
 }
 
-interface Fixtures {
+export interface Fixtures {
   /** Console errors that this test expects; anything else on the console fails it. */
   expectedErrors: RegExp[];
   brewery: Brewing;
@@ -21,7 +21,7 @@ interface Fixtures {
   watch: void;
 }
 
-interface WorkerFixtures {
+export interface WorkerFixtures {
   server: RunningServer;
   db: Db;
 }

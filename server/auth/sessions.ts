@@ -1,6 +1,7 @@
-import { and, eq, gt, lt } from 'drizzle-orm';
+import { and, eq, gt, lt, sql } from 'drizzle-orm';
 import type { Request } from 'express';
 import type { Db, Tx } from '../db/client.ts';
+import { oncePer } from '../db/oncePer.ts';
 import { person, session } from '../db/schema/people.ts';
 import type { Clock } from '../clock.ts';
 import { giveCookie, SESSION_MS, takeCookie, tokenIn } from './cookie.ts';
@@ -48,11 +49,7 @@ export async function findSignedIn(db: Db, clock: Clock, req: Request): Promise<
   if (token === null) return null;
   const tokenHash = hashToken(token);
   const now = clock.now();
-  const [found] = await db
-    .select({ person, expiresAt: session.expiresAt })
-    .from(session)
-    .innerJoin(person, eq(person.id, session.personId))
-    .where(and(eq(session.tokenHash, tokenHash), gt(session.expiresAt, now)));
+  const [found] = await sessionQuery(db).execute({ tokenHash, now });
   if (!found) return null;
   if (found.expiresAt.getTime() < now.getTime() + SESSION_MS - MS_A_DAY) {
     const expiresAt = new Date(now.getTime() + SESSION_MS);
@@ -61,6 +58,20 @@ export async function findSignedIn(db: Db, clock: Clock, req: Request): Promise<
   }
   return { person: found.person, tokenHash };
 }
+
+const sessionQuery = oncePer((db: Db) =>
+  db
+    .select({ person, expiresAt: session.expiresAt })
+    .from(session)
+    .innerJoin(person, eq(person.id, session.personId))
+    .where(
+      and(
+        eq(session.tokenHash, sql.placeholder('tokenHash')),
+        gt(session.expiresAt, sql.placeholder('now')),
+      ),
+    )
+    .prepare('session'),
+);
 
 /** Sessions that have run out are of no use to anybody. */
 export async function purgeSessions(db: Db, clock: Clock): Promise<void> {

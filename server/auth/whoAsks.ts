@@ -1,7 +1,9 @@
-import { and, eq } from 'drizzle-orm';
+import { and, eq, sql } from 'drizzle-orm';
 import type { Request } from 'express';
 import type { Role } from '#shared/api/people.ts';
 import type { Deps } from '../deps.ts';
+import type { Db } from '../db/client.ts';
+import { oncePer } from '../db/oncePer.ts';
 import { brewery, membership } from '../db/schema/brewery.ts';
 import { season } from '../db/schema/season.ts';
 import { notFound, problem } from '../problems.ts';
@@ -40,14 +42,24 @@ async function findMember(
 ): Promise<Member> {
   const slug = req.params.brewery;
   if (typeof slug !== 'string' || slug.length > 80 || slug.includes('\0')) throw notFound();
-  const [found] = await db
+  const [found] = await memberQuery(db).execute({ slug, personId: person.id });
+  if (!found) throw notFound();
+  return { person, ...found };
+}
+
+const memberQuery = oncePer((db: Db) =>
+  db
     .select({ brewery, role: membership.role, seasonId: season.id })
     .from(brewery)
     .innerJoin(membership, eq(membership.breweryId, brewery.id))
     .innerJoin(season, eq(season.breweryId, brewery.id))
-    .where(and(eq(brewery.slug, slug), eq(membership.personId, person.id)))
+    .where(
+      and(
+        eq(brewery.slug, sql.placeholder('slug')),
+        eq(membership.personId, sql.placeholder('personId')),
+      ),
+    )
     .orderBy(season.createdAt)
-    .limit(1);
-  if (!found) throw notFound();
-  return { person, ...found };
-}
+    .limit(1)
+    .prepare('member'),
+);

@@ -54,11 +54,26 @@ export async function startTestServer({ port, logFile, settings = {} }) {
       },
       logFile,
     );
-  const server = await start(port);
+  let server = await start(port);
   const close = async () => {
     await server.stop();
     await sql(`drop database if exists ${name} with (force)`);
     await leave();
   };
-  return { ...server, databaseUrl, keys: KEYS, startAgain: start, close };
+  return {
+    url: server.url,
+    databaseUrl,
+    keys: KEYS,
+    ended: server.ended,
+    /** Ends the server as a power cut would. */
+    kill: async () => {
+      process.kill(server.pid, 'SIGKILL');
+      await server.ended;
+    },
+    /** Starts it again at the same address, after a kill. */
+    again: async () => {
+      server = await start(Number(new URL(server.url).port));
+    },
+    close,
+  };
 }

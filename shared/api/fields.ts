@@ -19,7 +19,7 @@ export const day = z
 export const name = z
   .string()
   .trim()
-  .min(1, 'Give it a name')
+  .min(1, 'Write a name')
   .max(60, 'Use at most 60 characters')
   // oxlint-disable-next-line no-control-regex -- which are what is looked for
   .regex(/^[^\u0000-\u001f\u007f-\u009f]*$/, 'Leave out control characters')

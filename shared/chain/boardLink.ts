@@ -81,18 +81,18 @@ export function linkInput(laterId: string, sight: Sight): LinkInput | null {
 /** The link of two batches that stand together; null where the yeast is not on the board. */
 export function linkBetween(earlier: Batch, later: Batch, sight: Sight): LinkInput | null {
   const { index, layout } = sight;
-  const yeasts = yeastsOf(earlier, later, sight);
-  if (!yeasts) return null;
+  const yeast = cakeYeastOf(later, sight);
+  if (!yeast) return null;
   const { generation, inherited } = sight.descent(later);
   const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
   const vessel = chain?.vesselId ? index.vessels.get(chain.vesselId) : undefined;
-  const pour = pourOf(earlier, later, sight, yeasts.other);
+  const pour = pourOf(earlier, later, sight);
   const taken = sight.use(later.id)?.takenBy;
   return {
     earlier: sight.facts(earlier),
     later: sight.facts(later),
     pour,
-    yeast: yeasts.cake,
+    yeast,
     inherited,
     rules: sight.rules,
     board: boardContext(earlier, taken),
@@ -103,24 +103,27 @@ export function linkBetween(earlier: Batch, later: Batch, sight: Sight): LinkInp
   };
 }
 
-/** The yeast of the cake, and the one the later batch asks for where that is another. */
-function yeastsOf(earlier: Batch, later: Batch, { index, layout, yeastFacts }: Sight) {
-  const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
-  const source = earlier.chainId === null ? undefined : layout.chain(earlier.chainId);
-  const cake = index.yeasts.get((source ?? chain)?.yeastId ?? '');
-  if (!cake) return null;
-  const wanted = index.yeasts.get(later.yeastId ?? chain?.yeastId ?? '');
-  const other =
-    wanted && wanted.id !== cake.id ? { kind: wanted.kind, character: wanted.character } : null;
-  return { cake: yeastFacts(cake), other };
+/** The yeast of the cake that goes under a batch: its source's, which is its chain's but for branches. */
+export function cakeYeastOf(later: Batch, { index, layout, yeastFacts }: Sight): YeastFacts | null {
+  const yeast = index.yeasts.get(cakeYeastId(later, layout) ?? '');
+  return yeast ? yeastFacts(yeast) : null;
 }
 
-function pourOf(
-  earlier: Batch,
-  later: Batch,
-  sight: Sight,
-  otherYeast: PourFacts['otherYeast'] | null,
-): PourFacts {
+function cakeYeastId(later: Batch, layout: Layout): string | undefined {
+  const chainId = layout.predecessor(later.id)?.chainId ?? later.chainId;
+  return chainId === null ? undefined : layout.chain(chainId)?.yeastId;
+}
+
+/** The yeast that the later batch asks for where that is not the cake's. */
+function otherYeastOf(later: Batch, { index, layout }: Sight): PourFacts['otherYeast'] | null {
+  const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
+  const wanted = index.yeasts.get(later.yeastId ?? chain?.yeastId ?? '');
+  if (!wanted || wanted.id === cakeYeastId(later, layout)) return null;
+  return { kind: wanted.kind, character: wanted.character };
+}
+
+function pourOf(earlier: Batch, later: Batch, sight: Sight): PourFacts {
+  const otherYeast = otherYeastOf(later, sight);
   const own = later.vesselId ? sight.index.vessels.get(later.vesselId) : undefined;
   const beersSinceCleaning = sight.use(later.id)?.beersSinceCleaning;
   return {

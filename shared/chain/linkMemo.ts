@@ -41,6 +41,7 @@ export class Judgement {
 export class LinkMemo {
   readonly #inheritances: Inheritances;
   readonly #pairs = new Map<string, Map<string, Map<string, Judgement | null>>>();
+  readonly #shelves = new Map<string | null, number>();
 
   constructor(inheritances: Inheritances) {
     this.#inheritances = inheritances;
@@ -68,13 +69,21 @@ export class LinkMemo {
     const handed = this.#inheritances.number(inherited);
     const taken = use?.takenBy === undefined ? 0 : 1;
     const days = `${daysFrom(earlier, later.brewOn)},${daysFrom(earlier, later.link.takenOn)}`;
-    const shelf = sight.layout.chain(later.chainId ?? '')?.position ?? -1;
-    return `${shelf},${generation},${handed},${taken},${use?.beersSinceCleaning},${days}`;
+    const shelves = `${this.#shelf(earlier)},${this.#shelf(later)}`;
+    return `${shelves},${generation},${handed},${taken},${use?.beersSinceCleaning},${days}`;
+  }
+
+  /** A number for the batch's chain: yeast and vessel go with it. */
+  #shelf({ chainId }: Batch): number {
+    const known = this.#shelves.get(chainId);
+    if (known !== undefined) return known;
+    this.#shelves.set(chainId, this.#shelves.size);
+    return this.#shelves.size - 1;
   }
 }
 
 /** Days from the earlier brew day; the day itself where there is none to count from. */
-function daysFrom({ brewOn }: Batch, day: string | null): number | string | null {
+export function daysFrom({ brewOn }: Batch, day: string | null): number | string | null {
   return day === null || brewOn === null ? day : daysBetween(brewOn, day);
 }
 

@@ -1,5 +1,6 @@
 import type { Batch } from '../api/batch.ts';
 import type { Sight } from './boardLink.ts';
+import { isScheduled } from './dates.ts';
 import type { Draft } from './draft.ts';
 import { stayOf, useOfVessel, vesselIdOf, type Stay, type VesselUse } from './vesselUse.ts';
 
@@ -23,6 +24,8 @@ export class RevisedUses {
   /** By batch, only where the draft differs from the board. */
   in(draft: Draft): ReadonlyMap<string, VesselUse> {
     const revised = new Map<string, VesselUse>();
+    for (const row of draft.rows.values())
+      if (this.#base.use(row.id) && !isInVessel(row, draft)) revised.set(row.id, NO_VESSEL);
     for (const [vesselId, change] of this.#changes(draft))
       for (const [id, use] of this.#revised(vesselId, change)) revised.set(id, use);
     return revised;
@@ -71,6 +74,12 @@ export class RevisedUses {
     return uses;
   }
 }
+
+/** A batch that would be in no vessel, or without a day, finds nothing there. */
+const NO_VESSEL: VesselUse = { takenBy: undefined, beersSinceCleaning: undefined };
+
+const isInVessel = (row: Batch, draft: Draft): boolean =>
+  vesselIdOf(row, draft) !== null && row.brewOn !== null && isScheduled(row);
 
 const isSame = (was: VesselUse | undefined, now: VesselUse): boolean =>
   (was?.takenBy === undefined) === (now.takenBy === undefined) &&

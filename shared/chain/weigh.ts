@@ -1,12 +1,13 @@
 import type { Batch } from '../api/batch.ts';
 import type { BatchFacts, Inheritance } from '../rules/facts.ts';
+import { lineageStanding } from '../rules/lineage.ts';
 import type { Verdict } from '../rules/vocabulary.ts';
 import type { BoardFacts, Layout } from './board.ts';
-import { sightOf, type Sight } from './boardLink.ts';
+import { cakeYeastOf, sightOf, type Sight } from './boardLink.ts';
 import { descents, type Descent } from './descent.ts';
 import { inherit } from './inherit.ts';
 import { Inheritances } from './inheritances.ts';
-import { LinkMemo, type Judgement } from './linkMemo.ts';
+import { daysFrom, LinkMemo, type Judgement } from './linkMemo.ts';
 import type { Plan } from './plan.ts';
 import { RevisedUses } from './revisedUses.ts';
 
@@ -67,6 +68,7 @@ export class Scales {
     };
     const changed: ChangedLink[] = [];
     for (const laterId of new Set([...behind, ...relinked, ...uses.keys()])) {
+      if (!uses.has(laterId) && this.#onlyDescends(laterId, sight)) continue;
       const after = this.#judge(laterId, sight);
       const before = this.standing(laterId);
       if (before ?? after)
@@ -79,6 +81,30 @@ export class Scales {
     const later = sight.layout.batch(laterId);
     const earlier = sight.layout.predecessor(laterId);
     return later && earlier ? this.#memo.judge(earlier, later, sight) : null;
+  }
+
+  /** True of a link in which at most its descent is new, and no rule stands otherwise for that. */
+  #onlyDescends(laterId: string, sight: Sight): boolean {
+    const [was, now] = [this.sight.index.batch(laterId), sight.layout.batch(laterId)];
+    const before = this.sight.layout.predecessor(laterId);
+    const earlier = sight.layout.predecessor(laterId);
+    if (!was || !now || !before || before.id !== earlier?.id) return false;
+    if (was.chainId !== now.chainId || before.chainId !== earlier.chainId) return false;
+    if (!sameDays(before, was, earlier, now)) return false;
+    return this.#lineage(was, this.sight) === this.#lineage(now, sight);
+  }
+
+  #lineage(later: Batch, sight: Sight): string {
+    const { generation, inherited } = sight.descent(later);
+    const yeast = cakeYeastOf(later, sight);
+    if (!yeast) return '';
+    return lineageStanding({
+      b: this.sight.facts(this.sight.index.batch(later.id) ?? later),
+      yeast,
+      rules: sight.rules,
+      generation: generation ?? undefined,
+      inherited,
+    });
   }
 
   /** Of a batch's facts a draft changes only the brew day. Without a new day none is changed. */
@@ -120,6 +146,14 @@ function behindChanges(base: Layout, draft: Plan['draft']): Set<string> {
     hangOn(id);
   }
   return behind;
+}
+
+/** True where the days from brew day to brew day, and to the taking, are as they were. */
+function sameDays(before: Batch, was: Batch, earlier: Batch, now: Batch): boolean {
+  return (
+    daysFrom(before, was.brewOn) === daysFrom(earlier, now.brewOn) &&
+    daysFrom(before, was.link.takenOn) === daysFrom(earlier, now.link.takenOn)
+  );
 }
 
 const RANK: Record<Verdict, number> = { pour: 0, mind: 1, hold: 2 };

@@ -1,3 +1,4 @@
+import type { Lineage } from './linkState.ts';
 import { namesOf } from './names.ts';
 import type { Rule } from './outcome.ts';
 import { listed } from './say.ts';
@@ -6,10 +7,10 @@ import { ALLERGENS, type Allergen } from './vocabulary.ts';
 import { ALLERGEN_WORDS, capital } from './words.ts';
 
 /** An allergen of an earlier beer is in this one, whatever the dilution. Never softened. */
-export const allergen: Rule<Undeclared<Allergen>> = {
+export const allergen = {
   id: 'allergen',
 
-  judge({ inherited, b }) {
+  judge({ inherited, b }: Lineage) {
     return undeclared(
       inherited.allergens,
       inherited.allergensUnknown ?? false,
@@ -30,4 +31,4 @@ export const allergen: Rule<Undeclared<Allergen>> = {
       basis: 'Regulation (EU) No 1169/2011, Annex II; labelling law is local.',
     };
   },
-};
+} satisfies Rule<Undeclared<Allergen>>;

@@ -1,5 +1,5 @@
 import { points } from '../units/gravity.ts';
-import type { LinkState } from './linkState.ts';
+import type { Lineage } from './linkState.ts';
 import { namesOf } from './names.ts';
 import { hold, measure, mind, PASSED, unchecked, type Rule } from './outcome.ts';
 import { SG_15_PLATO, SG_18_PLATO } from './rounding.ts';
@@ -10,10 +10,10 @@ interface Detail {
 }
 
 /** B's yeast has been used more often than it should, the less so after a strong beer. */
-export const generationRule: Rule<Detail> = {
+export const generationRule = {
   id: 'generation',
 
-  judge(link) {
+  judge(link: Lineage) {
     const { generation, inherited, rules } = link;
     if (generation === undefined) return unchecked(['firstGeneration']);
     const limit = limitAfter(inherited.strongestOg ?? 1, link);
@@ -49,13 +49,12 @@ export const generationRule: Rule<Detail> = {
         '(EEJET 2021, doi 10.15587/1729-4061.2021.248126); 7 to 10 otherwise is common practice.',
     };
   },
-};
+} satisfies Rule<Detail>;
 
-const ownLimit = ({ yeast, rules }: LinkState): number =>
-  yeast.generationLimit ?? rules.generations;
+const ownLimit = ({ yeast, rules }: Lineage): number => yeast.generationLimit ?? rules.generations;
 
 /** The highest generation after a beer of this original gravity. */
-function limitAfter(og: number, link: LinkState): number {
+function limitAfter(og: number, link: Lineage): number {
   const reached = points(og);
   let limit = ownLimit(link);
   if (reached >= points(SG_15_PLATO)) limit = Math.min(limit, link.rules.generationsFrom15P);

@@ -9,11 +9,21 @@ export interface LinkBlend {
 }
 
 export function linkBlend(a: BatchFacts, b: BatchFacts, retainedL: number | undefined): LinkBlend {
-  const mix = (xB: number | undefined, xA: number | undefined): number | undefined => {
-    if (xB === undefined || retainedL === 0) return xB;
-    if (retainedL === undefined || b.volumeL === undefined || xA === undefined) return undefined;
-    return blend(b.volumeL, xB, retainedL, xA);
-  };
   // What stays of A is beer, so its gravity is the final one.
-  return { og: mix(b.og, a.fg), srm: mix(b.srm, a.srm), ibu: mix(b.ibu, a.ibu) };
+  return {
+    og: mixed(b.volumeL, b.og, retainedL, a.fg),
+    srm: mixed(b.volumeL, b.srm, retainedL, a.srm),
+    ibu: mixed(b.volumeL, b.ibu, retainedL, a.ibu),
+  };
+}
+
+function mixed(
+  volumeL: number | undefined,
+  xB: number | undefined,
+  retainedL: number | undefined,
+  xA: number | undefined,
+): number | undefined {
+  if (xB === undefined || retainedL === 0) return xB;
+  if (retainedL === undefined || volumeL === undefined || xA === undefined) return undefined;
+  return blend(volumeL, xB, retainedL, xA);
 }

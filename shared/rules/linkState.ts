@@ -1,6 +1,6 @@
 import { points } from '../units/gravity.ts';
 import { abv } from '../units/alcohol.ts';
-import { beerLab, GLASS_CM } from '../units/colour.ts';
+import { beerLab, GLASS_CM, type Lab } from '../units/colour.ts';
 import { deltaE00 } from '../units/deltaE.ts';
 import { pitchNeed } from '../yeast/pitching.ts';
 import { inherit } from '../chain/inherit.ts';
@@ -40,6 +40,7 @@ export class LinkState {
   readonly need: number | undefined;
   readonly kept: KeptCake;
   readonly blend: LinkBlend;
+  #plannedLab: Lab | undefined;
   #shift: number | undefined | null = null;
   #recommended: { litres: number; kg: number } | undefined | null = null;
 
@@ -80,7 +81,8 @@ export class LinkState {
     const planned = this.b.srm;
     if (planned === undefined || srm === undefined) return undefined;
     if (srm === planned) return 0;
-    return withoutNoise(deltaE00(beerLab(planned, GLASS_CM), beerLab(srm, GLASS_CM)));
+    this.#plannedLab ??= beerLab(planned, GLASS_CM);
+    return withoutNoise(deltaE00(this.#plannedLab, beerLab(srm, GLASS_CM)));
   }
 
   /** The part to keep whose low-end estimate meets the need; undefined where unknown. */
@@ -95,3 +97,6 @@ export class LinkState {
     return keptCake(this, asked);
   }
 }
+
+/** The part of a link that the rules on descent read: all that a longer line of beers changes. */
+export type Lineage = Pick<LinkState, 'b' | 'yeast' | 'rules' | 'generation' | 'inherited'>;

@@ -27,6 +27,7 @@ export const mildToBitter: Rule<Detail> = {
     const ibuB = toHundredth(b.ibu);
     const gap = toHundredth(ibuA - ibuB);
     // B never moves by more than the gap, so a small gap decides without any volume.
+    if (gap === 0) return PASSED;
     if (
       gap < rules.bitterGapMind &&
       gap < rules.bitterGapHold &&
@@ -68,6 +69,7 @@ const shiftTo = (blended: number | undefined, planned: number): number | undefin
 
 function standingAt(shift: number, gap: number, { rules }: LinkState): Graded {
   const moved = Math.abs(shift);
+  if (moved === 0) return 'passed';
   if (moved >= rules.bitterShiftAlone) return 'hold';
   if (gap >= rules.bitterGapHold && moved >= rules.bitterShiftHold) return 'hold';
   return gap >= rules.bitterGapMind && moved >= rules.bitterShiftMind ? 'mind' : 'passed';

@@ -18,6 +18,7 @@ export const strongBeforeWeak: Rule<Detail> = {
     if (a.og === undefined || b.og === undefined || pointsA === undefined || pointsB === undefined)
       return unchecked(together(missingOf(a, 'og'), missingOf(b, 'og')));
     const fall = toTenth(pointsA - pointsB);
+    if (fall <= 0) return PASSED;
     const detail = { ogA: a.og, ogB: b.og, fall };
     if (fall >= rules.fallHold && pointsA >= points(rules.fallHoldFromOg)) return hold(detail);
     return fall >= rules.fallMind ? mind(detail) : PASSED;

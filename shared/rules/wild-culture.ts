@@ -1,3 +1,4 @@
+import type { Lineage } from './linkState.ts';
 import { namesOf } from './names.ts';
 import type { Rule } from './outcome.ts';
 import { listed } from './say.ts';
@@ -6,10 +7,10 @@ import { CULTURES, type Culture } from './vocabulary.ts';
 import { capital, CULTURE_WORDS } from './words.ts';
 
 /** A culture or enzyme of an earlier beer lives on in the cake. Never softened. */
-export const wildCulture: Rule<Undeclared<Culture>> = {
+export const wildCulture = {
   id: 'wild-culture',
 
-  judge({ inherited, b }) {
+  judge({ inherited, b }: Lineage) {
     return undeclared(
       inherited.cultures,
       inherited.culturesUnknown ?? false,
@@ -31,4 +32,4 @@ export const wildCulture: Rule<Undeclared<Culture>> = {
         'Zero tolerance for diastatic yeast: Meier-Dörnberg et al. 2017, at second hand; the rest is common practice.',
     };
   },
-};
+} satisfies Rule<Undeclared<Culture>>;

@@ -1,5 +1,6 @@
 import { Outlet } from 'react-router-dom';
 import { FocusOnNavigation } from './FocusOnNavigation.tsx';
+import { MENUS } from './menus.ts';
 import { SkipLink } from './SkipLink.tsx';
 
 export function Root() {
@@ -8,6 +9,7 @@ export function Root() {
       <SkipLink />
       <FocusOnNavigation />
       <Outlet />
+      <section id={MENUS} aria-label="Open menu" />
     </>
   );
 }

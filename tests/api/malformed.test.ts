@@ -1,11 +1,12 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { problem } from '#shared/api/problem.ts';
+import { api } from '#shared/api/urls.ts';
 import { openApiDocument } from '../../server/openapi.ts';
 import { routes } from '../../server/routes/routes.ts';
 import { BROKEN_BODIES, mutations, type JsonSchema } from '../support/malformed.ts';
-import { boardOf, shelve, testSeason, type TestSeason } from '../support/season.ts';
+import { boardOf, good, shelve, testSeason, type TestSeason } from '../support/season.ts';
 import { startTestServer, type TestServer } from '../support/server.ts';
-import { Visitor, type Reply } from '../support/visitor.ts';
+import { PASSWORD, Visitor, type Reply } from '../support/visitor.ts';
 
 const many = { points: 1_000_000, seconds: 60 };
 let server: TestServer;
@@ -36,6 +37,14 @@ beforeAll(async () => {
 });
 afterAll(() => server.close());
 
+/** A session for each operation: some end it. */
+async function signedIn(): Promise<Visitor> {
+  const visitor = new Visitor(server.url);
+  const { email } = season.person;
+  await good(visitor.post(api.session, { email, password: PASSWORD }));
+  return visitor;
+}
+
 interface Operation {
   name: string;
   method: string;
@@ -65,6 +74,8 @@ interface Described {
 const ODD_NAMES = ['%00', '%E0%A4%A', '..%2f..', "'%20or%201=1", 'x'.repeat(3000), '%F0%9F%8D%BA'];
 const ODD_IDS = [...ODD_NAMES, '1', 'c0ffee00-0000-4000-8000-00000000000', 'null', '-1', '0x10'];
 const ODD_TAGS = ['', '*', 'W/"x"', '"99999999999999999999"', '"-1"', '"1.5"', '1', '"1", "2"'];
+const ODD_COOKIES = ['barmkin=x', 'barmkin=e30=; barmkin.sig=x', '=;=', `a=${'x'.repeat(4000)}`];
+const ENDS_SESSIONS = ['signIn', 'signOut'];
 
 function address({ path }: Operation): string {
   const resource = /\{brewery\}\/([a-z-]+)\/\{id\}/.exec(path)?.[1] ?? '';
@@ -75,10 +86,9 @@ function address({ path }: Operation): string {
 }
 
 /** At least twenty requests, none of which is as it should be. */
-async function badRequests(operation: Operation): Promise<Reply[]> {
+async function badRequests(operation: Operation, visitor: Visitor): Promise<Reply[]> {
   const { method, path, schema } = operation;
   const url = address(operation);
-  const visitor = season.head;
   const tag = { 'If-Match': '"9999"' };
   const replies: Reply[] = [];
   const ask = async (to: string, options: Parameters<Visitor['ask']>[2]) =>
@@ -99,10 +109,10 @@ async function badRequests(operation: Operation): Promise<Reply[]> {
   for (const odd of ODD_TAGS) await ask(url, { ...full, headers: { 'If-Match': odd } });
   for (const odd of ['?a[b]=c', '?%00', '?x=%E0%A4%A', `?${'q=1&'.repeat(500)}`, '?__proto__=1'])
     await ask(url + odd, { ...full, headers: tag });
-  for (const cookie of ['barmkin=x', 'barmkin=e30=; barmkin.sig=x', '=;=', `a=${'x'.repeat(4000)}`])
-    await ask(url, { ...full, headers: { Cookie: cookie } });
   for (const site of ['cross-site', 'x', ''])
     await ask(url, { ...full, headers: { 'Sec-Fetch-Site': site } });
+  // Last: the answer to one may take the good cookie away.
+  for (const cookie of ODD_COOKIES) await ask(url, { ...full, headers: { Cookie: cookie } });
   return replies;
 }
 
@@ -116,11 +126,16 @@ it('covers every route', () => {
 
 describe.each(all)('$name', (operation) => {
   it('answers malformed requests with a problem, never with a fault of its own', async () => {
-    const replies = await badRequests(operation);
+    const visitor = await signedIn();
+    const replies = await badRequests(operation, visitor);
     expect(replies.length).toBeGreaterThanOrEqual(20);
     expect(replies.filter(({ status }) => status >= 500)).toEqual([]);
     const refused = replies.filter(({ status }) => status >= 400);
     for (const { body, status } of refused) expect(problem.parse(body).status).toBe(status);
+    // Whoever asks is let in, so that it is the request that is judged.
+    const strangers = replies.filter(({ status }) => status === 401);
+    if (!ENDS_SESSIONS.includes(operation.name))
+      expect(strangers.length).toBeLessThanOrEqual(ODD_COOKIES.length);
     if (operation.schema) expect(refused.length).toBeGreaterThan(BROKEN_BODIES.length);
   }, 60_000);
 });

@@ -54,7 +54,7 @@ it('holds only schemas that are valid JSON Schema 2020-12', () => {
   for (const { responses } of operations())
     for (const { content = {} } of Object.values(responses))
       for (const { schema } of Object.values(content))
-        expect(checker.validateSchema(schema), checker.errorsText()).toBe(true);
+        expect(checker.validateSchema(schema) || checker.errorsText()).toBe(true);
 });
 
 it('describes the board as it is answered', async () => {
@@ -64,7 +64,7 @@ it('describes the board as it is answered', async () => {
   const schema = operation?.responses['200']?.content?.['application/json']?.schema;
   const validate = ajv().compile(schema ?? false);
   const board = await boardOf(season.head, season.slug);
-  expect(validate(board), JSON.stringify(validate.errors)).toBe(true);
+  expect(validate(board) || validate.errors).toBe(true);
   expect(validate({ ...board, today: 'soon' })).toBe(false);
 });
 

@@ -2,7 +2,11 @@ import type { Batch, Link } from '#shared/api/batch.ts';
 import type { batch } from '../../db/schema/chain.ts';
 import type { cake } from '../../db/schema/cake.ts';
 
-export type BatchRow = typeof batch.$inferSelect;
+/** A batch's columns that anybody sees. */
+export type BatchRow = Omit<
+  typeof batch.$inferSelect,
+  'breweryId' | 'seasonId' | 'shelfId' | 'createdAt' | 'scrapReason'
+>;
 export type CakeRow = typeof cake.$inferSelect;
 
 /** The one place where a batch's rows become its contract. */

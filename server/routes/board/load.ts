@@ -1,13 +1,14 @@
-import { eq, getTableColumns, sql } from 'drizzle-orm';
+import { getTableColumns, sql, type SQL } from 'drizzle-orm';
 import type { Board, HouseRuleChanges } from '#shared/api/board.ts';
 import type { Db, Tx } from '../../db/client.ts';
-import { jsonRows } from '../../db/jsonRows.ts';
+import { jsonList, jsonObject } from '../../db/jsonRows.ts';
+import { oncePer } from '../../db/oncePer.ts';
 import { cake } from '../../db/schema/cake.ts';
 import { batch, chain } from '../../db/schema/chain.ts';
-import { blockedDay, season } from '../../db/schema/season.ts';
+import { season } from '../../db/schema/season.ts';
 import { vessel, yeast } from '../../db/schema/stock.ts';
-import { presentBatch } from '../batches/present.ts';
-import { presentChain } from '../chains/present.ts';
+import { presentBatch, type BatchRow, type CakeRow } from '../batches/present.ts';
+import { presentChain, type ChainRow } from '../chains/present.ts';
 import { presentMember, type MemberRow } from '../people/present.ts';
 import { presentSeason } from '../season/present.ts';
 import { presentVessel } from '../vessels/present.ts';
@@ -18,19 +19,13 @@ export type BoardRows = Pick<
   'season' | 'houseRules' | 'members' | 'yeasts' | 'vessels' | 'chains' | 'batches'
 >;
 
-/**
- * Everything that stands on a season's board, in two queries whatever its size: the season with
- * the small tables around it, and the batches with their cakes.
- */
+/** Everything that stands on a season's board, in one query whatever its size. */
 export async function loadBoardRows(
   db: Db | Tx,
   breweryId: string,
   seasonId: string,
 ): Promise<BoardRows | null> {
-  const { head, batches } = queriesOn(db);
-  const ids = { breweryId, seasonId };
-  // In turn on a transaction's one connection, side by side on a pool's.
-  const [[found], rows] = await Promise.all([head.execute(ids), batches.execute(ids)]);
+  const [found] = await boardQuery(db).execute({ breweryId, seasonId });
   if (!found) return null;
   return {
     season: presentSeason(found.season, found.blockedDays),
@@ -39,56 +34,55 @@ export async function loadBoardRows(
     yeasts: found.yeasts.map(presentYeast),
     vessels: found.vessels.map(presentVessel),
     chains: found.chains.map(presentChain),
-    batches: rows.map((row) => presentBatch(row.batch, row.cake)),
+    batches: found.batches.map((row) => presentBatch(row.batch, row.cake)),
   };
 }
 
-type Queries = ReturnType<typeof prepare>;
-const prepared = new WeakMap<object, Queries>();
+/** Columns that a board does not show. */
+const UNSEEN = ['breweryId', 'seasonId', 'shelfId', 'createdAt', 'scrapReason'];
 
-/** The statements are put together once for a pool, and once for each transaction. */
-function queriesOn(db: Db | Tx): Queries {
-  const known = prepared.get(db);
-  if (known) return known;
-  const made = prepare(db);
-  prepared.set(db, made);
-  return made;
-}
+const LISTS = {
+  blockedDays: jsonList<string>('d.day', 'blocked_day d where d.season_id = season.id', 'd.day'),
+  members: jsonList<MemberRow>(
+    "json_build_object('personId', p.id, 'name', p.name, 'role', m.role)",
+    'membership m join person p on p.id = m.person_id where m.brewery_id = season.brewery_id',
+    'm.joined_at, p.name',
+  ),
+  yeasts: jsonList<typeof yeast.$inferSelect>(
+    jsonObject(yeast, 'y'),
+    'yeast y where y.brewery_id = season.brewery_id',
+    'y.name, y.id',
+  ),
+  vessels: jsonList<typeof vessel.$inferSelect>(
+    jsonObject(vessel, 'v'),
+    'vessel v where v.brewery_id = season.brewery_id',
+    'v.name, v.id',
+  ),
+  chains: jsonList<ChainRow>(
+    jsonObject(chain, 'c'),
+    'chain c where c.brewery_id = season.brewery_id and c.season_id = season.id',
+    'c.position',
+  ),
+  batches: jsonList<{ batch: BatchRow; cake: CakeRow | null }>(
+    `json_build_object('batch', ${jsonObject(batch, 'b', UNSEEN)}, 'cake',
+      case when k.batch_id is not null then ${jsonObject(cake, 'k')} end)`,
+    `batch b left join cake k on k.batch_id = b.id
+      where b.brewery_id = season.brewery_id and b.season_id = season.id`,
+    'b.chain_id, b.place',
+  ),
+};
 
-function prepare(db: Db | Tx) {
-  const breweryId = sql.placeholder('breweryId');
-  const seasonId = sql.placeholder('seasonId');
-  const head = db
-    .select({
-      season: getTableColumns(season),
-      blockedDays: sql<
-        string[]
-      >`(select coalesce(json_agg(${blockedDay.day} order by ${blockedDay.day}), '[]'::json) from ${blockedDay} where ${blockedDay.seasonId} = ${seasonId})`,
-      houseRules: sql<HouseRuleChanges | null>`(select changes from house_rules where brewery_id = ${breweryId})`,
-      members: sql<MemberRow[]>`(
-        select coalesce(json_agg(json_build_object('personId', p.id, 'name', p.name, 'role', m.role) order by m.joined_at, p.name), '[]'::json)
-        from membership m join person p on p.id = m.person_id where m.brewery_id = ${breweryId})`,
-      yeasts: jsonRows(
-        yeast,
-        sql`${yeast.breweryId} = ${breweryId}`,
-        sql`${yeast.name}, ${yeast.id}`,
-      ),
-      vessels: jsonRows(
-        vessel,
-        sql`${vessel.breweryId} = ${breweryId}`,
-        sql`${vessel.name}, ${vessel.id}`,
-      ),
-      chains: jsonRows(chain, sql`${chain.seasonId} = ${seasonId}`, sql`${chain.position}`),
-    })
+const houseRules = sql.raw(
+  '(select h.changes from house_rules h where h.brewery_id = season.brewery_id)',
+) as SQL<HouseRuleChanges | null>;
+
+/** Prepared; tests read its plan. */
+export const boardQuery = oncePer((db: Db | Tx) =>
+  db
+    .select({ season: getTableColumns(season), houseRules, ...LISTS })
     .from(season)
-    .where(sql`${season.breweryId} = ${breweryId} and ${season.id} = ${seasonId}`)
-    .prepare('board_head');
-  const batches = db
-    .select({ batch: getTableColumns(batch), cake: getTableColumns(cake) })
-    .from(batch)
-    .leftJoin(cake, eq(cake.batchId, batch.id))
-    .where(sql`${batch.breweryId} = ${breweryId} and ${batch.seasonId} = ${seasonId}`)
-    .orderBy(batch.chainId, batch.place)
-    .prepare('board_batches');
-  return { head, batches };
-}
+    .where(
+      sql`${season.breweryId} = ${sql.placeholder('breweryId')} and ${season.id} = ${sql.placeholder('seasonId')}`,
+    )
+    .prepare('board'),
+);

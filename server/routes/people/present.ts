@@ -11,17 +11,17 @@ export const presentMember = (row: MemberRow): Member => ({
   initials: initialsOf(row.name),
 });
 
+const characters = new Intl.Segmenter();
+
 /** First letters of the first two words; of one word its first two letters. */
 export function initialsOf(name: string): string {
   const [first = '', second] = name.split(/\s+/u);
-  const letters = second
-    ? [first, second].map((word) => firstLetters(word, 1))
-    : [firstLetters(first, 2)];
-  return letters.join('').toUpperCase().slice(0, 3);
+  const letters = second ? firstOf(first, 1) + firstOf(second, 1) : firstOf(first, 2);
+  return letters.toUpperCase().slice(0, 3);
 }
 
 /** Whole letters: accents and the like stay with theirs. */
-const firstLetters = (word: string, count: number) =>
-  Array.from(new Intl.Segmenter().segment(word), ({ segment }) => segment)
-    .slice(0, count)
-    .join('');
+function firstOf(word: string, count: number): string {
+  const segments = Array.from(characters.segment(word), ({ segment }) => segment);
+  return segments.slice(0, count).join('');
+}

@@ -1,7 +1,6 @@
 import { useState, type ReactNode } from 'react';
 import { FormProvider, type FieldValues, type UseFormReturn } from 'react-hook-form';
 import { reportClientError } from '../../api/clientErrors.ts';
-import { ErrorSummary } from './ErrorSummary.tsx';
 import { FormFoot } from './FormFoot.tsx';
 import { showServerErrors } from './serverErrors.ts';
 
@@ -37,7 +36,6 @@ export function Form<V extends FieldValues, C, O extends FieldValues>(props: For
     <FormProvider {...form}>
       <form noValidate onSubmit={submit} className="space-y-5">
         {children}
-        <ErrorSummary />
         <FormFoot {...props} failure={failure} busy={form.formState.isSubmitting} />
       </form>
     </FormProvider>

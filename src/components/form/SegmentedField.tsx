@@ -22,11 +22,11 @@ export function SegmentedField(props: SegmentedFieldProps) {
   return (
     <fieldset className={className} aria-describedby={state.aria['aria-describedby']}>
       <legend className="mb-1 text-body font-semibold">{label}</legend>
-      <div className="inline-flex max-w-full flex-wrap overflow-hidden rounded-field border-[1.5px] border-edge bg-white">
+      <div className="inline-flex max-w-full overflow-hidden rounded-field border-[1.5px] border-edge bg-white">
         {options.map((option, index) => (
           <label
             key={option.value}
-            className="grid min-h-10 place-items-center border-edge px-4 text-body not-first:border-l-[1.5px] has-checked:bg-bottle has-checked:font-semibold has-checked:text-on-bottle has-focus-visible:outline-3 has-focus-visible:-outline-offset-4 has-focus-visible:outline-current max-tablet:min-h-11"
+            className="grid min-h-10 place-items-center border-edge px-4 text-center text-body leading-tight not-first:border-l-[1.5px] has-checked:bg-bottle has-checked:font-semibold has-checked:text-on-bottle has-focus-visible:outline-3 has-focus-visible:-outline-offset-4 has-focus-visible:outline-current max-tablet:min-h-11 max-tablet:px-3"
           >
             <input
               type="radio"

@@ -1,6 +1,7 @@
 import { X } from 'lucide-react';
 import { Dialog as Radix } from 'radix-ui';
 import type { ReactNode } from 'react';
+import { useFocusBack } from './useFocusBack.ts';
 
 export interface DialogProps {
   open: boolean;
@@ -14,11 +15,13 @@ export interface DialogProps {
 
 /** A sheet from the foot of a phone, a card in the middle of anything larger. */
 export function Dialog({ open, onClose, title, lead, children, wide = false }: DialogProps) {
+  const focusBack = useFocusBack();
   return (
     <Radix.Root open={open} onOpenChange={(next) => !next && onClose()}>
       <Radix.Portal>
         <Radix.Overlay className="fixed inset-0 z-40 bg-veil" />
         <Radix.Content
+          {...focusBack}
           // A slip of the finger beside the card must not throw away what was typed.
           onPointerDownOutside={(event) => event.preventDefault()}
           onInteractOutside={(event) => event.preventDefault()}

@@ -1,6 +1,7 @@
 import clsx from 'clsx';
 import { DropdownMenu as Radix } from 'radix-ui';
 import type { ReactNode } from 'react';
+import { MENUS } from '../../app/menus.ts';
 
 export interface MenuProps {
   /** The button that opens it; takes the props that it is given. */
@@ -13,7 +14,7 @@ export function Menu({ trigger, children, align = 'end' }: MenuProps) {
   return (
     <Radix.Root modal={false}>
       <Radix.Trigger asChild>{trigger}</Radix.Trigger>
-      <Radix.Portal>
+      <Radix.Portal container={document.getElementById(MENUS)}>
         <Radix.Content
           align={align}
           sideOffset={6}

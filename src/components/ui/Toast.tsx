@@ -19,7 +19,7 @@ export const Toaster = () => (
       toastOptions={{
         unstyled: true,
         className:
-          'w-full rounded-xl border border-line bg-ink px-4 py-3 text-body font-medium text-stone shadow-card',
+          'w-full rounded-xl border border-line bg-ink px-4 py-3 font-sans text-body font-medium text-stone shadow-card',
       }}
     />
   </Suspense>

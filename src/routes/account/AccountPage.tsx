@@ -22,18 +22,20 @@ export function AccountPage() {
           </p>
           <UnitChoices me={me} />
         </Card>
-        <Card>
-          <CardTitle>Theme</CardTitle>
-          <div className="mt-4">
-            <ThemeChoice me={me} />
-          </div>
-        </Card>
-        <Card>
-          <CardTitle>Your name</CardTitle>
-          <div className="mt-4">
-            <NameForm key={me.name} me={me} />
-          </div>
-        </Card>
+        <div className="space-y-4">
+          <Card>
+            <CardTitle>Theme</CardTitle>
+            <div className="mt-4">
+              <ThemeChoice me={me} />
+            </div>
+          </Card>
+          <Card>
+            <CardTitle>Your name</CardTitle>
+            <div className="mt-4">
+              <NameForm key={me.name} me={me} />
+            </div>
+          </Card>
+        </div>
       </div>
     </Page>
   );

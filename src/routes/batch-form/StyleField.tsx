@@ -32,7 +32,11 @@ export function StyleField() {
 }
 
 function styleHint(style: BeerStyle, units: UnitPrefs): string {
-  const range = (kind: QuantityKind, [low, high]: readonly [number, number]) =>
-    `${formatBare(kind, low, units)}–${formatBare(kind, high, units)} ${unitOf(kind, units)}`;
+  const range = (kind: QuantityKind, [low, high]: readonly [number, number]) => {
+    const unit = unitOf(kind, units);
+    // An SG stands alone, as the trade writes it.
+    const after = unit === 'SG' ? '' : ` ${unit}`;
+    return `${formatBare(kind, low, units)}–${formatBare(kind, high, units)}${after}`;
+  };
   return `Usual: OG ${range('gravity', style.og)}, FG ${range('gravity', style.fg)}, ${range('colour', style.srm)}, ${range('bitterness', style.ibu)}, ${range('alcohol', style.abv)} ABV (common practice, from memory).`;
 }

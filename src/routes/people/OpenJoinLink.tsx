@@ -13,7 +13,8 @@ export function OpenJoinLink({ link }: { link: JoinLink }) {
   const { timeZone } = useBoard().brewery;
   const withdraw = useWithdrawJoinLink(slug);
   const [asking, setAsking] = useState(false);
-  const ended = Date.parse(link.expiresAt) < Date.now();
+  const [now] = useState(() => Date.now());
+  const ended = Date.parse(link.expiresAt) < now;
   return (
     <li className="flex items-center gap-3">
       <div className="min-w-0 grow">

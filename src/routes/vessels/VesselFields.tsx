@@ -14,7 +14,7 @@ export function VesselFields() {
         <QuantityField name="capacityL" label="Size to the brim" />
         <DayField name="cleanedOn" label="Last cleaned" />
         <QuantityField name="minC" label="Holds from" />
-        <QuantityField name="maxC" label="up to" />
+        <QuantityField name="maxC" label="Holds up to" />
       </div>
       <CheckField
         name="blowOff"

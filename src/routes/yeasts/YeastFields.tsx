@@ -32,12 +32,12 @@ export function YeastFields({ currency }: { currency: string }) {
       />
       <div className="grid grid-cols-2 gap-x-4 gap-y-4">
         <QuantityField name="fermentMinC" label="Ferments from" />
-        <QuantityField name="fermentMaxC" label="up to" />
+        <QuantityField name="fermentMaxC" label="Ferments up to" />
         <p className="col-span-2 -mt-3 text-small text-ink2">
           The maker's own range goes first; left empty, {between(usual.ferment)} is taken.
         </p>
         <QuantityField name="pourMinC" label="Poured from" />
-        <QuantityField name="pourMaxC" label="up to" />
+        <QuantityField name="pourMaxC" label="Poured up to" />
         <p className="col-span-2 -mt-3 text-small text-ink2">
           Left empty, {between(usual.pour)} is taken (common practice).
         </p>

@@ -1,13 +1,16 @@
 import { Ellipsis } from 'lucide-react';
 import { useState } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
+import { lazyPart } from '../../../app/lazyPart.tsx';
 import { Menu, MenuItem, MenuSeparator } from '../../../components/ui/Menu.tsx';
 import { useBoardPanel } from '../view/useBoardPanel.ts';
 import { DeleteBatch } from './DeleteBatch.tsx';
-import { StageDialog } from './StageDialog.tsx';
 import { nextStages, STAGE_ACTIONS, type NextStage } from './stages.ts';
 
 type Asked = NextStage | 'delete' | null;
+
+/** Its form comes when it is asked for. */
+const StageDialog = lazyPart(async () => (await import('./StageDialog.tsx')).StageDialog);
 
 /** Edit, duplicate, the stages that come next, scrap, delete. */
 export function BatchMenu({ batch }: { batch: Batch }) {

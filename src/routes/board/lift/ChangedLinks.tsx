@@ -1,17 +1,17 @@
 import { useBoard, useJudged } from '../../../api/board.ts';
 import { VerdictPill } from '../../../components/drawn/VerdictPill.tsx';
-import { indexBoard } from '#shared/chain/board.ts';
 import type { JudgedLink } from '#shared/chain/judgeBoard.ts';
 import { countedFindings } from '../view/words.ts';
 import type { Change } from './liftState.ts';
 import { batchName } from './words.ts';
+import { indexed } from './indexed.ts';
 
 /** The links that a drop touched: of the moved batch, of the one behind it, of where it was. */
 function useChangedLinks({ request, gap }: Change): JudgedLink[] {
   const board = useBoard();
   const { links } = useJudged();
   const { chainId } = board.batches.find((row) => row.id === request.batchId) ?? {};
-  const row = chainId ? indexBoard(board).batchesOf(chainId) : [];
+  const row = chainId ? indexed(board).batchesOf(chainId) : [];
   const behind = row[row.findIndex((batch) => batch.id === request.batchId) + 1];
   const ids = [request.batchId, behind?.id, ...gap.changes.map(({ laterId }) => laterId)];
   return [...new Set(ids)].flatMap((id) => links.get(id ?? '') ?? []);

@@ -14,7 +14,10 @@ export function LiftedCard() {
   if (!batch || lifted?.by !== 'pointer') return null;
   const { gravity, rest } = beerFacts(batch, units);
   return (
-    <div className="lifted-card absolute top-0 left-0 flex w-[214px] cursor-grabbing items-end gap-3 rounded-card border-2 border-ink bg-white p-3 pr-4 shadow-lifted">
+    <div
+      aria-hidden
+      className="lifted-card absolute top-0 left-0 flex w-[214px] cursor-grabbing items-end gap-3 rounded-card border-2 border-ink bg-white p-3 pr-4 shadow-lifted"
+    >
       {lifted.shape && volumeOf(batch) !== null ? (
         <Vessel
           {...{ shape: lifted.shape, srm: batch.srm, fill: 0.72, cake: null }}

@@ -1,5 +1,5 @@
 import clsx from 'clsx';
-import { memo, useState } from 'react';
+import { memo, useMemo, useState } from 'react';
 import type { Gap } from '#shared/chain/gaps.ts';
 import type { BoardFacts } from '#shared/chain/board.ts';
 import { VerdictPill } from '../../../components/drawn/VerdictPill.tsx';
@@ -26,19 +26,21 @@ export function PlacesList(props: PlacesListProps) {
   const { board, batchId, ranked, over, follow = false, onPut } = props;
   const [all, setAll] = useState(false);
   const walkedTo = !follow ? 0 : ranked.findIndex((gap) => gap.key === over) + 1;
-  const shown = all ? ranked : ranked.slice(0, Math.max(SHOWN, walkedTo));
-  const rest = ranked.length - shown.length;
+  const length = all ? ranked.length : Math.min(ranked.length, Math.max(SHOWN, walkedTo));
+  const rest = ranked.length - length;
+  const rows = useMemo(
+    () => ranked.slice(0, length).map((gap) => rowOf(board, gap, batchId)),
+    [board, ranked, batchId, length],
+  );
   return (
     <>
       <ol className="-mx-3.5 list-none">
-        {shown.map((gap) => (
+        {rows.map((row) => (
           <PlaceRow
-            key={gap.key}
-            {...{ gap, onPut, follow }}
-            title={placeTitle(board, gap)}
-            where={placeWords(board, gap, batchId)}
-            reason={reasonWords(board, gap)}
-            isOver={gap.key === over}
+            key={row.gap.key}
+            {...row}
+            {...{ onPut, follow }}
+            isOver={row.gap.key === over}
           />
         ))}
       </ol>
@@ -50,6 +52,13 @@ export function PlacesList(props: PlacesListProps) {
     </>
   );
 }
+
+const rowOf = (board: BoardFacts, gap: Gap, batchId: string) => ({
+  gap,
+  title: placeTitle(board, gap),
+  where: placeWords(board, gap, batchId),
+  reason: reasonWords(board, gap),
+});
 
 interface PlaceRowProps {
   gap: Gap;

@@ -1,3 +1,5 @@
+import { useCallback } from 'react';
+import type { Gap } from '#shared/chain/gaps.ts';
 import { useBoard } from '../../../api/board.ts';
 import { KEY_LEGEND } from './keys.ts';
 import { drop, useLiftMachine, useLiftState } from './liftContext.ts';
@@ -10,6 +12,7 @@ export function PlacesPanel() {
   const machine = useLiftMachine();
   const lifted = useLiftState((state) => state.lifted);
   const over = useLiftState((state) => state.over);
+  const onPut = useCallback((gap: Gap) => drop(machine, gap.key), [machine]);
   if (!lifted) return null;
   const { batchId, ranked, by } = lifted;
   return (
@@ -18,11 +21,7 @@ export function PlacesPanel() {
       <PlacesLead batchId={batchId} />
       {by === 'keys' && <KeyLegend />}
       <div className="mt-3.5">
-        <PlacesList
-          {...{ board, batchId, ranked, over }}
-          follow={by === 'keys'}
-          onPut={(gap) => drop(machine, gap.key)}
-        />
+        <PlacesList {...{ board, batchId, ranked, over, onPut }} follow={by === 'keys'} />
       </div>
       <HoldsCanBeChosen />
     </section>

@@ -1,5 +1,6 @@
-import { indexBoard, isPencilled, type BoardFacts } from '#shared/chain/board.ts';
+import { isPencilled, type BoardFacts } from '#shared/chain/board.ts';
 import { gapKey } from './places.ts';
+import { indexed } from './indexed.ts';
 
 /** A step along one's own shelf: the key of the place, or why there is none. */
 export type Neighbour = { key: string; why: null } | { key: null; why: string };
@@ -11,7 +12,7 @@ export function neighbours(
   board: BoardFacts,
   batchId: string,
 ): { earlier: Neighbour; later: Neighbour } {
-  const index = indexBoard(board);
+  const index = indexed(board);
   const batch = index.batch(batchId);
   if (!batch || batch.chainId === null) {
     const why = none('It stands on no shelf');

@@ -1,13 +1,14 @@
-import { indexBoard, type BoardFacts } from '#shared/chain/board.ts';
+import type { BoardFacts } from '#shared/chain/board.ts';
 import type { Gap } from '#shared/chain/gaps.ts';
 import type { Intent } from './keys.ts';
+import { indexed } from './indexed.ts';
 
 export const gapKey = (chainId: string, afterBatchId: string | null) =>
   `${chainId}:${afterBatchId ?? 'first'}`;
 
 /** Keys of every place, shelf by shelf from the top, then a new shelf and the bench. */
 function everyKey(board: BoardFacts): string[] {
-  const { chains, batchesOf } = indexBoard(board);
+  const { chains, batchesOf } = indexed(board);
   const onShelves = chains.flatMap((chain) => [
     gapKey(chain.id, null),
     ...batchesOf(chain.id).map((batch) => gapKey(chain.id, batch.id)),

@@ -5,7 +5,7 @@ import { failureWords, OFFLINE_WORDS } from './failure.ts';
 import type { Change, LiftStore } from './liftState.ts';
 import { isOpen } from './places.ts';
 import type { LiftPorts } from './ports.ts';
-import { batchName, droppedWords, putBackWords } from './words.ts';
+import { batchName, droppedWords, keptDatesWords, putBackWords } from './words.ts';
 import { wishOf } from './wish.ts';
 
 export interface Putting {
@@ -48,7 +48,12 @@ function send(scene: Scene, request: MoveRequest, gap: Gap, again: boolean) {
   const change = changeOf(request, gap, preview ?? { shifted: [], cleared: [] });
   store.set({ change, refusal: null });
   const answer = again ? ports.moveAgain(request) : ports.move(request);
-  ports.say(droppedWords(ports.board(), request.batchId, gap, change.shifted.length));
+  // A gap is judged with its dates pulled along: of kept ones the panel tells, from the new board.
+  ports.say(
+    again
+      ? keptDatesWords(ports.board(), request.batchId)
+      : droppedWords(ports.board(), request.batchId, gap, change.shifted.length),
+  );
   ports.focusBatch(request.batchId);
   answer.then(
     ({ what, shifted, cleared, changeId }) => {

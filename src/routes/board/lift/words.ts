@@ -1,6 +1,7 @@
-import { indexBoard, type BoardFacts } from '#shared/chain/board.ts';
+import type { BoardFacts } from '#shared/chain/board.ts';
 import type { Gap } from '#shared/chain/gaps.ts';
 import { formatDay, formatDayShort } from '#shared/units/day.ts';
+import { indexed } from './indexed.ts';
 
 const nameOf = (rows: readonly { id: string; name: string }[], id: string | null) =>
   rows.find((row) => row.id === id)?.name ?? '';
@@ -36,7 +37,7 @@ export function placeTitle(board: BoardFacts, gap: Gap): string {
 export function standing(board: BoardFacts, batchId: string): string {
   const batch = board.batches.find((row) => row.id === batchId);
   if (!batch || batch.chainId === null) return 'on the bench';
-  const row = indexBoard(board).batchesOf(batch.chainId);
+  const row = indexed(board).batchesOf(batch.chainId);
   const place = row.findIndex((other) => other.id === batchId) + 1;
   return `on ${nameOf(board.chains, batch.chainId)}, place ${place} of ${row.length}`;
 }
@@ -45,7 +46,7 @@ export function standing(board: BoardFacts, batchId: string): string {
 export function placeWords(board: BoardFacts, gap: Gap, batchId: string): string {
   if (gap.key === 'new') return 'a new shelf';
   if (gap.key === 'bench') return 'the bench';
-  const row = indexBoard(board)
+  const row = indexed(board)
     .batchesOf(gap.toChainId)
     .filter((batch) => batch.id !== batchId);
   const place = row.findIndex((batch) => batch.id === gap.afterBatchId) + 2;
@@ -82,7 +83,7 @@ export function lockWords(board: BoardFacts, gap: Gap): string {
       return 'no yeast yet';
     case 'poured':
     case null: {
-      const row = indexBoard(board).batchesOf(gap.toChainId);
+      const row = indexed(board).batchesOf(gap.toChainId);
       const after = row.findIndex((batch) => batch.id === gap.afterBatchId);
       const poured = row.slice(after + 1).find((batch) => batch.stage !== 'pencilled');
       return poured?.brewOn ? `poured ${formatDayShort(poured.brewOn)}` : 'poured';
@@ -113,6 +114,9 @@ export function droppedWords(
   const verdict = gap.key === 'bench' ? '' : ` ${judgementWords(gap)}.`;
   return `${batchName(board, batchId)} put down ${where}.${verdict}${dates}`;
 }
+
+export const keptDatesWords = (board: BoardFacts, batchId: string) =>
+  `${batchName(board, batchId)} is ${standing(board, batchId)}, with every date as it was before.`;
 
 export const putBackWords = (board: BoardFacts, batchId: string) =>
   `${batchName(board, batchId)} put back ${standing(board, batchId)}.`;

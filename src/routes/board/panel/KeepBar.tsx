@@ -1,4 +1,4 @@
-import { useRef } from 'react';
+import { useEffect, useRef } from 'react';
 import type { LinkAnswer } from '#shared/rules/answer.ts';
 import { format } from '#shared/units/quantity.ts';
 import { useBoardView } from '../view/BoardView.tsx';
@@ -15,6 +15,8 @@ interface KeepBarProps {
 }
 
 const STEPS = 100;
+/** Keys step one by one; the hand has let go when they pause. */
+const KEY_PAUSE_MS = 700;
 const share = (part: number, whole: number) => Math.min(1, Math.max(0, part / whole));
 
 /** The whole cake as a bar, the kept part on it, the mark where it is enough. */
@@ -70,13 +72,16 @@ interface KeepSliderProps {
 
 function KeepSlider({ whole, kept, onTry, onKeep }: KeepSliderProps) {
   const { units } = useBoardView();
-  const touched = useRef(false);
+  const pause = useRef(0);
+  const keep = useRef<(() => void) | null>(null);
   const litres = (steps: string) => Math.round((Number(steps) / STEPS) * whole * 1000) / 1000;
-  const done = (input: HTMLInputElement) => {
-    if (!touched.current) return;
-    touched.current = false;
-    onKeep(litres(input.value));
+  const done = () => {
+    window.clearTimeout(pause.current);
+    keep.current?.();
+    keep.current = null;
   };
+  // What was chosen just before the panel closes is kept too.
+  useEffect(() => () => keep.current?.(), []);
   return (
     <input
       type="range"
@@ -87,12 +92,16 @@ function KeepSlider({ whole, kept, onTry, onKeep }: KeepSliderProps) {
       step={1}
       value={Math.round(share(kept, whole) * STEPS)}
       onChange={(event) => {
-        touched.current = true;
-        onTry(litres(event.target.value));
+        const next = litres(event.target.value);
+        keep.current = () => onKeep(next);
+        onTry(next);
       }}
-      onPointerUp={(event) => done(event.currentTarget)}
-      onKeyUp={(event) => done(event.currentTarget)}
-      onBlur={(event) => done(event.currentTarget)}
+      onPointerUp={done}
+      onKeyUp={() => {
+        window.clearTimeout(pause.current);
+        pause.current = window.setTimeout(done, KEY_PAUSE_MS);
+      }}
+      onBlur={done}
       className="keep-slider absolute inset-0 size-full cursor-ew-resize"
     />
   );

@@ -1,20 +1,21 @@
 import { sentenceOf } from '../../../api/errors.ts';
-import { useLinkPatch } from '../../../api/links.ts';
+import { VerdictPill } from '../../../components/drawn/VerdictPill.tsx';
 import { Button } from '../../../components/ui/Button.tsx';
 import { Notice } from '../../../components/ui/Notice.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
+import { countedFindings } from '../view/words.ts';
 import { InlineQuantity } from './InlineQuantity.tsx';
 import { KeepBar } from './KeepBar.tsx';
 import { enoughWords, surplusWords, thumbWords } from './keepWords.ts';
 import { PanelPart } from './PanelFrame.tsx';
 import type { Kept, LinkDraft } from './useLinkDraft.ts';
-import type { Typed } from '#shared/api/units.ts';
+import { useSaveKept, type SaveKept } from './useSaveKept.ts';
 
 /** How much of the cake to keep: tried live, stored when the hand lets go. */
 export function KeepCake({ draft }: { draft: LinkDraft }) {
   const { units, can } = useBoardView();
   const { answer, later } = draft;
-  const { save, patch } = useSaveKept(draft);
+  const { save, error } = useSaveKept(draft);
   const { volumeL: whole } = answer.cake;
   if (whole === null)
     return (
@@ -35,6 +36,11 @@ export function KeepCake({ draft }: { draft: LinkDraft }) {
         kept={kept}
         {...(mayChange && { onTry: draft.tryKept, onKeep: (litres: number) => save(litres, null) })}
       />
+      {draft.isTrying && (
+        <p className="mt-2">
+          <VerdictPill verdict={answer.verdict} findings={countedFindings(answer)} />
+        </p>
+      )}
       {mayChange && (
         <div className="mt-2 flex flex-wrap items-end gap-2">
           <div className="w-28">
@@ -49,9 +55,9 @@ export function KeepCake({ draft }: { draft: LinkDraft }) {
           <KeepChoices kept={draft.kept} save={save} />
         </div>
       )}
-      {patch.error && (
+      {error && (
         <Notice kind="hold" alert className="mt-2">
-          {sentenceOf(patch.error)}
+          {sentenceOf(error)}
         </Notice>
       )}
       {notes.map(
@@ -66,9 +72,7 @@ export function KeepCake({ draft }: { draft: LinkDraft }) {
   );
 }
 
-type Save = (kept: Kept, typed: Typed[string] | null) => void;
-
-function KeepChoices({ kept, save }: { kept: Kept; save: Save }) {
+function KeepChoices({ kept, save }: { kept: Kept; save: SaveKept }) {
   return (
     <>
       <Button
@@ -89,26 +93,4 @@ function KeepChoices({ kept, save }: { kept: Kept; save: Save }) {
       </Button>
     </>
   );
-}
-
-function useSaveKept({ later, tryKept }: LinkDraft) {
-  const { slug } = useBoardView();
-  const patch = useLinkPatch(slug);
-  const save: Save = (kept, typed) => {
-    tryKept(kept);
-    const { keepL: _, ...others } = later.link.typed;
-    patch.mutate(
-      {
-        id: later.id,
-        version: later.version,
-        patch: {
-          keepL: typeof kept === 'number' ? kept : null,
-          keepWhole: kept === 'whole',
-          typed: typed ? { ...others, keepL: typed } : others,
-        },
-      },
-      { onSuccess: () => tryKept(null) },
-    );
-  };
-  return { save, patch };
 }

@@ -40,7 +40,7 @@ function OpenedLink({ laterId, earlierId }: { laterId: string; earlierId: string
       {answer.findings.map((finding) => (
         <FindingBlock key={finding.rule} finding={finding} />
       ))}
-      <AcceptHold later={later} answer={answer} />
+      {!draft.isTrying && <AcceptHold later={later} answer={answer} />}
       <KeepCake draft={draft} />
       <UncheckedFields earlier={earlier} later={later} unchecked={answer.unchecked} />
       <Advice advice={answer.advice} />

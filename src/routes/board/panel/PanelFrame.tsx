@@ -7,6 +7,17 @@ interface PanelFrameProps {
   children: ReactNode;
 }
 
+/** Escape closes, wherever the focus is; a menu or dialog above takes it first. */
+function useEscape(onClose: () => void) {
+  useEffect(() => {
+    const onKeyDown = (event: KeyboardEvent) => {
+      if (event.key === 'Escape' && !event.defaultPrevented) onClose();
+    };
+    document.addEventListener('keydown', onKeyDown);
+    return () => document.removeEventListener('keydown', onKeyDown);
+  }, [onClose]);
+}
+
 /** What stands open beside the shelves. Takes the focus when it opens; Escape closes it. */
 export function PanelFrame({ label, onClose, children }: PanelFrameProps) {
   const ref = useRef<HTMLElement>(null);
@@ -18,15 +29,12 @@ export function PanelFrame({ label, onClose, children }: PanelFrameProps) {
         before.focus({ preventScroll: true });
     };
   }, []);
+  useEscape(onClose);
   return (
-    // oxlint-disable-next-line jsx-a11y/no-noninteractive-element-interactions -- Escape closes, as the button does
     <section
       ref={ref}
       tabIndex={-1}
       aria-label={label}
-      onKeyDown={(event) => {
-        if (event.key === 'Escape' && !event.defaultPrevented) onClose();
-      }}
       className="relative animate-panel-in wrap-anywhere px-6 pt-5 pb-10 outline-none max-tablet:px-[18px]"
     >
       <button

@@ -1,11 +1,14 @@
 import { useEffect } from 'react';
+import { lazyPart } from '../../../app/lazyPart.tsx';
 import { ChangesPanel } from '../lift/ChangesPanel.tsx';
-import { useLiftMachine, useLiftPanel } from '../lift/liftContext.ts';
+import { useLiftMachine, useLiftPanel, useLiftState } from '../lift/liftContext.ts';
 import { PlacesPanel } from '../lift/PlacesPanel.tsx';
 import { useBoardPanel } from '../view/useBoardPanel.ts';
 import { useWide } from '../view/useMedia.ts';
 import { AttentionPanel } from './AttentionPanel.tsx';
-import { LinkPanel } from './LinkPanel.tsx';
+
+/** All that is told of a link, loaded with the first link that is opened. */
+const LinkPanel = lazyPart(async () => (await import('./LinkPanel.tsx')).LinkPanel);
 
 /** The newest wins: a lift closes what stands open, opening something puts the last change away. */
 function useOneAtATime(openLink: string | null, isLifted: boolean, close: () => void) {
@@ -59,7 +62,9 @@ function AtRest({ lift }: { lift: ReturnType<typeof useLiftPanel> }) {
 
 /** Without room at the side, lifting tells its places and its changes along the foot. */
 function Below({ lift }: { lift: ReturnType<typeof useLiftPanel> }) {
-  if (lift === null) return null;
+  const by = useLiftState((state) => state.lifted?.by);
+  // A pointer sees the gaps themselves; the list would lie over some of them.
+  if (lift === null || (lift === 'places' && by === 'pointer')) return null;
   return (
     <aside
       aria-label="Lifting"
