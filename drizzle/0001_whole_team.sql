@@ -67,6 +67,8 @@ CREATE TABLE "comment_seen" (
 --> statement-breakpoint
 ALTER TABLE "brewery" ADD COLUMN "current_season_id" uuid;--> statement-breakpoint
 ALTER TABLE "membership" ADD COLUMN "version" integer DEFAULT 1 NOT NULL;--> statement-breakpoint
+ALTER TABLE "chain" ADD COLUMN "start_allergens" jsonb;--> statement-breakpoint
+ALTER TABLE "chain" ADD COLUMN "start_cultures" jsonb;--> statement-breakpoint
 ALTER TABLE "person" ADD COLUMN "closed_at" timestamp with time zone;--> statement-breakpoint
 ALTER TABLE "session" ADD COLUMN "device" text DEFAULT '' NOT NULL;--> statement-breakpoint
 ALTER TABLE "session" ADD COLUMN "seen_at" timestamp with time zone;--> statement-breakpoint
