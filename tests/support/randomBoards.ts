@@ -76,7 +76,10 @@ function chainOf({ vessel, yeast, start }: Shelf, at: number, shelves: readonly 
   };
   if (start === 'pack') return makeChain(at + 1, own);
   if (start === 'outside')
-    return makeChain(at + 1, { ...own, start: { kind: 'outside', generation: 3, price: null } });
+    return makeChain(at + 1, {
+      ...own,
+      start: { kind: 'outside', generation: 3, price: null, allergens: ['milk'], cultures: null },
+    });
   const source = Math.min(start.shelf, at - 1);
   const beers = shelves[source]?.beers.length ?? 0;
   if (source < 0 || beers === 0) return makeChain(at + 1, own);
