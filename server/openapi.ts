@@ -68,10 +68,12 @@ function requestOf({ path, body, ifMatch }: Operation) {
 }
 
 function responsesOf(route: Route, problem: z.ZodType) {
-  const { answer, status } = route.operation;
+  const { answer, status, stream } = route.operation;
   const good = answer
     ? { description: 'Done', content: { 'application/json': { schema: answer } } }
-    : { description: 'Done' };
+    : stream
+      ? { description: 'Stays open', content: { 'text/event-stream': { schema: z.string() } } }
+      : { description: 'Done' };
   const failures = problemsOf(route);
   const statuses = [...new Set(failures.map((kind) => PROBLEMS[kind].status))];
   return {

@@ -36,6 +36,8 @@ function answering(route: Route, deps: Deps & Services): RequestHandler {
     const who = await whoAsks(route.who, deps, req);
     if (who.member && !route.may(who.member)) throw problem('not-allowed');
     const answer = await route.handle(parse(route, deps, req, res), who);
+    // Asked for its head alone, a stream does not begin.
+    if (answer.stream && req.method === 'GET') return answer.stream(res);
     if (answer.version !== undefined) res.setHeader('ETag', entityTag(answer.version));
     res.setHeader('Cache-Control', 'no-store');
     const status = answer.status ?? route.operation.status;

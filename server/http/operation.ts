@@ -18,6 +18,8 @@ export interface Operation<Body = unknown> {
   /** Null: an answer without content. */
   answer: z.ZodType | null;
   status: 200 | 201 | 204;
+  /** The answer stays open: Server-Sent Events. */
+  stream?: true;
   /** Changes a row that has a version: demands If-Match. */
   ifMatch?: boolean;
   /** Problems beyond those that follow from the rest. */
@@ -26,6 +28,8 @@ export interface Operation<Body = unknown> {
 
 export interface Answer {
   body?: unknown;
+  /** Takes the answer over: it stays open. */
+  stream?: (res: Response) => void;
   status?: number;
   /** Version of the one row that is answered; becomes its ETag. */
   version?: number;

@@ -6,6 +6,7 @@ import { breweryRoutes } from './brewery/router.ts';
 import { chainRoutes } from './chains/router.ts';
 import { checkRoutes } from './check/router.ts';
 import { joinRoutes } from './join/router.ts';
+import { liveRoutes } from './live/router.ts';
 import { moveRoutes } from './moves/router.ts';
 import { peopleRoutes } from './people/router.ts';
 import { seasonRoutes } from './season/router.ts';
@@ -29,6 +30,7 @@ const resources: readonly Route[] = [
   ...chainRoutes,
   ...batchRoutes,
   ...moveRoutes,
+  ...liveRoutes,
   ...checkRoutes,
 ];
 

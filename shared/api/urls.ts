@@ -11,6 +11,8 @@ export const api = {
   joinLink: (slug: string, id: string) => `${b(slug)}/join-links/${id}`,
   board: (slug: string) => `${b(slug)}/board`,
   season: (slug: string, id: string) => `${b(slug)}/seasons/${id}`,
+  /** Server-Sent Events. */
+  seasonEvents: (slug: string, id: string) => `${b(slug)}/seasons/${id}/events`,
   yeasts: (slug: string) => `${b(slug)}/yeasts`,
   yeast: (slug: string, id: string) => `${b(slug)}/yeasts/${id}`,
   vessels: (slug: string) => `${b(slug)}/vessels`,

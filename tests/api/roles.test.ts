@@ -15,6 +15,7 @@ const HEAD: Role[] = ['head-brewer'];
 /** Who may do what inside a brewery. Written out, so that a policy cannot change unseen. */
 const MAY: Record<string, Role[]> = {
   readBoard: ALL,
+  watchSeason: ALL,
   readBrewery: ALL,
   listMembers: ALL,
   editBrewery: HEAD,

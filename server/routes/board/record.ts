@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import { eq, sql } from 'drizzle-orm';
 import type { Member } from '../../auth/whoAsks.ts';
 import type { Tx } from '../../db/client.ts';
+import { tell } from '../../live/note.ts';
 import { change, type ChangeKind } from '../../db/schema/change.ts';
 import { season } from '../../db/schema/season.ts';
 
@@ -17,7 +18,10 @@ export interface Entry {
   ofChange?: string;
 }
 
-/** Raises the season's revision. It locks the season, so it comes after the locks of shelves. */
+/**
+ * Raises the season's revision, and tells all processes once this is committed. It locks the
+ * season, so it comes after the locks of shelves.
+ */
 export async function raiseRevision(tx: Tx, seasonId: string): Promise<number> {
   const [raised] = await tx
     .update(season)
@@ -25,6 +29,7 @@ export async function raiseRevision(tx: Tx, seasonId: string): Promise<number> {
     .where(eq(season.id, seasonId))
     .returning({ revision: season.revision });
   if (!raised) throw new Error('The season went away under its own change');
+  await tell(tx, { kind: 'season', seasonId, revision: raised.revision });
   return raised.revision;
 }
 
