@@ -1,9 +1,11 @@
 import type { Batch } from '../api/batch.ts';
 import type { Verdict } from '../rules/vocabulary.ts';
 import { daysBetween } from '../units/day.ts';
-import { linkBetween, type Sight } from './boardLink.ts';
+import type { Sight } from './boardLink.ts';
 import { judgeLink, type LinkVerdict } from './checkLink.ts';
 import type { Inheritances } from './inheritances.ts';
+import { linkBetween } from './linkInput.ts';
+import { sharedWith } from './shares.ts';
 
 /** A link's verdict of which the reason and the colour shift are worked out when first asked. */
 export class Judgement {
@@ -34,7 +36,7 @@ export class Judgement {
 
 /**
  * Judges links of one board's layouts, each once: two batches that meet again with the same days
- * between them, generation, inheritance and vessel get the same answer. All other facts of a link
+ * between them, generation, inheritance, vessel and shares of the cake get the same answer. All other facts of a link
  * come from its two batches, of which layouts change only days, chain and link facts; the link
  * facts go exactly when the pair is not the one that stands on the board.
  */
@@ -70,7 +72,8 @@ export class LinkMemo {
     const taken = use?.takenBy === undefined ? 0 : 1;
     const days = `${daysFrom(earlier, later.brewOn)},${daysFrom(earlier, later.link.takenOn)}`;
     const shelves = `${this.#shelf(earlier)},${this.#shelf(later)}`;
-    return `${shelves},${generation},${handed},${taken},${use?.beersSinceCleaning},${days}`;
+    const parts = sharesText(earlier, later.id, sight);
+    return `${shelves},${generation},${handed},${taken},${use?.beersSinceCleaning},${days},${parts}`;
   }
 
   /** A number for the batch's chain: yeast and vessel go with it. */
@@ -81,6 +84,12 @@ export class LinkMemo {
     return this.#shelves.size - 1;
   }
 }
+
+/** What others get of the cake, as text; empty where nobody does. */
+export const sharesText = (earlier: Batch, laterId: string, sight: Sight): string =>
+  sharedWith(earlier, laterId, sight)
+    .map(({ name, litres }) => `${name} ${litres}`)
+    .join();
 
 /** Days from the earlier brew day; the day itself where there is none to count from. */
 export function daysFrom({ brewOn }: Batch, day: string | null): number | string | null {

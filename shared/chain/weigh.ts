@@ -7,9 +7,10 @@ import { cakeYeastOf, sightOf, type Sight } from './boardLink.ts';
 import { descents, type Descent } from './descent.ts';
 import { inherit } from './inherit.ts';
 import { Inheritances } from './inheritances.ts';
-import { daysFrom, LinkMemo, type Judgement } from './linkMemo.ts';
+import { daysFrom, LinkMemo, sharesText, type Judgement } from './linkMemo.ts';
 import type { Plan } from './plan.ts';
 import { RevisedUses } from './revisedUses.ts';
+import { takersOf } from './shares.ts';
 
 /** One link of a board that a plan touches, before and after. */
 export interface ChangedLink {
@@ -67,7 +68,8 @@ export class Scales {
       use: (id) => uses.get(id) ?? this.sight.use(id),
     };
     const changed: ChangedLink[] = [];
-    for (const laterId of new Set([...behind, ...relinked, ...uses.keys()])) {
+    const sharing = besides(this.sight.layout, draft, [...behind, ...relinked]);
+    for (const laterId of new Set([...behind, ...relinked, ...uses.keys(), ...sharing])) {
       if (!uses.has(laterId) && this.#onlyDescends(laterId, sight)) continue;
       const after = this.#judge(laterId, sight);
       const before = this.standing(laterId);
@@ -91,6 +93,8 @@ export class Scales {
     if (!was || !now || !before || before.id !== earlier?.id) return false;
     if (was.chainId !== now.chainId || before.chainId !== earlier.chainId) return false;
     if (!sameDays(before, was, earlier, now)) return false;
+    if (sharesText(before, laterId, this.sight) !== sharesText(earlier, laterId, sight))
+      return false;
     return this.#lineage(was, this.sight) === this.#lineage(now, sight);
   }
 
@@ -146,6 +150,20 @@ function behindChanges(base: Layout, draft: Plan['draft']): Set<string> {
     hangOn(id);
   }
   return behind;
+}
+
+/** Who takes of the same cakes, before or after: another's part may leave them more or less. */
+function besides(base: Layout, draft: Plan['draft'], changed: readonly string[]): string[] {
+  return changed
+    .flatMap((id) => {
+      const was = base.predecessor(id);
+      const now = draft.predecessor(id);
+      const sources = now && now.id !== was?.id ? [was, now] : [was];
+      return sources.flatMap((source) =>
+        source && draft.branchesOf(source.id).length > 0 ? takersOf(draft, source) : [],
+      );
+    })
+    .map(({ id }) => id);
 }
 
 /** True where the days from brew day to brew day, and to the taking, are as they were. */

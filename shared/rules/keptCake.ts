@@ -35,11 +35,12 @@ export interface KeptCake {
   freeShareAtMost: number | undefined;
 }
 
-/** @param keepL part to keep, litres; undefined: the whole cake. */
+/** @param keepL part to keep, litres; undefined: all that no other wort gets. */
 export function keptCake(link: Around, keepL: number | undefined): KeptCake {
   const whole = link.cake?.volumeL.likely;
-  const clamped = keepL !== undefined && whole !== undefined && keepL > whole;
-  const keptL = clamped || keepL === undefined ? whole : keepL;
+  const free = freeCakeL(whole, link.pour);
+  const clamped = keepL !== undefined && free !== undefined && keepL > free;
+  const keptL = clamped || keepL === undefined ? free : keepL;
   const share =
     keptL === 0 ? 0 : whole === undefined || keptL === undefined ? undefined : keptL / whole;
   const leftL = leftAbove(link);
@@ -57,6 +58,15 @@ export function keptCake(link: Around, keepL: number | undefined): KeptCake {
     ratioAtMost: ratioOf(link.cake?.freshCells, share, link.need),
     ...freeSpace(link, keptL, share, leftL),
   };
+}
+
+/** What of a cake is left when the parts of other worts are taken off, litres. */
+export function freeCakeL(
+  wholeL: number | undefined,
+  { sharedWith = [] }: Pick<PourFacts, 'sharedWith'>,
+): number | undefined {
+  if (wholeL === undefined) return undefined;
+  return Math.max(0, wholeL - sharedWith.reduce((sum, { litres }) => sum + litres, 0));
 }
 
 /** Beer left above the whole cake, litres. */

@@ -85,9 +85,13 @@ export class LinkState {
     return withoutNoise(deltaE00(this.#plannedLab, beerLab(srm, GLASS_CM)));
   }
 
-  /** The part to keep whose low-end estimate meets the need; undefined where unknown. */
+  /**
+   * The part to keep whose low-end estimate meets the need, at most what other worts leave of the
+   * cake; undefined where unknown.
+   */
   get recommended(): { litres: number; kg: number } | undefined {
-    if (this.#recommended === null) this.#recommended = recommendedFor(this.cake, this.need);
+    if (this.#recommended === null)
+      this.#recommended = recommendedFor(this.cake, this.need, this.pour);
     return this.#recommended;
   }
 
