@@ -1,5 +1,6 @@
 import { eq } from 'drizzle-orm';
 import type { Moved, MoveRequest } from '#shared/api/move.ts';
+import { linkSaying } from '#shared/chain/linkChanges.ts';
 import { moveBatch, withRows, type MoveRefusal, type MoveResult } from '#shared/chain/move.ts';
 import type { Member } from '../../auth/whoAsks.ts';
 import { inTransaction } from '../../db/inTransaction.ts';
@@ -11,7 +12,7 @@ import { lockSeason, lockShelves } from '../board/locks.ts';
 import { raiseRevision, writeEntry } from '../board/record.ts';
 import { insertChain } from '../chains/commands.ts';
 import { answerAgain, answerMove } from './answer.ts';
-import { sidesOf } from './standing.ts';
+import { sidesOf, touchesOf } from './standing.ts';
 import { storeRows } from './store.ts';
 
 /** One move: order and dates together, in one transaction under the locks of its shelves. */
@@ -60,8 +61,9 @@ async function store(hand: Hand, wish: MoveRequest, result: Granted): Promise<Mo
     id: wish.id,
     kind: 'move',
     what: result.what,
-    ...sides,
-    touches: sides.after.batches.map(({ id }) => id),
+    before: sides.before,
+    after: { ...sides.after, said: linkSaying(after, wish.batchId) },
+    touches: touchesOf(sides),
   });
   const { chains, shifted, cleared, what } = result;
   const own = { undo: { id: wish.id, what }, redo: null };

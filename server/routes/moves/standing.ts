@@ -43,6 +43,13 @@ export function sidesOf(before: BoardFacts, after: BoardFacts, movedId: string):
   };
 }
 
+/** Rows that a move is about: its batches, the moved one first, and the shelves that it went from and to. */
+export function touchesOf({ before, after }: Sides): string[] {
+  const moved = [before.batches[0]?.chainId, after.batches[0]?.chainId];
+  const shelves = moved.filter((id): id is string => typeof id === 'string');
+  return [...new Set([...after.batches.map(({ id }) => id), ...shelves])];
+}
+
 function sideOf(
   board: BoardFacts,
   standings: ReadonlyMap<string, Standing>,
