@@ -16,6 +16,13 @@ export const canEditYeastsAndVessels = isHead;
 export const canEditSeason = isHead;
 export const canAcceptHolds = isHead;
 export const canInvite = isHead;
+/** Tasters too: what they taste is what the talk is about. */
+export const canTalk = canRead;
+/** Those of others; one's own anybody may. */
+export const canRemoveComments = isHead;
+/** Links to a chain, and guests on it. */
+export const canShare = isHead;
+export const canSeeSharing = brews;
 
 export const abilitiesOf = (member: InRole): Abilities => ({
   editBatches: canEditBatches(member),

@@ -65,6 +65,14 @@ export async function findSignedIn(db: Db, clock: Clock, req: Request): Promise<
   return { person: found.person, tokenHash };
 }
 
+/** Who is signed in, asked in passing: the session is not prolonged and no cookie is given. */
+export async function personOf(db: Db, now: Date, req: Request): Promise<string | null> {
+  const token = tokenIn(req);
+  if (token === null) return null;
+  const [found] = await sessionQuery(db).execute({ tokenHash: hashToken(token), now });
+  return found?.person.id ?? null;
+}
+
 const sessionQuery = oncePer((db: Db) =>
   db
     .select({ person, expiresAt: session.expiresAt })

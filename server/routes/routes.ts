@@ -5,6 +5,7 @@ import { boardRoutes } from './board/router.ts';
 import { breweryRoutes } from './brewery/router.ts';
 import { chainRoutes } from './chains/router.ts';
 import { checkRoutes } from './check/router.ts';
+import { commentRoutes } from './comments/router.ts';
 import { joinRoutes } from './join/router.ts';
 import { liveRoutes } from './live/router.ts';
 import { moveRoutes } from './moves/router.ts';
@@ -12,6 +13,7 @@ import { peopleRoutes } from './people/router.ts';
 import { seasonRoutes } from './season/router.ts';
 import { sessionRoutes } from './session/router.ts';
 import { openApiRoute } from './system/openapi.ts';
+import { shareRoutes } from './share/router.ts';
 import { systemRoutes } from './system/router.ts';
 import { vesselRoutes } from './vessels/router.ts';
 import { yeastRoutes } from './yeasts/router.ts';
@@ -28,9 +30,11 @@ const resources: readonly Route[] = [
   ...yeastRoutes,
   ...vesselRoutes,
   ...chainRoutes,
+  ...commentRoutes,
   ...batchRoutes,
   ...moveRoutes,
   ...liveRoutes,
+  ...shareRoutes,
   ...checkRoutes,
 ];
 

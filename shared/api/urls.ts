@@ -19,6 +19,17 @@ export const api = {
   vessel: (slug: string, id: string) => `${b(slug)}/vessels/${id}`,
   chains: (slug: string) => `${b(slug)}/chains`,
   chain: (slug: string, id: string) => `${b(slug)}/chains/${id}`,
+  /** The talk of a chain. */
+  comments: (slug: string, id: string) => `${b(slug)}/chains/${id}/comments`,
+  comment: (slug: string, id: string, commentId: string) =>
+    `${b(slug)}/chains/${id}/comments/${commentId}`,
+  commentsSeen: (slug: string, id: string) => `${b(slug)}/chains/${id}/comments/seen`,
+  /** Read-only links to one chain. */
+  shareLinks: (slug: string, chainId: string) => `${b(slug)}/chains/${chainId}/share-links`,
+  shareLink: (slug: string, id: string) => `${b(slug)}/share-links/${id}`,
+  /** What such a link shows. */
+  shared: (token: string) => `/api/shared/${encodeURIComponent(token)}`,
+  copies: (slug: string) => `${b(slug)}/copies`,
   batches: (slug: string) => `${b(slug)}/batches`,
   batch: (slug: string, id: string) => `${b(slug)}/batches/${id}`,
   batchStage: (slug: string, id: string) => `${b(slug)}/batches/${id}/stage`,

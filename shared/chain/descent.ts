@@ -67,7 +67,7 @@ function startOf(layout: Layout, batch: Batch): Descent {
 }
 
 /** What slurry from outside hands down to the first beer, as far as it is written down. */
-function broughtAlong({
+export function broughtAlong({
   allergens,
   cultures,
 }: Extract<ChainStart, { kind: 'outside' }>): Inheritance {

@@ -32,6 +32,11 @@ const MAY: Record<string, Role[]> = {
   addChain: BREWERS,
   editChain: BREWERS,
   deleteChain: BREWERS,
+  readTalk: ALL,
+  addComment: ALL,
+  editComment: ALL,
+  removeComment: ALL,
+  markTalkSeen: ALL,
   addBatch: BREWERS,
   editBatch: BREWERS,
   deleteBatch: BREWERS,
@@ -39,6 +44,11 @@ const MAY: Record<string, Role[]> = {
   editLink: BREWERS,
   acceptHold: HEAD,
   withdrawAcceptance: HEAD,
+  listShareLinks: BREWERS,
+  makeShareLink: HEAD,
+  editShareLink: HEAD,
+  withdrawShareLink: HEAD,
+  copySharedChain: BREWERS,
   moveBatch: BREWERS,
   undo: BREWERS,
   redo: BREWERS,
@@ -55,6 +65,7 @@ const OPEN = [
   'signOut',
   'signUp',
   'readJoinLink',
+  'readSharedChain',
   'join',
 ];
 
@@ -84,6 +95,16 @@ beforeAll(async () => {
     chains: season.chainA,
     batches: batch,
     'join-links': link.id,
+    'share-links': (
+      await good<{ id: string }>(
+        season.head.post(api.shareLinks(season.slug, season.chainA), {
+          id: randomUUID(),
+          name: 'Shared',
+          expiresOn: (await boardOf(season.head, season.slug)).today,
+          showPrices: false,
+        }),
+      )
+    ).id,
   };
 });
 afterAll(() => server.close());
@@ -99,7 +120,10 @@ const called = (name: string) => {
 function ask(visitor: Visitor, name: string) {
   const { method, path, body } = called(name);
   const resource = /:brewery\/([a-z-]+)\/:id/.exec(path)?.[1] ?? '';
-  const address = path.replace(':brewery', season.slug).replace(':id', ids[resource] ?? '');
+  const address = path
+    .replace(':brewery', season.slug)
+    .replace(':id', ids[resource] ?? '')
+    .replace(':commentId', randomUUID());
   return visitor.ask(method, address, body ? { body: {} } : {});
 }
 
