@@ -54,7 +54,9 @@ const namesIn = (path: string) =>
 function requestOf({ path, body, ifMatch }: Operation) {
   const names = namesIn(path);
   const params = z.object(
-    Object.fromEntries(names.map((name) => [name, name === 'id' ? z.uuid() : z.string()])),
+    Object.fromEntries(
+      names.map((name) => [name, /^(id|[a-z]+Id)$/.test(name) ? z.uuid() : z.string()]),
+    ),
   );
   return {
     ...(names.length > 0 && { params }),

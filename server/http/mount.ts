@@ -62,9 +62,9 @@ function parse(route: Route, deps: Deps & Services, req: Request, res: Response)
 function idsOf(req: Request): Record<string, string> {
   const params: Record<string, string> = {};
   for (const [name, value] of Object.entries(req.params)) {
-    if (typeof value !== 'string' || (name === 'id' && !uuid.safeParse(value).success))
-      throw notFound();
-    params[name] = name === 'id' ? value.toLowerCase() : value;
+    const isId = /^(id|[a-z]+Id)$/.test(name);
+    if (typeof value !== 'string' || (isId && !uuid.safeParse(value).success)) throw notFound();
+    params[name] = isId ? value.toLowerCase() : value;
   }
   return params;
 }

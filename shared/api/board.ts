@@ -44,5 +44,7 @@ export const board = z.strictObject({
   /** The newest of one's own changes that can be undone, and the newest undone one. */
   undo: z.strictObject({ id: f.id, what: z.string() }).nullable(),
   redo: z.strictObject({ id: f.id, what: z.string() }).nullable(),
+  /** Comments of others that one has not seen, by chain; a chain without any is left out. */
+  unread: z.record(f.id, z.number().int().min(1)),
 });
 export type Board = z.infer<typeof board>;

@@ -10,14 +10,16 @@ import { notFound } from '../../problems.ts';
 import { dayIn } from '../../today.ts';
 import { presentBrewery } from '../brewery/present.ts';
 import { newestOwn } from '../moves/newest.ts';
+import { unreadByChain } from '../comments/read.ts';
 import { loadBoardRows } from './load.ts';
 
-/** A season's board, whole, in three queries. */
+/** A season's board, whole, in a handful of queries. */
 async function readBoard(db: Db, clock: Clock, member: Member): Promise<Board> {
   const { brewery, seasonId, person, role } = member;
-  const [rows, newest] = await Promise.all([
+  const [rows, newest, unread] = await Promise.all([
     loadBoardRows(db, brewery.id, seasonId),
     newestOwn(db, seasonId, person.id),
+    unreadByChain(db, brewery.id, person.id),
   ]);
   if (!rows) throw notFound();
   return {
@@ -26,6 +28,7 @@ async function readBoard(db: Db, clock: Clock, member: Member): Promise<Board> {
     me: { personId: person.id, role, can: abilitiesOf(member) },
     ...rows,
     ...newest,
+    unread,
   };
 }
 
