@@ -51,7 +51,7 @@ export const templateOf = (path: string) => path.replace(/:([a-zA-Z]+)/g, '{$1}'
 const namesIn = (path: string) =>
   Array.from(path.matchAll(/:([a-zA-Z]+)/g), ([, name = '']) => name);
 
-function requestOf({ path, body, ifMatch }: Operation) {
+function requestOf({ path, body, query, ifMatch }: Operation) {
   const names = namesIn(path);
   const params = z.object(
     Object.fromEntries(
@@ -60,6 +60,7 @@ function requestOf({ path, body, ifMatch }: Operation) {
   );
   return {
     ...(names.length > 0 && { params }),
+    ...(query && { query }),
     ...(ifMatch && {
       headers: z.object({
         'If-Match': z.string().openapi({ description: 'ETag of the row that was changed' }),
@@ -99,7 +100,7 @@ function responsesOf(route: Route, problem: z.ZodType) {
 
 /** What can go wrong follows from what the operation asks for. */
 function problemsOf({ operation, who }: Route): ProblemKind[] {
-  const { body, ifMatch, method, path, problems = [] } = operation;
+  const { body, query, ifMatch, method, path, problems = [] } = operation;
   return [
     ...(who === 'anyone' ? [] : (['not-signed-in'] as const)),
     ...(who === 'member' ? (['not-allowed'] as const) : []),
@@ -107,6 +108,7 @@ function problemsOf({ operation, who }: Route): ProblemKind[] {
     ...(method === 'get' ? [] : (['cross-site'] as const)),
     ...(body ? (['invalid-request', 'unreadable-body', 'too-large', 'not-json'] as const) : []),
     ...(ifMatch ? (['version-missing', 'changed-since'] as const) : []),
+    ...(query && !body ? (['invalid-request'] as const) : []),
     ...problems,
     'unexpected',
   ];

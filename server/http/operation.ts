@@ -15,6 +15,8 @@ export interface Operation<Body = unknown> {
   path: string;
   summary: string;
   body?: z.ZodType<Body>;
+  /** What may stand behind the question mark; the handler parses it. */
+  query?: z.ZodObject;
   /** Null: an answer without content. */
   answer: z.ZodType | null;
   status: 200 | 201 | 204;

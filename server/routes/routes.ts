@@ -6,10 +6,12 @@ import { breweryRoutes } from './brewery/router.ts';
 import { chainRoutes } from './chains/router.ts';
 import { checkRoutes } from './check/router.ts';
 import { commentRoutes } from './comments/router.ts';
+import { houseRulesRoutes } from './house-rules/router.ts';
 import { joinRoutes } from './join/router.ts';
 import { liveRoutes } from './live/router.ts';
 import { moveRoutes } from './moves/router.ts';
 import { peopleRoutes } from './people/router.ts';
+import { recordRoutes } from './record/router.ts';
 import { seasonRoutes } from './season/router.ts';
 import { sessionRoutes } from './session/router.ts';
 import { openApiRoute } from './system/openapi.ts';
@@ -27,6 +29,8 @@ const resources: readonly Route[] = [
   ...peopleRoutes,
   ...boardRoutes,
   ...seasonRoutes,
+  ...recordRoutes,
+  ...houseRulesRoutes,
   ...yeastRoutes,
   ...vesselRoutes,
   ...chainRoutes,

@@ -54,3 +54,7 @@ export const chainPatch = z
   })
   .partial();
 export type ChainPatch = z.infer<typeof chainPatch>;
+
+/** The board's revision once a chain's dates follow its cake. */
+export const datesPulled = z.strictObject({ revision: z.number().int().min(0) });
+export type DatesPulled = z.infer<typeof datesPulled>;

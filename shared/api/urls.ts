@@ -13,12 +13,16 @@ export const api = {
   season: (slug: string, id: string) => `${b(slug)}/seasons/${id}`,
   /** Server-Sent Events. */
   seasonEvents: (slug: string, id: string) => `${b(slug)}/seasons/${id}/events`,
+  /** Everything that happened in a season, newest first. */
+  changes: (slug: string, seasonId: string) => `${b(slug)}/seasons/${seasonId}/changes`,
+  houseRules: (slug: string) => `${b(slug)}/house-rules`,
   yeasts: (slug: string) => `${b(slug)}/yeasts`,
   yeast: (slug: string, id: string) => `${b(slug)}/yeasts/${id}`,
   vessels: (slug: string) => `${b(slug)}/vessels`,
   vessel: (slug: string, id: string) => `${b(slug)}/vessels/${id}`,
   chains: (slug: string) => `${b(slug)}/chains`,
   chain: (slug: string, id: string) => `${b(slug)}/chains/${id}`,
+  pullDates: (slug: string, id: string) => `${b(slug)}/chains/${id}/pull`,
   /** The talk of a chain. */
   comments: (slug: string, id: string) => `${b(slug)}/chains/${id}/comments`,
   comment: (slug: string, id: string, commentId: string) =>

@@ -18,6 +18,7 @@ export interface LinkSaying {
 export interface LinkChange {
   /** The later batch of the link. */
   batchId: string;
+  name: string;
   /** Null: there was no link, or is none. */
   from: LinkSaying | null;
   to: LinkSaying | null;
@@ -34,6 +35,17 @@ export function linkSaying(board: BoardFacts, batchId: string): LinkSaying | nul
   return input && sayingOf(checkLink(input));
 }
 
+const nameIn = (boards: readonly BoardFacts[], id: string): string =>
+  boards.flatMap(({ batches }) => batches).find((batch) => batch.id === id)?.name ?? '';
+
+/** What the link into one batch said before and says now, whether or not that differs. */
+export const linkChange = (before: BoardFacts, after: BoardFacts, batchId: string): LinkChange => ({
+  batchId,
+  name: nameIn([after, before], batchId),
+  from: linkSaying(before, batchId),
+  to: linkSaying(after, batchId),
+});
+
 /** Links whose verdict or worst reason differs, in the order of the later board's shelves. */
 export function linkChanges(
   before: BoardFacts,
@@ -46,6 +58,6 @@ export function linkChanges(
     const from = old ? sayingOf(old) : null;
     const to = now ? sayingOf(now) : null;
     const same = from?.verdict === to?.verdict && from?.reason === to?.reason;
-    return same ? [] : [{ batchId, from, to }];
+    return same ? [] : [{ batchId, name: nameIn([after, before], batchId), from, to }];
   });
 }

@@ -1,17 +1,17 @@
 import { eq } from 'drizzle-orm';
 import type { Moved, MoveRequest } from '#shared/api/move.ts';
-import { linkSaying } from '#shared/chain/linkChanges.ts';
-import { moveBatch, withRows, type MoveRefusal, type MoveResult } from '#shared/chain/move.ts';
+import { linkChange } from '#shared/chain/linkChanges.ts';
+import { moveBatch, withRows, type MoveResult } from '#shared/chain/move.ts';
 import type { Member } from '../../auth/whoAsks.ts';
 import { inTransaction } from '../../db/inTransaction.ts';
 import { change } from '../../db/schema/change.ts';
 import type { Deps } from '../../deps.ts';
-import { notFound, problem } from '../../problems.ts';
 import { readBoard, type Hand } from '../board/changeBoard.ts';
 import { lockSeason, lockShelves } from '../board/locks.ts';
 import { raiseRevision, writeEntry } from '../board/record.ts';
 import { insertChain } from '../chains/commands.ts';
 import { answerAgain, answerMove } from './answer.ts';
+import { refused } from './refused.ts';
 import { sidesOf, touchesOf } from './standing.ts';
 import { storeRows } from './store.ts';
 
@@ -32,7 +32,7 @@ export function move(
     const [again] = await tx.select().from(change).where(eq(change.id, wish.id));
     if (again) return answerAgain(hand, again);
     const result = moveBatch(board, wish);
-    if (!result.ok) throw refused(hand, wish, result);
+    if (!result.ok) throw await refused(hand, wish, result);
     return result.batches.length === 0
       ? answerMove(hand, { changeId: wish.id, what: result.what, revision: board.season.revision })
       : store(hand, wish, result);
@@ -62,7 +62,7 @@ async function store(hand: Hand, wish: MoveRequest, result: Granted): Promise<Mo
     kind: 'move',
     what: result.what,
     before: sides.before,
-    after: { ...sides.after, said: linkSaying(after, wish.batchId) },
+    after: { ...sides.after, links: [linkChange(board, after, wish.batchId)] },
     touches: touchesOf(sides),
   });
   const { chains, shifted, cleared, what } = result;
@@ -77,14 +77,4 @@ async function store(hand: Hand, wish: MoveRequest, result: Granted): Promise<Mo
     cleared,
     own,
   });
-}
-
-function refused(
-  { board }: Hand,
-  wish: MoveRequest,
-  { why, detail }: { why: MoveRefusal; detail: string },
-) {
-  const current = board.batches.find(({ id }) => id === wish.batchId);
-  if (!current) return notFound();
-  return problem(why === 'moved-elsewhere' ? why : 'place-taken', { detail, current });
 }

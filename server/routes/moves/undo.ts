@@ -1,6 +1,6 @@
 import { and, desc, eq } from 'drizzle-orm';
 import type { Moved } from '#shared/api/move.ts';
-import { linkSaying } from '#shared/chain/linkChanges.ts';
+import { linkChange } from '#shared/chain/linkChanges.ts';
 import { withRows } from '#shared/chain/move.ts';
 import type { Member } from '../../auth/whoAsks.ts';
 import { inTransaction } from '../../db/inTransaction.ts';
@@ -88,7 +88,7 @@ async function store(hand: Hand, way: Way, row: ChangeRow, result: Granted): Pro
     kind: way,
     what,
     before: sides.before,
-    after: { ...sides.after, said: linkSaying(after, row.touches[0] ?? '') },
+    after: { ...sides.after, links: [linkChange(board, after, row.touches[0] ?? '')] },
     touches: touchesOf(sides),
     ofChange: row.id,
   });
