@@ -28,6 +28,11 @@ export const router = createBrowserRouter([
         lazy: () => lazyPage(async () => (await import('./routes/join/JoinPage.tsx')).JoinPage),
       },
       {
+        path: 'shared/:token',
+        lazy: () =>
+          lazyPage(async () => (await import('./routes/shared/SharedPage.tsx')).SharedPage),
+      },
+      {
         path: 'about/checks',
         lazy: () =>
           lazyPage(async () => (await import('./routes/checks/ChecksPage.tsx')).ChecksPage),

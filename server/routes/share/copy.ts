@@ -95,15 +95,23 @@ async function insertBatches(
 
 /** What was planned of a beer, with what was read where no plan was; its day stays. */
 function planOf({ read, link, ...row }: Batch) {
-  const { name, style, srm, ibu, fermentC, daysUnderBeer, brewOn, trub } = row;
-  const { dryHops, additions, allergens, cultures } = row;
   return {
     ...linkColumns({ ...UNSETTLED_LINK, ...settledOf(link) }),
-    ...{ name, style, srm, ibu, fermentC, daysUnderBeer, brewOn, trub },
-    ...{ dryHops, additions, allergens, cultures },
+    name: row.name,
+    style: row.style,
     volumeL: row.volumeL ?? read.volumeL,
     og: row.og ?? read.og,
     fg: row.fg ?? read.fg,
+    srm: row.srm,
+    ibu: row.ibu,
+    fermentC: row.fermentC,
+    daysUnderBeer: row.daysUnderBeer,
+    brewOn: row.brewOn,
+    dryHops: row.dryHops,
+    additions: row.additions,
+    allergens: row.allergens,
+    cultures: row.cultures,
+    trub: row.trub,
   };
 }
 

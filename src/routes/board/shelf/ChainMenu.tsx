@@ -5,13 +5,14 @@ import { useChainDelete } from '../../../api/chains.ts';
 import { ConfirmDialog } from '../../../components/ui/ConfirmDialog.tsx';
 import { Menu, MenuItem, MenuSeparator } from '../../../components/ui/Menu.tsx';
 import { ChainFormDialog } from '../../chain-form/ChainFormDialog.tsx';
+import { ShareDialog } from '../share/ShareDialog.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { count } from '../view/words.ts';
 import { usePullDates } from './usePullDates.ts';
 
 /** Edit the shelf, pull its dates along, delete it. */
 export function ChainMenu({ chain }: { chain: Chain }) {
-  const [asked, setAsked] = useState<'edit' | 'delete' | null>(null);
+  const [asked, setAsked] = useState<'edit' | 'share' | 'delete' | null>(null);
   const pull = usePullDates(chain);
   const close = () => setAsked(null);
   return (
@@ -30,6 +31,7 @@ export function ChainMenu({ chain }: { chain: Chain }) {
         }
       >
         <MenuItem onSelect={() => setAsked('edit')}>Edit the shelf</MenuItem>
+        <MenuItem onSelect={() => setAsked('share')}>Share</MenuItem>
         <MenuItem disabled={pull.shifts === 0} onSelect={pull.run}>
           {pull.shifts === 0 ? 'Dates follow the cake' : `Pull ${count(pull.shifts, 'date')} along`}
         </MenuItem>
@@ -39,6 +41,7 @@ export function ChainMenu({ chain }: { chain: Chain }) {
         </MenuItem>
       </Menu>
       {asked === 'edit' && <ChainFormDialog chain={chain} onClose={close} />}
+      {asked === 'share' && <ShareDialog chain={chain} onClose={close} />}
       {asked === 'delete' && <DeleteChain chain={chain} onClose={close} />}
     </>
   );

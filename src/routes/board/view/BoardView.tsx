@@ -21,7 +21,7 @@ export interface BoardViewValue {
 
 const BoardView = createContext<BoardViewValue | null>(null);
 
-const NOTHING: Abilities = {
+export const NOTHING: Abilities = {
   editBatches: false,
   moveBatches: false,
   editChains: false,
@@ -50,6 +50,11 @@ export function BoardViewProvider({ children }: { children: ReactNode }) {
     }),
     [board, judged, units, slug, online],
   );
+  return <BoardView value={value}>{children}</BoardView>;
+}
+
+/** The same parts for a board that comes from elsewhere, such as behind a link. */
+export function BoardViewOf({ value, children }: { value: BoardViewValue; children: ReactNode }) {
   return <BoardView value={value}>{children}</BoardView>;
 }
 
