@@ -31,7 +31,7 @@ beforeAll(async () => {
 afterAll(() => server.close());
 
 const CHAIN: CommentAbout = { kind: 'chain' };
-const say = (who: Visitor, text: string, about = CHAIN, id: string = randomUUID()) =>
+const say = (who: Visitor, text: string, about: CommentAbout = CHAIN, id: string = randomUUID()) =>
   who.post(api.comments(season.slug, season.chainA), { id, about, text });
 const said = (...args: Parameters<typeof say>) => good<Comment>(say(...args));
 const talkOf = (who: Visitor, chainId = season.chainA) =>

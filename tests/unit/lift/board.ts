@@ -52,6 +52,7 @@ export function twoShelves(): Board {
     members: [],
     undo: null,
     redo: null,
+    unread: {},
   };
 }
 
