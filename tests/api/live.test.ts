@@ -17,6 +17,7 @@ import {
   namesOn,
   shelve,
   testSeason,
+  wish,
   type TestSeason,
 } from '../support/season.ts';
 import { startTestServer, TEST_KEYS, type TestServer } from '../support/server.ts';
@@ -138,6 +139,41 @@ describe('two people at two processes on one database', () => {
     await expect
       .poll(() => one.db.select().from(presence).where(eq(presence.streamId, streamId)))
       .toEqual([]);
+  });
+});
+
+describe('a move that no longer fits', () => {
+  const name = async (visitor: Visitor) => (await good<Person>(visitor.get(api.session))).name;
+
+  it('is refused with who moved the batch, and to where', async () => {
+    const { batches } = await boardOf(season.head, season.slug);
+    const seenOn = batches.find(({ id }) => id === batchId)?.chainId ?? null;
+    await moveAcross(brewer);
+    const late = wish({ batchId, toChainId: 'bench', expectedChainId: seenOn });
+    const { status, body } = await season.head.post(api.moves(season.slug), late);
+    const who = await name(brewer);
+    expect([status, body]).toMatchObject([
+      409,
+      {
+        type: '/problems/moved-elsewhere',
+        detail: expect.stringContaining(`${who}: Moved Creek Blonde`),
+        current: { id: batchId, changedBy: who },
+      },
+    ]);
+  });
+
+  it('is refused with who deleted the batch', async () => {
+    const [gone = ''] = await shelve(season, null, [{ name: 'Ebb Pale' }]);
+    const version = (await boardOf(brewer, season.slug)).batches.find(
+      ({ id }) => id === gone,
+    )?.version;
+    await good(brewer.ask('DELETE', api.batch(season.slug, gone), { version: version ?? 0 }));
+    const late = wish({ batchId: gone, toChainId: season.chainA, expectedChainId: null });
+    const { status, body } = await season.head.post(api.moves(season.slug), late);
+    expect([status, body]).toMatchObject([
+      404,
+      { detail: `${await name(brewer)}: Deleted Ebb Pale` },
+    ]);
   });
 });
 

@@ -18,6 +18,7 @@ const watch = forMember(
     path: pathOf(api.seasonEvents(':brewery', ':id')),
     summary:
       'What happens on a season’s board, as Server-Sent Events: revisions after `since` (or Last-Event-ID), and who is here',
+    query: liveQuery,
     answer: null,
     stream: true,
     status: 200,

@@ -6,6 +6,7 @@ import { BatchForm } from './BatchForm.tsx';
 export interface BatchFormDialogProps {
   mode: 'new' | 'edit' | 'duplicate';
   batch?: Batch | null;
+  isGone?: boolean;
   onClose: () => void;
 }
 
@@ -15,7 +16,12 @@ const TITLES = {
   duplicate: (name: string) => `A copy of ${name}`,
 };
 
-export function BatchFormDialog({ mode, batch = null, onClose }: BatchFormDialogProps) {
+export function BatchFormDialog({
+  mode,
+  batch = null,
+  isGone = false,
+  onClose,
+}: BatchFormDialogProps) {
   return (
     <Dialog
       open
@@ -28,6 +34,7 @@ export function BatchFormDialog({ mode, batch = null, onClose }: BatchFormDialog
       <BatchForm
         mode={mode}
         batch={batch}
+        isGone={isGone}
         onCancel={onClose}
         onDone={() => {
           void say(mode === 'edit' ? 'Saved.' : 'The batch is on the bench.');

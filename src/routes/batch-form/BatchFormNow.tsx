@@ -18,6 +18,8 @@ export interface BatchFormProps {
   mode: 'new' | 'edit' | 'duplicate';
   /** The batch that is edited or copied. */
   batch?: Batch | null;
+  /** Somebody deleted it while it was open. */
+  isGone?: boolean;
   /** Told of the batch's id once it is saved. */
   onDone: (id: string) => void;
   onCancel?: () => void;
@@ -25,7 +27,13 @@ export interface BatchFormProps {
 
 const ACTIONS = { new: 'Put on the bench', edit: 'Save', duplicate: 'Put the copy on the bench' };
 
-export function BatchFormNow({ mode, batch = null, onDone, onCancel }: BatchFormProps) {
+export function BatchFormNow({
+  mode,
+  batch = null,
+  isGone = false,
+  onDone,
+  onCancel,
+}: BatchFormProps) {
   const { slug } = useBrewery();
   const board = useBoard();
   const units = useUnits();
@@ -36,6 +44,7 @@ export function BatchFormNow({ mode, batch = null, onDone, onCancel }: BatchForm
   return (
     <RowForm
       row={mode === 'edit' ? batch : null}
+      isGone={isGone}
       rowSchema={batchContract}
       contract={batchCreate}
       keepsTyped

@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import { Dialog } from '../../components/ui/Dialog.tsx';
 import { BatchFormDialog } from '../batch-form/BatchFormDialog.tsx';
 import { ChainFormDialog } from '../chain-form/ChainFormDialog.tsx';
@@ -21,7 +22,11 @@ export function BoardForms() {
 /** A lost connection closes no form: what was typed waits in it. */
 function OpenedBatch({ batchId, onClose }: { batchId: string; onClose: () => void }) {
   const { board, index } = useBoardView();
-  const batch = index.batch(batchId);
+  const now = index.batch(batchId);
+  // Whoever deletes it elsewhere closes no form here.
+  const [seen, setSeen] = useState(now);
+  if (now && now !== seen) setSeen(now);
+  const batch = now ?? seen;
   if (!batch)
     return (
       <Dialog open onClose={onClose} title="This batch is not on the board">
@@ -29,7 +34,7 @@ function OpenedBatch({ batchId, onClose }: { batchId: string; onClose: () => voi
       </Dialog>
     );
   if (!board.me.can.editBatches) return <BatchFacts batch={batch} onClose={onClose} />;
-  return <BatchFormDialog mode="edit" batch={batch} onClose={onClose} />;
+  return <BatchFormDialog mode="edit" batch={batch} isGone={!now} onClose={onClose} />;
 }
 
 interface NewRowProps {
