@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { resolveHouseRules } from '../rules/resolve.ts';
+import { limitIssue, LIMIT_PAIRS, softenedIssue } from '../rules/resolve.ts';
 import { houseRuleChanges, type HouseRuleChanges } from './board.ts';
 import * as f from './fields.ts';
 
@@ -32,9 +32,16 @@ export type HouseRulesRow = z.infer<typeof houseRules>;
 /** All changes as they shall stand; limits in order, nothing softened that may not be. */
 export const houseRulesRequest: z.ZodType<HouseRuleChanges> = houseRuleChanges.superRefine(
   (changes, ctx) => {
-    const resolved = resolveHouseRules(changes);
-    if (resolved.ok) return;
-    for (const { key, detail } of resolved.issues)
-      ctx.addIssue({ code: 'custom', path: [key], message: detail });
+    // The bounds are the contract's own; one word at a field is enough.
+    const told = new Set<string>(ctx.issues.map(({ path }) => String(path?.[0])));
+    const issues = [
+      ...LIMIT_PAIRS.map((pair) => limitIssue(pair, changes)),
+      softenedIssue(changes.softened),
+    ];
+    for (const issue of issues) {
+      if (!issue || told.has(issue.key)) continue;
+      told.add(issue.key);
+      ctx.addIssue({ code: 'custom', path: [issue.key], message: issue.detail });
+    }
   },
 );
