@@ -36,5 +36,4 @@ test('a shared chain runs down a phone’s page', async ({ brewery, db, page }) 
     () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
   );
   expect(wider).toBe(0);
-  await page.screenshot({ path: 'test-results/shared-phone.png', fullPage: true });
 });

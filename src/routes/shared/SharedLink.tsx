@@ -52,7 +52,7 @@ export function SharedLink({ earlier, later, link }: SharedLinkProps) {
       <div
         id={id}
         hidden={!isOpen}
-        className="mt-1 rounded-card border border-line bg-paper px-4 py-3"
+        className="relative z-10 mt-1 rounded-card border border-line bg-paper px-4 py-3 max-tablet:-ml-[100px]"
       >
         {isOpen && <Opened earlier={earlier} later={later} link={link} />}
       </div>
