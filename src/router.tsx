@@ -53,6 +53,11 @@ export const router = createBrowserRouter([
               lazyPage(async () => (await import('./routes/board/BoardPage.tsx')).BoardPage),
           },
           {
+            path: 'chains/:id',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/chain/ChainPage.tsx')).ChainPage),
+          },
+          {
             path: 'yeasts',
             lazy: () =>
               lazyPage(async () => (await import('./routes/yeasts/YeastsPage.tsx')).YeastsPage),

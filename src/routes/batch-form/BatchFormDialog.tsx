@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import { Dialog } from '../../components/ui/Dialog.tsx';
 import { say } from '../../components/ui/Toast.tsx';
@@ -8,6 +9,8 @@ export interface BatchFormDialogProps {
   batch?: Batch | null;
   isGone?: boolean;
   onClose: () => void;
+  /** Under the form, and no part of it. */
+  foot?: ReactNode;
 }
 
 const TITLES = {
@@ -21,6 +24,7 @@ export function BatchFormDialog({
   batch = null,
   isGone = false,
   onClose,
+  foot,
 }: BatchFormDialogProps) {
   return (
     <Dialog
@@ -41,6 +45,7 @@ export function BatchFormDialog({
           onClose();
         }}
       />
+      {foot && <div className="mt-10">{foot}</div>}
     </Dialog>
   );
 }

@@ -1,10 +1,14 @@
 import { useState } from 'react';
+import { lazyPart } from '../../app/lazyPart.tsx';
 import { Dialog } from '../../components/ui/Dialog.tsx';
 import { BatchFormDialog } from '../batch-form/BatchFormDialog.tsx';
 import { ChainFormDialog } from '../chain-form/ChainFormDialog.tsx';
 import { BatchFacts } from './batch/BatchFacts.tsx';
 import { useBoardView } from './view/BoardView.tsx';
 import { useBoardPanel, type BoardPanel } from './view/useBoardPanel.ts';
+
+/** Comes with the first batch that is opened. */
+const FoldedTalk = lazyPart(async () => (await import('../talk/FoldedTalk.tsx')).FoldedTalk);
 
 /** The form that the address asks for, if any; whoever may not write sees the facts. */
 export function BoardForms() {
@@ -33,8 +37,11 @@ function OpenedBatch({ batchId, onClose }: { batchId: string; onClose: () => voi
         <p className="text-ink2">Somebody deleted it, or the address is of another season.</p>
       </Dialog>
     );
-  if (!board.me.can.editBatches) return <BatchFacts batch={batch} onClose={onClose} />;
-  return <BatchFormDialog mode="edit" batch={batch} isGone={!now} onClose={onClose} />;
+  const talk = now?.chainId && (
+    <FoldedTalk chainId={now.chainId} about={{ kind: 'batch', batchId }} />
+  );
+  if (!board.me.can.editBatches) return <BatchFacts batch={batch} onClose={onClose} foot={talk} />;
+  return <BatchFormDialog mode="edit" batch={batch} isGone={!now} onClose={onClose} foot={talk} />;
 }
 
 interface NewRowProps {

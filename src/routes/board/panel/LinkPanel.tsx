@@ -1,3 +1,4 @@
+import { FoldedTalk } from '../../talk/FoldedTalk.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { useBoardPanel } from '../view/useBoardPanel.ts';
 import { AcceptHold } from './AcceptHold.tsx';
@@ -46,6 +47,9 @@ function OpenedLink({ laterId, earlierId }: { laterId: string; earlierId: string
       <Advice advice={answer.advice} />
       <PassedChecks passed={answer.passed} />
       <LinkFacts later={later} />
+      {later.chainId !== null && (
+        <FoldedTalk chainId={later.chainId} about={{ kind: 'link', batchId: later.id }} />
+      )}
     </PanelFrame>
   );
 }

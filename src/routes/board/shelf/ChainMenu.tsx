@@ -1,7 +1,9 @@
 import { ChevronDown } from 'lucide-react';
 import { useState } from 'react';
+import { Link } from 'react-router-dom';
 import type { Chain } from '#shared/api/chain.ts';
 import { useChainDelete } from '../../../api/chains.ts';
+import { useBrewery } from '../../../app/useBrewery.ts';
 import { ConfirmDialog } from '../../../components/ui/ConfirmDialog.tsx';
 import { Menu, MenuItem, MenuSeparator } from '../../../components/ui/Menu.tsx';
 import { ChainFormDialog } from '../../chain-form/ChainFormDialog.tsx';
@@ -13,6 +15,7 @@ import { usePullDates } from './usePullDates.ts';
 /** Edit the shelf, pull its dates along, delete it. */
 export function ChainMenu({ chain }: { chain: Chain }) {
   const [asked, setAsked] = useState<'edit' | 'share' | 'delete' | null>(null);
+  const { path } = useBrewery();
   const pull = usePullDates(chain);
   const close = () => setAsked(null);
   return (
@@ -30,6 +33,9 @@ export function ChainMenu({ chain }: { chain: Chain }) {
           </button>
         }
       >
+        <MenuItem asChild>
+          <Link to={path(`chains/${chain.id}`)}>Open the chain</Link>
+        </MenuItem>
         <MenuItem onSelect={() => setAsked('edit')}>Edit the shelf</MenuItem>
         <MenuItem onSelect={() => setAsked('share')}>Share</MenuItem>
         <MenuItem disabled={pull.shifts === 0} onSelect={pull.run}>

@@ -1,0 +1,42 @@
+import type { Role } from '#shared/api/people.ts';
+import { useBrewery } from '../../../app/useBrewery.ts';
+import { ROLE_WORDS } from '../../../app/words.ts';
+import { Avatar } from '../../../components/drawn/Avatar.tsx';
+import { LinkButton } from '../../../components/ui/LinkButton.tsx';
+import { useBoardView } from '../../board/view/BoardView.tsx';
+
+const DOES: Record<Role, string> = {
+  'head-brewer': 'can pour past a hold',
+  brewer: 'brews and racks',
+  taster: 'reads and comments',
+};
+
+/** Who shares this chain, and what each does on it. */
+export function WhoIsOn() {
+  const { board } = useBoardView();
+  const { path } = useBrewery();
+  return (
+    <>
+      <h2 className="text-shelf">Who shares this chain</h2>
+      <ul className="mt-1">
+        {board.members.map(({ personId, name, initials, role }, place) => (
+          <li key={personId} className="flex items-center gap-2.5 border-b border-line2 py-2">
+            <span aria-hidden>
+              <Avatar initials={initials} name={name} place={place} />
+            </span>
+            <div className="min-w-0 flex-1 leading-tight">
+              <b className="wrap-anywhere">{name}</b>
+              <p className="text-small text-ink2">{DOES[role]}</p>
+            </div>
+            <span className="text-small text-ink2">{ROLE_WORDS[role].toLowerCase()}</span>
+          </li>
+        ))}
+      </ul>
+      {board.me.can.invite && (
+        <LinkButton to={path('people')} size="small" className="mt-2.5 print:hidden">
+          Invite someone
+        </LinkButton>
+      )}
+    </>
+  );
+}
