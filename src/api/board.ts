@@ -19,7 +19,7 @@ export function boardQuery(slug: string) {
     queryFn: async ({ client, signal }): Promise<Board> => {
       const before = client.getQueryData<Board>(queryKey);
       const fresh = await request(boardContract, 'GET', api.board(slug), { signal });
-      await boardStillness.quiet();
+      await boardStillness.quiet(fresh);
       return newest(before, client.getQueryData<Board>(queryKey), fresh);
     },
     staleTime: 30_000,

@@ -1,12 +1,15 @@
 import type { QueryClient } from '@tanstack/react-query';
 import { boardQuery } from '../api/board.ts';
 import { pendingOf } from '../api/pendingStore.ts';
+import { boardStillness } from '../api/stillness.ts';
 
 export interface CatchUp {
   /** The server is at this revision. */
   heard(revision: number): void;
   /** Something that the revision does not count changed: a chain that is here as a guest. */
   elsewhere(): void;
+  /** At each heartbeat: a read that failed is tried again. */
+  again(): void;
 }
 
 /**
@@ -25,6 +28,8 @@ export function createCatchUp(client: QueryClient, slug: string): CatchUp {
     return board !== undefined && (isForced || board.season.revision < wanted);
   };
   const work = async () => {
+    // A read that waits for the end of a drag is older than what was heard since.
+    if (isWorking && boardStillness.isHeld()) void client.invalidateQueries({ queryKey });
     if (isWorking) return;
     isWorking = true;
     await atRest(client, slug);
@@ -46,6 +51,7 @@ export function createCatchUp(client: QueryClient, slug: string): CatchUp {
       isForced = true;
       void work();
     },
+    again: () => void work(),
   };
 }
 

@@ -35,7 +35,7 @@ export function useLiveSeason(slug: string) {
           // Who asks is told by the shell: to sign in, or that there is nothing here.
           return void client.invalidateQueries(sessionQuery);
         case 'beat':
-          return;
+          return catchUp.again();
       }
     };
     const stop = watch(slug, seasonId, hear);
