@@ -73,6 +73,16 @@ export const router = createBrowserRouter([
               lazyPage(async () => (await import('./routes/people/PeoplePage.tsx')).PeoplePage),
           },
           {
+            path: 'rules',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/rules/RulesPage.tsx')).RulesPage),
+          },
+          {
+            path: 'record',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/record/RecordPage.tsx')).RecordPage),
+          },
+          {
             path: 'season',
             lazy: () =>
               lazyPage(async () => (await import('./routes/season/SeasonPage.tsx')).SeasonPage),

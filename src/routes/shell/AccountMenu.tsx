@@ -40,6 +40,12 @@ export function AccountMenu() {
         <Link to={brewery.path('account')}>Account and units</Link>
       </MenuItem>
       <MenuItem asChild>
+        <Link to={brewery.path('rules')}>House rules</Link>
+      </MenuItem>
+      <MenuItem asChild>
+        <Link to={brewery.path('record')}>Record</Link>
+      </MenuItem>
+      <MenuItem asChild>
         <Link to="/about/checks">How the checks work</Link>
       </MenuItem>
       <OtherBreweries />

@@ -56,7 +56,7 @@ function TabFace({ active, icon, name }: { active: boolean; icon: ReactNode; nam
 function More() {
   const brewery = useBrewery();
   const { pathname } = useLocation();
-  const active = /\/(people|season|account)$/.test(pathname);
+  const active = /\/(people|season|rules|record|account)$/.test(pathname);
   return (
     <Menu
       trigger={
@@ -70,6 +70,12 @@ function More() {
       </MenuItem>
       <MenuItem asChild>
         <Link to={brewery.path('season')}>Season</Link>
+      </MenuItem>
+      <MenuItem asChild>
+        <Link to={brewery.path('rules')}>House rules</Link>
+      </MenuItem>
+      <MenuItem asChild>
+        <Link to={brewery.path('record')}>Record</Link>
       </MenuItem>
       <MenuItem asChild>
         <Link to={brewery.path('account')}>Account and units</Link>

@@ -1,7 +1,7 @@
 import { useMemo } from 'react';
 import type { Chain } from '#shared/api/chain.ts';
 import { pullChain } from '#shared/chain/dates.ts';
-import { useBatchPatch } from '../../../api/batches.ts';
+import { usePullChain } from '../../../api/chains.ts';
 import { sentenceOf } from '../../../api/errors.ts';
 import { say } from '../../../components/ui/Toast.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
@@ -9,19 +9,13 @@ import { count } from '../view/words.ts';
 
 /** Every pencilled batch of a chain brewed on the day the yeast before it is taken. */
 export function usePullDates(chain: Chain) {
-  const { board, index, slug } = useBoardView();
+  const { board, slug } = useBoardView();
   const { shifted } = useMemo(() => pullChain(board, chain.id), [board, chain.id]);
-  const { mutateAsync } = useBatchPatch(slug);
-  const run = async () => {
-    try {
-      for (const { batchId, to } of shifted) {
-        const version = index.batch(batchId)?.version;
-        if (version) await mutateAsync({ id: batchId, version, patch: { brewOn: to } });
-      }
-      say(`${count(shifted.length, 'date')} on ${chain.name} pulled along`);
-    } catch (error) {
-      say(sentenceOf(error));
-    }
-  };
-  return { shifts: shifted.length, run: () => void run() };
+  const { mutate } = usePullChain(slug);
+  const run = () =>
+    mutate(chain.id, {
+      onSuccess: () => say(`${count(shifted.length, 'date')} on ${chain.name} pulled along`),
+      onError: (error) => say(sentenceOf(error)),
+    });
+  return { shifts: shifted.length, run };
 }
