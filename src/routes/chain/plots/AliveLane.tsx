@@ -3,10 +3,10 @@ import { COLUMN, middleOf, widthOf } from '../columns.ts';
 import { timesText } from '../courseWords.ts';
 import { Label } from './Label.tsx';
 import { Lane } from './Lane.tsx';
-import { ratioScaleOf } from './scales.ts';
+import { labelSide, ratioScaleOf } from './scales.ts';
 import { Strokes } from './ValueLane.tsx';
 
-const HEIGHT = 136;
+const HEIGHT = 150;
 /** What a wort needs, as a multiple of itself. */
 const NEED = 1;
 
@@ -15,7 +15,7 @@ export function AliveLane({ course }: { course: Course }) {
   const { points } = course;
   const ratios = points.map(({ alive }) => alive?.ratio.likely ?? null);
   const ends = points.flatMap(({ alive }) => (alive ? [alive.ratio.low, alive.ratio.high] : []));
-  const scale = ratioScaleOf([NEED, ...ends], { top: 18, bottom: HEIGHT - 18, least: 2 });
+  const scale = ratioScaleOf([NEED, ...ends], { top: 34, bottom: HEIGHT - 20, least: 2 });
   const width = widthOf(points.length);
   const need = scale(NEED);
   return (
@@ -40,6 +40,7 @@ export function AliveLane({ course }: { course: Course }) {
             </Label>
           );
         const { low, likely, high } = alive.ratio;
+        const label = scale(likely) + (labelSide(ratios, place) === 'above' ? -22 : 22);
         return (
           <g key={batchId}>
             <path
@@ -65,10 +66,10 @@ export function AliveLane({ course }: { course: Course }) {
             >
               {generation}
             </text>
-            <Label x={x + 18} y={scale(likely) - 2}>
+            <Label x={x + 18} y={label}>
               {timesText(likely)}
             </Label>
-            <Label x={x + 18} y={scale(likely) + 14} quiet>
+            <Label x={x + 18} y={label + 15} quiet>
               {timesText(low)} to {timesText(high)}
             </Label>
           </g>

@@ -13,7 +13,7 @@ import { COLUMN, widthOf } from '../columns.ts';
 import { StepPill } from './StepPill.tsx';
 
 const TOP = 118;
-const HEIGHT = TOP + 56;
+const HEIGHT = TOP + 64;
 
 /** The chain's shelf on the columns of the plots: vessels, the cake between them, what each link says. */
 export function ChainShelf({ chain, course }: { chain: Chain; course: Course }) {
