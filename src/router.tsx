@@ -63,6 +63,11 @@ export const router = createBrowserRouter([
               lazyPage(async () => (await import('./routes/yeasts/YeastsPage.tsx')).YeastsPage),
           },
           {
+            path: 'yeasts/:id/family',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/family/FamilyPage.tsx')).FamilyPage),
+          },
+          {
             path: 'vessels',
             lazy: () =>
               lazyPage(async () => (await import('./routes/vessels/VesselsPage.tsx')).VesselsPage),
