@@ -24,7 +24,7 @@ export async function createApp(deps: Deps): Promise<Express> {
 
   app.use(requestLog(log));
   app.use(securityHeaders(config));
-  app.use(['/shared', '/api/shared'], unlisted);
+  app.use(['/shared', '/api/shared', '/guest', '/api/guest'], unlisted);
   // The lowest level: most of the saving for a fraction of the work.
   app.use(compression({ level: constants.Z_BEST_SPEED }));
   app.use('/api', refuseCrossSite(config), demandJson);

@@ -34,6 +34,7 @@ function refuseMethod(methods: readonly string[]): RequestHandler {
 function answering(route: Route, deps: Deps & Services): RequestHandler {
   return async (req, res) => {
     const who = await whoAsks(route.who, deps, req);
+    if (who.member?.guestOf && !route.guests) throw notFound();
     if (who.member && !route.may(who.member)) throw problem('not-allowed');
     const answer = await route.handle(parse(route, deps, req, res), who);
     // Asked for its head alone, a stream does not begin.

@@ -49,6 +49,8 @@ export interface Asked<Body> extends Deps, Services {
 export interface Route {
   operation: Operation;
   who: Who;
+  /** Guests may ask too; to the rest of a brewery's addresses they are strangers. */
+  guests?: boolean;
   may: (member: InRole) => boolean;
   handle: (
     asked: Asked<unknown>,

@@ -8,6 +8,7 @@ import { checkRoutes } from './check/router.ts';
 import { commentRoutes } from './comments/router.ts';
 import { houseRulesRoutes } from './house-rules/router.ts';
 import { joinRoutes } from './join/router.ts';
+import { guestRoutes } from './guests/router.ts';
 import { liveRoutes } from './live/router.ts';
 import { moveRoutes } from './moves/router.ts';
 import { peopleRoutes } from './people/router.ts';
@@ -39,6 +40,7 @@ const resources: readonly Route[] = [
   ...moveRoutes,
   ...liveRoutes,
   ...shareRoutes,
+  ...guestRoutes,
   ...checkRoutes,
 ];
 

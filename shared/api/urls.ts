@@ -31,6 +31,10 @@ export const api = {
   /** Read-only links to one chain. */
   shareLinks: (slug: string, chainId: string) => `${b(slug)}/chains/${chainId}/share-links`,
   shareLink: (slug: string, id: string) => `${b(slug)}/share-links/${id}`,
+  /** People of other breweries on one chain. */
+  guests: (slug: string, chainId: string) => `${b(slug)}/chains/${chainId}/guests`,
+  guest: (slug: string, id: string) => `${b(slug)}/guests/${id}`,
+  guestInvitation: (token: string) => `/api/guest/${encodeURIComponent(token)}`,
   /** What such a link shows. */
   shared: (token: string) => `/api/shared/${encodeURIComponent(token)}`,
   copies: (slug: string) => `${b(slug)}/copies`,

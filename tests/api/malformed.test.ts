@@ -35,6 +35,7 @@ beforeAll(async () => {
     batches: batch,
     'join-links': batch,
     'share-links': batch,
+    guests: batch,
   };
 });
 afterAll(() => server.close());

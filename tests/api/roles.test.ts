@@ -165,6 +165,8 @@ it.each<[Role, string[]]>([
     [
       'editBatches',
       'moveBatches',
+      'moveAcross',
+      'setStages',
       'editChains',
       'editYeastsAndVessels',
       'editSeason',
@@ -172,7 +174,7 @@ it.each<[Role, string[]]>([
       'invite',
     ],
   ],
-  ['brewer', ['editBatches', 'moveBatches', 'editChains']],
+  ['brewer', ['editBatches', 'moveBatches', 'moveAcross', 'setStages', 'editChains']],
   ['taster', []],
 ])('tells the page of a %s what is allowed', async (role, granted) => {
   const { can } = (await boardOf(people[role], season.slug)).me;

@@ -10,6 +10,7 @@ import { readBoard, type Hand } from '../board/changeBoard.ts';
 import { lockSeason, lockShelves } from '../board/locks.ts';
 import { raiseRevision, writeEntry } from '../board/record.ts';
 import { insertChain } from '../chains/commands.ts';
+import { moveAsGuest } from '../guests/move.ts';
 import { answerAgain, answerMove } from './answer.ts';
 import { refused } from './refused.ts';
 import { sidesOf, touchesOf } from './standing.ts';
@@ -31,7 +32,9 @@ export function move(
     const hand = { tx, member, board, now };
     const [again] = await tx.select().from(change).where(eq(change.id, wish.id));
     if (again) return answerAgain(hand, again);
-    const result = moveBatch(board, wish);
+    const result = member.guestOf
+      ? moveAsGuest(hand, member.guestOf, wish)
+      : moveBatch(board, wish);
     if (!result.ok) throw await refused(hand, wish, result);
     return result.batches.length === 0
       ? answerMove(hand, { changeId: wish.id, what: result.what, revision: board.season.revision })

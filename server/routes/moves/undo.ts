@@ -11,6 +11,7 @@ import { readBoard, type Hand } from '../board/changeBoard.ts';
 import { lockSeason, lockShelves } from '../board/locks.ts';
 import { raiseRevision, writeEntry } from '../board/record.ts';
 import { insertChainRow } from '../chains/commands.ts';
+import { demandOwnTouches } from '../guests/move.ts';
 import { answerAgain, answerMove, shiftedBetween } from './answer.ts';
 import { takeEditBack } from './undoEdit.ts';
 import { newestOwn } from './newest.ts';
@@ -60,6 +61,8 @@ async function doneAlready({ tx, member }: Hand, way: Way, changeId: string) {
 }
 
 async function carryOut(hand: Hand, way: Way, row: ChangeRow): Promise<Moved> {
+  const { guestOf } = hand.member;
+  if (guestOf) demandOwnTouches(guestOf, hand.board, row.touches);
   if (row.kind === 'edit') return takeEditBack(hand, way, row);
   const [before, after] = [row.before as Side, row.after as Side];
   const [from, to] = way === 'undo' ? [after, before] : [before, after];

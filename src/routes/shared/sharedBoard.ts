@@ -41,6 +41,7 @@ function boardOf(shared: SharedChain): Board {
     undo: null,
     redo: null,
     unread: {},
+    guests: [],
   };
 }
 

@@ -24,6 +24,8 @@ const BoardView = createContext<BoardViewValue | null>(null);
 export const NOTHING: Abilities = {
   editBatches: false,
   moveBatches: false,
+  moveAcross: false,
+  setStages: false,
   editChains: false,
   editYeastsAndVessels: false,
   editSeason: false,
