@@ -20,11 +20,21 @@ const LIMITS = Object.fromEntries(
 );
 
 /**
- * A server process with a database of its own on the tests' cluster.
- * @param {{port: number, logFile: string, settings?: Record<string, string>}} options port 0: any free one
+ * A server process with a database of its own on the tests' cluster, or on the one that `join` gives.
+ * @param {{
+ *   port: number,
+ *   logFile: string,
+ *   settings?: Record<string, string>,
+ *   join?: () => ReturnType<typeof joinCluster>,
+ * }} options port 0: any free one
  */
-export async function startTestServer({ port, logFile, settings = {} }) {
-  const { cluster, leave } = await joinCluster(testHome);
+export async function startTestServer({
+  port,
+  logFile,
+  settings = {},
+  join: joinOther = () => joinCluster(testHome),
+}) {
+  const { cluster, leave } = await joinOther();
   const name = `e2e_${process.pid}_${Date.now().toString(36)}`;
   const sql = (/** @type {string} */ statement) =>
     must(

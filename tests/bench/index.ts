@@ -1,10 +1,11 @@
 import { cpus } from 'node:os';
 import { engine } from './engine.ts';
+import { live } from './live.ts';
 import { pages } from './pages.ts';
 import type { Part, Row } from './row.ts';
 
 /** Each part of the bench; one may be asked for by name. */
-const PARTS: readonly Part[] = [engine, pages];
+const PARTS: readonly Part[] = [engine, pages, live];
 
 async function main(names: readonly string[]): Promise<void> {
   const unknown = names.filter((name) => !PARTS.some((part) => part.name === name));

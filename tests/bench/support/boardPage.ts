@@ -1,0 +1,34 @@
+import { existsSync } from 'node:fs';
+import { chromium, type Browser, type Page } from '@playwright/test';
+import { sessionCookies } from '../../../e2e/support/server.ts';
+import type { AtWork } from './atWork.ts';
+
+const ARGS = [
+  '--no-sandbox',
+  '--disable-dev-shm-usage',
+  '--disable-gpu',
+  '--disable-background-networking',
+];
+
+export function openBrowser(): Promise<Browser> {
+  const path = process.env.CHROMIUM ?? '/usr/bin/chromium';
+  return chromium.launch({ args: ARGS, ...(existsSync(path) ? { executablePath: path } : {}) });
+}
+
+/** The board as a head brewer sees it, in a fresh browser profile, after a moment's look at it. */
+export async function openBoard(browser: Browser, at: AtWork, before?: () => void): Promise<Page> {
+  const context = await browser.newContext({ viewport: { width: 1440, height: 900 } });
+  await context.addCookies(sessionCookies(at, at.brewery.members['head-brewer'].token));
+  const page = await context.newPage();
+  if (before) {
+    // A function that is sent as text was compiled with calls of this helper.
+    await page.addInitScript('globalThis.__name = (each) => each');
+    await page.addInitScript(before);
+  }
+  await page.goto(`${at.url}/b/${at.brewery.slug}`);
+  await page.locator('[data-batch]').first().waitFor();
+  await page.waitForTimeout(LOOK_MS);
+  return page;
+}
+
+const LOOK_MS = 2500;
