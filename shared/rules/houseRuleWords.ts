@@ -4,11 +4,11 @@ import { HOUSE_RULES, type HouseRuleKey } from './houseRules.ts';
 
 /** Each threshold as it is called outside of its sentence. */
 export const HOUSE_RULE_WORDS: Record<HouseRuleKey, string> = {
-  darkSrm: 'darker by',
+  darkSrm: 'colour gap that counts',
   colourShiftMind: 'colour shift for a Mind',
   colourShiftHold: 'colour shift for a Hold',
-  bitterGapMind: 'bitterer by, for a Mind',
-  bitterGapHold: 'bitterer by, for a Hold',
+  bitterGapMind: 'bitterness gap for a Mind',
+  bitterGapHold: 'bitterness gap for a Hold',
   bitterShiftMind: 'added bitterness for a Mind',
   bitterShiftHold: 'added bitterness for a Hold',
   bitterShiftAlone: 'added bitterness for a Hold at any gap',
@@ -27,8 +27,8 @@ export const HOUSE_RULE_WORDS: Record<HouseRuleKey, string> = {
   freeBlowOff: 'headspace with a blow-off tube for a Mind',
   freeHold: 'headspace for a Hold',
   leftAboveShare: 'beer left above the cake',
-  pourAboveMind: 'wort warmer than its window, for a Mind',
-  pourBelowMind: 'wort cooler than its window, for a Mind',
+  pourAboveMind: 'wort above its window for a Mind',
+  pourBelowMind: 'wort below its window for a Mind',
   tiredOgMind: 'gravity of the earlier beer for a Mind',
   tiredOgHold: 'gravity of the earlier beer for a Hold',
   tiredAbvMind: 'alcohol of the earlier beer for a Mind',
@@ -49,7 +49,7 @@ export const HOUSE_RULE_WORDS: Record<HouseRuleKey, string> = {
   pitchHold: 'yeast for a Hold',
   characterMind: 'yeast of marked character for a Mind',
   beersSinceCleaning: 'beers since the vessel was cleaned',
-  warmerCakeMind: 'cake warmer than the wort, for a Mind',
+  warmerCakeMind: 'cake above the wort for a Mind',
   readingMinutes: 'age of a temperature reading',
 };
 

@@ -22,7 +22,7 @@ export function Filters() {
   return (
     <search
       aria-label="Filter the record"
-      className="mb-7 grid items-end gap-x-4 gap-y-3 tablet:grid-cols-3 wide:grid-cols-[repeat(5,minmax(0,1fr))_auto]"
+      className="mb-7 grid grid-cols-2 items-end gap-x-4 gap-y-3 tablet:grid-cols-3 wide:grid-cols-[repeat(5,minmax(0,1fr))_auto]"
     >
       <Choice
         label="Person"

@@ -21,7 +21,7 @@ export function LimitField({ limit, now, fault, empty, onType }: LimitFieldProps
   const id = useId();
   const unit = unitWord(limit, now.unit);
   return (
-    <span className="inline-block max-w-full align-middle leading-snug">
+    <span className="my-0.5 inline-block max-w-full align-middle leading-snug">
       <span className="inline-flex items-center gap-1.5">
         <input
           type="text"
@@ -34,7 +34,10 @@ export function LimitField({ limit, now, fault, empty, onType }: LimitFieldProps
           value={now.text}
           placeholder={empty}
           onChange={(event) => onType(event.target.value)}
-          className={fieldClass(fault !== undefined, 'max-w-20 text-center font-semibold')}
+          className={fieldClass(
+            fault !== undefined,
+            'max-w-20 scroll-mb-48 text-center font-semibold',
+          )}
         />
         {unit && <span className="whitespace-nowrap">{unit}</span>}
       </span>

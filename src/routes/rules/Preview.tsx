@@ -1,23 +1,11 @@
-import { useDeferredValue, useMemo } from 'react';
-import type { HouseRuleChanges } from '#shared/api/board.ts';
-import { linkChanges, type LinkChange } from '#shared/chain/linkChanges.ts';
-import { useBoard } from '../../api/board.ts';
-import { useBrewery } from '../../app/useBrewery.ts';
-import { useUnits } from '../../app/useUnits.ts';
+import type { LinkChange } from '#shared/chain/linkChanges.ts';
 import { Card, CardTitle } from '../../components/ui/Card.tsx';
-import { TextLink } from '../../components/ui/TextLink.tsx';
 import { SayingPill } from './SayingPill.tsx';
 
-interface PreviewProps {
-  changes: HouseRuleChanges;
-  isSound: boolean;
-}
-
 /** What these rules would say of the links of the board, where that differs. */
-export function Preview({ changes, isSound }: PreviewProps) {
-  const links = useLinkChanges(changes, isSound);
+export function Preview({ links }: { links: readonly LinkChange[] | null }) {
   return (
-    <Card>
+    <Card className="scroll-mt-4">
       <CardTitle>On this board</CardTitle>
       <div aria-live="polite" className="mt-2">
         {links === null ? (
@@ -41,25 +29,10 @@ export function Preview({ changes, isSound }: PreviewProps) {
   );
 }
 
-/** Null while a field has a fault: nothing can be judged by it. Worked out after the typing. */
-function useLinkChanges(changes: HouseRuleChanges, isSound: boolean): LinkChange[] | null {
-  const board = useBoard();
-  const units = useUnits();
-  const text = useDeferredValue(isSound ? JSON.stringify(changes) : null);
-  return useMemo(
-    () =>
-      text === null
-        ? null
-        : linkChanges(board, { ...board, houseRules: JSON.parse(text) as HouseRuleChanges }, units),
-    [board, text, units],
-  );
-}
-
 function Changed({ link }: { link: LinkChange }) {
-  const brewery = useBrewery();
   return (
     <li className="border-t border-line pt-3">
-      <TextLink to={`${brewery.path()}?link=${link.batchId}`}>Cake under {link.name}</TextLink>
+      <p className="font-medium">Cake under {link.name}</p>
       <p className="mt-1.5 flex flex-wrap items-center gap-2">
         <SayingPill saying={link.from} />
         <span aria-hidden="true">→</span>

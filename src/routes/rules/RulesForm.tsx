@@ -3,11 +3,13 @@ import { RULES_EXPLAINED } from '../checks/rulesExplained.ts';
 import { Preview } from './Preview.tsx';
 import { RuleCard } from './RuleCard.tsx';
 import { SaveBar } from './SaveBar.tsx';
+import { useLinkChanges } from './useLinkChanges.ts';
 import { useRulesDraft } from './useRulesDraft.ts';
 
 /** Every rule with its limits as fields, what they would change on the board, and the way to save. */
 export function RulesForm({ row }: { row: HouseRulesRow }) {
   const edit = useRulesDraft(row);
+  const links = useLinkChanges(edit.changes, edit.isSound);
   return (
     <form
       noValidate
@@ -22,11 +24,11 @@ export function RulesForm({ row }: { row: HouseRulesRow }) {
             <RuleCard key={rule.id} rule={rule} edit={edit} />
           ))}
         </div>
-        <div className="wide:sticky wide:top-4">
-          <Preview changes={edit.changes} isSound={edit.isSound} />
+        <div id="on-this-board" className="scroll-mt-4 wide:sticky wide:top-4">
+          <Preview links={links} />
         </div>
       </div>
-      <SaveBar edit={edit} />
+      <SaveBar edit={edit} changed={links?.length ?? null} />
     </form>
   );
 }

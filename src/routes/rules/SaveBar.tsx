@@ -1,15 +1,18 @@
-import { useState } from 'react';
 import { useOnline } from '../../app/useOnline.ts';
 import { Button } from '../../components/ui/Button.tsx';
-import { ConfirmDialog } from '../../components/ui/ConfirmDialog.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
 import { OFFLINE_SENTENCE } from '../../components/ui/OfflineBanner.tsx';
 import type { RulesEdit } from './useRulesDraft.ts';
 
+interface SaveBarProps {
+  edit: RulesEdit;
+  /** Links of the board that would be judged otherwise; null: not known. */
+  changed: number | null;
+}
+
 /** Stays at the foot of the window while the rules are changed. */
-export function SaveBar({ edit }: { edit: RulesEdit }) {
+export function SaveBar({ edit, changed }: SaveBarProps) {
   const online = useOnline();
-  const [asks, setAsks] = useState(false);
   const own = Object.keys(edit.changes).length;
   if (!edit.isDirty && own === 0) return null;
   return (
@@ -19,9 +22,16 @@ export function SaveBar({ edit }: { edit: RulesEdit }) {
         {edit.theirs && <Conflict edit={edit} />}
         {!online && <Notice kind="mind">{OFFLINE_SENTENCE}</Notice>}
       </div>
+      {changed !== null && changed > 0 && (
+        <p className="text-small wide:hidden">
+          <a href="#on-this-board" className="font-medium underline underline-offset-4">
+            {changed === 1 ? '1 link' : `${changed} links`} on this board would change
+          </a>
+        </p>
+      )}
       <div className="flex flex-wrap items-center justify-end gap-3">
         {own > 0 && (
-          <Button look="quiet" className="mr-auto" onClick={() => setAsks(true)}>
+          <Button look="quiet" className="mr-auto" onClick={edit.resetAll}>
             All back to the defaults
           </Button>
         )}
@@ -31,24 +41,11 @@ export function SaveBar({ edit }: { edit: RulesEdit }) {
               Leave it
             </Button>
             <Button type="submit" look="first" disabled={!online || edit.isSaving}>
-              {edit.isSaving ? 'Saving …' : 'Save the house rules'}
+              {edit.isSaving ? 'Saving …' : 'Save'}
             </Button>
           </>
         )}
       </div>
-      <ConfirmDialog
-        open={asks}
-        onClose={() => setAsks(false)}
-        title="All back to the defaults?"
-        action="Fill in the defaults"
-        onConfirm={() => {
-          edit.resetAll();
-          setAsks(false);
-        }}
-      >
-        <p>Every limit is filled in as it is by default, and no hold is softened.</p>
-        <p>You see what that changes on the board before you save it.</p>
-      </ConfirmDialog>
     </div>
   );
 }
