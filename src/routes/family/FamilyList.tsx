@@ -17,6 +17,8 @@ export function FamilyList({ family }: { family: readonly Kin[] }) {
   );
 }
 
+const lowerFirst = (text: string): string => text.charAt(0).toLowerCase() + text.slice(1);
+
 function KinItem({ kin }: { kin: Kin }) {
   const { board } = useBoardView();
   const { path } = useBrewery();
@@ -31,7 +33,7 @@ function KinItem({ kin }: { kin: Kin }) {
             ? startWords(kin.chain)
             : [
                 ...(kin.generation === null ? [] : [`generation ${kin.generation}`]),
-                stageLine(kin.batch, board.today).toLowerCase(),
+                lowerFirst(stageLine(kin.batch, board.today)),
               ].join(', ')}
         </span>
         {kin.kind === 'batch' && kin.link && (

@@ -15,7 +15,7 @@ export function BottomBar() {
   return (
     <nav
       aria-label="Pages"
-      className="fixed inset-x-0 bottom-0 z-30 flex border-t border-line bg-paper px-2 pt-1 pb-[max(.5rem,env(safe-area-inset-bottom))] tablet:hidden"
+      className="fixed inset-x-0 bottom-0 z-30 flex border-t border-line bg-paper px-2 pt-1 pb-[max(.5rem,env(safe-area-inset-bottom))] tablet:hidden print:hidden"
     >
       <Tab to={brewery.path()} end icon={<ShelfIcon />} name="Board" />
       <Tab to={brewery.path('yeasts')} icon={<Microscope size={22} aria-hidden />} name="Yeasts" />

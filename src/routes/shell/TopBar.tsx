@@ -10,7 +10,7 @@ import { PAGES } from './pages.ts';
 export function TopBar() {
   const brewery = useBrewery();
   return (
-    <header className="on-bar flex h-15 shrink-0 items-center gap-7 bg-bar px-7 text-on-bar max-wide:gap-3 max-tablet:h-13 max-tablet:px-[18px]">
+    <header className="on-bar print:hidden flex h-15 shrink-0 items-center gap-7 bg-bar px-7 text-on-bar max-wide:gap-3 max-tablet:h-13 max-tablet:px-[18px]">
       <Link to={brewery.path()} aria-label="Barmkin, to the board" className="rounded-lg">
         <Wordmark />
       </Link>

@@ -7,6 +7,8 @@ import { labelSide, ratioScaleOf } from './scales.ts';
 import { Strokes } from './ValueLane.tsx';
 
 const HEIGHT = 150;
+/** For two lines of words between a point and the line of the need, px. */
+const ROOM_BELOW = 52;
 /** What a wort needs, as a multiple of itself. */
 const NEED = 1;
 
@@ -40,7 +42,9 @@ export function AliveLane({ course }: { course: Course }) {
             </Label>
           );
         const { low, likely, high } = alive.ratio;
-        const label = scale(likely) + (labelSide(ratios, place) === 'above' ? -22 : 22);
+        const hasRoom = need - scale(likely) > ROOM_BELOW;
+        const isBelow = hasRoom && labelSide(ratios, place) === 'below';
+        const label = scale(likely) + (isBelow ? 26 : -22);
         return (
           <g key={batchId}>
             <path

@@ -26,7 +26,7 @@ const DASHES: Record<Verdict, string | undefined> = {
 export function Lane({ title, unit, height, course, children }: LaneProps) {
   const width = widthOf(course.points.length);
   return (
-    <section className="flex w-max border-t border-line max-tablet:flex-col print:break-inside-avoid">
+    <section className="flex w-max min-w-full border-t border-line max-tablet:flex-col print:break-inside-avoid">
       <header
         className="sticky left-0 z-[2] shrink-0 bg-stone pt-1.5 pr-2 max-tablet:flex max-tablet:w-max! max-tablet:items-baseline max-tablet:gap-2 max-tablet:bg-transparent"
         style={{ width: COLUMN.label }}

@@ -22,7 +22,10 @@ export function ChainShelf({ chain, course }: { chain: Chain; course: Course }) 
   return (
     <div className="tablet:pl-[132px]">
       <h2 className="sr-only">Batches</h2>
-      <div className="relative" style={{ width: widthOf(batches.length), height: HEIGHT }}>
+      <div
+        className="relative min-w-full"
+        style={{ width: widthOf(batches.length), height: HEIGHT }}
+      >
         <div
           aria-hidden
           className="shelf-line absolute -left-4 right-0 max-tablet:left-0"
