@@ -1,4 +1,5 @@
-import { Printer } from 'lucide-react';
+import { Printer, Share } from 'lucide-react';
+import { useState } from 'react';
 import type { Chain } from '#shared/api/chain.ts';
 import { formatDayShort } from '#shared/units/day.ts';
 import { formatMoney } from '#shared/units/money.ts';
@@ -6,6 +7,7 @@ import { useBrewery } from '../../app/useBrewery.ts';
 import { GenerationMarks } from '../../components/drawn/GenerationMarks.tsx';
 import { Button } from '../../components/ui/Button.tsx';
 import { TextLink } from '../../components/ui/TextLink.tsx';
+import { ShareDialog } from '../board/share/ShareDialog.tsx';
 import { useBoardView } from '../board/view/BoardView.tsx';
 import { count, generationLine } from '../board/view/words.ts';
 import { Branches } from '../descent/Branches.tsx';
@@ -13,7 +15,7 @@ import { Descent } from '../descent/Descent.tsx';
 
 /** Name of the chain, its span and its sum, where its cake comes from and where it goes besides. */
 export function ChainHead({ chain }: { chain: Chain }) {
-  const { board, judged } = useBoardView();
+  const { board, judged, can } = useBoardView();
   const { path } = useBrewery();
   const verdicts = judged.chains.get(chain.id);
   return (
@@ -38,11 +40,27 @@ export function ChainHead({ chain }: { chain: Chain }) {
         <Descent chain={chain} />
         <Branches chain={chain} />
       </div>
-      <Button className="print:hidden" onClick={() => window.print()}>
-        <Printer size={17} aria-hidden />
-        Print
-      </Button>
+      <div className="flex gap-2.5 print:hidden">
+        <Button onClick={() => window.print()}>
+          <Printer size={17} aria-hidden />
+          Print
+        </Button>
+        {can.editChains && <ShareButton chain={chain} />}
+      </div>
     </header>
+  );
+}
+
+function ShareButton({ chain }: { chain: Chain }) {
+  const [isOpen, setOpen] = useState(false);
+  return (
+    <>
+      <Button look="first" onClick={() => setOpen(true)}>
+        <Share size={17} aria-hidden />
+        Share
+      </Button>
+      {isOpen && <ShareDialog chain={chain} onClose={() => setOpen(false)} />}
+    </>
   );
 }
 

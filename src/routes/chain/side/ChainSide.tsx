@@ -35,7 +35,7 @@ export function ChainSide({ chain }: { chain: Chain }) {
 function PeopleAndTalk({ chain }: { chain: Chain }) {
   return (
     <div className="px-6 pt-5 pb-8 max-wide:px-7 max-tablet:px-[18px]">
-      <WhoIsOn />
+      <WhoIsOn chain={chain} />
       <h2 className="mt-6 text-shelf">Talk</h2>
       <Talk key={chain.id} chainId={chain.id} />
     </div>
