@@ -112,3 +112,60 @@ test('somebody of another brewery copies a chain onto their own board', async ({
   await expect(shelf.getByRole('heading')).toHaveText(['Low Tide', 'Jetty Pale', 'Spring Tide']);
   await context.close();
 });
+
+test('a guest brewer moves and edits on their own board what belongs to another brewery', async ({
+  board,
+  brewery,
+  browser,
+  db,
+  server,
+}) => {
+  await brewery.write(PLAN);
+  await board.goto(`/b/${brewery.slug}`);
+  await board.getByRole('button', { name: 'Shelf Harbour ale' }).click();
+  await board.getByRole('menuitem', { name: 'Share' }).click();
+  await board.getByRole('button', { name: 'Invite a guest' }).click();
+  const invitation = await board.getByLabel('Invitation for a guest brewer').inputValue();
+  const own = await writeBrewery(db, 'Estuary Ales');
+  const context = await browser.newContext();
+  await context.addCookies(sessionCookies(server, own.members['head-brewer'].token));
+  const page = await context.newPage();
+  await page.goto(invitation);
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Put it on my board' }).click();
+  const shelf = page.getByRole('region', { name: /^Harbour ale from Reedbed Brewing/ });
+  await expect(shelf).toContainText('as brewer');
+  await expect(page.getByText('Nobody’s business')).toHaveCount(0);
+  await expectAccessible(page);
+
+  await shelf.getByRole('button', { name: 'Move Low Tide' }).click();
+  const places = page.getByRole('dialog', { name: /Low Tide/ });
+  await expect(places.getByText('New shelf')).toHaveCount(0);
+  await expect(places.getByText(/bench/i)).toHaveCount(0);
+  await places
+    .getByRole('button', { name: /Jetty Pale/ })
+    .first()
+    .click();
+  const names = () =>
+    shelf.getByRole('list', { name: 'Batches on Harbour ale' }).getByRole('heading');
+  await expect(names()).toHaveText(['Jetty Pale', 'Low Tide', 'Spring Tide']);
+
+  await shelf.getByRole('button', { name: 'Low Tide', exact: true }).click();
+  await page.getByLabel('Bitterness').fill('27');
+  await page.getByRole('button', { name: 'Save' }).click();
+  await expect(shelf).toContainText('27 IBU');
+
+  await board.reload();
+  const theirs = board.getByRole('list', { name: 'Batches on Harbour ale' });
+  await expect(theirs.getByRole('heading')).toHaveText(['Jetty Pale', 'Low Tide', 'Spring Tide']);
+  await expect(theirs).toContainText('27 IBU');
+
+  await board.getByRole('button', { name: 'Shelf Harbour ale' }).click();
+  await board.getByRole('menuitem', { name: 'Share' }).click();
+  await board.getByRole('button', { name: /^Withdraw: Orla Finch/ }).click();
+  await board.getByRole('button', { name: 'End the access' }).click();
+  await expect(board.getByRole('list', { name: 'Guests' })).toContainText('ended');
+  await page.reload();
+  await expect(shelf).toHaveCount(0);
+  await context.close();
+});

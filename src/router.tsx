@@ -33,6 +33,10 @@ export const router = createBrowserRouter([
           lazyPage(async () => (await import('./routes/shared/SharedPage.tsx')).SharedPage),
       },
       {
+        path: 'guest/:token',
+        lazy: () => lazyPage(async () => (await import('./routes/guest/GuestPage.tsx')).GuestPage),
+      },
+      {
         path: 'about/checks',
         lazy: () =>
           lazyPage(async () => (await import('./routes/checks/ChecksPage.tsx')).ChecksPage),

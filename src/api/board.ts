@@ -1,5 +1,5 @@
 import { queryOptions, useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
-import { useMemo, useSyncExternalStore } from 'react';
+import { createContext, use, useMemo, useSyncExternalStore } from 'react';
 import { useParams } from 'react-router-dom';
 import { board as boardContract, type Board } from '#shared/api/board.ts';
 import type { UnitPrefs } from '#shared/api/units.ts';
@@ -55,8 +55,17 @@ function judgedBoard(board: Board, units: UnitPrefs): JudgedBoard {
   return result;
 }
 
+/** The slug of another brewery, around a shelf of theirs on which one is a guest. */
+export const OtherBoardSlug = createContext<string | null>(null);
+
+/** True on a shelf of another brewery. */
+export const useIsGuestHere = (): boolean => use(OtherBoardSlug) !== null;
+
+/** Whose board it is that is drawn here: the brewery's in the address, if no other is named. */
 export function useBoardSlug(): string {
+  const other = use(OtherBoardSlug);
   const { brewery } = useParams();
+  if (other !== null) return other;
   if (!brewery) throw new Error('A board is shown under the address of its brewery');
   return brewery;
 }

@@ -1,8 +1,7 @@
 import { useState } from 'react';
 import { batch as batchContract, batchCreate, type Batch } from '#shared/api/batch.ts';
 import { useBatchCreate, useBatchPatch } from '../../api/batches.ts';
-import { useBoard } from '../../api/board.ts';
-import { useBrewery } from '../../app/useBrewery.ts';
+import { useBoard, useBoardSlug } from '../../api/board.ts';
 import { useUnits } from '../../app/useUnits.ts';
 import { RowForm } from '../../components/form/RowForm.tsx';
 import { TextField } from '../../components/form/TextField.tsx';
@@ -34,7 +33,7 @@ export function BatchFormNow({
   onDone,
   onCancel,
 }: BatchFormProps) {
-  const { slug } = useBrewery();
+  const slug = useBoardSlug();
   const board = useBoard();
   const units = useUnits();
   const create = useBatchCreate(slug);

@@ -1,9 +1,11 @@
 import { useState } from 'react';
+import { useIsGuestHere } from '../../api/board.ts';
 import { lazyPart } from '../../app/lazyPart.tsx';
 import { Dialog } from '../../components/ui/Dialog.tsx';
 import { BatchFormDialog } from '../batch-form/BatchFormDialog.tsx';
 import { ChainFormDialog } from '../chain-form/ChainFormDialog.tsx';
 import { BatchFacts } from './batch/BatchFacts.tsx';
+import { OnBoardOf } from './guest/OnBoardOf.tsx';
 import { useBoardView } from './view/BoardView.tsx';
 import { useBoardPanel, type BoardPanel } from './view/useBoardPanel.ts';
 
@@ -15,7 +17,11 @@ export function BoardForms() {
   const { panel, close } = useBoardPanel();
   switch (panel?.kind) {
     case 'batch':
-      return <OpenedBatch key={panel.batchId} batchId={panel.batchId} onClose={close} />;
+      return (
+        <OnBoardOf batchId={panel.batchId}>
+          <OpenedBatch key={panel.batchId} batchId={panel.batchId} onClose={close} />
+        </OnBoardOf>
+      );
     case 'new':
       return <NewRow panel={panel} onClose={close} />;
     default:
@@ -26,6 +32,7 @@ export function BoardForms() {
 /** A lost connection closes no form: what was typed waits in it. */
 function OpenedBatch({ batchId, onClose }: { batchId: string; onClose: () => void }) {
   const { board, index } = useBoardView();
+  const isGuest = useIsGuestHere();
   const now = index.batch(batchId);
   // Whoever deletes it elsewhere closes no form here.
   const [seen, setSeen] = useState(now);
@@ -37,7 +44,7 @@ function OpenedBatch({ batchId, onClose }: { batchId: string; onClose: () => voi
         <p className="text-ink2">Somebody deleted it, or the address is of another season.</p>
       </Dialog>
     );
-  const talk = now?.chainId && (
+  const talk = !isGuest && now?.chainId && (
     <FoldedTalk chainId={now.chainId} about={{ kind: 'batch', batchId }} />
   );
   if (!board.me.can.editBatches) return <BatchFacts batch={batch} onClose={onClose} foot={talk} />;

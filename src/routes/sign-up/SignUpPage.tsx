@@ -1,5 +1,5 @@
 import { useForm } from 'react-hook-form';
-import { Navigate, useNavigate } from 'react-router-dom';
+import { Navigate, useNavigate, useSearchParams } from 'react-router-dom';
 import { signUpRequest } from '#shared/api/people.ts';
 import { useSession, useSignUp } from '../../api/session.ts';
 import { useTitle } from '../../app/useTitle.ts';
@@ -8,7 +8,7 @@ import { Form } from '../../components/form/Form.tsx';
 import { PasswordField } from '../../components/form/PasswordField.tsx';
 import { TextField } from '../../components/form/TextField.tsx';
 import { TextLink } from '../../components/ui/TextLink.tsx';
-import { homeOf } from '../public/home.ts';
+import { homeOf, safeNext } from '../public/home.ts';
 import { PublicForm } from '../public/PublicForm.tsx';
 import { optionalText } from '../public/optionalText.ts';
 
@@ -19,14 +19,16 @@ const contract = signUpRequest.extend({
 
 export function SignUpPage() {
   useTitle('Start a brewery');
+  const [params] = useSearchParams();
+  const next = safeNext(params.get('next'));
   const { data: me } = useSession();
-  if (me) return <Navigate to={homeOf(me)} replace />;
+  if (me) return <Navigate to={next ?? homeOf(me)} replace />;
   return (
     <PublicForm
       title="Start a brewery"
       lead="One shelf for your yeasts, your beers and the people you brew with."
     >
-      <SignUpForm />
+      <SignUpForm next={next} />
       <p className="mt-6 text-touch">
         Already in?{' '}
         <TextLink to="/sign-in" className="inline-block py-2">
@@ -37,7 +39,7 @@ export function SignUpPage() {
   );
 }
 
-function SignUpForm() {
+function SignUpForm({ next }: { next: string | null }) {
   const navigate = useNavigate();
   const signUp = useSignUp();
   const form = useForm({
@@ -58,7 +60,7 @@ function SignUpForm() {
       busyAction="Setting it up"
       onSubmit={async (values) => {
         const who = await signUp.mutateAsync(values);
-        await navigate(homeOf(who), { replace: true });
+        await navigate(next ?? homeOf(who), { replace: true });
       }}
     >
       <TextField name="name" label="Your name" autoComplete="name" />

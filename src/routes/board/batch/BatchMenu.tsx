@@ -35,24 +35,28 @@ export function BatchMenu({ batch }: { batch: Batch }) {
         }
       >
         <MenuItem onSelect={() => open({ kind: 'batch', batchId: batch.id })}>Edit</MenuItem>
-        <MenuItem onSelect={() => open({ kind: 'new', what: 'batch', likeId: batch.id })}>
-          Duplicate
-        </MenuItem>
-        {batch.chainId !== null && can.editChains && (
-          <MenuItem onSelect={() => setAsked('branch')}>
-            Pour part of this cake onto another wort
-          </MenuItem>
+        {can.setStages && (
+          <>
+            <MenuItem onSelect={() => open({ kind: 'new', what: 'batch', likeId: batch.id })}>
+              Duplicate
+            </MenuItem>
+            {batch.chainId !== null && can.editChains && (
+              <MenuItem onSelect={() => setAsked('branch')}>
+                Pour part of this cake onto another wort
+              </MenuItem>
+            )}
+            <MenuSeparator />
+            {nextStages(batch.stage).map((stage) => (
+              <MenuItem key={stage} onSelect={() => setAsked(stage)}>
+                {STAGE_ACTIONS[stage].menu}
+              </MenuItem>
+            ))}
+            <MenuSeparator />
+            <MenuItem danger onSelect={() => setAsked('delete')}>
+              Delete
+            </MenuItem>
+          </>
         )}
-        <MenuSeparator />
-        {nextStages(batch.stage).map((stage) => (
-          <MenuItem key={stage} onSelect={() => setAsked(stage)}>
-            {STAGE_ACTIONS[stage].menu}
-          </MenuItem>
-        ))}
-        <MenuSeparator />
-        <MenuItem danger onSelect={() => setAsked('delete')}>
-          Delete
-        </MenuItem>
       </Menu>
       {asked === 'delete' && <DeleteBatch batch={batch} onClose={close} />}
       {asked === 'branch' && <BranchDialog source={batch} onClose={close} />}

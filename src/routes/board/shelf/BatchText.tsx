@@ -13,7 +13,7 @@ export function BatchText({ batch }: { batch: Batch }) {
     <>
       <BatchActions batch={batch} />
       <h3 className="text-h3 leading-[1.12] font-[680]">
-        <BatchName batch={batch} className="line-clamp-2" />
+        <BatchName batch={batch} className="line-clamp-2 min-h-6" />
       </h3>
       {batch.style && (
         <p title={batch.style} className="truncate text-small leading-[1.25] text-ink2">

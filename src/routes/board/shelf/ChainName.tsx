@@ -1,13 +1,16 @@
 import { MessageSquare } from 'lucide-react';
 import { Link } from 'react-router-dom';
 import type { Chain } from '#shared/api/chain.ts';
+import { useIsGuestHere } from '../../../api/board.ts';
 import { useBrewery } from '../../../app/useBrewery.ts';
 import { useBoardView } from '../view/BoardView.tsx';
 import { count } from '../view/words.ts';
 
-/** The shelf's name; opens the chain. */
+/** The shelf's name; opens the chain. Of another brewery's there is the shelf alone. */
 export function ChainName({ chain }: { chain: Chain }) {
   const { path } = useBrewery();
+  const isGuest = useIsGuestHere();
+  if (isGuest) return chain.name;
   return (
     <Link
       to={path(`chains/${chain.id}`)}
