@@ -9,14 +9,8 @@ import { countedFindings } from '../board/view/words.ts';
 import { originOf } from './descentOf.ts';
 import { partWords } from './partWords.ts';
 
-interface DescentProps {
-  chain: Chain;
-  /** Tells what the link says, where nothing else beside it does. */
-  showsLink?: boolean;
-}
-
-/** "from Jetty Pale's cake, 0.4 of 1.1 L". */
-export function Descent({ chain, showsLink = true }: DescentProps) {
+/** "from Jetty Pale's cake, 0.4 of 1.1 L", with what that link says: it stands on no shelf. */
+export function Descent({ chain }: { chain: Chain }) {
   const { board, index, judged, units } = useBoardView();
   const { path } = useBrewery();
   const { open } = useBoardPanel();
@@ -25,13 +19,13 @@ export function Descent({ chain, showsLink = true }: DescentProps) {
   const first = index.batchesOf(chain.id)[0];
   const link = first && judged.links.get(first.id);
   return (
-    <p className="mt-1 flex flex-wrap items-center gap-x-2 text-small text-ink2">
+    <p className="mt-1 flex flex-wrap items-center gap-x-2 gap-y-1 text-small text-ink2">
       <span>
         from{' '}
         <TextLink to={path(`chains/${origin.source.chainId ?? ''}`)}>{origin.source.name}</TextLink>
         ’s cake{partWords(origin, units)}
       </span>
-      {showsLink && first && link && (
+      {first && link && (
         <button
           type="button"
           onClick={() => open({ kind: 'link', laterId: first.id })}

@@ -24,7 +24,7 @@ export function ShelfLabel({ chain, headingId }: { chain: Chain; headingId: stri
           {yeastLine(yeast, units)}
         </p>
       )}
-      <Descent chain={chain} showsLink={false} />
+      <Descent chain={chain} />
       {verdicts && (
         <div className="mt-2 text-small leading-[1.35] text-ink2">
           <GenerationMarks generations={verdicts.generations} limit={verdicts.generationLimit} />

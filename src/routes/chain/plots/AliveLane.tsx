@@ -6,9 +6,9 @@ import { Lane } from './Lane.tsx';
 import { labelSide, ratioScaleOf } from './scales.ts';
 import { Strokes } from './ValueLane.tsx';
 
-const HEIGHT = 150;
-/** For two lines of words between a point and the line of the need, px. */
-const ROOM_BELOW = 52;
+const HEIGHT = 156;
+/** For words between a point and the line of the need, px. */
+const ROOM_BELOW = 32;
 /** What a wort needs, as a multiple of itself. */
 const NEED = 1;
 
@@ -17,7 +17,7 @@ export function AliveLane({ course }: { course: Course }) {
   const { points } = course;
   const ratios = points.map(({ alive }) => alive?.ratio.likely ?? null);
   const ends = points.flatMap(({ alive }) => (alive ? [alive.ratio.low, alive.ratio.high] : []));
-  const scale = ratioScaleOf([NEED, ...ends], { top: 34, bottom: HEIGHT - 20, least: 2 });
+  const scale = ratioScaleOf([NEED, ...ends], { top: 30, bottom: HEIGHT - 20, least: 2 });
   const width = widthOf(points.length);
   const need = scale(NEED);
   return (
@@ -44,7 +44,7 @@ export function AliveLane({ course }: { course: Course }) {
         const { low, likely, high } = alive.ratio;
         const hasRoom = need - scale(likely) > ROOM_BELOW;
         const isBelow = hasRoom && labelSide(ratios, place) === 'below';
-        const label = scale(likely) + (isBelow ? 26 : -22);
+        const label = scale(likely) + (isBelow ? 25 : -14);
         return (
           <g key={batchId}>
             <path
@@ -70,11 +70,11 @@ export function AliveLane({ course }: { course: Course }) {
             >
               {generation}
             </text>
-            <Label x={x + 18} y={label}>
+            <Label x={x + 14} y={label}>
               {timesText(likely)}
-            </Label>
-            <Label x={x + 18} y={label + 15} quiet>
-              {timesText(low)} to {timesText(high)}
+              <tspan className="fill-ink2" fontSize="13.5" fontWeight="400">
+                {` ${timesText(low)} to ${timesText(high)}`}
+              </tspan>
             </Label>
           </g>
         );
