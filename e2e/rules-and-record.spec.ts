@@ -172,7 +172,7 @@ test('the record tells an edit and a move with what the link said, and leads to 
   await expect(board).toHaveURL(new RegExp(`link=${batches['Keel'] ?? ''}`));
   await board.goBack();
 
-  await board.getByLabel('Batch').selectOption({ label: 'Mist Blonde' });
+  await board.getByLabel('Batch').selectOption({ label: 'Ebb Pale' });
   await expect(board.getByText('Nothing on the record is like that.')).toBeVisible();
   await board.getByRole('button', { name: 'Show all' }).click();
   await expect(edit.first()).toBeVisible();
