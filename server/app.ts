@@ -8,6 +8,7 @@ import { answerErrors } from './http/errors.ts';
 import { mountRoutes } from './http/mount.ts';
 import { requestLog } from './http/requestLog.ts';
 import { securityHeaders } from './http/security.ts';
+import { unlisted } from './http/unlisted.ts';
 import { notFound } from './problems.ts';
 import { routes } from './routes/routes.ts';
 import { createServices } from './services.ts';
@@ -23,6 +24,7 @@ export async function createApp(deps: Deps): Promise<Express> {
 
   app.use(requestLog(log));
   app.use(securityHeaders(config));
+  app.use(['/shared', '/api/shared', '/guest', '/api/guest'], unlisted);
   // The lowest level: most of the saving for a fraction of the work.
   app.use(compression({ level: constants.Z_BEST_SPEED }));
   app.use('/api', refuseCrossSite(config), demandJson);

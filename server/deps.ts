@@ -2,6 +2,7 @@ import type pg from 'pg';
 import type { Clock } from './clock.ts';
 import type { Config } from './config.ts';
 import type { Db } from './db/client.ts';
+import type { Live } from './live/live.ts';
 import type { Log } from './log.ts';
 import type { Pages } from './pages.ts';
 
@@ -12,5 +13,6 @@ export interface Deps {
   pool: pg.Pool;
   clock: Clock;
   log: Log;
+  live: Live;
   pages: Pages;
 }

@@ -5,6 +5,7 @@ import { clockFrom, systemClock } from './clock.ts';
 import { parseConfig, type Config } from './config.ts';
 import { connect } from './db/client.ts';
 import { makeReady } from './db/makeReady.ts';
+import { startLive } from './live/live.ts';
 import { createLog, type Log } from './log.ts';
 import { builtPages, pagesAreBuilt, vitePages, type Pages } from './pages.ts';
 import { explain } from './settings/explain.ts';
@@ -20,8 +21,10 @@ async function main(): Promise<void> {
   await makeReady(config, db, pool, clock);
   const server = createServer();
   const { pages, close } = await pagesFor(config, server);
-  server.on('request', await createApp({ config, db, pool, clock, log, pages }));
-  stopCleanly(server, log, [close, () => pool.end()]);
+  const live = startLive({ config, db, clock, log });
+  server.on('request', await createApp({ config, db, pool, clock, log, live, pages }));
+  // A stream would keep the server from closing.
+  stopCleanly(server, log, { before: live.close, after: [close, () => pool.end()] });
   const url = await listen(server, config);
   log.info({ url, mode: config.mode }, 'Listening');
   process.send?.({ type: 'listening', url });

@@ -51,13 +51,16 @@ export const templateOf = (path: string) => path.replace(/:([a-zA-Z]+)/g, '{$1}'
 const namesIn = (path: string) =>
   Array.from(path.matchAll(/:([a-zA-Z]+)/g), ([, name = '']) => name);
 
-function requestOf({ path, body, ifMatch }: Operation) {
+function requestOf({ path, body, query, ifMatch }: Operation) {
   const names = namesIn(path);
   const params = z.object(
-    Object.fromEntries(names.map((name) => [name, name === 'id' ? z.uuid() : z.string()])),
+    Object.fromEntries(
+      names.map((name) => [name, /^(id|[a-z]+Id)$/.test(name) ? z.uuid() : z.string()]),
+    ),
   );
   return {
     ...(names.length > 0 && { params }),
+    ...(query && { query }),
     ...(ifMatch && {
       headers: z.object({
         'If-Match': z.string().openapi({ description: 'ETag of the row that was changed' }),
@@ -68,10 +71,12 @@ function requestOf({ path, body, ifMatch }: Operation) {
 }
 
 function responsesOf(route: Route, problem: z.ZodType) {
-  const { answer, status } = route.operation;
+  const { answer, status, stream } = route.operation;
   const good = answer
     ? { description: 'Done', content: { 'application/json': { schema: answer } } }
-    : { description: 'Done' };
+    : stream
+      ? { description: 'Stays open', content: { 'text/event-stream': { schema: z.string() } } }
+      : { description: 'Done' };
   const failures = problemsOf(route);
   const statuses = [...new Set(failures.map((kind) => PROBLEMS[kind].status))];
   return {
@@ -95,7 +100,7 @@ function responsesOf(route: Route, problem: z.ZodType) {
 
 /** What can go wrong follows from what the operation asks for. */
 function problemsOf({ operation, who }: Route): ProblemKind[] {
-  const { body, ifMatch, method, path, problems = [] } = operation;
+  const { body, query, ifMatch, method, path, problems = [] } = operation;
   return [
     ...(who === 'anyone' ? [] : (['not-signed-in'] as const)),
     ...(who === 'member' ? (['not-allowed'] as const) : []),
@@ -103,6 +108,7 @@ function problemsOf({ operation, who }: Route): ProblemKind[] {
     ...(method === 'get' ? [] : (['cross-site'] as const)),
     ...(body ? (['invalid-request', 'unreadable-body', 'too-large', 'not-json'] as const) : []),
     ...(ifMatch ? (['version-missing', 'changed-since'] as const) : []),
+    ...(query && !body ? (['invalid-request'] as const) : []),
     ...problems,
     'unexpected',
   ];

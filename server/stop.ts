@@ -5,25 +5,27 @@ const PATIENCE_MS = 10_000;
 
 /**
  * Stops cleanly, once, on SIGTERM, SIGINT, or when the launcher that started this process is gone:
- * requests under way are answered, then everything is closed in the order given.
+ * what stays open by itself is ended, requests under way are answered, then everything is closed in
+ * the order given.
  */
 export function stopCleanly(
   server: Server,
   log: Log,
-  close: readonly (() => Promise<void>)[],
+  { before, after }: { before: () => Promise<void>; after: readonly (() => Promise<void>)[] },
 ): void {
   let stopping = false;
   const stop = async (why: string) => {
     if (stopping) return;
     stopping = true;
     log.info({ why }, 'Stopping');
+    await before();
     const lastResort = setTimeout(() => server.closeAllConnections(), PATIENCE_MS);
     await new Promise<void>((done) => {
       server.close(() => done());
       server.closeIdleConnections();
     });
     clearTimeout(lastResort);
-    for (const each of close) await each();
+    for (const each of after) await each();
     log.info('Stopped');
     process.exit(0);
   };

@@ -28,6 +28,15 @@ export const router = createBrowserRouter([
         lazy: () => lazyPage(async () => (await import('./routes/join/JoinPage.tsx')).JoinPage),
       },
       {
+        path: 'shared/:token',
+        lazy: () =>
+          lazyPage(async () => (await import('./routes/shared/SharedPage.tsx')).SharedPage),
+      },
+      {
+        path: 'guest/:token',
+        lazy: () => lazyPage(async () => (await import('./routes/guest/GuestPage.tsx')).GuestPage),
+      },
+      {
         path: 'about/checks',
         lazy: () =>
           lazyPage(async () => (await import('./routes/checks/ChecksPage.tsx')).ChecksPage),
@@ -48,9 +57,19 @@ export const router = createBrowserRouter([
               lazyPage(async () => (await import('./routes/board/BoardPage.tsx')).BoardPage),
           },
           {
+            path: 'chains/:id',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/chain/ChainPage.tsx')).ChainPage),
+          },
+          {
             path: 'yeasts',
             lazy: () =>
               lazyPage(async () => (await import('./routes/yeasts/YeastsPage.tsx')).YeastsPage),
+          },
+          {
+            path: 'yeasts/:id/family',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/family/FamilyPage.tsx')).FamilyPage),
           },
           {
             path: 'vessels',
@@ -61,6 +80,16 @@ export const router = createBrowserRouter([
             path: 'people',
             lazy: () =>
               lazyPage(async () => (await import('./routes/people/PeoplePage.tsx')).PeoplePage),
+          },
+          {
+            path: 'rules',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/rules/RulesPage.tsx')).RulesPage),
+          },
+          {
+            path: 'record',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/record/RecordPage.tsx')).RecordPage),
           },
           {
             path: 'season',

@@ -3,6 +3,7 @@ import type { Request } from 'express';
 import type { Db, Tx } from '../db/client.ts';
 import { oncePer } from '../db/oncePer.ts';
 import { person, session } from '../db/schema/people.ts';
+import { tell } from '../live/note.ts';
 import type { Clock } from '../clock.ts';
 import { giveCookie, SESSION_MS, takeCookie, tokenIn } from './cookie.ts';
 import { hashToken, newToken } from './tokens.ts';
@@ -40,8 +41,13 @@ export async function startSession(
 
 export async function endSession(db: Db, req: Request): Promise<void> {
   const token = tokenIn(req);
-  if (token !== null) await db.delete(session).where(eq(session.tokenHash, hashToken(token)));
   takeCookie(req);
+  if (token === null) return;
+  const ended = await db
+    .delete(session)
+    .where(eq(session.tokenHash, hashToken(token)))
+    .returning({ personId: session.personId });
+  for (const { personId } of ended) await tell(db, { kind: 'person', personId });
 }
 
 const MS_A_DAY = 24 * 60 * 60 * 1000;
@@ -60,6 +66,14 @@ export async function findSignedIn(db: Db, clock: Clock, req: Request): Promise<
     giveCookie(req, token);
   }
   return { person: found.person, tokenHash };
+}
+
+/** Who is signed in, asked in passing: the session is not prolonged and no cookie is given. */
+export async function personOf(db: Db, now: Date, req: Request): Promise<string | null> {
+  const token = tokenIn(req);
+  if (token === null) return null;
+  const [found] = await sessionQuery(db).execute({ tokenHash: hashToken(token), now });
+  return found?.person.id ?? null;
 }
 
 const sessionQuery = oncePer((db: Db) =>

@@ -7,6 +7,7 @@ import { oncePer } from '../db/oncePer.ts';
 import { brewery, membership } from '../db/schema/brewery.ts';
 import { season } from '../db/schema/season.ts';
 import { notFound, problem } from '../problems.ts';
+import { findGuest, type GuestChains } from './guests.ts';
 import { findSignedIn, type PersonRow, type SignedIn } from './sessions.ts';
 
 export type { SignedIn } from './sessions.ts';
@@ -20,6 +21,8 @@ export interface Member {
   brewery: typeof brewery.$inferSelect;
   /** The season that is worked on. */
   seasonId: string;
+  /** Null: a member. Else somebody of another brewery, and the chains that they may see. */
+  guestOf: GuestChains | null;
 }
 
 export async function whoAsks(
@@ -43,8 +46,17 @@ async function findMember(
   const slug = req.params.brewery;
   if (typeof slug !== 'string' || slug.length > 80 || slug.includes('\0')) throw notFound();
   const [found] = await memberQuery(db).execute({ slug, personId: person.id });
-  if (!found) throw notFound();
-  return { person, ...found };
+  if (found) return { person, guestOf: null, ...found };
+  return findGuestOr404(db, slug, person);
+}
+
+/** A guest has the strongest of the roles that they have on a chain; each chain is asked again. */
+async function findGuestOr404(db: Db, slug: string, person: PersonRow): Promise<Member> {
+  const guest = await findGuest(db, slug, person.id);
+  if (!guest) throw notFound();
+  const { brewery: owner, seasonId, chains } = guest;
+  const role = [...chains.values()].includes('brewer') ? 'brewer' : 'taster';
+  return { person, role, brewery: owner, seasonId, guestOf: chains };
 }
 
 const memberQuery = oncePer((db: Db) =>

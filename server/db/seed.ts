@@ -96,7 +96,11 @@ async function addChain(
     lineId: id,
     position,
     startKind: start.kind,
-    startGeneration: start.kind === 'outside' ? start.generation : null,
+    ...(start.kind === 'outside' && {
+      startGeneration: start.generation,
+      startAllergens: start.allergens,
+      startCultures: start.cultures,
+    }),
     startPrice: start.price,
   });
   for (const [at, each] of batches.entries()) {

@@ -34,8 +34,11 @@ function refuseMethod(methods: readonly string[]): RequestHandler {
 function answering(route: Route, deps: Deps & Services): RequestHandler {
   return async (req, res) => {
     const who = await whoAsks(route.who, deps, req);
+    if (who.member?.guestOf && !route.guests) throw notFound();
     if (who.member && !route.may(who.member)) throw problem('not-allowed');
     const answer = await route.handle(parse(route, deps, req, res), who);
+    // Asked for its head alone, a stream does not begin.
+    if (answer.stream && req.method === 'GET') return answer.stream(res);
     if (answer.version !== undefined) res.setHeader('ETag', entityTag(answer.version));
     res.setHeader('Cache-Control', 'no-store');
     const status = answer.status ?? route.operation.status;
@@ -60,9 +63,9 @@ function parse(route: Route, deps: Deps & Services, req: Request, res: Response)
 function idsOf(req: Request): Record<string, string> {
   const params: Record<string, string> = {};
   for (const [name, value] of Object.entries(req.params)) {
-    if (typeof value !== 'string' || (name === 'id' && !uuid.safeParse(value).success))
-      throw notFound();
-    params[name] = name === 'id' ? value.toLowerCase() : value;
+    const isId = /^(id|[a-z]+Id)$/.test(name);
+    if (typeof value !== 'string' || (isId && !uuid.safeParse(value).success)) throw notFound();
+    params[name] = isId ? value.toLowerCase() : value;
   }
   return params;
 }

@@ -15,9 +15,13 @@ export interface Operation<Body = unknown> {
   path: string;
   summary: string;
   body?: z.ZodType<Body>;
+  /** What may stand behind the question mark; the handler parses it. */
+  query?: z.ZodObject;
   /** Null: an answer without content. */
   answer: z.ZodType | null;
   status: 200 | 201 | 204;
+  /** The answer stays open: Server-Sent Events. */
+  stream?: true;
   /** Changes a row that has a version: demands If-Match. */
   ifMatch?: boolean;
   /** Problems beyond those that follow from the rest. */
@@ -26,6 +30,8 @@ export interface Operation<Body = unknown> {
 
 export interface Answer {
   body?: unknown;
+  /** Takes the answer over: it stays open. */
+  stream?: (res: Response) => void;
   status?: number;
   /** Version of the one row that is answered; becomes its ETag. */
   version?: number;
@@ -43,6 +49,8 @@ export interface Asked<Body> extends Deps, Services {
 export interface Route {
   operation: Operation;
   who: Who;
+  /** Guests may ask too; to the rest of a brewery's addresses they are strangers. */
+  guests?: boolean;
   may: (member: InRole) => boolean;
   handle: (
     asked: Asked<unknown>,

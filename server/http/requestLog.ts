@@ -4,9 +4,9 @@ import { pinoHttp } from 'pino-http';
 import type { RequestHandler } from 'express';
 import type { Log } from '../log.ts';
 
-/** A join link's token opens a brewery, so its address is not written down. */
+/** A link's token opens a brewery or a chain, so its address is not written down. */
 const withoutSecrets = (url: string | undefined) =>
-  url?.split('?')[0]?.replace(/^(\/api)?\/join\/[^/]+/, '$1/join/…');
+  url?.split('?')[0]?.replace(/^(\/api)?\/(join|shared|guest)\/[^/]+/, '$1/$2/…');
 
 /** The network that somebody came from, which is enough to see a flood. */
 export const shortAddress = (address: string | undefined) =>

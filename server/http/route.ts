@@ -39,10 +39,13 @@ export function forMember<Body>(
   operation: Operation<Body>,
   may: (member: InRole) => boolean,
   handle: (asked: Asked<Body>, member: Member) => Promise<Answer>,
+  /** People of other breweries may ask for it too, for what is on their chain. */
+  guests: 'guests-too' | 'members-only' = 'members-only',
 ): Route {
   return {
     operation,
     who: 'member',
+    guests: guests === 'guests-too',
     may,
     handle: (asked, { member }) => {
       if (!member) throw notFound();

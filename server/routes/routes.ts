@@ -5,12 +5,18 @@ import { boardRoutes } from './board/router.ts';
 import { breweryRoutes } from './brewery/router.ts';
 import { chainRoutes } from './chains/router.ts';
 import { checkRoutes } from './check/router.ts';
+import { commentRoutes } from './comments/router.ts';
+import { houseRulesRoutes } from './house-rules/router.ts';
 import { joinRoutes } from './join/router.ts';
+import { guestRoutes } from './guests/router.ts';
+import { liveRoutes } from './live/router.ts';
 import { moveRoutes } from './moves/router.ts';
 import { peopleRoutes } from './people/router.ts';
+import { recordRoutes } from './record/router.ts';
 import { seasonRoutes } from './season/router.ts';
 import { sessionRoutes } from './session/router.ts';
 import { openApiRoute } from './system/openapi.ts';
+import { shareRoutes } from './share/router.ts';
 import { systemRoutes } from './system/router.ts';
 import { vesselRoutes } from './vessels/router.ts';
 import { yeastRoutes } from './yeasts/router.ts';
@@ -24,11 +30,17 @@ const resources: readonly Route[] = [
   ...peopleRoutes,
   ...boardRoutes,
   ...seasonRoutes,
+  ...recordRoutes,
+  ...houseRulesRoutes,
   ...yeastRoutes,
   ...vesselRoutes,
   ...chainRoutes,
+  ...commentRoutes,
   ...batchRoutes,
   ...moveRoutes,
+  ...liveRoutes,
+  ...shareRoutes,
+  ...guestRoutes,
   ...checkRoutes,
 ];
 

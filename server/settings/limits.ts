@@ -9,6 +9,7 @@ const limits = z.strictObject({
   signInByAddress: rate,
   signUpByAddress: rate,
   joinByAddress: rate,
+  sharedByAddress: rate,
   clientErrorsByAddress: rate,
   checksByPerson: rate,
   /** Password hashes at work at one time, and those that may wait; more answer 503. */
@@ -26,6 +27,7 @@ export const LIMITS: Limits = {
   signInByAddress: { points: 100, seconds: 900 },
   signUpByAddress: { points: 20, seconds: 3600 },
   joinByAddress: { points: 60, seconds: 900 },
+  sharedByAddress: { points: 300, seconds: 900 },
   clientErrorsByAddress: { points: 30, seconds: 600 },
   checksByPerson: { points: 3000, seconds: 60 },
   hashesAtOnce: 2,
@@ -38,4 +40,5 @@ export const LOCAL_LIMITS: LimitChanges = {
   signInByAddress: { points: 2000, seconds: 900 },
   signUpByAddress: { points: 1000, seconds: 3600 },
   joinByAddress: { points: 2000, seconds: 900 },
+  sharedByAddress: { points: 5000, seconds: 900 },
 };

@@ -5,6 +5,7 @@ import { batch } from './batch.ts';
 import { brewery, season } from './brewery.ts';
 import { chain } from './chain.ts';
 import * as f from './fields.ts';
+import { guestShelf } from './guest.ts';
 import { abilities, member, role } from './people.ts';
 import { vessel } from './vessel.ts';
 import { yeast } from './yeast.ts';
@@ -44,5 +45,9 @@ export const board = z.strictObject({
   /** The newest of one's own changes that can be undone, and the newest undone one. */
   undo: z.strictObject({ id: f.id, what: z.string() }).nullable(),
   redo: z.strictObject({ id: f.id, what: z.string() }).nullable(),
+  /** Comments of others that one has not seen, by chain; a chain without any is left out. */
+  unread: z.record(f.id, z.number().int().min(1)),
+  /** Shelves of other breweries on which this person is a guest. */
+  guests: z.array(guestShelf),
 });
 export type Board = z.infer<typeof board>;

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { ALLERGENS, CULTURES } from '../rules/vocabulary.ts';
 import * as f from './fields.ts';
 
 /** How the first batch of a chain gets its yeast. */
@@ -12,6 +13,9 @@ export const chainStart = z.discriminatedUnion('kind', [
     kind: z.literal('outside'),
     generation: z.number().int().min(1).max(60),
     price: f.moneyMinor.nullable(),
+    /** What the slurry brings along. Empty: nothing. Null: unknown. */
+    allergens: z.array(z.enum(ALLERGENS)).max(14).nullable().default(null),
+    cultures: z.array(z.enum(CULTURES)).max(5).nullable().default(null),
   }),
 ]);
 export type ChainStart = z.infer<typeof chainStart>;
@@ -50,3 +54,7 @@ export const chainPatch = z
   })
   .partial();
 export type ChainPatch = z.infer<typeof chainPatch>;
+
+/** The board's revision once a chain's dates follow its cake. */
+export const datesPulled = z.strictObject({ revision: z.number().int().min(0) });
+export type DatesPulled = z.infer<typeof datesPulled>;

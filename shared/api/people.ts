@@ -39,6 +39,10 @@ export type SignInRequest = z.infer<typeof signInRequest>;
 export const abilities = z.strictObject({
   editBatches: z.boolean(),
   moveBatches: z.boolean(),
+  /** To another shelf, a new one or the bench. */
+  moveAcross: z.boolean(),
+  /** Add, brew, rack, scrap and delete batches. */
+  setStages: z.boolean(),
   editChains: z.boolean(),
   editYeastsAndVessels: z.boolean(),
   editSeason: z.boolean(),

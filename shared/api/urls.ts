@@ -11,12 +11,33 @@ export const api = {
   joinLink: (slug: string, id: string) => `${b(slug)}/join-links/${id}`,
   board: (slug: string) => `${b(slug)}/board`,
   season: (slug: string, id: string) => `${b(slug)}/seasons/${id}`,
+  /** Server-Sent Events. */
+  seasonEvents: (slug: string, id: string) => `${b(slug)}/seasons/${id}/events`,
+  /** Everything that happened in a season, newest first. */
+  changes: (slug: string, seasonId: string) => `${b(slug)}/seasons/${seasonId}/changes`,
+  houseRules: (slug: string) => `${b(slug)}/house-rules`,
   yeasts: (slug: string) => `${b(slug)}/yeasts`,
   yeast: (slug: string, id: string) => `${b(slug)}/yeasts/${id}`,
   vessels: (slug: string) => `${b(slug)}/vessels`,
   vessel: (slug: string, id: string) => `${b(slug)}/vessels/${id}`,
   chains: (slug: string) => `${b(slug)}/chains`,
   chain: (slug: string, id: string) => `${b(slug)}/chains/${id}`,
+  pullDates: (slug: string, id: string) => `${b(slug)}/chains/${id}/pull`,
+  /** The talk of a chain. */
+  comments: (slug: string, id: string) => `${b(slug)}/chains/${id}/comments`,
+  comment: (slug: string, id: string, commentId: string) =>
+    `${b(slug)}/chains/${id}/comments/${commentId}`,
+  commentsSeen: (slug: string, id: string) => `${b(slug)}/chains/${id}/comments/seen`,
+  /** Read-only links to one chain. */
+  shareLinks: (slug: string, chainId: string) => `${b(slug)}/chains/${chainId}/share-links`,
+  shareLink: (slug: string, id: string) => `${b(slug)}/share-links/${id}`,
+  /** People of other breweries on one chain. */
+  guests: (slug: string, chainId: string) => `${b(slug)}/chains/${chainId}/guests`,
+  guest: (slug: string, id: string) => `${b(slug)}/guests/${id}`,
+  guestInvitation: (token: string) => `/api/guest/${encodeURIComponent(token)}`,
+  /** What such a link shows. */
+  shared: (token: string) => `/api/shared/${encodeURIComponent(token)}`,
+  copies: (slug: string) => `${b(slug)}/copies`,
   batches: (slug: string) => `${b(slug)}/batches`,
   batch: (slug: string, id: string) => `${b(slug)}/batches/${id}`,
   batchStage: (slug: string, id: string) => `${b(slug)}/batches/${id}/stage`,

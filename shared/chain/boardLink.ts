@@ -76,15 +76,11 @@ function usesOf(
   return (batchId) => uses.get(batchId);
 }
 
-/** What the engine is told of the link into a batch; null where no cake goes under it. */
-export function linkInput(laterId: string, sight: Sight): LinkInput | null {
-  const later = sight.layout.batch(laterId);
-  const earlier = later ? sight.layout.predecessor(laterId) : null;
-  return later && earlier ? linkBetween(earlier, later, sight) : null;
-}
-
-/** The link of two batches that stand together; null where the yeast is not on the board. */
-export function linkBetween(earlier: Batch, later: Batch, sight: LinkSight): LinkInput | null {
+/**
+ * The link of two batches that stand together, as if nobody else got of the cake; null where the
+ * yeast is not on the board.
+ */
+export function unsharedLink(earlier: Batch, later: Batch, sight: LinkSight): LinkInput | null {
   const { index, layout } = sight;
   const yeast = cakeYeastOf(earlier, later, sight);
   if (!yeast) return null;

@@ -1,5 +1,6 @@
+import type { Batch } from '../api/batch.ts';
 import type { Chain } from '../api/chain.ts';
-import type { BoardIndex } from './board.ts';
+import { order, type BoardIndex } from './board.ts';
 
 /**
  * What a batch of each chain costs in yeast, in the currency's minor unit: the price of the pack
@@ -22,6 +23,30 @@ export function costsPerBatch(index: BoardIndex): Map<string, number | null> {
     }),
   );
 }
+
+/**
+ * What a batch costs in yeast as the season goes on, in the currency's minor unit, by batch: the
+ * price that its yeast goes back to, over all batches made from it by then, in the order of their
+ * brew days. Null where the price, or the first cake, is not known.
+ */
+export function costsAsMade(index: BoardIndex): Map<string, number | null> {
+  const costs = new Map<string, number | null>();
+  const lines = new Map<Chain | null, Batch[]>();
+  for (const chain of index.chains) {
+    const root = rootChain(index, chain);
+    lines.set(root, [...(lines.get(root) ?? []), ...index.batchesOf(chain.id)]);
+  }
+  for (const [root, batches] of lines) {
+    const price = root ? priceOf(index, root) : null;
+    for (const [made, { id }] of inBrewOrder(batches).entries())
+      costs.set(id, price === null ? null : Math.round(price / (made + 1)));
+  }
+  return costs;
+}
+
+/** By brew day, the undated last; sorting keeps the order of a shelf. */
+const inBrewOrder = (batches: readonly Batch[]): Batch[] =>
+  batches.toSorted((a, b) => order(a.brewOn ?? '9999', b.brewOn ?? '9999'));
 
 /** The chain at the head of the descent; null where the way up is lost. */
 function rootChain(index: BoardIndex, chain: Chain): Chain | null {

@@ -1,4 +1,5 @@
 import type { Batch } from '../api/batch.ts';
+import type { ChainStart } from '../api/chain.ts';
 import type { Inheritance } from '../rules/facts.ts';
 import type { Layout } from './board.ts';
 import { NOTHING_INHERITED } from './inherit.ts';
@@ -58,10 +59,21 @@ function startOf(layout: Layout, batch: Batch): Descent {
     case 'pack':
       return { generation: 1, inherited: NOTHING_INHERITED };
     case 'outside':
-      return { generation: start.generation, inherited: NOTHING_INHERITED };
+      return { generation: start.generation, inherited: broughtAlong(start) };
     case 'cake':
       return LOST;
     case undefined:
       return UNSTARTED;
   }
+}
+
+/** What slurry from outside hands down to the first beer, as far as it is written down. */
+export function broughtAlong({
+  allergens,
+  cultures,
+}: Extract<ChainStart, { kind: 'outside' }>): Inheritance {
+  const inherited: Inheritance = { allergens: allergens ?? [], cultures: cultures ?? [] };
+  if (allergens === null) inherited.allergensUnknown = true;
+  if (cultures === null) inherited.culturesUnknown = true;
+  return inherited;
 }

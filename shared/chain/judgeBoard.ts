@@ -5,11 +5,12 @@ import type { LinkAnswer } from '../rules/answer.ts';
 import type { Day, Verdict } from '../rules/vocabulary.ts';
 import { isAccepted } from './acceptance.ts';
 import type { BoardFacts, BoardIndex } from './board.ts';
-import { linkInput, sightOf, type Sight } from './boardLink.ts';
+import { sightOf, type Sight } from './boardLink.ts';
 import { checkLink } from './checkLink.ts';
 import { conflictsOf, type Conflict } from './conflicts.ts';
 import { costsPerBatch, packsOf } from './cost.ts';
 import { rackDay } from './dates.ts';
+import { linkInput } from './linkInput.ts';
 
 export type JudgedLink = LinkAnswer & {
   /** Somebody took each of its holds on, with a reason. */

@@ -1,7 +1,8 @@
 import type { LinkInput } from '../rules/linkInput.ts';
 import { daysBetween } from '../units/day.ts';
 import type { BoardFacts } from './board.ts';
-import { linkInput, sightOf } from './boardLink.ts';
+import { sightOf } from './boardLink.ts';
+import { linkInput } from './linkInput.ts';
 
 /**
  * The batches whose accepted link is no longer the one that was accepted: a fact of it, or its
@@ -18,12 +19,18 @@ export function lapses(before: BoardFacts, after: BoardFacts): string[] {
   });
 }
 
+/** A link's facts as text, as an acceptance speaks of them; null where there is no link. */
+export function linkGist(board: BoardFacts, batchId: string): string | null {
+  const input = linkInput(batchId, sightOf(board));
+  return input && gist(input);
+}
+
 /** A link's facts as text, its days counted from each other. */
 function gist(input: LinkInput): string {
   const { earlier, later, pour, board, inherited, rules: _, units: __, ...rest } = input;
   const { name: _a, brewOn: brewedOn, ...earlierFacts } = earlier;
   const { name: _b, brewOn, ...laterFacts } = later;
-  const { takenOn, ...pourFacts } = pour;
+  const { takenOn, sharedWith = [], ...pourFacts } = pour;
   return JSON.stringify({
     ...rest,
     inherited: {
@@ -34,6 +41,7 @@ function gist(input: LinkInput): string {
     earlier: earlierFacts,
     later: laterFacts,
     pour: pourFacts,
+    shared: sharedWith.map(({ litres }) => litres),
     taken: board?.vesselTakenBy !== undefined,
     cakeCheck: board?.cakeCheck,
     untilTaken: between(brewedOn, takenOn),

@@ -6,6 +6,7 @@ import { Descents } from './trial/descents.ts';
 import { Judgement } from './trial/judgement.ts';
 import { at, column, NONE } from './trial/numbers.ts';
 import { isStill, Pairs, type Pair } from './trial/pairs.ts';
+import { eachSharer, startsChains } from './trial/parts.ts';
 import { rosterOf, type Roster } from './trial/roster.ts';
 import { Trial, type TrialPlace } from './trial/trial.ts';
 import { findIn, membersOf, vesselsChanged } from './trial/vesselDays.ts';
@@ -99,14 +100,21 @@ export class Scales {
     return { changed, brewDay, generation };
   }
 
-  /** The moved batch, those that stand on another cake, and all that descend from them. */
+  /**
+   * The moved batch, those that stand on another cake, all that descend from them, and who shares
+   * a cake with any of these.
+   */
   #reach(batch: number): number[] {
     this.#trials += 1;
     const reached: number[] = [];
-    this.#take(batch, reached);
-    for (const one of this.#trial.relinked) this.#take(one, reached);
+    const take = (one: number) => this.#take(one, reached);
+    take(batch);
+    for (const one of this.#trial.relinked) take(one);
     for (let next = 0; next < reached.length; next += 1)
-      this.#trial.eachFollower(reached[next] ?? NONE, (one) => this.#take(one, reached));
+      this.#trial.eachFollower(reached[next] ?? NONE, take);
+    const changed = reached.length;
+    for (let next = 0; next < changed; next += 1)
+      eachSharer(this.#trial, reached[next] ?? NONE, take);
     return reached;
   }
 
@@ -170,7 +178,8 @@ export class Scales {
 
   #pairOf(cake: number, batch: number, known: Pair | null | undefined): Pair | null {
     const trial = this.#trial;
-    return known && !trial.relinked.includes(batch) && isStill(known, trial, cake, batch)
+    const isSame = !trial.relinked.includes(batch) && !startsChains(trial, cake);
+    return known && isSame && isStill(known, trial, cake, batch)
       ? known
       : this.#pairs.judge(cake, batch);
   }

@@ -1,5 +1,7 @@
 import { points } from '../units/gravity.ts';
 import type { Advice } from './answer.ts';
+import type { SharedPart } from './facts.ts';
+import { freeCakeL } from './freeCake.ts';
 import { hopLoad, onCake } from './hops-in-cake.ts';
 import type { LinkState } from './linkState.ts';
 import { namesOf, type Names } from './names.ts';
@@ -28,21 +30,24 @@ const blowOff: Piece = ({ kept: { ratio = 0 } }) =>
     ? `The kept cake holds ${atMost(ratio, 1)} times the cells that are needed: use a blow-off tube of 25 mm or more.`
     : null;
 
-/** Below this share of the cake the recommended part leaves enough to be worth a jar. */
-const CLEARLY_LESS = 0.8;
-
-const TOO_MUCH = 'Too much yeast does less harm than too little, but it flattens character.';
-
-const surplus: Piece = ({ kept: { keptL, share }, cake, recommended }, _names, say) => {
+const surplus: Piece = ({ kept: { keptL, share }, cake, pour }, _names, say) => {
   if (keptL === undefined || share === undefined || share === 0 || cake === undefined) return null;
   const whole = cake.volumeL.likely;
-  if (share < 0.99)
-    return `The other ${say.part(whole - keptL)} of cake could be jarred, lid loose. ${TOO_MUCH}`;
-  const enough = recommended?.litres ?? 0;
-  return enough > 0 && enough < CLEARLY_LESS * whole
-    ? `${say.part(enough)} is enough; the other ${say.part(whole - enough)} could be jarred, lid loose. ${TOO_MUCH}`
+  const rest = (freeCakeL(whole, pour) ?? 0) - keptL;
+  return rest > whole * 0.01
+    ? `The other ${say.part(rest)} of cake could be jarred, lid loose. ` +
+        'Too much yeast does less harm than too little, but it flattens character.'
     : null;
 };
+
+const shared: Piece = ({ pour: { sharedWith = [] } }, _names, say) =>
+  sharedWith.length > 0
+    ? `Of this cake ${partsOf(sharedWith, say)}: measure the parts before either is poured.`
+    : null;
+
+/** "0.4 L goes under Slack Water". */
+const partsOf = (parts: readonly SharedPart[], say: Say): string =>
+  listed(parts.map(({ name, litres }) => `${say.part(litres)} goes under ${name}`));
 
 const measureCake: Piece = ({ cake, kept: { ratio, share }, need }, { b }) => {
   if (cake?.viableCells === undefined || ratio === undefined || ratio < 1) return null;
@@ -51,10 +56,13 @@ const measureCake: Piece = ({ cake, kept: { ratio, share }, need }, { b }) => {
     : null;
 };
 
-const clamped: Piece = ({ kept, cake }, _names, say) =>
-  kept.clamped && cake !== undefined
-    ? `More was asked for than there is: the whole cake is about ${say.part(cake.volumeL.likely)}.`
-    : null;
+const clamped: Piece = ({ kept, cake, pour: { sharedWith = [] } }, _names, say) => {
+  if (!kept.clamped || cake === undefined) return null;
+  const whole = `the whole cake is about ${say.part(cake.volumeL.likely)}`;
+  return sharedWith.length > 0
+    ? `More was asked for than is left: ${whole}, of which ${partsOf(sharedWith, say)}. Agree on smaller parts, or measure the cake.`
+    : `More was asked for than there is: ${whole}.`;
+};
 
 const darkUnseen: Piece = (link, { a, b }) => {
   const { a: earlier, b: later, rules } = link;
@@ -93,6 +101,7 @@ const PIECES: readonly (readonly [string, Piece])[] = [
   ['oxygen', oxygen],
   ['second-oxygen', secondOxygen],
   ['blow-off', blowOff],
+  ['shared-cake', shared],
   ['jar-the-rest', surplus],
   ['measure-the-cake', measureCake],
   ['kept-all-there-is', clamped],

@@ -74,6 +74,14 @@ export interface PourFacts {
   beersSinceCleaning?: number;
   /** B's own vessel; absent: the chain's. */
   vessel?: VesselFacts;
+  /** Parts of the same cake that go under other worts; absent: none. */
+  sharedWith?: readonly SharedPart[];
+}
+
+export interface SharedPart {
+  /** The wort that gets it. */
+  name: string;
+  litres: number;
 }
 
 export interface YeastFacts {

@@ -1,6 +1,7 @@
 import { retainedBeerL } from '../cake/blend.ts';
 import type { Interval } from './answer.ts';
 import type { BatchFacts, PourFacts, VesselFacts } from './facts.ts';
+import { freeCakeL } from './freeCake.ts';
 import type { LinkCake } from './linkCake.ts';
 import type { HouseRules } from './resolve.ts';
 import { withoutNoise } from './rounding.ts';
@@ -35,11 +36,12 @@ export interface KeptCake {
   freeShareAtMost: number | undefined;
 }
 
-/** @param keepL part to keep, litres; undefined: the whole cake. */
+/** @param keepL part to keep, litres; undefined: all that no other wort gets. */
 export function keptCake(link: Around, keepL: number | undefined): KeptCake {
   const whole = link.cake?.volumeL.likely;
-  const clamped = keepL !== undefined && whole !== undefined && keepL > whole;
-  const keptL = clamped || keepL === undefined ? whole : keepL;
+  const free = freeCakeL(whole, link.pour);
+  const clamped = keepL !== undefined && free !== undefined && keepL > free;
+  const keptL = clamped || keepL === undefined ? free : keepL;
   const share =
     keptL === 0 ? 0 : whole === undefined || keptL === undefined ? undefined : keptL / whole;
   const leftL = leftAbove(link);

@@ -1,7 +1,8 @@
 import { estimateCake } from '../cake/estimate.ts';
 import { recommendedKeep } from '../cake/keep.ts';
 import type { Interval } from './answer.ts';
-import type { BatchFacts } from './facts.ts';
+import type { BatchFacts, PourFacts } from './facts.ts';
+import { freeCakeL } from './freeCake.ts';
 import type { YeastKind } from './vocabulary.ts';
 
 export interface LinkCake {
@@ -42,8 +43,12 @@ const times = (x: Interval, by: number): Interval => ({
 export function recommendedFor(
   cake: LinkCake | undefined,
   need: number | undefined,
+  pour: Pick<PourFacts, 'sharedWith'> = {},
 ): { litres: number; kg: number } | undefined {
   if (cake?.viableCells === undefined || need === undefined) return undefined;
   const { viableCells, volumeL, massKg, measured } = cake;
-  return recommendedKeep({ cake: { viableCells, volumeL, massKg, measured }, need });
+  const wanted = recommendedKeep({ cake: { viableCells, volumeL, massKg, measured }, need });
+  const free = freeCakeL(volumeL.likely, pour) ?? 0;
+  if (wanted.litres <= free) return wanted;
+  return { litres: free, kg: (massKg.likely * free) / volumeL.likely };
 }

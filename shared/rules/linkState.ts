@@ -79,9 +79,13 @@ export class LinkState {
     return colourShift(this.b.srm, srm);
   }
 
-  /** The part to keep whose low-end estimate meets the need; undefined where unknown. */
+  /**
+   * The part to keep whose low-end estimate meets the need, at most what other worts leave of the
+   * cake; undefined where unknown.
+   */
   get recommended(): { litres: number; kg: number } | undefined {
-    if (this.#recommended === null) this.#recommended = recommendedFor(this.cake, this.need);
+    if (this.#recommended === null)
+      this.#recommended = recommendedFor(this.cake, this.need, this.pour);
     return this.#recommended;
   }
 

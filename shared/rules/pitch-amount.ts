@@ -76,7 +76,9 @@ function moreYeast(link: LinkState, { why }: Detail, say: Say): string {
   )
     return whole >= rules.pitchMind || why === 'none'
       ? `Keep ${say.part(recommended.litres)} of the cake.`
-      : `Keep the whole cake, and add fresh yeast.`;
+      : link.pour.sharedWith
+        ? 'Keep all that is left of the cake, and add fresh yeast; or give the other wort less.'
+        : 'Keep the whole cake, and add fresh yeast.';
   const ratio = kept.ratio ?? kept.ratioAtMost ?? 0;
   if (why === 'none' || link.b.volumeL === undefined) return 'Keep a part of the cake.';
   const litres = downToTenth((link.b.volumeL * ratio) / rules.pitchMind);

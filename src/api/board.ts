@@ -4,7 +4,7 @@ import {
   useSuspenseQuery,
   type QueryClient,
 } from '@tanstack/react-query';
-import { useMemo, useSyncExternalStore } from 'react';
+import { createContext, use, useMemo, useSyncExternalStore } from 'react';
 import { useParams } from 'react-router-dom';
 import { board as boardContract, type Board } from '#shared/api/board.ts';
 import type { UnitPrefs } from '#shared/api/units.ts';
@@ -24,7 +24,7 @@ export function boardQuery(slug: string) {
     queryFn: async ({ client, signal }): Promise<Board> => {
       const before = client.getQueryData<Board>(queryKey);
       const fresh = await request(boardContract, 'GET', api.board(slug), { signal });
-      await boardStillness.quiet();
+      await boardStillness.quiet(fresh);
       return newest(before, client.getQueryData<Board>(queryKey), fresh);
     },
     staleTime: 30_000,
@@ -57,17 +57,18 @@ function judgedBoard(board: Board, units: UnitPrefs): JudgedBoard {
   const key = [units.system, units.gravity, units.colour, units.temperature].join();
   const known = byUnits.get(key);
   if (known) return known;
-  const { before } = newestJudged;
+  const before = newestJudged.get(board.season.id);
   const result = withEqualKept(judgeBoard(board, units), before);
-  newestJudged.before = result;
+  newestJudged.set(board.season.id, result);
   judged.set(board, byUnits.set(key, result));
   return result;
 }
 
-const newestJudged: { before: JudgedBoard | null } = { before: null };
+/** By season: boards of other breweries may be drawn beside one's own. */
+const newestJudged = new Map<string, JudgedBoard>();
 
 /** What is judged as it was before stays the same object, so that it need not be drawn anew. */
-function withEqualKept(now: JudgedBoard, before: JudgedBoard | null): JudgedBoard {
+function withEqualKept(now: JudgedBoard, before: JudgedBoard | undefined): JudgedBoard {
   if (!before) return now;
   return {
     ...now,
@@ -79,8 +80,17 @@ function withEqualKept(now: JudgedBoard, before: JudgedBoard | null): JudgedBoar
 const equalKept = <T>(now: ReadonlyMap<string, T>, before: ReadonlyMap<string, T>) =>
   new Map([...now].map(([id, one]): [string, T] => [id, replaceEqualDeep(before.get(id), one)]));
 
+/** The slug of another brewery, around a shelf of theirs on which one is a guest. */
+export const OtherBoardSlug = createContext<string | null>(null);
+
+/** True on a shelf of another brewery. */
+export const useIsGuestHere = (): boolean => use(OtherBoardSlug) !== null;
+
+/** Whose board it is that is drawn here: the brewery's in the address, if no other is named. */
 export function useBoardSlug(): string {
+  const other = use(OtherBoardSlug);
   const { brewery } = useParams();
+  if (other !== null) return other;
   if (!brewery) throw new Error('A board is shown under the address of its brewery');
   return brewery;
 }

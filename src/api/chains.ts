@@ -1,5 +1,5 @@
 import { useMutation } from '@tanstack/react-query';
-import { chain, type ChainCreate, type ChainPatch } from '#shared/api/chain.ts';
+import { chain, datesPulled, type ChainCreate, type ChainPatch } from '#shared/api/chain.ts';
 import { api } from '#shared/api/urls.ts';
 import { request, requestNothing } from './client.ts';
 import { useBoardChanged } from './boardChanged.ts';
@@ -23,6 +23,14 @@ export function useChainDelete(slug: string) {
   return useMutation({
     mutationFn: ({ id, version }: { id: string; version: number }) =>
       requestNothing('DELETE', api.chain(slug, id), { ifMatch: version }),
+    ...useBoardChanged(slug),
+  });
+}
+
+/** Every pencilled batch of a chain brewed on the day the yeast before it is taken. */
+export function usePullChain(slug: string) {
+  return useMutation({
+    mutationFn: (id: string) => request(datesPulled, 'POST', api.pullDates(slug, id)),
     ...useBoardChanged(slug),
   });
 }

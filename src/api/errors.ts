@@ -45,3 +45,7 @@ export function sentenceOf(error: unknown): string {
   if (error instanceof OfflineError) return error.message;
   return 'Something went wrong here. Try again; if it stays, reload the page.';
 }
+
+/** What the server refused at a field, where the page has only one; null for other failures. */
+export const fieldSentenceOf = (error: unknown): string | null =>
+  error instanceof ProblemError ? (error.problem.errors?.[0]?.detail ?? null) : null;

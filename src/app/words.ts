@@ -9,5 +9,5 @@ export const ROLE_WORDS: Record<Role, string> = {
 export const ROLE_MEANING: Record<Role, string> = {
   'head-brewer': 'Everything: yeasts, vessels, the season, people, accepting a hold.',
   brewer: 'Adds, edits and moves batches and chains.',
-  taster: 'Sees the board and changes nothing.',
+  taster: 'Sees the board and joins the talk; changes nothing else.',
 };

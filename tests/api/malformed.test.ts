@@ -20,6 +20,7 @@ beforeAll(async () => {
       signInByAddress: many,
       signUpByAddress: many,
       joinByAddress: many,
+      sharedByAddress: many,
       clientErrorsByAddress: many,
       checksByPerson: many,
     },
@@ -33,6 +34,8 @@ beforeAll(async () => {
     chains: season.chainA,
     batches: batch,
     'join-links': batch,
+    'share-links': batch,
+    guests: batch,
   };
 });
 afterAll(() => server.close());
@@ -82,6 +85,7 @@ function address({ path }: Operation): string {
   return path
     .replace('{brewery}', season.slug)
     .replace('{id}', ids[resource] ?? '')
+    .replace('{commentId}', ids[resource] ?? '')
     .replace('{token}', 'no-such-token');
 }
 

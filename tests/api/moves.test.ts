@@ -173,7 +173,9 @@ describe('undo and redo', () => {
     const after = (await boardOf(season.head, season.slug)).batches;
     const { undo: newest } = await boardOf(season.head, season.slug);
     const undone = await good<Moved>(undo(season.head, newest?.id ?? ''));
-    expect(contract.parse(undone).undo?.what).toBe('Moved C after B');
+    expect(contract.parse(undone).undo?.what).toBe(
+      'Set the kept part of the cake under C from the recommended part to 400 mL',
+    );
     expect(undone.redo?.id).toBe(answer.changeId);
     const same = (rows: typeof before) => rows.map((row) => ({ ...row, version: 0 }));
     expect(same((await boardOf(season.head, season.slug)).batches)).toEqual(same(before));

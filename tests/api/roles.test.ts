@@ -1,20 +1,39 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { JoinLinkMade } from '#shared/api/people.ts';
+import type { ShareLinkMade } from '#shared/api/share.ts';
 import { api } from '#shared/api/urls.ts';
 import { routes } from '../../server/routes/routes.ts';
+import { guestOn, invited } from '../support/guests.ts';
 import { boardOf, good, joined, shelve, testSeason, type TestSeason } from '../support/season.ts';
 import { startTestServer, type TestServer } from '../support/server.ts';
 import { newcomer, Visitor } from '../support/visitor.ts';
 
 type Role = 'head-brewer' | 'brewer' | 'taster';
-const ALL: Role[] = ['head-brewer', 'brewer', 'taster'];
-const BREWERS: Role[] = ['head-brewer', 'brewer'];
-const HEAD: Role[] = ['head-brewer'];
+/** Everybody who may come by. Only the first three belong to the brewery. */
+const WHO = [
+  'taster',
+  'brewer',
+  'head-brewer',
+  'guest taster',
+  'guest brewer',
+  'link visitor',
+  'stranger',
+  'other brewery',
+] as const;
+type Who = (typeof WHO)[number];
+
+const ALL: Who[] = ['head-brewer', 'brewer', 'taster'];
+const BREWERS: Who[] = ['head-brewer', 'brewer'];
+const HEAD: Who[] = ['head-brewer'];
+const WITH_GUESTS: Who[] = [...ALL, 'guest brewer', 'guest taster'];
+/** On the guest's own chain; each such route asks it again of the batch. */
+const WITH_GUEST_BREWER: Who[] = [...BREWERS, 'guest brewer'];
 
 /** Who may do what inside a brewery. Written out, so that a policy cannot change unseen. */
-const MAY: Record<string, Role[]> = {
-  readBoard: ALL,
+const MAY: Record<string, Who[]> = {
+  readBoard: WITH_GUESTS,
+  watchSeason: ALL,
   readBrewery: ALL,
   listMembers: ALL,
   editBrewery: HEAD,
@@ -22,6 +41,10 @@ const MAY: Record<string, Role[]> = {
   makeJoinLink: HEAD,
   withdrawJoinLink: HEAD,
   editSeason: HEAD,
+  readRecord: ALL,
+  readHouseRules: ALL,
+  changeHouseRules: HEAD,
+  pullDates: BREWERS,
   addYeast: HEAD,
   editYeast: HEAD,
   deleteYeast: HEAD,
@@ -31,37 +54,58 @@ const MAY: Record<string, Role[]> = {
   addChain: BREWERS,
   editChain: BREWERS,
   deleteChain: BREWERS,
+  readTalk: ALL,
+  addComment: ALL,
+  editComment: ALL,
+  removeComment: ALL,
+  markTalkSeen: ALL,
   addBatch: BREWERS,
-  editBatch: BREWERS,
+  editBatch: WITH_GUEST_BREWER,
   deleteBatch: BREWERS,
   setStage: BREWERS,
-  editLink: BREWERS,
+  editLink: WITH_GUEST_BREWER,
   acceptHold: HEAD,
   withdrawAcceptance: HEAD,
-  moveBatch: BREWERS,
-  undo: BREWERS,
-  redo: BREWERS,
+  listShareLinks: BREWERS,
+  makeShareLink: HEAD,
+  editShareLink: HEAD,
+  withdrawShareLink: HEAD,
+  copySharedChain: BREWERS,
+  listGuests: BREWERS,
+  inviteGuest: HEAD,
+  withdrawGuest: HEAD,
+  moveBatch: WITH_GUEST_BREWER,
+  undo: WITH_GUEST_BREWER,
+  redo: WITH_GUEST_BREWER,
 };
-/** What needs a person, in whatever brewery. */
-const SIGNED_IN = ['whoIsSignedIn', 'editAccount', 'checkChain'];
-/** What anybody may ask. */
-const OPEN = [
-  'openApi',
-  'health',
-  'ready',
-  'tellFault',
-  'signIn',
-  'signOut',
-  'signUp',
-  'readJoinLink',
-  'join',
-];
+/** What needs a person, in whatever brewery, with the answer to a request that says nothing. */
+const SIGNED_IN: Record<string, number> = {
+  whoIsSignedIn: 200,
+  editAccount: 428,
+  checkChain: 422,
+  acceptGuestInvitation: 422,
+};
+/** What anybody may ask, and the answer. A link's own token opens its chain; made-up ones open nothing. */
+const OPEN: Record<string, number> = {
+  openApi: 200,
+  health: 200,
+  ready: 200,
+  tellFault: 422,
+  signIn: 422,
+  signOut: 204,
+  signUp: 422,
+  readJoinLink: 404,
+  join: 404,
+  readGuestInvitation: 404,
+  readSharedChain: 200,
+};
 
 let server: TestServer;
 let season: TestSeason;
-let people: Record<Role, Visitor>;
-let stranger: Visitor;
+let people: Record<Who, Visitor>;
 let ids: Record<string, string>;
+/** Of a read-only link to the chain. */
+let token: string;
 
 beforeAll(async () => {
   server = await startTestServer();
@@ -71,8 +115,20 @@ beforeAll(async () => {
     'head-brewer': season.head,
     brewer: await joined(season, 'brewer'),
     taster: await joined(season, 'taster'),
+    'guest brewer': (await guestOn(season, season.chainA, 'brewer')).visitor,
+    'guest taster': (await guestOn(season, season.chainA, 'taster')).visitor,
+    'link visitor': new Visitor(server.url),
+    stranger: new Visitor(server.url),
+    'other brewery': (await newcomer(server.url, 'Elsewhere')).visitor,
   };
-  stranger = (await newcomer(server.url, 'Elsewhere')).visitor;
+  const { today } = await boardOf(season.head, season.slug);
+  const share = (name: string) => {
+    const body = { id: randomUUID(), name, expiresOn: today, showPrices: false };
+    return good<ShareLinkMade>(season.head.post(api.shareLinks(season.slug, season.chainA), body));
+  };
+  const shared = await share('To be withdrawn');
+  token = (await share('To stay')).token;
+  await good(people['link visitor'].get(api.shared(token)));
   const link = await good<JoinLinkMade>(
     season.head.post(api.joinLinks(season.slug), { id: randomUUID(), role: 'taster' }),
   );
@@ -83,6 +139,8 @@ beforeAll(async () => {
     chains: season.chainA,
     batches: batch,
     'join-links': link.id,
+    'share-links': shared.id,
+    guests: (await invited(season, season.chainA)).id,
   };
 });
 afterAll(() => server.close());
@@ -98,36 +156,54 @@ const called = (name: string) => {
 function ask(visitor: Visitor, name: string) {
   const { method, path, body } = called(name);
   const resource = /:brewery\/([a-z-]+)\/:id/.exec(path)?.[1] ?? '';
-  const address = path.replace(':brewery', season.slug).replace(':id', ids[resource] ?? '');
+  const address = path
+    .replace(':brewery', season.slug)
+    .replace(':id', ids[resource] ?? '')
+    .replace(':commentId', randomUUID())
+    .replace(':token', name === 'readSharedChain' ? token : 'made-up');
   return visitor.ask(method, address, body ? { body: {} } : {});
 }
 
+/** What the one who may is answered: the request says nothing, so it is not carried out where it must say something. */
+function answerOf(name: string): number {
+  const { ifMatch, body, status } = called(name);
+  return ifMatch ? 428 : body ? 422 : status;
+}
+
+/** Others are told no more than they know already: strangers to sign in, other breweries that there is nothing. */
+function refusalOf(name: string, who: Who): number {
+  if (who === 'stranger' || who === 'link visitor') return 401;
+  if (who === 'other brewery') return 404;
+  if (who === 'guest brewer' || who === 'guest taster')
+    return MAY[name]?.includes('guest brewer') ? 403 : 404;
+  return 403;
+}
+
 it('lists every operation', () => {
-  const listed = [...Object.keys(MAY), ...SIGNED_IN, ...OPEN];
+  const listed = [MAY, SIGNED_IN, OPEN].flatMap((table) => Object.keys(table));
   expect(operations.map(({ name }) => name).toSorted()).toEqual(listed.toSorted());
 });
 
-describe.each(Object.entries(MAY))('%s', (name, roles) => {
-  it('does not exist for another brewery’s people', async () => {
-    const { status, body } = await ask(stranger, name);
-    expect([status, body]).toMatchObject([404, { type: '/problems/not-found' }]);
-  });
-
-  it('asks a visitor to sign in', async () => {
-    const { status, body } = await ask(new Visitor(server.url), name);
-    expect([status, body]).toMatchObject([401, { type: '/problems/not-signed-in' }]);
-  });
-
-  it.each(ALL.toReversed())(`is for ${roles.join(', ')}: %s`, async (role) => {
-    const { status, body } = await ask(people[role], name);
-    if (roles.includes(role)) expect([200, 204, 422, 428]).toContain(status);
-    else expect([status, body]).toMatchObject([403, { type: '/problems/not-allowed' }]);
+describe.each(Object.entries(MAY))('%s', (name, allowed) => {
+  it.each(WHO)(`is for ${allowed.join(', ')}: %s`, async (who) => {
+    const { status } = await ask(people[who], name);
+    expect(status).toBe(allowed.includes(who) ? answerOf(name) : refusalOf(name, who));
   });
 });
 
-it.each(SIGNED_IN)('%s needs a person and no brewery', async (name) => {
-  expect((await ask(new Visitor(server.url), name)).status).toBe(401);
-  expect([200, 422, 428]).toContain((await ask(stranger, name)).status);
+describe.each(Object.entries(SIGNED_IN))('%s needs a person and no brewery', (name, answer) => {
+  it.each(WHO)('%s', async (who) => {
+    const isNobody = who === 'stranger' || who === 'link visitor';
+    expect((await ask(people[who], name)).status).toBe(isNobody ? 401 : answer);
+  });
+});
+
+describe.each(Object.entries(OPEN))('%s is open', (name, answer) => {
+  // Signing out would end the session of whoever asks.
+  const who = name === 'signOut' ? (['stranger', 'link visitor'] as const) : WHO;
+  it.each(who)('to %s', async (each) => {
+    expect((await ask(people[each], name)).status).toBe(answer);
+  });
 });
 
 it.each<[Role, string[]]>([
@@ -136,6 +212,8 @@ it.each<[Role, string[]]>([
     [
       'editBatches',
       'moveBatches',
+      'moveAcross',
+      'setStages',
       'editChains',
       'editYeastsAndVessels',
       'editSeason',
@@ -143,7 +221,7 @@ it.each<[Role, string[]]>([
       'invite',
     ],
   ],
-  ['brewer', ['editBatches', 'moveBatches', 'editChains']],
+  ['brewer', ['editBatches', 'moveBatches', 'moveAcross', 'setStages', 'editChains']],
   ['taster', []],
 ])('tells the page of a %s what is allowed', async (role, granted) => {
   const { can } = (await boardOf(people[role], season.slug)).me;

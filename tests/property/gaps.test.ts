@@ -6,7 +6,7 @@ import { judgeGaps, rankGaps, type Gap } from '#shared/chain/gaps.ts';
 import { judgeBoard, type JudgedLink } from '#shared/chain/judgeBoard.ts';
 import { moveBatch, type MoveWish } from '#shared/chain/move.ts';
 import { newShelfFor } from '#shared/chain/newShelf.ts';
-import { randomBoard } from '../support/randomBoards.ts';
+import { dividedBoard, randomBoard } from '../support/randomBoards.ts';
 import { after } from '../support/wishes.ts';
 
 function wishFor(board: BoardFacts, batchId: string, gap: Gap): MoveWish {
@@ -70,26 +70,35 @@ function expectedOf(board: BoardFacts, batchId: string, gap: Gap) {
   };
 }
 
+function expectTrueGaps(board: BoardFacts, choice: number): void {
+  const lifted = board.batches[choice % Math.max(1, board.batches.length)];
+  fc.pre(lifted !== undefined);
+  if (!lifted) return;
+  const gaps = judgeGaps(board, lifted.id);
+  expect(gaps.length > 0).toBe(isPencilled(lifted));
+  for (const gap of gaps.filter((one) => one.locked === null && !one.here)) {
+    const expected = expectedOf(board, lifted.id, gap);
+    const { holds, minds, brewOn, generation, colourShift } = gap;
+    const { reasons, ...figures } = expected;
+    expect({ holds, minds, brewOn, generation, colourShift }).toEqual(figures);
+    expect(new Set(gap.reasons)).toEqual(new Set(reasons));
+    expect(gap.verdict).toBe(holds > 0 ? 'hold' : minds > 0 ? 'mind' : 'pour');
+  }
+}
+
 describe('the gaps of a lifted batch', () => {
   it('say what the board says once the batch is put there', () => {
-    fc.assert(
-      fc.property(randomBoard, fc.nat({ max: 1000 }), (board, choice) => {
-        const lifted = board.batches[choice % Math.max(1, board.batches.length)];
-        fc.pre(lifted !== undefined);
-        if (!lifted) return;
-        const gaps = judgeGaps(board, lifted.id);
-        expect(gaps.length > 0).toBe(isPencilled(lifted));
-        for (const gap of gaps.filter((one) => one.locked === null && !one.here)) {
-          const expected = expectedOf(board, lifted.id, gap);
-          const { holds, minds, brewOn, generation, colourShift } = gap;
-          const { reasons, ...figures } = expected;
-          expect({ holds, minds, brewOn, generation, colourShift }).toEqual(figures);
-          expect(new Set(gap.reasons)).toEqual(new Set(reasons));
-          expect(gap.verdict).toBe(holds > 0 ? 'hold' : minds > 0 ? 'mind' : 'pour');
-        }
-      }),
-      { ...SEARCH, numRuns: 60 },
-    );
+    fc.assert(fc.property(randomBoard, fc.nat({ max: 1000 }), expectTrueGaps), {
+      ...SEARCH,
+      numRuns: 60,
+    });
+  });
+
+  it('say it also where a cake goes under several worts', () => {
+    fc.assert(fc.property(dividedBoard, fc.nat({ max: 1000 }), expectTrueGaps), {
+      ...SEARCH,
+      numRuns: 120,
+    });
   });
 
   it('are locked exactly where the move would be refused', () => {
@@ -134,35 +143,37 @@ type Fall = [holds: number, minds: number];
 
 const isLarger = (a: Fall, b: Fall): boolean => a[0] > b[0] || (a[0] === b[0] && a[1] > b[1]);
 
+function expectBestMove(board: BoardFacts): void {
+  const totals = (facts: BoardFacts) => judgeBoard(facts).totals;
+  const start = totals(board);
+  let most: Fall = [0, 0];
+  for (const batch of board.batches)
+    for (const gap of judgeGaps(board, batch.id)) {
+      if (gap.locked || gap.here || gap.key === 'bench') continue;
+      const end = totals(after(board, moveBatch(board, wishFor(board, batch.id, gap))));
+      const fall: Fall = [start.hold - end.hold, start.mind - end.mind];
+      if (isLarger(fall, most)) most = fall;
+    }
+  const best = bestMove(board);
+  const steps = [...stepsOf(board)];
+  expect(JSON.stringify(steps.at(-1))).toBe(JSON.stringify(best));
+  if (!best) {
+    expect(most).toEqual([0, 0]);
+    return;
+  }
+  expect([best.before.holds - best.after.holds, best.before.minds - best.after.minds]).toEqual(
+    most,
+  );
+  const end = totals(after(board, moveBatch(board, wishFor(board, best.batchId, best.gap))));
+  expect(best.after).toEqual({ holds: end.hold, minds: end.mind });
+}
+
 describe('the move that would help most', () => {
   it('lowers held, then minded links as much as any relocation does', () => {
-    fc.assert(
-      fc.property(randomBoard, (board) => {
-        const totals = (facts: BoardFacts) => judgeBoard(facts).totals;
-        const start = totals(board);
-        let most: Fall = [0, 0];
-        for (const batch of board.batches)
-          for (const gap of judgeGaps(board, batch.id)) {
-            if (gap.locked || gap.here || gap.key === 'bench') continue;
-            const end = totals(after(board, moveBatch(board, wishFor(board, batch.id, gap))));
-            const fall: Fall = [start.hold - end.hold, start.mind - end.mind];
-            if (isLarger(fall, most)) most = fall;
-          }
-        const best = bestMove(board);
-        const steps = [...stepsOf(board)];
-        expect(JSON.stringify(steps.at(-1))).toBe(JSON.stringify(best));
-        if (!best) {
-          expect(most).toEqual([0, 0]);
-          return;
-        }
-        expect([
-          best.before.holds - best.after.holds,
-          best.before.minds - best.after.minds,
-        ]).toEqual(most);
-        const end = totals(after(board, moveBatch(board, wishFor(board, best.batchId, best.gap))));
-        expect(best.after).toEqual({ holds: end.hold, minds: end.mind });
-      }),
-      { ...SEARCH, numRuns: 15 },
-    );
+    fc.assert(fc.property(randomBoard, expectBestMove), { ...SEARCH, numRuns: 15 });
+  });
+
+  it('does so also where a cake goes under several worts', () => {
+    fc.assert(fc.property(dividedBoard, expectBestMove), { ...SEARCH, numRuns: 15 });
   });
 });

@@ -14,6 +14,7 @@ const BENCH = 3;
 const link = fc.record({
   takenOn: fc.option(day(0, 60), { freq: 4 }),
   keepL: fc.option(fc.double({ min: 0.1, max: 2, noNaN: true }), { freq: 3 }),
+  keepWhole: fc.boolean(),
   accepted: fc.boolean(),
 });
 
@@ -67,6 +68,20 @@ export const randomBoard: fc.Arbitrary<BoardFacts> = fc
     }),
   );
 
+/**
+ * The same with cakes that go under several worts: all shelves but the first start from one of its
+ * first two cakes. Parts are often as large as a cake, so that one's gain is another's loss.
+ */
+export const dividedBoard: fc.Arbitrary<BoardFacts> = randomBoard.map((board) => {
+  const [first, ...others] = board.chains;
+  const cakes = board.batches.filter(({ chainId }) => chainId === first?.id).slice(0, 2);
+  const branches = others.map((chain, at): Chain => {
+    const source = cakes[at % Math.max(1, cakes.length)];
+    return source ? { ...chain, start: { kind: 'cake', batchId: source.id } } : chain;
+  });
+  return { ...board, chains: first ? [first, ...branches] : [] };
+});
+
 const numberOf = (at: number, place: number): number => at * 100 + place + 1;
 
 function chainOf({ vessel, yeast, start }: Shelf, at: number, shelves: readonly Shelf[]): Chain {
@@ -76,7 +91,10 @@ function chainOf({ vessel, yeast, start }: Shelf, at: number, shelves: readonly 
   };
   if (start === 'pack') return makeChain(at + 1, own);
   if (start === 'outside')
-    return makeChain(at + 1, { ...own, start: { kind: 'outside', generation: 3, price: null } });
+    return makeChain(at + 1, {
+      ...own,
+      start: { kind: 'outside', generation: 3, price: null, allergens: ['milk'], cultures: null },
+    });
   const source = Math.min(start.shelf, at - 1);
   const beers = shelves[source]?.beers.length ?? 0;
   if (source < 0 || beers === 0) return makeChain(at + 1, own);
@@ -112,7 +130,8 @@ function beerOf(number: number, facts: Beer, own: Partial<Batch>): Batch {
     link: {
       ...UNSETTLED_LINK,
       takenOn: said.takenOn,
-      keepL: said.keepL,
+      keepL: said.keepWhole ? null : said.keepL,
+      keepWhole: said.keepWhole,
       acceptance: said.accepted ? ACCEPTED : null,
     },
     ...own,

@@ -17,9 +17,15 @@ interface Options {
 
 /** Somebody with a browser: keeps the cookies, sends what a browser would send. */
 export class Visitor {
-  readonly #cookies = new Map<string, string>();
+  readonly #cookies: Map<string, string>;
 
-  constructor(readonly base: string) {}
+  /** @param like whose cookies it begins with: the same browser at another address */
+  constructor(
+    readonly base: string,
+    like?: Visitor,
+  ) {
+    this.#cookies = new Map(like ? like.#cookies : []);
+  }
 
   async ask(method: string, path: string, options: Options = {}): Promise<Reply> {
     const { body, raw, version, headers } = options;
@@ -37,7 +43,7 @@ export class Visitor {
       ...(content !== undefined && { body: content }),
     });
     this.#take(response);
-    const text = await response.text();
+    const text = await textOf(response);
     return { status: response.status, headers: response.headers, body: parsed(text) };
   }
 
@@ -64,6 +70,14 @@ export class Visitor {
       else this.#cookies.set(name, value);
     }
   }
+}
+
+/** A stream has no end to wait for. */
+async function textOf(response: Response): Promise<string> {
+  const isStream = response.headers.get('content-type')?.startsWith('text/event-stream');
+  if (!isStream) return response.text();
+  await response.body?.cancel();
+  return '';
 }
 
 function parsed(text: string): unknown {

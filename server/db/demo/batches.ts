@@ -94,7 +94,7 @@ export const DEMO_CHAINS: readonly DemoChain[] = [
     name: 'Ropewalk stout',
     yeast: 'ropewalk',
     vessel: 'carboy',
-    start: { kind: 'outside', generation: 3, price: 550 },
+    start: { kind: 'outside', generation: 3, price: 550, allergens: ['gluten'], cultures: [] },
     batches: [
       {
         plan: plan('Night Watch', 'Oatmeal stout', [1.054, 1.014, 33, 32, 19, 14]),

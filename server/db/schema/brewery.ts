@@ -14,6 +14,8 @@ export const brewery = pgTable('brewery', {
   timeZone: text().notNull(),
   currency: text().notNull(),
   units: jsonb().$type<UnitPrefs>().notNull(),
+  /** The season that the board opens; null: the oldest. No reference, since a season refers here. */
+  currentSeasonId: uuid(),
   createdAt: madeAt(),
 });
 
@@ -27,6 +29,8 @@ export const membership = pgTable(
       .notNull()
       .references(() => person.id, { onDelete: 'cascade' }),
     role: text().$type<Role>().notNull(),
+    /** Raised when the role changes. */
+    version: version(),
     joinedAt: madeAt(),
   },
   (t) => [

@@ -38,6 +38,9 @@ export const chain = pgTable(
     /** Whose cake it starts from. */
     startBatchId: uuid().references((): AnyPgColumn => batch.id),
     startGeneration: integer(),
+    /** What slurry from outside brings with it; null: unknown. */
+    startAllergens: jsonb().$type<Allergen[]>(),
+    startCultures: jsonb().$type<Culture[]>(),
     /** Minor units. */
     startPrice: integer(),
   },

@@ -13,6 +13,8 @@ export const person = pgTable(
     passwordHash: text().notNull(),
     units: jsonb().$type<UnitPrefs>().notNull(),
     theme: text().$type<Theme>().notNull().default('system'),
+    /** Closed accounts keep their row for the record, under "a former brewer". */
+    closedAt: instant(),
     createdAt: madeAt(),
   },
   (t) => [uniqueIndex('person_email').on(sql`lower(${t.email})`)],
@@ -27,6 +29,9 @@ export const session = pgTable(
       .notNull()
       .references(() => person.id, { onDelete: 'cascade' }),
     createdAt: madeAt(),
+    /** What signed in, for the list of one's sign-ins: "Firefox on Linux". */
+    device: text().notNull().default(''),
+    seenAt: instant(),
     expiresAt: instant().notNull(),
   },
   (t) => [index('session_person').on(t.personId), index('session_expiry').on(t.expiresAt)],

@@ -1,6 +1,6 @@
 import { date, index, integer, pgTable, primaryKey, text, unique, uuid } from 'drizzle-orm/pg-core';
 import { brewery } from './brewery.ts';
-import { id, madeAt, version } from './columns.ts';
+import { id, instant, madeAt, version } from './columns.ts';
 
 export const season = pgTable(
   'season',
@@ -15,6 +15,8 @@ export const season = pgTable(
     revision: integer().notNull().default(0),
     brewWeekdays: integer().array().notNull().default([6, 7]),
     brewsPerDay: integer().notNull().default(1),
+    /** Put away: it is read, not changed. */
+    archivedAt: instant(),
     createdAt: madeAt(),
   },
   (t) => [

@@ -24,8 +24,8 @@ export const acceptHold =
     const rules = holdsOf(judged);
     const acceptance = { reason, rules, by: member.person.name, at: now.toISOString() };
     await writeBatch(tx, board, id, { acceptance });
-    const what = `Accepted the hold under ${row.name}`;
-    return { what, before: row.link.acceptance, after: acceptance, touches: [id] };
+    const what = `Accepted the hold under ${row.name}: ${reason}`;
+    return { what, touches: [id] };
   };
 
 export const withdrawAcceptance =
@@ -35,6 +35,5 @@ export const withdrawAcceptance =
     demandVersion(version, row.version, row);
     if (row.link.acceptance === null) return null;
     await writeBatch(tx, board, id, { acceptance: null });
-    const what = `Took back the acceptance under ${row.name}`;
-    return { what, before: row.link.acceptance, after: null, touches: [id] };
+    return { what: `Took back the acceptance under ${row.name}`, touches: [id] };
   };

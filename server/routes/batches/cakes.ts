@@ -1,7 +1,7 @@
 import { eq } from 'drizzle-orm';
 import type { CakeState } from '#shared/api/batch.ts';
 import { cake } from '../../db/schema/cake.ts';
-import type { Hand } from '../board/changeBoard.ts';
+import type { Hand } from '../board/hand.ts';
 
 /** A cake is there from the brew day on; what was measured of it stays with it. */
 export async function setCake({ tx }: Hand, batchId: string, state: CakeState): Promise<void> {

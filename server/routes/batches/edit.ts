@@ -6,6 +6,7 @@ import {
   type LinkPatch,
 } from '#shared/api/batch.ts';
 import { UNSETTLED_LINK } from '#shared/chain/board.ts';
+import { tellBatch, tellLink } from '#shared/record/sentences.ts';
 import { batch } from '../../db/schema/chain.ts';
 import { demandMade, isRepeated } from '../../http/create.ts';
 import { demandVersion } from '../../http/etag.ts';
@@ -13,6 +14,8 @@ import { merged } from '../../http/patch.ts';
 import { problem } from '../../problems.ts';
 import type { Command } from '../board/changeBoard.ts';
 import { demandStock, one } from '../board/find.ts';
+import { sayerOf } from '../board/sayer.ts';
+import { demandPart } from './part.ts';
 import { closeUp, endOf, linkColumns, writeBatch } from './rows.ts';
 
 /** A new batch stands last on the bench. */
@@ -42,32 +45,36 @@ export const addBatch =
         .onConflictDoNothing({ target: batch.id })
         .returning({ id: batch.id }),
     );
-    return { what: `Added ${body.name}`, before: null, after: body, touches: [body.id] };
+    return { what: `Added ${body.name}`, touches: [body.id] };
   };
 
 export const editBatch =
   (id: string, version: number, patch: BatchPatch): Command =>
-  async ({ tx, board }) => {
+  async (hand) => {
+    const { tx, board } = hand;
     const row = one(board.batches, id);
     demandVersion(version, row.version, row);
     const { id: _, ...facts } = merged(batchCreate, Object.keys(batchCreate.shape), row, patch);
     demandStock(board, patch);
     await writeBatch(tx, board, id, facts);
-    return { what: `Changed ${row.name}`, before: row, after: patch, touches: [id] };
+    return { ...tellBatch(sayerOf(hand), row, { ...row, ...facts }), touches: [id] };
   };
 
 /** Facts of the link from the batch before. A kept part and "all of it" exclude each other. */
 export const editLink =
   (id: string, version: number, patch: LinkPatch): Command =>
-  async ({ tx, board }) => {
+  async (hand) => {
+    const { tx, board } = hand;
     const row = one(board.batches, id);
     demandVersion(version, row.version, row);
     const link = { ...row.link, ...patch };
     if (patch.keepWhole) link.keepL = null;
-    else if (typeof patch.keepL === 'number') link.keepWhole = false;
+    else if (typeof patch.keepL === 'number') {
+      demandPart(hand, id, patch.keepL);
+      link.keepWhole = false;
+    }
     await writeBatch(tx, board, id, linkColumns(link));
-    const what = `Changed how the cake goes under ${row.name}`;
-    return { what, before: row.link, after: patch, touches: [id] };
+    return { ...tellLink(sayerOf(hand), row.name, row.link, link), touches: [id] };
   };
 
 /** Only what was never brewed can be deleted; the rest is scrapped, and stays on the record. */
@@ -82,7 +89,7 @@ export const removeBatch =
     demandNoBranch(board.chains, row);
     if (row.stage !== 'scrapped') await closeUp(hand, row);
     await tx.delete(batch).where(and(eq(batch.seasonId, board.season.id), eq(batch.id, id)));
-    return { what: `Deleted ${row.name}`, before: row, after: null, touches: [id] };
+    return { what: `Deleted ${row.name}`, touches: [id] };
   };
 
 /** A shelf that starts from a batch's cake needs the batch. */

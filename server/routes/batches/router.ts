@@ -15,6 +15,7 @@ import { canAcceptHolds, canEditBatches } from '../../policies.ts';
 import { changeBoard, type Command } from '../board/changeBoard.ts';
 import { one } from '../board/find.ts';
 import { acceptHold, withdrawAcceptance } from './accept.ts';
+import { seenBy, withinChain } from '../guests/seen.ts';
 import { addBatch, editBatch, editLink, removeBatch } from './edit.ts';
 import { setStage } from './stage.ts';
 
@@ -35,7 +36,7 @@ async function answerBatch(
   shelves: 'none' | 'all' = 'none',
 ): Promise<Answer> {
   const board = await changeBoard(asked, member, shelves === 'all' ? 'all' : [], command);
-  const row = one(board.batches, id);
+  const row = one(seenBy(member, board).batches, id);
   return { body: row, version: row.version };
 }
 
@@ -66,8 +67,12 @@ const edit = forMember(
     body: batchPatch,
   },
   canEditBatches,
-  (asked, member) =>
-    answerBatch(asked, member, idOf(asked), editBatch(idOf(asked), asked.version, asked.body)),
+  (asked, member) => {
+    const command = editBatch(idOf(asked), asked.version, asked.body);
+    const within = withinChain(member, idOf(asked), asked.body, command);
+    return answerBatch(asked, member, idOf(asked), within);
+  },
+  'guests-too',
 );
 
 const remove = forMember(
@@ -115,8 +120,12 @@ const changeLink = forMember(
     body: linkPatch,
   },
   canEditBatches,
-  (asked, member) =>
-    answerBatch(asked, member, idOf(asked), editLink(idOf(asked), asked.version, asked.body)),
+  (asked, member) => {
+    const command = editLink(idOf(asked), asked.version, asked.body);
+    const within = withinChain(member, idOf(asked), {}, command);
+    return answerBatch(asked, member, idOf(asked), within);
+  },
+  'guests-too',
 );
 
 const accept = forMember(

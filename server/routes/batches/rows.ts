@@ -3,7 +3,7 @@ import type { Batch, Link } from '#shared/api/batch.ts';
 import { UNSETTLED_LINK } from '#shared/chain/board.ts';
 import type { Tx } from '../../db/client.ts';
 import { batch } from '../../db/schema/chain.ts';
-import type { BoardNow, Hand } from '../board/changeBoard.ts';
+import type { BoardNow, Hand } from '../board/hand.ts';
 
 /** Batches that stand on a shelf (null: the bench), in order. */
 export const matesOn = (board: BoardNow, chainId: string | null): Batch[] =>

@@ -1,9 +1,12 @@
 import type { Batch, StageRequest } from '#shared/api/batch.ts';
 import { indexBoard, UNSETTLED_LINK, type BoardIndex } from '#shared/chain/board.ts';
+import { tellStage } from '#shared/record/stages.ts';
 import { demandVersion } from '../../http/etag.ts';
 import { invalidField, problem } from '../../problems.ts';
-import type { Command, Hand } from '../board/changeBoard.ts';
+import type { Command } from '../board/changeBoard.ts';
+import type { Hand } from '../board/hand.ts';
 import { one } from '../board/find.ts';
+import { sayerOf } from '../board/sayer.ts';
 import { dropCake, setCake } from './cakes.ts';
 import { demandNoBranch } from './edit.ts';
 import { closeUp, endOf, linkColumns, writeBatch } from './rows.ts';
@@ -14,11 +17,11 @@ export const setStage =
   async (hand) => {
     const row = one(hand.board.batches, id);
     demandVersion(version, row.version, row);
-    const what = await carryOut(hand, row, wish);
-    return { what, before: row, after: wish, touches: [id] };
+    await carryOut(hand, row, wish);
+    return { what: tellStage(sayerOf(hand), row.name, wish), touches: [id] };
   };
 
-function carryOut(hand: Hand, row: Batch, wish: StageRequest): Promise<string> {
+function carryOut(hand: Hand, row: Batch, wish: StageRequest): Promise<void> {
   switch (wish.stage) {
     case 'pencilled':
       return pencil(hand, row);
@@ -33,7 +36,7 @@ function carryOut(hand: Hand, row: Batch, wish: StageRequest): Promise<string> {
 
 type Brewed = Extract<StageRequest, { stage: 'fermenting' }>;
 
-async function brew(hand: Hand, row: Batch, wish: Brewed): Promise<string> {
+async function brew(hand: Hand, row: Batch, wish: Brewed): Promise<void> {
   const index = indexBoard(hand.board);
   if (row.chainId === null) throw invalidField('/stage', 'Put it on a shelf first');
   const before = index.predecessor(row.id);
@@ -50,12 +53,11 @@ async function brew(hand: Hand, row: Batch, wish: Brewed): Promise<string> {
   });
   await setCake(hand, row.id, 'growing');
   if (before) await setCake(hand, before.id, 'poured');
-  return `Brewed ${row.name}`;
 }
 
 type Racked = Extract<StageRequest, { stage: 'racked' }>;
 
-async function rack(hand: Hand, row: Batch, wish: Racked): Promise<string> {
+async function rack(hand: Hand, row: Batch, wish: Racked): Promise<void> {
   if (row.stage !== 'fermenting' && row.stage !== 'racked')
     throw invalidField('/stage', 'Say first when it was brewed');
   if (row.brewOn !== null && wish.rackedOn < row.brewOn)
@@ -70,11 +72,10 @@ async function rack(hand: Hand, row: Batch, wish: Racked): Promise<string> {
     readFg: wish.fg,
   });
   if (row.cake?.state === 'growing') await setCake(hand, row.id, 'bare');
-  return `Racked ${row.name}`;
 }
 
 /** Takes a stage back that was set by mistake. */
-async function pencil(hand: Hand, row: Batch): Promise<string> {
+async function pencil(hand: Hand, row: Batch): Promise<void> {
   const index = indexBoard(hand.board);
   demandNothingPoured(index, row);
   const before = index.predecessor(row.id);
@@ -90,11 +91,10 @@ async function pencil(hand: Hand, row: Batch): Promise<string> {
   await dropCake(hand, row.id);
   if (before && !othersOnCake(index, before, row))
     await setCake(hand, before.id, before.stage === 'racked' ? 'bare' : 'growing');
-  return `Put ${row.name} back to pencilled`;
 }
 
-async function scrap(hand: Hand, row: Batch, reason: string): Promise<string> {
-  if (row.stage === 'scrapped') return `Scrapped ${row.name}`;
+async function scrap(hand: Hand, row: Batch, reason: string): Promise<void> {
+  if (row.stage === 'scrapped') return;
   demandNothingPoured(indexBoard(hand.board), row);
   demandNoBranch(hand.board.chains, row);
   await closeUp(hand, row);
@@ -106,7 +106,6 @@ async function scrap(hand: Hand, row: Batch, reason: string): Promise<string> {
     ...linkColumns(UNSETTLED_LINK),
   });
   if (row.cake) await setCake(hand, row.id, 'dumped');
-  return `Scrapped ${row.name}`;
 }
 
 /** Batches that go, or went, on this one's cake. */

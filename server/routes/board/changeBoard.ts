@@ -4,26 +4,18 @@ import type { Tx } from '../../db/client.ts';
 import { inTransaction } from '../../db/inTransaction.ts';
 import { batch } from '../../db/schema/chain.ts';
 import type { Deps } from '../../deps.ts';
-import type { BoardFacts } from '#shared/chain/board.ts';
 import { lapses } from '#shared/chain/lapses.ts';
 import { notFound } from '../../problems.ts';
+import { recordEdit, type Said } from '../../record/recordEdit.ts';
+import { takeSnapshot } from '../../record/snapshot.ts';
 import { dayIn } from '../../today.ts';
-import { loadBoardRows, type BoardRows } from './load.ts';
+import type { BoardNow, Hand } from './hand.ts';
+import { loadBoardRows } from './load.ts';
 import { lockSeason, lockShelves } from './locks.ts';
-import { raiseRevision, writeEntry, type Entry } from './record.ts';
-
-/** What a command has in hand: the transaction, and the board as it stands under the locks. */
-export interface Hand {
-  tx: Tx;
-  member: Member;
-  board: BoardNow;
-  now: Date;
-}
-
-export type BoardNow = BoardRows & Pick<BoardFacts, 'today'>;
+import { raiseRevision } from './record.ts';
 
 /** Null: there was nothing to change. */
-export type Command = (hand: Hand) => Promise<Omit<Entry, 'kind'> | null>;
+export type Command = (hand: Hand) => Promise<Said | null>;
 
 /**
  * Runs an edit of anything on a season's board: under the locks, with the acceptances that it made
@@ -42,13 +34,19 @@ export function changeBoard(
     await lockSeason(tx, member.seasonId);
     const now = deps.clock.now();
     const board = await readBoard(tx, member, now);
-    const entry = await command({ tx, member, board, now });
-    if (!entry) return board;
-    const revision = await raiseRevision(tx, member.seasonId);
-    await writeEntry(tx, member, now, { kind: 'edit', ...entry });
-    const edited = { ...(await readBoard(tx, member, now)) };
-    const after = await withoutLapsed(tx, board, edited);
-    return { ...after, season: { ...after.season, revision } };
+    const where = { breweryId: member.brewery.id, seasonId: member.seasonId };
+    const rows = await takeSnapshot(tx, where);
+    const said = await command({ tx, member, board, now });
+    if (!said) return board;
+    await raiseRevision(tx, member.seasonId);
+    const after = await withoutLapsed(tx, board, await readBoard(tx, member, now));
+    await recordEdit(
+      { tx, member, now },
+      { kind: 'edit', ...said },
+      { board, rows },
+      { board: after, rows: await takeSnapshot(tx, where) },
+    );
+    return after;
   });
 }
 
@@ -58,9 +56,17 @@ export async function readBoard(tx: Tx, member: Member, now: Date): Promise<Boar
   return { ...rows, today: dayIn(member.brewery.timeZone, now) };
 }
 
-/** An acceptance speaks of the link as it was; where that changed it is taken away. */
-async function withoutLapsed(tx: Tx, before: BoardNow, after: BoardNow): Promise<BoardNow> {
-  const lapsed = lapses(before, after);
+/**
+ * An acceptance speaks of the link as it was; where that changed it is taken away.
+ * @param kept batches whose acceptance was just given back, and speaks of the link as it is.
+ */
+export async function withoutLapsed(
+  tx: Tx,
+  before: BoardNow,
+  after: BoardNow,
+  kept: ReadonlySet<string> = new Set(),
+): Promise<BoardNow> {
+  const lapsed = lapses(before, after).filter((id) => !kept.has(id));
   if (lapsed.length === 0) return after;
   await tx
     .update(batch)

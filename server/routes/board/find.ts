@@ -1,5 +1,5 @@
 import { invalidField, notFound } from '../../problems.ts';
-import type { BoardNow } from './changeBoard.ts';
+import type { BoardNow } from './hand.ts';
 
 /** A row of the board by its id; what is not on it does not exist. */
 export function one<T extends { id: string }>(rows: readonly T[], id: string | undefined): T {

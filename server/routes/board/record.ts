@@ -4,6 +4,7 @@ import type { Member } from '../../auth/whoAsks.ts';
 import type { Tx } from '../../db/client.ts';
 import { change, type ChangeKind } from '../../db/schema/change.ts';
 import { season } from '../../db/schema/season.ts';
+import { tell } from '../../live/note.ts';
 
 /** A line of the change record, in the product's words, with what was before and what is now. */
 export interface Entry {
@@ -17,7 +18,12 @@ export interface Entry {
   ofChange?: string;
 }
 
-/** Raises the season's revision. It locks the season, so it comes after the locks of shelves. */
+/**
+ * Raises the season's revision, and tells all processes of each revision once this is committed. It
+ * locks the season, so it comes after the locks of shelves.
+ * @param by how many changes are made at once, each with a revision of its own.
+ * @returns the last of these revisions.
+ */
 export async function raiseRevision(tx: Tx, seasonId: string, by = 1): Promise<number> {
   const [raised] = await tx
     .update(season)
@@ -25,7 +31,13 @@ export async function raiseRevision(tx: Tx, seasonId: string, by = 1): Promise<n
     .where(eq(season.id, seasonId))
     .returning({ revision: season.revision });
   if (!raised) throw new Error('The season went away under its own change');
-  return raised.revision;
+  const { revision } = raised;
+  const revisions = Array.from({ length: by }, (_, at) => revision - by + 1 + at);
+  await tell(
+    tx,
+    ...revisions.map((each) => ({ kind: 'season' as const, seasonId, revision: each })),
+  );
+  return revision;
 }
 
 export async function writeEntry(tx: Tx, member: Member, at: Date, entry: Entry): Promise<void> {

@@ -10,22 +10,29 @@ import { notFound } from '../../problems.ts';
 import { dayIn } from '../../today.ts';
 import { presentBrewery } from '../brewery/present.ts';
 import { newestOwn } from '../moves/newest.ts';
+import { unreadByChain } from '../comments/read.ts';
+import { guestShelves } from '../guests/shelves.ts';
+import { seenBy } from '../guests/seen.ts';
 import { loadBoardRows } from './load.ts';
 
-/** A season's board, whole, in two queries. */
+/** A season's board, whole, in a handful of queries. */
 async function readBoard(db: Db, clock: Clock, member: Member): Promise<Board> {
   const { brewery, seasonId, person, role } = member;
-  const [rows, newest] = await Promise.all([
+  const [rows, newest, unread, guests] = await Promise.all([
     loadBoardRows(db, brewery.id, seasonId),
     newestOwn(db, seasonId, person.id),
+    member.guestOf ? {} : unreadByChain(db, brewery.id, person.id),
+    guestShelves(db, member),
   ]);
   if (!rows) throw notFound();
+  const today = dayIn(brewery.timeZone, clock.now());
   return {
     brewery: presentBrewery(brewery),
-    today: dayIn(brewery.timeZone, clock.now()),
     me: { personId: person.id, role, can: abilitiesOf(member) },
-    ...rows,
+    ...seenBy(member, { ...rows, today }),
     ...newest,
+    unread,
+    guests,
   };
 }
 
@@ -41,5 +48,6 @@ export const boardRoutes = [
     },
     canRead,
     async ({ db, clock }, member) => ({ body: await readBoard(db, clock, member) }),
+    'guests-too',
   ),
 ];

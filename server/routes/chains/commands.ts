@@ -2,14 +2,17 @@ import { and, eq, sql } from 'drizzle-orm';
 import type { Batch } from '#shared/api/batch.ts';
 import type { Chain, ChainCreate, ChainPatch } from '#shared/api/chain.ts';
 import { UNSETTLED_LINK } from '#shared/chain/board.ts';
+import { tellChain } from '#shared/record/sentences.ts';
 import { chain } from '../../db/schema/chain.ts';
 import { demandMade, isRepeated } from '../../http/create.ts';
 import { demandVersion } from '../../http/etag.ts';
 import { problem } from '../../problems.ts';
 import { demandNoBranch } from '../batches/edit.ts';
 import { endOf, linkColumns, matesOn, writeBatch } from '../batches/rows.ts';
-import type { Command, Hand } from '../board/changeBoard.ts';
+import type { Command } from '../board/changeBoard.ts';
+import type { Hand } from '../board/hand.ts';
 import { demandStock, one } from '../board/find.ts';
+import { sayerOf } from '../board/sayer.ts';
 import { startColumns } from './present.ts';
 import { demandStart, lineFor } from './start.ts';
 
@@ -25,7 +28,7 @@ export const addChain =
     )
       return null;
     await insertChain(hand, body);
-    return { what: `Added the shelf ${body.name}`, before: null, after: body, touches: [body.id] };
+    return { what: `Added the shelf ${body.name}`, touches: [body.id] };
   };
 
 export async function insertChain(hand: Hand, body: ChainCreate, at = ''): Promise<void> {
@@ -72,7 +75,7 @@ export const editChain =
     await writeChain(hand, next);
     if (patch.position !== undefined) await reorder(hand, row, patch.position);
     if (patch.start !== undefined) await unsettleFirst(hand, row, next);
-    return { what: `Changed the shelf ${row.name}`, before: row, after: patch, touches: [id] };
+    return { ...tellChain(sayerOf(hand), row, next), touches: [id] };
   };
 
 async function writeChain(hand: Hand, row: Chain): Promise<void> {
@@ -131,12 +134,7 @@ export const removeChain =
     await tx.delete(chain).where(and(eq(chain.seasonId, board.season.id), eq(chain.id, id)));
     await closeRanks(hand, row);
     const touches = [id, ...mates.map((mate) => mate.id)];
-    return {
-      what: `Deleted the shelf ${row.name}`,
-      before: { ...row, mates },
-      after: null,
-      touches,
-    };
+    return { what: `Deleted the shelf ${row.name}`, touches };
   };
 
 function demandOnlyPencilled({ board }: Hand, mates: readonly Batch[]): void {

@@ -18,9 +18,10 @@ export function presentChain(row: ChainRow): Chain {
 
 function presentStart(row: ChainRow): ChainStart {
   const { startKind, startBatchId, startGeneration, startPrice } = row;
+  const { startAllergens: allergens, startCultures: cultures } = row;
   if (startKind === 'cake' && startBatchId !== null) return { kind: 'cake', batchId: startBatchId };
   if (startKind === 'outside' && startGeneration !== null)
-    return { kind: 'outside', generation: startGeneration, price: startPrice };
+    return { kind: 'outside', generation: startGeneration, price: startPrice, allergens, cultures };
   return { kind: 'pack', price: startPrice };
 }
 
@@ -30,6 +31,8 @@ export function startColumns(start: ChainStart) {
     startKind: start.kind,
     startBatchId: start.kind === 'cake' ? start.batchId : null,
     startGeneration: start.kind === 'outside' ? start.generation : null,
+    startAllergens: start.kind === 'outside' ? start.allergens : null,
+    startCultures: start.kind === 'outside' ? start.cultures : null,
     startPrice: start.kind === 'cake' ? null : start.price,
   };
 }

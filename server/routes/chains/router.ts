@@ -1,11 +1,12 @@
-import { chain, chainCreate, chainPatch } from '#shared/api/chain.ts';
+import { chain, chainCreate, chainPatch, datesPulled } from '#shared/api/chain.ts';
 import { api } from '#shared/api/urls.ts';
 import { pathOf } from '../../http/pathOf.ts';
 import { forMember } from '../../http/route.ts';
-import { canEditChains } from '../../policies.ts';
+import { canEditBatches, canEditChains } from '../../policies.ts';
 import { changeBoard } from '../board/changeBoard.ts';
 import { one } from '../board/find.ts';
 import { addChain, editChain, removeChain } from './commands.ts';
+import { pullDates } from './pull.ts';
 
 const all = pathOf(api.chains(':brewery'));
 const single = pathOf(api.chain(':brewery', ':id'));
@@ -68,4 +69,21 @@ const remove = forMember(
   },
 );
 
-export const chainRoutes = [add, edit, remove];
+const pull = forMember(
+  {
+    name: 'pullDates',
+    method: 'post',
+    path: pathOf(api.pullDates(':brewery', ':id')),
+    summary: 'Brew every pencilled batch of a chain on the day the yeast before it is taken',
+    answer: datesPulled,
+    status: 200,
+  },
+  canEditBatches,
+  async (asked, member) => {
+    const { id = '' } = asked.params;
+    const board = await changeBoard(asked, member, 'all', pullDates(id));
+    return { body: { revision: board.season.revision } };
+  },
+);
+
+export const chainRoutes = [add, edit, remove, pull];

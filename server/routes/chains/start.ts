@@ -1,7 +1,7 @@
 import type { Chain, ChainStart } from '#shared/api/chain.ts';
 import { yeastLine } from '../../db/schema/stock.ts';
 import { invalidField } from '../../problems.ts';
-import type { BoardNow, Hand } from '../board/changeBoard.ts';
+import type { BoardNow, Hand } from '../board/hand.ts';
 
 /** What of a chain says where its yeast comes from. */
 type Started = Pick<Chain, 'id' | 'yeastId' | 'start'>;

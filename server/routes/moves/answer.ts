@@ -1,7 +1,8 @@
 import type { Moved } from '#shared/api/move.ts';
 import type { change } from '../../db/schema/change.ts';
 import { problem } from '../../problems.ts';
-import type { Hand } from '../board/changeBoard.ts';
+import type { EditSide } from '../../record/difference.ts';
+import type { Hand } from '../board/hand.ts';
 import { newestOwn } from './newest.ts';
 import type { Side } from './standing.ts';
 
@@ -30,6 +31,7 @@ export async function answerAgain(hand: Hand, made: typeof change.$inferSelect):
   const { member, board } = hand;
   if (made.seasonId !== member.seasonId || made.personId !== member.person.id)
     throw problem('already-exists', { detail: 'This id is in use: make a new one' });
+  if (isEdit(made.after)) return answerEditAgain(hand, made);
   const [before, after] = [made.before as Side, made.after as Side];
   const { chain } = after;
   return answerMove(hand, {
@@ -41,6 +43,24 @@ export async function answerAgain(hand: Hand, made: typeof change.$inferSelect):
     removedChainIds: before.chain ? [before.chain.id] : [],
     shifted: shiftedBetween(before, after),
     cleared: clearedBetween(before, after),
+  });
+}
+
+const isEdit = (after: unknown): boolean =>
+  typeof after === 'object' && after !== null && 'rows' in after;
+
+function answerEditAgain(hand: Hand, made: typeof change.$inferSelect): Promise<Moved> {
+  const { board } = hand;
+  const touched = ({ id }: { id: string }) => made.touches.includes(id);
+  const left = new Set(board.chains.map(({ id }) => id));
+  const chains = Object.keys((made.before as EditSide).rows.chain ?? {});
+  return answerMove(hand, {
+    changeId: made.ofChange ?? made.id,
+    what: made.what,
+    revision: board.season.revision,
+    batches: board.batches.filter(touched),
+    chains: board.chains.filter(touched),
+    removedChainIds: chains.filter((id) => !left.has(id)),
   });
 }
 

@@ -1,15 +1,18 @@
 import type { Batch } from '#shared/api/batch.ts';
 import type { Moved, MoveRequest } from '#shared/api/move.ts';
-import { moveBatch, withRows, type MoveRefusal, type MoveResult } from '#shared/chain/move.ts';
+import { linkChange } from '#shared/chain/linkChanges.ts';
+import { moveBatch, withRows, type MoveResult } from '#shared/chain/move.ts';
 import type { Member } from '../../auth/whoAsks.ts';
 import type { change } from '../../db/schema/change.ts';
-import { notFound, problem } from '../../problems.ts';
-import type { Hand } from '../board/changeBoard.ts';
-import { raiseRevision, writeEntries, type Entry } from '../board/record.ts';
+import { ProblemError } from '../../problems.ts';
+import type { Hand } from '../board/hand.ts';
+import { raiseRevision, writeEntries } from '../board/record.ts';
 import { insertChain } from '../chains/commands.ts';
+import { moveAsGuest } from '../guests/move.ts';
 import { answerAgain, answerMove } from './answer.ts';
 import type { Outcome } from './lane.ts';
-import { sidesOf } from './standing.ts';
+import { refused, type MadeMove } from './refused.ts';
+import { sidesOf, touchesOf } from './standing.ts';
 import { storeRows, withNewVersions } from './store.ts';
 
 type Granted = Extract<MoveResult, { ok: true }>;
@@ -25,7 +28,7 @@ export class MoveGroup {
   readonly #hand: Omit<Hand, 'member'>;
   readonly #madeBefore: readonly Change[];
   readonly #outcomes: Outcome<Moved>[] = [];
-  readonly #entries: { member: Member; entry: Entry }[] = [];
+  readonly #entries: MadeMove[] = [];
   /** Rows as the moves so far leave them, with their new versions. */
   readonly #rows = new Map<string, Batch>();
   /** The board after the moves so far. */
@@ -37,12 +40,13 @@ export class MoveGroup {
     this.#madeBefore = madeBefore;
   }
 
+  /** A refusal is one wish's own; anything else that is thrown undoes the whole group. */
   async add(asked: Asked): Promise<void> {
     try {
       this.#outcomes.push({ answer: await this.#make(asked) });
-    } catch (refusal) {
-      if (!(refusal instanceof Refused)) throw refusal;
-      this.#outcomes.push({ refusal: refusal.problem });
+    } catch (error) {
+      if (!(error instanceof ProblemError)) throw error;
+      this.#outcomes.push({ refusal: error });
     }
   }
 
@@ -60,17 +64,26 @@ export class MoveGroup {
     const board = this.#board;
     const hand = { ...this.#hand, board, member };
     const again = this.#madeBefore.find(({ id }) => id === request.id);
-    if (again) return answerAgain(hand, again).catch(refuse);
-    const result = moveBatch(board, request);
-    if (!result.ok) throw new Refused(refused(hand, request, result));
+    if (again) return answerAgain(hand, again);
+    const result = member.guestOf
+      ? moveAsGuest(hand, member.guestOf, request)
+      : moveBatch(board, request);
+    if (!result.ok) throw await refused(hand, request, result, this.#entries);
     const { what } = result;
     if (result.batches.length === 0) {
       const { revision } = board.season;
-      return answerMove(hand, { changeId: request.id, what, revision });
+      const own = this.#newestOf(member);
+      return answerMove(hand, { changeId: request.id, what, revision, ...(own && { own }) });
     }
     if (request.newChain && result.chains.length > 0)
       await insertChain(hand, request.newChain, '/newChain');
     return answerMove(hand, this.#take({ member, request }, result));
+  }
+
+  /** What somebody can undo next, where they made a move of this group. */
+  #newestOf({ person }: Member): Pick<Moved, 'undo' | 'redo'> | undefined {
+    const made = this.#entries.findLast(({ member }) => member.person.id === person.id)?.entry;
+    return made && { undo: { id: made.id, what: made.what }, redo: null };
   }
 
   /** Takes a granted move into the board and the record. */
@@ -83,35 +96,18 @@ export class MoveGroup {
     const after = { ...before, ...withRows(before, batches, chains) };
     this.#board = { ...after, season: { ...before.season, revision } };
     const sides = sidesOf(before, after, request.batchId);
-    const touches = sides.after.batches.map(({ id }) => id);
     this.#entries.push({
       member,
-      entry: { id: request.id, kind: 'move', what, ...sides, touches },
+      entry: {
+        id: request.id,
+        kind: 'move',
+        what,
+        before: sides.before,
+        after: { ...sides.after, links: [linkChange(before, after, request.batchId)] },
+        touches: touchesOf(sides),
+      },
     });
     const own = { undo: { id: request.id, what }, redo: null };
     return { changeId: request.id, what, revision, batches, chains, shifted, cleared, own };
   }
-}
-
-/** Says no to one wish; anything else that is thrown undoes the whole group. */
-class Refused extends Error {
-  readonly problem: unknown;
-  constructor(why: unknown) {
-    super('Refused');
-    this.problem = why;
-  }
-}
-
-function refuse(why: unknown): never {
-  throw new Refused(why);
-}
-
-function refused(
-  { board }: Pick<Hand, 'board'>,
-  wish: MoveRequest,
-  { why, detail }: { why: MoveRefusal; detail: string },
-) {
-  const current = board.batches.find(({ id }) => id === wish.batchId);
-  if (!current) return notFound();
-  return problem(why === 'moved-elsewhere' ? why : 'place-taken', { detail, current });
 }

@@ -6,11 +6,11 @@ interface ChangeRef {
   what: string;
 }
 
-/** How far back one may undo, in own moves. */
+/** How far back one may undo, in own changes. */
 const REACH = 200;
 
 /**
- * The newest of somebody's own moves that stands (to be undone), and the one that was undone last
+ * The newest of somebody's own moves and edits that stands (to be undone), and the one that was undone last
  * (to be redone). A new change of one's own ends the redoing.
  */
 export async function newestOwn(
@@ -25,7 +25,8 @@ export async function newestOwn(
       left join lateral (
         select u.kind, u.seq from change u where u.of_change = c.id order by u.seq desc limit 1
       ) last on true
-      where c.season_id = ${seasonId} and c.person_id = ${personId} and c.kind = 'move'
+      where c.season_id = ${seasonId} and c.person_id = ${personId}
+        and (c.kind = 'move' or (c.kind = 'edit' and c.after ? 'rows'))
       order by c.seq desc limit ${REACH}
     ), newest as (
       select max(seq) as seq from change

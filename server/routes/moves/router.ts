@@ -3,6 +3,7 @@ import { api } from '#shared/api/urls.ts';
 import { pathOf } from '../../http/pathOf.ts';
 import { forMember } from '../../http/route.ts';
 import { canMoveBatches } from '../../policies.ts';
+import { seenMoved } from '../guests/seen.ts';
 import { move } from './move.ts';
 import { takeBack } from './undo.ts';
 
@@ -18,7 +19,8 @@ const makeMove = forMember(
     problems: ['moved-elsewhere', 'place-taken', 'already-exists'],
   },
   canMoveBatches,
-  async (asked, member) => ({ body: await move(asked, member, asked.body) }),
+  async (asked, member) => ({ body: seenMoved(member, await move(asked, member, asked.body)) }),
+  'guests-too',
 );
 
 const undo = forMember(
@@ -33,7 +35,10 @@ const undo = forMember(
     problems: ['not-undoable'],
   },
   canMoveBatches,
-  async (asked, member) => ({ body: await takeBack(asked, member, 'undo', asked.body.changeId) }),
+  async (asked, member) => ({
+    body: seenMoved(member, await takeBack(asked, member, 'undo', asked.body.changeId)),
+  }),
+  'guests-too',
 );
 
 const redo = forMember(
@@ -48,7 +53,10 @@ const redo = forMember(
     problems: ['not-undoable'],
   },
   canMoveBatches,
-  async (asked, member) => ({ body: await takeBack(asked, member, 'redo', asked.body.changeId) }),
+  async (asked, member) => ({
+    body: seenMoved(member, await takeBack(asked, member, 'redo', asked.body.changeId)),
+  }),
+  'guests-too',
 );
 
 export const moveRoutes = [makeMove, undo, redo];

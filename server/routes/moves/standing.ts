@@ -51,6 +51,13 @@ function touchedShelves(before: BoardFacts, after: BoardFacts): Set<string | nul
   return new Set(changed.flatMap((row) => [row.chainId, known.get(row.id)?.chainId ?? null]));
 }
 
+/** Rows that a move is about: its batches, the moved one first, and the shelves that it went from and to. */
+export function touchesOf({ before, after }: Sides): string[] {
+  const moved = [before.batches[0]?.chainId, after.batches[0]?.chainId];
+  const shelves = moved.filter((id): id is string => typeof id === 'string');
+  return [...new Set([...after.batches.map(({ id }) => id), ...shelves])];
+}
+
 function sideOf(
   board: BoardFacts,
   standings: ReadonlyMap<string, Standing>,

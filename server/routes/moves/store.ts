@@ -4,7 +4,7 @@ import type { Batch } from '#shared/api/batch.ts';
 import type { BoardFacts } from '#shared/chain/board.ts';
 import { chain } from '../../db/schema/chain.ts';
 import { RowsMoved } from '../../db/inTransaction.ts';
-import type { Hand } from '../board/changeBoard.ts';
+import type { Hand } from '../board/hand.ts';
 
 /** Rows with the versions that storing them gives: a new one where a date or the link changed. */
 export function withNewVersions(board: Pick<BoardFacts, 'batches'>, rows: readonly Batch[]) {

@@ -1,26 +1,27 @@
-import { and, desc, eq, gt, sql } from 'drizzle-orm';
+import { and, desc, eq } from 'drizzle-orm';
 import type { Moved } from '#shared/api/move.ts';
+import { linkChange } from '#shared/chain/linkChanges.ts';
 import { withRows } from '#shared/chain/move.ts';
 import type { Member } from '../../auth/whoAsks.ts';
 import { inTransaction } from '../../db/inTransaction.ts';
 import { change } from '../../db/schema/change.ts';
-import { person } from '../../db/schema/people.ts';
 import type { Deps } from '../../deps.ts';
 import { problem } from '../../problems.ts';
-import { readBoard, type Hand } from '../board/changeBoard.ts';
+import { readBoard } from '../board/changeBoard.ts';
+import type { Hand } from '../board/hand.ts';
 import { lockSeason, lockShelves } from '../board/locks.ts';
 import { raiseRevision, writeEntry } from '../board/record.ts';
 import { insertChainRow } from '../chains/commands.ts';
+import { demandOwnTouches } from '../guests/move.ts';
 import { answerAgain, answerMove, shiftedBetween } from './answer.ts';
+import { takeEditBack } from './undoEdit.ts';
 import { newestOwn } from './newest.ts';
+import { notUndoable, type ChangeRow, type Way } from './notUndoable.ts';
 import { revert, type Reverted } from './revert.ts';
-import { sidesOf, type Side } from './standing.ts';
+import { sidesOf, touchesOf, type Side } from './standing.ts';
 import { dropChain, storeRows, withNewVersions } from './store.ts';
 
-type Way = 'undo' | 'redo';
-type ChangeRow = typeof change.$inferSelect;
-
-/** Takes one's newest move back, or does the one again that was taken back last. */
+/** Takes one's newest change back, or does the one again that was taken back last. */
 export function takeBack(
   deps: Pick<Deps, 'db' | 'clock'>,
   member: Member,
@@ -61,10 +62,13 @@ async function doneAlready({ tx, member }: Hand, way: Way, changeId: string) {
 }
 
 async function carryOut(hand: Hand, way: Way, row: ChangeRow): Promise<Moved> {
+  const { guestOf } = hand.member;
+  if (guestOf) demandOwnTouches(guestOf, hand.board, row.touches);
+  if (row.kind === 'edit') return takeEditBack(hand, way, row);
   const [before, after] = [row.before as Side, row.after as Side];
   const [from, to] = way === 'undo' ? [after, before] : [before, after];
   const result = revert(hand.board, from, to);
-  if (!result.ok) throw await refusal(hand, row, result);
+  if (!result.ok) throw await notUndoable(hand, row, result);
   return store(hand, way, row, result);
 }
 
@@ -88,8 +92,9 @@ async function store(hand: Hand, way: Way, row: ChangeRow, result: Granted): Pro
   await writeEntry(tx, member, now, {
     kind: way,
     what,
-    ...sides,
-    touches: sides.after.batches.map(({ id }) => id),
+    before: sides.before,
+    after: { ...sides.after, links: [linkChange(board, after, row.touches[0] ?? '')] },
+    touches: touchesOf(sides),
     ofChange: row.id,
   });
   return answerMove(hand, {
@@ -101,28 +106,4 @@ async function store(hand: Hand, way: Way, row: ChangeRow, result: Granted): Pro
     removedChainIds: removedChainId === null ? [] : [removedChainId],
     shifted: shiftedBetween(sides.before, sides.after),
   });
-}
-
-/** Names who changed the same thing since, and what they did. */
-async function refusal(
-  { tx, board }: Hand,
-  row: ChangeRow,
-  { detail, touched }: Extract<Reverted, { ok: false }>,
-) {
-  const [since] = await tx
-    .select({ who: person.name, what: change.what })
-    .from(change)
-    .innerJoin(person, eq(person.id, change.personId))
-    .where(
-      and(
-        eq(change.seasonId, board.season.id),
-        gt(change.seq, row.seq),
-        sql`${touched}::uuid = any(${change.touches})`,
-      ),
-    )
-    .orderBy(desc(change.seq))
-    .limit(1);
-  const current = board.batches.find(({ id }) => id === touched);
-  const said = since ? `${detail}. ${since.who}: ${since.what}` : detail;
-  return problem('not-undoable', { detail: said, current });
 }

@@ -1,6 +1,7 @@
 import { eq, sql } from 'drizzle-orm';
 import { season as contract, seasonPatch, type SeasonPatch } from '#shared/api/brewery.ts';
 import { api } from '#shared/api/urls.ts';
+import { tellSeason } from '#shared/record/sentences.ts';
 import { blockedDay, season } from '../../db/schema/season.ts';
 import { demandVersion } from '../../http/etag.ts';
 import { pathOf } from '../../http/pathOf.ts';
@@ -28,8 +29,8 @@ const editSeason =
       const days = [...new Set(blockedDays)].map((day) => ({ seasonId: id, day }));
       if (days.length > 0) await tx.insert(blockedDay).values(days);
     }
-    const after = { ...patch, blockedDays };
-    return { what: 'Changed the season', before: row, after, touches: [id] };
+    const after = { ...row, ...patch, blockedDays: blockedDays?.toSorted() ?? row.blockedDays };
+    return { ...tellSeason(row, after), touches: [id] };
   };
 
 export const seasonRoutes = [

@@ -1,12 +1,15 @@
 import { and, eq, sql } from 'drizzle-orm';
 import { vesselCreate, type VesselCreate, type VesselPatch } from '#shared/api/vessel.ts';
+import { tellVessel } from '#shared/record/sentences.ts';
 import { vessel } from '../../db/schema/stock.ts';
 import { demandMade, isRepeated } from '../../http/create.ts';
 import { demandVersion } from '../../http/etag.ts';
 import { merged } from '../../http/patch.ts';
 import { problem } from '../../problems.ts';
-import type { Command, Hand } from '../board/changeBoard.ts';
+import type { Command } from '../board/changeBoard.ts';
+import type { Hand } from '../board/hand.ts';
 import { one } from '../board/find.ts';
+import { sayerOf } from '../board/sayer.ts';
 
 export const addVessel =
   (body: VesselCreate): Command =>
@@ -22,12 +25,13 @@ export const addVessel =
     demandMade(
       await tx.insert(vessel).values(values).onConflictDoNothing().returning({ id: vessel.id }),
     );
-    return { what: `Added ${body.name}`, before: null, after: body, touches: [body.id] };
+    return { what: `Added the vessel ${body.name}`, touches: [body.id] };
   };
 
 export const editVessel =
   (id: string, version: number, patch: VesselPatch): Command =>
-  async ({ tx, board, member }) => {
+  async (hand) => {
+    const { tx, board, member } = hand;
     const row = one(board.vessels, id);
     demandVersion(version, row.version, row);
     const { id: _, ...fields } = merged(vesselCreate, Object.keys(vesselCreate.shape), row, patch);
@@ -35,7 +39,7 @@ export const editVessel =
       .update(vessel)
       .set({ ...fields, version: sql`${vessel.version} + 1` })
       .where(and(eq(vessel.breweryId, member.brewery.id), eq(vessel.id, id)));
-    return { what: `Changed ${row.name}`, before: row, after: patch, touches: [id] };
+    return { ...tellVessel(sayerOf(hand), row, fields), touches: [id] };
   };
 
 export const removeVessel =
@@ -49,7 +53,7 @@ export const removeVessel =
     await hand.tx
       .delete(vessel)
       .where(and(eq(vessel.breweryId, hand.member.brewery.id), eq(vessel.id, id)));
-    return { what: `Deleted ${row.name}`, before: row, after: null, touches: [id] };
+    return { what: `Deleted the vessel ${row.name}`, touches: [id] };
   };
 
 /** Names of the shelves and batches that would be left without it. */

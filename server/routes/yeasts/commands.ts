@@ -1,12 +1,15 @@
 import { and, eq, sql } from 'drizzle-orm';
 import { yeastCreate, type YeastCreate, type YeastPatch } from '#shared/api/yeast.ts';
+import { tellYeast } from '#shared/record/sentences.ts';
 import { yeast, yeastLine } from '../../db/schema/stock.ts';
 import { demandMade, isRepeated } from '../../http/create.ts';
 import { demandVersion } from '../../http/etag.ts';
 import { merged } from '../../http/patch.ts';
 import { problem } from '../../problems.ts';
-import type { Command, Hand } from '../board/changeBoard.ts';
+import type { Command } from '../board/changeBoard.ts';
+import type { Hand } from '../board/hand.ts';
 import { one } from '../board/find.ts';
+import { sayerOf } from '../board/sayer.ts';
 
 export const addYeast =
   (body: YeastCreate): Command =>
@@ -22,12 +25,13 @@ export const addYeast =
     demandMade(
       await tx.insert(yeast).values(values).onConflictDoNothing().returning({ id: yeast.id }),
     );
-    return { what: `Added ${body.name}`, before: null, after: body, touches: [body.id] };
+    return { what: `Added the yeast ${body.name}`, touches: [body.id] };
   };
 
 export const editYeast =
   (id: string, version: number, patch: YeastPatch): Command =>
-  async ({ tx, board, member }) => {
+  async (hand) => {
+    const { tx, board, member } = hand;
     const row = one(board.yeasts, id);
     demandVersion(version, row.version, row);
     const { id: _, ...fields } = merged(yeastCreate, Object.keys(yeastCreate.shape), row, patch);
@@ -35,7 +39,7 @@ export const editYeast =
       .update(yeast)
       .set({ ...fields, version: sql`${yeast.version} + 1` })
       .where(and(eq(yeast.breweryId, member.brewery.id), eq(yeast.id, id)));
-    return { what: `Changed ${row.name}`, before: row, after: patch, touches: [id] };
+    return { ...tellYeast(sayerOf(hand), row, fields), touches: [id] };
   };
 
 export const removeYeast =
@@ -51,7 +55,7 @@ export const removeYeast =
     await hand.tx
       .delete(yeast)
       .where(and(eq(yeast.breweryId, hand.member.brewery.id), eq(yeast.id, id)));
-    return { what: `Deleted ${row.name}`, before: row, after: null, touches: [id] };
+    return { what: `Deleted the yeast ${row.name}`, touches: [id] };
   };
 
 /** Names of the shelves and batches that would be left without it. */

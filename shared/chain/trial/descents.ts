@@ -1,10 +1,13 @@
 import type { Chain } from '../../api/chain.ts';
 import type { BatchFacts, Inheritance } from '../../rules/facts.ts';
-import { UNKNOWN_INHERITED } from '../descent.ts';
+import { remembered } from '../boardLink.ts';
+import { broughtAlong, UNKNOWN_INHERITED } from '../descent.ts';
 import { inherit, NOTHING_INHERITED } from '../inherit.ts';
 import { Inheritances } from '../inheritances.ts';
 import { at, column, NONE } from './numbers.ts';
 import type { Trial } from './trial.ts';
+
+type Outside = Extract<Chain['start'], { kind: 'outside' }>;
 
 /** The descent of each batch of a trial: as `descents` says it of a layout, in numbers. */
 export class Descents {
@@ -17,6 +20,10 @@ export class Descents {
   readonly #inheritances = new Inheritances();
   readonly #nothing = this.#inheritances.number(NOTHING_INHERITED);
   readonly #unknown = this.#inheritances.number(UNKNOWN_INHERITED);
+  /** Number of what slurry from outside hands down. */
+  readonly #brought = remembered((start: Outside) =>
+    this.#inheritances.number(broughtAlong(start)),
+  );
   readonly #base: { generation: Int32Array; inherited: Int32Array };
   /** The run of `trace` that a batch was last asked for in, and last answered in. */
   readonly #asked: Int32Array;
@@ -79,7 +86,8 @@ export class Descents {
       at(this.#trial.now.shelf, batch),
     )?.start;
     if (start?.kind === 'pack') this.#set(batch, 1, this.#nothing);
-    else if (start?.kind === 'outside') this.#set(batch, start.generation ?? NONE, this.#nothing);
+    else if (start?.kind === 'outside')
+      this.#set(batch, start.generation ?? NONE, this.#brought(start));
     else this.#set(batch, NONE, start ? this.#unknown : this.#nothing);
   }
 

@@ -6,9 +6,10 @@ import type { LinkTimes } from '../../rules/linkTimes.ts';
 import { PAIR_RULES } from '../../rules/list.ts';
 import { dayOf } from '../../units/day.ts';
 import { UNSETTLED_LINK } from '../board.ts';
-import { linkBetween, type LinkSight, type Sight } from '../boardLink.ts';
+import { unsharedLink, type LinkSight, type Sight } from '../boardLink.ts';
 import { NOTHING_INHERITED } from '../inherit.ts';
 import { at, NONE } from './numbers.ts';
+import { sharedIn, startsChains, wishOf, type CakeWish } from './parts.ts';
 import type { Trial } from './trial.ts';
 
 /** Two beers that stand together, judged by the rules that read nothing else. */
@@ -22,6 +23,10 @@ export interface Pair {
   readonly blendedSrm: number | undefined;
   /** ΔE00 once it was asked for; null: not known. */
   shift: number | null | undefined;
+  /** What the later beer asks of the cake, once another takes of it too. */
+  wish: CakeWish | undefined;
+  /** The same two beers where others get of the cake, by what these get. */
+  sharing: Map<string, Pair> | undefined;
 }
 
 /** How two batches meet. What else is read of a link belongs to the batches themselves. */
@@ -36,7 +41,8 @@ interface Meeting {
 /**
  * Judges pairs, each once: two batches that meet again on the same shelves with the same days
  * between them get the same answer, wherever in the calendar they stand. The link facts of a pair
- * need no look: they go exactly when it is not the one that stands on the board.
+ * need no look: they go exactly when it is not the one that stands on the board. Where a cake
+ * goes under several worts each gets its own part, so their pairs are also told apart by that.
  */
 export class Pairs {
   readonly #trial: Trial;
@@ -56,6 +62,22 @@ export class Pairs {
 
   /** Null where the yeast is not on the board. */
   judge(cake: number, batch: number): Pair | null {
+    const alone = this.#alone(cake, batch);
+    if (!alone || !startsChains(this.#trial, cake)) return alone;
+    const others = sharedIn(this.#trial, cake, batch, (taker) => this.#wish(cake, taker));
+    if (others.length === 0) return alone;
+    const parts = others.map(({ name, litres }) => `${name} ${litres}`).join();
+    const sharing = (alone.sharing ??= new Map<string, Pair>());
+    const known = sharing.get(parts);
+    if (known) return known;
+    const { meeting, input } = alone;
+    const pair = judged(meeting, { ...input, pour: { ...input.pour, sharedWith: others } });
+    sharing.set(parts, pair);
+    return pair;
+  }
+
+  /** As if nobody else got of the cake. */
+  #alone(cake: number, batch: number): Pair | null {
     const known = ((this.#known[cake] ??= [])[batch] ??= []);
     for (const pair of known) if (isStill(pair, this.#trial, cake, batch)) return pair;
     const pair = this.#judged(cake, batch, meetingOf(this.#trial, cake, batch));
@@ -65,12 +87,13 @@ export class Pairs {
 
   #judged(cake: number, batch: number, meeting: Meeting): Pair | null {
     const [earlier, later] = this.#rowsOf(cake, batch, meeting);
-    const input = earlier && later ? linkBetween(earlier, later, this.#sight) : null;
-    if (!input) return null;
-    const link = new LinkState(input);
-    const { times, blend } = link;
-    const counts = countRules(PAIR_RULES, link);
-    return { meeting, counts, input, times, blendedSrm: blend.srm, shift: undefined };
+    const input = earlier && later ? unsharedLink(earlier, later, this.#sight) : null;
+    return input && judged(meeting, input);
+  }
+
+  #wish(cake: number, batch: number): CakeWish | null {
+    const pair = this.#alone(cake, batch);
+    return pair && (pair.wish ??= wishOf(pair.input));
   }
 
   /** The two rows, shifted so that the earlier has its day on the board if it has one there. */
@@ -99,6 +122,20 @@ export class Pairs {
     if (shelf === NONE) return null;
     return this.#trial.chain(shelf)?.id ?? roster.batches[batch]?.chainId ?? null;
   }
+}
+
+function judged(meeting: Meeting, input: LinkInput): Pair {
+  const link = new LinkState(input);
+  return {
+    meeting,
+    counts: countRules(PAIR_RULES, link),
+    input,
+    times: link.times,
+    blendedSrm: link.blend.srm,
+    shift: undefined,
+    wish: undefined,
+    sharing: undefined,
+  };
 }
 
 /** Nothing of descent and vessel days is seen; of a batch's facts a trial changes only its day. */
@@ -132,7 +169,7 @@ function meetingOf({ now }: Trial, cake: number, batch: number): Meeting {
   };
 }
 
-/** True where two batches meet in a trial as they did before. */
+/** True where two batches meet in a trial as they did before, whoever else gets of the cake. */
 export function isStill({ meeting }: Pair, { now }: Trial, cake: number, batch: number): boolean {
   const from = at(now.brewDay, cake);
   return (

@@ -1,9 +1,11 @@
-import type { ReactNode } from 'react';
-import { useForm, type DefaultValues, type FieldValues } from 'react-hook-form';
+import { useEffect, type ReactNode } from 'react';
+import { useForm, type DefaultValues, type FieldValues, type UseFormReturn } from 'react-hook-form';
 import type { z } from 'zod';
+import { ChangedElsewhere, DeletedElsewhere } from './ChangedElsewhere.tsx';
 import { ConflictPanel } from './ConflictPanel.tsx';
 import { contractResolver } from './contractResolver.ts';
 import { Form } from './Form.tsx';
+import { changesFrom } from './rowEdit.ts';
 import { useRowEdit } from './useRowEdit.ts';
 
 interface Row {
@@ -34,6 +36,10 @@ export interface RowFormProps<R extends Row, C extends FieldValues & { id: strin
   onDone: (id: string) => void;
   onCancel?: () => void;
   action: string;
+  /** A form that stays on its page shows what others save for as long as nothing is written in it. */
+  follows?: boolean;
+  /** Somebody deleted the row while it was open. */
+  isGone?: boolean;
   aside?: ReactNode;
   children: ReactNode;
 }
@@ -89,6 +95,7 @@ function EditRow<R extends Row, C extends FieldValues & { id: string }>(
     save: (version, patch) => props.patch({ id: row.id, version, patch }),
     onDone: () => props.onDone(row.id),
   });
+  useFollowRow(props, form, edit);
   if (edit.conflict)
     return (
       <ConflictPanel<Facts>
@@ -107,9 +114,42 @@ function EditRow<R extends Row, C extends FieldValues & { id: string }>(
       {...(props.onCancel && { onCancel: props.onCancel })}
       onSubmit={({ id: _id, ...facts }) => edit.submit(facts)}
     >
+      {props.isGone ? (
+        <DeletedElsewhere row={row} />
+      ) : (
+        <ChangedElsewhere row={row} labels={changedLabels(props, form, edit.base)} />
+      )}
       {props.children}
     </Form>
   );
+}
+
+/** As long as nothing is written, the fields show the row as it is. */
+function useFollowRow<R extends Row, C extends FieldValues & { id: string }>(
+  { row, follows = false, values }: RowFormProps<R, C> & { row: R },
+  { formState, reset }: UseFormReturn<FieldValues, unknown, C>,
+  { base, rebase }: { base: R; rebase: (row: R) => void },
+) {
+  const { isDirty } = formState;
+  const isBehind = follows && !isDirty && row.version !== base.version;
+  useEffect(() => {
+    if (!isBehind) return;
+    rebase(row);
+    reset(values as DefaultValues<FieldValues>);
+  }, [isBehind, rebase, reset, row, values]);
+}
+
+/** Names of the form's fields that are no longer as they were when it was opened. */
+function changedLabels<R extends Row, C extends FieldValues & { id: string }>(
+  { row, labelOf }: RowFormProps<R, C> & { row: R },
+  form: UseFormReturn<FieldValues, unknown, C>,
+  base: R,
+): string[] {
+  if (row.version === base.version) return [];
+  const [was, is] = [base, row].map((one) => factsLike<object>(form.getValues(), one));
+  return Object.keys(changesFrom(was ?? {}, is ?? {}))
+    .filter((key) => key !== 'typed')
+    .map(labelOf);
 }
 
 /** The part of a row that the form edits. */

@@ -1,7 +1,7 @@
 import { minorDigits } from '#shared/units/money.ts';
 
 /** Numbers of a form that have no choice of unit. Money is named by its digits after the point. */
-export type PlainKind = 'days' | 'count' | 'percent' | 'money0' | 'money2' | 'money3';
+export type PlainKind = 'days' | 'count' | 'number' | 'percent' | 'money0' | 'money2' | 'money3';
 
 interface Plain {
   unit: string;
@@ -24,6 +24,13 @@ const money = (digits: number, example: string): Plain => ({
 const PLAIN: Record<PlainKind, Plain> = {
   days: { unit: 'days', factor: 1, digits: null, whole: true, why: 'Write whole days, such as 14' },
   count: { unit: '', factor: 1, digits: null, whole: true, why: 'Write a whole number, such as 5' },
+  number: {
+    unit: '',
+    factor: 1,
+    digits: null,
+    whole: false,
+    why: 'Write a number, such as 1.5',
+  },
   percent: {
     unit: '%',
     factor: 0.01,

@@ -29,7 +29,7 @@ export interface Conflict<Facts> {
  * two touched are joined; where both touched one, the person chooses and it is saved again.
  */
 export function useRowEdit<Row extends Versioned, Facts extends object>(edit: RowEdit<Row, Facts>) {
-  const [base] = useState(edit.row);
+  const [base, rebase] = useState(edit.row);
   const [conflict, setConflict] = useState<Conflict<Facts> | null>(null);
 
   const attempt = async (version: number, patch: Partial<Facts>, seen: Facts) => {
@@ -51,6 +51,10 @@ export function useRowEdit<Row extends Versioned, Facts extends object>(edit: Ro
   };
 
   return {
+    /** The row as it was when the form was opened, or followed last. */
+    base,
+    /** Starts from another row; what the fields show must be set to it as well. */
+    rebase,
     conflict,
     backToForm: () => setConflict(null),
     submit: (next: Facts) => {

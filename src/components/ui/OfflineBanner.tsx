@@ -31,7 +31,9 @@ function useComeBack(online: boolean) {
       if (answer) setReachable(true);
     };
     const timer = window.setInterval(look, 5_000);
+    window.addEventListener('online', look);
     return () => {
+      window.removeEventListener('online', look);
       window.clearInterval(timer);
       void client.invalidateQueries();
     };

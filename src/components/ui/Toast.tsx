@@ -17,6 +17,13 @@ export async function say(sentence: string): Promise<void> {
   toast(sentence);
 }
 
+/** The same, with a way back for as long as it stands. */
+export async function sayUndoable(sentence: string, undo: () => void): Promise<void> {
+  const { toast } = await import('sonner');
+  raise();
+  toast(sentence, { duration: 8000, action: { label: 'Undo', onClick: undo } });
+}
+
 /** Loaded beside the page, not before it: nothing is said in its first moment. */
 const Sonner = lazy(async () => ({ default: (await import('sonner')).Toaster }));
 
@@ -30,8 +37,13 @@ export const Toaster = () => (
         mobileOffset={84}
         toastOptions={{
           unstyled: true,
+          classNames: {
+            content: 'min-w-0 flex-1',
+            actionButton:
+              'shrink-0 rounded-lg border-[1.5px] border-stone px-3 py-1 font-semibold text-stone max-tablet:min-h-11',
+          },
           className:
-            'w-full rounded-xl border border-line bg-ink px-4 py-3 font-sans text-body font-medium text-stone shadow-card',
+            'flex w-full items-center gap-3 rounded-xl border border-line bg-ink px-4 py-3 font-sans text-body font-medium text-stone shadow-card',
         }}
       />
     </Suspense>

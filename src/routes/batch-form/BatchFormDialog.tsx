@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import { Dialog } from '../../components/ui/Dialog.tsx';
 import { say } from '../../components/ui/Toast.tsx';
@@ -6,7 +7,10 @@ import { BatchForm } from './BatchForm.tsx';
 export interface BatchFormDialogProps {
   mode: 'new' | 'edit' | 'duplicate';
   batch?: Batch | null;
+  isGone?: boolean;
   onClose: () => void;
+  /** Under the form, and no part of it. */
+  foot?: ReactNode;
 }
 
 const TITLES = {
@@ -15,7 +19,13 @@ const TITLES = {
   duplicate: (name: string) => `A copy of ${name}`,
 };
 
-export function BatchFormDialog({ mode, batch = null, onClose }: BatchFormDialogProps) {
+export function BatchFormDialog({
+  mode,
+  batch = null,
+  isGone = false,
+  onClose,
+  foot,
+}: BatchFormDialogProps) {
   return (
     <Dialog
       open
@@ -28,12 +38,14 @@ export function BatchFormDialog({ mode, batch = null, onClose }: BatchFormDialog
       <BatchForm
         mode={mode}
         batch={batch}
+        isGone={isGone}
         onCancel={onClose}
         onDone={() => {
           void say(mode === 'edit' ? 'Saved.' : 'The batch is on the bench.');
           onClose();
         }}
       />
+      {foot && <div className="mt-10">{foot}</div>}
     </Dialog>
   );
 }

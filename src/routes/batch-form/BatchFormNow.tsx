@@ -1,8 +1,7 @@
 import { useState } from 'react';
 import { batch as batchContract, batchCreate, type Batch } from '#shared/api/batch.ts';
 import { useBatchCreate, useBatchPatch } from '../../api/batches.ts';
-import { useBoard } from '../../api/board.ts';
-import { useBrewery } from '../../app/useBrewery.ts';
+import { useBoard, useBoardSlug } from '../../api/board.ts';
 import { useUnits } from '../../app/useUnits.ts';
 import { RowForm } from '../../components/form/RowForm.tsx';
 import { TextField } from '../../components/form/TextField.tsx';
@@ -18,6 +17,8 @@ export interface BatchFormProps {
   mode: 'new' | 'edit' | 'duplicate';
   /** The batch that is edited or copied. */
   batch?: Batch | null;
+  /** Somebody deleted it while it was open. */
+  isGone?: boolean;
   /** Told of the batch's id once it is saved. */
   onDone: (id: string) => void;
   onCancel?: () => void;
@@ -25,8 +26,14 @@ export interface BatchFormProps {
 
 const ACTIONS = { new: 'Put on the bench', edit: 'Save', duplicate: 'Put the copy on the bench' };
 
-export function BatchFormNow({ mode, batch = null, onDone, onCancel }: BatchFormProps) {
-  const { slug } = useBrewery();
+export function BatchFormNow({
+  mode,
+  batch = null,
+  isGone = false,
+  onDone,
+  onCancel,
+}: BatchFormProps) {
+  const slug = useBoardSlug();
   const board = useBoard();
   const units = useUnits();
   const create = useBatchCreate(slug);
@@ -36,6 +43,7 @@ export function BatchFormNow({ mode, batch = null, onDone, onCancel }: BatchForm
   return (
     <RowForm
       row={mode === 'edit' ? batch : null}
+      isGone={isGone}
       rowSchema={batchContract}
       contract={batchCreate}
       keepsTyped

@@ -30,7 +30,8 @@ export function BoardPage() {
 function OpenBoard() {
   const { board } = useBoardView();
   const phone = usePhone();
-  const isEmpty = board.chains.length === 0 && board.batches.length === 0;
+  const isEmpty =
+    board.chains.length === 0 && board.batches.length === 0 && board.guests.length === 0;
   if (isEmpty)
     return (
       <>

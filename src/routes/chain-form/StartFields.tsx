@@ -3,6 +3,7 @@ import { useBoard } from '../../api/board.ts';
 import { QuantityField } from '../../components/form/QuantityField.tsx';
 import { SegmentedField } from '../../components/form/SegmentedField.tsx';
 import { SelectField } from '../../components/form/SelectField.tsx';
+import { SlurryFields } from './SlurryFields.tsx';
 
 const STARTS = [
   { value: 'pack', label: 'Fresh pack' },
@@ -29,14 +30,17 @@ export function StartFields({ chainId }: { chainId: string }) {
       {kind === 'pack' && price('Price of the pack')}
       {kind === 'cake' && <CakeSource chainId={chainId} />}
       {kind === 'outside' && (
-        <div className="grid gap-4 tablet:grid-cols-2">
-          <QuantityField
-            name="start.generation"
-            label="Generation of the first batch"
-            hint="A pack makes generation 1; slurry from it makes 2."
-          />
-          {price('What it cost')}
-        </div>
+        <>
+          <div className="grid gap-4 tablet:grid-cols-2">
+            <QuantityField
+              name="start.generation"
+              label="Generation of the first batch"
+              hint="A pack makes generation 1; slurry from it makes 2."
+            />
+            {price('What it cost')}
+          </div>
+          <SlurryFields />
+        </>
       )}
     </>
   );

@@ -21,18 +21,23 @@ export function chainValues(chain: Chain | null, board: Board, units: UnitPrefs)
       price: written(money, price, units),
       batchId: start?.kind === 'cake' ? start.batchId : '',
       generation: written('count', start?.kind === 'outside' ? start.generation : 2, units),
+      allergens: start?.kind === 'outside' ? start.allergens : null,
+      cultures: start?.kind === 'outside' ? start.cultures : null,
     },
   };
 }
 
 /** Of the fields for all three starts, those of the chosen one. */
 export function chainShape(body: Record<string, unknown>): Record<string, unknown> {
-  const { kind, price, batchId, generation } = body.start as Record<string, unknown>;
+  const { kind, price, batchId, generation, allergens, cultures } = body.start as Record<
+    string,
+    unknown
+  >;
   const start =
     kind === 'cake'
       ? { kind, batchId }
       : kind === 'outside'
-        ? { kind, generation, price }
+        ? { kind, generation, price, allergens, cultures }
         : { kind, price };
   return { ...body, start };
 }

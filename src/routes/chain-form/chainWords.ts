@@ -1,6 +1,8 @@
 import type { Board } from '#shared/api/board.ts';
 import type { Chain, ChainStart } from '#shared/api/chain.ts';
+import type { Allergen, Culture } from '#shared/rules/vocabulary.ts';
 import { formatMoney } from '#shared/units/money.ts';
+import { ALLERGEN_WORDS, CULTURE_WORDS } from '../../app/traitWords.ts';
 
 const LABELS: Record<string, string> = {
   name: 'Name of the shelf',
@@ -34,6 +36,28 @@ function startWords(start: ChainStart, board: Board): string {
       return `part of the cake of ${from?.name ?? 'another batch'}`;
     }
     case 'outside':
-      return `generation ${start.generation} from outside${price}`;
+      return `generation ${start.generation} from outside${price}; ${broughtAlongWords(start.allergens, start.cultures)}`;
   }
+}
+
+/** "gluten, milk; cultures not known": what comes with slurry from outside. */
+export function broughtAlongWords(
+  allergens: readonly Allergen[] | null,
+  cultures: readonly Culture[] | null,
+): string {
+  if (allergens === null && cultures === null) return 'allergens and cultures not known';
+  const said = <T extends string>(
+    what: string,
+    list: readonly T[] | null,
+    words: Record<T, string>,
+  ) =>
+    list === null
+      ? `${what} not known`
+      : list.length === 0
+        ? `no ${what}`
+        : list.map((one) => words[one].toLowerCase()).join(', ');
+  return [
+    said('allergens', allergens, ALLERGEN_WORDS),
+    said('cultures', cultures, CULTURE_WORDS),
+  ].join('; ');
 }

@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { z } from 'zod';
 import { brewery as breweryContract, breweryPatch, type Brewery } from '#shared/api/brewery.ts';
 import { id, name } from '#shared/api/fields.ts';
@@ -24,18 +24,23 @@ const LABELS: Record<string, string> = {
 };
 
 export function BreweryForm({ brewery }: { brewery: Brewery }) {
-  return <Fields key={brewery.version} brewery={brewery} />;
+  const [generation, setGeneration] = useState(0);
+  // A saved form starts afresh from the row as it is then.
+  return <Fields key={generation} brewery={brewery} onDone={() => setGeneration(generation + 1)} />;
 }
 
-function Fields({ brewery }: { brewery: Brewery }) {
+function Fields({ brewery, onDone }: { brewery: Brewery; onDone: () => void }) {
   const { slug } = useBrewery();
   const patch = useBreweryPatch(slug);
-  const [values] = useState(() => ({
-    id: brewery.id,
-    name: brewery.name,
-    timeZone: brewery.timeZone,
-    currency: brewery.currency,
-  }));
+  const values = useMemo(
+    () => ({
+      id: brewery.id,
+      name: brewery.name,
+      timeZone: brewery.timeZone,
+      currency: brewery.currency,
+    }),
+    [brewery],
+  );
   return (
     <RowForm
       row={brewery}
@@ -48,7 +53,11 @@ function Fields({ brewery }: { brewery: Brewery }) {
       labelOf={(key) => LABELS[key] ?? key}
       wordsOf={(key, facts) => String(facts[key as keyof typeof facts] ?? '')}
       action="Save"
-      onDone={() => say('Saved.')}
+      follows
+      onDone={() => {
+        say('Saved.');
+        onDone();
+      }}
     >
       <TextField name="name" label="Name of the brewery" autoComplete="organization" />
       <SelectField

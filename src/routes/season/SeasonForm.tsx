@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { z } from 'zod';
 import { season as seasonContract, weekday, type Season } from '#shared/api/brewery.ts';
 import { id, name } from '#shared/api/fields.ts';
@@ -30,25 +30,22 @@ const LABELS: Record<string, string> = {
 export function SeasonForm({ season }: { season: Season }) {
   const [generation, setGeneration] = useState(0);
   // A saved form starts afresh from the row as it is then.
-  return (
-    <Fields
-      key={`${generation}-${season.version}`}
-      season={season}
-      onDone={() => setGeneration(generation + 1)}
-    />
-  );
+  return <Fields key={generation} season={season} onDone={() => setGeneration(generation + 1)} />;
 }
 
 function Fields({ season, onDone }: { season: Season; onDone: () => void }) {
   const { slug } = useBrewery();
   const units = useUnits();
   const patch = useSeasonPatch(slug);
-  const [values] = useState(() => ({
-    id: season.id,
-    name: season.name,
-    brewWeekdays: season.brewWeekdays,
-    brewsPerDay: written('count', season.brewsPerDay, units),
-  }));
+  const values = useMemo(
+    () => ({
+      id: season.id,
+      name: season.name,
+      brewWeekdays: season.brewWeekdays,
+      brewsPerDay: written('count', season.brewsPerDay, units),
+    }),
+    [season, units],
+  );
   return (
     <RowForm
       row={season}
@@ -65,6 +62,7 @@ function Fields({ season, onDone }: { season: Season; onDone: () => void }) {
           : String(key === 'name' ? facts.name : facts.brewsPerDay)
       }
       action="Save"
+      follows
       onDone={() => {
         say('Saved.');
         onDone();

@@ -8,6 +8,7 @@ import { BlockedDays } from './BlockedDays.tsx';
 import { BreweryForm } from './BreweryForm.tsx';
 import { SeasonForm } from './SeasonForm.tsx';
 import { SeasonFacts } from './SeasonFacts.tsx';
+import { SeasonLinks } from './SeasonLinks.tsx';
 
 export function SeasonPage() {
   useTitle('Season');
@@ -15,7 +16,11 @@ export function SeasonPage() {
   const mayEdit = board.me.can.editSeason;
   return (
     <Page>
-      <PageHead title="Season" lead="When the brewery brews, and the days that are taken." />
+      <PageHead
+        title="Season"
+        lead="When the brewery brews, and the days that are taken."
+        actions={<SeasonLinks />}
+      />
       {mayEdit ? (
         <div className="grid items-start gap-4 wide:grid-cols-2">
           <Card>

@@ -33,6 +33,8 @@ export function AccountMenu() {
     >
       <MenuLabel>{me.name}</MenuLabel>
       <MenuLink to={brewery.path('account')}>Account and units</MenuLink>
+      <MenuLink to={brewery.path('rules')}>House rules</MenuLink>
+      <MenuLink to={brewery.path('record')}>Record</MenuLink>
       <MenuLink to="/about/checks">How the checks work</MenuLink>
       <OtherBreweries />
       <MenuSeparator />

@@ -56,7 +56,7 @@ function TabFace({ active, icon, name }: { active: boolean; icon: ReactNode; nam
 function More() {
   const brewery = useBrewery();
   const { pathname } = useLocation();
-  const active = /\/(people|season|account)$/.test(pathname);
+  const active = /\/(people|season|rules|record|account)$/.test(pathname);
   return (
     <Menu
       button={{
@@ -66,6 +66,8 @@ function More() {
     >
       <MenuLink to={brewery.path('people')}>People</MenuLink>
       <MenuLink to={brewery.path('season')}>Season</MenuLink>
+      <MenuLink to={brewery.path('rules')}>House rules</MenuLink>
+      <MenuLink to={brewery.path('record')}>Record</MenuLink>
       <MenuLink to={brewery.path('account')}>Account and units</MenuLink>
     </Menu>
   );

@@ -9,6 +9,7 @@ import { Skeleton } from '../../components/ui/Skeleton.tsx';
 import { Toaster } from '../../components/ui/Toast.tsx';
 import { NotFoundPage } from '../error/NotFoundPage.tsx';
 import { BottomBar } from './BottomBar.tsx';
+import { LiveSeason } from './LiveSeason.tsx';
 import { Page } from './Page.tsx';
 import { TopBar } from './TopBar.tsx';
 
@@ -34,6 +35,7 @@ export function Shell() {
     <div className="flex min-h-dvh flex-col">
       <TopBar />
       <OfflineBanner />
+      <LiveSeason />
       <div className="flex min-w-0 grow flex-col max-tablet:pb-20">
         <Suspense fallback={<Loading />}>
           <Outlet />

@@ -3,13 +3,14 @@ import { Link, NavLink } from 'react-router-dom';
 import { useBrewery } from '../../app/useBrewery.ts';
 import { Wordmark } from '../../components/ui/Wordmark.tsx';
 import { AccountMenu } from './AccountMenu.tsx';
+import { LiveMark } from './LiveMark.tsx';
 import { Members } from './Members.tsx';
 import { PAGES } from './pages.ts';
 
 export function TopBar() {
   const brewery = useBrewery();
   return (
-    <header className="on-bar flex h-15 shrink-0 items-center gap-7 bg-bar px-7 text-on-bar max-wide:gap-3 max-tablet:h-13 max-tablet:px-[18px]">
+    <header className="on-bar print:hidden flex h-15 shrink-0 items-center gap-7 bg-bar px-7 text-on-bar max-wide:gap-3 max-tablet:h-13 max-tablet:px-[18px]">
       <Link to={brewery.path()} aria-label="Barmkin, to the board" className="rounded-lg">
         <Wordmark />
       </Link>
@@ -34,6 +35,7 @@ export function TopBar() {
       </nav>
       <div className="ml-auto flex min-w-0 items-center gap-3.5 text-small text-on-bar2">
         <span className="truncate max-tablet:hidden">{brewery.name}</span>
+        <LiveMark />
         <Members />
         <AccountMenu />
       </div>

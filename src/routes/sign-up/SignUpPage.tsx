@@ -1,9 +1,9 @@
-import { Navigate, useNavigate } from 'react-router-dom';
+import { Navigate, useNavigate, useSearchParams } from 'react-router-dom';
 import { signUpRequest } from '#shared/api/people.ts';
 import { useSession, useSignUp } from '../../api/session.ts';
 import { useTitle } from '../../app/useTitle.ts';
 import { TextLink } from '../../components/ui/TextLink.tsx';
-import { homeOf } from '../public/home.ts';
+import { homeOf, safeNext } from '../public/home.ts';
 import { EmailField, EntryField } from '../public/EntryField.tsx';
 import { EntryForm } from '../public/EntryForm.tsx';
 import { PasswordField } from '../public/PasswordField.tsx';
@@ -17,14 +17,16 @@ const contract = signUpRequest.extend({
 
 export function SignUpPage() {
   useTitle('Start a brewery');
+  const [params] = useSearchParams();
+  const next = safeNext(params.get('next'));
   const { data: me } = useSession();
-  if (me) return <Navigate to={homeOf(me)} replace />;
+  if (me) return <Navigate to={next ?? homeOf(me)} replace />;
   return (
     <PublicForm
       title="Start a brewery"
       lead="One shelf for your yeasts, your beers and the people you brew with."
     >
-      <SignUpForm />
+      <SignUpForm next={next} />
       <p className="mt-6 text-touch">
         Already in?{' '}
         <TextLink to="/sign-in" className="inline-block py-2">
@@ -35,7 +37,7 @@ export function SignUpPage() {
   );
 }
 
-function SignUpForm() {
+function SignUpForm({ next }: { next: string | null }) {
   const navigate = useNavigate();
   const signUp = useSignUp();
   return (
@@ -46,7 +48,7 @@ function SignUpForm() {
       onSubmit={async (values) => {
         const { timeZone } = Intl.DateTimeFormat().resolvedOptions();
         const who = await signUp.mutateAsync({ ...values, timeZone });
-        await navigate(homeOf(who), { replace: true });
+        await navigate(next ?? homeOf(who), { replace: true });
       }}
     >
       <EntryField name="name" label="Your name" autoComplete="name" />

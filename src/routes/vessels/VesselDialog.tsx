@@ -1,5 +1,6 @@
 import { useState } from 'react';
 import { vessel as vesselContract, vesselCreate, type Vessel } from '#shared/api/vessel.ts';
+import { useBoard } from '../../api/board.ts';
 import { useVesselCreate, useVesselPatch } from '../../api/vessels.ts';
 import { useBrewery } from '../../app/useBrewery.ts';
 import { useUnits } from '../../app/useUnits.ts';
@@ -21,6 +22,7 @@ export interface VesselDialogProps {
 export function VesselDialog({ vessel, onClose }: VesselDialogProps) {
   const { slug } = useBrewery();
   const units = useUnits();
+  const now = useBoard().vessels.find(({ id }) => id === vessel?.id);
   const create = useVesselCreate(slug);
   const patch = useVesselPatch(slug);
   const [values] = useState(() => vesselValues(vessel, units));
@@ -28,7 +30,8 @@ export function VesselDialog({ vessel, onClose }: VesselDialogProps) {
   return (
     <Dialog open onClose={onClose} title={vessel ? `Edit ${vessel.name}` : 'New vessel'}>
       <RowForm
-        row={vessel}
+        row={now ?? vessel}
+        isGone={vessel !== null && !now}
         rowSchema={vesselContract}
         contract={vesselCreate}
         keepsTyped

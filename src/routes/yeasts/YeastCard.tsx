@@ -81,6 +81,14 @@ function OnShelves({ yeast }: { yeast: Yeast }) {
       <Link to={path()} className="font-medium text-ink underline underline-offset-4">
         {mine.map((chain) => chain.name).join(', ')}
       </Link>
+      {' · '}
+      <Link
+        to={path(`yeasts/${yeast.id}/family`)}
+        aria-label={`Family of ${yeast.name}`}
+        className="font-medium text-ink underline underline-offset-4"
+      >
+        Family
+      </Link>
     </p>
   );
 }

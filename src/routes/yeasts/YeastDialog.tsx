@@ -22,7 +22,9 @@ export interface YeastDialogProps {
 export function YeastDialog({ yeast, onClose }: YeastDialogProps) {
   const { slug } = useBrewery();
   const units = useUnits();
-  const { currency } = useBoard().brewery;
+  const { yeasts, brewery } = useBoard();
+  const { currency } = brewery;
+  const now = yeasts.find(({ id }) => id === yeast?.id);
   const create = useYeastCreate(slug);
   const patch = useYeastPatch(slug);
   const [values] = useState(() => yeastValues(yeast, units, currency));
@@ -30,7 +32,8 @@ export function YeastDialog({ yeast, onClose }: YeastDialogProps) {
   return (
     <Dialog open onClose={onClose} title={yeast ? `Edit ${yeast.name}` : 'New yeast'}>
       <RowForm
-        row={yeast}
+        row={now ?? yeast}
+        isGone={yeast !== null && !now}
         rowSchema={yeastContract}
         contract={yeastCreate}
         keepsTyped

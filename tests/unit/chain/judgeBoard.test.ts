@@ -58,9 +58,27 @@ describe('a judged season', () => {
   });
 
   it('starts slurry from outside at its own generation', () => {
-    const chains = [makeChain(1, { start: { kind: 'outside', generation: 4, price: null } })];
+    const chains = [
+      makeChain(1, {
+        start: { kind: 'outside', generation: 4, price: null, allergens: [], cultures: [] },
+      }),
+    ];
     const judged = judgeBoard({ ...split, chains });
     expect(judged.chains.get(one)).toMatchObject({ generations: [4, 5], costPerBatch: null });
+  });
+
+  it('hands down what slurry from outside brings along, and says where that is not known', () => {
+    const slurry = { kind: 'outside', generation: 4, price: null } as const;
+    const judged = (allergens: ['milk'] | null) =>
+      judgeBoard({
+        ...split,
+        chains: [makeChain(1, { start: { ...slurry, allergens, cultures: [] } })],
+        batches: split.batches.map((batch) => ({ ...batch, allergens: [], cultures: [] })),
+      }).links.get(b(2));
+    expect(judged(['milk'])?.findings.map(({ rule }) => rule)).toContain('allergen');
+    expect(judged(null)?.findings.map(({ rule }) => rule)).not.toContain('allergen');
+    expect(judged(null)?.unchecked.map(({ rule }) => rule)).toContain('allergen');
+    expect(judged(null)?.unchecked.map(({ rule }) => rule)).not.toContain('wild-culture');
   });
 
   it('goes around a scrapped batch', () => {

@@ -26,7 +26,7 @@ export function twoShelves(): Board {
       { ...at(7, null, 1), yeastId: null },
     ],
   });
-  const able = { editBatches: true, moveBatches: true, editChains: true };
+  const able = { editBatches: true, moveBatches: true, moveAcross: true, setStages: true };
   return {
     ...facts,
     brewery: {
@@ -43,6 +43,7 @@ export function twoShelves(): Board {
       role: 'brewer',
       can: {
         ...able,
+        editChains: true,
         editYeastsAndVessels: true,
         editSeason: false,
         acceptHolds: false,
@@ -52,6 +53,8 @@ export function twoShelves(): Board {
     members: [],
     undo: null,
     redo: null,
+    unread: {},
+    guests: [],
   };
 }
 

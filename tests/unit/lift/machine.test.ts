@@ -31,6 +31,7 @@ function scene(answer: (request: MoveRequest) => Promise<Moved> = async (r) => a
   const focused: string[] = [];
   const sent: MoveRequest[] = [];
   let held = 0;
+  let arrive = (_board: Board) => {};
   const move = (request: MoveRequest) => {
     sent.push(request);
     board = withPending(board, [request]);
@@ -43,8 +44,9 @@ function scene(answer: (request: MoveRequest) => Promise<Moved> = async (r) => a
     undo: () => Promise.reject(new OfflineError()),
     redo: () => Promise.reject(new OfflineError()),
     isOnline: () => true,
-    holdStill: () => {
+    holdStill: (look) => {
       held += 1;
+      arrive = look;
       return () => (held -= 1);
     },
     say: (words) => said.push(words),
@@ -68,6 +70,7 @@ function scene(answer: (request: MoveRequest) => Promise<Moved> = async (r) => a
     sent,
     ports,
     held: () => held,
+    arrive: (next: Board) => arrive(next),
     change: (next: Board) => (board = next),
     board: () => board,
   };
@@ -128,6 +131,16 @@ describe('a board that changes under a lifted batch', () => {
     const rest = board().batches.filter((row) => row.id !== beer(6));
     lifting.boardChanged({ ...board(), batches: rest });
     expect(store.get().lifted).toBeNull();
+    expect(said.at(-1)).toMatch(/^Beer 6 is no longer on this board\./);
+  });
+
+  it('ends a pointer’s drag, and its stillness, where what waits is without the batch', () => {
+    const { lifting, store, said, board, held, arrive } = scene();
+    lifting.lift(beer(6), 'pointer');
+    arrive({ ...board(), today: '2027-03-02' });
+    expect([store.get().lifted?.batchId, held()]).toEqual([beer(6), 1]);
+    arrive({ ...board(), batches: board().batches.filter((row) => row.id !== beer(6)) });
+    expect([store.get().lifted, held()]).toEqual([null, 0]);
     expect(said.at(-1)).toMatch(/^Beer 6 is no longer on this board\./);
   });
 

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import { formatDay } from '#shared/units/day.ts';
 import { format } from '#shared/units/quantity.ts';
@@ -6,8 +7,15 @@ import { Dialog } from '../../../components/ui/Dialog.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { fgOf, gravityText, ogOf, stageLine, volumeOf } from '../view/words.ts';
 
+interface BatchFactsProps {
+  batch: Batch;
+  onClose: () => void;
+  /** Under the facts. */
+  foot?: ReactNode;
+}
+
 /** A batch for those who only read. */
-export function BatchFacts({ batch, onClose }: { batch: Batch; onClose: () => void }) {
+export function BatchFacts({ batch, onClose, foot }: BatchFactsProps) {
   const { board, units } = useBoardView();
   const gravity = (sg: number | null) => (sg === null ? null : gravityText(sg, units));
   const quantity = (kind: 'volume' | 'colour' | 'bitterness' | 'temperature', n: number | null) =>
@@ -37,6 +45,7 @@ export function BatchFacts({ batch, onClose }: { batch: Batch; onClose: () => vo
           ))}
         </dl>
       </div>
+      {foot && <div className="mt-5">{foot}</div>}
     </Dialog>
   );
 }

@@ -3,19 +3,23 @@ import { useState } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import { lazyPart } from '../../../app/lazyPart.tsx';
 import { Menu, MenuItem, MenuSeparator } from '../../../components/ui/Menu.tsx';
+import { OnWholeBoard, useBoardView } from '../view/BoardView.tsx';
 import { useBoardPanel } from '../view/useBoardPanel.ts';
 import { DeleteBatch } from './DeleteBatch.tsx';
 import { nextStages, STAGE_ACTIONS, type NextStage } from './stages.ts';
 
-type Asked = NextStage | 'delete' | null;
+type Asked = NextStage | 'delete' | 'branch';
 
 /** Its form comes when it is asked for. */
 const StageDialog = lazyPart(async () => (await import('./StageDialog.tsx')).StageDialog);
 
-/** Edit, duplicate, the stages that come next, scrap, delete. */
+const BranchDialog = lazyPart(async () => (await import('./BranchDialog.tsx')).BranchDialog);
+
+/** Edit, duplicate, divide the cake, the stages that come next, scrap, delete. */
 export function BatchMenu({ batch }: { batch: Batch }) {
-  const [asked, setAsked] = useState<Asked>(null);
+  const [asked, setAsked] = useState<Asked | null>(null);
   const { open } = useBoardPanel();
+  const { can } = useBoardView();
   const close = () => setAsked(null);
   return (
     <>
@@ -28,24 +32,51 @@ export function BatchMenu({ batch }: { batch: Batch }) {
         }}
       >
         <MenuItem onSelect={() => open({ kind: 'batch', batchId: batch.id })}>Edit</MenuItem>
-        <MenuItem onSelect={() => open({ kind: 'new', what: 'batch', likeId: batch.id })}>
-          Duplicate
-        </MenuItem>
-        <MenuSeparator />
-        {nextStages(batch.stage).map((stage) => (
-          <MenuItem key={stage} onSelect={() => setAsked(stage)}>
-            {STAGE_ACTIONS[stage].menu}
-          </MenuItem>
-        ))}
-        <MenuSeparator />
-        <MenuItem danger onSelect={() => setAsked('delete')}>
-          Delete
-        </MenuItem>
+        {can.setStages && (
+          <>
+            <MenuItem onSelect={() => open({ kind: 'new', what: 'batch', likeId: batch.id })}>
+              Duplicate
+            </MenuItem>
+            {batch.chainId !== null && can.editChains && (
+              <MenuItem onSelect={() => setAsked('branch')}>
+                Pour part of this cake onto another wort
+              </MenuItem>
+            )}
+            <MenuSeparator />
+            {nextStages(batch.stage).map((stage) => (
+              <MenuItem key={stage} onSelect={() => setAsked(stage)}>
+                {STAGE_ACTIONS[stage].menu}
+              </MenuItem>
+            ))}
+            <MenuSeparator />
+            <MenuItem danger onSelect={() => setAsked('delete')}>
+              Delete
+            </MenuItem>
+          </>
+        )}
       </Menu>
-      {asked === 'delete' && <DeleteBatch batch={batch} onClose={close} />}
-      {asked !== null && asked !== 'delete' && (
-        <StageDialog batch={batch} to={asked} onClose={close} />
+      {asked !== null && (
+        <OnWholeBoard>
+          <AskedDialog batch={batch} asked={asked} onClose={close} />
+        </OnWholeBoard>
       )}
     </>
   );
+}
+
+interface AskedDialogProps {
+  batch: Batch;
+  asked: Asked;
+  onClose: () => void;
+}
+
+function AskedDialog({ batch, asked, onClose }: AskedDialogProps) {
+  switch (asked) {
+    case 'delete':
+      return <DeleteBatch batch={batch} onClose={onClose} />;
+    case 'branch':
+      return <BranchDialog source={batch} onClose={onClose} />;
+    default:
+      return <StageDialog batch={batch} to={asked} onClose={onClose} />;
+  }
 }

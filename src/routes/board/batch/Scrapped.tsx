@@ -48,7 +48,7 @@ function ScrappedBatch({ batch }: { batch: Batch }) {
         </p>
         <p className="text-small text-ink2">{batch.scrapReason || 'No reason was written down.'}</p>
       </div>
-      {can.editBatches && (
+      {can.setStages && (
         <Button
           size="small"
           disabled={stage.isPending}

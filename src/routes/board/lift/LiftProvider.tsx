@@ -10,16 +10,22 @@ import { useLiftKeys } from './useLiftKeys.ts';
 import { useMachine } from './useMachine.ts';
 import { YeastDialog } from './YeastDialog.tsx';
 
+interface LiftProviderProps {
+  children: ReactNode;
+  /** The keys for undo are the page's own board's. */
+  takesUndo?: boolean;
+}
+
 /**
  * Lifting, around the whole board. Every gesture (pointer, keys, list) becomes the same command of
  * one machine.
  */
-export function LiftProvider({ children }: { children: ReactNode }) {
+export function LiftProvider({ children, takesUndo = true }: LiftProviderProps) {
   const board = useBoard();
   const words = useAnnouncements();
   const machine = useMachine(board, words.say);
   const grab = useRef<Grab | null>(null);
-  useLiftKeys(machine);
+  useLiftKeys(machine, takesUndo);
   return (
     <LiftContext value={machine}>
       <LiftSurface grab={grab}>{children}</LiftSurface>

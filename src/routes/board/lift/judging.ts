@@ -7,7 +7,7 @@ import { lockWords } from './words.ts';
 
 /** Judges every place for a batch, once; the pointer then only looks the answers up. */
 export function judgedPlaces(board: Board, batchId: string) {
-  const gaps = judgeGaps(board, batchId);
+  const gaps = judgeGaps(board, batchId).filter((gap) => isWithinReach(board, batchId, gap));
   const ranked = rankGaps(gaps);
   const locked = gaps.filter((gap) => gap.locked !== null);
   return {
@@ -16,6 +16,13 @@ export function judgedPlaces(board: Board, batchId: string) {
     locks: new Map(locked.map((gap) => [gap.key, lockWords(board, gap)])),
     walk: walkOf(board, ranked, batchId),
   };
+}
+
+/** A guest moves within a chain; its gaps bear its id. */
+function isWithinReach(board: Board, batchId: string, { key }: { key: string }): boolean {
+  if (board.me.can.moveAcross) return true;
+  const chainId = board.batches.find(({ id }) => id === batchId)?.chainId ?? null;
+  return chainId !== null && key.startsWith(`${chainId}:`);
 }
 
 export type JudgedPlaces = ReturnType<typeof judgedPlaces>;

@@ -54,6 +54,14 @@ export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
     letGo = fold = () => {};
   };
 
+  /** A board that waits for the end of the drag: where the batch is gone, there is nothing to wait for. */
+  const arrived = (board: Board) => {
+    const { lifted } = store.get();
+    if (!lifted || board.batches.some((row) => row.id === lifted.batchId)) return;
+    release();
+    ports.say(goneWords(lifted.name));
+  };
+
   const lift = (batchId: string, by: Lifted['by']) => {
     const board = ports.board();
     const why = ports.isOnline() ? whyFixed(board, batchId) : OFFLINE_WORDS;
@@ -61,7 +69,7 @@ export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
     const batch = board.batches.find((row) => row.id === batchId);
     if (!batch) return;
     const places = placesOf(board, batchId);
-    if (by === 'pointer') letGo = ports.holdStill();
+    if (by === 'pointer') letGo = ports.holdStill(arrived);
     const shape = board.vessels.find((row) => row.id === batch.vesselId)?.shape ?? null;
     const lifted = { batchId, by, name: batch.name, chainId: batch.chainId, shape, ...places };
     store.set({ lifted, over: null, change: null, refusal: null });

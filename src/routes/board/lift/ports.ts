@@ -6,8 +6,8 @@ export interface LiftPorts extends Mover {
   /** The board as it is shown now. */
   board(): Board;
   isOnline(): boolean;
-  /** Keeps what arrives from elsewhere off the board; the answer ends it. */
-  holdStill(): () => void;
+  /** Keeps what arrives from elsewhere off the board, but for a look at it; the answer ends it. */
+  holdStill(look: (arrived: Board) => void): () => void;
   say(words: string): void;
   /** Gives the focus back to a batch's handle once it is drawn. */
   focusBatch(batchId: string): void;

@@ -30,13 +30,13 @@ function onUndoKey(machine: LiftMachine, event: KeyboardEvent) {
 }
 
 /** Listens on the whole page: the focus may be in the list of places, or nowhere. */
-export function useLiftKeys(machine: LiftMachine) {
+export function useLiftKeys(machine: LiftMachine, takesUndo: boolean) {
   useEffect(() => {
     const listen = (event: KeyboardEvent) => {
       onLiftKey(machine, event);
-      onUndoKey(machine, event);
+      if (takesUndo) onUndoKey(machine, event);
     };
     document.addEventListener('keydown', listen, true);
     return () => document.removeEventListener('keydown', listen, true);
-  }, [machine]);
+  }, [machine, takesUndo]);
 }

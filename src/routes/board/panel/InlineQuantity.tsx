@@ -12,19 +12,23 @@ export interface InlineQuantityProps {
   value: number | null;
   typed?: Typed[string] | undefined;
   disabled?: boolean;
+  /** Why this number cannot be taken, with what to do; null: it can. */
+  refuse?: (value: number) => string | null;
   /** The number that was typed, when the field is left or Enter is pressed; null: emptied. */
   onSave: (value: number | null, typed: Typed[string] | null) => void;
 }
 
 /** One number that is saved by itself, without a form around it. Nothing that was typed is lost. */
 export function InlineQuantity(props: InlineQuantityProps) {
-  const { kind, label, value, typed, disabled = false, onSave } = props;
+  const { kind, label, value, typed, disabled = false, refuse, onSave } = props;
   const { units } = useBoardView();
   const id = useId();
   const [draft, setDraft] = useState<ReturnType<typeof written> | null>(null);
   const now = draft ?? written(kind, value, units, typed);
+  const refused = draft && draft.value !== null && refuse ? refuse(draft.value) : null;
+  const why = now.why ?? refused;
   const save = () => {
-    if (draft === null || draft.why !== null) return;
+    if (draft === null || why !== null) return;
     setDraft(null);
     if (draft.value === value) return;
     onSave(
@@ -45,12 +49,12 @@ export function InlineQuantity(props: InlineQuantityProps) {
           autoComplete="off"
           disabled={disabled}
           value={now.text}
-          aria-invalid={now.why !== null}
-          aria-describedby={now.why === null ? `${id}-unit` : `${id}-unit ${id}-why`}
+          aria-invalid={why !== null}
+          aria-describedby={why === null ? `${id}-unit` : `${id}-unit ${id}-why`}
           onChange={(event) => setDraft(rewrite(now, event.target.value, units))}
           onBlur={save}
           onKeyDown={(event) => event.key === 'Enter' && save()}
-          className={fieldClass(now.why !== null, 'pr-14')}
+          className={fieldClass(why !== null, 'pr-14')}
         />
         <span
           id={`${id}-unit`}
@@ -59,7 +63,7 @@ export function InlineQuantity(props: InlineQuantityProps) {
           {now.unit}
         </span>
       </div>
-      <FieldError id={`${id}-why`} message={now.why ?? undefined} />
+      <FieldError id={`${id}-why`} message={why ?? undefined} />
     </div>
   );
 }

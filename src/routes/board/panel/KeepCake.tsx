@@ -1,4 +1,6 @@
-import { sentenceOf } from '../../../api/errors.ts';
+import { overstepOf } from '#shared/chain/shares.ts';
+import { overstepWords } from '#shared/chain/shareWords.ts';
+import { fieldSentenceOf, sentenceOf } from '../../../api/errors.ts';
 import { VerdictPill } from '../../../components/drawn/VerdictPill.tsx';
 import { Button } from '../../../components/ui/Button.tsx';
 import { Notice } from '../../../components/ui/Notice.tsx';
@@ -13,7 +15,7 @@ import { useSaveKept, type SaveKept } from './useSaveKept.ts';
 
 /** How much of the cake to keep: tried live, stored when the hand lets go. */
 export function KeepCake({ draft }: { draft: LinkDraft }) {
-  const { units, can } = useBoardView();
+  const { board, units, can } = useBoardView();
   const { answer, later } = draft;
   const { save, error } = useSaveKept(draft);
   const { volumeL: whole } = answer.cake;
@@ -49,6 +51,10 @@ export function KeepCake({ draft }: { draft: LinkDraft }) {
               label="Kept part"
               value={kept}
               typed={later.link.typed.keepL}
+              refuse={(litres) => {
+                const over = overstepOf(board, later.id, litres);
+                return over && overstepWords(over, units);
+              }}
               onSave={(value, typed) => save(value ?? 'recommended', typed)}
             />
           </div>
@@ -57,7 +63,7 @@ export function KeepCake({ draft }: { draft: LinkDraft }) {
       )}
       {error && (
         <Notice kind="hold" alert className="mt-2">
-          {sentenceOf(error)}
+          {fieldSentenceOf(error) ?? sentenceOf(error)}
         </Notice>
       )}
       {notes.map(

@@ -1,3 +1,5 @@
+import { useIsGuestHere } from '../../../api/board.ts';
+import { FoldedTalk } from '../../talk/FoldedTalk.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { useBoardPanel } from '../view/useBoardPanel.ts';
 import { AcceptHold } from './AcceptHold.tsx';
@@ -30,6 +32,7 @@ export function LinkPanel({ laterId }: { laterId: string }) {
 
 function OpenedLink({ laterId, earlierId }: { laterId: string; earlierId: string }) {
   const { close } = useBoardPanel();
+  const isGuest = useIsGuestHere();
   const draft = useLinkDraft(laterId, earlierId);
   if (!draft) return null;
   const { earlier, later, answer } = draft;
@@ -46,6 +49,9 @@ function OpenedLink({ laterId, earlierId }: { laterId: string; earlierId: string
       <Advice advice={answer.advice} />
       <PassedChecks passed={answer.passed} />
       <LinkFacts later={later} />
+      {!isGuest && later.chainId !== null && (
+        <FoldedTalk chainId={later.chainId} about={{ kind: 'link', batchId: later.id }} />
+      )}
     </PanelFrame>
   );
 }

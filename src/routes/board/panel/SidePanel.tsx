@@ -1,5 +1,6 @@
 import { useEffect } from 'react';
 import { lazyPart } from '../../../app/lazyPart.tsx';
+import { OnBoardOf } from '../guest/OnBoardOf.tsx';
 import { ChangesPanel } from '../lift/ChangesPanel.tsx';
 import { useLiftMachine, useLiftPanel, useLiftState } from '../lift/liftContext.ts';
 import { PlacesPanel } from '../lift/PlacesPanel.tsx';
@@ -28,7 +29,12 @@ export function SidePanel() {
   const { panel, close } = useBoardPanel();
   const openLink = panel?.kind === 'link' ? panel.laterId : null;
   useOneAtATime(openLink, lift === 'places', close);
-  const link = openLink !== null && lift !== 'places' ? <LinkPanel laterId={openLink} /> : null;
+  const link =
+    openLink !== null && lift !== 'places' ? (
+      <OnBoardOf batchId={openLink}>
+        <LinkPanel laterId={openLink} />
+      </OnBoardOf>
+    ) : null;
   if (wide)
     return (
       <aside

@@ -42,7 +42,31 @@ export function UncheckedFields({ earlier, later, unchecked }: UncheckedFieldsPr
       ) : (
         <p className="mt-1 text-ink2">Whoever keeps these batches has not written it down yet.</p>
       )}
+      <SlurryUnknown batch={earlier} unchecked={unchecked} />
     </PanelPart>
+  );
+}
+
+/** Slurry from outside whose allergens or cultures nobody knows leaves these checks open. */
+function SlurryUnknown({ batch, unchecked }: { batch: Batch; unchecked: readonly Unchecked[] }) {
+  const { index } = useBoardView();
+  const chain = batch.chainId === null ? undefined : index.chain(batch.chainId);
+  if (chain?.start.kind !== 'outside') return null;
+  const { allergens, cultures } = chain.start;
+  const lacking = [
+    ...(allergens === null && unchecked.some(({ rule }) => rule === 'allergen')
+      ? ['allergens']
+      : []),
+    ...(cultures === null && unchecked.some(({ rule }) => rule === 'wild-culture')
+      ? ['cultures']
+      : []),
+  ];
+  if (lacking.length === 0) return null;
+  return (
+    <p className="mt-2 text-ink2">
+      The {lacking.join(' and ')} of the slurry that {chain.name} starts from are not written down:
+      edit the shelf once you know them.
+    </p>
   );
 }
 

@@ -1,7 +1,8 @@
 import { useMemo, useState } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
-import { linkInput, sightOf } from '#shared/chain/boardLink.ts';
+import { sightOf } from '#shared/chain/boardLink.ts';
 import { checkLink } from '#shared/chain/checkLink.ts';
+import { linkInput } from '#shared/chain/linkInput.ts';
 import type { LinkAnswer } from '#shared/rules/answer.ts';
 import { useBoardView } from '../view/BoardView.tsx';
 

@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { GuestShelves } from '../guest/GuestShelves.tsx';
 import { SidePanel } from '../panel/SidePanel.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { ChainChips } from './ChainChips.tsx';
@@ -16,6 +17,7 @@ export function PhoneBoard() {
       <main id="main" className="pb-8 text-touch outline-none">
         <ChainChips chosen={chain?.id ?? 'bench'} onChoose={setWanted} />
         {chain ? <PhoneChain key={chain.id} chain={chain} /> : <PhoneBench />}
+        <GuestShelves />
       </main>
       <SidePanel />
     </>

@@ -3,7 +3,9 @@ import { formatMoney } from '#shared/units/money.ts';
 import { BestMove } from '../head/BestMove.tsx';
 import { UndoButtons } from '../lift/UndoButtons.tsx';
 import { useUnfolding } from '../lift/useUnfolding.ts';
+import { Descent } from '../../descent/Descent.tsx';
 import { ChainMenu } from '../shelf/ChainMenu.tsx';
+import { ChainName, UnreadMark } from '../shelf/ChainName.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { count, generationLine, seasonLine, yeastLine } from '../view/words.ts';
 import { PhoneBatch } from './PhoneBatch.tsx';
@@ -25,9 +27,11 @@ export function PhoneChain({ chain }: { chain: Chain }) {
   ];
   return (
     <>
-      <PhoneHead title={chain.name}>
+      <PhoneHead title={<ChainName chain={chain} />}>
         <p>{facts.join(' · ')}</p>
         {yeast && <p>{yeastLine(yeast, units)}</p>}
+        <Descent chain={chain} />
+        <UnreadMark chain={chain} />
       </PhoneHead>
       {can.editChains && (
         <div className="px-3">

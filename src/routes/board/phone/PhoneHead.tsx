@@ -5,7 +5,7 @@ import { useBoardView } from '../view/BoardView.tsx';
 import { useBoardPanel } from '../view/useBoardPanel.ts';
 
 /** Name of what is shown, its sum, and what may be begun. */
-export function PhoneHead({ title, children }: { title: string; children: ReactNode }) {
+export function PhoneHead({ title, children }: { title: ReactNode; children: ReactNode }) {
   return (
     <header className="flex items-end gap-3 px-[18px]">
       <div className="min-w-0 flex-1">

@@ -2,16 +2,19 @@ import { ChevronDown } from 'lucide-react';
 import { useState } from 'react';
 import type { Chain } from '#shared/api/chain.ts';
 import { useChainDelete } from '../../../api/chains.ts';
+import { useBrewery } from '../../../app/useBrewery.ts';
 import { ConfirmDialog } from '../../../components/ui/ConfirmDialog.tsx';
-import { Menu, MenuItem, MenuSeparator } from '../../../components/ui/Menu.tsx';
+import { Menu, MenuItem, MenuLink, MenuSeparator } from '../../../components/ui/Menu.tsx';
 import { ChainFormDialog } from '../../chain-form/ChainFormDialog.tsx';
-import { useBoardView } from '../view/BoardView.tsx';
+import { ShareDialog } from '../share/ShareDialog.tsx';
+import { OnWholeBoard, useBoardView } from '../view/BoardView.tsx';
 import { count } from '../view/words.ts';
 import { usePullDates } from './usePullDates.ts';
 
 /** Edit the shelf, pull its dates along, delete it. */
 export function ChainMenu({ chain }: { chain: Chain }) {
-  const [asked, setAsked] = useState<'edit' | 'delete' | null>(null);
+  const [asked, setAsked] = useState<'edit' | 'share' | 'delete' | null>(null);
+  const { path } = useBrewery();
   const close = () => setAsked(null);
   return (
     <>
@@ -29,15 +32,22 @@ export function ChainMenu({ chain }: { chain: Chain }) {
           ),
         }}
       >
+        <MenuLink to={path(`chains/${chain.id}`)}>Open the chain</MenuLink>
         <MenuItem onSelect={() => setAsked('edit')}>Edit the shelf</MenuItem>
+        <MenuItem onSelect={() => setAsked('share')}>Share</MenuItem>
         <PullItem chain={chain} />
         <MenuSeparator />
         <MenuItem danger onSelect={() => setAsked('delete')}>
           Delete the shelf
         </MenuItem>
       </Menu>
-      {asked === 'edit' && <ChainFormDialog chain={chain} onClose={close} />}
-      {asked === 'delete' && <DeleteChain chain={chain} onClose={close} />}
+      {asked !== null && (
+        <OnWholeBoard>
+          {asked === 'edit' && <ChainFormDialog chain={chain} onClose={close} />}
+          {asked === 'share' && <ShareDialog chain={chain} onClose={close} />}
+          {asked === 'delete' && <DeleteChain chain={chain} onClose={close} />}
+        </OnWholeBoard>
+      )}
     </>
   );
 }

@@ -3,7 +3,9 @@ import { formatMoney } from '#shared/units/money.ts';
 import { GenerationMarks } from '../../../components/drawn/GenerationMarks.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { generationLine, yeastLine } from '../view/words.ts';
+import { Descent } from '../../descent/Descent.tsx';
 import { ChainMenu } from './ChainMenu.tsx';
+import { ChainName, UnreadMark } from './ChainName.tsx';
 
 /** Name of the chain, its yeast, how far the yeast has come and what a batch costs. */
 export function ShelfLabel({ chain, headingId }: { chain: Chain; headingId: string }) {
@@ -13,14 +15,16 @@ export function ShelfLabel({ chain, headingId }: { chain: Chain; headingId: stri
   return (
     <div className="relative z-10 pt-3 pr-2">
       <h2 id={headingId} title={chain.name} className="line-clamp-3 text-shelf font-[680]">
-        {chain.name}
+        <ChainName chain={chain} />
       </h2>
+      <UnreadMark chain={chain} />
       {yeast && (
         <p className="mt-[3px] text-small text-ink2">
           {yeast.name !== chain.name && <span className="line-clamp-2">{yeast.name}</span>}
           {yeastLine(yeast, units)}
         </p>
       )}
+      <Descent chain={chain} />
       {verdicts && (
         <div className="mt-2 text-small leading-[1.35] text-ink2">
           <GenerationMarks generations={verdicts.generations} limit={verdicts.generationLimit} />

@@ -20,10 +20,13 @@ export interface BoardViewValue {
 }
 
 const BoardView = createContext<BoardViewValue | null>(null);
+const WholeBoardView = createContext<BoardViewValue | null>(null);
 
-const NOTHING: Abilities = {
+export const NOTHING: Abilities = {
   editBatches: false,
   moveBatches: false,
+  moveAcross: false,
+  setStages: false,
   editChains: false,
   editYeastsAndVessels: false,
   editSeason: false,
@@ -50,12 +53,26 @@ export function BoardViewProvider({ children }: { children: ReactNode }) {
     }),
     [board, judged, units, slug, online],
   );
-  return <BoardView value={value}>{children}</BoardView>;
+  return <BoardViewOf value={value}>{children}</BoardViewOf>;
+}
+
+/** The same parts for a board that comes from elsewhere, such as behind a link. */
+export function BoardViewOf({ value, children }: { value: BoardViewValue; children: ReactNode }) {
+  return (
+    <WholeBoardView value={value}>
+      <BoardView value={value}>{children}</BoardView>
+    </WholeBoardView>
+  );
 }
 
 /** For a part of the board: the view that it is drawn from. */
 export function BoardPartView({ view, children }: { view: BoardViewValue; children: ReactNode }) {
   return <BoardView value={view}>{children}</BoardView>;
+}
+
+/** For what a part of the board opens and what looks beyond that part: the whole board, as it is now. */
+export function OnWholeBoard({ children }: { children: ReactNode }) {
+  return <BoardView value={use(WholeBoardView)}>{children}</BoardView>;
 }
 
 export function useBoardView(): BoardViewValue {

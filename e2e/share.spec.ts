@@ -1,0 +1,171 @@
+import type { Page } from '@playwright/test';
+import { expectAccessible } from './support/axe.ts';
+import { writeBrewery } from './support/brewery.ts';
+import { sessionCookies } from './support/server.ts';
+import { expect, test, type Brewing } from './support/test.ts';
+
+const PLAN = {
+  shelves: [
+    {
+      name: 'Harbour ale',
+      batches: [
+        { name: 'Low Tide', brewOn: '2027-03-06', allergens: ['gluten' as const] },
+        {
+          name: 'Jetty Pale',
+          og: 1.052,
+          ibu: 38,
+          srm: 7,
+          brewOn: '2027-03-20',
+          allergens: ['gluten' as const, 'milk' as const],
+        },
+        { name: 'Spring Tide', og: 1.036, brewOn: '2027-04-03' },
+      ],
+    },
+    { name: 'Kveik shelf', batches: [{ name: 'Nobody’s business' }] },
+  ],
+};
+
+/** Makes a link on the board as the head brewer does, and reads its address. */
+async function makeLink(page: Page, brewery: Brewing, name = 'For the festival'): Promise<string> {
+  await page.goto(`/b/${brewery.slug}`);
+  await page.getByRole('button', { name: 'Shelf Harbour ale' }).click();
+  await page.getByRole('menuitem', { name: 'Share' }).click();
+  const dialog = page.getByRole('dialog', { name: 'Share Harbour ale' });
+  await dialog.getByRole('button', { name: 'Make a link' }).click();
+  await dialog.getByLabel('Whom or what it is for').fill(name);
+  await expectAccessible(page);
+  await dialog.getByRole('button', { name: 'Make the link' }).click();
+  const address = await dialog.getByLabel(`Link: ${name}`).inputValue();
+  await dialog.getByRole('button', { name: 'Done' }).click();
+  return address;
+}
+
+test('a link shows one chain to somebody without an account', async ({
+  board,
+  brewery,
+  browser,
+}) => {
+  await brewery.write(PLAN);
+  const address = await makeLink(board, brewery);
+  const visitor = await browser.newContext();
+  const page = await visitor.newPage();
+  await page.goto(address);
+  await expect(page.getByRole('heading', { level: 1, name: 'Harbour ale' })).toBeVisible();
+  const batches = page.getByRole('list', { name: 'Batches' });
+  await expect(batches.getByRole('heading')).toHaveText(['Low Tide', 'Jetty Pale', 'Spring Tide']);
+  await expect(page.getByLabel('What the chain carries')).toContainText('Gluten, milk.');
+  await expect(page.getByText('Nobody’s business')).toHaveCount(0);
+  await expect(page.locator('meta[name=robots]')).toHaveAttribute('content', 'noindex');
+  const held = page.getByRole('button', { name: 'Spring Tide onto Jetty Pale' });
+  await held.click();
+  await expect(page.getByRole('heading', { name: 'Hold: Undeclared allergen' })).toBeVisible();
+  await expect(page.getByText(/no dilution removes an allergen/)).toBeVisible();
+  await expectAccessible(page);
+  expect(await visitor.cookies()).toEqual([]);
+  await visitor.close();
+});
+
+test('a link that was withdrawn says so, and the list says how often it was opened', async ({
+  board,
+  brewery,
+  browser,
+}) => {
+  await brewery.write(PLAN);
+  const address = await makeLink(board, brewery);
+  const visitor = await browser.newContext();
+  const page = await visitor.newPage();
+  await page.goto(address);
+  await expect(page.getByRole('heading', { level: 1, name: 'Harbour ale' })).toBeVisible();
+  const links = board.getByRole('list', { name: 'Links' });
+  await board.reload();
+  await board.getByRole('button', { name: 'Shelf Harbour ale' }).click();
+  await board.getByRole('menuitem', { name: 'Share' }).click();
+  await expect(links).toContainText('opened 1 time');
+  await links.getByRole('button', { name: 'Withdraw For the festival' }).click();
+  await board.getByRole('button', { name: 'Withdraw the link' }).click();
+  await expect(links).toContainText('withdrawn');
+  await page.reload();
+  await expect(page.getByRole('heading', { name: 'This link is no longer good' })).toBeVisible();
+  await expectAccessible(page);
+  await visitor.close();
+});
+
+test('somebody of another brewery copies a chain onto their own board', async ({
+  board,
+  brewery,
+  browser,
+  db,
+  server,
+}) => {
+  await brewery.write(PLAN);
+  const address = await makeLink(board, brewery);
+  const own = await writeBrewery(db, 'Estuary Ales');
+  const context = await browser.newContext();
+  await context.addCookies(sessionCookies(server, own.members.brewer.token));
+  const page = await context.newPage();
+  await page.goto(address);
+  await page.getByRole('button', { name: 'Copy into my brewery' }).click();
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Copy it' }).click();
+  await expect(page).toHaveURL(new RegExp(`/b/${own.slug}$`));
+  const shelf = page.getByRole('list', { name: 'Batches on Harbour ale' });
+  await expect(shelf.getByRole('heading')).toHaveText(['Low Tide', 'Jetty Pale', 'Spring Tide']);
+  await context.close();
+});
+
+test('a guest brewer moves and edits on their own board what belongs to another brewery', async ({
+  board,
+  brewery,
+  browser,
+  db,
+  server,
+}) => {
+  await brewery.write(PLAN);
+  await board.goto(`/b/${brewery.slug}`);
+  await board.getByRole('button', { name: 'Shelf Harbour ale' }).click();
+  await board.getByRole('menuitem', { name: 'Share' }).click();
+  await board.getByRole('button', { name: 'Invite a guest' }).click();
+  const invitation = await board.getByLabel('Invitation for a guest brewer').inputValue();
+  const own = await writeBrewery(db, 'Estuary Ales');
+  const context = await browser.newContext();
+  await context.addCookies(sessionCookies(server, own.members['head-brewer'].token));
+  const page = await context.newPage();
+  await page.goto(invitation);
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Put it on my board' }).click();
+  const shelf = page.getByRole('region', { name: /^Harbour ale from Reedbed Brewing/ });
+  await expect(shelf).toContainText('as brewer');
+  await expect(page.getByText('Nobody’s business')).toHaveCount(0);
+  await expectAccessible(page);
+
+  await shelf.getByRole('button', { name: 'Move Low Tide' }).click();
+  const places = page.getByRole('dialog', { name: /Low Tide/ });
+  await expect(places.getByText('New shelf')).toHaveCount(0);
+  await expect(places.getByText(/bench/i)).toHaveCount(0);
+  await places
+    .getByRole('button', { name: /Jetty Pale/ })
+    .first()
+    .click();
+  const names = () =>
+    shelf.getByRole('list', { name: 'Batches on Harbour ale' }).getByRole('heading');
+  await expect(names()).toHaveText(['Jetty Pale', 'Low Tide', 'Spring Tide']);
+
+  await shelf.getByRole('button', { name: 'Low Tide', exact: true }).click();
+  await page.getByLabel('Bitterness').fill('27');
+  await page.getByRole('button', { name: 'Save' }).click();
+  await expect(shelf).toContainText('27 IBU');
+
+  await board.reload();
+  const theirs = board.getByRole('list', { name: 'Batches on Harbour ale' });
+  await expect(theirs.getByRole('heading')).toHaveText(['Jetty Pale', 'Low Tide', 'Spring Tide']);
+  await expect(theirs).toContainText('27 IBU');
+
+  await board.getByRole('button', { name: 'Shelf Harbour ale' }).click();
+  await board.getByRole('menuitem', { name: 'Share' }).click();
+  await board.getByRole('button', { name: /^Withdraw: Orla Finch/ }).click();
+  await board.getByRole('button', { name: 'End the access' }).click();
+  await expect(board.getByRole('list', { name: 'Guests' })).toContainText('ended');
+  await page.reload();
+  await expect(shelf).toHaveCount(0);
+  await context.close();
+});

@@ -1,0 +1,132 @@
+import { randomUUID } from 'node:crypto';
+import type { Response } from 'express';
+import type { Clock } from '../clock.ts';
+import type { Config } from '../config.ts';
+import type { Db } from '../db/client.ts';
+import type { Log } from '../log.ts';
+import { guestSeasons, outcasts, revisionsOf } from './admission.ts';
+import { createArrivals } from './arrivals.ts';
+import { listen } from './listener.ts';
+import type { Note } from './note.ts';
+import { openStream, type Stream, type Watcher } from './stream.ts';
+import { createStreams, type Streams } from './streams.ts';
+
+export interface LiveDeps {
+  config: Pick<Config, 'listenUrl' | 'heartbeatMs'>;
+  db: Db;
+  clock: Clock;
+  log: Log;
+}
+
+/** The open streams of this process, and what wakes them. Nothing of it matters when it is gone. */
+export interface Live {
+  /** Answers with a stream that stays open. */
+  open(res: Response, watcher: Omit<Watcher, 'streamId'>, since?: number): void;
+  /** Ends all streams, so that a server can stop; the clients come back elsewhere. */
+  close(): Promise<void>;
+}
+
+/** Streams begin anew now and then: a client that silently went away is then no longer here. */
+const LONGEST_MS = 10 * 60_000;
+
+interface Scene extends LiveDeps {
+  streams: Streams;
+}
+
+export function startLive(deps: LiveDeps): Live {
+  const { config, log } = deps;
+  const scene = { ...deps, streams: createStreams() };
+  const { streams } = scene;
+  const arrivals = createArrivals(scene);
+  let isClosed = false;
+  const tried = (what: string, work: Promise<unknown>) =>
+    void work.catch((error: unknown) => {
+      if (!isClosed) log.warn({ err: error }, what);
+    });
+  const listener = listen(config.listenUrl, {
+    log,
+    onNote(note) {
+      if (note.kind === 'here') arrivals.changed(note.seasonId);
+      else if (note.kind === 'season') tellRevision(streams, note);
+      else tried('Streams not checked', expel(scene, streams.ofPerson(note.personId)));
+    },
+    onListening() {
+      tried('Streams not caught up', catchUp(scene, streams.seasons()));
+      for (const seasonId of streams.seasons()) arrivals.changed(seasonId);
+    },
+  });
+  const beating = setInterval(() => {
+    listener.check();
+    beat(streams);
+    tried(
+      'Streams not checked',
+      expel(scene, streams.all()).then(() => follow(scene)),
+    );
+    tried('Presence not renewed', arrivals.renew());
+  }, config.heartbeatMs);
+
+  return {
+    open(res, watcher, since = -1) {
+      // Gone while it was found out who asks.
+      if (!res.socket || res.socket.destroyed) return;
+      const stream = openStream(res, { ...watcher, streamId: randomUUID() });
+      stream.revision = since;
+      stream.send('hello', { beatMs: config.heartbeatMs });
+      // In the hub first, then the revision is read: what comes between is told twice, never missed.
+      streams.add(stream);
+      arrivals.come(stream);
+      tried('Stream not caught up', catchUp(scene, [stream.seasonId], stream));
+      tried('Stream without guests', follow(scene));
+      res.on('close', () => {
+        streams.remove(stream);
+        arrivals.go(stream);
+      });
+      if (isClosed) stream.end();
+    },
+    async close() {
+      isClosed = true;
+      clearInterval(beating);
+      for (const stream of streams.all()) stream.end();
+      await Promise.all([listener.close(), arrivals.close().catch(() => undefined)]);
+    },
+  };
+}
+
+function beat(streams: Streams): void {
+  const now = performance.now();
+  for (const stream of streams.all()) {
+    if (now - stream.since > LONGEST_MS) stream.end();
+    else stream.beat();
+  }
+}
+
+function tellRevision(streams: Streams, note: Extract<Note, { kind: 'season' }>): void {
+  for (const stream of streams.ofSeason(note.seasonId)) advance(stream, note.revision);
+  for (const stream of streams.guestsOf(note.seasonId)) stream.send('elsewhere', {});
+}
+
+function advance(stream: Stream, revision: number): void {
+  if (revision <= stream.revision) return;
+  stream.revision = revision;
+  stream.send('revision', { revision });
+}
+
+/** Tells where the seasons are now; nobody who is there already hears of it. */
+async function catchUp({ db, streams }: Scene, seasonIds: string[], only?: Stream): Promise<void> {
+  for (const { id, revision } of await revisionsOf(db, seasonIds))
+    for (const stream of only ? [only] : streams.ofSeason(id)) advance(stream, revision);
+}
+
+/** Ends the streams of those who are signed out, or no longer of the brewery. */
+async function expel({ db, clock }: Scene, streams: readonly Stream[]): Promise<void> {
+  const out = await outcasts(db, clock, streams);
+  for (const stream of streams) {
+    const why = out.get(stream.streamId);
+    if (why) stream.end(why);
+  }
+}
+
+async function follow({ db, streams }: Scene): Promise<void> {
+  const breweries = [...new Set(streams.all().map(({ breweryId }) => breweryId))];
+  streams.setGuestSeasons(await guestSeasons(db, breweries));
+}

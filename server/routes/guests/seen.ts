@@ -1,0 +1,89 @@
+import type { Batch } from '#shared/api/batch.ts';
+import type { Moved } from '#shared/api/move.ts';
+import { chainAlone } from '#shared/chain/chainAlone.ts';
+import type { GuestChains } from '../../auth/guests.ts';
+import type { Member } from '../../auth/whoAsks.ts';
+import { notFound, problem, ProblemError } from '../../problems.ts';
+import type { Command } from '../board/changeBoard.ts';
+import type { BoardNow } from '../board/hand.ts';
+import { demandStock, one } from '../board/find.ts';
+import { ofBrewery } from '../share/present.ts';
+
+/** The board as its reader may see it: for a guest their chains, their yeasts and vessels, no prices and no people. */
+export function seenBy<B extends BoardNow>({ guestOf, brewery }: Member, board: B): B {
+  if (!guestOf) return board;
+  const alone = [...guestOf.keys()].flatMap((id) => chainAlone(board, id) ?? []);
+  const ids = (rows: readonly { id: string }[]) => new Set(rows.map(({ id }) => id));
+  const yeasts = ids(alone.flatMap((each) => each.yeasts));
+  const vessels = ids(alone.flatMap((each) => each.vessels));
+  return {
+    ...board,
+    season: { ...board.season, name: brewery.name },
+    members: [],
+    yeasts: board.yeasts
+      .filter(({ id }) => yeasts.has(id))
+      .map((yeast) => ({ ...yeast, packPrice: null })),
+    vessels: board.vessels.filter(({ id }) => vessels.has(id)),
+    chains: alone.map(({ chain }) => {
+      const { start } = chain;
+      return { ...chain, start: 'price' in start ? { ...start, price: null } : start };
+    }),
+    batches: alone.flatMap(({ batches }) => batches.map((row) => seenBatch(row, brewery.name))),
+  };
+}
+
+const seenBatch = (row: Batch, breweryName: string): Batch => ({
+  ...row,
+  link: { ...row.link, acceptance: ofBrewery(row.link.acceptance, breweryName) },
+});
+
+/** A chain of which somebody is no guest does not exist; in one that they may only taste nothing is changed. */
+export function demandBrews(chains: GuestChains, chainId: string | null): void {
+  const role = chainId === null ? undefined : chains.get(chainId);
+  if (role === undefined) throw notFound();
+  if (role !== 'brewer') throw problem('not-allowed');
+}
+
+/** An edit of one batch, kept within the guest's chain; what it answers with is kept within it too. */
+export function withinChain(
+  { guestOf }: Member,
+  batchId: string,
+  patch: { yeastId?: string | null | undefined; vesselId?: string | null | undefined },
+  command: Command,
+): Command {
+  if (!guestOf) return command;
+  return async (hand) => {
+    const seen = seenBy(hand.member, hand.board);
+    const row = one(seen.batches, batchId);
+    demandBrews(guestOf, row.chainId);
+    demandStock(seen, patch);
+    try {
+      return await command(hand);
+    } catch (error) {
+      throw withCurrent(error, row);
+    }
+  };
+}
+
+/** A conflict shows the row as the guest may see it. */
+export function withCurrent(error: unknown, row: Batch): unknown {
+  if (!(error instanceof ProblemError) || error.options.current === undefined) return error;
+  return new ProblemError(error.kind, { ...error.options, current: row });
+}
+
+/** What a change did, as far as it is on the guest's chains. Shelves are read anew with the board. */
+export function seenMoved({ guestOf, brewery }: Member, moved: Moved): Moved {
+  if (!guestOf) return moved;
+  const batches = moved.batches
+    .filter(({ chainId }) => chainId !== null && guestOf.has(chainId))
+    .map((row) => seenBatch(row, brewery.name));
+  const own = new Set(batches.map(({ id }) => id));
+  return {
+    ...moved,
+    batches,
+    chains: [],
+    removedChainIds: [],
+    shifted: moved.shifted.filter(({ batchId }) => own.has(batchId)),
+    cleared: moved.cleared.filter((id) => own.has(id)),
+  };
+}

@@ -1,0 +1,63 @@
+import type { UnitPrefs } from '../api/units.ts';
+import type { LinkAnswer } from '../rules/answer.ts';
+import type { Verdict } from '../rules/vocabulary.ts';
+import type { BoardFacts } from './board.ts';
+import { sightOf } from './boardLink.ts';
+import { checkLink } from './checkLink.ts';
+import { judgeBoard } from './judgeBoard.ts';
+import { linkInput } from './linkInput.ts';
+
+/** What a link says: its verdict, and the title of the finding that it comes from. */
+export interface LinkSaying {
+  verdict: Verdict;
+  /** Null: nothing speaks against it. */
+  reason: string | null;
+}
+
+/** A link whose verdict differs between two boards. */
+export interface LinkChange {
+  /** The later batch of the link. */
+  batchId: string;
+  name: string;
+  /** Null: there was no link, or is none. */
+  from: LinkSaying | null;
+  to: LinkSaying | null;
+}
+
+export const sayingOf = ({ verdict, findings }: LinkAnswer): LinkSaying => ({
+  verdict,
+  reason: findings.find((finding) => finding.verdict === verdict)?.title ?? null,
+});
+
+/** What the link into a batch says; null where no cake goes under it. */
+export function linkSaying(board: BoardFacts, batchId: string): LinkSaying | null {
+  const input = linkInput(batchId, sightOf(board));
+  return input && sayingOf(checkLink(input));
+}
+
+const nameIn = (boards: readonly BoardFacts[], id: string): string =>
+  boards.flatMap(({ batches }) => batches).find((batch) => batch.id === id)?.name ?? '';
+
+/** What the link into one batch said before and says now, whether or not that differs. */
+export const linkChange = (before: BoardFacts, after: BoardFacts, batchId: string): LinkChange => ({
+  batchId,
+  name: nameIn([after, before], batchId),
+  from: linkSaying(before, batchId),
+  to: linkSaying(after, batchId),
+});
+
+/** Links whose verdict or worst reason differs, in the order of the later board's shelves. */
+export function linkChanges(
+  before: BoardFacts,
+  after: BoardFacts,
+  units?: UnitPrefs,
+): LinkChange[] {
+  const [was, is] = [judgeBoard(before, units).links, judgeBoard(after, units).links];
+  return [...new Set([...is.keys(), ...was.keys()])].flatMap((batchId) => {
+    const [old, now] = [was.get(batchId), is.get(batchId)];
+    const from = old ? sayingOf(old) : null;
+    const to = now ? sayingOf(now) : null;
+    const same = from?.verdict === to?.verdict && from?.reason === to?.reason;
+    return same ? [] : [{ batchId, name: nameIn([after, before], batchId), from, to }];
+  });
+}

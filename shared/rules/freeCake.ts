@@ -1,0 +1,10 @@
+import type { PourFacts } from './facts.ts';
+
+/** What of a cake is left when the parts of other worts are taken off, litres. */
+export function freeCakeL(
+  wholeL: number | undefined,
+  { sharedWith = [] }: Pick<PourFacts, 'sharedWith'>,
+): number | undefined {
+  if (wholeL === undefined) return undefined;
+  return Math.max(0, wholeL - sharedWith.reduce((sum, { litres }) => sum + litres, 0));
+}

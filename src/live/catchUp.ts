@@ -1,0 +1,80 @@
+import type { QueryClient } from '@tanstack/react-query';
+import { boardQuery } from '../api/board.ts';
+import { pendingOf } from '../api/pendingStore.ts';
+import { boardStillness } from '../api/stillness.ts';
+
+export interface CatchUp {
+  /** The server is at this revision. */
+  heard(revision: number): void;
+  /** Something that the revision does not count changed: a chain that is here as a guest. */
+  elsewhere(): void;
+  /** At each heartbeat: a read that failed is tried again. */
+  again(): void;
+}
+
+/**
+ * Reads the board anew where the server is ahead of it. A read that is under way already, or moves
+ * of one's own that are, are waited for: mostly they bring what was heard of. What is read waits for
+ * the end of a drag by itself (`boardQuery`).
+ */
+export function createCatchUp(client: QueryClient, slug: string): CatchUp {
+  const { queryKey } = boardQuery(slug);
+  let wanted = -1;
+  let isForced = false;
+  let isWorking = false;
+
+  const isBehind = () => {
+    const board = client.getQueryData(queryKey);
+    return board !== undefined && (isForced || board.season.revision < wanted);
+  };
+  const work = async () => {
+    // A read that waits for the end of a drag is older than what was heard since.
+    if (isWorking && boardStillness.isHeld()) void client.invalidateQueries({ queryKey });
+    if (isWorking) return;
+    isWorking = true;
+    await atRest(client, slug);
+    while (isBehind()) {
+      isForced = false;
+      await client.invalidateQueries({ queryKey });
+      // Without a connection the next reads come when it is back.
+      if (client.getQueryState(queryKey)?.status === 'error') break;
+      await atRest(client, slug);
+    }
+    isWorking = false;
+  };
+  return {
+    heard(revision) {
+      wanted = Math.max(wanted, revision);
+      void work();
+    },
+    elsewhere() {
+      isForced = true;
+      void work();
+    },
+    again: () => void work(),
+  };
+}
+
+async function atRest(client: QueryClient, slug: string): Promise<void> {
+  const { queryKey } = boardQuery(slug);
+  const pending = pendingOf(slug);
+  await until(
+    () => pending.get().length === 0,
+    (look) => pending.subscribe(look),
+  );
+  await until(
+    () => client.getQueryState(queryKey)?.fetchStatus !== 'fetching',
+    (look) => client.getQueryCache().subscribe(look),
+  );
+}
+
+function until(holds: () => boolean, subscribe: (look: () => void) => () => void): Promise<void> {
+  if (holds()) return Promise.resolve();
+  return new Promise((resolve) => {
+    const stop = subscribe(() => {
+      if (!holds()) return;
+      stop();
+      resolve();
+    });
+  });
+}
