@@ -28,21 +28,11 @@ const blowOff: Piece = ({ kept: { ratio = 0 } }) =>
     ? `The kept cake holds ${atMost(ratio, 1)} times the cells that are needed: use a blow-off tube of 25 mm or more.`
     : null;
 
-/** Below this share of the cake the recommended part leaves enough to be worth a jar. */
-const CLEARLY_LESS = 0.8;
-
-const TOO_MUCH = 'Too much yeast does less harm than too little, but it flattens character.';
-
-const surplus: Piece = ({ kept: { keptL, share }, cake, recommended }, _names, say) => {
-  if (keptL === undefined || share === undefined || share === 0 || cake === undefined) return null;
-  const whole = cake.volumeL.likely;
-  if (share < 0.99)
-    return `The other ${say.part(whole - keptL)} of cake could be jarred, lid loose. ${TOO_MUCH}`;
-  const enough = recommended?.litres ?? 0;
-  return enough > 0 && enough < CLEARLY_LESS * whole
-    ? `${say.part(enough)} is enough; the other ${say.part(whole - enough)} could be jarred, lid loose. ${TOO_MUCH}`
+const surplus: Piece = ({ kept: { keptL, share }, cake }, _names, say) =>
+  keptL !== undefined && share !== undefined && share > 0 && share < 0.99 && cake !== undefined
+    ? `The other ${say.part(cake.volumeL.likely - keptL)} of cake could be jarred, lid loose. ` +
+      'Too much yeast does less harm than too little, but it flattens character.'
     : null;
-};
 
 const measureCake: Piece = ({ cake, kept: { ratio, share }, need }, { b }) => {
   if (cake?.viableCells === undefined || ratio === undefined || ratio < 1) return null;
