@@ -1,6 +1,6 @@
 import type { Day, Verdict } from '../rules/vocabulary.ts';
+import type { Gap } from './gap.ts';
 import type { Place } from './gapPlaces.ts';
-import type { Gap } from './gaps.ts';
 import type { Lock } from './plan.ts';
 import type { Judgement } from './trial/judgement.ts';
 import type { ChangedLink } from './weigh.ts';

@@ -1,4 +1,4 @@
-import { useMemo, useRef } from 'react';
+import { useMemo, useState } from 'react';
 import type { Chain } from '#shared/api/chain.ts';
 import type { BoardViewValue } from './BoardView.tsx';
 import { vesselOf } from './drawing.ts';
@@ -31,20 +31,26 @@ interface Kept {
   view: BoardViewValue;
 }
 
+/** Remembers of each shelf the view it was last drawn from. */
+function shelfViewKeeper() {
+  let kept: ReadonlyMap<string, Kept> = new Map();
+  return (view: BoardViewValue): ReadonlyMap<string, BoardViewValue> => {
+    const now = new Map<string, Kept>();
+    for (const chain of view.index.chains) {
+      const concerns = concernsOf(view, chain);
+      const before = kept.get(chain.id);
+      now.set(chain.id, before && areSame(before.concerns, concerns) ? before : { concerns, view });
+    }
+    kept = now;
+    return new Map([...now].map(([id, one]) => [id, one.view]));
+  };
+}
+
 /**
  * The board as each shelf shows it: the same object for as long as nothing changes on that shelf, so
  * that a move draws two shelves anew and not all of them. What it holds of other shelves may be old.
  */
 export function useShelfViews(view: BoardViewValue): ReadonlyMap<string, BoardViewValue> {
-  const before = useRef<ReadonlyMap<string, Kept>>(new Map());
-  return useMemo(() => {
-    const now = new Map<string, Kept>();
-    for (const chain of view.index.chains) {
-      const concerns = concernsOf(view, chain);
-      const kept = before.current.get(chain.id);
-      now.set(chain.id, kept && areSame(kept.concerns, concerns) ? kept : { concerns, view });
-    }
-    before.current = now;
-    return new Map([...now].map(([id, kept]) => [id, kept.view]));
-  }, [view]);
+  const [viewsOf] = useState(shelfViewKeeper);
+  return useMemo(() => viewsOf(view), [viewsOf, view]);
 }
