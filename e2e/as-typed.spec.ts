@@ -68,7 +68,9 @@ test('other units show the same beer, and back again the figure as it was typed'
       const saved = page.waitForResponse(
         (answer) => answer.url().endsWith('/api/account') && answer.request().method() === 'PATCH',
       );
-      await page.getByRole('radio', { name, exact: true }).check();
+      const radio = page.getByRole('radio', { name, exact: true });
+      await radio.click();
+      await expect(radio).toBeChecked();
       expect((await saved).status()).toBe(200);
     }
     await page.goto(address);

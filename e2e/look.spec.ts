@@ -17,7 +17,7 @@ test('a chosen theme stands from the first paint on', async ({ board: page, brew
   await brewery.write(SAMPLE);
   await page.goto(`/b/${brewery.slug}/account`);
   const saved = page.waitForResponse((answer) => answer.url().endsWith('/api/account'));
-  await page.getByRole('radio', { name: 'Dark' }).check();
+  await page.getByRole('radio', { name: 'Dark' }).click();
   expect((await saved).status()).toBe(200);
   await expect.poll(async () => lightness(await ground(page))).toBeLessThan(80);
 

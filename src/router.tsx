@@ -1,5 +1,5 @@
 import { createBrowserRouter } from 'react-router-dom';
-import { lazyPage } from './app/lazyPage.ts';
+import { lazyPage, tellTheWay } from './app/lazyPage.ts';
 import { Root } from './app/Root.tsx';
 import { ErrorPage } from './routes/error/ErrorPage.tsx';
 import { NotFoundPage } from './routes/error/NotFoundPage.tsx';
@@ -108,3 +108,8 @@ export const router = createBrowserRouter([
     ],
   },
 ]);
+
+tellTheWay(() => {
+  const { location } = router.state.navigation;
+  return location ? location.pathname + location.search : null;
+});

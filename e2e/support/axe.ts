@@ -15,12 +15,13 @@ export async function expectContrast(page: Page): Promise<void> {
 
 async function expectNone(builder: AxeBuilder): Promise<void> {
   // There are no frames here: without the search for them it is twice as fast.
-  const { violations, passes } = await builder.setLegacyMode().analyze();
+  const { violations, passes, incomplete } = await builder.setLegacyMode().analyze();
   const told = violations.map(({ id, help, nodes }) => ({
     id,
     help,
     where: nodes.slice(0, 5).map((node) => `${node.target.join(' ')} ${node.failureSummary ?? ''}`),
   }));
   expect(told, 'accessibility violations').toEqual([]);
-  expect(passes.length, 'rules that found something to look at').toBeGreaterThan(0);
+  const lookedAt = passes.length + incomplete.length;
+  expect(lookedAt, 'rules that found something to look at').toBeGreaterThan(0);
 }

@@ -24,6 +24,7 @@ export async function lift(page: Page, handle: Locator): Promise<void> {
 /** Carries a lifted batch over a gap; the button stays down, so that the verdict can be read. */
 export async function carryOver(page: Page, gap: Locator): Promise<void> {
   await expect(gap).toHaveAttribute('data-gap-open', /./);
+  await expect(gap).toBeVisible();
   const { x, y } = await middle(gap);
   await page.mouse.move(x, y, { steps: 15 });
 }

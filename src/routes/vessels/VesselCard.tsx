@@ -13,7 +13,7 @@ import { contentOf } from './contentOf.ts';
 export function VesselCard({ vessel, onEdit }: { vessel: VesselRow; onEdit?: () => void }) {
   const content = contentOf(useBoard(), vessel.id);
   return (
-    <li className="flex min-w-0 gap-5 rounded-card border-[1.5px] border-line bg-paper p-5">
+    <li className="flex min-w-0 gap-5 overflow-clip rounded-card border-[1.5px] border-line bg-paper p-5">
       <div className="shrink-0 self-end">
         <Vessel
           shape={vessel.shape}

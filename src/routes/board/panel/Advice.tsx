@@ -1,4 +1,5 @@
 import type { Advice as AdviceText } from '#shared/rules/answer.ts';
+import { unbroken } from '../../../app/unbroken.ts';
 import { PanelPart } from './PanelFrame.tsx';
 
 /** Advice is no verdict: it stands after them. The surplus is told beside the kept part. */
@@ -9,7 +10,7 @@ export function Advice({ advice }: { advice: readonly AdviceText[] }) {
     <PanelPart title="On the brew day">
       <ul className="mt-1 list-disc space-y-1 pl-5 text-ink2 marker:text-edge">
         {told.map((item) => (
-          <li key={item.id}>{item.text}</li>
+          <li key={item.id}>{unbroken(item.text)}</li>
         ))}
       </ul>
     </PanelPart>

@@ -1,4 +1,5 @@
 import type { Finding } from '#shared/rules/answer.ts';
+import { unbroken } from '../../../app/unbroken.ts';
 import { VerdictMark } from '../../../components/drawn/VerdictMark.tsx';
 import { VERDICT_WORDS } from '../../../components/drawn/verdictWords.ts';
 import { MeasureList } from './MeasureList.tsx';
@@ -18,12 +19,12 @@ export function FindingBlock({ finding }: { finding: Finding }) {
         </span>
       }
     >
-      <p className="mt-1 text-ink2">{finding.because}</p>
+      <p className="mt-1 text-ink2">{unbroken(finding.because)}</p>
       <p className="mt-1 text-ink2">
-        <b className="text-ink">Do:</b> {lowerFirst(finding.do)}
+        <b className="text-ink">Do:</b> {unbroken(lowerFirst(finding.do))}
       </p>
       <MeasureList measures={finding.measures} />
-      <p className="mt-1.5 text-label text-ink2">Rests on: {finding.basis}</p>
+      <p className="mt-1.5 text-label text-ink2">Rests on: {unbroken(finding.basis)}</p>
     </PanelPart>
   );
 }

@@ -2,6 +2,7 @@ import type { Chain } from '#shared/api/chain.ts';
 import { formatMoney } from '#shared/units/money.ts';
 import { BestMove } from '../head/BestMove.tsx';
 import { UndoButtons } from '../lift/UndoButtons.tsx';
+import { GapSlot } from '../lift/GapSlot.tsx';
 import { useUnfolding } from '../lift/useUnfolding.ts';
 import { Descent } from '../../descent/Descent.tsx';
 import { ChainMenu } from '../shelf/ChainMenu.tsx';
@@ -13,7 +14,7 @@ import { PhoneHead } from './PhoneHead.tsx';
 
 export function PhoneChain({ chain }: { chain: Chain }) {
   const { board, index, judged, units, can } = useBoardView();
-  const ref = useUnfolding<HTMLOListElement>(chain.id);
+  const ref = useUnfolding<HTMLDivElement>(chain.id);
   const batches = index.batchesOf(chain.id);
   const verdicts = judged.chains.get(chain.id);
   const yeast = index.yeasts.get(chain.yeastId);
@@ -38,11 +39,14 @@ export function PhoneChain({ chain }: { chain: Chain }) {
           <ChainMenu chain={chain} />
         </div>
       )}
-      <ol ref={ref} className="mt-3 ml-[18px]" aria-label={`Batches on ${chain.name}`}>
-        {batches.map((batch, place) => (
-          <PhoneBatch key={batch.id} batch={batch} next={batches[place + 1]} />
-        ))}
-      </ol>
+      <div ref={ref} className="relative mt-3">
+        <FirstGap chain={chain} />
+        <ol className="ml-[18px]" aria-label={`Batches on ${chain.name}`}>
+          {batches.map((batch, place) => (
+            <PhoneBatch key={batch.id} batch={batch} next={batches[place + 1]} />
+          ))}
+        </ol>
+      </div>
       {batches.length === 0 && (
         <p className="mx-[18px] mt-2 rounded-xl border-[1.5px] border-dashed border-edge px-4 py-3 text-ink2">
           No batch yet. Take one from the bench and move it here.
@@ -60,5 +64,16 @@ export function PhoneChain({ chain }: { chain: Chain }) {
         )}
       </footer>
     </>
+  );
+}
+
+/** The place before the first batch: while one is lifted it lies over the shelf's own menu. */
+function FirstGap({ chain }: { chain: Chain }) {
+  const { index } = useBoardView();
+  const { shape } = index.vessels.get(chain.vesselId ?? '') ?? { shape: 'bucket' as const };
+  return (
+    <div className="pointer-events-none absolute inset-x-[18px] -top-14 z-[2] h-14 lifting:pointer-events-auto">
+      <GapSlot layout="bar" gapKey={`${chain.id}:first`} vesselShape={shape} />
+    </div>
   );
 }

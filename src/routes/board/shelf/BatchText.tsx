@@ -1,4 +1,5 @@
 import type { Batch } from '#shared/api/batch.ts';
+import { unbroken } from '../../../app/unbroken.ts';
 import { StageMark } from '../../../components/drawn/StageMark.tsx';
 import { BatchActions } from '../batch/BatchActions.tsx';
 import { BatchName } from '../batch/BatchName.tsx';
@@ -21,7 +22,7 @@ export function BatchText({ batch }: { batch: Batch }) {
         </p>
       )}
       <p className="mt-0.5 text-[0.8125rem] leading-[1.3] tracking-[-0.015em] text-ink2">
-        <b className="text-ink">{gravity}</b> {rest.join(' ')}
+        <b className="text-ink">{gravity && unbroken(gravity)}</b> {rest.map(unbroken).join(' ')}
       </p>
       <p className="mt-0.5 flex items-center gap-1.5 text-small whitespace-nowrap text-ink2">
         <StageMark stage={batch.stage} />

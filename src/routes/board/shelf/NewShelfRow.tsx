@@ -9,7 +9,7 @@ export function NewShelfRow() {
     <section
       ref={ref}
       aria-label="New shelf"
-      className="hidden grid-cols-[148px_minmax(0,1fr)] lifting:grid"
+      className="hidden grid-cols-[148px_minmax(0,1fr)] data-lifting:grid"
     >
       <p className="pt-3 font-display text-shelf font-[680] tracking-[-0.02em] text-ink2">
         New shelf

@@ -1,5 +1,6 @@
 import type { Chain } from '#shared/api/chain.ts';
 import { formatMoney } from '#shared/units/money.ts';
+import { unbroken } from '../../../app/unbroken.ts';
 import { GenerationMarks } from '../../../components/drawn/GenerationMarks.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { generationLine, yeastLine } from '../view/words.ts';
@@ -21,7 +22,7 @@ export function ShelfLabel({ chain, headingId }: { chain: Chain; headingId: stri
       {yeast && (
         <p className="mt-[3px] text-small text-ink2">
           {yeast.name !== chain.name && <span className="line-clamp-2">{yeast.name}</span>}
-          {yeastLine(yeast, units)}
+          {unbroken(yeastLine(yeast, units))}
         </p>
       )}
       <Descent chain={chain} />
