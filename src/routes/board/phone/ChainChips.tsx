@@ -56,7 +56,7 @@ function Chip({ name, verdict, isChosen, onChoose }: ChipProps) {
       >
         <span className="truncate">{name}</span>
         {verdict === 'hold' && (
-          <span className={isChosen ? '' : 'text-hold'}>
+          <span className={isChosen ? '[--in-badge:var(--ink)]' : 'text-hold'}>
             <VerdictMark verdict={verdict} size={15} />
             <span className="sr-only">, {VERDICT_WORDS[verdict]}</span>
           </span>
