@@ -1,52 +1,70 @@
-/** Addresses of the API, in one place for server, pages and tests. `:brewery` is the slug. */
-const b = (slug: string) => `/api/breweries/${encodeURIComponent(slug)}`;
+/**
+ * Addresses of the API, in one place for server, pages and tests. A place is a brewery's slug, or
+ * `slug/seasons/id` for a season that is not the current one; `:brewery` is the slug.
+ */
+const b = (place: string) => `/api/breweries/${encodeURIComponent(slugOf(place))}`;
+
+/** What is read and changed in a season: the one that the place names, else the current one. */
+const at = (place: string, rest: string) => {
+  const season = seasonOf(place);
+  return `${b(place)}${rest}${season === null ? '' : `?season=${season}`}`;
+};
+
+const WITH_SEASON = '/seasons/';
+export const slugOf = (place: string): string => place.split(WITH_SEASON)[0] ?? place;
+export const seasonOf = (place: string): string | null => place.split(WITH_SEASON)[1] ?? null;
+export const placeOf = (slug: string, seasonId: string | null | undefined): string =>
+  seasonId ? `${slug}${WITH_SEASON}${seasonId}` : slug;
 
 export const api = {
   account: '/api/account',
   session: '/api/session',
   join: (token: string) => `/api/join/${encodeURIComponent(token)}`,
-  brewery: (slug: string) => b(slug),
-  members: (slug: string) => `${b(slug)}/members`,
-  joinLinks: (slug: string) => `${b(slug)}/join-links`,
-  joinLink: (slug: string, id: string) => `${b(slug)}/join-links/${id}`,
-  board: (slug: string) => `${b(slug)}/board`,
+  brewery: (slug: string) => at(slug, ''),
+  members: (slug: string) => at(slug, '/members'),
+  joinLinks: (slug: string) => at(slug, '/join-links'),
+  joinLink: (slug: string, id: string) => at(slug, `/join-links/${id}`),
+  board: (slug: string) => at(slug, '/board'),
+  seasons: (slug: string) => at(slug, '/seasons'),
+  seasonArchive: (slug: string, id: string) => `${b(slug)}/seasons/${id}/archive`,
+  currentSeason: (slug: string, id: string) => `${b(slug)}/seasons/${id}/current`,
   season: (slug: string, id: string) => `${b(slug)}/seasons/${id}`,
   /** Server-Sent Events. */
   seasonEvents: (slug: string, id: string) => `${b(slug)}/seasons/${id}/events`,
   /** Everything that happened in a season, newest first. */
   changes: (slug: string, seasonId: string) => `${b(slug)}/seasons/${seasonId}/changes`,
-  houseRules: (slug: string) => `${b(slug)}/house-rules`,
-  yeasts: (slug: string) => `${b(slug)}/yeasts`,
-  yeast: (slug: string, id: string) => `${b(slug)}/yeasts/${id}`,
-  vessels: (slug: string) => `${b(slug)}/vessels`,
-  vessel: (slug: string, id: string) => `${b(slug)}/vessels/${id}`,
-  chains: (slug: string) => `${b(slug)}/chains`,
-  chain: (slug: string, id: string) => `${b(slug)}/chains/${id}`,
-  pullDates: (slug: string, id: string) => `${b(slug)}/chains/${id}/pull`,
+  houseRules: (slug: string) => at(slug, '/house-rules'),
+  yeasts: (slug: string) => at(slug, '/yeasts'),
+  yeast: (slug: string, id: string) => at(slug, `/yeasts/${id}`),
+  vessels: (slug: string) => at(slug, '/vessels'),
+  vessel: (slug: string, id: string) => at(slug, `/vessels/${id}`),
+  chains: (slug: string) => at(slug, '/chains'),
+  chain: (slug: string, id: string) => at(slug, `/chains/${id}`),
+  pullDates: (slug: string, id: string) => at(slug, `/chains/${id}/pull`),
   /** The talk of a chain. */
-  comments: (slug: string, id: string) => `${b(slug)}/chains/${id}/comments`,
+  comments: (slug: string, id: string) => at(slug, `/chains/${id}/comments`),
   comment: (slug: string, id: string, commentId: string) =>
-    `${b(slug)}/chains/${id}/comments/${commentId}`,
-  commentsSeen: (slug: string, id: string) => `${b(slug)}/chains/${id}/comments/seen`,
+    at(slug, `/chains/${id}/comments/${commentId}`),
+  commentsSeen: (slug: string, id: string) => at(slug, `/chains/${id}/comments/seen`),
   /** Read-only links to one chain. */
-  shareLinks: (slug: string, chainId: string) => `${b(slug)}/chains/${chainId}/share-links`,
-  shareLink: (slug: string, id: string) => `${b(slug)}/share-links/${id}`,
+  shareLinks: (slug: string, chainId: string) => at(slug, `/chains/${chainId}/share-links`),
+  shareLink: (slug: string, id: string) => at(slug, `/share-links/${id}`),
   /** People of other breweries on one chain. */
-  guests: (slug: string, chainId: string) => `${b(slug)}/chains/${chainId}/guests`,
-  guest: (slug: string, id: string) => `${b(slug)}/guests/${id}`,
+  guests: (slug: string, chainId: string) => at(slug, `/chains/${chainId}/guests`),
+  guest: (slug: string, id: string) => at(slug, `/guests/${id}`),
   guestInvitation: (token: string) => `/api/guest/${encodeURIComponent(token)}`,
   /** What such a link shows. */
   shared: (token: string) => `/api/shared/${encodeURIComponent(token)}`,
-  copies: (slug: string) => `${b(slug)}/copies`,
-  batches: (slug: string) => `${b(slug)}/batches`,
-  batch: (slug: string, id: string) => `${b(slug)}/batches/${id}`,
-  batchStage: (slug: string, id: string) => `${b(slug)}/batches/${id}/stage`,
+  copies: (slug: string) => at(slug, '/copies'),
+  batches: (slug: string) => at(slug, '/batches'),
+  batch: (slug: string, id: string) => at(slug, `/batches/${id}`),
+  batchStage: (slug: string, id: string) => at(slug, `/batches/${id}/stage`),
   /** The link from the batch before to this one. */
-  link: (slug: string, id: string) => `${b(slug)}/batches/${id}/link`,
-  acceptance: (slug: string, id: string) => `${b(slug)}/batches/${id}/link/acceptance`,
-  moves: (slug: string) => `${b(slug)}/moves`,
-  undo: (slug: string) => `${b(slug)}/undo`,
-  redo: (slug: string) => `${b(slug)}/redo`,
+  link: (slug: string, id: string) => at(slug, `/batches/${id}/link`),
+  acceptance: (slug: string, id: string) => at(slug, `/batches/${id}/link/acceptance`),
+  moves: (slug: string) => at(slug, '/moves'),
+  undo: (slug: string) => at(slug, '/undo'),
+  redo: (slug: string) => at(slug, '/redo'),
   checkChain: '/api/check/chain',
   openapi: '/api/openapi.json',
   health: '/api/health',
