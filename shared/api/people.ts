@@ -47,6 +47,7 @@ export const abilities = z.strictObject({
   editYeastsAndVessels: z.boolean(),
   editSeason: z.boolean(),
   acceptHolds: z.boolean(),
+  /** Ask people in, change their roles, remove them. */
   invite: z.boolean(),
 });
 export type Abilities = z.infer<typeof abilities>;
@@ -57,6 +58,16 @@ export const membership = z.strictObject({
 });
 export type Membership = z.infer<typeof membership>;
 
+/** A chain of another brewery, on the board of one of one’s own. */
+export const guestPlace = z.strictObject({
+  guestId: f.id,
+  chainName: f.name,
+  fromBrewery: f.name,
+  /** Slug of one’s own brewery, on whose board the shelf stands. */
+  onBoardOf: f.slug,
+});
+export type GuestPlace = z.infer<typeof guestPlace>;
+
 export const person = z.strictObject({
   id: f.id,
   version: f.version,
@@ -65,6 +76,7 @@ export const person = z.strictObject({
   units: unitPrefs,
   theme,
   breweries: z.array(membership),
+  guestOf: z.array(guestPlace),
 });
 export type Person = z.infer<typeof person>;
 
@@ -80,6 +92,8 @@ export const member = z.strictObject({
   name: f.name,
   initials: z.string().max(3),
   role,
+  /** Of the membership: raised when the role changes. */
+  version: f.version,
 });
 export type Member = z.infer<typeof member>;
 
@@ -104,6 +118,8 @@ export const joinPreview = z.strictObject({
   role,
   invitedBy: f.name,
   expiresAt: z.iso.datetime(),
+  /** The brewery’s slug, where who asks is signed in and belongs to it already. */
+  memberOf: f.slug.nullable(),
 });
 export type JoinPreview = z.infer<typeof joinPreview>;
 

@@ -18,6 +18,14 @@ export const placeOf = (slug: string, seasonId: string | null | undefined): stri
 
 export const api = {
   account: '/api/account',
+  accountEmail: '/api/account/email',
+  accountPassword: '/api/account/password',
+  /** All that would go with the account, to take along. */
+  accountData: '/api/account/data',
+  accountClosing: '/api/account/closing',
+  /** Where one is signed in. */
+  signIns: '/api/account/sign-ins',
+  signInOf: (mark: string) => `/api/account/sign-ins/${encodeURIComponent(mark)}`,
   session: '/api/session',
   join: (token: string) => `/api/join/${encodeURIComponent(token)}`,
   brewery: (slug: string) => at(slug, ''),
