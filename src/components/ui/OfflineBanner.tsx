@@ -12,7 +12,7 @@ export function OfflineBanner() {
   const online = useOnline();
   useComeBack(online);
   return (
-    <div aria-live="polite">
+    <div aria-live="polite" className="max-tablet:sticky max-tablet:top-0 max-tablet:z-20">
       {!online && (
         <p className="bg-mind-l px-7 py-2 text-center font-semibold text-mind max-tablet:px-4">
           {OFFLINE_SENTENCE}
