@@ -29,7 +29,12 @@ export const api = {
   session: '/api/session',
   join: (token: string) => `/api/join/${encodeURIComponent(token)}`,
   brewery: (slug: string) => at(slug, ''),
+  breweries: '/api/breweries',
   members: (slug: string) => at(slug, '/members'),
+  member: (slug: string, personId: string) => `${b(slug)}/members/${personId}`,
+  handOver: (slug: string, personId: string) => `${b(slug)}/members/${personId}/hand-over`,
+  /** One’s own: deleted, one has left. */
+  membership: (slug: string) => `${b(slug)}/membership`,
   joinLinks: (slug: string) => at(slug, '/join-links'),
   joinLink: (slug: string, id: string) => at(slug, `/join-links/${id}`),
   board: (slug: string) => at(slug, '/board'),
@@ -60,6 +65,8 @@ export const api = {
   /** People of other breweries on one chain. */
   guests: (slug: string, chainId: string) => at(slug, `/chains/${chainId}/guests`),
   guest: (slug: string, id: string) => at(slug, `/guests/${id}`),
+  /** A chain of another brewery on one’s own board: deleted, one has left it. */
+  guestShelf: (guestId: string) => `/api/guest-shelves/${guestId}`,
   guestInvitation: (token: string) => `/api/guest/${encodeURIComponent(token)}`,
   /** What such a link shows. */
   shared: (token: string) => `/api/shared/${encodeURIComponent(token)}`,
