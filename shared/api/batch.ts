@@ -92,6 +92,26 @@ export const readFacts = z.strictObject({
 });
 export type ReadFacts = z.infer<typeof readFacts>;
 
+/** What the readings of a batch come to; renewed with each. SG, °C. */
+export const followed = z.strictObject({
+  /** How many readings there are, of any kind. */
+  count: z.number().int(),
+  lastAt: z.iso.datetime(),
+  /** The newest gravity; null: none was read. */
+  gravity: z.number().nullable(),
+  gravityAt: z.iso.datetime().nullable(),
+  /** From when on no gravity was further than 0.001 from the newest. */
+  steadyFrom: z.iso.datetime().nullable(),
+  lowest: z.number().nullable(),
+  /** First gravity that stood clearly below the first one read: it had begun. */
+  begunAt: z.iso.datetime().nullable(),
+  /** Last gravity before that: it had not begun. */
+  stillAt: z.iso.datetime().nullable(),
+  temperatureC: z.number().nullable(),
+  temperatureAt: z.iso.datetime().nullable(),
+});
+export type Followed = z.infer<typeof followed>;
+
 export const cake = z.strictObject({
   state: z.enum(CAKE_STATES),
   measured: z

@@ -13,7 +13,7 @@ import {
   uuid,
   type AnyPgColumn,
 } from 'drizzle-orm/pg-core';
-import type { Acceptance, Stage } from '#shared/api/batch.ts';
+import type { Acceptance, Followed, Stage } from '#shared/api/batch.ts';
 import type { Addition, DryHop } from '#shared/rules/facts.ts';
 import type { Allergen, Culture, TrubLevel } from '#shared/rules/vocabulary.ts';
 import { id, madeAt, note, quantity, typedTexts, version } from './columns.ts';
@@ -110,6 +110,8 @@ const read = {
   readFg: quantity(),
   rackedOn: date({ mode: 'string' }),
   scrapReason: note(),
+  /** What its readings come to, renewed with each; null: none was taken. */
+  followed: jsonb().$type<Followed>(),
 };
 
 /** Facts of the link from the batch before. */
