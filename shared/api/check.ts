@@ -15,7 +15,7 @@ import { alsoWhenFaulty, bothEnds } from './refining.ts';
 
 /** `POST /api/check/chain`. A key that is absent is unknown, and so is a null unless said here. */
 
-const maybe = <T extends z.ZodType>(schema: T) => schema.nullable().optional();
+export const maybe = <T extends z.ZodType>(schema: T) => schema.nullable().optional();
 
 const yeast = [
   ['fermentMinC', 'fermentMaxC'],
@@ -81,7 +81,7 @@ const batch = alsoWhenFaulty(
 export type CheckedBatch = z.infer<typeof batch>;
 
 /** A brewery's changes, with the order of their limits. */
-function orderedHouseRules() {
+export function orderedHouseRules() {
   let schema: z.ZodType<HouseRuleChanges> = houseRuleChanges;
   for (const pair of LIMIT_PAIRS)
     for (const key of [pair.mind, pair.hold])
