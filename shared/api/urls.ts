@@ -81,6 +81,7 @@ export const api = {
   undo: (slug: string) => at(slug, '/undo'),
   redo: (slug: string) => at(slug, '/redo'),
   checkChain: '/api/check/chain',
+  checkPour: '/api/check/pour',
   openapi: '/api/openapi.json',
   health: '/api/health',
   ready: '/api/ready',

@@ -40,7 +40,13 @@ const MAY: Record<string, Who[]> = {
   listJoinLinks: HEAD,
   makeJoinLink: HEAD,
   withdrawJoinLink: HEAD,
+  listSeasons: ALL,
+  addSeason: HEAD,
   editSeason: HEAD,
+  deleteSeason: HEAD,
+  makeSeasonCurrent: HEAD,
+  archiveSeason: HEAD,
+  reopenSeason: HEAD,
   readRecord: ALL,
   readHouseRules: ALL,
   changeHouseRules: HEAD,
@@ -83,6 +89,7 @@ const SIGNED_IN: Record<string, number> = {
   whoIsSignedIn: 200,
   editAccount: 428,
   checkChain: 422,
+  checkPour: 422,
   acceptGuestInvitation: 422,
 };
 /** What anybody may ask, and the answer. A link's own token opens its chain; made-up ones open nothing. */
@@ -159,6 +166,7 @@ function ask(visitor: Visitor, name: string) {
   const address = path
     .replace(':brewery', season.slug)
     .replace(':id', ids[resource] ?? '')
+    .replace(':season', ids.seasons ?? '')
     .replace(':commentId', randomUUID())
     .replace(':token', name === 'readSharedChain' ? token : 'made-up');
   return visitor.ask(method, address, body ? { body: {} } : {});

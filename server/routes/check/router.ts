@@ -1,6 +1,8 @@
 import { checkChainAnswer, checkChainRequest } from '#shared/api/check.ts';
+import { checkPourAnswer, checkPourRequest } from '#shared/api/checkPour.ts';
 import { api } from '#shared/api/urls.ts';
 import { checkChain } from '#shared/chain/checkChain.ts';
+import { checkPourRequested } from '#shared/pour/wire.ts';
 import { forSignedIn } from '../../http/route.ts';
 
 export const checkRoutes = [
@@ -18,6 +20,22 @@ export const checkRoutes = [
     async ({ body, tries }, { person }) => {
       await tries.count('checksByPerson', person.id);
       return { body: checkChain(body) };
+    },
+  ),
+  forSignedIn(
+    {
+      name: 'checkPour',
+      method: 'post',
+      path: api.checkPour,
+      summary: 'May the wort go onto the cake, and when; nothing is stored',
+      body: checkPourRequest,
+      answer: checkPourAnswer,
+      status: 200,
+      problems: ['too-many'],
+    },
+    async ({ body, tries }, { person }) => {
+      await tries.count('checksByPerson', person.id);
+      return { body: checkPourRequested(body) };
     },
   ),
 ];
