@@ -2,7 +2,6 @@ import { sql } from 'drizzle-orm';
 import {
   bigint,
   check,
-  foreignKey,
   index,
   jsonb,
   pgTable,
@@ -13,7 +12,6 @@ import {
 } from 'drizzle-orm/pg-core';
 import { id, madeAt } from './columns.ts';
 import { person } from './people.ts';
-import { season } from './season.ts';
 
 export const CHANGE_KINDS = ['move', 'edit', 'undo', 'redo'] as const;
 export type ChangeKind = (typeof CHANGE_KINDS)[number];
@@ -27,6 +25,7 @@ export const change = pgTable(
   {
     id: id(),
     breweryId: uuid().notNull(),
+    /** No reference: the record outlives a season that was deleted. */
     seasonId: uuid().notNull(),
     /** The order in which they happened. */
     seq: bigint({ mode: 'number' }).generatedAlwaysAsIdentity().notNull(),
@@ -45,11 +44,6 @@ export const change = pgTable(
     ofChange: uuid().references((): AnyPgColumn => change.id),
   },
   (t) => [
-    foreignKey({
-      name: 'change_season',
-      columns: [t.breweryId, t.seasonId],
-      foreignColumns: [season.breweryId, season.id],
-    }),
     unique('change_seq').on(t.seq),
     index('change_season_person').on(t.seasonId, t.personId, t.seq),
     index('change_of').on(t.ofChange, t.seq),

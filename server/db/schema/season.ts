@@ -1,4 +1,15 @@
-import { date, index, integer, pgTable, primaryKey, text, unique, uuid } from 'drizzle-orm/pg-core';
+import { sql } from 'drizzle-orm';
+import {
+  check,
+  date,
+  index,
+  integer,
+  pgTable,
+  primaryKey,
+  text,
+  unique,
+  uuid,
+} from 'drizzle-orm/pg-core';
 import { brewery } from './brewery.ts';
 import { id, instant, madeAt, version } from './columns.ts';
 
@@ -15,6 +26,9 @@ export const season = pgTable(
     revision: integer().notNull().default(0),
     brewWeekdays: integer().array().notNull().default([6, 7]),
     brewsPerDay: integer().notNull().default(1),
+    /** When it is meant to begin and to end. */
+    firstDay: date({ mode: 'string' }),
+    lastDay: date({ mode: 'string' }),
     /** Put away: it is read, not changed. */
     archivedAt: instant(),
     createdAt: madeAt(),
@@ -22,6 +36,7 @@ export const season = pgTable(
   (t) => [
     index('season_brewery').on(t.breweryId),
     unique('season_in_brewery').on(t.breweryId, t.id),
+    check('season_days', sql`${t.lastDay} >= ${t.firstDay}`),
   ],
 );
 
