@@ -3,6 +3,7 @@ import { fileURLToPath } from 'node:url';
 import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import type { Plugin } from 'vite';
+import { VitePWA } from 'vite-plugin-pwa';
 import { defineConfig } from 'vitest/config';
 
 const root = fileURLToPath(new URL('.', import.meta.url));
@@ -38,9 +39,39 @@ const noJsonSchemas: Plugin = {
   },
 };
 
+/**
+ * The service worker: keeps the pages themselves, never an answer of the API, so that they open
+ * without a connection. It waits until it is told to take over. Addresses that carry a token are
+ * left to the server, which forbids keeping them.
+ */
+const serviceWorker = VitePWA({
+  strategies: 'generateSW',
+  filename: 'sw.js',
+  registerType: 'prompt',
+  // The shell registers it, once somebody is signed in: a visitor need not load every page.
+  injectRegister: null,
+  // A file of its own, in `src/public`.
+  manifest: false,
+  workbox: {
+    inlineWorkboxRuntime: true,
+    // Of the fonts only the letters that the pages use; the picture of the README stays out.
+    globPatterns: [
+      'index.html',
+      '*.{svg,webmanifest}',
+      'theme.js',
+      'icon-192.png',
+      'assets/*.{js,css}',
+      'assets/*-latin-wght-normal-*.woff2',
+    ],
+    navigateFallback: '/index.html',
+    navigateFallbackDenylist: [/^\/(api|shared|guest|join)\//],
+    cleanupOutdatedCaches: true,
+  },
+});
+
 export default defineConfig({
   root,
-  plugins: [react(), tailwindcss(), toastStylesAsFile, noJsonSchemas],
+  plugins: [react(), tailwindcss(), toastStylesAsFile, noJsonSchemas, serviceWorker],
   // In development it would be bundled beforehand, past the plugin.
   optimizeDeps: { exclude: ['sonner'] },
   publicDir: 'src/public',

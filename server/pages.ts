@@ -14,6 +14,9 @@ function wantsPage(method: string, path: string): boolean {
   return (method === 'GET' || method === 'HEAD') && !isApi(path) && !isFile;
 }
 
+/** What decides which release a browser shows. */
+const ASKED_ANEW = /(\.html|\.webmanifest|[\\/]sw\.js)$/;
+
 /**
  * The built pages. Hashed files are kept by browsers for a year; `index.html` is asked for anew each time.
  * A file that is not there is a 404, never `index.html`: a page that was left open over an update must notice.
@@ -30,10 +33,7 @@ export function builtPages(distDir: string): Pages {
     express.static(root, {
       ...noFallback,
       setHeaders: (res, path) =>
-        res.setHeader(
-          'Cache-Control',
-          path.endsWith('.html') ? 'no-cache' : 'public, max-age=3600',
-        ),
+        res.setHeader('Cache-Control', ASKED_ANEW.test(path) ? 'no-cache' : 'public, max-age=3600'),
       dotfiles: 'ignore',
     }),
   );

@@ -7,6 +7,7 @@ import { Notice } from '../../components/ui/Notice.tsx';
 import { OfflineBanner } from '../../components/ui/OfflineBanner.tsx';
 import { Skeleton } from '../../components/ui/Skeleton.tsx';
 import { Toaster } from '../../components/ui/Toast.tsx';
+import { NewRelease } from '../../release/NewRelease.tsx';
 import { NotFoundPage } from '../error/NotFoundPage.tsx';
 import { BottomBar } from './BottomBar.tsx';
 import { LiveSeason } from './LiveSeason.tsx';
@@ -32,11 +33,12 @@ export function Shell() {
   // Somebody else's brewery looks like one that does not exist.
   if (!session.data.breweries.some((m) => m.brewery.slug === brewery)) return <NotFoundPage />;
   return (
-    <div className="flex min-h-dvh flex-col">
+    <div className="flex min-h-dvh flex-col print:block print:min-h-0">
       <TopBar />
       <OfflineBanner />
+      <NewRelease />
       <LiveSeason />
-      <div className="flex min-w-0 grow flex-col max-tablet:pb-20">
+      <div className="flex min-w-0 grow flex-col max-tablet:pb-20 print:block print:pb-0">
         <Suspense fallback={<Loading />}>
           <Outlet />
         </Suspense>

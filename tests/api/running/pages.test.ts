@@ -17,6 +17,8 @@ beforeAll(async () => {
   writeFileSync(join(folder, 'index.html'), '<title>Barmkin</title>');
   writeFileSync(join(folder, 'assets/index-abc123.js'), 'export {};');
   writeFileSync(join(folder, '.vite/manifest.json'), '{}');
+  writeFileSync(join(folder, 'sw.js'), '');
+  writeFileSync(join(folder, 'manifest.webmanifest'), '{}');
   writeFileSync(join(folder, 'icon.svg'), '<svg xmlns="http://www.w3.org/2000/svg"/>');
   const app = express();
   app.use(builtPages(folder));
@@ -37,6 +39,8 @@ test.each([
   ['/index.html', 200, 'no-cache', 'text/html'],
   ['/b/saltmarsh?batch=1', 200, 'no-cache', 'text/html'],
   ['/assets/index-abc123.js', 200, 'public, max-age=31536000, immutable', 'text/javascript'],
+  ['/sw.js', 200, 'no-cache', 'text/javascript'],
+  ['/manifest.webmanifest', 200, 'no-cache', 'application/manifest+json'],
   ['/icon.svg', 200, 'public, max-age=3600', 'image/svg+xml'],
 ])('%s is served with %i and %s', async (path, status, caching, type) => {
   const answer = await fetch(url + path);

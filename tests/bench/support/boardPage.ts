@@ -17,7 +17,11 @@ export function openBrowser(): Promise<Browser> {
 
 /** The board as a head brewer sees it, in a fresh browser profile, after a moment's look at it. */
 export async function openBoard(browser: Browser, at: AtWork, before?: () => void): Promise<Page> {
-  const context = await browser.newContext({ viewport: { width: 1440, height: 900 } });
+  const context = await browser.newContext({
+    viewport: { width: 1440, height: 900 },
+    // It loads every other page behind the one that is measured.
+    serviceWorkers: 'block',
+  });
   await context.addCookies(sessionCookies(at, at.brewery.members['head-brewer'].token));
   const page = await context.newPage();
   if (before) {
