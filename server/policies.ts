@@ -5,6 +5,8 @@ export interface InRole {
   role: Role;
   /** Not null: somebody of another brewery, who stays within their chains. */
   guestOf?: ReadonlyMap<string, unknown> | null;
+  /** The season that is asked for is put away. */
+  isArchived?: boolean;
 }
 
 const isHead = ({ role }: InRole) => role === 'head-brewer';
@@ -22,6 +24,7 @@ export const canEditYeastsAndVessels = isHead;
 export const canEditSeason = isHead;
 export const canAcceptHolds = isHead;
 export const canInvite = isHead;
+export const canManagePeople = isHead;
 /** Tasters too: what they taste is what the talk is about. */
 export const canTalk = canRead;
 /** Those of others; one's own anybody may. */
@@ -30,14 +33,18 @@ export const canRemoveComments = isHead;
 export const canShare = isHead;
 export const canSeeSharing = brews;
 
-export const abilitiesOf = (member: InRole): Abilities => ({
-  editBatches: canEditBatches(member),
-  moveBatches: canMoveBatches(member),
-  moveAcross: canMoveAcross(member),
-  setStages: canSetStages(member),
-  editChains: canEditChains(member),
-  editYeastsAndVessels: canEditYeastsAndVessels(member),
-  editSeason: canEditSeason(member),
-  acceptHolds: canAcceptHolds(member),
-  invite: canInvite(member),
-});
+/** What the pages offer. On an archived season nothing is changed, whoever asks. */
+export const abilitiesOf = (who: InRole): Abilities => {
+  const member: InRole = who.isArchived ? { ...who, role: 'taster' } : who;
+  return {
+    editBatches: canEditBatches(member),
+    moveBatches: canMoveBatches(member),
+    moveAcross: canMoveAcross(member),
+    setStages: canSetStages(member),
+    editChains: canEditChains(member),
+    editYeastsAndVessels: canEditYeastsAndVessels(member),
+    editSeason: canEditSeason(member),
+    acceptHolds: canAcceptHolds(member),
+    invite: canInvite(who),
+  };
+};

@@ -5,6 +5,7 @@ import { oncePer } from '../db/oncePer.ts';
 import { person, session } from '../db/schema/people.ts';
 import { tell } from '../live/note.ts';
 import type { Clock } from '../clock.ts';
+import { deviceWords } from './device.ts';
 import { giveCookie, SESSION_MS, takeCookie, tokenIn } from './cookie.ts';
 import { hashToken, newToken } from './tokens.ts';
 
@@ -34,6 +35,8 @@ export async function startSession(
     tokenHash: hashToken(token),
     personId,
     createdAt: now,
+    seenAt: now,
+    device: deviceWords(req.get('user-agent')),
     expiresAt: new Date(now.getTime() + SESSION_MS),
   });
   giveCookie(req, token);
@@ -51,6 +54,8 @@ export async function endSession(db: Db, req: Request): Promise<void> {
 }
 
 const MS_A_DAY = 24 * 60 * 60 * 1000;
+/** When somebody was last seen is known to within this time, so that hardly any request writes it. */
+const SEEN_WITHIN_MS = 10 * 60 * 1000;
 
 /** Who is signed in. The 30 days start again with use, written at most once a day. */
 export async function findSignedIn(db: Db, clock: Clock, req: Request): Promise<SignedIn | null> {
@@ -60,11 +65,16 @@ export async function findSignedIn(db: Db, clock: Clock, req: Request): Promise<
   const now = clock.now();
   const [found] = await sessionQuery(db).execute({ tokenHash, now });
   if (!found) return null;
-  if (found.expiresAt.getTime() < now.getTime() + SESSION_MS - MS_A_DAY) {
-    const expiresAt = new Date(now.getTime() + SESSION_MS);
-    await db.update(session).set({ expiresAt }).where(eq(session.tokenHash, tokenHash));
-    giveCookie(req, token);
+  const isOld = found.expiresAt.getTime() < now.getTime() + SESSION_MS - MS_A_DAY;
+  const seenAt = found.seenAt ?? found.createdAt;
+  if (isOld || seenAt.getTime() + SEEN_WITHIN_MS <= now.getTime()) {
+    const prolonged = isOld ? { expiresAt: new Date(now.getTime() + SESSION_MS) } : {};
+    await db
+      .update(session)
+      .set({ seenAt: now, ...prolonged })
+      .where(eq(session.tokenHash, tokenHash));
   }
+  if (isOld) giveCookie(req, token);
   return { person: found.person, tokenHash };
 }
 
@@ -78,7 +88,12 @@ export async function personOf(db: Db, now: Date, req: Request): Promise<string 
 
 const sessionQuery = oncePer((db: Db) =>
   db
-    .select({ person, expiresAt: session.expiresAt })
+    .select({
+      person,
+      expiresAt: session.expiresAt,
+      createdAt: session.createdAt,
+      seenAt: session.seenAt,
+    })
     .from(session)
     .innerJoin(person, eq(person.id, session.personId))
     .where(

@@ -1,5 +1,7 @@
 import type { Route } from '../http/operation.ts';
+import { closingRoutes } from './account/closingRouter.ts';
 import { accountRoutes } from './account/router.ts';
+import { secretRoutes } from './account/secretsRouter.ts';
 import { batchRoutes } from './batches/router.ts';
 import { boardRoutes } from './board/router.ts';
 import { breweryRoutes } from './brewery/router.ts';
@@ -11,10 +13,12 @@ import { joinRoutes } from './join/router.ts';
 import { guestRoutes } from './guests/router.ts';
 import { liveRoutes } from './live/router.ts';
 import { moveRoutes } from './moves/router.ts';
+import { membershipRoutes } from './people/membersRouter.ts';
 import { peopleRoutes } from './people/router.ts';
 import { recordRoutes } from './record/router.ts';
 import { seasonRoutes } from './season/router.ts';
 import { sessionRoutes } from './session/router.ts';
+import { signInRoutes } from './sign-ins/router.ts';
 import { openApiRoute } from './system/openapi.ts';
 import { shareRoutes } from './share/router.ts';
 import { systemRoutes } from './system/router.ts';
@@ -25,9 +29,13 @@ const resources: readonly Route[] = [
   ...systemRoutes,
   ...sessionRoutes,
   ...accountRoutes,
+  ...secretRoutes,
+  ...closingRoutes,
+  ...signInRoutes,
   ...joinRoutes,
   ...breweryRoutes,
   ...peopleRoutes,
+  ...membershipRoutes,
   ...boardRoutes,
   ...seasonRoutes,
   ...recordRoutes,

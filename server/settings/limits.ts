@@ -7,6 +7,9 @@ const limits = z.strictObject({
   /** Wrong passwords for one account from one address. Never by account alone: that would lock its owner out. */
   signInByAccountAndAddress: rate,
   signInByAddress: rate,
+  /** Wrong answers to "your password, please" of somebody who is signed in. */
+  passwordByPersonAndAddress: rate,
+  breweriesByPerson: rate,
   signUpByAddress: rate,
   joinByAddress: rate,
   sharedByAddress: rate,
@@ -25,6 +28,8 @@ export type LimitChanges = z.infer<typeof limitChanges>;
 export const LIMITS: Limits = {
   signInByAccountAndAddress: { points: 10, seconds: 900 },
   signInByAddress: { points: 100, seconds: 900 },
+  passwordByPersonAndAddress: { points: 10, seconds: 900 },
+  breweriesByPerson: { points: 20, seconds: 3600 },
   signUpByAddress: { points: 20, seconds: 3600 },
   joinByAddress: { points: 60, seconds: 900 },
   sharedByAddress: { points: 300, seconds: 900 },

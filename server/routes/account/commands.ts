@@ -35,9 +35,9 @@ export async function makeBrewery(
   tx: Tx,
   head: PersonRow,
   wish: Pick<SignUpRequest, 'breweryName' | 'timeZone'>,
+  breweryId: string = randomUUID(),
 ): Promise<{ breweryId: string; seasonId: string }> {
   const name = wish.breweryName ?? `${head.name}’s brewery`.slice(0, 60);
-  const breweryId = randomUUID();
   const seasonId = randomUUID();
   await tx.insert(brewery).values({
     id: breweryId,

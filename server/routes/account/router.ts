@@ -1,5 +1,6 @@
 import { accountPatch, person, signUpRequest } from '#shared/api/people.ts';
 import { api } from '#shared/api/urls.ts';
+import { demandUncommon } from '../../auth/commonPasswords.ts';
 import { startSession } from '../../auth/sessions.ts';
 import { forAnyone, forSignedIn } from '../../http/route.ts';
 import { problem } from '../../problems.ts';
@@ -21,6 +22,7 @@ const signUp = forAnyone(
   async ({ db, clock, req, body, passwords, tries }) => {
     await tries.count('signUpByAddress', req.ip ?? '');
     const timeZone = body.timeZone === undefined ? undefined : demandTimeZone(body.timeZone);
+    demandUncommon(body.password);
     const passwordHash = await passwords.hash(body.password);
     const made = await db.transaction(async (tx) => {
       const row = await makePerson(tx, { name: body.name, email: body.email, passwordHash });

@@ -44,7 +44,7 @@ const UNSEEN = ['breweryId', 'seasonId', 'shelfId', 'createdAt'];
 const LISTS = {
   blockedDays: jsonList<string>('d.day', 'blocked_day d where d.season_id = season.id', 'd.day'),
   members: jsonList<MemberRow>(
-    "json_build_object('personId', p.id, 'name', p.name, 'role', m.role)",
+    "json_build_object('personId', p.id, 'name', p.name, 'role', m.role, 'version', m.version)",
     'membership m join person p on p.id = m.person_id where m.brewery_id = season.brewery_id',
     'm.joined_at, p.name',
   ),

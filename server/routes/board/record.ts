@@ -18,6 +18,9 @@ export interface Entry {
   ofChange?: string;
 }
 
+/** Who did it, and in which season's record it stands. */
+type Where = Pick<Member, 'brewery' | 'seasonId' | 'person'>;
+
 /**
  * Raises the season's revision, and tells all processes of each revision once this is committed. It
  * locks the season, so it comes after the locks of shelves.
@@ -40,7 +43,7 @@ export async function raiseRevision(tx: Tx, seasonId: string, by = 1): Promise<n
   return revision;
 }
 
-export async function writeEntry(tx: Tx, member: Member, at: Date, entry: Entry): Promise<void> {
+export async function writeEntry(tx: Tx, member: Where, at: Date, entry: Entry): Promise<void> {
   await writeEntries(tx, at, [{ member, entry }]);
 }
 
@@ -48,7 +51,7 @@ export async function writeEntry(tx: Tx, member: Member, at: Date, entry: Entry)
 export async function writeEntries(
   tx: Tx,
   at: Date,
-  entries: readonly { member: Member; entry: Entry }[],
+  entries: readonly { member: Where; entry: Entry }[],
 ): Promise<void> {
   await tx.insert(change).values(
     entries.map(({ member, entry: { id = randomUUID(), touches, before, after, ...rest } }) => ({

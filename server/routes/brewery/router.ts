@@ -1,13 +1,15 @@
-import { and, eq, sql } from 'drizzle-orm';
+import { eq } from 'drizzle-orm';
 import { brewery as contract, breweryPatch } from '#shared/api/brewery.ts';
 import { api } from '#shared/api/urls.ts';
 import { brewery } from '../../db/schema/brewery.ts';
 import { pathOf } from '../../http/pathOf.ts';
 import { forMember } from '../../http/route.ts';
 import { canEditSeason, canRead } from '../../policies.ts';
-import { problem } from '../../problems.ts';
-import { demandTimeZone } from '../account/defaults.ts';
-import { raiseRevision } from '../board/record.ts';
+import { notFound } from '../../problems.ts';
+import { changeBoard } from '../board/changeBoard.ts';
+import { tellOtherSeasons } from '../board/otherSeasons.ts';
+import { editBrewery } from './edit.ts';
+import { makeBreweryRoute } from './make.ts';
 import { presentBrewery } from './present.ts';
 
 const path = pathOf(api.brewery(':brewery'));
@@ -38,24 +40,17 @@ const edit = forMember(
     answer: contract,
     status: 200,
     ifMatch: true,
+    problems: ['season-archived'],
   },
   canEditSeason,
-  async ({ db, body, version }, { brewery: { id }, seasonId }) => {
-    const { timeZone, ...patch } = body;
-    const zone = timeZone === undefined ? {} : { timeZone: demandTimeZone(timeZone) };
-    const row = await db.transaction(async (tx) => {
-      const [edited] = await tx
-        .update(brewery)
-        .set({ ...patch, ...zone, version: sql`${brewery.version} + 1` })
-        .where(and(eq(brewery.id, id), eq(brewery.version, version)))
-        .returning();
-      if (edited) await raiseRevision(tx, seasonId);
-      return edited;
-    });
-    if (row) return { body: presentBrewery(row), version: row.version };
-    const [now] = await db.select().from(brewery).where(eq(brewery.id, id));
-    throw problem('changed-since', { current: now && presentBrewery(now) });
+  async (asked, member) => {
+    const { body, version } = asked;
+    await changeBoard(asked, member, [], editBrewery(version, body));
+    await tellOtherSeasons(asked.db, member);
+    const [row] = await asked.db.select().from(brewery).where(eq(brewery.id, member.brewery.id));
+    if (!row) throw notFound();
+    return { body: presentBrewery(row), version: row.version };
   },
 );
 
-export const breweryRoutes = [read, edit];
+export const breweryRoutes = [makeBreweryRoute, read, edit];

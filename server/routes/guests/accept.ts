@@ -5,7 +5,9 @@ import { brewery, membership } from '../../db/schema/brewery.ts';
 import { season } from '../../db/schema/season.ts';
 import { chainGuest } from '../../db/schema/sharing.ts';
 import { invalidField, problem } from '../../problems.ts';
+import { tell } from '../../live/note.ts';
 import { raiseRevision } from '../board/record.ts';
+import { belongs } from '../join/commands.ts';
 import { findInvitation } from './find.ts';
 
 /** Uses an invitation up: of two at once, one becomes the guest. */
@@ -17,7 +19,7 @@ export async function acceptInvitation(
   now: Date,
 ): Promise<string> {
   const { row, brewery: owner, chain } = await findInvitation(tx, token, now);
-  if (await belongs(tx, who, owner.id))
+  if (await belongs(tx, owner.id, who.id))
     throw problem('already-exists', { detail: `You belong to ${owner.name} already` });
   if (await isGuest(tx, who, row.chainId))
     throw problem('already-exists', { detail: `${chain.name} stands on your board already` });
@@ -32,6 +34,7 @@ export async function acceptInvitation(
   if (used.length === 0) throw problem('link-used');
   await raiseRevision(tx, chain.seasonId);
   await tellBrewery(tx, own);
+  await tell(tx, { kind: 'person', personId: who.id });
   return row.id;
 }
 
@@ -43,14 +46,6 @@ export async function tellBrewery(tx: Tx, breweryId: string): Promise<void> {
     .where(eq(season.breweryId, breweryId))
     .orderBy(season.id);
   for (const { id } of seasons) await raiseRevision(tx, id);
-}
-
-async function belongs(tx: Tx, who: PersonRow, breweryId: string): Promise<boolean> {
-  const found = await tx
-    .select({ role: membership.role })
-    .from(membership)
-    .where(and(eq(membership.breweryId, breweryId), eq(membership.personId, who.id)));
-  return found.length > 0;
 }
 
 async function isGuest(tx: Tx, who: PersonRow, chainId: string): Promise<boolean> {

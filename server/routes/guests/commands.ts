@@ -8,6 +8,7 @@ import { brewery } from '../../db/schema/brewery.ts';
 import { person } from '../../db/schema/people.ts';
 import { chainGuest } from '../../db/schema/sharing.ts';
 import type { Deps } from '../../deps.ts';
+import { tell } from '../../live/note.ts';
 import { notFound, problem } from '../../problems.ts';
 import { changeBoard } from '../board/changeBoard.ts';
 import { one } from '../board/find.ts';
@@ -100,6 +101,7 @@ export async function withdrawGuest(hands: Hands, member: Member, id: string): P
     if (row.withdrawnAt !== null) return null;
     await tx.update(chainGuest).set({ withdrawnAt: now }).where(eq(chainGuest.id, id));
     if (row.guestBreweryId !== null) await tellBrewery(tx, row.guestBreweryId);
+    if (row.personId !== null) await tell(tx, { kind: 'person', personId: row.personId });
     const what = row.joinedAt ? 'Ended a guest’s access' : 'Withdrew an invitation to a chain';
     return { what, before: { role: row.role }, after: null, touches: [row.chainId] };
   });

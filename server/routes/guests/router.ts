@@ -15,6 +15,7 @@ import { canSeeSharing, canShare } from '../../policies.ts';
 import { acceptInvitation } from './accept.ts';
 import { inviteGuest, listGuests, withdrawGuest } from './commands.ts';
 import { findInvitation } from './find.ts';
+import { leaveChainRoute } from './leave.ts';
 
 const ofChain = pathOf(api.guests(':brewery', ':id'));
 const invitation = pathOf(api.guestInvitation(':token'));
@@ -113,4 +114,4 @@ const accept = forSignedIn(
   },
 );
 
-export const guestRoutes = [list, invite, withdraw, preview, accept];
+export const guestRoutes = [list, invite, withdraw, preview, accept, leaveChainRoute];

@@ -31,12 +31,30 @@ export async function findJoinLink(db: Db | Tx, token: string, now: Date): Promi
   return found;
 }
 
-export const presentPreview = ({ link, brewery: itsBrewery, by }: Found): JoinPreview => ({
+export const presentPreview = (
+  { link, brewery: itsBrewery, by }: Found,
+  isMember: boolean,
+): JoinPreview => ({
   breweryName: itsBrewery.name,
   role: link.role,
   invitedBy: by,
   expiresAt: link.expiresAt.toISOString(),
+  memberOf: isMember ? itsBrewery.slug : null,
 });
+
+/** @param personId null: nobody is signed in */
+export async function belongs(
+  db: Db | Tx,
+  breweryId: string,
+  personId: string | null,
+): Promise<boolean> {
+  if (personId === null) return false;
+  const found = await db
+    .select({ role: membership.role })
+    .from(membership)
+    .where(and(eq(membership.breweryId, breweryId), eq(membership.personId, personId)));
+  return found.length > 0;
+}
 
 /** Uses the link up: of two at once, one joins. */
 export async function join(tx: Tx, token: string, who: PersonRow, now: Date): Promise<string> {
@@ -53,7 +71,9 @@ export async function join(tx: Tx, token: string, who: PersonRow, now: Date): Pr
     .onConflictDoNothing()
     .returning({ role: membership.role });
   if (joined.length === 0)
-    throw problem('already-exists', { detail: `You belong to ${itsBrewery.name} already` });
+    throw problem('already-exists', {
+      detail: `You belong to ${itsBrewery.name} already; the link stays good for somebody else.`,
+    });
   const seasons = await tx
     .select({ id: season.id })
     .from(season)

@@ -1,11 +1,12 @@
 import { joined, joinPreview, joinRequest } from '#shared/api/people.ts';
 import { api } from '#shared/api/urls.ts';
-import { findSignedIn, startSession } from '../../auth/sessions.ts';
+import { demandUncommon } from '../../auth/commonPasswords.ts';
+import { findSignedIn, personOf, startSession } from '../../auth/sessions.ts';
 import { pathOf } from '../../http/pathOf.ts';
 import { forAnyone } from '../../http/route.ts';
 import { makePerson } from '../account/commands.ts';
 import { presentPerson } from '../account/present.ts';
-import { demandNewPerson, findJoinLink, join, presentPreview } from './commands.ts';
+import { belongs, demandNewPerson, findJoinLink, join, presentPreview } from './commands.ts';
 
 const path = pathOf(api.join(':token'));
 
@@ -21,7 +22,10 @@ const preview = forAnyone(
   },
   async ({ db, clock, req, params, tries }) => {
     await tries.count('joinByAddress', req.ip ?? '');
-    return { body: presentPreview(await findJoinLink(db, params.token ?? '', clock.now())) };
+    const now = clock.now();
+    const found = await findJoinLink(db, params.token ?? '', now);
+    const personId = await personOf(db, now, req);
+    return { body: presentPreview(found, await belongs(db, found.brewery.id, personId)) };
   },
 );
 
@@ -48,6 +52,7 @@ const accept = forAnyone(
       return { body: { person: await presentPerson(db, who), brewerySlug } };
     }
     const { name, email, password } = demandNewPerson(body);
+    demandUncommon(password);
     const passwordHash = await passwords.hash(password);
     const made = await db.transaction(async (tx) => {
       const who = await makePerson(tx, { name, email, passwordHash });

@@ -4,6 +4,7 @@ export interface MemberRow {
   personId: string;
   name: string;
   role: Role;
+  version: number;
 }
 
 export const presentMember = (row: MemberRow): Member => ({

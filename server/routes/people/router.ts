@@ -28,7 +28,12 @@ const members = forMember(
   canRead,
   async ({ db }, { brewery }) => {
     const rows = await db
-      .select({ personId: person.id, name: person.name, role: membership.role })
+      .select({
+        personId: person.id,
+        name: person.name,
+        role: membership.role,
+        version: membership.version,
+      })
       .from(membership)
       .innerJoin(person, eq(person.id, membership.personId))
       .where(eq(membership.breweryId, brewery.id))

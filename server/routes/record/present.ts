@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { recordEntry, type RecordEntry } from '#shared/api/record.ts';
 import type { change } from '../../db/schema/change.ts';
 import { dayIn } from '../../today.ts';
+import { WHOM } from '../people/entry.ts';
 
 /** What the record keeps beside the rows. Entries of other kinds have none of it. */
 const kept = z.object({
@@ -12,10 +13,12 @@ const kept = z.object({
 export interface EntryRow {
   change: typeof change.$inferSelect;
   name: string;
+  /** Whom it is about, where it is about somebody. */
+  whom?: string | null;
   lastKind: string | null;
 }
 
-export function presentEntry({ change, name, lastKind }: EntryRow, timeZone: string): RecordEntry {
+export function presentEntry({ change, name, whom, lastKind }: EntryRow, timeZone: string): RecordEntry {
   const { id, at, personId, kind, what, touches } = change;
   const { facts, links } = kept.catch({ facts: [], links: [] }).parse(change.after ?? {});
   return {
@@ -24,7 +27,7 @@ export function presentEntry({ change, name, lastKind }: EntryRow, timeZone: str
     day: dayIn(timeZone, at),
     person: { id: personId, name },
     kind,
-    what,
+    what: !whom ? what : what.replace(WHOM, () => whom),
     facts,
     links,
     touches,

@@ -1,3 +1,4 @@
+import { alias } from 'drizzle-orm/pg-core';
 import { and, desc, eq, gte, lt, sql, type SQL } from 'drizzle-orm';
 import type { RecordPage, RecordQuery } from '#shared/api/record.ts';
 import { addDays } from '#shared/units/day.ts';
@@ -5,31 +6,27 @@ import type { Db } from '../../db/client.ts';
 import type { brewery } from '../../db/schema/brewery.ts';
 import { change } from '../../db/schema/change.ts';
 import { person } from '../../db/schema/people.ts';
-import { season } from '../../db/schema/season.ts';
-import { notFound } from '../../problems.ts';
 import { endOfDayIn } from '../../today.ts';
 import { presentEntry } from './present.ts';
 
 const PAGE = 50;
+/** Whom an entry is about, where it is about somebody. */
+const whom = alias(person, 'whom');
 
 type Brewery = typeof brewery.$inferSelect;
 
 /** What happened in one season, newest first, a page at a time. */
 export async function readRecord(
   db: Db,
-  { id: breweryId, timeZone }: Brewery,
+  { timeZone }: Pick<Brewery, 'timeZone'>,
   seasonId: string,
   query: RecordQuery,
 ): Promise<RecordPage> {
-  const [known] = await db
-    .select({ id: season.id })
-    .from(season)
-    .where(and(eq(season.breweryId, breweryId), eq(season.id, seasonId)));
-  if (!known) throw notFound();
   const rows = await db
-    .select({ change, name: person.name, lastKind })
+    .select({ change, name: person.name, whom: whom.name, lastKind })
     .from(change)
     .innerJoin(person, eq(person.id, change.personId))
+    .leftJoin(whom, sql`${whom.id} = (${change.after} ->> 'whom')::uuid`)
     .where(and(eq(change.seasonId, seasonId), ...filters(query, timeZone)))
     .orderBy(desc(change.seq))
     .limit(PAGE + 1);
