@@ -3,6 +3,7 @@ import express, { type Express } from 'express';
 import { constants } from 'node:zlib';
 import { sessionCookie } from './auth/cookie.ts';
 import type { Deps } from './deps.ts';
+import { demandContract } from './http/contract.ts';
 import { demandJson, refuseCrossSite } from './http/crossSite.ts';
 import { answerErrors } from './http/errors.ts';
 import { mountRoutes } from './http/mount.ts';
@@ -27,7 +28,7 @@ export async function createApp(deps: Deps): Promise<Express> {
   app.use(['/shared', '/api/shared', '/guest', '/api/guest'], unlisted);
   // The lowest level: most of the saving for a fraction of the work.
   app.use(compression({ level: constants.Z_BEST_SPEED }));
-  app.use('/api', refuseCrossSite(config), demandJson);
+  app.use('/api', refuseCrossSite(config), demandContract(deps.clock), demandJson);
   app.use('/api', express.json({ limit: config.limits.bodyBytes, strict: false }));
   app.use('/api', sessionCookie(config));
   app.use(mountRoutes(routes, { ...deps, ...services }));

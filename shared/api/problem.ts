@@ -21,6 +21,7 @@ export const PROBLEMS = {
   'season-archived': { status: 409, title: 'This season is archived: it is read, not changed' },
   'not-acceptable': { status: 409, title: 'This hold cannot be accepted' },
   'link-used': { status: 410, title: 'This link is no longer good' },
+  'contract-ended': { status: 410, title: 'This page is too old for the server: reload it' },
   'changed-since': { status: 412, title: 'Somebody changed it in the meantime' },
   'version-missing': { status: 428, title: 'Say which version you changed' },
   'too-many': { status: 429, title: 'Too many tries' },

@@ -1,4 +1,5 @@
 import type { z } from 'zod';
+import { CONTRACT, CONTRACT_HEADER } from '#shared/api/contract.ts';
 import { problem } from '#shared/api/problem.ts';
 import { setReachable } from './connection.ts';
 import { OfflineError, ProblemError, UnexpectedAnswerError } from './errors.ts';
@@ -7,6 +8,8 @@ export interface RequestOptions {
   body?: unknown;
   /** Row version that this change was made from. */
   ifMatch?: number;
+  /** Under which this was written; left out: the one in force. */
+  contract?: number;
   signal?: AbortSignal;
 }
 
@@ -38,8 +41,15 @@ export async function requestNothing(method: Method, url: string, options: Reque
   throw problemOf(response, await response.json().catch(() => undefined));
 }
 
-async function send(method: Method, url: string, { body, ifMatch, signal }: RequestOptions) {
-  const headers: Record<string, string> = { Accept: 'application/json' };
+async function send(
+  method: Method,
+  url: string,
+  { body, ifMatch, contract = CONTRACT, signal }: RequestOptions,
+) {
+  const headers: Record<string, string> = {
+    Accept: 'application/json',
+    [CONTRACT_HEADER]: String(contract),
+  };
   if (body !== undefined) headers['Content-Type'] = 'application/json';
   if (ifMatch !== undefined) headers['If-Match'] = `"${ifMatch}"`;
   try {
