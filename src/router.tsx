@@ -101,6 +101,25 @@ export const router = createBrowserRouter([
             lazy: () =>
               lazyPage(async () => (await import('./routes/account/AccountPage.tsx')).AccountPage),
           },
+          {
+            path: 'print/season',
+            lazy: () =>
+              lazyPage(
+                async () => (await import('./routes/print/season/SeasonPrint.tsx')).SeasonPrint,
+              ),
+          },
+          {
+            path: 'print/chains/:id',
+            lazy: () =>
+              lazyPage(
+                async () => (await import('./routes/print/chain/ChainPrint.tsx')).ChainPrint,
+              ),
+          },
+          {
+            path: 'print/brew-sheets/:id',
+            lazy: () =>
+              lazyPage(async () => (await import('./routes/print/sheet/BrewSheet.tsx')).BrewSheet),
+          },
           { path: '*', element: <NotFoundPage /> },
         ],
       },

@@ -141,7 +141,7 @@ export const Vessel = memo(function Vessel(props: VesselProps) {
       <Paints id={id} srm={srm} shape={shape} />
       {srm !== null && (
         <ellipse
-          className="hidden dark:block"
+          className="lamp hidden dark:block"
           cx="42"
           cy="78"
           rx="82"

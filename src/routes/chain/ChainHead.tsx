@@ -6,6 +6,7 @@ import { formatMoney } from '#shared/units/money.ts';
 import { useBrewery } from '../../app/useBrewery.ts';
 import { GenerationMarks } from '../../components/drawn/GenerationMarks.tsx';
 import { Button } from '../../components/ui/Button.tsx';
+import { LinkButton } from '../../components/ui/LinkButton.tsx';
 import { TextLink } from '../../components/ui/TextLink.tsx';
 import { ShareDialog } from '../board/share/ShareDialog.tsx';
 import { useBoardView } from '../board/view/BoardView.tsx';
@@ -41,10 +42,10 @@ export function ChainHead({ chain }: { chain: Chain }) {
         <Branches chain={chain} />
       </div>
       <div className="flex gap-2.5 print:hidden">
-        <Button onClick={() => window.print()}>
+        <LinkButton to={path(`print/chains/${chain.id}`)}>
           <Printer size={17} aria-hidden />
           Print
-        </Button>
+        </LinkButton>
         {can.editChains && <ShareButton chain={chain} />}
       </div>
     </header>

@@ -5,13 +5,12 @@ import { formatBare, unitOf } from '#shared/units/quantity.ts';
 import { useBoardView } from '../board/view/BoardView.tsx';
 import { AliveLane } from './plots/AliveLane.tsx';
 import { GravityLane } from './plots/GravityLane.tsx';
+import type { LaneOf } from './plots/Lane.tsx';
 import { ValueLane } from './plots/ValueLane.tsx';
 import { ChainShelf } from './shelf/ChainShelf.tsx';
 
 /** The shelf, and under its vessels what changes along it; the two scroll as one. */
 export function ChainPlots({ chain, course }: { chain: Chain; course: Course }) {
-  const { board, units } = useBoardView();
-  const money = (minor: number) => formatMoney(minor, board.brewery.currency);
   return (
     <section
       aria-label={`Batches and figures of ${chain.name}`}
@@ -19,11 +18,23 @@ export function ChainPlots({ chain, course }: { chain: Chain; course: Course }) 
     >
       <ChainShelf chain={chain} course={course} />
       <h2 className="sr-only">Along the chain</h2>
-      <GravityLane course={course} />
+      <Lanes course={course} />
+    </section>
+  );
+}
+
+/** Gravity, colour, bitterness, what is alive and what it cost. */
+export function Lanes({ course, whole = course }: LaneOf) {
+  const { board, units } = useBoardView();
+  const money = (minor: number) => formatMoney(minor, board.brewery.currency);
+  return (
+    <>
+      <GravityLane course={course} whole={whole} />
       <ValueLane
         title="Colour"
         unit={`${unitOf('colour', units)} as poured`}
         course={course}
+        whole={whole}
         valueOf={({ srm }) => srm}
         say={(srm) => formatBare('colour', srm, units)}
         least={4}
@@ -33,19 +44,21 @@ export function ChainPlots({ chain, course }: { chain: Chain; course: Course }) 
         title="Bitterness"
         unit="IBU as poured"
         course={course}
+        whole={whole}
         valueOf={({ ibu }) => ibu}
         say={(ibu) => formatBare('bitterness', ibu, units)}
         least={20}
       />
-      <AliveLane course={course} />
+      <AliveLane course={course} whole={whole} />
       <ValueLane
         title="Cost"
         unit="yeast, for each batch so far"
         course={course}
+        whole={whole}
         valueOf={({ cost }) => cost}
         say={money}
         least={100}
       />
-    </section>
+    </>
   );
 }

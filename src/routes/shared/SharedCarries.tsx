@@ -1,5 +1,5 @@
 import type { SharedChain } from '#shared/api/share.ts';
-import { ALLERGEN_WORDS, CULTURE_WORDS } from '../../app/traitWords.ts';
+import { allergensLine, culturesLine } from '../../app/carriedWords.ts';
 import { PanelPart } from '../board/panel/PanelFrame.tsx';
 
 /** The usual cautions of a pour, each in one sentence. */
@@ -12,24 +12,13 @@ const CAUTIONS = [
 
 /** What may be in every beer of the chain, in plain words, whatever else the link leaves out. */
 export function SharedCarries({ shared }: { shared: SharedChain }) {
-  const { allergens, allergensUnknown, cultures, culturesUnknown } = shared.carries;
   return (
     <aside aria-label="What the chain carries" className="max-wide:mt-4 wide:pt-2">
       <PanelPart title="Allergens in the chain">
-        <p className="mt-1 text-touch">
-          {listed(
-            allergens.map((one) => ALLERGEN_WORDS[one]),
-            allergensUnknown,
-          )}
-        </p>
+        <p className="mt-1 text-touch">{allergensLine(shared.carries)}</p>
       </PanelPart>
       <PanelPart title="Live cultures and enzymes beside the yeast">
-        <p className="mt-1 text-touch">
-          {listed(
-            cultures.map((one) => CULTURE_WORDS[one]),
-            culturesUnknown,
-          )}
-        </p>
+        <p className="mt-1 text-touch">{culturesLine(shared.carries)}</p>
       </PanelPart>
       <PanelPart title="Cautions">
         <ul className="mt-1 list-disc space-y-1.5 pl-5 text-ink2 marker:text-edge">
@@ -44,11 +33,4 @@ export function SharedCarries({ shared }: { shared: SharedChain }) {
       </p>
     </aside>
   );
-}
-
-/** "Gluten, milk; not known of every beer." */
-function listed(words: readonly string[], isUnknown: boolean): string {
-  const known = words.map((word, at) => (at === 0 ? word : word.toLowerCase())).join(', ');
-  if (!isUnknown) return known === '' ? 'None declared.' : `${known}.`;
-  return known === '' ? 'Not known.' : `${known}; not known of every beer.`;
 }

@@ -1,6 +1,8 @@
+import { Printer } from 'lucide-react';
 import { Link } from 'react-router-dom';
 import { useBrewery } from '../../../app/useBrewery.ts';
 import { Button } from '../../../components/ui/Button.tsx';
+import { LinkButton } from '../../../components/ui/LinkButton.tsx';
 import { UndoButtons } from '../lift/UndoButtons.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { useBoardPanel } from '../view/useBoardPanel.ts';
@@ -11,6 +13,7 @@ import { BestMove } from './BestMove.tsx';
 export function BoardHead() {
   const { judged, can } = useBoardView();
   const { open } = useBoardPanel();
+  const { path } = useBrewery();
   return (
     <header className="flex flex-wrap items-end gap-x-5 gap-y-3 px-7 pt-4 pb-1.5">
       <div className="min-w-0 flex-1 basis-80">
@@ -21,6 +24,10 @@ export function BoardHead() {
       </div>
       <div className="flex flex-wrap items-center gap-2.5 print:hidden">
         {can.moveBatches && <UndoButtons />}
+        <LinkButton to={path('print/season')}>
+          <Printer size={17} aria-hidden />
+          Print
+        </LinkButton>
         {can.editChains && (
           <Button onClick={() => open({ kind: 'new', what: 'chain' })}>New shelf</Button>
         )}

@@ -1,4 +1,7 @@
+import { Printer } from 'lucide-react';
 import { useIsGuestHere } from '../../../api/board.ts';
+import { useBrewery } from '../../../app/useBrewery.ts';
+import { LinkButton } from '../../../components/ui/LinkButton.tsx';
 import { FoldedTalk } from '../../talk/FoldedTalk.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { useBoardPanel } from '../view/useBoardPanel.ts';
@@ -33,6 +36,7 @@ export function LinkPanel({ laterId }: { laterId: string }) {
 function OpenedLink({ laterId, earlierId }: { laterId: string; earlierId: string }) {
   const { close } = useBoardPanel();
   const isGuest = useIsGuestHere();
+  const { path } = useBrewery();
   const draft = useLinkDraft(laterId, earlierId);
   if (!draft) return null;
   const { earlier, later, answer } = draft;
@@ -49,6 +53,14 @@ function OpenedLink({ laterId, earlierId }: { laterId: string; earlierId: string
       <Advice advice={answer.advice} />
       <PassedChecks passed={answer.passed} />
       <LinkFacts later={later} />
+      {!isGuest && (
+        <p className="border-t border-line pt-3 pb-1">
+          <LinkButton size="small" look="quiet" to={path(`print/brew-sheets/${later.id}`)}>
+            <Printer size={16} aria-hidden />
+            Brew sheet
+          </LinkButton>
+        </p>
+      )}
       {!isGuest && later.chainId !== null && (
         <FoldedTalk chainId={later.chainId} about={{ kind: 'link', batchId: later.id }} />
       )}

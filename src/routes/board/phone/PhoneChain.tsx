@@ -1,5 +1,7 @@
 import type { Chain } from '#shared/api/chain.ts';
 import { formatMoney } from '#shared/units/money.ts';
+import { useBrewery } from '../../../app/useBrewery.ts';
+import { TextLink } from '../../../components/ui/TextLink.tsx';
 import { BestMove } from '../head/BestMove.tsx';
 import { UndoButtons } from '../lift/UndoButtons.tsx';
 import { GapSlot } from '../lift/GapSlot.tsx';
@@ -14,6 +16,7 @@ import { PhoneHead } from './PhoneHead.tsx';
 
 export function PhoneChain({ chain }: { chain: Chain }) {
   const { board, index, judged, units, can } = useBoardView();
+  const { path } = useBrewery();
   const ref = useUnfolding<HTMLDivElement>(chain.id);
   const batches = index.batchesOf(chain.id);
   const verdicts = judged.chains.get(chain.id);
@@ -55,6 +58,11 @@ export function PhoneChain({ chain }: { chain: Chain }) {
       <footer className="mx-[18px] mt-6 grid gap-3 border-t border-line pt-4 text-small text-ink2">
         <p>
           <b className="text-ink">{board.season.name}:</b> {seasonLine(judged.totals)}
+        </p>
+        <p>
+          <TextLink to={path('print/season')} className="inline-block py-2.5">
+            Print the season
+          </TextLink>
         </p>
         {can.moveBatches && (
           <>

@@ -1,8 +1,7 @@
-import type { Course } from '#shared/chain/course.ts';
 import { COLUMN, middleOf, widthOf } from '../columns.ts';
 import { timesText } from '../courseWords.ts';
 import { Label } from './Label.tsx';
-import { Lane } from './Lane.tsx';
+import { Lane, type LaneOf } from './Lane.tsx';
 import { labelSide, ratioScaleOf } from './scales.ts';
 import { Strokes } from './ValueLane.tsx';
 
@@ -13,10 +12,12 @@ const ROOM_BELOW = 32;
 const NEED = 1;
 
 /** Living cells of the cake under each wort against its need, with the 90 % interval. */
-export function AliveLane({ course }: { course: Course }) {
+export function AliveLane({ course, whole = course }: LaneOf) {
   const { points } = course;
   const ratios = points.map(({ alive }) => alive?.ratio.likely ?? null);
-  const ends = points.flatMap(({ alive }) => (alive ? [alive.ratio.low, alive.ratio.high] : []));
+  const ends = whole.points.flatMap(({ alive }) =>
+    alive ? [alive.ratio.low, alive.ratio.high] : [],
+  );
   const scale = ratioScaleOf([NEED, ...ends], { top: 30, bottom: HEIGHT - 20, least: 2 });
   const width = widthOf(points.length);
   const need = scale(NEED);

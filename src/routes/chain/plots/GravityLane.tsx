@@ -4,14 +4,14 @@ import { useBoardView } from '../../board/view/BoardView.tsx';
 import { gravityStep, gravityText } from '../../board/view/words.ts';
 import { betweenOf, middleOf } from '../columns.ts';
 import { Label } from './Label.tsx';
-import { Lane } from './Lane.tsx';
+import { Lane, type LaneOf } from './Lane.tsx';
 import { scaleOf, type Scale } from './scales.ts';
 
 const HEIGHT = 120;
 
 /** From original to final gravity, a bar of the beer's colour for each batch. */
-export function GravityLane({ course }: { course: Course }) {
-  const ends = course.points.flatMap(({ og, fg }) => [og, fg]);
+export function GravityLane({ course, whole = course }: LaneOf) {
+  const ends = whole.points.flatMap(({ og, fg }) => [og, fg]);
   const scale = scaleOf(ends, { top: 30, bottom: HEIGHT - 14, least: 0.02 });
   return (
     <Lane title="Gravity" unit="OG down to FG" height={HEIGHT} course={course}>

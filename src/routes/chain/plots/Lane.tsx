@@ -3,6 +3,12 @@ import type { Course } from '#shared/chain/course.ts';
 import type { Verdict } from '#shared/rules/vocabulary.ts';
 import { betweenOf, COLUMN, widthOf } from '../columns.ts';
 
+/** What a lane shows: a course, or a part of one on the scale of the whole. */
+export interface LaneOf {
+  course: Course;
+  whole?: Course;
+}
+
 interface LaneProps {
   title: string;
   unit: string;

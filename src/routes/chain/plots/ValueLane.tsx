@@ -1,14 +1,13 @@
-import type { Course, CoursePoint } from '#shared/chain/course.ts';
+import type { CoursePoint } from '#shared/chain/course.ts';
 import { flatBeer } from '../../../components/drawn/beerPaint.ts';
 import { middleOf } from '../columns.ts';
-import { Lane } from './Lane.tsx';
+import { Lane, type LaneOf } from './Lane.tsx';
 import { Label } from './Label.tsx';
 import { labelSide, scaleOf, strokesOf, type Scale } from './scales.ts';
 
-interface ValueLaneProps {
+interface ValueLaneProps extends LaneOf {
   title: string;
   unit: string;
-  course: Course;
   valueOf: (point: CoursePoint) => number | null;
   say: (value: number) => string;
   /** The smallest difference that fills the lane. */
@@ -22,9 +21,10 @@ const RADIUS = { dot: 6, drop: 11 } as const;
 
 /** One value a batch, joined where both are known: solid where it happened, dashed where it is a plan. */
 export function ValueLane(props: ValueLaneProps) {
-  const { title, unit, course, valueOf, say, least, height = 104, isColour = false } = props;
+  const { title, unit, course, whole = course, valueOf, say, least } = props;
+  const { height = 104, isColour = false } = props;
   const values = course.points.map(valueOf);
-  const scale = scaleOf(values, { top: 28, bottom: height - 26, least });
+  const scale = scaleOf(whole.points.map(valueOf), { top: 28, bottom: height - 26, least });
   return (
     <Lane title={title} unit={unit} height={height} course={course}>
       <Strokes values={values} scale={scale} points={course.points} />
