@@ -1,5 +1,6 @@
 import { and, eq, sql } from 'drizzle-orm';
 import type { Request } from 'express';
+import { z } from 'zod';
 import type { Role } from '#shared/api/people.ts';
 import type { Deps } from '../deps.ts';
 import type { Db } from '../db/client.ts';
@@ -19,8 +20,10 @@ export interface Member {
   person: PersonRow;
   role: Role;
   brewery: typeof brewery.$inferSelect;
-  /** The season that is worked on. */
+  /** The season that is worked on: the one that the address names, else the current one. */
   seasonId: string;
+  /** It is put away: it is read, not changed. */
+  isArchived: boolean;
   /** Null: a member. Else somebody of another brewery, and the chains that they may see. */
   guestOf: GuestChains | null;
 }
@@ -45,23 +48,45 @@ async function findMember(
 ): Promise<Member> {
   const slug = req.params.brewery;
   if (typeof slug !== 'string' || slug.length > 80 || slug.includes('\0')) throw notFound();
-  const [found] = await memberQuery(db).execute({ slug, personId: person.id });
+  const asked = seasonAsked(req);
+  const [found] = await memberQuery(db).execute({ slug, personId: person.id, asked });
   if (found) return { person, guestOf: null, ...found };
-  return findGuestOr404(db, slug, person);
+  return findGuestOr404(db, slug, asked, person);
+}
+
+const uuid = z.uuid().toLowerCase();
+
+/** Null: the current one. What cannot be a season is none. */
+function seasonAsked({ params, query }: Request): string | null {
+  const asked = params.season ?? query.season;
+  if (asked === undefined) return null;
+  const id = uuid.safeParse(asked);
+  if (!id.success) throw notFound();
+  return id.data;
 }
 
 /** A guest has the strongest of the roles that they have on a chain; each chain is asked again. */
-async function findGuestOr404(db: Db, slug: string, person: PersonRow): Promise<Member> {
-  const guest = await findGuest(db, slug, person.id);
+async function findGuestOr404(
+  db: Db,
+  slug: string,
+  asked: string | null,
+  person: PersonRow,
+): Promise<Member> {
+  const guest = await findGuest(db, slug, asked, person.id);
   if (!guest) throw notFound();
-  const { brewery: owner, seasonId, chains } = guest;
+  const { chains, ...where } = guest;
   const role = [...chains.values()].includes('brewer') ? 'brewer' : 'taster';
-  return { person, role, brewery: owner, seasonId, guestOf: chains };
+  return { person, role, ...where, guestOf: chains };
 }
 
 const memberQuery = oncePer((db: Db) =>
   db
-    .select({ brewery, role: membership.role, seasonId: season.id })
+    .select({
+      brewery,
+      role: membership.role,
+      seasonId: season.id,
+      isArchived: sql<boolean>`${season.archivedAt} is not null`,
+    })
     .from(brewery)
     .innerJoin(membership, eq(membership.breweryId, brewery.id))
     .innerJoin(season, eq(season.breweryId, brewery.id))
@@ -69,9 +94,10 @@ const memberQuery = oncePer((db: Db) =>
       and(
         eq(brewery.slug, sql.placeholder('slug')),
         eq(membership.personId, sql.placeholder('personId')),
+        sql`(${sql.placeholder('asked')}::uuid is null or ${season.id} = ${sql.placeholder('asked')}::uuid)`,
       ),
     )
-    .orderBy(season.createdAt)
+    .orderBy(sql`(${season.id} = ${brewery.currentSeasonId}) desc nulls last`, season.createdAt)
     .limit(1)
     .prepare('member'),
 );

@@ -48,6 +48,8 @@ export const guestShelf = z.strictObject({
   role: guestRole,
   fromBrewery: f.name,
   ownerSlug: f.slug,
+  /** The season of theirs that it stands in. */
+  seasonId: f.id,
   chainId: f.id,
   chainName: f.name,
 });
