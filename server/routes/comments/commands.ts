@@ -1,4 +1,5 @@
 import { eq, sql } from 'drizzle-orm';
+import type { Talked } from '#shared/record/talk.ts';
 import type { Comment, CommentCreate, CommentPatch } from '#shared/api/comment.ts';
 import type { Member } from '../../auth/whoAsks.ts';
 import type { Clock } from '../../clock.ts';
@@ -9,6 +10,8 @@ import { demandMade, isRepeated } from '../../http/create.ts';
 import { demandVersion } from '../../http/etag.ts';
 import { canRemoveComments } from '../../policies.ts';
 import { problem } from '../../problems.ts';
+import { demandOpen } from '../board/changeBoard.ts';
+import { lockSeason } from '../board/locks.ts';
 import { raiseRevision } from '../board/record.ts';
 import {
   findChain,
@@ -18,6 +21,7 @@ import {
   type TalkedChain,
 } from './find.ts';
 import { presentComment } from './present.ts';
+import { recordTalk } from './record.ts';
 import { saidOf } from './said.ts';
 
 interface Scene {
@@ -31,18 +35,28 @@ interface Talking {
   now: Date;
 }
 
-/** Changes a chain's talk, and lets everybody on the season's board know. */
-function talk<T>(
+/** Null: nothing new was said. */
+type Change = (talking: Talking) => Promise<{ id: string; did: Talked | null }>;
+
+/** Changes a chain's talk, records that, and lets everybody on the season's board know. */
+function talk(
   { db, clock }: Scene,
   member: Member,
   chainId: string | undefined,
-  change: (talking: Talking) => Promise<T>,
-): Promise<T> {
+  change: Change,
+): Promise<Comment> {
   return inTransaction(db, async (tx) => {
+    const { seasonId } = await findChain(tx, member, chainId);
+    await lockSeason(tx, seasonId);
     const chain = await findChain(tx, member, chainId);
-    const result = await change({ tx, chain, now: clock.now() });
+    demandOpen({ season: chain });
+    const now = clock.now();
+    const { id, did } = await change({ tx, chain, now });
+    const found = await findComment(tx, chain.id, id);
+    if (did === null) return presentComment(found);
     await raiseRevision(tx, chain.seasonId);
-    return result;
+    await recordTalk({ tx, member, chain, now }, found, did);
+    return presentComment(found);
   });
 }
 
@@ -55,7 +69,7 @@ export const addComment = (
   talk(scene, member, chainId, async ({ tx, chain, now }) => {
     const [before] = await selectComments(tx).where(eq(comment.id, body.id));
     const known = before?.row.chainId === chain.id ? presentComment(before) : undefined;
-    if (isRepeated(known, body)) return known;
+    if (isRepeated(known, body)) return { id: body.id, did: null };
     const made = await tx
       .insert(comment)
       .values({
@@ -72,7 +86,7 @@ export const addComment = (
       .onConflictDoNothing({ target: comment.id })
       .returning();
     demandMade(made);
-    return presentComment(await findComment(tx, chain.id, body.id));
+    return { id: body.id, did: 'said' };
   });
 
 interface Named {
@@ -98,8 +112,13 @@ export const editComment = (
     demandVersion(version, found.row.version, presentComment(found));
     if ('text' in patch && found.row.deletedAt !== null)
       throw problem('in-use', { detail: 'It was removed: put it back first' });
-    await write(tx, found, 'text' in patch ? { ...patch, editedAt: now } : { deletedAt: null });
-    return presentComment(await findComment(tx, chain.id, commentId));
+    if ('text' in patch) {
+      await write(tx, found, { ...patch, editedAt: now });
+      return { id: commentId, did: 'changed' };
+    }
+    if (found.row.deletedAt === null) return { id: commentId, did: null };
+    await write(tx, found, { deletedAt: null });
+    return { id: commentId, did: 'put-back' };
   });
 
 /** Takes the words away; that something was said stays. */
@@ -112,8 +131,9 @@ export const removeComment = (
     const found = await findComment(tx, chain.id, commentId);
     demandMayRemove(found, member);
     demandVersion(version, found.row.version, presentComment(found));
-    if (found.row.deletedAt === null) await write(tx, found, { deletedAt: now });
-    return presentComment(await findComment(tx, chain.id, commentId));
+    if (found.row.deletedAt !== null) return { id: commentId, did: null };
+    await write(tx, found, { deletedAt: now });
+    return { id: commentId, did: 'removed' };
   });
 
 function demandMayRemove(found: CommentRow, member: Member): void {

@@ -1,7 +1,8 @@
-import { and, eq } from 'drizzle-orm';
+import { and, eq, sql } from 'drizzle-orm';
 import type { Member } from '../../auth/whoAsks.ts';
 import type { Db, Tx } from '../../db/client.ts';
 import { chain } from '../../db/schema/chain.ts';
+import { season } from '../../db/schema/season.ts';
 import { comment } from '../../db/schema/talk.ts';
 import { person } from '../../db/schema/people.ts';
 import { notFound } from '../../problems.ts';
@@ -9,8 +10,14 @@ import { notFound } from '../../problems.ts';
 /** The chain that is talked about, in whatever season of this brewery. */
 export async function findChain(db: Db | Tx, { brewery }: Member, id: string | undefined) {
   const [row] = await db
-    .select({ id: chain.id, seasonId: chain.seasonId })
+    .select({
+      id: chain.id,
+      name: chain.name,
+      seasonId: chain.seasonId,
+      isArchived: sql<boolean>`${season.archivedAt} is not null`,
+    })
     .from(chain)
+    .innerJoin(season, eq(season.id, chain.seasonId))
     .where(and(eq(chain.breweryId, brewery.id), eq(chain.id, id ?? '')));
   if (!row) throw notFound();
   return row;

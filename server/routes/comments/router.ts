@@ -39,7 +39,7 @@ const add = forMember(
     body: commentCreate,
     answer: comment,
     status: 201,
-    problems: ['already-exists'],
+    problems: ['already-exists', 'season-archived'],
   },
   canTalk,
   async (asked, member) => {
@@ -58,7 +58,7 @@ const edit = forMember(
     answer: comment,
     status: 200,
     ifMatch: true,
-    problems: ['in-use'],
+    problems: ['in-use', 'season-archived'],
   },
   canTalk,
   async (asked, member) => {
@@ -76,6 +76,7 @@ const remove = forMember(
     answer: comment,
     status: 200,
     ifMatch: true,
+    problems: ['season-archived'],
   },
   canTalk,
   async (asked, member) => {

@@ -31,7 +31,14 @@ export async function readHouseRules(
     .select({ change, name: person.name })
     .from(change)
     .innerJoin(person, eq(person.id, change.personId))
-    .where(and(inArray(change.seasonId, seasons), sql`${change.touches} @> array[${id}::uuid]`))
+    .where(
+      and(
+        inArray(change.seasonId, seasons),
+        sql`${change.touches} @> array[${id}::uuid]`,
+        // The brewery's own facts are under the same id.
+        sql`${change.after} -> 'rows' ? 'house_rules'`,
+      ),
+    )
     .orderBy(desc(change.seq))
     .limit(TOLD);
   return {

@@ -44,8 +44,8 @@ export function AccountMenu() {
 }
 
 function OtherBreweries() {
-  const { slug } = useBrewery();
-  const others = useSession().data?.breweries.filter((m) => m.brewery.slug !== slug) ?? [];
+  const { brewerySlug } = useBrewery();
+  const others = useSession().data?.breweries.filter((m) => m.brewery.slug !== brewerySlug) ?? [];
   if (others.length === 0) return null;
   return (
     <>
