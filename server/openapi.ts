@@ -5,7 +5,7 @@ import {
 } from '@asteasolutions/zod-to-openapi';
 import { z } from 'zod';
 import { problem as problemContract, PROBLEMS, type ProblemKind } from '#shared/api/problem.ts';
-import type { Operation, Route } from './http/operation.ts';
+import type { Route } from './http/operation.ts';
 
 // Only schemas that are made from here on can bear a name in the document.
 extendZodWithOpenApi(z);
@@ -29,7 +29,7 @@ export function openApiDocument(routes: readonly Route[]) {
       operationId: operation.name,
       summary: operation.summary,
       security: route.who === 'anyone' ? [] : [{ [SESSION]: [] }],
-      request: requestOf(operation),
+      request: requestOf(route),
       responses: responsesOf(route, problem),
     });
   }
@@ -51,11 +51,22 @@ export const templateOf = (path: string) => path.replace(/:([a-zA-Z]+)/g, '{$1}'
 const namesIn = (path: string) =>
   Array.from(path.matchAll(/:([a-zA-Z]+)/g), ([, name = '']) => name);
 
-function requestOf({ path, body, query, ifMatch }: Operation) {
+/** Where an address names no season itself, one may stand behind it. */
+const ofSeason = z.object({
+  season: z
+    .uuid()
+    .optional()
+    .openapi({ description: 'A season of the brewery; without it the current one' }),
+});
+
+function requestOf({ operation, who }: Route) {
+  const { path, body, ifMatch } = operation;
+  const takesSeason = who === 'member' && !path.includes(':season');
+  const query = takesSeason ? ofSeason.extend(operation.query?.shape ?? {}) : operation.query;
   const names = namesIn(path);
   const params = z.object(
     Object.fromEntries(
-      names.map((name) => [name, /^(id|[a-z]+Id)$/.test(name) ? z.uuid() : z.string()]),
+      names.map((name) => [name, /^(id|season|[a-z]+Id)$/.test(name) ? z.uuid() : z.string()]),
     ),
   );
   return {

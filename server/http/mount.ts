@@ -63,7 +63,7 @@ function parse(route: Route, deps: Deps & Services, req: Request, res: Response)
 function idsOf(req: Request): Record<string, string> {
   const params: Record<string, string> = {};
   for (const [name, value] of Object.entries(req.params)) {
-    const isId = /^(id|[a-z]+Id)$/.test(name);
+    const isId = /^(id|season|[a-z]+Id)$/.test(name);
     if (typeof value !== 'string' || (isId && !uuid.safeParse(value).success)) throw notFound();
     params[name] = isId ? value.toLowerCase() : value;
   }

@@ -29,6 +29,8 @@ interface Where {
 
 function rowsOf(name: TableName, { breweryId, seasonId }: Where): SQL {
   switch (name) {
+    case 'brewery':
+      return sql`r.id = ${breweryId}::uuid`;
     case 'season':
       return sql`r.id = ${seasonId}::uuid`;
     case 'house_rules':

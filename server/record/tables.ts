@@ -1,7 +1,7 @@
 import { getTableColumns } from 'drizzle-orm';
 import { toSnakeCase } from 'drizzle-orm/casing';
 import type { PgTable } from 'drizzle-orm/pg-core';
-import { houseRules } from '../db/schema/brewery.ts';
+import { brewery, houseRules } from '../db/schema/brewery.ts';
 import { cake } from '../db/schema/cake.ts';
 import { batch, chain } from '../db/schema/chain.ts';
 import { season } from '../db/schema/season.ts';
@@ -9,6 +9,7 @@ import { vessel, yeast, yeastLine } from '../db/schema/stock.ts';
 
 /** The tables whose rows make a board. A row is written after what it refers to, and goes before it. */
 export const TABLES = {
+  brewery: { table: brewery, key: 'id' },
   season: { table: season, key: 'id' },
   house_rules: { table: houseRules, key: 'brewery_id' },
   yeast: { table: yeast, key: 'id' },
@@ -23,10 +24,13 @@ export type TableName = keyof typeof TABLES;
 export const TABLE_NAMES = Object.keys(TABLES) as TableName[];
 
 /** Columns that an edit raises, or that follow from the others. */
-const COUNTED = new Set(['version', 'revision', 'place', 'position', 'shelf_id', 'chain_id']);
+const COUNTED = ['version', 'revision', 'place', 'position', 'shelf_id', 'chain_id'];
+/** Which season is current, and which is put away: said in words, and not undone with the board. */
+const OF_SEASONS = ['archived_at', 'current_season_id'];
+const APART = new Set([...COUNTED, ...OF_SEASONS]);
 
 /** What the record compares: everything of a row that somebody wrote. */
-export const isCompared = (column: string): boolean => !COUNTED.has(column);
+export const isCompared = (column: string): boolean => !APART.has(column);
 
 const writable = new Map<TableName, ReadonlySet<string>>();
 

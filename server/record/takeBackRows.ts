@@ -55,6 +55,8 @@ function sinceWords(table: TableName, about: Row | null, was: Row | null, is: Ro
 
 function nameOf(table: TableName, row: Row | null): string {
   switch (table) {
+    case 'brewery':
+      return 'The brewery';
     case 'season':
       return 'The season';
     case 'house_rules':

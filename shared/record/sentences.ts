@@ -150,12 +150,17 @@ const WEEKDAYS = ['Mon', 'Tue', 'Wed', 'Thu', 'Fri', 'Sat', 'Sun'];
 const weekdays = (days: readonly number[]): string =>
   days.length === 0 ? 'no day' : listed(days.map((day) => WEEKDAYS[day - 1] ?? ''));
 
+const dayOrNone = (value: unknown): string | null =>
+  typeof value === 'string' ? `${formatDay(value)} ${value.slice(0, 4)}` : null;
+
 export function tellSeason(before: Season, after: Season): Told {
   const { blocked, freed } = blockedChange(before.blockedDays, after.blockedDays);
   const rest = told(
     {
       brewWeekdays: { label: 'brew days', say: (value) => weekdays(value as number[]) },
       brewsPerDay: { label: 'brews a day', say: String },
+      firstDay: { label: 'first day', say: dayOrNone },
+      lastDay: { label: 'last day', say: dayOrNone },
     },
     before,
     after,

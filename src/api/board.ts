@@ -5,12 +5,13 @@ import {
   type QueryClient,
 } from '@tanstack/react-query';
 import { createContext, use, useMemo, useSyncExternalStore } from 'react';
-import { useParams } from 'react-router-dom';
 import { board as boardContract, type Board } from '#shared/api/board.ts';
 import type { UnitPrefs } from '#shared/api/units.ts';
 import { api } from '#shared/api/urls.ts';
 import { judgeBoard, type JudgedBoard } from '#shared/chain/judgeBoard.ts';
+import { usePlace } from '../app/useBrewery.ts';
 import { useUnits } from '../app/useUnits.ts';
+import { KEPT } from '../kept/meta.ts';
 import { request } from './client.ts';
 import { withPending } from './pendingMoves.ts';
 import { pendingOf } from './pendingStore.ts';
@@ -30,12 +31,17 @@ export function boardQuery(slug: string) {
     staleTime: 30_000,
     refetchOnWindowFocus: 'always',
     networkMode: 'always',
+    meta: KEPT,
   });
 }
 
 /** A move may be answered while a slower read is under way; the read is then the older of the two. */
 function newest(before: Board | undefined, now: Board | undefined, fresh: Board): Board {
-  const isOvertaken = now && now !== before && now.season.revision > fresh.season.revision;
+  const isOvertaken =
+    now &&
+    now !== before &&
+    now.season.id === fresh.season.id &&
+    now.season.revision > fresh.season.revision;
   return isOvertaken ? now : fresh;
 }
 
@@ -89,10 +95,10 @@ export const useIsGuestHere = (): boolean => use(OtherBoardSlug) !== null;
 /** Whose board it is that is drawn here: the brewery's in the address, if no other is named. */
 export function useBoardSlug(): string {
   const other = use(OtherBoardSlug);
-  const { brewery } = useParams();
+  const place = usePlace();
   if (other !== null) return other;
-  if (!brewery) throw new Error('A board is shown under the address of its brewery');
-  return brewery;
+  if (place === null) throw new Error('A board is shown under the address of its brewery');
+  return place;
 }
 
 /** The board of the brewery in the address, with the moves that are still on their way. */

@@ -17,7 +17,7 @@ export interface CatchUp {
  * of one's own that are, are waited for: mostly they bring what was heard of. What is read waits for
  * the end of a drag by itself (`boardQuery`).
  */
-export function createCatchUp(client: QueryClient, slug: string): CatchUp {
+export function createCatchUp(client: QueryClient, slug: string, seasonId: string): CatchUp {
   const { queryKey } = boardQuery(slug);
   let wanted = -1;
   let isForced = false;
@@ -25,7 +25,9 @@ export function createCatchUp(client: QueryClient, slug: string): CatchUp {
 
   const isBehind = () => {
     const board = client.getQueryData(queryKey);
-    return board !== undefined && (isForced || board.season.revision < wanted);
+    // Where another season has become the current one, its own revisions count.
+    if (board === undefined || board.season.id !== seasonId) return false;
+    return isForced || board.season.revision < wanted;
   };
   const work = async () => {
     // A read that waits for the end of a drag is older than what was heard since.

@@ -20,7 +20,7 @@ export function useLiveSeason(slug: string) {
   });
   useEffect(() => {
     if (seasonId === undefined) return;
-    const catchUp = createCatchUp(client, slug);
+    const catchUp = createCatchUp(client, slug, seasonId);
     const hear = (told: Told) => {
       switch (told.kind) {
         case 'state':

@@ -59,6 +59,7 @@ it('puts the chain on the guest’s own board, and shows that chain alone', asyn
       role: 'brewer',
       fromBrewery: 'Test brewery',
       ownerSlug: s.slug,
+      seasonId: (await boardOf(s.head, s.slug)).season.id,
       chainId: s.chainA,
       chainName: 'Shelf A',
     },

@@ -85,6 +85,7 @@ function address({ path }: Operation): string {
   return path
     .replace('{brewery}', season.slug)
     .replace('{id}', ids[resource] ?? '')
+    .replace('{season}', ids.seasons ?? '')
     .replace('{commentId}', ids[resource] ?? '')
     .replace('{token}', 'no-such-token');
 }
@@ -106,10 +107,12 @@ async function badRequests(operation: Operation, visitor: Visitor): Promise<Repl
   const full = schema ? { body: {} } : {};
   for (const odd of ODD_NAMES)
     if (path.includes('{brewery}'))
-      await ask(path.replace('{brewery}', odd).replace('{id}', season.chainA), full);
+      await ask(path.replace('{brewery}', odd).replace(/\{(id|season)\}/, season.chainA), full);
   for (const odd of ODD_IDS)
-    if (/\{(id|token)\}/.test(path))
-      await ask(path.replace('{brewery}', season.slug).replace(/\{(id|token)\}/, odd), full);
+    if (/\{(id|season|token)\}/.test(path))
+      await ask(path.replace('{brewery}', season.slug).replace(/\{(id|season|token)\}/, odd), full);
+  for (const odd of ODD_IDS)
+    if (path.includes('{brewery}')) await ask(`${url}?season=${odd}`, { ...full, headers: tag });
   for (const odd of ODD_TAGS) await ask(url, { ...full, headers: { 'If-Match': odd } });
   for (const odd of ['?a[b]=c', '?%00', '?x=%E0%A4%A', `?${'q=1&'.repeat(500)}`, '?__proto__=1'])
     await ask(url + odd, { ...full, headers: tag });

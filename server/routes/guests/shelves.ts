@@ -15,6 +15,7 @@ export async function guestShelves(db: Db, member: Member): Promise<GuestShelf[]
       role: chainGuest.role,
       fromBrewery: brewery.name,
       ownerSlug: brewery.slug,
+      seasonId: chain.seasonId,
       chainId: chain.id,
       chainName: chain.name,
     })

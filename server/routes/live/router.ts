@@ -1,21 +1,17 @@
-import { and, eq } from 'drizzle-orm';
 import type { Request } from 'express';
 import { liveQuery } from '#shared/api/live.ts';
 import { api } from '#shared/api/urls.ts';
 import { tokenIn } from '../../auth/cookie.ts';
 import { hashToken } from '../../auth/tokens.ts';
-import type { Db } from '../../db/client.ts';
-import { season } from '../../db/schema/season.ts';
 import { pathOf } from '../../http/pathOf.ts';
 import { forMember } from '../../http/route.ts';
 import { canRead } from '../../policies.ts';
-import { notFound } from '../../problems.ts';
 
 const watch = forMember(
   {
     name: 'watchSeason',
     method: 'get',
-    path: pathOf(api.seasonEvents(':brewery', ':id')),
+    path: pathOf(api.seasonEvents(':brewery', ':season')),
     summary:
       'What happens on a season’s board, as Server-Sent Events: revisions after `since` (or Last-Event-ID), and who is here',
     query: liveQuery,
@@ -24,23 +20,13 @@ const watch = forMember(
     status: 200,
   },
   canRead,
-  async ({ db, live, req, params }, { person, brewery }) => {
-    const seasonId = await demandSeason(db, brewery.id, params.id ?? '');
+  async ({ live, req }, { person, brewery, seasonId }) => {
     const since = sinceOf(req);
     const tokenHash = hashToken(tokenIn(req) ?? '');
     const watcher = { personId: person.id, tokenHash, breweryId: brewery.id, seasonId };
     return { stream: (res) => live.open(res, watcher, since) };
   },
 );
-
-async function demandSeason(db: Db, breweryId: string, id: string): Promise<string> {
-  const [row] = await db
-    .select({ id: season.id })
-    .from(season)
-    .where(and(eq(season.breweryId, breweryId), eq(season.id, id)));
-  if (!row) throw notFound();
-  return row.id;
-}
 
 /** A browser that comes back by itself names the last event; one that never came says what it has read. */
 function sinceOf(req: Request): number | undefined {

@@ -11,6 +11,7 @@ import type { EditSide } from '../../record/difference.ts';
 import { TABLE_NAMES, type TableName } from '../../record/tables.ts';
 
 const MAY: Record<TableName, (member: InRole) => boolean> = {
+  brewery: canEditSeason,
   season: canEditSeason,
   house_rules: canEditSeason,
   yeast: canEditYeastsAndVessels,

@@ -6,7 +6,7 @@ import { oncePer } from '../../db/oncePer.ts';
 import { change } from '../../db/schema/change.ts';
 import type { Db, Tx } from '../../db/client.ts';
 import type { Deps } from '../../deps.ts';
-import { readBoard } from '../board/changeBoard.ts';
+import { demandOpen, readBoard } from '../board/changeBoard.ts';
 import { lockSeason, lockShelves } from '../board/locks.ts';
 import { createLane, type Lane, type Outcome } from './lane.ts';
 import { MoveGroup } from './moveGroup.ts';
@@ -56,6 +56,7 @@ async function grant(group: readonly Wish[]): Promise<Outcome<Moved>[]> {
     await lockSeason(tx, member.seasonId);
     const now = deps.clock.now();
     const board = await readBoard(tx, member, now);
+    demandOpen(board);
     const made = new MoveGroup({ tx, board, now }, await madeBefore(tx, group));
     for (const wish of group) await made.add(wish);
     return made.store();

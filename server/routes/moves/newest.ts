@@ -30,7 +30,8 @@ export async function newestOwn(
       order by c.seq desc limit ${REACH}
     ), newest as (
       select max(seq) as seq from change
-      where season_id = ${seasonId} and person_id = ${personId} and kind in ('move', 'edit')
+      where season_id = ${seasonId} and person_id = ${personId} 
+        and (kind = 'move' or (kind = 'edit' and after ? 'rows'))
     )
     select
       (select json_build_object('id', id, 'what', what) from own

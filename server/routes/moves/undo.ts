@@ -7,7 +7,7 @@ import { inTransaction } from '../../db/inTransaction.ts';
 import { change } from '../../db/schema/change.ts';
 import type { Deps } from '../../deps.ts';
 import { problem } from '../../problems.ts';
-import { readBoard } from '../board/changeBoard.ts';
+import { demandOpen, readBoard } from '../board/changeBoard.ts';
 import type { Hand } from '../board/hand.ts';
 import { lockSeason, lockShelves } from '../board/locks.ts';
 import { raiseRevision, writeEntry } from '../board/record.ts';
@@ -33,6 +33,7 @@ export function takeBack(
     await lockSeason(tx, member.seasonId);
     const now = deps.clock.now();
     const hand = { tx, member, board: await readBoard(tx, member, now), now };
+    demandOpen(hand.board);
     const newest = await newestOwn(tx, member.seasonId, member.person.id);
     if (newest[way]?.id === changeId) return carryOut(hand, way, await rowOf(hand, changeId));
     const done = await doneAlready(hand, way, changeId);

@@ -10,15 +10,15 @@ export const recordRoutes = [
     {
       name: 'readRecord',
       method: 'get',
-      path: pathOf(api.changes(':brewery', ':id')),
+      path: pathOf(api.changes(':brewery', ':season')),
       summary: 'Everything that happened in a season, newest first',
       query: recordQuery,
       answer: recordPage,
       status: 200,
     },
     canRead,
-    async ({ db, params, req }, { brewery }) => ({
-      body: await readRecord(db, brewery, params.id ?? '', recordQuery.parse(req.query)),
+    async ({ db, req }, { brewery, seasonId }) => ({
+      body: await readRecord(db, brewery, seasonId, recordQuery.parse(req.query)),
     }),
   ),
 ];

@@ -39,7 +39,7 @@ afterEach(() => {
 });
 
 it('reads the board where the server is ahead, and not where it is not', async () => {
-  const { heard } = createCatchUp(client, SLUG);
+  const { heard } = createCatchUp(client, SLUG, boardAt(1).season.id);
   heard(1);
   await new Promise((resolve) => setTimeout(resolve, 20));
   expect(server.reads).toBe(0);
@@ -51,7 +51,7 @@ it('reads the board where the server is ahead, and not where it is not', async (
 });
 
 it('reads again after a read that was under way too early', async () => {
-  const { heard } = createCatchUp(client, SLUG);
+  const { heard } = createCatchUp(client, SLUG, boardAt(1).season.id);
   void client.invalidateQueries(boardQuery(SLUG));
   server.revision = 2;
   heard(2);
@@ -60,7 +60,7 @@ it('reads again after a read that was under way too early', async () => {
 });
 
 it('lets moves of one’s own be answered first', async () => {
-  const { heard } = createCatchUp(client, SLUG);
+  const { heard } = createCatchUp(client, SLUG, boardAt(1).season.id);
   const move = { id: '', batchId: '', toChainId: 'bench', afterBatchId: null } as const;
   pendingOf(SLUG).set([{ ...move, expectedChainId: null, dates: 'pull' }]);
   server.revision = 2;
@@ -74,7 +74,7 @@ it('lets moves of one’s own be answered first', async () => {
 });
 
 it('shows nothing during a drag, looks at the newest all the same, and shows that after it', async () => {
-  const { heard } = createCatchUp(client, SLUG);
+  const { heard } = createCatchUp(client, SLUG, boardAt(1).season.id);
   const seen: number[] = [];
   const letGo = boardStillness.hold(({ season }) => seen.push(season.revision));
   for (const revision of [2, 3]) {
@@ -89,7 +89,7 @@ it('shows nothing during a drag, looks at the newest all the same, and shows tha
 });
 
 it('rests after a failed read, and goes on with the next word', async () => {
-  const { heard } = createCatchUp(client, SLUG);
+  const { heard } = createCatchUp(client, SLUG, boardAt(1).season.id);
   const { fetch } = globalThis;
   vi.stubGlobal('fetch', () => Promise.reject(new TypeError('lost')));
   server.revision = 2;
@@ -101,7 +101,7 @@ it('rests after a failed read, and goes on with the next word', async () => {
 });
 
 it('reads for a chain that is here as a guest, whatever the revision', async () => {
-  const { elsewhere } = createCatchUp(client, SLUG);
+  const { elsewhere } = createCatchUp(client, SLUG, boardAt(1).season.id);
   elsewhere();
   await expect.poll(() => server.reads).toBe(1);
 });

@@ -1,4 +1,5 @@
 import { Suspense } from 'react';
+import { placeOf } from '#shared/api/urls.ts';
 import { Skeleton } from '../../../components/ui/Skeleton.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { GuestFault } from './GuestFault.tsx';
@@ -11,7 +12,7 @@ export function GuestShelves() {
   return board.guests.map((guest) => (
     <GuestFault key={guest.guestId} name={guest.chainName} slug={slug}>
       <Suspense fallback={<Skeleton rows={1} label={`Loading ${guest.chainName}`} />}>
-        <OtherBoard slug={guest.ownerSlug}>
+        <OtherBoard slug={placeOf(guest.ownerSlug, guest.seasonId)}>
           <GuestShelf guest={guest} />
         </OtherBoard>
       </Suspense>
