@@ -1,9 +1,75 @@
-import { createBrowserRouter } from 'react-router-dom';
+import { createBrowserRouter, type RouteObject } from 'react-router-dom';
 import { lazyPage, tellTheWay } from './app/lazyPage.ts';
 import { Root } from './app/Root.tsx';
 import { ErrorPage } from './routes/error/ErrorPage.tsx';
 import { NotFoundPage } from './routes/error/NotFoundPage.tsx';
 import { WelcomePage } from './routes/welcome/WelcomePage.tsx';
+
+/** Pages of a brewery: in its current season, or in the one that the address names. */
+const ofBrewery = {
+  lazy: () => lazyPage(async () => (await import('./routes/shell/Shell.tsx')).Shell),
+  errorElement: <ErrorPage />,
+  children: [
+    {
+      index: true,
+      lazy: () => lazyPage(async () => (await import('./routes/board/BoardPage.tsx')).BoardPage),
+    },
+    {
+      path: 'chains/:id',
+      lazy: () => lazyPage(async () => (await import('./routes/chain/ChainPage.tsx')).ChainPage),
+    },
+    {
+      path: 'yeasts',
+      lazy: () => lazyPage(async () => (await import('./routes/yeasts/YeastsPage.tsx')).YeastsPage),
+    },
+    {
+      path: 'yeasts/:id/family',
+      lazy: () => lazyPage(async () => (await import('./routes/family/FamilyPage.tsx')).FamilyPage),
+    },
+    {
+      path: 'vessels',
+      lazy: () =>
+        lazyPage(async () => (await import('./routes/vessels/VesselsPage.tsx')).VesselsPage),
+    },
+    {
+      path: 'people',
+      lazy: () => lazyPage(async () => (await import('./routes/people/PeoplePage.tsx')).PeoplePage),
+    },
+    {
+      path: 'rules',
+      lazy: () => lazyPage(async () => (await import('./routes/rules/RulesPage.tsx')).RulesPage),
+    },
+    {
+      path: 'record',
+      lazy: () => lazyPage(async () => (await import('./routes/record/RecordPage.tsx')).RecordPage),
+    },
+    {
+      path: 'season',
+      lazy: () => lazyPage(async () => (await import('./routes/season/SeasonPage.tsx')).SeasonPage),
+    },
+    {
+      path: 'account',
+      lazy: () =>
+        lazyPage(async () => (await import('./routes/account/AccountPage.tsx')).AccountPage),
+    },
+    {
+      path: 'print/season',
+      lazy: () =>
+        lazyPage(async () => (await import('./routes/print/season/SeasonPrint.tsx')).SeasonPrint),
+    },
+    {
+      path: 'print/chains/:id',
+      lazy: () =>
+        lazyPage(async () => (await import('./routes/print/chain/ChainPrint.tsx')).ChainPrint),
+    },
+    {
+      path: 'print/brew-sheets/:id',
+      lazy: () =>
+        lazyPage(async () => (await import('./routes/print/sheet/BrewSheet.tsx')).BrewSheet),
+    },
+    { path: '*', element: <NotFoundPage /> },
+  ],
+} satisfies RouteObject;
 
 /** Every page but the first is a chunk of its own, so that the front page stays light. */
 export const router = createBrowserRouter([
@@ -46,83 +112,8 @@ export const router = createBrowserRouter([
         lazy: () =>
           lazyPage(async () => (await import('./routes/account/ToAccount.tsx')).ToAccount),
       },
-      {
-        path: 'b/:brewery',
-        lazy: () => lazyPage(async () => (await import('./routes/shell/Shell.tsx')).Shell),
-        errorElement: <ErrorPage />,
-        children: [
-          {
-            index: true,
-            lazy: () =>
-              lazyPage(async () => (await import('./routes/board/BoardPage.tsx')).BoardPage),
-          },
-          {
-            path: 'chains/:id',
-            lazy: () =>
-              lazyPage(async () => (await import('./routes/chain/ChainPage.tsx')).ChainPage),
-          },
-          {
-            path: 'yeasts',
-            lazy: () =>
-              lazyPage(async () => (await import('./routes/yeasts/YeastsPage.tsx')).YeastsPage),
-          },
-          {
-            path: 'yeasts/:id/family',
-            lazy: () =>
-              lazyPage(async () => (await import('./routes/family/FamilyPage.tsx')).FamilyPage),
-          },
-          {
-            path: 'vessels',
-            lazy: () =>
-              lazyPage(async () => (await import('./routes/vessels/VesselsPage.tsx')).VesselsPage),
-          },
-          {
-            path: 'people',
-            lazy: () =>
-              lazyPage(async () => (await import('./routes/people/PeoplePage.tsx')).PeoplePage),
-          },
-          {
-            path: 'rules',
-            lazy: () =>
-              lazyPage(async () => (await import('./routes/rules/RulesPage.tsx')).RulesPage),
-          },
-          {
-            path: 'record',
-            lazy: () =>
-              lazyPage(async () => (await import('./routes/record/RecordPage.tsx')).RecordPage),
-          },
-          {
-            path: 'season',
-            lazy: () =>
-              lazyPage(async () => (await import('./routes/season/SeasonPage.tsx')).SeasonPage),
-          },
-          {
-            path: 'account',
-            lazy: () =>
-              lazyPage(async () => (await import('./routes/account/AccountPage.tsx')).AccountPage),
-          },
-          {
-            path: 'print/season',
-            lazy: () =>
-              lazyPage(
-                async () => (await import('./routes/print/season/SeasonPrint.tsx')).SeasonPrint,
-              ),
-          },
-          {
-            path: 'print/chains/:id',
-            lazy: () =>
-              lazyPage(
-                async () => (await import('./routes/print/chain/ChainPrint.tsx')).ChainPrint,
-              ),
-          },
-          {
-            path: 'print/brew-sheets/:id',
-            lazy: () =>
-              lazyPage(async () => (await import('./routes/print/sheet/BrewSheet.tsx')).BrewSheet),
-          },
-          { path: '*', element: <NotFoundPage /> },
-        ],
-      },
+      { path: 'b/:brewery', ...ofBrewery },
+      { path: 'b/:brewery/seasons/:season', ...ofBrewery },
       { path: '*', element: <NotFoundPage /> },
     ],
   },

@@ -6,6 +6,7 @@ import {
   shareLink,
   shareLinkMade,
   type CopyRequest,
+  type ShareLinkPatch,
   type ShareLinkRequest,
 } from '#shared/api/share.ts';
 import { api } from '#shared/api/urls.ts';
@@ -24,6 +25,16 @@ export function useMakeShareLink(slug: string, chainId: string) {
   return useMutation({
     mutationFn: (body: ShareLinkRequest) =>
       request(shareLinkMade, 'POST', api.shareLinks(slug, chainId), { body }),
+    onSettled: () =>
+      client.invalidateQueries({ queryKey: shareLinksQuery(slug, chainId).queryKey }),
+  });
+}
+
+export function useEditShareLink(slug: string, chainId: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: ({ id, version, patch }: { id: string; version: number; patch: ShareLinkPatch }) =>
+      request(shareLink, 'PATCH', api.shareLink(slug, id), { body: patch, ifMatch: version }),
     onSettled: () =>
       client.invalidateQueries({ queryKey: shareLinksQuery(slug, chainId).queryKey }),
   });

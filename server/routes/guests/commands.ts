@@ -54,36 +54,42 @@ export async function inviteGuest(
 ): Promise<GuestMade> {
   const token = newToken();
   const tokenHash = hashToken(token);
-  await changeBoard(hands, member, [], async ({ tx, board, now }) => {
-    const chain = one(board.chains, chainId);
-    const place = { breweryId: member.brewery.id, chainId, createdBy: member.person.id };
-    const expiresAt = new Date(now.getTime() + GOOD_FOR_MS);
-    const made = await tx
-      .insert(chainGuest)
-      .values({ id, role, tokenHash, ...place, createdAt: now, expiresAt })
-      .onConflictDoNothing({ target: chainGuest.id })
-      .returning({ id: chainGuest.id });
-    const what = `Invited a guest ${role} to ${chain.name}`;
-    if (made.length > 0) return { what, before: null, after: { role }, touches: [chainId] };
-    const again = await tx
-      .update(chainGuest)
-      .set({ tokenHash })
-      .where(
-        and(
-          eq(chainGuest.id, id),
-          eq(chainGuest.role, role),
-          eq(chainGuest.chainId, chainId),
-          eq(chainGuest.breweryId, place.breweryId),
-          eq(chainGuest.createdBy, place.createdBy),
-          isNull(chainGuest.joinedAt),
-          isNull(chainGuest.withdrawnAt),
-        ),
-      )
-      .returning({ id: chainGuest.id });
-    if (again.length === 0)
-      throw problem('already-exists', { detail: 'This id is in use: make a new one' });
-    return null;
-  });
+  await changeBoard(
+    hands,
+    member,
+    [],
+    async ({ tx, board, now }) => {
+      const chain = one(board.chains, chainId);
+      const place = { breweryId: member.brewery.id, chainId, createdBy: member.person.id };
+      const expiresAt = new Date(now.getTime() + GOOD_FOR_MS);
+      const made = await tx
+        .insert(chainGuest)
+        .values({ id, role, tokenHash, ...place, createdAt: now, expiresAt })
+        .onConflictDoNothing({ target: chainGuest.id })
+        .returning({ id: chainGuest.id });
+      const what = `Invited a guest ${role} to ${chain.name}`;
+      if (made.length > 0) return { what, before: null, after: { role }, touches: [chainId] };
+      const again = await tx
+        .update(chainGuest)
+        .set({ tokenHash })
+        .where(
+          and(
+            eq(chainGuest.id, id),
+            eq(chainGuest.role, role),
+            eq(chainGuest.chainId, chainId),
+            eq(chainGuest.breweryId, place.breweryId),
+            eq(chainGuest.createdBy, place.createdBy),
+            isNull(chainGuest.joinedAt),
+            isNull(chainGuest.withdrawnAt),
+          ),
+        )
+        .returning({ id: chainGuest.id });
+      if (again.length === 0)
+        throw problem('already-exists', { detail: 'This id is in use: make a new one' });
+      return null;
+    },
+    'archived-too',
+  );
   const [made] = await guestsWhere(hands.db, member, eq(chainGuest.id, id));
   if (!made) throw notFound();
   return { ...made, token };
@@ -91,18 +97,24 @@ export async function inviteGuest(
 
 /** From now on the guest sees nothing of the chain; what they did stays in the record. */
 export async function withdrawGuest(hands: Hands, member: Member, id: string): Promise<void> {
-  await changeBoard(hands, member, [], async ({ tx, now }) => {
-    const [row] = await tx
-      .select()
-      .from(chainGuest)
-      .where(and(eq(chainGuest.breweryId, member.brewery.id), eq(chainGuest.id, id)))
-      .for('update');
-    if (!row) throw notFound();
-    if (row.withdrawnAt !== null) return null;
-    await tx.update(chainGuest).set({ withdrawnAt: now }).where(eq(chainGuest.id, id));
-    if (row.guestBreweryId !== null) await tellBrewery(tx, row.guestBreweryId);
-    if (row.personId !== null) await tell(tx, { kind: 'person', personId: row.personId });
-    const what = row.joinedAt ? 'Ended a guest’s access' : 'Withdrew an invitation to a chain';
-    return { what, before: { role: row.role }, after: null, touches: [row.chainId] };
-  });
+  await changeBoard(
+    hands,
+    member,
+    [],
+    async ({ tx, now }) => {
+      const [row] = await tx
+        .select()
+        .from(chainGuest)
+        .where(and(eq(chainGuest.breweryId, member.brewery.id), eq(chainGuest.id, id)))
+        .for('update');
+      if (!row) throw notFound();
+      if (row.withdrawnAt !== null) return null;
+      await tx.update(chainGuest).set({ withdrawnAt: now }).where(eq(chainGuest.id, id));
+      if (row.guestBreweryId !== null) await tellBrewery(tx, row.guestBreweryId);
+      if (row.personId !== null) await tell(tx, { kind: 'person', personId: row.personId });
+      const what = row.joinedAt ? 'Ended a guest’s access' : 'Withdrew an invitation to a chain';
+      return { what, before: { role: row.role }, after: null, touches: [row.chainId] };
+    },
+    'archived-too',
+  );
 }

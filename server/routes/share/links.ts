@@ -80,39 +80,45 @@ export async function makeShareLink(
   { id, name, expiresOn, showPrices }: ShareLinkRequest,
 ): Promise<ShareLinkMade> {
   const token = newToken();
-  await changeBoard(hands, member, [], async ({ tx, board, now }) => {
-    const { name: chainName } = one(board.chains, chainId);
-    const facts = {
-      name,
-      showPrices,
-      tokenHash: hashToken(token),
-      expiresAt: endOf(member, expiresOn, now),
-    };
-    const place = { breweryId: member.brewery.id, chainId, createdBy: member.person.id };
-    const [made] = await tx
-      .insert(shareLink)
-      .values({ id, ...facts, ...place, createdAt: now })
-      .onConflictDoUpdate({
-        target: shareLink.id,
-        set: { ...facts, version: sql`${shareLink.version} + 1` },
-        setWhere: and(
-          eq(shareLink.breweryId, place.breweryId),
-          eq(shareLink.chainId, chainId),
-          eq(shareLink.createdBy, place.createdBy),
-          isNull(shareLink.withdrawnAt),
-        ),
-      })
-      .returning({ version: shareLink.version });
-    if (!made) throw problem('already-exists', { detail: 'This id is in use: make a new one' });
-    if (made.version > 1) return null;
-    const after = { name, expiresOn, showPrices };
-    return {
-      what: `Shared ${chainName} by a link: ${name}`,
-      before: null,
-      after,
-      touches: [chainId],
-    };
-  });
+  await changeBoard(
+    hands,
+    member,
+    [],
+    async ({ tx, board, now }) => {
+      const { name: chainName } = one(board.chains, chainId);
+      const facts = {
+        name,
+        showPrices,
+        tokenHash: hashToken(token),
+        expiresAt: endOf(member, expiresOn, now),
+      };
+      const place = { breweryId: member.brewery.id, chainId, createdBy: member.person.id };
+      const [made] = await tx
+        .insert(shareLink)
+        .values({ id, ...facts, ...place, createdAt: now })
+        .onConflictDoUpdate({
+          target: shareLink.id,
+          set: { ...facts, version: sql`${shareLink.version} + 1` },
+          setWhere: and(
+            eq(shareLink.breweryId, place.breweryId),
+            eq(shareLink.chainId, chainId),
+            eq(shareLink.createdBy, place.createdBy),
+            isNull(shareLink.withdrawnAt),
+          ),
+        })
+        .returning({ version: shareLink.version });
+      if (!made) throw problem('already-exists', { detail: 'This id is in use: make a new one' });
+      if (made.version > 1) return null;
+      const after = { name, expiresOn, showPrices };
+      return {
+        what: `Shared ${chainName} by a link: ${name}`,
+        before: null,
+        after,
+        touches: [chainId],
+      };
+    },
+    'archived-too',
+  );
   return { ...(await readShareLink(hands.db, member, id)), token };
 }
 
@@ -123,34 +129,46 @@ export async function editShareLink(
   version: number,
   { expiresOn, ...facts }: ShareLinkPatch,
 ): Promise<ShareLink> {
-  await changeBoard(hands, member, [], async ({ tx, now }) => {
-    const row = await lockLink(tx, member, id);
-    const before = await readShareLink(tx, member, id);
-    demandVersion(version, row.version, before);
-    if (row.withdrawnAt !== null) throw problem('in-use', { detail: 'It was withdrawn' });
-    const expiresAt = expiresOn === undefined ? row.expiresAt : endOf(member, expiresOn, now);
-    await tx
-      .update(shareLink)
-      .set({ ...facts, expiresAt, version: sql`${shareLink.version} + 1` })
-      .where(eq(shareLink.id, id));
-    const after = { ...facts, ...(expiresOn !== undefined && { expiresOn }) };
-    return { what: `Changed the link ${row.name}`, before, after, touches: [row.chainId] };
-  });
+  await changeBoard(
+    hands,
+    member,
+    [],
+    async ({ tx, now }) => {
+      const row = await lockLink(tx, member, id);
+      const before = await readShareLink(tx, member, id);
+      demandVersion(version, row.version, before);
+      if (row.withdrawnAt !== null) throw problem('in-use', { detail: 'It was withdrawn' });
+      const expiresAt = expiresOn === undefined ? row.expiresAt : endOf(member, expiresOn, now);
+      await tx
+        .update(shareLink)
+        .set({ ...facts, expiresAt, version: sql`${shareLink.version} + 1` })
+        .where(eq(shareLink.id, id));
+      const after = { ...facts, ...(expiresOn !== undefined && { expiresOn }) };
+      return { what: `Changed the link ${row.name}`, before, after, touches: [row.chainId] };
+    },
+    'archived-too',
+  );
   return readShareLink(hands.db, member, id);
 }
 
 /** The row stays, so that the link says that it is no longer good. */
 export async function withdrawShareLink(hands: Hands, member: Member, id: string): Promise<void> {
-  await changeBoard(hands, member, [], async ({ tx, now }) => {
-    const row = await lockLink(tx, member, id);
-    if (row.withdrawnAt !== null) return null;
-    await tx
-      .update(shareLink)
-      .set({ withdrawnAt: now, version: sql`${shareLink.version} + 1` })
-      .where(eq(shareLink.id, id));
-    const before = { name: row.name };
-    return { what: `Withdrew the link ${row.name}`, before, after: null, touches: [row.chainId] };
-  });
+  await changeBoard(
+    hands,
+    member,
+    [],
+    async ({ tx, now }) => {
+      const row = await lockLink(tx, member, id);
+      if (row.withdrawnAt !== null) return null;
+      await tx
+        .update(shareLink)
+        .set({ withdrawnAt: now, version: sql`${shareLink.version} + 1` })
+        .where(eq(shareLink.id, id));
+      const before = { name: row.name };
+      return { what: `Withdrew the link ${row.name}`, before, after: null, touches: [row.chainId] };
+    },
+    'archived-too',
+  );
 }
 
 async function lockLink(tx: Tx, { brewery }: Member, id: string): Promise<Row> {

@@ -1,4 +1,5 @@
 import type { HouseRulesRow } from '#shared/api/houseRules.ts';
+import { useUnsaved } from '../../app/unsaved.ts';
 import { RULES_EXPLAINED } from '../checks/rulesExplained.ts';
 import { Preview } from './Preview.tsx';
 import { RuleCard } from './RuleCard.tsx';
@@ -9,6 +10,7 @@ import { useRulesDraft } from './useRulesDraft.ts';
 /** Every rule with its limits as fields, what they would change on the board, and the way to save. */
 export function RulesForm({ row }: { row: HouseRulesRow }) {
   const edit = useRulesDraft(row);
+  useUnsaved(edit.isDirty && !edit.isSaving);
   const links = useLinkChanges(edit.changes, edit.isSound);
   return (
     <form

@@ -5,14 +5,12 @@ import { shareLinkRequest, type ShareLinkMade } from '#shared/api/share.ts';
 import { addDays, formatDay } from '#shared/units/day.ts';
 import { useMakeShareLink } from '../../../api/share.ts';
 import { newId } from '../../../app/newId.ts';
-import { CheckField } from '../../../components/form/CheckField.tsx';
 import { contractResolver } from '../../../components/form/contractResolver.ts';
-import { DayField } from '../../../components/form/DayField.tsx';
 import { Form } from '../../../components/form/Form.tsx';
-import { TextField } from '../../../components/form/TextField.tsx';
 import { Button } from '../../../components/ui/Button.tsx';
 import { LinkOnce } from '../../../components/ui/LinkOnce.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
+import { ShareLinkFields } from './ShareLinkFields.tsx';
 
 const contract = shareLinkRequest.omit({ id: true });
 const USUAL_DAYS = 30;
@@ -76,14 +74,7 @@ function LinkForm({ chain, onCancel, onMade }: LinkFormProps) {
         onCancel={onCancel}
         onSubmit={async (facts) => onMade(await make.mutateAsync({ id, ...facts }))}
       >
-        <TextField
-          name="name"
-          label="Whom or what it is for"
-          autoComplete="off"
-          hint="For your own list; it is not shown to them."
-        />
-        <DayField name="expiresOn" label="Works until" />
-        <CheckField name="showPrices" label="Show what the yeast costs" />
+        <ShareLinkFields />
       </Form>
     </div>
   );

@@ -6,6 +6,7 @@ import { Button } from '../../../components/ui/Button.tsx';
 import { ConfirmDialog } from '../../../components/ui/ConfirmDialog.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { count } from '../view/words.ts';
+import { EditShareLink } from './EditShareLink.tsx';
 
 /** "works until Fri 30 April", or why it does not any more. */
 function endWords({ withdrawnAt, expiresOn }: ShareLink, today: string): string {
@@ -23,7 +24,8 @@ function visitWords({ visits, lastVisitAt }: ShareLink): string {
 export function ShareLinkRow({ link, chainId }: { link: ShareLink; chainId: string }) {
   const { slug, board } = useBoardView();
   const withdraw = useWithdrawShareLink(slug, chainId);
-  const [asking, setAsking] = useState(false);
+  const [asked, setAsked] = useState<'edit' | 'withdraw' | null>(null);
+  const close = () => setAsked(null);
   const facts = [
     endWords(link, board.today),
     visitWords(link),
@@ -39,23 +41,34 @@ export function ShareLinkRow({ link, chainId }: { link: ShareLink; chainId: stri
         </p>
       </div>
       {board.me.can.invite && link.withdrawnAt === null && (
-        <Button
-          size="small"
-          look="quiet"
-          aria-label={`Withdraw ${link.name}`}
-          onClick={() => setAsking(true)}
-        >
-          Withdraw
-        </Button>
+        <div className="flex flex-wrap justify-end gap-2">
+          <Button
+            size="small"
+            look="quiet"
+            aria-label={`Edit ${link.name}`}
+            onClick={() => setAsked('edit')}
+          >
+            Edit
+          </Button>
+          <Button
+            size="small"
+            look="quiet"
+            aria-label={`Withdraw ${link.name}`}
+            onClick={() => setAsked('withdraw')}
+          >
+            Withdraw
+          </Button>
+        </div>
       )}
+      {asked === 'edit' && <EditShareLink link={link} chainId={chainId} onClose={close} />}
       <ConfirmDialog
-        open={asking}
-        onClose={() => setAsking(false)}
+        open={asked === 'withdraw'}
+        onClose={close}
         title={`Withdraw the link ${link.name}?`}
         action="Withdraw the link"
         busy={withdraw.isPending}
         error={withdraw.error}
-        onConfirm={() => withdraw.mutate(link.id, { onSuccess: () => setAsking(false) })}
+        onConfirm={() => withdraw.mutate(link.id, { onSuccess: close })}
       >
         <p>Whoever has it sees from now on only that it is no longer good.</p>
       </ConfirmDialog>
