@@ -1,22 +1,45 @@
-import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
+import {
+  queryOptions,
+  useMutation,
+  useQuery,
+  useQueryClient,
+  type QueryClient,
+} from '@tanstack/react-query';
 import { person, type Person, type SignInRequest, type SignUpRequest } from '#shared/api/people.ts';
 import { api } from '#shared/api/urls.ts';
 import { request, requestNothing } from './client.ts';
-import { isProblem } from './errors.ts';
+import { isProblem, OfflineError } from './errors.ts';
+import { KEPT } from '../kept/meta.ts';
+import { restoreAnswers } from '../kept/restoreAnswers.ts';
+
+/** A weak network may take a request and never answer it: the page then opens with what is kept. */
+const PATIENCE_MS = 10_000;
+const SESSION_KEY = ['session'] as const;
 
 /** Who is signed in; null: nobody. */
 export const sessionQuery = queryOptions({
-  queryKey: ['session'],
-  queryFn: async ({ signal }): Promise<Person | null> => {
+  queryKey: SESSION_KEY,
+  queryFn: async ({ client, signal }): Promise<Person | null> => {
     try {
-      return await request(person, 'GET', api.session, { signal });
+      const patience = AbortSignal.any([signal, AbortSignal.timeout(PATIENCE_MS)]);
+      return await request(person, 'GET', api.session, { signal: patience });
     } catch (error) {
       if (isProblem(error, 'not-signed-in')) return null;
-      throw error;
+      if (!(error instanceof OfflineError)) throw error;
+      return lastKnown(client, error);
     }
   },
   staleTime: 60_000,
+  meta: KEPT,
 });
+
+/** Without a connection: whoever was signed in here last, with what they read then. */
+async function lastKnown(client: QueryClient, error: OfflineError): Promise<Person> {
+  if (client.getQueryData(SESSION_KEY)) throw error;
+  const kept = person.safeParse(await restoreAnswers(client, SESSION_KEY));
+  if (!kept.success) throw error;
+  return kept.data;
+}
 
 export const useSession = () => useQuery(sessionQuery);
 

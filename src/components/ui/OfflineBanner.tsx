@@ -3,19 +3,38 @@ import { useEffect } from 'react';
 import { setReachable } from '../../api/connection.ts';
 import { api } from '#shared/api/urls.ts';
 import { useOnline } from '../../app/useOnline.ts';
+import { asOf } from '../../kept/asOf.ts';
 
 export const OFFLINE_SENTENCE =
   'No connection. You can read what is here; nothing can be changed until it is back.';
+
+const LATER = 'Brew-day entries are kept and sent later; the plan waits.';
+
+/** How old the oldest thing is that the page shows; null: it is not kept here. */
+function useAge(online: boolean): string | null {
+  const client = useQueryClient();
+  if (online) return null;
+  const shown = client.getQueryCache().findAll({
+    type: 'active',
+    predicate: ({ meta, queryKey, state }) =>
+      meta?.kept === true && queryKey[0] !== 'session' && state.dataUpdatedAt > 0,
+  });
+  if (shown.length === 0) return null;
+  return asOf(Math.min(...shown.map(({ state }) => state.dataUpdatedAt)), Date.now());
+}
 
 /** Says that the connection is gone and looks for it again. */
 export function OfflineBanner() {
   const online = useOnline();
   useComeBack(online);
+  const age = useAge(online);
   return (
     <div aria-live="polite" className="max-tablet:sticky max-tablet:top-0 max-tablet:z-20">
       {!online && (
         <p className="bg-mind-l px-7 py-2 text-center font-semibold text-mind max-tablet:px-4">
-          {OFFLINE_SENTENCE}
+          {age === null
+            ? OFFLINE_SENTENCE
+            : `No connection. You can read what is here, as it was ${age}. ${LATER}`}
         </p>
       )}
     </div>
