@@ -2,6 +2,7 @@ import { and, eq, inArray, isNotNull, isNull, sql } from 'drizzle-orm';
 import type { Ended } from '#shared/api/live.ts';
 import type { Clock } from '../clock.ts';
 import type { Db } from '../db/client.ts';
+import { brewery, membership } from '../db/schema/brewery.ts';
 import { chain } from '../db/schema/chain.ts';
 import { season } from '../db/schema/season.ts';
 import { chainGuest } from '../db/schema/sharing.ts';
@@ -31,29 +32,46 @@ export async function outcasts(
   return new Map(rows.map(({ id, signed_in }) => [id, signed_in ? 'not-a-member' : 'signed-out']));
 }
 
-/** The seasons of other breweries whose chains stand on these breweries' boards. */
-export async function guestSeasons(
-  db: Db,
-  breweryIds: readonly string[],
-): Promise<Map<string, Set<string>>> {
-  const found = new Map<string, Set<string>>();
-  if (breweryIds.length === 0) return found;
-  const rows = await db
-    .selectDistinct({ breweryId: chainGuest.guestBreweryId, seasonId: chain.seasonId })
+/** A chain of another brewery on somebody's board. */
+export interface GuestChain {
+  personId: string;
+  /** The guest's own brewery. */
+  boardOf: string;
+  chainId: string;
+  seasonId: string;
+  ownerId: string;
+  ownerName: string;
+}
+
+/** The chains that these people are guests of. Who left the brewery with the board is no guest. */
+export async function guestChains(db: Db, people: readonly string[]): Promise<GuestChain[]> {
+  if (people.length === 0) return [];
+  return db
+    .select({
+      personId: membership.personId,
+      boardOf: membership.breweryId,
+      chainId: chain.id,
+      seasonId: chain.seasonId,
+      ownerId: brewery.id,
+      ownerName: brewery.name,
+    })
     .from(chainGuest)
     .innerJoin(chain, eq(chain.id, chainGuest.chainId))
+    .innerJoin(brewery, eq(brewery.id, chainGuest.breweryId))
+    .innerJoin(
+      membership,
+      and(
+        eq(membership.breweryId, chainGuest.guestBreweryId),
+        eq(membership.personId, chainGuest.personId),
+      ),
+    )
     .where(
       and(
-        inArray(chainGuest.guestBreweryId, [...breweryIds]),
+        inArray(chainGuest.personId, [...people]),
         isNotNull(chainGuest.joinedAt),
         isNull(chainGuest.withdrawnAt),
       ),
     );
-  for (const { breweryId, seasonId } of rows) {
-    if (breweryId === null) continue;
-    found.set(breweryId, (found.get(breweryId) ?? new Set()).add(seasonId));
-  }
-  return found;
 }
 
 export async function revisionsOf(

@@ -4,10 +4,10 @@ import type { Clock } from '../clock.ts';
 import type { Config } from '../config.ts';
 import type { Db } from '../db/client.ts';
 import type { Log } from '../log.ts';
-import { guestSeasons, outcasts, revisionsOf } from './admission.ts';
+import { outcasts, revisionsOf } from './admission.ts';
 import { createArrivals } from './arrivals.ts';
+import { createGuestNews } from './guestNews.ts';
 import { listen } from './listener.ts';
-import type { Note } from './note.ts';
 import { openStream, type Stream, type Watcher } from './stream.ts';
 import { createStreams, type Streams } from './streams.ts';
 
@@ -43,25 +43,29 @@ export function startLive(deps: LiveDeps): Live {
     void work.catch((error: unknown) => {
       if (!isClosed) log.warn({ err: error }, what);
     });
+  const guests = createGuestNews(deps.db, streams, tried);
   const listener = listen(config.listenUrl, {
     log,
     onNote(note) {
       if (note.kind === 'here') arrivals.changed(note.seasonId);
-      else if (note.kind === 'season') tellRevision(streams, note);
-      else tried('Streams not checked', expel(scene, streams.ofPerson(note.personId)));
+      else if (note.kind === 'season') {
+        for (const stream of streams.ofSeason(note.seasonId)) advance(stream, note.revision);
+        guests.changed(note.seasonId);
+      } else {
+        const own = streams.ofPerson(note.personId);
+        if (own.length > 0) tried('Streams not checked', expel(scene, own).then(guests.follow));
+      }
     },
     onListening() {
       tried('Streams not caught up', catchUp(scene, streams.seasons()));
       for (const seasonId of streams.seasons()) arrivals.changed(seasonId);
+      guests.again();
     },
   });
   const beating = setInterval(() => {
     listener.check();
     beat(streams);
-    tried(
-      'Streams not checked',
-      expel(scene, streams.all()).then(() => follow(scene)),
-    );
+    tried('Streams not checked', expel(scene, streams.all()).then(guests.follow));
     tried('Presence not renewed', arrivals.renew());
   }, config.heartbeatMs);
 
@@ -76,7 +80,7 @@ export function startLive(deps: LiveDeps): Live {
       streams.add(stream);
       arrivals.come(stream);
       tried('Stream not caught up', catchUp(scene, [stream.seasonId], stream));
-      tried('Stream without guests', follow(scene));
+      tried('Stream without guests', guests.follow());
       res.on('close', () => {
         streams.remove(stream);
         arrivals.go(stream);
@@ -100,11 +104,6 @@ function beat(streams: Streams): void {
   }
 }
 
-function tellRevision(streams: Streams, note: Extract<Note, { kind: 'season' }>): void {
-  for (const stream of streams.ofSeason(note.seasonId)) advance(stream, note.revision);
-  for (const stream of streams.guestsOf(note.seasonId)) stream.send('elsewhere', {});
-}
-
 function advance(stream: Stream, revision: number): void {
   if (revision <= stream.revision) return;
   stream.revision = revision;
@@ -124,9 +123,4 @@ async function expel({ db, clock }: Scene, streams: readonly Stream[]): Promise<
     const why = out.get(stream.streamId);
     if (why) stream.end(why);
   }
-}
-
-async function follow({ db, streams }: Scene): Promise<void> {
-  const breweries = [...new Set(streams.all().map(({ breweryId }) => breweryId))];
-  streams.setGuestSeasons(await guestSeasons(db, breweries));
 }

@@ -11,17 +11,12 @@ export interface Streams {
   all(): Stream[];
   ofSeason(seasonId: string): Iterable<Stream>;
   ofPerson(personId: string): Stream[];
-  /** Those who have a chain of this season on their own board. */
-  guestsOf(seasonId: string): Stream[];
-  /** Seasons whose chains stand on the board of a brewery. */
-  setGuestSeasons(byBrewery: ReadonlyMap<string, ReadonlySet<string>>): void;
   seasons(): string[];
 }
 
 export function createStreams(): Streams {
   const bySeason = new Map<string, Set<Stream>>();
   const byToken = new Map<string, Set<Stream>>();
-  let guestSeasons: ReadonlyMap<string, ReadonlySet<string>> = new Map();
   const all = () => [...bySeason.values()].flatMap((streams) => [...streams]);
 
   return {
@@ -38,15 +33,6 @@ export function createStreams(): Streams {
     all,
     ofSeason: (seasonId) => bySeason.get(seasonId) ?? [],
     ofPerson: (personId) => all().filter((stream) => stream.personId === personId),
-    guestsOf(seasonId) {
-      const breweries = [...guestSeasons].filter(([, seasons]) => seasons.has(seasonId));
-      if (breweries.length === 0) return [];
-      const ids = new Set(breweries.map(([id]) => id));
-      return all().filter(({ breweryId }) => ids.has(breweryId));
-    },
-    setGuestSeasons(byBrewery) {
-      guestSeasons = byBrewery;
-    },
     seasons: () => [...bySeason.keys()],
   };
 }

@@ -10,7 +10,7 @@ export const LIVE_EVENTS = {
   hello: z.strictObject({ beatMs: z.number().positive() }),
   /** The season's revision, which is also the event's id. */
   revision: z.strictObject({ revision: z.number().int().min(0) }),
-  /** Something changed on a chain that stands here as a guest. */
+  /** Something changed on a chain that stands on this person's board as a guest; not which, nor what. */
   elsewhere: z.strictObject({}),
   /** Everybody who has the season open, oneself included. */
   here: z.strictObject({ people: z.array(f.id) }),

@@ -51,3 +51,12 @@ export function useAcceptInvitation(token: string) {
       client.invalidateQueries({ queryKey: boardQuery(brewerySlug).queryKey }),
   });
 }
+
+/** @param slug one's own brewery, on whose board the shelf stands */
+export function useLeaveGuestShelf(slug: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (guestId: string) => requestNothing('DELETE', api.guestShelf(guestId)),
+    onSettled: () => client.invalidateQueries({ queryKey: boardQuery(slug).queryKey }),
+  });
+}

@@ -1,7 +1,9 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 import { z } from 'zod';
-import { joinLink, joinLinkMade, type Role } from '#shared/api/people.ts';
+import type { HandOver } from '#shared/api/membership.ts';
+import { joinLink, joinLinkMade, member, type Member, type Role } from '#shared/api/people.ts';
 import { api } from '#shared/api/urls.ts';
+import { useBoardChanged } from './boardChanged.ts';
 import { request, requestNothing } from './client.ts';
 
 export const joinLinksQuery = (slug: string) =>
@@ -26,3 +28,36 @@ export function useWithdrawJoinLink(slug: string) {
     onSettled: () => client.invalidateQueries({ queryKey: joinLinksQuery(slug).queryKey }),
   });
 }
+
+/** A change of who somebody is here, made from the version that was seen. */
+type Of = Pick<Member, 'personId' | 'version'>;
+
+export function useChangeRole(slug: string) {
+  return useMutation({
+    mutationFn: ({ personId, version, role }: Of & { role: Role }) =>
+      request(member, 'PATCH', api.member(slug, personId), { body: { role }, ifMatch: version }),
+    ...useBoardChanged(slug),
+  });
+}
+
+export function useHandOver(slug: string) {
+  return useMutation({
+    mutationFn: ({ personId, version, ...body }: Of & HandOver) =>
+      request(z.array(member), 'POST', api.handOver(slug, personId), { body, ifMatch: version }),
+    ...useBoardChanged(slug),
+  });
+}
+
+export function useRemoveMember(slug: string) {
+  return useMutation({
+    mutationFn: ({ personId, version }: Of) =>
+      requestNothing('DELETE', api.member(slug, personId), { ifMatch: version }),
+    ...useBoardChanged(slug),
+  });
+}
+
+export const useLeaveBrewery = (slug: string) =>
+  useMutation({
+    mutationFn: ({ version }: Of) =>
+      requestNothing('DELETE', api.membership(slug), { ifMatch: version }),
+  });

@@ -3,6 +3,7 @@ import { useEffect, useSyncExternalStore } from 'react';
 import { boardQuery } from '../api/board.ts';
 import { sessionQuery } from '../api/session.ts';
 import { createCatchUp } from './catchUp.ts';
+import { catchUpGuests } from './catchUpGuests.ts';
 import { keepConnected, type Told } from './connection.ts';
 import { fetchEvents } from './fetchEvents.ts';
 import { liveStore } from './liveStore.ts';
@@ -21,6 +22,7 @@ export function useLiveSeason(slug: string) {
   useEffect(() => {
     if (seasonId === undefined) return;
     const catchUp = createCatchUp(client, slug, seasonId);
+    const guests = catchUpGuests(client, slug);
     const hear = (told: Told) => {
       switch (told.kind) {
         case 'state':
@@ -30,12 +32,15 @@ export function useLiveSeason(slug: string) {
         case 'revision':
           return catchUp.heard(told.revision);
         case 'elsewhere':
-          return catchUp.elsewhere();
+          // The list of one's guest shelves bears their names, so one's own board is read as well.
+          catchUp.elsewhere();
+          return guests.elsewhere();
         case 'ended':
           // Who asks is told by the shell: to sign in, or that there is nothing here.
           return void client.invalidateQueries(sessionQuery);
         case 'beat':
-          return catchUp.again();
+          catchUp.again();
+          return guests.again();
       }
     };
     const stop = watch(slug, seasonId, hear);

@@ -1,41 +1,17 @@
 import type { Batch } from '#shared/api/batch.ts';
 import type { Moved } from '#shared/api/move.ts';
-import { chainAlone } from '#shared/chain/chainAlone.ts';
 import type { GuestChains } from '../../auth/guests.ts';
 import type { Member } from '../../auth/whoAsks.ts';
 import { notFound, problem, ProblemError } from '../../problems.ts';
 import type { Command } from '../board/changeBoard.ts';
 import type { BoardNow } from '../board/hand.ts';
 import { demandStock, one } from '../board/find.ts';
-import { ofBrewery } from '../share/present.ts';
+import { guestBatch, guestView } from './view.ts';
 
-/** The board as its reader may see it: for a guest their chains, their yeasts and vessels, no prices and no people. */
+/** The board as its reader may see it. */
 export function seenBy<B extends BoardNow>({ guestOf, brewery }: Member, board: B): B {
-  if (!guestOf) return board;
-  const alone = [...guestOf.keys()].flatMap((id) => chainAlone(board, id) ?? []);
-  const ids = (rows: readonly { id: string }[]) => new Set(rows.map(({ id }) => id));
-  const yeasts = ids(alone.flatMap((each) => each.yeasts));
-  const vessels = ids(alone.flatMap((each) => each.vessels));
-  return {
-    ...board,
-    season: { ...board.season, name: brewery.name },
-    members: [],
-    yeasts: board.yeasts
-      .filter(({ id }) => yeasts.has(id))
-      .map((yeast) => ({ ...yeast, packPrice: null })),
-    vessels: board.vessels.filter(({ id }) => vessels.has(id)),
-    chains: alone.map(({ chain }) => {
-      const { start } = chain;
-      return { ...chain, start: 'price' in start ? { ...start, price: null } : start };
-    }),
-    batches: alone.flatMap(({ batches }) => batches.map((row) => seenBatch(row, brewery.name))),
-  };
+  return guestOf ? guestView(board, guestOf.keys(), brewery.name) : board;
 }
-
-const seenBatch = (row: Batch, breweryName: string): Batch => ({
-  ...row,
-  link: { ...row.link, acceptance: ofBrewery(row.link.acceptance, breweryName) },
-});
 
 /** A chain of which somebody is no guest does not exist; in one that they may only taste nothing is changed. */
 export function demandBrews(chains: GuestChains, chainId: string | null): void {
@@ -76,7 +52,7 @@ export function seenMoved({ guestOf, brewery }: Member, moved: Moved): Moved {
   if (!guestOf) return moved;
   const batches = moved.batches
     .filter(({ chainId }) => chainId !== null && guestOf.has(chainId))
-    .map((row) => seenBatch(row, brewery.name));
+    .map((row) => guestBatch(row, brewery.name));
   const own = new Set(batches.map(({ id }) => id));
   return {
     ...moved,

@@ -52,10 +52,7 @@ export async function endSignIn(db: Db, { person }: SignedIn, mark: string): Pro
 }
 
 /** Ends all but the one that asks, and the streams that hang on them. */
-export async function endOtherSignIns(
-  tx: Db | Tx,
-  { person, tokenHash }: SignedIn,
-): Promise<void> {
+export async function endOtherSignIns(tx: Db | Tx, { person, tokenHash }: SignedIn): Promise<void> {
   await tx
     .delete(session)
     .where(and(eq(session.personId, person.id), ne(session.tokenHash, tokenHash)));

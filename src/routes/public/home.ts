@@ -1,9 +1,16 @@
 import type { Person } from '#shared/api/people.ts';
+import { lastBrewery } from '../../app/lastBrewery.ts';
 
-/** Where somebody belongs: the board of the first brewery, or the front page. */
+/**
+ * Where somebody belongs: the brewery that they used last on this device, or their only one; where
+ * they have several, or none, the page to choose or make one.
+ */
 export function homeOf(person: Person | null | undefined): string {
-  const first = person?.breweries[0];
-  return first ? `/b/${first.brewery.slug}` : '/';
+  if (!person) return '/';
+  const slugs = person.breweries.map(({ brewery }) => brewery.slug);
+  const last = lastBrewery(person.id);
+  const slug = last !== null && slugs.includes(last) ? last : slugs.length === 1 ? slugs[0] : null;
+  return slug ? `/b/${slug}` : '/breweries';
 }
 
 /** Only an address within this site is gone to after signing in. */

@@ -1,0 +1,50 @@
+import { Navigate, useNavigate } from 'react-router-dom';
+import type { Person } from '#shared/api/people.ts';
+import { useSession, useSignOut } from '../../api/session.ts';
+import { useTitle } from '../../app/useTitle.ts';
+import { Button } from '../../components/ui/Button.tsx';
+import { TextLink } from '../../components/ui/TextLink.tsx';
+import { PublicForm } from '../public/PublicForm.tsx';
+import { ChoiceOfBreweries } from './ChoiceOfBreweries.tsx';
+import { GuestPlaces } from './GuestPlaces.tsx';
+import { MakeBrewery } from './MakeBrewery.tsx';
+
+/** Where somebody with several breweries, or none, chooses one or makes another. */
+export function BreweriesPage() {
+  useTitle('Your breweries');
+  const { data: me, isPending } = useSession();
+  if (isPending) return null;
+  if (!me) return <Navigate to="/sign-in?next=/breweries" replace />;
+  const hasNone = me.breweries.length === 0;
+  return (
+    <PublicForm
+      title="Your breweries"
+      lead={
+        hasNone
+          ? 'You belong to none at the moment. Make one, or open a join link that somebody passes on to you.'
+          : 'This device opens the one that you used last.'
+      }
+    >
+      <ChoiceOfBreweries breweries={me.breweries} />
+      <GuestPlaces places={me.guestOf} />
+      <MakeBrewery isFirst={hasNone} />
+      <Foot me={me} />
+    </PublicForm>
+  );
+}
+
+function Foot({ me }: { me: Person }) {
+  const navigate = useNavigate();
+  const signOut = useSignOut();
+  return (
+    <p className="mt-8 flex flex-wrap items-center gap-x-4 border-t border-line pt-4 text-ink2">
+      <span className="min-w-0 grow wrap-anywhere">Signed in as {me.email}</span>
+      <TextLink to="/account" className="py-2.5">
+        Account
+      </TextLink>
+      <Button look="text" onClick={() => signOut.mutate(undefined, { onSuccess: () => navigate('/') })}>
+        Sign out
+      </Button>
+    </p>
+  );
+}
