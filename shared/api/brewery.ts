@@ -47,7 +47,7 @@ export const season = z.strictObject({
 });
 export type Season = z.infer<typeof season>;
 
-const daysInOrder = (
+export const daysInOrder = (
   { firstDay, lastDay }: { firstDay?: string | null; lastDay?: string | null },
   ctx: z.core.$RefinementCtx<unknown>,
 ) => {

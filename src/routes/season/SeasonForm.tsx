@@ -1,31 +1,56 @@
 import { useMemo, useState } from 'react';
 import { z } from 'zod';
-import { season as seasonContract, weekday, type Season } from '#shared/api/brewery.ts';
-import { id, name } from '#shared/api/fields.ts';
+import {
+  daysInOrder,
+  season as seasonContract,
+  weekday,
+  type Season,
+} from '#shared/api/brewery.ts';
+import { day, id, name } from '#shared/api/fields.ts';
+import { formatDay } from '#shared/units/day.ts';
 import { useSeasonPatch } from '../../api/season.ts';
 import { useBrewery } from '../../app/useBrewery.ts';
 import { useUnits } from '../../app/useUnits.ts';
-import { QuantityField } from '../../components/form/QuantityField.tsx';
 import { RowForm } from '../../components/form/RowForm.tsx';
-import { TextField } from '../../components/form/TextField.tsx';
 import { written } from '../../components/form/written.ts';
 import { say } from '../../components/ui/Toast.tsx';
-import { WeekdayField } from './WeekdayField.tsx';
+import { SeasonFields } from './SeasonFields.tsx';
 import { weekdayWords } from './weekdays.ts';
 
 /** The season patch without its blocked days, which have a list of their own. */
-const contract = z.strictObject({
-  id,
-  name,
-  brewWeekdays: z.array(weekday).max(7),
-  brewsPerDay: z.number().int().min(1).max(20),
-});
+const contract = z
+  .strictObject({
+    id,
+    name,
+    firstDay: day.nullable(),
+    lastDay: day.nullable(),
+    brewWeekdays: z.array(weekday).max(7),
+    brewsPerDay: z.number().int().min(1).max(20),
+  })
+  .superRefine(daysInOrder);
+type Facts = Partial<Omit<z.infer<typeof contract>, 'id'>>;
 
 const LABELS: Record<string, string> = {
   name: 'Name of the season',
+  firstDay: 'First day',
+  lastDay: 'Last day',
   brewWeekdays: 'Brew days',
   brewsPerDay: 'Brews a day',
 };
+
+function wordsOf(key: string, facts: Facts): string {
+  switch (key) {
+    case 'name':
+      return facts.name ?? '';
+    case 'firstDay':
+    case 'lastDay':
+      return facts[key] ? formatDay(facts[key]) : 'left open';
+    case 'brewWeekdays':
+      return weekdayWords(facts.brewWeekdays ?? []);
+    default:
+      return String(facts.brewsPerDay);
+  }
+}
 
 export function SeasonForm({ season }: { season: Season }) {
   const [generation, setGeneration] = useState(0);
@@ -41,6 +66,8 @@ function Fields({ season, onDone }: { season: Season; onDone: () => void }) {
     () => ({
       id: season.id,
       name: season.name,
+      firstDay: season.firstDay,
+      lastDay: season.lastDay,
       brewWeekdays: season.brewWeekdays,
       brewsPerDay: written('count', season.brewsPerDay, units),
     }),
@@ -56,11 +83,7 @@ function Fields({ season, onDone }: { season: Season; onDone: () => void }) {
       create={() => Promise.resolve()}
       patch={patch.mutateAsync}
       labelOf={(key) => LABELS[key] ?? key}
-      wordsOf={(key, facts) =>
-        key === 'brewWeekdays'
-          ? weekdayWords(facts.brewWeekdays ?? [])
-          : String(key === 'name' ? facts.name : facts.brewsPerDay)
-      }
+      wordsOf={wordsOf}
       action="Save"
       follows
       onDone={() => {
@@ -68,14 +91,7 @@ function Fields({ season, onDone }: { season: Season; onDone: () => void }) {
         onDone();
       }}
     >
-      <TextField name="name" label="Name of the season" autoComplete="off" />
-      <WeekdayField />
-      <QuantityField
-        name="brewsPerDay"
-        label="Brews a day"
-        hint="A day with this many brews is full."
-        className="max-w-64"
-      />
+      <SeasonFields />
     </RowForm>
   );
 }

@@ -9,22 +9,28 @@ import { BreweryForm } from './BreweryForm.tsx';
 import { SeasonForm } from './SeasonForm.tsx';
 import { SeasonFacts } from './SeasonFacts.tsx';
 import { SeasonLinks } from './SeasonLinks.tsx';
+import { SeasonList } from './seasons/SeasonList.tsx';
 
 export function SeasonPage() {
   useTitle('Season');
   const board = useBoard();
   const mayEdit = board.me.can.editSeason;
+  // An archived season is not changed, but it can be copied and taken out again.
+  const mayEditSeasons = board.me.role === 'head-brewer';
   return (
     <Page>
       <PageHead
         title="Season"
-        lead="When the brewery brews, and the days that are taken."
+        lead="When the brewery brews, the days that are taken, and the seasons before and after."
         actions={<SeasonLinks />}
       />
+      <div className="mb-4">
+        <SeasonList shown={board.season.id} mayEdit={mayEditSeasons} />
+      </div>
       {mayEdit ? (
         <div className="grid items-start gap-4 wide:grid-cols-2">
           <Card>
-            <CardTitle>Brew days</CardTitle>
+            <CardTitle>{board.season.name}</CardTitle>
             <div className="mt-4">
               <SeasonForm season={board.season} />
             </div>
