@@ -19,6 +19,7 @@ import { recordRoutes } from './record/router.ts';
 import { seasonRoutes } from './season/router.ts';
 import { sessionRoutes } from './session/router.ts';
 import { signInRoutes } from './sign-ins/router.ts';
+import { pourRoutes } from './pour/router.ts';
 import { openApiRoute } from './system/openapi.ts';
 import { shareRoutes } from './share/router.ts';
 import { systemRoutes } from './system/router.ts';
@@ -45,6 +46,7 @@ const resources: readonly Route[] = [
   ...chainRoutes,
   ...commentRoutes,
   ...batchRoutes,
+  ...pourRoutes,
   ...moveRoutes,
   ...liveRoutes,
   ...shareRoutes,

@@ -77,6 +77,20 @@ export const api = {
   /** The link from the batch before to this one. */
   link: (slug: string, id: string) => at(slug, `/batches/${id}/link`),
   acceptance: (slug: string, id: string) => at(slug, `/batches/${id}/link/acceptance`),
+  /** The pour of a batch's wort onto the cake before it, and its commands. */
+  pour: (slug: string, batchId: string) => at(slug, `/batches/${batchId}/pour`),
+  pourStep: (slug: string, batchId: string) => at(slug, `/batches/${batchId}/pour/step`),
+  pourReadings: (slug: string, batchId: string) => at(slug, `/batches/${batchId}/pour/readings`),
+  pourWithdrawals: (slug: string, batchId: string) =>
+    at(slug, `/batches/${batchId}/pour/withdrawals`),
+  pourOverrides: (slug: string, batchId: string) => at(slug, `/batches/${batchId}/pour/overrides`),
+  pourAnswers: (slug: string, batchId: string) => at(slug, `/batches/${batchId}/pour/answers`),
+  pourDone: (slug: string, batchId: string) => at(slug, `/batches/${batchId}/pour/done`),
+  pourSignature: (slug: string, batchId: string) => at(slug, `/batches/${batchId}/pour/signature`),
+  /** Take the run over from who holds it. */
+  pourHolder: (slug: string, batchId: string) => at(slug, `/batches/${batchId}/pour/holder`),
+  /** Leave the run without a pour. */
+  pourLeaving: (slug: string, batchId: string) => at(slug, `/batches/${batchId}/pour/leaving`),
   moves: (slug: string) => at(slug, '/moves'),
   undo: (slug: string) => at(slug, '/undo'),
   redo: (slug: string) => at(slug, '/redo'),
