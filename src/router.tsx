@@ -108,6 +108,13 @@ export const router = createBrowserRouter([
           lazyPage(async () => (await import('./routes/checks/ChecksPage.tsx')).ChecksPage),
       },
       {
+        path: 'breweries',
+        lazy: () =>
+          lazyPage(
+            async () => (await import('./routes/breweries/BreweriesPage.tsx')).BreweriesPage,
+          ),
+      },
+      {
         path: 'account',
         lazy: () =>
           lazyPage(async () => (await import('./routes/account/ToAccount.tsx')).ToAccount),

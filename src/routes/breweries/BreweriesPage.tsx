@@ -42,7 +42,10 @@ function Foot({ me }: { me: Person }) {
       <TextLink to="/account" className="py-2.5">
         Account
       </TextLink>
-      <Button look="text" onClick={() => signOut.mutate(undefined, { onSuccess: () => navigate('/') })}>
+      <Button
+        look="text"
+        onClick={() => signOut.mutate(undefined, { onSuccess: () => navigate('/') })}
+      >
         Sign out
       </Button>
     </p>

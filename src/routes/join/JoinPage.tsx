@@ -24,13 +24,28 @@ export function JoinPage() {
         <Skeleton rows={2} />
       </PublicForm>
     );
-  const { breweryName, role, invitedBy } = preview.data;
+  const { breweryName, role, invitedBy, memberOf } = preview.data;
+  if (memberOf !== null) return <InAlready name={breweryName} slug={memberOf} />;
   return (
     <PublicForm
       title={`Join ${breweryName}`}
       lead={`${invitedBy} asks you in as ${ROLE_WORDS[role].toLowerCase()}. ${ROLE_MEANING[role]}`}
     >
       {me ? <AcceptJoin token={token} me={me} /> : <JoinForm token={token} />}
+    </PublicForm>
+  );
+}
+
+/** The link is not used up by looking at it. */
+function InAlready({ name, slug }: { name: string; slug: string }) {
+  return (
+    <PublicForm
+      title={`You are in ${name} already`}
+      lead="You keep the role that you have there. The link stays good: pass it on to whom it is for."
+    >
+      <LinkButton look="first" size="large" to={`/b/${slug}`}>
+        To its board
+      </LinkButton>
     </PublicForm>
   );
 }

@@ -7,6 +7,7 @@ import { Avatar } from '../../components/drawn/Avatar.tsx';
 import { Menu, MenuItem, MenuLabel, MenuLink, MenuSeparator } from '../../components/ui/Menu.tsx';
 import { say } from '../../components/ui/Toast.tsx';
 import { sentenceOf } from '../../api/errors.ts';
+import { keysStore } from '../../keys/findStore.ts';
 import { initialsOf } from './initials.ts';
 
 export function AccountMenu() {
@@ -36,26 +37,10 @@ export function AccountMenu() {
       <MenuLink to={brewery.path('rules')}>House rules</MenuLink>
       <MenuLink to={brewery.path('record')}>Record</MenuLink>
       <MenuLink to="/about/checks">How the checks work</MenuLink>
-      <OtherBreweries />
+      <MenuItem onSelect={() => keysStore.set(true)}>Keys</MenuItem>
+      <MenuLink to="/breweries">Breweries</MenuLink>
       <MenuSeparator />
       <MenuItem onSelect={leave}>Sign out</MenuItem>
     </Menu>
-  );
-}
-
-function OtherBreweries() {
-  const { brewerySlug } = useBrewery();
-  const others = useSession().data?.breweries.filter((m) => m.brewery.slug !== brewerySlug) ?? [];
-  if (others.length === 0) return null;
-  return (
-    <>
-      <MenuSeparator />
-      <MenuLabel>Other breweries</MenuLabel>
-      {others.map(({ brewery }) => (
-        <MenuLink key={brewery.id} to={`/b/${brewery.slug}`}>
-          {brewery.name}
-        </MenuLink>
-      ))}
-    </>
   );
 }

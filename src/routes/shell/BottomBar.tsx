@@ -69,6 +69,7 @@ function More() {
       <MenuLink to={brewery.path('rules')}>House rules</MenuLink>
       <MenuLink to={brewery.path('record')}>Record</MenuLink>
       <MenuLink to={brewery.path('account')}>Account and units</MenuLink>
+      <MenuLink to="/breweries">Breweries</MenuLink>
     </Menu>
   );
 }

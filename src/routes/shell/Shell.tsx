@@ -3,14 +3,16 @@ import { Navigate, Outlet, useLocation, useParams } from 'react-router-dom';
 import { sentenceOf } from '../../api/errors.ts';
 import { useSession } from '../../api/session.ts';
 import { LeaveGuard } from '../../app/LeaveGuard.tsx';
+import { Keys } from '../../keys/Keys.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
 import { OfflineBanner } from '../../components/ui/OfflineBanner.tsx';
 import { Skeleton } from '../../components/ui/Skeleton.tsx';
 import { Toaster } from '../../components/ui/Toast.tsx';
 import { NewRelease } from '../../release/NewRelease.tsx';
-import { NotFoundPage } from '../error/NotFoundPage.tsx';
 import { BottomBar } from './BottomBar.tsx';
+import { KeepSession } from './KeepSession.tsx';
 import { LiveSeason } from './LiveSeason.tsx';
+import { NotFoundHere, ShownHere } from './NotFoundHere.tsx';
 import { Page } from './Page.tsx';
 import { TopBar } from './TopBar.tsx';
 
@@ -31,19 +33,23 @@ export function Shell() {
     return <Navigate to={`/sign-in?next=${next}`} replace />;
   }
   // Somebody else's brewery looks like one that does not exist.
-  if (!session.data.breweries.some((m) => m.brewery.slug === brewery)) return <NotFoundPage />;
+  if (!session.data.breweries.some((m) => m.brewery.slug === brewery))
+    return <NotFoundHere slug={brewery ?? ''} />;
   return (
     <div className="flex min-h-dvh flex-col print:block print:min-h-0">
       <TopBar />
       <OfflineBanner />
       <NewRelease />
       <LiveSeason />
+      <KeepSession />
+      <ShownHere slug={brewery ?? ''} />
       <div className="flex min-w-0 grow flex-col max-tablet:pb-20 print:block print:pb-0">
         <Suspense fallback={<Loading />}>
           <Outlet />
         </Suspense>
       </div>
       <BottomBar />
+      <Keys />
       <LeaveGuard />
       <Toaster />
     </div>

@@ -3,6 +3,7 @@ import { Link, NavLink } from 'react-router-dom';
 import { useBrewery } from '../../app/useBrewery.ts';
 import { Wordmark } from '../../components/ui/Wordmark.tsx';
 import { AccountMenu } from './AccountMenu.tsx';
+import { BreweryMenu } from './BreweryMenu.tsx';
 import { LiveMark } from './LiveMark.tsx';
 import { Members } from './Members.tsx';
 import { PAGES } from './pages.ts';
@@ -34,7 +35,7 @@ export function TopBar() {
         ))}
       </nav>
       <div className="ml-auto flex min-w-0 items-center gap-3.5 text-small text-on-bar2">
-        <span className="truncate max-tablet:hidden">{brewery.name}</span>
+        <BreweryMenu />
         <LiveMark />
         <Members />
         <AccountMenu />
