@@ -60,6 +60,7 @@ function PrintedChain({ chain }: { chain: Chain }) {
         </p>
         <ChainLine chain={chain} />
       </header>
+      <h2 className="sr-only">Batches</h2>
       <PaperShelf chain={chain} />
       {course.points.length > 0 && (
         <>

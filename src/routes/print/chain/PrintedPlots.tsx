@@ -15,6 +15,10 @@ export function PrintedPlots({ course }: { course: Course }) {
       {stripsOf(course).map((strip) => (
         <div
           key={strip.points[0]?.batchId}
+          role="region"
+          aria-label={`Plots of ${strip.points.map(({ name }) => name).join(', ')}`}
+          // oxlint-disable-next-line jsx-a11y/no-noninteractive-tabindex -- what scrolls must be reached by the keyboard
+          tabIndex={0}
           className={`thumb-slim mt-2 overflow-x-auto break-inside-avoid print:overflow-visible ${ZOOM[batchesAcross(course.points.length)]}`}
         >
           <Names course={strip} />

@@ -13,7 +13,9 @@ const ELSEWHERE = ['jar-the-rest', 'oxygen', 'second-oxygen'];
 /** Every finding with why and what to do, who accepted a hold and why, what was not checked. */
 export function SheetFindings({ later, link }: { later: Batch; link: JudgedLink }) {
   const { acceptance } = later.link;
-  const advice = link.advice.filter(({ id }) => !ELSEWHERE.includes(id));
+  const saysHops = link.findings.some(({ rule }) => rule === 'hops-in-cake');
+  const told = saysHops ? [...ELSEWHERE, 'harvest-before-hops'] : ELSEWHERE;
+  const advice = link.advice.filter(({ id }) => !told.includes(id));
   return (
     <SheetPart title={link.findings.length === 0 ? 'Nothing speaks against it' : 'What to look at'}>
       {link.findings.map((finding) => (

@@ -23,7 +23,7 @@ export const Blank = ({ wide = false }: { wide?: boolean }) => (
 /** A box to tick, and what is done then. */
 export function Tick({ children }: { children: ReactNode }) {
   return (
-    <li className="flex break-inside-avoid gap-2 py-[0.22em]">
+    <li className="flex break-inside-avoid gap-2 py-[0.38em] leading-[1.5]">
       <span
         aria-hidden
         className="mt-[0.1em] size-[1.05em] flex-none rounded-[2px] border-[1.5px] border-ink"
