@@ -42,6 +42,7 @@ function rowsOf(name: TableName, { breweryId, seasonId }: Where): SQL {
     case 'batch':
       return sql`r.brewery_id = ${breweryId}::uuid and r.season_id = ${seasonId}::uuid`;
     case 'cake':
+    case 'cake_check':
       return sql`r.batch_id in (select b.id from batch b
         where b.brewery_id = ${breweryId}::uuid and b.season_id = ${seasonId}::uuid)`;
   }

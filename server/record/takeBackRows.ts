@@ -13,7 +13,7 @@ export type TakenBack = { ok: true; next: Snapshot } | Refused;
  * something of later date could not stand any more.
  */
 export function takeBackRows(now: Snapshot, from: EditSide, to: EditSide): TakenBack {
-  const changed = changedSince(now, from);
+  const changed = changedSince(now, from) ?? readSince(now, to);
   if (changed) return changed;
   const rows = Object.fromEntries(
     TABLE_NAMES.map((name) => [name, tableWith(now.rows[name], name, to)]),
@@ -29,13 +29,26 @@ export function takeBackRows(now: Snapshot, from: EditSide, to: EditSide): Taken
   return { ok: true, next };
 }
 
+/** Tables whose rows bear the id of the batch that they are about. */
+const OF_BATCH: ReadonlySet<TableName> = new Set(['cake', 'cake_check']);
+
 function changedSince(now: Snapshot, from: EditSide): Refused | null {
   for (const name of TABLE_NAMES)
     for (const [id, was] of Object.entries(from.rows[name] ?? {})) {
       const is = now.rows[name].get(id) ?? null;
-      const about = name === 'cake' ? now.rows.batch.get(id) : (is ?? was);
+      const about = OF_BATCH.has(name) ? now.rows.batch.get(id) : (is ?? was);
       if (!sameRow(was, is)) return refuse(sinceWords(name, about ?? null, was, is), id);
     }
+  return null;
+}
+
+/** A batch that would go with what was read of it. */
+function readSince(now: Snapshot, to: EditSide): Refused | null {
+  for (const [id, row] of Object.entries(to.rows.batch ?? {})) {
+    const is = now.rows.batch.get(id);
+    if (row === null && is?.followed)
+      return refuse(`${nameOf('batch', is)} has readings since`, id);
+  }
   return null;
 }
 
@@ -66,6 +79,7 @@ function nameOf(table: TableName, row: Row | null): string {
     case 'chain':
       return `The shelf ${String(row?.name ?? '')}`.trim();
     case 'cake':
+    case 'cake_check':
       return `The cake of ${String(row?.name ?? 'a batch')}`;
     case 'yeast':
     case 'vessel':

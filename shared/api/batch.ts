@@ -8,6 +8,7 @@ import {
   TIMINGS,
   TRUB_LEVELS,
 } from '../rules/vocabulary.ts';
+import { JUDGEMENTS } from './cakeCheck.ts';
 import * as f from './fields.ts';
 import { typed } from './units.ts';
 
@@ -97,15 +98,19 @@ export const followed = z.strictObject({
   /** How many readings there are, of any kind. */
   count: z.number().int(),
   lastAt: z.iso.datetime(),
+  /** When the wort was poured onto its yeast; null: no pour was recorded. */
+  pouredAt: z.iso.datetime().nullable(),
+  firstGravity: z.number().nullable(),
+  firstGravityAt: z.iso.datetime().nullable(),
   /** The newest gravity; null: none was read. */
   gravity: z.number().nullable(),
   gravityAt: z.iso.datetime().nullable(),
   /** From when on no gravity was further than 0.001 from the newest. */
   steadyFrom: z.iso.datetime().nullable(),
   lowest: z.number().nullable(),
-  /** First gravity that stood clearly below the first one read: it had begun. */
+  /** The first gravity that stood clearly below the first one read: it had begun. */
   begunAt: z.iso.datetime().nullable(),
-  /** Last gravity before that: it had not begun. */
+  /** The last gravity before that: it had not begun. */
   stillAt: z.iso.datetime().nullable(),
   temperatureC: z.number().nullable(),
   temperatureAt: z.iso.datetime().nullable(),
@@ -114,6 +119,10 @@ export type Followed = z.infer<typeof followed>;
 
 export const cake = z.strictObject({
   state: z.enum(CAKE_STATES),
+  /** How it was judged at racking; null: nobody has. */
+  check: z
+    .strictObject({ judged: z.enum(JUDGEMENTS), tasted: z.enum(['clean', 'off']) })
+    .nullable(),
   measured: z
     .strictObject({
       volumeL: z.number().nullable(),
@@ -137,6 +146,8 @@ export const batch = z.strictObject({
   /** What went wrong, of a scrapped batch; else empty. */
   scrapReason: f.note,
   read: readFacts,
+  /** Null: no reading was taken. */
+  followed: followed.nullable(),
   /** Null while pencilled. */
   cake: cake.nullable(),
   link,

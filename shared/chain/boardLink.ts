@@ -5,6 +5,7 @@ import type { BatchFacts, BoardContext, PourFacts, YeastFacts } from '../rules/f
 import type { LinkInput } from '../rules/linkInput.ts';
 import { DEFAULT_HOUSE_RULES, resolveHouseRules, type HouseRules } from '../rules/resolve.ts';
 import { factsOf, pourFactsOf, vesselFactsOf, yeastFactsOf } from './batchFacts.ts';
+import { cakeCheckOf } from './cakeChecked.ts';
 import { indexBoard, type BoardFacts, type BoardIndex, type Layout } from './board.ts';
 import { descents, type Descent } from './descent.ts';
 import { inherit } from './inherit.ts';
@@ -88,7 +89,6 @@ export function unsharedLink(earlier: Batch, later: Batch, sight: LinkSight): Li
   const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
   const vessel = chain?.vesselId ? index.vessels.get(chain.vesselId) : undefined;
   const pour = pourOf(earlier, later, sight);
-  const taken = sight.use(later.id)?.takenBy;
   const input: LinkInput = {
     earlier: sight.facts(earlier),
     later: sight.facts(later),
@@ -96,7 +96,7 @@ export function unsharedLink(earlier: Batch, later: Batch, sight: LinkSight): Li
     yeast,
     inherited,
     rules: sight.rules,
-    board: boardContext(earlier, taken),
+    board: boardContext(earlier, later, sight),
   };
   if (vessel) input.vessel = vesselFactsOf(vessel);
   if (generation !== null) input.generation = generation;
@@ -140,11 +140,11 @@ function pourOf(earlier: Batch, later: Batch, sight: LinkSight): PourFacts {
   return pour;
 }
 
-/** The cake check has no record yet; a cell count of the cake speaks for itself. */
-function boardContext(earlier: Batch, vesselTakenBy: string | undefined): BoardContext {
-  const living = earlier.cake?.measured?.viability ?? null;
+function boardContext(earlier: Batch, later: Batch, sight: LinkSight): BoardContext {
   const context: BoardContext = {};
-  if (vesselTakenBy !== undefined) context.vesselTakenBy = vesselTakenBy;
-  if (living !== null) context.cakeCheck = { dueWithinADay: false, dead: 1 - living };
+  const taken = sight.use(later.id)?.takenBy;
+  if (taken !== undefined) context.vesselTakenBy = taken;
+  const cakeCheck = cakeCheckOf(earlier, later, sight);
+  if (cakeCheck) context.cakeCheck = cakeCheck;
   return context;
 }

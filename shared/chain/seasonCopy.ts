@@ -97,6 +97,7 @@ function pencilled(batch: Batch, shift: number, isSettled: boolean): Batch {
     brewOn: later(batch.brewOn),
     wantedOn: later(batch.wantedOn),
     read: { volumeL: null, og: null, fg: null, rackedOn: null },
+    followed: null,
     cake: null,
     link,
   };

@@ -7,10 +7,11 @@ import { toTenth } from './rounding.ts';
 const DEAD_MIND = 0.1;
 const DEAD_HOLD = 0.25;
 
-type Why = 'unfit' | 'off' | 'stuck' | 'dead' | 'with-care' | 'unjudged';
+type Why = 'unfit' | 'off' | 'stuck' | 'dead' | 'with-care' | 'noticed' | 'unjudged';
 interface Detail {
   why: Why;
   dead: number | undefined;
+  noticed: readonly string[];
 }
 
 /** The judgement of the cake at racking. Stands nowhere off the board. */
@@ -20,24 +21,22 @@ export const cakeCheck: Rule<Detail> = {
   judge({ board }) {
     const check = board?.cakeCheck;
     if (check === undefined) return NOWHERE;
-    const { dead } = check;
+    const { dead, noticed = [] } = check;
+    const because = (why: Why): Detail => ({ why, dead, noticed });
     const held = holdsFor(check);
-    if (held !== undefined) return hold({ why: held, dead });
-    if ((dead ?? 0) > DEAD_MIND) return mind({ why: 'dead', dead });
-    if (check.judged === 'with-care') return mind({ why: 'with-care', dead });
-    return check.judged === undefined && check.dueWithinADay
-      ? mind({ why: 'unjudged', dead })
-      : PASSED;
+    if (held !== undefined) return hold(because(held));
+    const why = mindsFor(check);
+    return why === undefined ? PASSED : mind(because(why));
   },
 
-  describe({ standing, detail: { why, dead } }, link) {
+  describe({ standing, detail: { why, dead, noticed } }, link) {
     const { a, b } = namesOf(link);
     const { title, because } = SAID[why];
     return {
       title,
-      because: because.replace('{a}', a),
+      because: [because.replace('{a}', a), ...noticed].join(' '),
       do:
-        why === 'unjudged'
+        why === 'unjudged' || why === 'noticed'
           ? `Judge the cake of ${a} before ${b} is poured.`
           : `Give ${b} fresh yeast, or judge another part of the cake.`,
       measures:
@@ -64,6 +63,15 @@ function holdsFor(check: NonNullable<BoardContext['cakeCheck']>): Why | undefine
   return (check.dead ?? 0) > DEAD_HOLD ? 'dead' : undefined;
 }
 
+/** A brewer who judged the cake knew of the readings; until then they speak for themselves. */
+function mindsFor(check: NonNullable<BoardContext['cakeCheck']>): Why | undefined {
+  if ((check.dead ?? 0) > DEAD_MIND) return 'dead';
+  if (check.judged === 'with-care') return 'with-care';
+  if (check.judged !== undefined) return undefined;
+  if ((check.noticed ?? []).length > 0) return 'noticed';
+  return check.dueWithinADay ? 'unjudged' : undefined;
+}
+
 const SAID: Record<Why, { title: string; because: string }> = {
   unfit: { title: 'Cake judged unfit', because: 'The cake of {a} was judged unfit.' },
   off: { title: 'Beer tastes off', because: 'The beer above the cake of {a} tasted off.' },
@@ -75,6 +83,10 @@ const SAID: Record<Why, { title: string; because: string }> = {
   'with-care': {
     title: 'Cake wants care',
     because: 'The cake of {a} was judged to be used with care.',
+  },
+  noticed: {
+    title: 'Readings give warning',
+    because: 'The fermentation of {a} was not as it should be.',
   },
   unjudged: {
     title: 'Cake not judged',

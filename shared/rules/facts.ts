@@ -126,5 +126,7 @@ export interface BoardContext {
     dead?: number;
     tastedOff?: boolean;
     fermentationStuck?: boolean;
+    /** What the readings of the beer above it warn of, a sentence each. */
+    noticed?: readonly string[];
   };
 }

@@ -113,7 +113,7 @@ const shelved = (one: Shelf, at: number): Batch[] =>
 
 const pouredStage = (place: number, poured: number): Partial<Batch> => ({
   stage: place === poured - 1 ? 'fermenting' : 'racked',
-  cake: { state: place === poured - 1 ? 'growing' : 'bare', measured: null },
+  cake: { state: place === poured - 1 ? 'growing' : 'bare', check: null, measured: null },
 });
 
 function beerOf(number: number, facts: Beer, own: Partial<Batch>): Batch {

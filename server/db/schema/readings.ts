@@ -16,7 +16,7 @@ export const instrument = pgTable(
     version: version(),
     name: text().notNull(),
     kind: text().$type<'hydrometer' | 'refractometer' | 'thermometer' | 'ph-meter'>().notNull(),
-    /** Added to what it shows: SG, °C or pH. */
+    /** Added to what it shows, in its own scale: SG, °Bx, °C or pH. */
     correction: quantity().notNull().default(0),
     /** Temperature that a hydrometer is made for, °C. */
     calibratedC: quantity(),
@@ -60,7 +60,7 @@ export const reading = pgTable(
     ...ofBatch(),
     kind: text().$type<'gravity' | 'temperature' | 'ph'>().notNull(),
     takenAt: instant().notNull(),
-    /** As the instrument showed it: SG, °C or pH. */
+    /** As the instrument showed it: SG, °Bx of a refractometer, °C or pH. */
     shown: quantity().notNull(),
     /** After the correction of the instrument and of the sample's temperature. */
     value: quantity().notNull(),

@@ -86,6 +86,8 @@ export const removeBatch =
     demandVersion(version, row.version, row);
     if (row.stage === 'fermenting' || row.stage === 'racked')
       throw problem('in-use', { detail: `${row.name} has been brewed: scrap it instead` });
+    if (row.followed)
+      throw problem('in-use', { detail: `${row.name} has readings, which would go with it` });
     demandNoBranch(board.chains, row);
     if (row.stage !== 'scrapped') await closeUp(hand, row);
     await tx.delete(batch).where(and(eq(batch.seasonId, board.season.id), eq(batch.id, id)));

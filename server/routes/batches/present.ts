@@ -1,6 +1,6 @@
 import type { Batch, Link } from '#shared/api/batch.ts';
 import type { batch } from '../../db/schema/chain.ts';
-import type { cake } from '../../db/schema/cake.ts';
+import type { cake, cakeCheck } from '../../db/schema/cake.ts';
 
 /** A batch's columns that anybody sees. */
 export type BatchRow = Omit<
@@ -8,9 +8,15 @@ export type BatchRow = Omit<
   'breweryId' | 'seasonId' | 'shelfId' | 'createdAt'
 >;
 export type CakeRow = typeof cake.$inferSelect;
+/** Of a cake's judgement what its batch says. */
+export type CheckSaid = Pick<typeof cakeCheck.$inferSelect, 'judged' | 'tasted'>;
 
 /** The one place where a batch's rows become its contract. */
-export function presentBatch(row: BatchRow, itsCake: CakeRow | null): Batch {
+export function presentBatch(
+  row: BatchRow,
+  itsCake: CakeRow | null,
+  check: CheckSaid | null,
+): Batch {
   return {
     id: row.id,
     version: row.version,
@@ -44,7 +50,8 @@ export function presentBatch(row: BatchRow, itsCake: CakeRow | null): Batch {
       fg: row.readFg,
       rackedOn: row.rackedOn,
     },
-    cake: itsCake && { state: itsCake.state, measured: itsCake.measured },
+    followed: row.followed,
+    cake: itsCake && { state: itsCake.state, check, measured: itsCake.measured },
     link: presentLink(row),
   };
 }

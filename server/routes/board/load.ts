@@ -7,7 +7,7 @@ import { cake } from '../../db/schema/cake.ts';
 import { batch, chain } from '../../db/schema/chain.ts';
 import { season } from '../../db/schema/season.ts';
 import { vessel, yeast } from '../../db/schema/stock.ts';
-import { presentBatch, type BatchRow, type CakeRow } from '../batches/present.ts';
+import { presentBatch, type BatchRow, type CakeRow, type CheckSaid } from '../batches/present.ts';
 import { presentChain, type ChainRow } from '../chains/present.ts';
 import { presentMember, type MemberRow } from '../people/present.ts';
 import { presentSeason } from '../season/present.ts';
@@ -34,12 +34,15 @@ export async function loadBoardRows(
     yeasts: found.yeasts.map(presentYeast),
     vessels: found.vessels.map(presentVessel),
     chains: found.chains.map(presentChain),
-    batches: found.batches.map((row) => presentBatch(row.batch, row.cake)),
+    batches: found.batches.map((row) => presentBatch(row.batch, row.cake, row.check)),
   };
 }
 
 /** Columns that a board does not show. */
 const UNSEEN = ['breweryId', 'seasonId', 'shelfId', 'createdAt'];
+
+/** Of a cake's judgement only what the links read. */
+const CHECK = "json_build_object('judged', q.judged, 'tasted', q.tasted)";
 
 const LISTS = {
   blockedDays: jsonList<string>('d.day', 'blocked_day d where d.season_id = season.id', 'd.day'),
@@ -63,10 +66,12 @@ const LISTS = {
     'chain c where c.brewery_id = season.brewery_id and c.season_id = season.id',
     'c.position',
   ),
-  batches: jsonList<{ batch: BatchRow; cake: CakeRow | null }>(
+  batches: jsonList<{ batch: BatchRow; cake: CakeRow | null; check: CheckSaid | null }>(
     `json_build_object('batch', ${jsonObject(batch, 'b', UNSEEN)}, 'cake',
-      case when k.batch_id is not null then ${jsonObject(cake, 'k')} end)`,
+      case when k.batch_id is not null then ${jsonObject(cake, 'k')} end, 'check',
+      case when q.batch_id is not null then ${CHECK} end)`,
     `batch b left join cake k on k.batch_id = b.id
+      left join cake_check q on q.batch_id = b.id
       where b.brewery_id = season.brewery_id and b.season_id = season.id`,
     'b.chain_id, b.place',
   ),

@@ -20,6 +20,7 @@ const MAY: Record<TableName, (member: InRole) => boolean> = {
   chain: canEditChains,
   batch: canEditBatches,
   cake: canEditBatches,
+  cake_check: canEditBatches,
 };
 
 /** What somebody may no longer edit they may no longer undo either: roles change. */

@@ -21,7 +21,7 @@ function season(): BoardFacts {
         ibu: 20,
         stage: 'racked',
         read: { volumeL: 23, og: 1.045, fg: 1.01, rackedOn: '2027-03-20' },
-        cake: { state: 'bare', measured: null },
+        cake: { state: 'bare', check: null, measured: null },
       }),
       makeBatch(2, { ...on(1, '2027-03-20'), og: 1.052, fg: 1.013, srm: 7, ibu: 38 }),
       makeBatch(3, { ...on(2, '2027-04-03'), og: 1.06, fg: 1.015, srm: 30, ibu: 35 }),

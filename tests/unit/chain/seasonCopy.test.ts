@@ -12,7 +12,7 @@ const acceptance = { reason: 'It is fine', rules: [], by: 'Mo', at: '2027-03-01T
 const racked: Partial<Batch> = {
   stage: 'racked',
   read: { volumeL: 22, og: 1.05, fg: 1.01, rackedOn: '2027-03-20' },
-  cake: { state: 'poured', measured: null },
+  cake: { state: 'poured', check: null, measured: null },
 };
 const batches = [
   makeBatch(1, { chainId: first, place: 0, brewOn: '2027-03-06', ...racked }),

@@ -31,7 +31,7 @@ function divided({ next, branched, wholeL = 1.1, branchStage = 'pencilled' }: Sa
         chainId: idOf('chain', 1),
         brewOn: '2027-03-06',
         stage: 'racked',
-        cake: { state: 'bare', measured },
+        cake: { state: 'bare', check: null, measured },
       }),
       makeBatch(2, {
         name: 'Breakwater',

@@ -35,4 +35,12 @@ describe('cake-check', () => {
     expect(judged({ judged: 'fit', tastedOff: true })).toBe('hold');
     expect(judged({ judged: 'fit', fermentationStuck: true })).toBe('hold');
   });
+
+  test('what the readings warn of is a mind, until somebody judged the cake in spite of it', () => {
+    const noticed = ['It was last read at 26 °C.'];
+    expect(at({ cakeCheck: { dueWithinADay: false, noticed: [] } })).toBe('passed');
+    expect(at({ cakeCheck: { dueWithinADay: false, noticed } })).toBe('mind');
+    expect(judged({ judged: 'fit', noticed })).toBe('passed');
+    expect(judged({ judged: 'with-care', noticed })).toBe('mind');
+  });
 });
