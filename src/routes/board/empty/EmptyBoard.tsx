@@ -1,3 +1,5 @@
+import { SeasonNote } from '../head/SeasonNote.tsx';
+import { SeasonSwitch } from '../head/SeasonSwitch.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { EmptyShelf } from './EmptyShelf.tsx';
 import { FirstSteps } from './FirstSteps.tsx';
@@ -7,7 +9,11 @@ export function EmptyBoard() {
   const { can } = useBoardView();
   return (
     <main id="main" className="flex grow flex-col outline-none">
-      <header className="px-14 pt-9 max-wide:px-7 max-tablet:px-[18px] max-tablet:pt-6">
+      <SeasonNote />
+      <div className="px-12 pt-4 max-wide:px-5 max-tablet:px-2.5">
+        <SeasonSwitch />
+      </div>
+      <header className="px-14 pt-4 max-wide:px-7 max-tablet:px-[18px]">
         <h1 className="text-h0 font-[730] tracking-[-0.03em] max-tablet:text-h1">
           The shelf is empty.
         </h1>

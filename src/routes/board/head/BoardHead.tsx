@@ -3,11 +3,13 @@ import { Link } from 'react-router-dom';
 import { useBrewery } from '../../../app/useBrewery.ts';
 import { Button } from '../../../components/ui/Button.tsx';
 import { LinkButton } from '../../../components/ui/LinkButton.tsx';
+import { FindTools } from '../finding/FindTools.tsx';
 import { UndoButtons } from '../lift/UndoButtons.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { useBoardPanel } from '../view/useBoardPanel.ts';
 import { seasonLine } from '../view/words.ts';
 import { BestMove } from './BestMove.tsx';
+import { SeasonSwitch } from './SeasonSwitch.tsx';
 
 /** The season, its sum in one line, and what begins from here. */
 export function BoardHead() {
@@ -17,12 +19,16 @@ export function BoardHead() {
   return (
     <header className="flex flex-wrap items-end gap-x-5 gap-y-3 px-7 pt-4 pb-1.5">
       <div className="min-w-0 flex-1 basis-80">
-        <h1 className="text-h1 tracking-[-0.025em]">
-          <SeasonName />
-        </h1>
+        <div className="flex items-center gap-1">
+          <h1 className="text-h1 tracking-[-0.025em]">
+            <SeasonName />
+          </h1>
+          <SeasonSwitch isBare />
+        </div>
         <p className="mt-0.5 text-ink2">{seasonLine(judged.totals)}</p>
       </div>
       <div className="flex flex-wrap items-center gap-2.5 print:hidden">
+        <FindTools />
         {can.moveBatches && <UndoButtons />}
         <LinkButton to={path('print/season')}>
           <Printer size={17} aria-hidden />

@@ -5,6 +5,7 @@ import { StageMark } from '../../../components/drawn/StageMark.tsx';
 import { Vessel } from '../../../components/drawn/Vessel.tsx';
 import { BatchMenu } from '../batch/BatchMenu.tsx';
 import { BatchName } from '../batch/BatchName.tsx';
+import { useIsPale } from '../finding/Matching.tsx';
 import { GapSlot } from '../lift/GapSlot.tsx';
 import { useIsLifted } from '../lift/liftContext.ts';
 import { LiftHandle } from '../lift/LiftHandle.tsx';
@@ -29,7 +30,12 @@ export function PhoneBatch({ batch, next }: PhoneBatchProps) {
   const link = next && judged.links.get(next.id);
   const isLifted = useIsLifted(batch.id);
   return (
-    <li data-batch={batch.id} data-in-hand={isLifted || undefined} className="relative">
+    <li
+      data-batch={batch.id}
+      data-pale={useIsPale(batch.id) || undefined}
+      data-in-hand={isLifted || undefined}
+      className="relative"
+    >
       {link && (
         <div className="absolute top-[80px] -bottom-4 left-[28px] overflow-hidden">
           <CakeRun

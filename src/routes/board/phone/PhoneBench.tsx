@@ -3,6 +3,7 @@ import { Swatch } from '../../../components/drawn/Swatch.tsx';
 import { BatchMenu } from '../batch/BatchMenu.tsx';
 import { BatchName } from '../batch/BatchName.tsx';
 import { Scrapped } from '../batch/Scrapped.tsx';
+import { useIsPale } from '../finding/Matching.tsx';
 import { MoveMenu } from '../lift/MoveMenu.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
 import { beerFacts, count } from '../view/words.ts';
@@ -39,6 +40,7 @@ function BenchRow({ batch }: { batch: Batch }) {
   return (
     <li
       data-batch={batch.id}
+      data-pale={useIsPale(batch.id) || undefined}
       className="flex items-center gap-3 rounded-xl border-[1.5px] border-line bg-white py-2 pr-1 pl-3"
     >
       <Swatch srm={batch.srm} size="glass" />

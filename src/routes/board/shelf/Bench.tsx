@@ -3,6 +3,8 @@ import { Swatch } from '../../../components/drawn/Swatch.tsx';
 import { BatchActions } from '../batch/BatchActions.tsx';
 import { BatchName } from '../batch/BatchName.tsx';
 import { Scrapped } from '../batch/Scrapped.tsx';
+import { matchesFirst } from '../finding/filter.ts';
+import { useIsPale, useMatching } from '../finding/Matching.tsx';
 import { GapSlot } from '../lift/GapSlot.tsx';
 import { useIsLifted } from '../lift/liftContext.ts';
 import { useUnfolding } from '../lift/useUnfolding.ts';
@@ -13,6 +15,8 @@ import { beerFacts } from '../view/words.ts';
 export function Bench() {
   const { index, can } = useBoardView();
   const ref = useUnfolding<HTMLElement>('bench');
+  const matches = useMatching();
+  const bench = matches ? matchesFirst(index.bench, ({ id }) => matches.has(id)) : index.bench;
   return (
     <section
       ref={ref}
@@ -26,7 +30,7 @@ export function Bench() {
         </small>
       </h2>
       <ul className="thumb-slim flex min-w-0 flex-1 gap-3 overflow-x-auto py-1 print:flex-wrap">
-        {index.bench.map((batch) => (
+        {bench.map((batch) => (
           <BenchBatch key={batch.id} batch={batch} />
         ))}
         {index.bench.length === 0 && (
@@ -50,6 +54,7 @@ function BenchBatch({ batch }: { batch: Batch }) {
   return (
     <li
       data-batch={batch.id}
+      data-pale={useIsPale(batch.id) || undefined}
       data-in-hand={isLifted || undefined}
       className="flex max-w-[300px] flex-none items-center gap-2.5 rounded-xl border-[1.5px] border-line bg-white py-1.5 pr-2 pl-2.5 text-small text-ink2"
     >

@@ -2,6 +2,7 @@ import type { Batch } from '#shared/api/batch.ts';
 import { CakeBand } from '../../../components/drawn/CakeBand.tsx';
 import { DateTag } from '../../../components/drawn/DateTag.tsx';
 import { Vessel } from '../../../components/drawn/Vessel.tsx';
+import { useIsPale } from '../finding/Matching.tsx';
 import { GapSlot } from '../lift/GapSlot.tsx';
 import { useIsLifted } from '../lift/liftContext.ts';
 import { useBoardView } from '../view/BoardView.tsx';
@@ -25,6 +26,7 @@ export function ShelfBatch({ batch, next, chainId }: ShelfBatchProps) {
   return (
     <li
       data-batch={batch.id}
+      data-pale={useIsPale(batch.id) || undefined}
       data-in-hand={isLifted || undefined}
       className="relative flex-none"
       style={{ width: SHELF.cell, height: SHELF.top + SHELF.board + SHELF.foot }}

@@ -1,5 +1,6 @@
 import { useCallback, useMemo } from 'react';
 import { useSearchParams } from 'react-router-dom';
+import { filterParams } from '../finding/filter.ts';
 
 export type BoardPanel =
   | { kind: 'link'; laterId: string }
@@ -38,11 +39,15 @@ export function useBoardPanel() {
   const panel = useMemo(() => panelOf(params), [params]);
   const isOpen = panel !== null;
   const open = useCallback(
-    (next: BoardPanel) => setParams(search(next), { replace: isOpen, preventScrollReset: true }),
+    (next: BoardPanel) =>
+      setParams((now) => ({ ...filterParams(now), ...search(next) }), {
+        replace: isOpen,
+        preventScrollReset: true,
+      }),
     [setParams, isOpen],
   );
   const close = useCallback(
-    () => setParams({}, { replace: true, preventScrollReset: true }),
+    () => setParams(filterParams, { replace: true, preventScrollReset: true }),
     [setParams],
   );
   return { panel, open, close };
