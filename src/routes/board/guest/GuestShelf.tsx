@@ -1,6 +1,6 @@
-import { useQuery } from '@tanstack/react-query';
 import type { GuestShelf as Guest } from '#shared/api/guest.ts';
-import { boardQuery } from '../../../api/board.ts';
+import { guestAnchor } from '../../../app/guestAddress.ts';
+import { lazyPart } from '../../../app/lazyPart.tsx';
 import { ChangesPanel } from '../lift/ChangesPanel.tsx';
 import { useLiftPanel } from '../lift/liftContext.ts';
 import { LiftProvider } from '../lift/LiftProvider.tsx';
@@ -8,28 +8,32 @@ import { PlacesPanel } from '../lift/PlacesPanel.tsx';
 import { PhoneBatch } from '../phone/PhoneBatch.tsx';
 import { Shelf } from '../shelf/Shelf.tsx';
 import { useBoardView } from '../view/BoardView.tsx';
+import { useShownByAnchor } from './useShownByAnchor.ts';
 import { usePhone } from '../view/useMedia.ts';
 
-/** Their changes are not told as they happen: the shelf is read anew while it is looked at. */
-const READ_AGAIN_MS = 10_000;
+/** Seldom used, so it comes when it is shown. */
+const LeaveChain = lazyPart(async () => (await import('./LeaveChain.tsx')).LeaveChain);
 
 /** A chain of another brewery, lifted and judged as there, by their house rules. */
 export function GuestShelf({ guest }: { guest: Guest }) {
   const view = useBoardView();
-  const { index, slug } = view;
-  useQuery({ ...boardQuery(slug), refetchInterval: READ_AGAIN_MS });
+  const { index } = view;
+  const section = useShownByAnchor(guestAnchor(guest.guestId));
   const phone = usePhone();
   const chain = index.chain(guest.chainId);
   if (!chain) return null;
   return (
     <LiftProvider takesUndo={false}>
       <section
+        ref={section}
+        id={guestAnchor(guest.guestId)}
+        tabIndex={-1}
         aria-label={`${chain.name} from ${guest.fromBrewery}`}
-        className="mx-7 border-t-2 border-dashed border-edge pt-2 pb-4 max-tablet:mx-[18px] max-tablet:mt-6"
+        className="mx-7 border-t-2 border-dashed border-edge pt-2 pb-4 max-tablet:mx-[18px] outline-none max-tablet:mt-6"
       >
         <p className="text-small text-ink2">
           from <b className="text-ink">{guest.fromBrewery}</b> · as {guest.role} · by their house
-          rules
+          rules · <LeaveChain guest={guest} />
         </p>
         {phone ? (
           <>

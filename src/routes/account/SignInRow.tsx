@@ -1,0 +1,36 @@
+import type { SignInPlace } from '#shared/api/account.ts';
+import { Button } from '../../components/ui/Button.tsx';
+import { endOf } from '../people/endOf.ts';
+
+interface SignInRowProps {
+  place: SignInPlace;
+  busy: boolean;
+  onEnd: () => void;
+}
+
+/** Times are those of the device that is looked at. */
+export function SignInRow({ place, busy, onEnd }: SignInRowProps) {
+  const { timeZone } = Intl.DateTimeFormat().resolvedOptions();
+  return (
+    <li className="flex items-center gap-3 py-3">
+      <div className="min-w-0 grow">
+        <p className="font-medium wrap-anywhere">{place.device || 'A browser'}</p>
+        <p className="text-small text-ink2">
+          {place.isThisOne ? 'This one' : `Last seen ${endOf(place.seenAt, timeZone)}`} · signed in{' '}
+          {endOf(place.since, timeZone)}
+        </p>
+      </div>
+      {!place.isThisOne && (
+        <Button
+          size="small"
+          look="quiet"
+          disabled={busy}
+          aria-label={`Sign out: ${place.device}`}
+          onClick={onEnd}
+        >
+          Sign out
+        </Button>
+      )}
+    </li>
+  );
+}
