@@ -41,7 +41,8 @@ export async function requestNothing(method: Method, url: string, options: Reque
   throw problemOf(response, await response.json().catch(() => undefined));
 }
 
-async function send(
+/** The bare answer, whatever it says. Throws `OfflineError` when none came. */
+export async function send(
   method: Method,
   url: string,
   { body, ifMatch, contract = CONTRACT, signal }: RequestOptions,
@@ -69,7 +70,8 @@ async function send(
   }
 }
 
-function problemOf(response: Response, content: unknown): Error {
+/** What an answer that is not good says. */
+export function problemOf(response: Response, content: unknown): Error {
   const parsed = problem.safeParse(content);
   if (parsed.success) return new ProblemError(parsed.data);
   return new UnexpectedAnswerError(`${response.url} answered ${response.status}`);

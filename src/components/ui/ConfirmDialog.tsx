@@ -17,10 +17,13 @@ export interface ConfirmDialogProps {
   onConfirm: () => void;
   busy?: boolean;
   error?: unknown;
+  /** It changes nothing on the server. */
+  worksOffline?: boolean;
 }
 
 export function ConfirmDialog(props: ConfirmDialogProps) {
-  const online = useOnline();
+  const isOnline = useOnline();
+  const online = isOnline || props.worksOffline === true;
   return (
     <Dialog open={props.open} onClose={props.onClose} title={props.title}>
       <div className="space-y-3 text-ink2">{props.children}</div>

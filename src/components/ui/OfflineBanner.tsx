@@ -20,7 +20,7 @@ function useAge(online: boolean): string | null {
       meta?.kept === true && queryKey[0] !== 'session' && state.dataUpdatedAt > 0,
   });
   if (shown.length === 0) return null;
-  return asOf(Math.min(...shown.map(({ state }) => state.dataUpdatedAt)), Date.now());
+  return asOf(Math.min(...shown.map(({ state }) => state.dataUpdatedAt)));
 }
 
 /** Says that the connection is gone and looks for it again. */

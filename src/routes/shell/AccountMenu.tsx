@@ -1,4 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { boardQuery } from '../../api/board.ts';
 import { useSession, useSignOut } from '../../api/session.ts';
@@ -8,39 +9,56 @@ import { Menu, MenuItem, MenuLabel, MenuLink, MenuSeparator } from '../../compon
 import { say } from '../../components/ui/Toast.tsx';
 import { sentenceOf } from '../../api/errors.ts';
 import { keysStore } from '../../keys/findStore.ts';
+import { useOutbox } from '../../outbox/useOutbox.ts';
 import { initialsOf } from './initials.ts';
+import { SignOutDialog } from './SignOutDialog.tsx';
 
 export function AccountMenu() {
   const brewery = useBrewery();
   const { data: me } = useSession();
   const { data: board } = useQuery(boardQuery(brewery.slug));
-  const navigate = useNavigate();
-  const signOut = useSignOut();
+  const { isAsking, stay, ask, leave } = useLeaving();
   if (!me) return null;
   const place = board?.members.findIndex((member) => member.personId === me.id) ?? -1;
   const initials = board?.members[place]?.initials ?? initialsOf(me.name);
-  const leave = () =>
+  return (
+    <>
+      <Menu
+        button={{
+          'aria-label': `Account of ${me.name}`,
+          className: 'grid min-h-8 place-items-center rounded-full max-tablet:size-11',
+          children: <Avatar initials={initials} name={me.name} place={Math.max(0, place)} />,
+        }}
+      >
+        <MenuLabel>{me.name}</MenuLabel>
+        <MenuLink to={brewery.path('account')}>Account and units</MenuLink>
+        <MenuLink to={brewery.path('rules')}>House rules</MenuLink>
+        <MenuLink to={brewery.path('record')}>Record</MenuLink>
+        <MenuLink to="/about/checks">How the checks work</MenuLink>
+        <MenuItem onSelect={() => keysStore.set(true)}>Keys</MenuItem>
+        <MenuLink to="/breweries">Breweries</MenuLink>
+        <MenuSeparator />
+        <MenuItem onSelect={ask}>Sign out</MenuItem>
+      </Menu>
+      {isAsking > 0 && <SignOutDialog waiting={isAsking} onClose={stay} onSignOut={leave} />}
+    </>
+  );
+}
+
+/** Signing out; where something waits to be sent, only after asking. */
+function useLeaving() {
+  const navigate = useNavigate();
+  const signOut = useSignOut();
+  const waiting = useOutbox().length;
+  const [isAsking, setAsking] = useState(0);
+  const stay = () => setAsking(0);
+  const leave = () => {
+    stay();
     signOut.mutate(undefined, {
       onSuccess: () => navigate('/'),
       onError: (error) => say(sentenceOf(error)),
     });
-  return (
-    <Menu
-      button={{
-        'aria-label': `Account of ${me.name}`,
-        className: 'grid min-h-8 place-items-center rounded-full max-tablet:size-11',
-        children: <Avatar initials={initials} name={me.name} place={Math.max(0, place)} />,
-      }}
-    >
-      <MenuLabel>{me.name}</MenuLabel>
-      <MenuLink to={brewery.path('account')}>Account and units</MenuLink>
-      <MenuLink to={brewery.path('rules')}>House rules</MenuLink>
-      <MenuLink to={brewery.path('record')}>Record</MenuLink>
-      <MenuLink to="/about/checks">How the checks work</MenuLink>
-      <MenuItem onSelect={() => keysStore.set(true)}>Keys</MenuItem>
-      <MenuLink to="/breweries">Breweries</MenuLink>
-      <MenuSeparator />
-      <MenuItem onSelect={leave}>Sign out</MenuItem>
-    </Menu>
-  );
+  };
+  const ask = () => (waiting > 0 ? setAsking(waiting) : leave());
+  return { isAsking, stay, ask, leave };
 }

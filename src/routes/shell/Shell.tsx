@@ -8,6 +8,7 @@ import { Notice } from '../../components/ui/Notice.tsx';
 import { OfflineBanner } from '../../components/ui/OfflineBanner.tsx';
 import { Skeleton } from '../../components/ui/Skeleton.tsx';
 import { Toaster } from '../../components/ui/Toast.tsx';
+import { StoppedStrip } from '../../outbox/StoppedStrip.tsx';
 import { NewRelease } from '../../release/NewRelease.tsx';
 import { BottomBar } from './BottomBar.tsx';
 import { KeepSession } from './KeepSession.tsx';
@@ -40,6 +41,7 @@ export function Shell() {
       <TopBar />
       <OfflineBanner />
       <NewRelease />
+      <StoppedStrip />
       <LiveSeason />
       <KeepSession />
       <ShownHere slug={brewery ?? ''} />

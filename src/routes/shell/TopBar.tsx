@@ -1,6 +1,7 @@
 import clsx from 'clsx';
 import { Link, NavLink } from 'react-router-dom';
 import { useBrewery } from '../../app/useBrewery.ts';
+import { OutboxMark } from '../../outbox/OutboxMark.tsx';
 import { Wordmark } from '../../components/ui/Wordmark.tsx';
 import { AccountMenu } from './AccountMenu.tsx';
 import { BreweryMenu } from './BreweryMenu.tsx';
@@ -36,6 +37,7 @@ export function TopBar() {
       </nav>
       <div className="ml-auto flex min-w-0 items-center gap-3.5 text-small text-on-bar2">
         <BreweryMenu />
+        <OutboxMark />
         <LiveMark />
         <Members />
         <AccountMenu />

@@ -1,0 +1,39 @@
+import { Upload } from 'lucide-react';
+import { useState } from 'react';
+import { lazyPart } from '../app/lazyPart.tsx';
+import { useOutbox, useSending } from './useOutbox.ts';
+
+const OutboxDialog = lazyPart(async () => (await import('./OutboxDialog.tsx')).OutboxDialog);
+
+/** How much waits to be sent, at the top of every page; nothing where nothing waits. */
+export function OutboxMark() {
+  useSending();
+  const entries = useOutbox();
+  const [isOpen, setOpen] = useState(false);
+  const count = entries.length;
+  const isStopped = Boolean(entries[0]?.refusal);
+  const words = isStopped ? 'not taken' : 'waiting';
+  return (
+    <>
+      {count > 0 && (
+        <button
+          type="button"
+          onClick={() => setOpen(true)}
+          className="flex min-h-8 items-center gap-1.5 rounded-full border-[1.5px] border-on-bar px-2.5 font-semibold whitespace-nowrap text-on-bar max-tablet:min-h-11"
+        >
+          <Upload size={16} aria-hidden />
+          {isStopped ? `1 ${words}` : `${count} ${words}`}
+        </button>
+      )}
+      <span aria-live="polite" className="sr-only">
+        {count > 0 && spoken(count, isStopped)}
+      </span>
+      {isOpen && <OutboxDialog open onClose={() => setOpen(false)} />}
+    </>
+  );
+}
+
+function spoken(count: number, isStopped: boolean): string {
+  if (isStopped) return 'Something that you wrote was not taken by the server. Nothing is lost.';
+  return count === 1 ? 'One entry waits to be sent.' : `${count} entries wait to be sent.`;
+}
