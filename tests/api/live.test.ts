@@ -257,6 +257,50 @@ describe('the end', () => {
     expect((await leaver.get(api.seasonEvents(season.slug, seasonId))).status).toBe(404);
   });
 
+  /** Somebody who watches from two browsers, at two processes. */
+  async function twice() {
+    const there = await joined(season, 'brewer');
+    const { id, email } = await good<Person>(there.get(api.session));
+    const again = new Visitor(other.url);
+    await good(again.post(api.session, { email, password: PASSWORD }));
+    const streams = [await watch(there), await watch(again)] as const;
+    return { there, id, streams };
+  }
+
+  it.each([
+    [
+      'a password that was changed elsewhere',
+      (by: Visitor) =>
+        by.ask('PUT', api.accountPassword, {
+          body: { password: PASSWORD, newPassword: 'another long sentence' },
+        }),
+    ],
+    ['a sign-out from elsewhere', (by: Visitor) => by.ask('DELETE', api.signIns)],
+  ])('comes at once with %s, but not here', async (_, act) => {
+    const { there, streams } = await twice();
+    const [here, elsewhere] = streams;
+    await good(act(there));
+    expect(await elsewhere.heard('ended', undefined, 1_000)).toEqual({ why: 'signed-out' });
+    await elsewhere.ended();
+    expect([here.isEnded, here.all('ended')]).toEqual([false, []]);
+  });
+
+  it('comes at once to somebody who is removed, wherever they watch', async () => {
+    const { id, streams } = await twice();
+    const version = 1;
+    await good(season.head.ask('DELETE', api.member(season.slug, id), { version }));
+    for (const each of streams) {
+      expect(await each.heard('ended', undefined, 1_000)).toEqual({ why: 'not-a-member' });
+      await each.ended();
+    }
+  });
+
+  it('comes at once with a closed account', async () => {
+    const { there, streams } = await twice();
+    await good(there.post(api.accountClosing, { password: PASSWORD, losing: [] }));
+    for (const each of streams) await each.heard('ended', undefined, 1_000);
+  });
+
   it('is not reached by somebody else’s season', async () => {
     const { visitor, slug } = await newcomer(one.url);
     expect((await visitor.get(api.seasonEvents(slug, seasonId))).status).toBe(404);

@@ -18,6 +18,8 @@ beforeAll(async () => {
     limits: {
       signInByAccountAndAddress: many,
       signInByAddress: many,
+      passwordByPersonAndAddress: many,
+      breweriesByPerson: many,
       signUpByAddress: many,
       joinByAddress: many,
       sharedByAddress: many,
@@ -36,6 +38,8 @@ beforeAll(async () => {
     'join-links': batch,
     'share-links': batch,
     guests: batch,
+    members: batch,
+    instruments: batch,
   };
 });
 afterAll(() => server.close());
@@ -84,9 +88,10 @@ function address({ path }: Operation): string {
   const resource = /\{brewery\}\/([a-z-]+)\/\{id\}/.exec(path)?.[1] ?? '';
   return path
     .replace('{brewery}', season.slug)
-    .replace('{id}', ids[resource] ?? '')
+    .replace('{id}', ids[resource] ?? season.chainA)
+    .replace('{mark}', 'no-such-mark')
     .replace('{season}', ids.seasons ?? '')
-    .replace('{commentId}', ids[resource] ?? '')
+    .replace(/\{[a-z]+Id\}/, ids[resource] ?? '')
     .replace('{token}', 'no-such-token');
 }
 

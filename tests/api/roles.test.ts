@@ -36,6 +36,10 @@ const MAY: Record<string, Who[]> = {
   watchSeason: ALL,
   readBrewery: ALL,
   listMembers: ALL,
+  changeRole: HEAD,
+  removeMember: HEAD,
+  handOver: HEAD,
+  leaveBrewery: ALL,
   editBrewery: HEAD,
   listJoinLinks: HEAD,
   makeJoinLink: HEAD,
@@ -70,6 +74,21 @@ const MAY: Record<string, Who[]> = {
   deleteBatch: BREWERS,
   setStage: BREWERS,
   editLink: WITH_GUEST_BREWER,
+  readBatchRecord: ALL,
+  addReading: BREWERS,
+  editReading: BREWERS,
+  deleteReading: BREWERS,
+  signCakeCheck: BREWERS,
+  withdrawCakeCheck: BREWERS,
+  addBatchNote: BREWERS,
+  editBatchNote: BREWERS,
+  deleteBatchNote: BREWERS,
+  addBatchEvent: BREWERS,
+  editBatchEvent: BREWERS,
+  deleteBatchEvent: BREWERS,
+  listInstruments: ALL,
+  addInstrument: BREWERS,
+  editInstrument: BREWERS,
   readPour: ALL,
   openPour: BREWERS,
   stepPour: BREWERS,
@@ -99,6 +118,16 @@ const MAY: Record<string, Who[]> = {
 const SIGNED_IN: Record<string, number> = {
   whoIsSignedIn: 200,
   editAccount: 428,
+  changeEmail: 428,
+  changePassword: 422,
+  listSignIns: 200,
+  endSignIn: 404,
+  endOtherSignIns: 204,
+  readClosing: 200,
+  takeDataAlong: 200,
+  closeAccount: 422,
+  makeBrewery: 422,
+  leaveGuestShelf: 404,
   checkChain: 422,
   checkPour: 422,
   acceptGuestInvitation: 422,
@@ -158,10 +187,20 @@ beforeAll(async () => {
     batches: batch,
     'join-links': link.id,
     'share-links': shared.id,
+    instruments: await anInstrument(),
     guests: (await invited(season, season.chainA)).id,
+    members: season.person.id,
   };
 });
 afterAll(() => server.close());
+
+async function anInstrument(): Promise<string> {
+  const body = { name: 'Glass', kind: 'hydrometer', correction: 0, calibratedC: 20 };
+  const id = randomUUID();
+  const made = { id, ...body, notes: '', typed: {} };
+  await good(season.head.post(api.instruments(season.slug), made));
+  return id;
+}
 
 const operations = routes.map(({ operation }) => operation);
 const called = (name: string) => {
@@ -176,9 +215,10 @@ function ask(visitor: Visitor, name: string) {
   const resource = /:brewery\/([a-z-]+)\/:id/.exec(path)?.[1] ?? '';
   const address = path
     .replace(':brewery', season.slug)
-    .replace(':id', ids[resource] ?? '')
+    .replace(':id', ids[resource] ?? randomUUID())
     .replace(':season', ids.seasons ?? '')
-    .replace(':commentId', randomUUID())
+    .replace(/:[a-z]+Id/, randomUUID())
+    .replace(':mark', 'made-up')
     .replace(':token', name === 'readSharedChain' ? token : 'made-up');
   return visitor.ask(method, address, body ? { body: {} } : {});
 }

@@ -64,8 +64,10 @@ async function belongings(db: Db | Tx, personId: string): Promise<Belonging[]> {
 }
 
 async function losses(db: Db | Tx, ids: readonly string[]): Promise<BreweryLoss[]> {
+  // Written out with its table: inside the counted ones a bare id would be theirs.
+  const own = sql`"brewery"."id"`;
   const count = (what: string) =>
-    sql<number>`(select count(*)::int from ${sql.raw(what)} where brewery_id = ${brewery.id})`;
+    sql<number>`(select count(*)::int from ${sql.identifier(what)} where brewery_id = ${own})`;
   if (ids.length === 0) return [];
   return db
     .select({
@@ -77,8 +79,8 @@ async function losses(db: Db | Tx, ids: readonly string[]): Promise<BreweryLoss[
       yeasts: count('yeast'),
       vessels: count('vessel'),
       comments: count('comment'),
-      shared: sql<number>`(select count(*)::int from share_link where brewery_id = ${brewery.id} and withdrawn_at is null)
-        + (select count(*)::int from chain_guest where brewery_id = ${brewery.id} and withdrawn_at is null and joined_at is not null)`,
+      shared: sql<number>`(select count(*)::int from share_link where brewery_id = ${own} and withdrawn_at is null)
+        + (select count(*)::int from chain_guest where brewery_id = ${own} and withdrawn_at is null and joined_at is not null)`,
     })
     .from(brewery)
     .where(inArray(brewery.id, [...ids]))
