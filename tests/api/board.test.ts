@@ -1,7 +1,9 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { board as contract } from '#shared/api/board.ts';
 import { judgeBoard } from '#shared/chain/judgeBoard.ts';
-import { api } from '#shared/api/urls.ts';
+import type { ListedSeason } from '#shared/api/brewery.ts';
+import type { Talk } from '#shared/api/comment.ts';
+import { api, placeOf } from '#shared/api/urls.ts';
 import { dayIn } from '../../server/today.ts';
 import { DEMO_PASSWORD, DEMO_PEOPLE } from '../../server/db/demo/people.ts';
 import { firstBrewDay, seedDemo } from '../../server/db/seed.ts';
@@ -104,6 +106,32 @@ describe('the demo', () => {
     expect(conflicts).toEqual([]);
     const stages = new Set(board.batches.map(({ stage }) => stage));
     expect(stages).toEqual(new Set(['racked', 'fermenting', 'pencilled']));
+  });
+
+  it('has a season before it in the archive, brewed to its end, with no link on Hold', async () => {
+    const mo = await signedIn('mo@saltmarsh.example');
+    const seasons = await good<ListedSeason[]>(mo.get(api.seasons('saltmarsh-brewers')));
+    expect(seasons).toMatchObject([
+      { name: 'Spring season', isCurrent: true, batches: 12 },
+      { name: 'Winter season', isArchived: true, chains: 2, batches: 5 },
+    ]);
+    const past = await boardOf(mo, placeOf('saltmarsh-brewers', seasons[1]?.id));
+    expect(new Set(past.batches.map(({ stage }) => stage))).toEqual(new Set(['racked']));
+    expect(judgeBoard(contract.parse(past))).toMatchObject({ conflicts: [], totals: { hold: 0 } });
+  });
+
+  it('has people who talk about its chains, and of a link about what it says', async () => {
+    const mo = await signedIn('mo@saltmarsh.example');
+    const { chains } = await boardOf(mo, 'saltmarsh-brewers');
+    const talks = await Promise.all(
+      chains.map(({ id }) => good<Talk>(mo.get(api.comments('saltmarsh-brewers', id)))),
+    );
+    expect(talks.map(({ comments }) => comments.length)).toEqual([4, 1, 1]);
+    const said = talks[0]?.comments.filter(({ about }) => about.kind === 'link');
+    expect(said).toMatchObject([
+      { by: { name: 'Mo' }, said: { verdict: 'hold' } },
+      { by: { name: 'Tamsin' }, said: { verdict: 'hold' } },
+    ]);
   });
 
   it('is made once', async () => {

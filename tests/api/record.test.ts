@@ -1,3 +1,4 @@
+import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { recordPage, type RecordPage } from '#shared/api/record.ts';
 import { api } from '#shared/api/urls.ts';
@@ -204,4 +205,65 @@ it('pulls the dates of a chain along as one change, with one undo', async () => 
   expect(undo?.what).toBe('Pulled 2 dates on Shelf A along');
   await good(head.post(api.undo(slug), { changeId: undo?.id }));
   expect(await days()).toEqual(before);
+});
+
+it('tells that something was said and about what, and keeps the words out', async () => {
+  const { head, slug, chainA } = season;
+  const talk = (kind: 'chain' | 'link' | 'batch', batchId?: string) => ({
+    id: randomUUID(),
+    about: kind === 'chain' ? { kind } : { kind, batchId },
+    text: 'Between us',
+  });
+  const chain = talk('chain');
+  await good(head.post(api.comments(slug, chainA), chain));
+  await good(head.post(api.comments(slug, chainA), chain));
+  await good(head.post(api.comments(slug, chainA), talk('link', b)));
+  const about = talk('batch', a);
+  await good(head.post(api.comments(slug, chainA), about));
+  const single = api.comment(slug, chainA, about.id);
+  await good(head.patch(single, { text: 'Better so' }, 1));
+  await good(head.ask('DELETE', single, { version: 2 }));
+  await good(head.patch(single, { removed: false }, 3));
+  expect((await said()).slice(0, 6)).toEqual([
+    'Put a removed comment about Avocet back',
+    'Removed a comment about Avocet',
+    'Changed a comment about Avocet',
+    'Said something about Avocet',
+    'Said something about the link to Bittern',
+    'Said something about the shelf Shelf A',
+  ]);
+  expect(JSON.stringify(await read())).not.toMatch(/Between us|Better so/);
+  const rows = await server.pool.query('select before, after from change');
+  expect(JSON.stringify(rows.rows)).not.toMatch(/Between us|Better so/);
+});
+
+it('does not offer to undo what was said', async () => {
+  const { head, slug, chainA } = season;
+  const before = (await boardOf(head, slug)).undo;
+  const body = { id: randomUUID(), about: { kind: 'chain' }, text: 'Hello' };
+  await good(head.post(api.comments(slug, chainA), body));
+  expect((await boardOf(head, slug)).undo).toEqual(before);
+});
+
+it('tells what changed of the brewery, and takes it back', async () => {
+  const { head, slug } = season;
+  const { version } = (await boardOf(head, slug)).brewery;
+  const units = { system: 'us', gravity: 'plato', colour: 'srm', temperature: 'c' };
+  await good(head.patch(api.brewery(slug), { currency: 'SEK', units }, version));
+  await good(head.patch(api.brewery(slug), { name: 'Creek Brewers' }, version + 1));
+  const [renamed, changed] = (await read()).changes;
+  expect(renamed?.what).toBe('Renamed the brewery from Test brewery to Creek Brewers');
+  expect(changed?.facts.map(({ label, to }) => [label, to])).toEqual([
+    ['currency', 'SEK'],
+    ['unit of volumes', 'US gallons'],
+    ['unit of gravities', '°P'],
+  ]);
+  const { undo } = await boardOf(head, slug);
+  await good(head.post(api.undo(slug), { changeId: undo?.id }));
+  expect((await boardOf(head, slug)).brewery).toMatchObject({
+    name: 'Test brewery',
+    currency: 'SEK',
+  });
+  const rules = await good<{ history: unknown[] }>(head.get(api.houseRules(slug)));
+  expect(rules.history).toEqual([]);
 });

@@ -1,5 +1,6 @@
 import type { BatchCreate, Stage } from '#shared/api/batch.ts';
 import type { ChainStart } from '#shared/api/chain.ts';
+import { plan } from './plan.ts';
 import type { VesselKey, YeastKey } from './stock.ts';
 
 /** A batch of the demo; days count from the season's first brew day. */
@@ -7,6 +8,8 @@ export interface DemoBatch {
   plan: Omit<BatchCreate, 'id' | 'brewOn' | 'wantedOn' | 'vesselId' | 'yeastId' | 'typed'>;
   brewDay: number | null;
   stage: Exclude<Stage, 'scrapped'>;
+  /** What became of its cake, where that was not poured. */
+  dumped?: true;
   read?: { volumeL?: number; og?: number; fg?: number; rackDay?: number };
 }
 
@@ -16,29 +19,6 @@ export interface DemoChain {
   vessel: VesselKey;
   start: Exclude<ChainStart, { kind: 'cake' }>;
   batches: readonly DemoBatch[];
-}
-
-type Figures = [og: number, fg: number, srm: number, ibu: number, fermentC: number, days: number];
-
-function plan(name: string, style: string, figures: Figures): DemoBatch['plan'] {
-  const [og, fg, srm, ibu, fermentC, daysUnderBeer] = figures;
-  return {
-    name,
-    style,
-    volumeL: 23,
-    og,
-    fg,
-    srm,
-    ibu,
-    fermentC,
-    daysUnderBeer,
-    dryHops: [],
-    additions: [],
-    allergens: ['gluten'],
-    cultures: [],
-    trub: 'some',
-    notes: '',
-  };
 }
 
 const hopped = (of: DemoBatch['plan'], gramsPerLitre: number): DemoBatch['plan'] => ({

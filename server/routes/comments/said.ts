@@ -10,8 +10,8 @@ import type { TalkedChain } from './find.ts';
 
 interface Speaking {
   tx: Tx;
-  member: Member;
-  chain: TalkedChain;
+  member: { brewery: Pick<Member['brewery'], 'id' | 'timeZone'> };
+  chain: Pick<TalkedChain, 'id' | 'seasonId'>;
   now: Date;
 }
 
