@@ -25,6 +25,8 @@ export const canEditSeason = isHead;
 export const canAcceptHolds = isHead;
 export const canInvite = isHead;
 export const canManagePeople = isHead;
+/** Readings, notes and cake checks of a batch. */
+export const canWriteRecords = canMoveAcross;
 /** Tasters too: what they taste is what the talk is about. */
 export const canTalk = canRead;
 /** Those of others; one's own anybody may. */

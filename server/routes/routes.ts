@@ -3,6 +3,7 @@ import { closingRoutes } from './account/closingRouter.ts';
 import { accountRoutes } from './account/router.ts';
 import { secretRoutes } from './account/secretsRouter.ts';
 import { batchRoutes } from './batches/router.ts';
+import { batchRecordRoutes } from './batch-record/router.ts';
 import { boardRoutes } from './board/router.ts';
 import { breweryRoutes } from './brewery/router.ts';
 import { chainRoutes } from './chains/router.ts';
@@ -46,6 +47,7 @@ const resources: readonly Route[] = [
   ...chainRoutes,
   ...commentRoutes,
   ...batchRoutes,
+  ...batchRecordRoutes,
   ...pourRoutes,
   ...moveRoutes,
   ...liveRoutes,

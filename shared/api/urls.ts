@@ -38,6 +38,8 @@ export const api = {
   joinLinks: (slug: string) => at(slug, '/join-links'),
   joinLink: (slug: string, id: string) => at(slug, `/join-links/${id}`),
   board: (slug: string) => at(slug, '/board'),
+  /** What the board does not tell of what is to be done today. */
+  today: (slug: string) => at(slug, '/today'),
   seasons: (slug: string) => at(slug, '/seasons'),
   seasonArchive: (slug: string, id: string) => `${b(slug)}/seasons/${id}/archive`,
   currentSeason: (slug: string, id: string) => `${b(slug)}/seasons/${id}/current`,
@@ -74,6 +76,19 @@ export const api = {
   batches: (slug: string) => at(slug, '/batches'),
   batch: (slug: string, id: string) => at(slug, `/batches/${id}`),
   batchStage: (slug: string, id: string) => at(slug, `/batches/${id}/stage`),
+  /** Readings, notes, events and the cake check of a batch. */
+  batchRecord: (slug: string, id: string) => `${b(slug)}/batches/${id}/record`,
+  readings: (slug: string, id: string) => `${b(slug)}/batches/${id}/readings`,
+  reading: (slug: string, id: string, readingId: string) =>
+    `${b(slug)}/batches/${id}/readings/${readingId}`,
+  notes: (slug: string, id: string) => `${b(slug)}/batches/${id}/notes`,
+  note: (slug: string, id: string, noteId: string) => `${b(slug)}/batches/${id}/notes/${noteId}`,
+  events: (slug: string, id: string) => `${b(slug)}/batches/${id}/events`,
+  event: (slug: string, id: string, eventId: string) =>
+    `${b(slug)}/batches/${id}/events/${eventId}`,
+  cakeCheck: (slug: string, id: string) => `${b(slug)}/batches/${id}/cake-check`,
+  instruments: (slug: string) => `${b(slug)}/instruments`,
+  instrument: (slug: string, id: string) => `${b(slug)}/instruments/${id}`,
   /** The link from the batch before to this one. */
   link: (slug: string, id: string) => at(slug, `/batches/${id}/link`),
   acceptance: (slug: string, id: string) => at(slug, `/batches/${id}/link/acceptance`),

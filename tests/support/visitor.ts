@@ -55,6 +55,10 @@ export class Visitor {
     return this.ask('POST', path, { body, version });
   }
 
+  put(path: string, body: unknown, version?: number) {
+    return this.ask('PUT', path, { body, version });
+  }
+
   patch(path: string, body: unknown, version?: number) {
     return this.ask('PATCH', path, { body, version });
   }

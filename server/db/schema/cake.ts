@@ -1,7 +1,7 @@
 import { sql } from 'drizzle-orm';
 import { check, date, foreignKey, index, integer, jsonb, pgTable, text, uuid } from 'drizzle-orm/pg-core';
 import type { Cake, CakeState } from '#shared/api/batch.ts';
-import type { CellCount } from '#shared/api/cakeCheck.ts';
+import type { CakeCheckWrite, CellCount } from '#shared/api/cakeCheck.ts';
 import { batch } from './chain.ts';
 import { brewery } from './brewery.ts';
 import { id, instant, madeAt, note, quantity, typedTexts, version } from './columns.ts';
@@ -57,15 +57,15 @@ export const cakeCheck = pgTable(
     version: version(),
     tasted: text().$type<'clean' | 'off'>().notNull(),
     /** The trade's words for what was off. */
-    faults: text().array().notNull().default([]),
+    faults: text().array().$type<CakeCheckWrite['faults']>().notNull().default([]),
     /** Of the cake: by volume, or by mass, or by weighing the vessel with it and without. */
     volumeL: quantity(),
     massKg: quantity(),
     fullKg: quantity(),
     tareKg: quantity(),
-    layers: text(),
-    colour: text(),
-    smells: text().array().notNull().default([]),
+    layers: text().$type<NonNullable<CakeCheckWrite['layers']>>(),
+    colour: text().$type<NonNullable<CakeCheckWrite['colour']>>(),
+    smells: text().array().$type<CakeCheckWrite['smells']>().notNull().default([]),
     /** Under the microscope, as it was counted. */
     count: jsonb().$type<CellCount>(),
     judged: text().$type<'fit' | 'with-care' | 'unfit'>().notNull(),
