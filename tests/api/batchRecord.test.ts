@@ -143,8 +143,8 @@ describe('readings of a batch', () => {
     const undo = async () =>
       season.head.post(api.undo(season.slug), { changeId: (await board()).undo?.id });
     expect((await undo()).status).toBe(200);
-    const added = await undo();
-    expect([added.status, added.body]).toMatchObject([409, { detail: 'Spare has readings since' }]);
+    const second = await undo();
+    expect([second.status, second.body]).toMatchObject([409, { detail: 'Spare has readings since' }]);
     expect((await recordOf(spare)).readings).toHaveLength(1);
   });
 
