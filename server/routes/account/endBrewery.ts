@@ -5,6 +5,9 @@ import { chainGuest } from '../../db/schema/sharing.ts';
 import { tell } from '../../live/note.ts';
 import { tellBrewery } from '../guests/accept.ts';
 
+/** What the brewery does not take along by itself, or is held by what goes later: in this order. */
+const FIRST = ['change', 'jar', 'season', 'yeast_line'];
+
 /**
  * Deletes a brewery and all that belongs to it, the record too: that is kept for those who work
  * together, and nobody is left. The record's own guard lets it pass for this brewery and
@@ -22,7 +25,10 @@ export async function endBrewery(tx: Tx, breweryId: string): Promise<void> {
       ),
     );
   await tx.execute(sql`select set_config('barmkin.ending_brewery', ${breweryId}, true)`);
-  await tx.execute(sql`delete from change where brewery_id = ${breweryId}`);
+  for (const table of FIRST)
+    await tx.execute(
+      sql`delete from ${sql.identifier(table)} where brewery_id = ${breweryId}::uuid`,
+    );
   await tx.delete(brewery).where(eq(brewery.id, breweryId));
   const boards = new Set(guests.flatMap(({ board }) => board ?? []));
   for (const board of [...boards].toSorted()) await tellBrewery(tx, board);
