@@ -24,6 +24,7 @@ import { pourRoutes } from './pour/router.ts';
 import { openApiRoute } from './system/openapi.ts';
 import { shareRoutes } from './share/router.ts';
 import { systemRoutes } from './system/router.ts';
+import { todayRoutes } from './today/router.ts';
 import { vesselRoutes } from './vessels/router.ts';
 import { yeastRoutes } from './yeasts/router.ts';
 
@@ -39,6 +40,7 @@ const resources: readonly Route[] = [
   ...peopleRoutes,
   ...membershipRoutes,
   ...boardRoutes,
+  ...todayRoutes,
   ...seasonRoutes,
   ...recordRoutes,
   ...houseRulesRoutes,

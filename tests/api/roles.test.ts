@@ -33,6 +33,7 @@ const WITH_GUEST_BREWER: Who[] = [...BREWERS, 'guest brewer'];
 /** Who may do what inside a brewery. Written out, so that a policy cannot change unseen. */
 const MAY: Record<string, Who[]> = {
   readBoard: WITH_GUESTS,
+  readToday: ALL,
   watchSeason: ALL,
   readBrewery: ALL,
   listMembers: ALL,
