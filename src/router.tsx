@@ -19,6 +19,10 @@ const ofBrewery = {
       lazy: () => lazyPage(async () => (await import('./routes/chain/ChainPage.tsx')).ChainPage),
     },
     {
+      path: 'pour/:laterBatchId',
+      lazy: () => lazyPage(async () => (await import('./routes/pour/PourPage.tsx')).PourPage),
+    },
+    {
       path: 'yeasts',
       lazy: () => lazyPage(async () => (await import('./routes/yeasts/YeastsPage.tsx')).YeastsPage),
     },
