@@ -1,8 +1,10 @@
 import type { Page } from '@playwright/test';
+import { api } from '#shared/api/urls.ts';
+import { addDays, formatDay } from '#shared/units/day.ts';
 import { expectAccessible } from './support/axe.ts';
 import { writeBrewery } from './support/brewery.ts';
 import { sessionCookies } from './support/server.ts';
-import { expect, test, type Brewing } from './support/test.ts';
+import { expect, test, watchErrors, type Brewing } from './support/test.ts';
 
 const PLAN = {
   shelves: [
@@ -165,7 +167,77 @@ test('a guest brewer moves and edits on their own board what belongs to another 
   await board.getByRole('button', { name: /^Withdraw: Orla Finch/ }).click();
   await board.getByRole('button', { name: 'End the access' }).click();
   await expect(board.getByRole('list', { name: 'Guests' })).toContainText('ended');
-  await page.reload();
   await expect(shelf).toHaveCount(0);
   await context.close();
+});
+
+test('a link is given another name and another end, and its address stays', async ({
+  board,
+  brewery,
+}) => {
+  await brewery.write(PLAN);
+  const address = await makeLink(board, brewery);
+  const dialog = board.getByRole('dialog', { name: 'Share Harbour ale' });
+  await dialog.getByRole('button', { name: 'Edit For the festival' }).click();
+  const form = board.getByRole('dialog', { name: 'Edit the link For the festival' });
+  await form.getByLabel('Whom or what it is for').fill('For the guild');
+  const end = await form.getByLabel('Works until').inputValue();
+  await form.getByLabel('Works until').fill('');
+  await form.getByRole('button', { name: 'Save' }).click();
+  await expect(form.locator('[aria-invalid="true"]')).toHaveCount(1);
+  await expectAccessible(board);
+  await form.getByLabel('Works until').fill(addDays(end, 30));
+  await form.getByLabel('Show what the yeast costs').check();
+  await form.getByRole('button', { name: 'Save' }).click();
+  await expect(
+    dialog.getByText(new RegExp(`works until ${formatDay(addDays(end, 30))}.* with prices`)),
+  ).toBeVisible();
+  await expect(dialog.getByText('For the guild')).toBeVisible();
+  await board.goto(address);
+  await expect(board.getByRole('heading', { level: 1 })).toContainText('Harbour ale');
+});
+
+test('a guest hears of a change at once, finds the chain from any page, and leaves it', async ({
+  board,
+  brewery,
+  browser,
+  db,
+  server,
+}) => {
+  const { chains } = await brewery.write(PLAN);
+  await board.goto(`/b/${brewery.slug}`);
+  const origin = { Origin: server.url };
+  const made = await board.request.post(api.guests(brewery.slug, chains['Harbour ale'] ?? ''), {
+    headers: origin,
+    data: { id: crypto.randomUUID(), role: 'taster' },
+  });
+  const { token } = (await made.json()) as { token: string };
+  const own = await writeBrewery(db, 'Estuary Ales');
+  const context = await browser.newContext({ baseURL: server.url });
+  const errors = watchErrors(context);
+  await context.addCookies(sessionCookies(server, own.members['head-brewer'].token));
+  const page = await context.newPage();
+  await context.request.post(api.guestInvitation(token), {
+    headers: origin,
+    data: { brewerySlug: own.slug },
+  });
+  await page.goto(`/b/${own.slug}/people`);
+  await page.getByRole('button', { name: /^Brewery: Estuary Ales/ }).click();
+  await page.getByRole('menuitem', { name: /^Harbour ale from Reedbed/ }).click();
+  const shelf = page.getByRole('region', { name: /^Harbour ale from Reedbed Brewing/ });
+  await expect(shelf).toBeFocused();
+  await expect(page.getByRole('banner').getByText('Live', { exact: true })).toBeVisible();
+
+  await board.getByRole('button', { name: 'Low Tide', exact: true }).click();
+  await board.getByLabel('Bitterness').fill('29');
+  await board.getByRole('button', { name: 'Save' }).click();
+  await expect(board.getByRole('list', { name: 'Batches on Harbour ale' })).toContainText('29 IBU');
+  await expect(shelf).toContainText('29 IBU', { timeout: 1_500 });
+
+  await shelf.getByRole('button', { name: 'Leave Harbour ale' }).click();
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Leave the chain' }).click();
+  await expect(shelf).toHaveCount(0);
+  await context.close();
+  expect(errors).toEqual([]);
 });
