@@ -15,6 +15,10 @@ const ofBrewery = {
       lazy: () => lazyPage(async () => (await import('./routes/board/BoardPage.tsx')).BoardPage),
     },
     {
+      path: 'today',
+      lazy: () => lazyPage(async () => (await import('./routes/today/TodayPage.tsx')).TodayPage),
+    },
+    {
       path: 'chains/:id',
       lazy: () => lazyPage(async () => (await import('./routes/chain/ChainPage.tsx')).ChainPage),
     },
@@ -117,6 +121,10 @@ export const router = createBrowserRouter([
           lazyPage(
             async () => (await import('./routes/breweries/BreweriesPage.tsx')).BreweriesPage,
           ),
+      },
+      {
+        path: 'start',
+        lazy: () => lazyPage(async () => (await import('./routes/today/ToStart.tsx')).ToStart),
       },
       {
         path: 'account',

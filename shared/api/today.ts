@@ -9,6 +9,8 @@ const at = z.iso.datetime();
  * board by `shared/today`.
  */
 export const todayFacts = z.strictObject({
+  /** The server's clock, by which a device measures its own. */
+  now: at,
   /** Leave to pour that was asked for and not answered. */
   overrides: z.array(
     z.strictObject({

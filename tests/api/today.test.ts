@@ -70,5 +70,13 @@ test('another brewery hears nothing of it', async () => {
   const other = await newcomer(server.url, 'Elsewhere');
   expect((await other.visitor.get(api.today(season.slug))).status).toBe(404);
   const own = await good<TodayFacts>(other.visitor.get(api.today(other.slug)));
-  expect(own).toEqual({ overrides: [], runs: [], unsigned: [], events: [], checked: [], jars: [] });
+  expect(own).toEqual({
+    now: clock.now().toISOString(),
+    overrides: [],
+    runs: [],
+    unsigned: [],
+    events: [],
+    checked: [],
+    jars: [],
+  });
 });

@@ -15,7 +15,7 @@ interface Where {
 }
 
 /** What waits in a season and does not stand on its board. */
-export async function readToday(db: Db, where: Where): Promise<TodayFacts> {
+export async function readToday(db: Db, where: Where): Promise<Omit<TodayFacts, 'now'>> {
   const [overrides, runs, unsigned, events, checked, jars] = await Promise.all([
     askedOverrides(db, where),
     openRuns(db, where),

@@ -16,8 +16,11 @@ export const todayRoutes = [
       status: 200,
     },
     canRead,
-    async ({ db }, { brewery, seasonId }) => ({
-      body: await readToday(db, { breweryId: brewery.id, seasonId }),
+    async ({ db, clock }, { brewery, seasonId }) => ({
+      body: {
+        now: clock.now().toISOString(),
+        ...(await readToday(db, { breweryId: brewery.id, seasonId })),
+      },
     }),
   ),
 ];

@@ -1,4 +1,5 @@
 import type { Person } from '#shared/api/people.ts';
+import { isPhone } from '../../app/isPhone.ts';
 import { lastBrewery } from '../../app/lastBrewery.ts';
 
 /**
@@ -11,6 +12,12 @@ export function homeOf(person: Person | null | undefined): string {
   const last = lastBrewery(person.id);
   const slug = last !== null && slugs.includes(last) ? last : slugs.length === 1 ? slugs[0] : null;
   return slug ? `/b/${slug}` : '/breweries';
+}
+
+/** Where one begins in it: on a phone with what is to be done today, else with the board. */
+export function firstPageOf(person: Person | null | undefined): string {
+  const home = homeOf(person);
+  return home.startsWith('/b/') && isPhone() ? `${home}/today` : home;
 }
 
 /** Only an address within this site is gone to after signing in. */

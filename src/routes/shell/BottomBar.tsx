@@ -1,5 +1,5 @@
 import clsx from 'clsx';
-import { Beaker, Ellipsis, Microscope } from 'lucide-react';
+import { Beaker, CalendarCheck, Ellipsis, Microscope } from 'lucide-react';
 import type { ReactNode } from 'react';
 import { NavLink, useLocation } from 'react-router-dom';
 import { useBrewery } from '../../app/useBrewery.ts';
@@ -17,6 +17,7 @@ export function BottomBar() {
       aria-label="Pages"
       className="fixed inset-x-0 bottom-0 z-30 flex border-t border-line bg-paper px-2 pt-1 pb-[max(.5rem,env(safe-area-inset-bottom))] tablet:hidden print:hidden"
     >
+      <Tab to={brewery.path('today')} icon={<CalendarCheck size={22} aria-hidden />} name="Today" />
       <Tab to={brewery.path()} end icon={<ShelfIcon />} name="Board" />
       <Tab to={brewery.path('yeasts')} icon={<Microscope size={22} aria-hidden />} name="Yeasts" />
       <Tab to={brewery.path('vessels')} icon={<Beaker size={22} aria-hidden />} name="Vessels" />

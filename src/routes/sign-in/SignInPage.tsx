@@ -6,7 +6,7 @@ import { TextLink } from '../../components/ui/TextLink.tsx';
 import { EmailField } from '../public/EntryField.tsx';
 import { EntryForm } from '../public/EntryForm.tsx';
 import { PasswordField } from '../public/PasswordField.tsx';
-import { homeOf, safeNext } from '../public/home.ts';
+import { firstPageOf, safeNext } from '../public/home.ts';
 import { PublicForm } from '../public/PublicForm.tsx';
 
 export function SignInPage() {
@@ -14,7 +14,7 @@ export function SignInPage() {
   const [params] = useSearchParams();
   const next = safeNext(params.get('next'));
   const { data: me } = useSession();
-  if (me) return <Navigate to={next ?? homeOf(me)} replace />;
+  if (me) return <Navigate to={next ?? firstPageOf(me)} replace />;
   return (
     <PublicForm title="Sign in" lead="to your brewery's shelf.">
       <SignInForm next={next} />
@@ -37,7 +37,7 @@ function SignInForm({ next }: { next: string | null }) {
       busyAction="Signing in"
       onSubmit={async (values) => {
         const who = await signIn.mutateAsync(values);
-        await navigate(next ?? homeOf(who), { replace: true });
+        await navigate(next ?? firstPageOf(who), { replace: true });
       }}
     >
       <EmailField />

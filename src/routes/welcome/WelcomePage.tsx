@@ -1,7 +1,8 @@
 import { useSession } from '../../api/session.ts';
+import { isPhone } from '../../app/isPhone.ts';
 import { useTitle } from '../../app/useTitle.ts';
 import { LinkButton } from '../../components/ui/LinkButton.tsx';
-import { homeOf } from '../public/home.ts';
+import { firstPageOf } from '../public/home.ts';
 import { PublicHeader } from '../public/PublicHeader.tsx';
 import { ExampleColumn } from './ExampleColumn.tsx';
 import { ExampleHead } from './ExampleHead.tsx';
@@ -52,8 +53,8 @@ function Actions() {
   return (
     <div className="mt-4 flex flex-wrap gap-3 max-tablet:*:flex-1">
       {me ? (
-        <LinkButton look="first" size="large" to={homeOf(me)}>
-          To the board
+        <LinkButton look="first" size="large" to={firstPageOf(me)}>
+          {isPhone() ? 'To today’s work' : 'To the board'}
         </LinkButton>
       ) : (
         <>

@@ -7,6 +7,7 @@ import { dayIn } from '#shared/units/dayIn.ts';
 import { boardOf, idOf, makeBatch, makeChain } from '../../support/boards.ts';
 
 const NONE: TodayFacts = {
+  now: '2027-03-20T12:00:00.000Z',
   overrides: [],
   runs: [],
   unsigned: [],

@@ -1,4 +1,5 @@
 import { useCallback, useSyncExternalStore } from 'react';
+import { PHONE } from '../../../app/isPhone.ts';
 
 export function useMedia(query: string): boolean {
   const subscribe = useCallback(
@@ -13,6 +14,6 @@ export function useMedia(query: string): boolean {
 }
 
 /** One chain down the page instead of shelves side by side. */
-export const usePhone = () => useMedia('(max-width: 39.99rem)');
+export const usePhone = () => useMedia(PHONE);
 /** Room for a panel beside the shelves. */
 export const useWide = () => useMedia('(min-width: 68.75rem)');
