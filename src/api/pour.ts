@@ -1,5 +1,5 @@
 import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
-import { useEffect, useRef } from 'react';
+import { useEffect, useMemo, useRef } from 'react';
 import {
   pourState,
   type OverrideAnswer,
@@ -10,9 +10,16 @@ import {
   type WortReadingRequest,
 } from '#shared/api/pour.ts';
 import { api } from '#shared/api/urls.ts';
+import { newId } from '../app/newId.ts';
+import { KEPT } from '../kept/meta.ts';
+import { queueOrSend } from '../outbox/queueOrSend.ts';
+import { useOutbox } from '../outbox/useOutbox.ts';
 import { boardQuery } from './board.ts';
 import { request } from './client.ts';
+import { ofPour, withWaiting } from './pourWaiting.ts';
 import { serverClock } from './serverClock.ts';
+import { useSession } from './session.ts';
+import { todayQuery } from './today.ts';
 
 /** The newest pour run of a batch. The only owner of its key. */
 export const pourQuery = (slug: string, batchId: string) =>
@@ -20,10 +27,19 @@ export const pourQuery = (slug: string, batchId: string) =>
     queryKey: ['pour', slug, batchId] as const,
     queryFn: ({ signal }) =>
       serverClock.measured(() => request(pourState, 'GET', api.pour(slug, batchId), { signal })),
+    meta: KEPT,
   });
 
-/** The run, read anew whenever anything on the board changed: each of its commands raises the revision. */
-export function usePour(slug: string, batchId: string, revision: number) {
+/**
+ * The run with what still waits to be sent laid over it, read anew whenever anything on the board
+ * changed: each of its commands raises the revision.
+ */
+export function usePour(
+  slug: string,
+  batchId: string,
+  revision: number,
+  cakeBatchId: string | null,
+) {
   const client = useQueryClient();
   const known = useRef(revision);
   useEffect(() => {
@@ -31,7 +47,18 @@ export function usePour(slug: string, batchId: string, revision: number) {
     known.current = revision;
     void client.invalidateQueries({ queryKey: pourQuery(slug, batchId).queryKey });
   }, [client, slug, batchId, revision]);
-  return useQuery(pourQuery(slug, batchId));
+  const { data, error } = useQuery(pourQuery(slug, batchId));
+  const entries = useOutbox();
+  const me = useSession().data;
+  const isWaiting = ofPour(entries, { slug, batchId }).length > 0;
+  const shown = useMemo(() => {
+    if (!me || !isWaiting) return data;
+    const by = { personId: me.id, name: me.name };
+    // What was begun here without a connection has no answer to stand on yet.
+    const state = data ?? { run: null, now: new Date(serverClock.now()).toISOString() };
+    return withWaiting(state, entries, { slug, batchId, cakeBatchId, me: by });
+  }, [data, entries, me, isWaiting, slug, batchId, cakeBatchId]);
+  return { data: shown, error, isWaiting };
 }
 
 /** Everything that can be done with a run. Each is named, so that it can wait for a connection. */
@@ -60,14 +87,70 @@ const URLS: Record<PourCommand['kind'], (slug: string, batchId: string) => strin
   leave: api.pourLeaving,
 };
 
-/** Sends a command; its answer is the run as it stands then. */
+/** What somebody does at the vessel: it is kept where there is no connection. Others are asked of people. */
+const KEEPS: ReadonlySet<PourCommand['kind']> = new Set([
+  'open',
+  'step',
+  'read',
+  'withdraw',
+  'pour',
+  'leave',
+]);
+
+/** What a command is called while it waits. */
+function wordsOf(command: PourCommand, name: string): string {
+  switch (command.kind) {
+    case 'open':
+      return `Pour of ${name}: begun`;
+    case 'step':
+      return `Pour of ${name}: ${STEPS[command.body.step]}`;
+    case 'read':
+      return `Pour of ${name}: wort at ${command.body.typed.c ?? `${command.body.c} °C`}`;
+    case 'withdraw':
+      return `Pour of ${name}: a reading taken back`;
+    case 'pour':
+      return `${name} poured`;
+    default:
+      return `Pour of ${name}: left`;
+  }
+}
+
+const STEPS: Record<PourStepRequest['step'], string> = {
+  racked: 'the beer before it',
+  cake: 'the cake check',
+  keep: 'how much is kept',
+  clean: 'cleaning',
+  wort: 'the wort',
+  after: 'air and lid',
+};
+
+/** Sends a command, or keeps it; its answer is the run as it stands then. */
 export function usePourCommand(slug: string, batchId: string) {
   const client = useQueryClient();
   const { queryKey } = pourQuery(slug, batchId);
   return useMutation({
-    mutationFn: ({ kind, body }: PourCommand) =>
-      serverClock.measured(() => request(pourState, 'POST', URLS[kind](slug, batchId), { body })),
-    onSuccess: (state: PourState) => client.setQueryData(queryKey, state),
+    mutationFn: async (command: PourCommand): Promise<PourState | null> => {
+      const { kind, body } = command;
+      const url = URLS[kind](slug, batchId);
+      if (!KEEPS.has(kind))
+        return serverClock.measured(() => request(pourState, 'POST', url, { body }));
+      const board = client.getQueryData(boardQuery(slug).queryKey);
+      const name = board?.batches.find(({ id }) => id === batchId)?.name ?? 'a batch';
+      const sent = await queueOrSend(
+        {
+          id: 'id' in body ? body.id : newId(),
+          method: 'POST',
+          url,
+          body,
+          what: wordsOf(command, name),
+          touches: [queryKey, boardQuery(slug).queryKey, todayQuery(slug).queryKey],
+          answers: queryKey,
+        },
+        pourState,
+      );
+      return sent.kind === 'sent' ? sent.answer : null;
+    },
+    onSuccess: (state: PourState | null) => state && client.setQueryData(queryKey, state),
     onSettled: (_state, error) =>
       Promise.all([
         client.invalidateQueries({ queryKey: boardQuery(slug).queryKey }),

@@ -9,8 +9,8 @@ export interface OutboxPorts {
   person(): string | null;
   /** Runs one sender at a time among all tabs of the browser. */
   alone(work: () => Promise<void>): Promise<void>;
-  /** The server took an entry: what it changed is read anew. */
-  taken(entry: Entry): void;
+  /** The server took an entry: what it changed is put in place, or read anew. */
+  taken(entry: Entry, answer: unknown): void;
   /** Whether there seems to be a connection. */
   isHopeful(): boolean;
   /** How long somebody is kept waiting for an answer: with wet hands, not long. */
@@ -47,18 +47,15 @@ export function createOutbox(ports: OutboxPorts) {
       const personId = ports.person();
       if (personId === null) return;
       await sendAll(personId, {
-        storage: {
-          read: storage.read,
-          change: async (how) => {
-            await change(how);
-            return known;
-          },
-        },
+        storage,
         send: ports.send,
-        settled: (entry, outcome) => {
+        settled: (entry, outcome, after) => {
           outcomes.set(entry.id, outcome);
-          if (outcome.kind === 'done' || !known.some(({ id }) => id === entry.id))
-            ports.taken(entry);
+          // Its answer stands in its place before it goes: nothing vanishes for a moment.
+          if (!after.some(({ id }) => id === entry.id))
+            ports.taken(entry, outcome.kind === 'done' ? outcome.answer : undefined);
+          show(after);
+          ports.tell();
         },
       });
     });

@@ -25,7 +25,8 @@ export const outbox = createOutbox({
   send: sendEntry,
   person: () => queryClient.getQueryData(sessionQuery.queryKey)?.id ?? null,
   alone,
-  taken: ({ touches }) => {
+  taken: ({ touches, answers }, answer) => {
+    if (answers && answer !== undefined) queryClient.setQueryData(answers, answer);
     for (const queryKey of touches) void queryClient.invalidateQueries({ queryKey });
   },
   isHopeful: isOnline,

@@ -9,6 +9,7 @@ import { problemFrom } from './sendEntry.ts';
 export interface Command extends Pick<Entry, 'id' | 'method' | 'url' | 'what' | 'touches'> {
   body?: unknown;
   ifMatch?: number;
+  answers?: Entry['answers'];
   /** Where to look at it again; left out: the page that one is on. */
   page?: string;
 }

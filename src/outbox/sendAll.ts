@@ -11,8 +11,8 @@ export interface SendPorts {
   storage: OutboxStorage;
   /** Never throws. */
   send(entry: Entry): Promise<Outcome>;
-  /** Told after the entries were stored. */
-  settled(entry: Entry, outcome: Outcome): void;
+  /** Told once the entries were stored, with them as they are then. */
+  settled(entry: Entry, outcome: Outcome, entries: Entries): void;
 }
 
 /**
@@ -26,8 +26,8 @@ export async function sendAll(personId: string, ports: SendPorts): Promise<void>
     const entry = nextOf(await storage.read(), personId);
     if (!entry) return;
     const outcome = await send(entry);
-    await storage.change((entries) => afterSending(entries, entry, outcome));
-    settled(entry, outcome);
+    const after = await storage.change((entries) => afterSending(entries, entry, outcome));
+    settled(entry, outcome, after);
     if (outcome.kind === 'lost' || outcome.kind === 'later') return;
   }
 }

@@ -11,12 +11,18 @@ import { RunningPour } from './RunningPour.tsx';
 /** A pour as it stands: not begun, under way, or done. */
 export function OpenedPour({ batch }: { batch: Batch }) {
   const { slug, board, index } = useBoardView();
-  const { data, error } = usePour(slug, batch.id, board.season.revision);
+  const before = index.predecessor(batch.id);
+  const { data, error, isWaiting } = usePour(
+    slug,
+    batch.id,
+    board.season.revision,
+    before?.id ?? null,
+  );
   const run = data?.run ?? null;
-  const isUnderWay = run !== null && (run.state === 'open' || batch.stage !== 'pencilled');
-  const cakeOf = isUnderWay
-    ? (index.batch(run.cakeBatchId ?? '') ?? null)
-    : index.predecessor(batch.id);
+  const isUnderWay =
+    run !== null &&
+    (run.state === 'open' || batch.stage !== 'pencilled' || (isWaiting && run.state === 'poured'));
+  const cakeOf = isUnderWay ? (index.batch(run.cakeBatchId ?? '') ?? null) : before;
   return (
     <main id="main" className="grow outline-none">
       <PourHead batch={batch} cakeOf={cakeOf} />

@@ -12,7 +12,7 @@ import { OtherWays } from './ways/OtherWays.tsx';
 
 /** Before a run: what the link says, and the one button that takes it in hand. */
 export function PourStart({ batch, cakeOf }: { batch: Batch; cakeOf: Batch | null }) {
-  const { slug, judged, can } = useBoardView();
+  const { slug, judged, board } = useBoardView();
   const command = usePourCommand(slug, batch.id);
   const link = judged.links.get(batch.id);
   if (batch.stage !== 'pencilled')
@@ -48,7 +48,7 @@ export function PourStart({ batch, cakeOf }: { batch: Batch; cakeOf: Batch | nul
         A pour is taken step by step: the beer racked, the cake looked at, everything clean, the
         wort at its temperature. One person has it in hand; the others see it live.
       </p>
-      {can.setStages ? (
+      {board.me.can.setStages ? (
         <Button
           look="first"
           size="large"

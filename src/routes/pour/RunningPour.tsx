@@ -44,7 +44,7 @@ export function RunningPour(props: RunningPourProps) {
 }
 
 function useView({ run, batch, cakeOf }: RunningPourProps): PourView | null {
-  const { board, slug, units, can } = useBoardView();
+  const { board, slug, units } = useBoardView();
   const now = useNow(TICK_MS);
   const command = usePourCommand(slug, batch.id);
   const standing = useMemo(
@@ -71,7 +71,8 @@ function useView({ run, batch, cakeOf }: RunningPourProps): PourView | null {
     now,
     standing,
     leave: leaveAt(run, now, kills),
-    mine: run.heldBy.personId === board.me.personId && can.setStages,
+    // Also without a connection: what is written down then is kept and sent later.
+    mine: run.heldBy.personId === board.me.personId && board.me.can.setStages,
     send: command.mutateAsync,
     busy: command.isPending,
     error: command.error ? sentenceOf(command.error) : null,

@@ -2,6 +2,7 @@ import { format } from '#shared/units/quantity.ts';
 import { VerdictMark } from '../../../components/drawn/VerdictMark.tsx';
 import { useBoardView } from '../../board/view/BoardView.tsx';
 import { usePourView } from '../pourView.ts';
+import { useOutbox } from '../../../outbox/useOutbox.ts';
 import { ReasonForm } from '../wort/ReasonForm.tsx';
 import { clockTime, TONES } from '../words.ts';
 
@@ -9,9 +10,11 @@ import { clockTime, TONES } from '../words.ts';
 export function PouredNow() {
   const { run, batch, send, busy } = usePourView();
   const { board, units, can } = useBoardView();
+  const waiting = useOutbox();
   const { pour } = run;
   if (!pour) return null;
   const open = !pour.cleared && pour.signedAt === null;
+  const isSent = !waiting.some(({ id }) => id === pour.id);
   const verdict = open ? 'hold' : pour.cleared ? 'pour' : 'mind';
   const facts = [
     `${clockTime(pour.at, board.brewery.timeZone)}`,
@@ -32,6 +35,11 @@ export function PouredNow() {
           </span>
         </p>
       </div>
+      {!isSent && (
+        <p className="mt-2 text-ink">
+          Not sent yet. It waits on this device, and is judged by its own time once it arrives.
+        </p>
+      )}
       {!pour.cleared &&
         pour.findings.map(({ rule, because }) => (
           <p key={rule} className="mt-2 text-ink">
@@ -44,6 +52,7 @@ export function PouredNow() {
         </p>
       )}
       {open &&
+        isSent &&
         (can.acceptHolds ? (
           <ReasonForm
             label="Your reason. It stays on the record."

@@ -50,7 +50,7 @@ export function PourNow() {
 /** No leave: why, whom to ask, and the record of what happened all the same. */
 function Locked({ onPoured }: { onPoured: () => void }) {
   const { standing } = usePourView();
-  const { units } = useBoardView();
+  const { units, online } = useBoardView();
   const { readingC, window: pourWindow } = standing.wort;
   const until =
     standing.linkHolds.length > 0 || readingC === null
@@ -65,7 +65,7 @@ function Locked({ onPoured }: { onPoured: () => void }) {
       <p className="grid min-h-15 place-items-center rounded-xl bg-line2 px-4 text-center text-lead font-bold text-ink2">
         Pour is locked{until}
       </p>
-      <Override />
+      {online ? <Override /> : <NoneCanClear />}
       <p className="mt-3">
         <Button look="text" onClick={onPoured}>
           It is poured already: record it
@@ -74,6 +74,16 @@ function Locked({ onPoured }: { onPoured: () => void }) {
     </>
   );
 }
+
+/** Leave is the server's to give: what a pour without it means, before it is made. */
+const NoneCanClear = () => (
+  <Notice kind="mind" className="mt-3">
+    Without a connection nothing can give leave to pour, and nobody can be asked. Leave that was
+    given before holds for its time. If you pour all the same, write it down: it is judged by its
+    own time once it arrives, and the record shows it as poured without leave, red until a head
+    brewer signs a reason.
+  </Notice>
+);
 
 function Override() {
   const { run, standing, busy, send } = usePourView();
