@@ -53,10 +53,13 @@ export function useArchive(place: string) {
   });
 }
 
-export function useSeasonDelete(place: string) {
+/** @param onGone first of all: who looks at the season that is gone looks away. */
+export function useSeasonDelete(place: string, onGone: () => Promise<void>) {
+  const client = useQueryClient();
   return useMutation({
     mutationFn: ({ id, version }: Named) =>
       requestNothing('DELETE', api.season(place, id), { ifMatch: version }),
-    ...useSeasonsChanged(place),
+    onSuccess: onGone,
+    onSettled: () => client.invalidateQueries({ queryKey: seasonsQuery(place).queryKey }),
   });
 }

@@ -85,7 +85,7 @@ function MatchCount() {
   const all = shelved.flat().length + index.bench.length;
   const shelves = shelved.filter((mates) => mates.some(({ id }) => matches?.has(id))).length;
   return (
-    <p role="status" className="min-w-0 basis-56 self-center text-ink2 max-tablet:basis-full">
+    <p role="status" className="min-w-0 basis-56 self-center text-ink2 max-tablet:grow">
       {matches === null
         ? `All ${count(all, 'batch', 'batches')} are shown.`
         : `${matches.size} of ${count(all, 'batch', 'batches')}, on ${shelves} of ${count(shelved.length, 'shelf', 'shelves')}. The rest is pale.`}

@@ -1,5 +1,6 @@
 import { useCallback, useMemo } from 'react';
 import { useSearchParams } from 'react-router-dom';
+import { paramsNow } from '../../../app/paramsNow.ts';
 import { filterParams } from '../finding/filter.ts';
 
 export type BoardPanel =
@@ -40,14 +41,17 @@ export function useBoardPanel() {
   const isOpen = panel !== null;
   const open = useCallback(
     (next: BoardPanel) =>
-      setParams((now) => ({ ...filterParams(now), ...search(next) }), {
-        replace: isOpen,
-        preventScrollReset: true,
-      }),
+      setParams(
+        { ...filterParams(paramsNow()), ...search(next) },
+        {
+          replace: isOpen,
+          preventScrollReset: true,
+        },
+      ),
     [setParams, isOpen],
   );
   const close = useCallback(
-    () => setParams(filterParams, { replace: true, preventScrollReset: true }),
+    () => setParams(filterParams(paramsNow()), { replace: true, preventScrollReset: true }),
     [setParams],
   );
   return { panel, open, close };

@@ -24,7 +24,8 @@ export function ArchiveSeason({ season, onClose }: ArchiveSeasonProps) {
       action="Archive the season"
       busy={archive.isPending}
       error={archive.error}
-      onConfirm={() => archive.mutate({ ...season, away: true }, { onSuccess: done })}
+      // The row goes to another list, and this with it; its error is shown above.
+      onConfirm={() => void archive.mutateAsync({ ...season, away: true }).then(done, () => null)}
     >
       <p>
         It stays to be read and copied, and nothing on it can be changed, by anybody. You can take

@@ -13,13 +13,14 @@ interface DeleteSeasonProps {
 
 export function DeleteSeason({ season, onClose }: DeleteSeasonProps) {
   const { slug, brewerySlug } = useBrewery();
-  const remove = useSeasonDelete(slug);
   const navigate = useNavigate();
-  const done = async () => {
-    say(`${season.name} is deleted.`);
-    onClose();
+  const remove = useSeasonDelete(slug, async () => {
     // Its own address shows nothing any more.
     if (seasonOf(slug) === season.id) await navigate(`/b/${brewerySlug}/season`);
+  });
+  const done = () => {
+    say(`${season.name} is deleted.`);
+    onClose();
   };
   return (
     <ConfirmDialog
@@ -29,7 +30,7 @@ export function DeleteSeason({ season, onClose }: DeleteSeasonProps) {
       action="Delete the season"
       busy={remove.isPending}
       error={remove.error}
-      onConfirm={() => remove.mutate(season, { onSuccess: done })}
+      onConfirm={() => void remove.mutateAsync(season).then(done, () => null)}
     >
       <p>Nothing stands on it. This cannot be undone.</p>
     </ConfirmDialog>

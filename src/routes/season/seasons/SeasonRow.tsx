@@ -55,10 +55,12 @@ function SeasonMenu({ season }: { season: ListedSeason }) {
   const archive = useArchive(slug);
   const { name, isCurrent, isArchived } = season;
   const isEmpty = season.chains + season.batches === 0;
-  const told = (done: string) => ({
-    onSuccess: () => say(done),
-    onError: (error: Error) => say(sentenceOf(error)),
-  });
+  // The row may be in another list by the time that it is done.
+  const tell = (done: Promise<unknown>, words: string) =>
+    void done.then(
+      () => say(words),
+      (error: unknown) => say(sentenceOf(error)),
+    );
   const close = () => setAsked(null);
   return (
     <>
@@ -72,14 +74,19 @@ function SeasonMenu({ season }: { season: ListedSeason }) {
       >
         <MenuItem onSelect={() => setAsked('copy')}>Copy into a new season</MenuItem>
         {!isCurrent && !isArchived && (
-          <MenuItem onSelect={() => choose.mutate(season, told(`${name} is the current season.`))}>
+          <MenuItem
+            onSelect={() => tell(choose.mutateAsync(season), `${name} is the current season.`)}
+          >
             Make it the current season
           </MenuItem>
         )}
         {isArchived && (
           <MenuItem
             onSelect={() =>
-              archive.mutate({ ...season, away: false }, told(`${name} is out of the archive.`))
+              tell(
+                archive.mutateAsync({ ...season, away: false }),
+                `${name} is out of the archive.`,
+              )
             }
           >
             Take it out of the archive
