@@ -1,4 +1,5 @@
 import { use, type ReactNode } from 'react';
+import { KeptOffline } from '../../app/keptOffline.ts';
 import { EnclosingDialog } from '../../app/unsaved.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { Button } from '../ui/Button.tsx';
@@ -29,6 +30,7 @@ export function FormFoot(props: FormFootProps) {
     busy,
   } = props;
   const online = useOnline();
+  const isKept = use(KeptOffline);
   const dialog = use(EnclosingDialog);
   return (
     // In a dialog the foot stays in sight, however long the form is.
@@ -39,7 +41,9 @@ export function FormFoot(props: FormFootProps) {
       </div>
       {!online && (
         <Notice kind="mind">
-          No connection. What you typed stays here; save it when the connection is back.
+          {isKept
+            ? 'No connection. It is kept on this device, and sent when the connection is back.'
+            : 'No connection. What you typed stays here; save it when the connection is back.'}
         </Notice>
       )}
       <div className="flex flex-wrap items-center justify-end gap-3">
@@ -54,7 +58,7 @@ export function FormFoot(props: FormFootProps) {
           look="first"
           size={wide ? 'large' : 'normal'}
           className={wide ? 'w-full' : ''}
-          disabled={!online || busy}
+          disabled={(!online && !isKept) || busy}
         >
           {busy ? busyAction : action}
         </Button>

@@ -1,5 +1,6 @@
-import type { ReactNode } from 'react';
+import { use, type ReactNode } from 'react';
 import { sentenceOf } from '../../api/errors.ts';
+import { KeptOffline } from '../../app/keptOffline.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { Button } from './Button.tsx';
 import { Dialog } from './Dialog.tsx';
@@ -14,6 +15,8 @@ export interface ConfirmDialogProps {
   children: ReactNode;
   /** The word on the button: what it does, never "OK". */
   action: string;
+  /** The word on the way back, where "Leave it" could be mistaken. */
+  keep?: string;
   onConfirm: () => void;
   busy?: boolean;
   error?: unknown;
@@ -23,7 +26,8 @@ export interface ConfirmDialogProps {
 
 export function ConfirmDialog(props: ConfirmDialogProps) {
   const isOnline = useOnline();
-  const online = isOnline || props.worksOffline === true;
+  const isKept = use(KeptOffline);
+  const online = isOnline || isKept || props.worksOffline === true;
   return (
     <Dialog open={props.open} onClose={props.onClose} title={props.title}>
       <div className="space-y-3 text-ink2">{props.children}</div>
@@ -33,7 +37,7 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
       </div>
       <div className="mt-5 flex flex-wrap justify-end gap-3">
         <Button look="quiet" onClick={props.onClose}>
-          Leave it
+          {props.keep ?? 'Leave it'}
         </Button>
         <Button look="danger" disabled={!online || props.busy} onClick={props.onConfirm}>
           {props.action}

@@ -58,6 +58,7 @@ export function sharedView(shared: SharedChain, units: UnitPrefs): BoardViewValu
     units,
     slug: SLUG,
     can: NOTHING,
+    mayWriteDown: false,
     online: true,
   };
 }

@@ -16,6 +16,8 @@ export interface BoardViewValue {
   slug: string;
   /** What this person may do now; nothing while there is no connection. */
   can: Abilities;
+  /** Readings, notes and what else is kept without a connection, they may write down at any time. */
+  mayWriteDown: boolean;
   online: boolean;
 }
 
@@ -49,6 +51,7 @@ export function BoardViewProvider({ children }: { children: ReactNode }) {
       units,
       slug,
       can: online ? board.me.can : NOTHING,
+      mayWriteDown: board.me.can.setStages,
       online,
     }),
     [board, judged, units, slug, online],
