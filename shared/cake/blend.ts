@@ -10,7 +10,7 @@ export interface KeptCake {
 }
 
 /** Half of a settled cake is the beer between its cells (40–60 % spun solids are quoted). */
-const BEER_IN_CAKE = 0.5;
+export const BEER_IN_CAKE = 0.5;
 
 /** Beer that goes over with the kept part, litres. */
 export function retainedBeerL({ keptL, cakeL, leftAboveL }: KeptCake): number {

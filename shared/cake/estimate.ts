@@ -28,11 +28,11 @@ export interface CakeEstimate {
 }
 
 /** Share of all cells that settles and is not racked away (0.80–0.99). */
-const SETTLED = 0.9;
+export const SETTLED = 0.9;
 /** Living share at racking (0.85–0.98). */
-const VIABILITY = 0.92;
+export const VIABILITY = 0.92;
 /** Cells in a mL of clean settled yeast; published figures run from 1.2e9 to 3e9. */
-const CELLS_PER_ML_CAKE = 1.2e9;
+export const CELLS_PER_ML_CAKE = 1.2e9;
 export const TRUB_SHARE: Readonly<Record<TrubLevel, number>> = {
   little: 0.1,
   some: 0.2,
@@ -41,7 +41,7 @@ export const TRUB_SHARE: Readonly<Record<TrubLevel, number>> = {
 export const CAKE_KG_PER_L = 1.05;
 
 /** Growth may be this much smaller or larger: ln-SD 0.35 between strains and runs, 90 %. */
-const GROWTH_SPREAD = 1.8;
+export const GROWTH_SPREAD = 1.8;
 /**
  * The same after the living share was counted. Its own spread, ln-SD 0.04 of 0.85–0.98, is taken
  * out in quadrature; that is little, because growth is what is uncertain.

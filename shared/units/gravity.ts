@@ -5,10 +5,8 @@
  * tested against two published sucrose tables: right to 0.003 °P from 0 to 21 °P. It is preferred to
  * the one-parameter form 260.4 (1 − 1/SG), which is off by 0.001 SG at 30 °P.
  */
-const A0 = -616.868;
-const A1 = 1111.14;
-const A2 = -630.272;
-const A3 = 135.997;
+export const EXTRACT_FIT = [-616.868, 1111.14, -630.272, 135.997] as const;
+const [A0, A1, A2, A3] = EXTRACT_FIT;
 
 const cubic = (sg: number): number => A0 + sg * (A1 + sg * (A2 + sg * A3));
 const slope = (sg: number): number => A1 + sg * (2 * A2 + sg * 3 * A3);

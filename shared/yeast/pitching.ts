@@ -12,7 +12,7 @@ export const CELLS_PER_ML_PLATO: Readonly<Record<YeastKind, number>> = {
 
 /** A quarter more from 18 °P (1.074), after the step from 2.3 to 2.9e6 of Suihko et al. 1993. */
 const STRONG_FROM_POINTS = 74;
-const STRONG_SHARE = 1.25;
+export const STRONG_SHARE = 1.25;
 
 /** What is known of a wort that yeast is to be pitched into: litres, SG, kind of yeast. */
 export interface Wort {

@@ -6,14 +6,16 @@
  * the half-life may be 2.5 times shorter to 10 times longer in the cold, half to three times when
  * warm.
  */
-const LN_RATE_AT_0C = -4.319;
-const LN_RATE_PER_C = 0.107;
+export const LN_RATE_AT_0C = -4.319;
+export const LN_RATE_PER_C = 0.107;
 
-const rate = (celsius: number): number => Math.exp(LN_RATE_AT_0C + LN_RATE_PER_C * celsius);
+/** Loss of living cells at a temperature in °C, per day. */
+export const lossRate = (celsius: number): number =>
+  Math.exp(LN_RATE_AT_0C + LN_RATE_PER_C * celsius);
 
 /** Share of living cells left, 0–1, after `days` (below 0 counts as 0) at a temperature in °C. */
 export const survival = (days: number, celsius: number): number =>
-  Math.exp(-rate(celsius) * Math.max(0, days));
+  Math.exp(-lossRate(celsius) * Math.max(0, days));
 
 const WARM_FROM_C = 10;
 

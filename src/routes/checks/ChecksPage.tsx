@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 import { useTitle } from '../../app/useTitle.ts';
 import { VerdictPill } from '../../components/drawn/VerdictPill.tsx';
+import { TextLink } from '../../components/ui/TextLink.tsx';
 import { PublicHeader } from '../public/PublicHeader.tsx';
 import { Cautions } from './Cautions.tsx';
 import { RuleBlock } from './RuleBlock.tsx';
@@ -21,6 +22,11 @@ export function ChecksPage() {
         <p className="mt-3 max-w-2xl text-lead text-ink2">
           One link is the cake of one beer under the wort of the next. Each rule below looks at it;
           the worst answer is the verdict.
+        </p>
+        <p className="mt-2">
+          <TextLink to="/about/science" className="inline-block py-1.5">
+            The science: each formula, its source, and an example
+          </TextLink>
         </p>
         <Verdicts />
         <WhatIsComputed />

@@ -70,7 +70,7 @@ function Opened({ earlier, later, link }: SharedLinkProps) {
       </p>
       <BlendTable earlier={earlier} later={later} answer={link} />
       {link.findings.map((finding) => (
-        <FindingBlock key={finding.rule} finding={finding} />
+        <FindingBlock key={finding.rule} finding={finding} science="/about/science" />
       ))}
       {link.unchecked.length > 0 && (
         <PanelPart title={`Not checked: ${link.unchecked.length}`}>

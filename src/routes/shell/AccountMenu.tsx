@@ -35,6 +35,7 @@ export function AccountMenu() {
         <MenuLink to={brewery.path('rules')}>House rules</MenuLink>
         <MenuLink to={brewery.path('record')}>Record</MenuLink>
         <MenuLink to="/about/checks">How the checks work</MenuLink>
+        <MenuLink to={brewery.path('science')}>The science</MenuLink>
         <MenuItem onSelect={() => keysStore.set(true)}>Keys</MenuItem>
         <MenuLink to="/breweries">Breweries</MenuLink>
         <MenuSeparator />

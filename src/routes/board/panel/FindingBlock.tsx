@@ -1,12 +1,20 @@
 import type { Finding } from '#shared/rules/answer.ts';
+import { scienceSectionOf } from '../../../app/scienceSections.ts';
 import { unbroken } from '../../../app/unbroken.ts';
 import { VerdictMark } from '../../../components/drawn/VerdictMark.tsx';
 import { VERDICT_WORDS } from '../../../components/drawn/verdictWords.ts';
+import { TextLink } from '../../../components/ui/TextLink.tsx';
 import { MeasureList } from './MeasureList.tsx';
 import { PanelPart } from './PanelFrame.tsx';
 
+interface FindingBlockProps {
+  finding: Finding;
+  /** The science page, with the figures of this link. */
+  science: string;
+}
+
 /** One finding: its title, why, what to do, the numbers, what it rests on. */
-export function FindingBlock({ finding }: { finding: Finding }) {
+export function FindingBlock({ finding, science }: FindingBlockProps) {
   const tone = finding.verdict === 'hold' ? 'text-hold' : 'text-mind';
   return (
     <PanelPart
@@ -24,7 +32,16 @@ export function FindingBlock({ finding }: { finding: Finding }) {
         <b className="text-ink">Do:</b> {unbroken(lowerFirst(finding.do))}
       </p>
       <MeasureList measures={finding.measures} />
-      <p className="mt-1.5 text-label text-ink2">Rests on: {unbroken(finding.basis)}</p>
+      <p className="mt-1.5 text-label text-ink2">
+        Rests on: {unbroken(finding.basis)}{' '}
+        <TextLink
+          to={`${science}#${scienceSectionOf(finding.rule)}`}
+          className="inline-block max-tablet:py-2.5"
+        >
+          The science of it
+          <span className="sr-only">: {finding.title}</span>
+        </TextLink>
+      </p>
     </PanelPart>
   );
 }

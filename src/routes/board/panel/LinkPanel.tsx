@@ -1,4 +1,4 @@
-import { Printer } from 'lucide-react';
+import { Printer, Thermometer } from 'lucide-react';
 import { useIsGuestHere } from '../../../api/board.ts';
 import { useBrewery } from '../../../app/useBrewery.ts';
 import { LinkButton } from '../../../components/ui/LinkButton.tsx';
@@ -45,7 +45,11 @@ function OpenedLink({ laterId, earlierId }: { laterId: string; earlierId: string
       <LinkTitle earlier={earlier} later={later} answer={answer} accepted={draft.accepted} />
       <BlendTable earlier={earlier} later={later} answer={answer} />
       {answer.findings.map((finding) => (
-        <FindingBlock key={finding.rule} finding={finding} />
+        <FindingBlock
+          key={finding.rule}
+          finding={finding}
+          science={isGuest ? '/about/science' : path(`science?link=${later.id}`)}
+        />
       ))}
       {!draft.isTrying && <AcceptHold later={later} answer={answer} />}
       <KeepCake draft={draft} />
@@ -54,7 +58,13 @@ function OpenedLink({ laterId, earlierId }: { laterId: string; earlierId: string
       <PassedChecks passed={answer.passed} />
       <LinkFacts later={later} />
       {!isGuest && (
-        <p className="border-t border-line pt-3 pb-1">
+        <p className="flex flex-wrap gap-2.5 border-t border-line pt-3 pb-1">
+          {later.stage === 'pencilled' && (
+            <LinkButton size="small" look="first" to={path(`pour/${later.id}`)}>
+              <Thermometer size={16} aria-hidden />
+              Pour check
+            </LinkButton>
+          )}
           <LinkButton size="small" look="quiet" to={path(`print/brew-sheets/${later.id}`)}>
             <Printer size={16} aria-hidden />
             Brew sheet
