@@ -61,6 +61,11 @@ const ofBrewery = {
         lazyPage(async () => (await import('./routes/account/AccountPage.tsx')).AccountPage),
     },
     {
+      path: 'science',
+      lazy: () =>
+        lazyPage(async () => (await import('./routes/science/SciencePage.tsx')).SciencePage),
+    },
+    {
       path: 'print/season',
       lazy: () =>
         lazyPage(async () => (await import('./routes/print/season/SeasonPrint.tsx')).SeasonPrint),
@@ -109,6 +114,13 @@ export const router = createBrowserRouter([
       {
         path: 'guest/:token',
         lazy: () => lazyPage(async () => (await import('./routes/guest/GuestPage.tsx')).GuestPage),
+      },
+      {
+        path: 'about/science',
+        lazy: () =>
+          lazyPage(
+            async () => (await import('./routes/science/AboutSciencePage.tsx')).AboutSciencePage,
+          ),
       },
       {
         path: 'about/checks',
