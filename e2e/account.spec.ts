@@ -2,6 +2,7 @@ import type { Page } from '@playwright/test';
 import { eq } from 'drizzle-orm';
 import { hashPassword } from '../server/auth/passwords.ts';
 import type { Db } from '../server/db/client.ts';
+import { membership } from '../server/db/schema/brewery.ts';
 import { person } from '../server/db/schema/people.ts';
 import { expectAccessible } from './support/axe.ts';
 import { writeBrewery, type Member } from './support/brewery.ts';
@@ -19,12 +20,7 @@ async function givePassword(db: Db, { id }: Member): Promise<void> {
 }
 
 const part = (page: Page, title: string) =>
-  page
-    .getByRole('region')
-    .or(page.locator('section'))
-    .filter({
-      has: page.getByRole('heading', { name: title, exact: true }),
-    });
+  page.locator('section').filter({ has: page.getByRole('heading', { name: title, exact: true }) });
 
 // A wrong password and a common one are refused, and the browser calls a refusal an error.
 test.describe('name, address and password', () => {
@@ -115,7 +111,6 @@ test.describe('closing the account', () => {
     const me = lone.members['head-brewer'];
     await givePassword(db, me);
     const others = [lone.members.brewer.id, lone.members.taster.id];
-    const { membership } = await import('../server/db/schema/brewery.ts');
     for (const id of others) await db.delete(membership).where(eq(membership.personId, id));
     await context.addCookies(sessionCookies(server, me.token));
     await page.goto('/account');

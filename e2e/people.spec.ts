@@ -1,9 +1,11 @@
+import type { Page } from '@playwright/test';
 import { expectAccessible } from './support/axe.ts';
 import { writeBrewery } from './support/brewery.ts';
 import { press, tabTo } from './support/keys.ts';
+import { sessionCookies } from './support/server.ts';
 import { expect, test, watchErrors } from './support/test.ts';
 
-const card = (page: import('@playwright/test').Page, name: string) =>
+const card = (page: Page, name: string) =>
   page.getByRole('list', { name: 'People' }).getByRole('listitem').filter({ hasText: name });
 
 test('a role is changed with the mouse, and the other’s page follows', async ({
@@ -130,8 +132,6 @@ test('a join link takes in who is signed in, and says when they are in already',
   const other = await writeBrewery(db, 'Far Shore');
   const context = await browser.newContext({ baseURL: server.url });
   const errors = watchErrors(context);
-  await brewery.signIn(context, 'taster');
-  const { sessionCookies } = await import('./support/server.ts');
   await context.addCookies(sessionCookies(server, other.members['head-brewer'].token));
   const guest = await context.newPage();
   await guest.goto(link);

@@ -6,7 +6,7 @@ import { useSession } from '../../api/session.ts';
 import { useTitle } from '../../app/useTitle.ts';
 import { Button } from '../../components/ui/Button.tsx';
 import { LinkButton } from '../../components/ui/LinkButton.tsx';
-import { homeOf } from '../public/home.ts';
+import { homeOf, homeWords } from '../public/home.ts';
 import { PublicHeader } from '../public/PublicHeader.tsx';
 import { ShelfFoot } from '../public/ShelfFoot.tsx';
 import { NotFoundPage } from './NotFoundPage.tsx';
@@ -42,7 +42,7 @@ function Failed({ error }: { error: unknown }) {
             Load the page again
           </Button>
           <LinkButton look="quiet" size="large" to={homeOf(me)} reloadDocument>
-            {me ? 'To the board' : 'To the front page'}
+            {homeWords(me)}
           </LinkButton>
         </div>
       </main>

@@ -2,7 +2,7 @@ import { useSession } from '../../api/session.ts';
 import { useTitle } from '../../app/useTitle.ts';
 import { LinkButton } from '../../components/ui/LinkButton.tsx';
 import { PublicHeader } from '../public/PublicHeader.tsx';
-import { homeOf } from '../public/home.ts';
+import { homeOf, homeWords } from '../public/home.ts';
 
 export function NotFoundPage() {
   useTitle('Nothing here');
@@ -19,7 +19,7 @@ export function NotFoundPage() {
         </p>
         <div className="mt-6">
           <LinkButton look="first" size="large" to={homeOf(me)}>
-            {me ? 'To the board' : 'To the front page'}
+            {homeWords(me)}
           </LinkButton>
         </div>
       </main>

@@ -21,6 +21,7 @@ export function LeaveBrewery({ member, onClose }: MemberDialogProps) {
       onClose={onClose}
       title={`Leave ${name}?`}
       action="Leave the brewery"
+      keep="Stay"
       busy={leave.isPending}
       error={leave.error}
       onConfirm={() => leave.mutate(member, { onSuccess: gone })}

@@ -3,7 +3,7 @@ import type { ReactNode } from 'react';
 import { useSession } from '../../api/session.ts';
 import { Wordmark } from '../../components/ui/Wordmark.tsx';
 import { TextLink } from '../../components/ui/TextLink.tsx';
-import { homeOf } from './home.ts';
+import { homeOf, homeWords } from './home.ts';
 
 /** Top of the pages that anyone may read. */
 export function PublicHeader({ children }: { children?: ReactNode }) {
@@ -16,7 +16,7 @@ export function PublicHeader({ children }: { children?: ReactNode }) {
       <nav aria-label="Account" className="ml-auto flex items-center gap-6 text-touch">
         {children ?? (
           <TextLink to={me ? homeOf(me) : '/sign-in'} className="py-2.5">
-            {me ? 'To the board' : 'Sign in'}
+            {me ? homeWords(me) : 'Sign in'}
           </TextLink>
         )}
       </nav>

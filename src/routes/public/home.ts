@@ -20,6 +20,12 @@ export function firstPageOf(person: Person | null | undefined): string {
   return home.startsWith('/b/') && isPhone() ? `${home}/today` : home;
 }
 
+/** The words on the way there. */
+export function homeWords(person: Person | null | undefined): string {
+  if (!person) return 'To the front page';
+  return homeOf(person) === '/breweries' ? 'Your breweries' : 'To the board';
+}
+
 /** Only an address within this site is gone to after signing in. */
 export function safeNext(next: string | null): string | null {
   return next && /^\/(?![/\\])/.test(next) ? next : null;

@@ -24,6 +24,7 @@ export function LeaveChain({ guest }: { guest: GuestShelf }) {
         onClose={() => setAsking(false)}
         title={`Leave ${guest.chainName}?`}
         action="Leave the chain"
+        keep="Stay"
         busy={leave.isPending}
         error={leave.error}
         onConfirm={() => leave.mutate(guest.guestId)}
