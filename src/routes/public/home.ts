@@ -26,6 +26,9 @@ export function homeWords(person: Person | null | undefined): string {
   return homeOf(person) === '/breweries' ? 'Your breweries' : 'To the board';
 }
 
+export const firstPageWords = (person: Person) =>
+  firstPageOf(person).endsWith('/today') ? 'To today’s work' : homeWords(person);
+
 /** Only an address within this site is gone to after signing in. */
 export function safeNext(next: string | null): string | null {
   return next && /^\/(?![/\\])/.test(next) ? next : null;

@@ -6,7 +6,7 @@ import { Menu, MenuLabel, MenuLink, MenuSeparator } from '../../components/ui/Me
 
 /** The brewery that is shown, and the way to the others. */
 export function BreweryMenu() {
-  const { slug, name } = useBrewery();
+  const { brewerySlug, name } = useBrewery();
   const { data: me } = useSession();
   if (!me) return null;
   return (
@@ -25,7 +25,7 @@ export function BreweryMenu() {
     >
       <MenuLabel>Your breweries</MenuLabel>
       {me.breweries.map(({ brewery }) => {
-        const isHere = brewery.slug === slug;
+        const isHere = brewery.slug === brewerySlug;
         return (
           <MenuLink
             key={brewery.id}

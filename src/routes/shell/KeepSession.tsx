@@ -11,17 +11,17 @@ import { useBrewery } from '../../app/useBrewery.ts';
  * in when the board says that somebody has another role, or other guest shelves, by now.
  */
 export function KeepSession() {
-  const { slug, role } = useBrewery();
+  const { slug, brewerySlug, role } = useBrewery();
   const client = useQueryClient();
   const { data: me } = useSession();
   const { data: onBoard } = useQuery({
     ...boardQuery(slug),
     select: ({ me: here, guests }) => gist(here.role, guests),
   });
-  const known = gist(role, me?.guestOf.filter(({ onBoardOf }) => onBoardOf === slug) ?? []);
+  const known = gist(role, me?.guestOf.filter(({ onBoardOf }) => onBoardOf === brewerySlug) ?? []);
   useEffect(() => {
-    if (me) rememberBrewery(me.id, slug);
-  }, [me, slug]);
+    if (me) rememberBrewery(me.id, brewerySlug);
+  }, [me, brewerySlug]);
   useEffect(() => {
     if (onBoard !== undefined && onBoard !== known) void client.invalidateQueries(sessionQuery);
   }, [client, known, onBoard]);

@@ -1,8 +1,7 @@
 import { useSession } from '../../api/session.ts';
-import { isPhone } from '../../app/isPhone.ts';
 import { useTitle } from '../../app/useTitle.ts';
 import { LinkButton } from '../../components/ui/LinkButton.tsx';
-import { firstPageOf } from '../public/home.ts';
+import { firstPageOf, firstPageWords } from '../public/home.ts';
 import { PublicHeader } from '../public/PublicHeader.tsx';
 import { ExampleColumn } from './ExampleColumn.tsx';
 import { ExampleHead } from './ExampleHead.tsx';
@@ -54,7 +53,7 @@ function Actions() {
     <div className="mt-4 flex flex-wrap gap-3 max-tablet:*:flex-1">
       {me ? (
         <LinkButton look="first" size="large" to={firstPageOf(me)}>
-          {isPhone() ? 'To today’s work' : 'To the board'}
+          {firstPageWords(me)}
         </LinkButton>
       ) : (
         <>
