@@ -36,8 +36,6 @@ export const todayFacts = z.strictObject({
       text: z.string(),
     }),
   ),
-  /** Racked batches whose cake was judged. */
-  checked: z.array(f.id),
   /** Parts of cakes that are to go into a jar. */
   jars: z.array(
     z.strictObject({

@@ -91,10 +91,10 @@ const events = (batch: Batch, { facts }: Sight): Duty[] =>
   );
 
 /** A bare cake that somebody waits for is judged on the day that its beer is racked. */
-function check(batch: Batch, { index, facts }: Sight): Duty[] {
+function check(batch: Batch, { index }: Sight): Duty[] {
   const { rackedOn } = batch.read;
   const later = successorsOf(batch, index)[0];
-  const isOpen = batch.cake?.state === 'bare' && !facts.checked.includes(batch.id);
+  const isOpen = batch.cake?.state === 'bare' && batch.cake.check === null;
   if (!isOpen || rackedOn === null || !later) return [];
   const due = { key: `check ${batch.id}`, batchId: batch.id, day: rackedOn };
   return [{ ...due, kind: 'cake-check', forId: later.id }];

@@ -76,7 +76,6 @@ test('another brewery hears nothing of it', async () => {
     runs: [],
     unsigned: [],
     events: [],
-    checked: [],
     jars: [],
   });
 });

@@ -1,9 +1,9 @@
-import { and, eq, inArray, isNull, sql } from 'drizzle-orm';
+import { and, eq, isNull, sql } from 'drizzle-orm';
 import { z } from 'zod';
 import { pourObjection } from '#shared/api/pour.ts';
 import type { TodayFacts } from '#shared/api/today.ts';
 import type { Db } from '../../db/client.ts';
-import { cakeCheck, surplus } from '../../db/schema/cake.ts';
+import { surplus } from '../../db/schema/cake.ts';
 import { batch } from '../../db/schema/chain.ts';
 import { person } from '../../db/schema/people.ts';
 import { pourClearance, pourEvent, pourRun } from '../../db/schema/pour.ts';
@@ -16,15 +16,14 @@ interface Where {
 
 /** What waits in a season and does not stand on its board. */
 export async function readToday(db: Db, where: Where): Promise<Omit<TodayFacts, 'now'>> {
-  const [overrides, runs, unsigned, events, checked, jars] = await Promise.all([
+  const [overrides, runs, unsigned, events, jars] = await Promise.all([
     askedOverrides(db, where),
     openRuns(db, where),
     unsignedPours(db, where),
     eventsOfFermenting(db, where),
-    judgedCakes(db, where),
     jarsToBe(db, where),
   ]);
-  return { overrides, runs, unsigned, events, checked, jars };
+  return { overrides, runs, unsigned, events, jars };
 }
 
 const inSeason = ({ breweryId, seasonId }: Where) =>
@@ -96,15 +95,6 @@ async function eventsOfFermenting(db: Db, where: Where) {
     .where(and(ofSeason(where), eq(batch.stage, 'fermenting')))
     .orderBy(batchEvent.createdAt);
   return rows.map(({ doneAt: done, ...row }) => ({ ...row, isDone: done !== null }));
-}
-
-async function judgedCakes(db: Db, where: Where): Promise<string[]> {
-  const rows = await db
-    .select({ batchId: cakeCheck.batchId })
-    .from(cakeCheck)
-    .innerJoin(batch, eq(batch.id, cakeCheck.batchId))
-    .where(and(ofSeason(where), inArray(batch.stage, ['fermenting', 'racked'])));
-  return rows.map(({ batchId }) => batchId);
 }
 
 const jarsToBe = (db: Db, where: Where) =>

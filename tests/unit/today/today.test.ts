@@ -12,7 +12,6 @@ const NONE: TodayFacts = {
   runs: [],
   unsigned: [],
   events: [],
-  checked: [],
   jars: [],
 };
 const ID = 'f0000000-0000-4000-8000-000000000001';
@@ -36,7 +35,7 @@ const FERMENTING: Partial<Batch> = {
   stage: 'fermenting',
   brewOn: '2027-03-06',
   daysUnderBeer: 14,
-  cake: { state: 'growing', measured: null },
+  cake: { state: 'growing', check: null, measured: null },
 };
 const PENCILLED: Partial<Batch> = { brewOn: '2027-03-20', daysUnderBeer: 14 };
 /** Readings of which only the time of the last counts here. */
@@ -45,6 +44,9 @@ const lastRead = (lastAt: string): Partial<Batch> => ({
   followed: {
     count: 1,
     lastAt,
+    pouredAt: null,
+    firstGravity: null,
+    firstGravityAt: null,
     gravity: null,
     gravityAt: null,
     steadyFrom: null,
@@ -191,13 +193,19 @@ describe('after racking', () => {
     stage: 'racked',
     brewOn: '2027-03-06',
     read: { volumeL: null, og: null, fg: null, rackedOn: '2027-03-20' },
-    cake: { state: 'bare', measured: null },
+    cake: { state: 'bare', check: null, measured: null },
   };
 
   it('the cake is judged for the next beer, once', () => {
     const board = shelf(racked, { ...PENCILLED, brewOn: '2027-04-20' });
     expect(list(board, '2027-03-20').due).toMatchObject([{ kind: 'cake-check', forId: two }]);
-    expect(list(board, '2027-03-20', { checked: [one] }).due).toEqual([]);
+    const judged = {
+      ...racked,
+      cake: { state: 'bare', check: { judged: 'fit', tasted: 'clean' }, measured: null },
+    } as const;
+    expect(list(shelf(judged, { ...PENCILLED, brewOn: '2027-04-20' }), '2027-03-20').due).toEqual(
+      [],
+    );
     expect(list(shelf(racked), '2027-03-20').due).toEqual([]);
   });
 
