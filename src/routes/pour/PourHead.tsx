@@ -22,7 +22,7 @@ export function PourHead({ batch, cakeOf }: { batch: Batch; cakeOf: Batch | null
   return (
     <header className="on-bar bg-bar text-on-bar">
       <div className="mx-auto flex max-w-5xl items-center gap-4 px-7 py-4 max-tablet:px-[18px]">
-        <span className="rounded-lg bg-on-bar/90 p-1.5">
+        <span className="rounded-lg bg-on-bar/90 p-1.5 dark:bg-transparent">
           <Vessel
             shape={vessel?.shape ?? 'bucket'}
             srm={isPoured ? batch.srm : null}
@@ -37,7 +37,7 @@ export function PourHead({ batch, cakeOf }: { batch: Batch; cakeOf: Batch | null
             {cakeOf ? `${batch.name} onto ${cakeOf.name}’s cake` : `${batch.name} onto fresh yeast`}
           </h1>
           <p className="mt-0.5 text-body text-on-bar2">{facts.join(' · ')}</p>
-          <p className="text-small">
+          <p className="text-small max-tablet:hidden">
             <TextLink to={path()} className="text-on-bar2">
               Back to the board
             </TextLink>

@@ -25,7 +25,7 @@ export function PourStart({ batch, cakeOf }: { batch: Batch; cakeOf: Batch | nul
     <div className="max-w-xl">
       {link && (
         <>
-          <p className="mt-3">
+          <p className="mt-3 mb-3">
             <VerdictPill
               large
               verdict={link.verdict}

@@ -8,6 +8,7 @@ import { usePourCommand } from '../../api/pour.ts';
 import { Notice } from '../../components/ui/Notice.tsx';
 import { useBoardView } from '../board/view/BoardView.tsx';
 import { Follower } from './Follower.tsx';
+import { LeaveRun } from './LeaveRun.tsx';
 import { PourViewOf, usePourView, type PourView } from './pourView.ts';
 import { StepBar } from './StepBar.tsx';
 import { AfterStep } from './steps/AfterStep.tsx';
@@ -39,13 +40,16 @@ export function RunningPour(props: RunningPourProps) {
       <Follower />
       <AskedOverride />
       <Step />
+      <LeaveRun />
     </PourViewOf>
   );
 }
 
 function useView({ run, batch, cakeOf }: RunningPourProps): PourView | null {
   const { board, slug, units } = useBoardView();
-  const now = useNow(TICK_MS);
+  const ticked = useNow(TICK_MS);
+  // A reading that was just written down counts at once, not at the next tick.
+  const now = Math.max(ticked, ...run.readings.map(({ at }) => Date.parse(at)));
   const command = usePourCommand(slug, batch.id);
   const standing = useMemo(
     () =>

@@ -1,4 +1,3 @@
-import type { ReactNode } from 'react';
 import type { PourFound } from '#shared/api/pour.ts';
 import { Button } from '../../components/ui/Button.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
@@ -10,13 +9,12 @@ interface StepFootProps {
   found?: PourFound;
   /** Why one cannot go on yet; absent: one can. */
   wait?: string | undefined;
-  /** The word on the button; absent: the name of the next step. */
-  action?: string;
-  children?: ReactNode;
+  /** Something else is to be done first. */
+  quiet?: boolean;
 }
 
 /** On to the next step, and back. */
-export function StepFoot({ found = {}, wait, action, children }: StepFootProps) {
+export function StepFoot({ found = {}, wait, quiet = false }: StepFootProps) {
   const { run, mine, busy, error, send } = usePourView();
   const steps = stepsOf(run.cakeBatchId !== null);
   const at = steps.indexOf(run.step);
@@ -41,16 +39,15 @@ export function StepFoot({ found = {}, wait, action, children }: StepFootProps) 
         {next && next !== 'after' && (
           <Button
             size="large"
-            look="first"
+            look={quiet ? 'quiet' : 'first'}
             className="min-w-0 grow whitespace-normal!"
             disabled={busy || wait !== undefined}
             onClick={() => go(next)}
           >
-            {action ?? `Next: ${STEP_NAMES[next].toLowerCase()}`}
+            Next: {STEP_NAMES[next].toLowerCase()}
           </Button>
         )}
       </div>
-      {children}
     </div>
   );
 }

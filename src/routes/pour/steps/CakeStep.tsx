@@ -14,6 +14,7 @@ import { CakeCheckLink } from './CakeCheckLink.tsx';
 export function CakeStep() {
   const { batch, cakeOf, standing, mine } = usePourView();
   const { link } = standing;
+  const others = link?.findings.filter(({ rule }) => rule !== 'cake-check') ?? [];
   if (!cakeOf) return null;
   const judged = judgedOf(cakeOf);
   return (
@@ -28,16 +29,18 @@ export function CakeStep() {
         </p>
       </div>
       {mine && <CakeCheckLink cakeOf={cakeOf} />}
-      {link && link.findings.length > 0 && (
+      {link && others.length > 0 && (
         <div className="mt-4 max-w-xl">
-          <h3 className="text-h3">What else the link says</h3>
-          {link.findings.map((finding) => (
+          <h3 className="mb-3 text-h3">What else the link says</h3>
+          {others.map((finding) => (
             <FindingBlock key={finding.rule} finding={finding} />
           ))}
           <AcceptHold later={batch} answer={link} />
         </div>
       )}
-      <Caution>Taste and smell the beer first, never the cake of one that is off.</Caution>
+      <Caution>
+        Smell and taste the beer before the cake, and pour on no cake whose beer is off.
+      </Caution>
       <StepFoot />
       {mine && <OtherWays batch={batch} cakeOf={cakeOf} />}
     </>

@@ -46,11 +46,16 @@ export function RackedStep() {
         in.
       </Caution>
       {mine && !isRacked && (
-        <Button size="large" className="mt-4" onClick={() => setAsking(true)}>
+        <Button
+          look="first"
+          size="large"
+          className="mt-5 w-full max-w-xl"
+          onClick={() => setAsking(true)}
+        >
           It is racked
         </Button>
       )}
-      <StepFoot />
+      <StepFoot quiet={!isRacked} />
       {asking && <StageDialog batch={cakeOf} to="racked" onClose={() => setAsking(false)} />}
     </>
   );

@@ -15,36 +15,37 @@ import { VerdictBox } from '../wort/VerdictBox.tsx';
 export function WortStep() {
   const { batch, cakeOf, mine, standing } = usePourView();
   return (
-    <div className="wide:grid wide:grid-cols-2 wide:gap-x-10">
-      <div>
-        <BigTemperature />
-        <VerdictBox />
-        <div className="wide:hidden">
-          <CoolingPlot />
+    <>
+      <div className="wide:grid wide:grid-cols-2 wide:gap-x-10">
+        <div>
+          <BigTemperature />
+          <VerdictBox />
+          <div className="wide:hidden">
+            <CoolingPlot />
+          </div>
+          {mine && <ReadingEntry />}
+          <PourNow />
         </div>
-        {mine && <ReadingEntry />}
-        <PourNow />
-        <Caution>
-          Hot wort burns and kills yeast: keep hands, hoses and glass out of its way until it is
-          cool.
-        </Caution>
-        <StepFoot />
-      </div>
-      <div>
-        <div className="max-wide:hidden">
-          <CoolingPlot />
+        <div>
+          <div className="max-wide:hidden">
+            <CoolingPlot />
+          </div>
+          {mine && (
+            <div className="mt-4 flex flex-wrap items-end gap-x-4">
+              <CoolantField />
+              <ReadySignal />
+            </div>
+          )}
+          <ReadingList />
         </div>
-        {mine && (
-          <>
-            <CoolantField />
-            <ReadySignal />
-          </>
-        )}
-        <ReadingList />
-        {mine && cakeOf && standing.linkHolds.length > 0 && (
-          <OtherWays batch={batch} cakeOf={cakeOf} />
-        )}
       </div>
-    </div>
+      <Caution>
+        Hot wort burns and kills yeast: keep hands, hoses and glass out of its way until it is cool.
+      </Caution>
+      <StepFoot />
+      {mine && cakeOf && standing.linkHolds.length > 0 && (
+        <OtherWays batch={batch} cakeOf={cakeOf} />
+      )}
+    </>
   );
 }

@@ -16,7 +16,9 @@ export function OtherWays({ batch, cakeOf }: { batch: Batch; cakeOf: Batch }) {
     [board, batch, units],
   );
   if (!can.moveAcross || ways.length === 0) return null;
-  const isUnfit = cakeOf.cake?.check?.judged === 'unfit' || cakeOf.cake?.state !== 'bare';
+  const { cake } = cakeOf;
+  const isGone = cake !== null && cake.state !== 'bare' && cake.state !== 'growing';
+  const isUnfit = isGone || cake?.check?.judged === 'unfit';
   return (
     <details className="mt-6 max-w-xl border-t border-line pt-2" open={isUnfit}>
       <summary className="min-h-11 cursor-pointer py-2.5 font-medium">

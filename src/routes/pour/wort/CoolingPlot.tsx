@@ -1,4 +1,5 @@
 import { useId } from 'react';
+import type { PourAnswer } from '#shared/pour/check.ts';
 import { celsiusFromFahrenheit, fahrenheitFromCelsius } from '#shared/units/temperature.ts';
 import { format } from '#shared/units/quantity.ts';
 import { useBoardView } from '../../board/view/BoardView.tsx';
@@ -41,7 +42,7 @@ export function CoolingPlot() {
           height={PLOT.floor - PLOT.top + 6}
         />
       </clipPath>
-      <PourBand plot={plot} min={wort.window.minC} max={wort.window.maxC} />
+      <PourBand plot={plot} wort={wort} />
       {plot.marks.map((c) => (
         <text key={c} x={PLOT.left - 6} y={plot.y(c) + 4} textAnchor="end" className="fill-ink2">
           {Math.round(isF ? fahrenheitFromCelsius(c) : c)}
@@ -83,8 +84,12 @@ export function CoolingPlot() {
 const plotLabel = (count: number, last: string) =>
   `${count === 1 ? 'One reading' : `${count} readings`} against time, the last ${last}`;
 
-function PourBand({ plot, min, max }: { plot: Plot; min: number; max: number }) {
-  const [top, foot] = [plot.y(max), plot.y(min)];
+/** Room that the words take at the left; the ready line goes through them where it comes early. */
+const WORDS = 96;
+
+function PourBand({ plot, wort }: { plot: Plot; wort: PourAnswer }) {
+  const [top, foot] = [plot.y(wort.window.maxC), plot.y(wort.window.minC)];
+  const isEarly = wort.ready !== null && plot.x(wort.ready.at) < PLOT.left + WORDS;
   const width = PLOT.right - PLOT.left;
   return (
     <>
@@ -94,7 +99,12 @@ function PourBand({ plot, min, max }: { plot: Plot; min: number; max: number }) 
         className="stroke-pour"
         strokeWidth="1.5"
       />
-      <text x={PLOT.left + 6} y={(top + foot) / 2 + 5} className="fill-pour font-bold">
+      <text
+        x={isEarly ? PLOT.right - 6 : PLOT.left + 6}
+        y={(top + foot) / 2 + 5}
+        textAnchor={isEarly ? 'end' : 'start'}
+        className="fill-pour font-bold"
+      >
         pour window
       </text>
     </>

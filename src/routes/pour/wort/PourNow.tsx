@@ -66,7 +66,7 @@ function Locked({ onPoured }: { onPoured: () => void }) {
         Pour is locked{until}
       </p>
       {online ? <Override /> : <NoneCanClear />}
-      <p className="mt-3">
+      <p className="mt-3 -ml-4">
         <Button look="text" onClick={onPoured}>
           It is poured already: record it
         </Button>
