@@ -1,8 +1,11 @@
 import { Ellipsis } from 'lucide-react';
 import { useState } from 'react';
+import { useNavigate } from 'react-router-dom';
 import type { Batch } from '#shared/api/batch.ts';
+import { useBrewery } from '../../../app/useBrewery.ts';
 import { lazyPart } from '../../../app/lazyPart.tsx';
-import { Menu, MenuItem, MenuSeparator } from '../../../components/ui/Menu.tsx';
+import { useBrewery } from '../../../app/useBrewery.ts';
+import { Menu, MenuItem, MenuLink, MenuSeparator } from '../../../components/ui/Menu.tsx';
 import { OnWholeBoard, useBoardView } from '../view/BoardView.tsx';
 import { useBoardPanel } from '../view/useBoardPanel.ts';
 import { DeleteBatch } from './DeleteBatch.tsx';
@@ -20,6 +23,8 @@ export function BatchMenu({ batch }: { batch: Batch }) {
   const [asked, setAsked] = useState<Asked | null>(null);
   const { open } = useBoardPanel();
   const { can } = useBoardView();
+  const { path } = useBrewery();
+  const navigate = useNavigate();
   const close = () => setAsked(null);
   return (
     <>
@@ -32,6 +37,9 @@ export function BatchMenu({ batch }: { batch: Batch }) {
         }}
       >
         <MenuItem onSelect={() => open({ kind: 'batch', batchId: batch.id })}>Edit</MenuItem>
+        <MenuItem onSelect={() => void navigate(path(`batches/${batch.id}`))}>
+          Readings and cake
+        </MenuItem>
         {can.setStages && (
           <>
             <MenuItem onSelect={() => open({ kind: 'new', what: 'batch', likeId: batch.id })}>
@@ -43,6 +51,7 @@ export function BatchMenu({ batch }: { batch: Batch }) {
               </MenuItem>
             )}
             <MenuSeparator />
+            {batch.stage === 'pencilled' && batch.chainId !== null && <ToPour batch={batch} />}
             {nextStages(batch.stage).map((stage) => (
               <MenuItem key={stage} onSelect={() => setAsked(stage)}>
                 {STAGE_ACTIONS[stage].menu}
@@ -62,6 +71,11 @@ export function BatchMenu({ batch }: { batch: Batch }) {
       )}
     </>
   );
+}
+
+function ToPour({ batch }: { batch: Batch }) {
+  const { path } = useBrewery();
+  return <MenuLink to={path(`pour/${batch.id}`)}>Pour check</MenuLink>;
 }
 
 interface AskedDialogProps {
