@@ -64,10 +64,16 @@ export const closingQuery = queryOptions({
   staleTime: 0,
 });
 
-export function useCloseAccount() {
+/** @param onClosed also called where the page went away meanwhile: the stream may tell it first */
+export function useCloseAccount(onClosed: () => void | Promise<void>) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (body: AccountClosing) => requestNothing('POST', api.accountClosing, { body }),
+    async onSuccess() {
+      await onClosed();
+      client.clear();
+      client.setQueryData(sessionQuery.queryKey, null);
+    },
     onError: () => client.invalidateQueries(closingQuery),
   });
 }

@@ -56,8 +56,10 @@ export function useRemoveMember(slug: string) {
   });
 }
 
-export const useLeaveBrewery = (slug: string) =>
+/** @param onLeft also called where the page went away meanwhile: the stream may tell it first */
+export const useLeaveBrewery = (slug: string, onLeft: () => Promise<void>) =>
   useMutation({
     mutationFn: ({ version }: Of) =>
       requestNothing('DELETE', api.membership(slug), { ifMatch: version }),
+    onSuccess: onLeft,
   });

@@ -1,8 +1,6 @@
-import { useQueryClient } from '@tanstack/react-query';
 import { useId, useState, type FormEvent } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { useCloseAccount } from '../../api/account.ts';
-import { sessionQuery } from '../../api/session.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { fieldState } from '../../components/form/fieldState.ts';
 import { PasswordBox } from '../../components/form/PasswordBox.tsx';
@@ -18,9 +16,8 @@ interface ClosingFormProps {
 }
 
 export function ClosingForm({ losing, onClose }: ClosingFormProps) {
-  const close = useCloseAccount();
-  const client = useQueryClient();
   const navigate = useNavigate();
+  const close = useCloseAccount(() => navigate('/', { replace: true }));
   const online = useOnline();
   const id = useId();
   const [password, setPassword] = useState('');
@@ -29,16 +26,7 @@ export function ClosingForm({ losing, onClose }: ClosingFormProps) {
     : { fields: [], rest: null };
   const submit = (event: FormEvent) => {
     event.preventDefault();
-    close.mutate(
-      { password, losing },
-      {
-        async onSuccess() {
-          await navigate('/', { replace: true });
-          client.clear();
-          client.setQueryData(sessionQuery.queryKey, null);
-        },
-      },
-    );
+    close.mutate({ password, losing });
   };
   return (
     <form noValidate onSubmit={submit} className="space-y-4">

@@ -8,13 +8,13 @@ import type { MemberDialogProps } from './RoleDialog.tsx';
 
 export function LeaveBrewery({ member, onClose }: MemberDialogProps) {
   const { slug, name } = useBrewery();
-  const leave = useLeaveBrewery(slug);
   const client = useQueryClient();
   const navigate = useNavigate();
   const gone = async () => {
     await navigate('/breweries');
     await client.invalidateQueries(sessionQuery);
   };
+  const leave = useLeaveBrewery(slug, gone);
   return (
     <ConfirmDialog
       open
@@ -24,7 +24,7 @@ export function LeaveBrewery({ member, onClose }: MemberDialogProps) {
       keep="Stay"
       busy={leave.isPending}
       error={leave.error}
-      onConfirm={() => leave.mutate(member, { onSuccess: gone })}
+      onConfirm={() => leave.mutate(member)}
     >
       <p>
         You stop seeing {name}, and chains that stand on its board for you as a guest. What you did
