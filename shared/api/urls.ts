@@ -77,18 +77,18 @@ export const api = {
   batch: (slug: string, id: string) => at(slug, `/batches/${id}`),
   batchStage: (slug: string, id: string) => at(slug, `/batches/${id}/stage`),
   /** Readings, notes, events and the cake check of a batch. */
-  batchRecord: (slug: string, id: string) => `${b(slug)}/batches/${id}/record`,
-  readings: (slug: string, id: string) => `${b(slug)}/batches/${id}/readings`,
+  batchRecord: (slug: string, id: string) => at(slug, `/batches/${id}/record`),
+  readings: (slug: string, id: string) => at(slug, `/batches/${id}/readings`),
   reading: (slug: string, id: string, readingId: string) =>
-    `${b(slug)}/batches/${id}/readings/${readingId}`,
-  notes: (slug: string, id: string) => `${b(slug)}/batches/${id}/notes`,
-  note: (slug: string, id: string, noteId: string) => `${b(slug)}/batches/${id}/notes/${noteId}`,
-  events: (slug: string, id: string) => `${b(slug)}/batches/${id}/events`,
+    at(slug, `/batches/${id}/readings/${readingId}`),
+  notes: (slug: string, id: string) => at(slug, `/batches/${id}/notes`),
+  note: (slug: string, id: string, noteId: string) => at(slug, `/batches/${id}/notes/${noteId}`),
+  events: (slug: string, id: string) => at(slug, `/batches/${id}/events`),
   event: (slug: string, id: string, eventId: string) =>
-    `${b(slug)}/batches/${id}/events/${eventId}`,
-  cakeCheck: (slug: string, id: string) => `${b(slug)}/batches/${id}/cake-check`,
-  instruments: (slug: string) => `${b(slug)}/instruments`,
-  instrument: (slug: string, id: string) => `${b(slug)}/instruments/${id}`,
+    at(slug, `/batches/${id}/events/${eventId}`),
+  cakeCheck: (slug: string, id: string) => at(slug, `/batches/${id}/cake-check`),
+  instruments: (slug: string) => at(slug, '/instruments'),
+  instrument: (slug: string, id: string) => at(slug, `/instruments/${id}`),
   /** The link from the batch before to this one. */
   link: (slug: string, id: string) => at(slug, `/batches/${id}/link`),
   acceptance: (slug: string, id: string) => at(slug, `/batches/${id}/link/acceptance`),
