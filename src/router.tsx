@@ -27,6 +27,10 @@ const ofBrewery = {
       lazy: () => lazyPage(async () => (await import('./routes/pour/PourPage.tsx')).PourPage),
     },
     {
+      path: 'batches/:id',
+      lazy: () => lazyPage(async () => (await import('./routes/batch/BatchPage.tsx')).BatchPage),
+    },
+    {
       path: 'yeasts',
       lazy: () => lazyPage(async () => (await import('./routes/yeasts/YeastsPage.tsx')).YeastsPage),
     },

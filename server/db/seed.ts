@@ -9,6 +9,7 @@ import type { Db, Tx } from './client.ts';
 import { DEMO_BENCH, DEMO_CHAINS, type DemoBatch, type DemoChain } from './demo/batches.ts';
 import { PAST_CHAINS, PAST_SEASON } from './demo/pastSeason.ts';
 import { DEMO_BREWERY, DEMO_PASSWORD, DEMO_PEOPLE, DEMO_SEASON } from './demo/people.ts';
+import { addDemoReadings } from './demoReadings.ts';
 import { DEMO_VESSELS, DEMO_YEASTS, type VesselKey, type YeastKey } from './demo/stock.ts';
 import { DEMO_TALK } from './demo/talk.ts';
 import { brewery, houseRules, membership } from './schema/brewery.ts';
@@ -67,6 +68,7 @@ export async function seedDemo(db: Db, clock: Clock): Promise<void> {
     await addChains(place, DEMO_CHAINS);
     for (const [at, each] of DEMO_BENCH.entries()) await addBatch(place, each, null, at, false);
     await addTalk(place, people);
+    await addDemoReadings(place, people);
   });
 }
 

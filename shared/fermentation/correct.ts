@@ -55,5 +55,5 @@ export function valueOf(reading: Shown, instrument: Instrument | null): number {
 /** What is wrong with a sample's temperature, in words; null: nothing. */
 export const sampleFault = (sampleC: number | null): string | null =>
   sampleC !== null && !(sampleC >= 0 && sampleC <= HYDROMETER_MAX_C)
-    ? `Cool or warm the sample to between 0 and ${HYDROMETER_MAX_C} °C first: beyond it the correction is not known`
+    ? `Cool or warm the sample to between 0 and ${HYDROMETER_MAX_C} °C (32 and 104 °F) first: beyond it the correction is not known`
     : null;

@@ -144,7 +144,8 @@ describe('readings of a batch', () => {
       season.head.post(api.undo(season.slug), { changeId: (await board()).undo?.id });
     expect((await undo()).status).toBe(200);
     const second = await undo();
-    expect([second.status, second.body]).toMatchObject([409, { detail: 'Spare has readings since' }]);
+    expect(second.status).toBe(409);
+    expect((second.body as { detail: string }).detail).toMatch(/^Spare has readings since/);
     expect((await recordOf(spare)).readings).toHaveLength(1);
   });
 

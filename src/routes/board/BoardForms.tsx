@@ -1,7 +1,9 @@
 import { useState } from 'react';
 import { useIsGuestHere } from '../../api/board.ts';
 import { lazyPart } from '../../app/lazyPart.tsx';
+import { useBrewery } from '../../app/useBrewery.ts';
 import { Dialog } from '../../components/ui/Dialog.tsx';
+import { TextLink } from '../../components/ui/TextLink.tsx';
 import { BatchFormDialog } from '../batch-form/BatchFormDialog.tsx';
 import { ChainFormDialog } from '../chain-form/ChainFormDialog.tsx';
 import { BatchFacts } from './batch/BatchFacts.tsx';
@@ -44,11 +46,23 @@ function OpenedBatch({ batchId, onClose }: { batchId: string; onClose: () => voi
         <p className="text-ink2">Somebody deleted it, or the address is of another season.</p>
       </Dialog>
     );
-  const talk = !isGuest && now?.chainId && (
-    <FoldedTalk chainId={now.chainId} about={{ kind: 'batch', batchId }} />
+  const talk = !isGuest && now && (
+    <>
+      <ToRecord batchId={batchId} />
+      {now.chainId && <FoldedTalk chainId={now.chainId} about={{ kind: 'batch', batchId }} />}
+    </>
   );
   if (!board.me.can.editBatches) return <BatchFacts batch={batch} onClose={onClose} foot={talk} />;
   return <BatchFormDialog mode="edit" batch={batch} isGone={!now} onClose={onClose} foot={talk} />;
+}
+
+function ToRecord({ batchId }: { batchId: string }) {
+  const { path } = useBrewery();
+  return (
+    <p className="mb-4">
+      <TextLink to={path(`batches/${batchId}`)}>Readings, notes and the cake check</TextLink>
+    </p>
+  );
 }
 
 interface NewRowProps {

@@ -14,6 +14,7 @@ import { Page } from '../shell/Page.tsx';
 import { ChainHead } from './ChainHead.tsx';
 import { ChainPlots } from './ChainPlots.tsx';
 import { CourseTable } from './CourseTable.tsx';
+import { Drift } from './drift/Drift.tsx';
 import { ChainSide } from './side/ChainSide.tsx';
 
 /** One chain opened: what climbs along it, who is on it, what is said of it. */
@@ -73,6 +74,7 @@ function OpenedChain({ chain }: { chain: Chain }) {
             <CourseTable course={course} />
           </>
         )}
+        <Drift chainId={chain.id} />
       </main>
       <ChainSide chain={chain} />
       <BoardForms />

@@ -1,8 +1,6 @@
 import { Ellipsis } from 'lucide-react';
 import { useState } from 'react';
-import { useNavigate } from 'react-router-dom';
 import type { Batch } from '#shared/api/batch.ts';
-import { useBrewery } from '../../../app/useBrewery.ts';
 import { lazyPart } from '../../../app/lazyPart.tsx';
 import { useBrewery } from '../../../app/useBrewery.ts';
 import { Menu, MenuItem, MenuLink, MenuSeparator } from '../../../components/ui/Menu.tsx';
@@ -24,7 +22,6 @@ export function BatchMenu({ batch }: { batch: Batch }) {
   const { open } = useBoardPanel();
   const { can } = useBoardView();
   const { path } = useBrewery();
-  const navigate = useNavigate();
   const close = () => setAsked(null);
   return (
     <>
@@ -37,9 +34,7 @@ export function BatchMenu({ batch }: { batch: Batch }) {
         }}
       >
         <MenuItem onSelect={() => open({ kind: 'batch', batchId: batch.id })}>Edit</MenuItem>
-        <MenuItem onSelect={() => void navigate(path(`batches/${batch.id}`))}>
-          Readings and cake
-        </MenuItem>
+        <MenuLink to={path(`batches/${batch.id}`)}>Readings and cake</MenuLink>
         {can.setStages && (
           <>
             <MenuItem onSelect={() => open({ kind: 'new', what: 'batch', likeId: batch.id })}>

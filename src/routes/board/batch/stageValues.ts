@@ -8,7 +8,7 @@ import { written } from '../../../components/form/written.ts';
 /** What happened cannot lie in the future. */
 const notAfter = (day: Day | null, today: Day): Day => (day === null || day > today ? today : day);
 
-/** The plan's figures as a start for what was read; a day in the future becomes today. */
+/** The readings, else the plan's figures, as a start for what was read; a day in the future becomes today. */
 export function stageValues(
   batch: Batch,
   to: Stage,
@@ -27,7 +27,7 @@ export function stageValues(
         stage: to,
         brewedOn: notAfter(due, today),
         volumeL: number('volume', batch.read.volumeL ?? batch.volumeL),
-        og: number('gravity', batch.read.og ?? batch.og),
+        og: number('gravity', batch.read.og ?? batch.followed?.firstGravity ?? batch.og),
       };
     }
     case 'racked':
@@ -35,7 +35,7 @@ export function stageValues(
         stage: to,
         rackedOn: notAfter(rackDay(batch), today),
         volumeL: number('volume', batch.read.volumeL ?? batch.volumeL),
-        fg: number('gravity', batch.read.fg ?? batch.fg),
+        fg: number('gravity', batch.read.fg ?? batch.followed?.gravity ?? batch.fg),
       };
     case 'scrapped':
       return { stage: to, reason: '' };
