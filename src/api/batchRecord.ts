@@ -20,6 +20,7 @@ import { api } from '#shared/api/urls.ts';
 import { EVENT_WORDS, JUDGED_WORDS } from '#shared/record/readings.ts';
 import { newId } from '../app/newId.ts';
 import { KEPT } from '../kept/meta.ts';
+import { asTyped } from '../outbox/asTyped.ts';
 import { useOutbox } from '../outbox/useOutbox.ts';
 import { boardQuery } from './board.ts';
 import { request } from './client.ts';
@@ -92,7 +93,7 @@ const changeOf = (
 const UNIT_OF = { gravity: '', temperature: ' °C', ph: '' } as const;
 /** As it was typed, else as the instrument shows it. */
 const shownWords = ({ kind, shown, typed }: ReadingWrite): string =>
-  `${kind === 'ph' ? 'pH' : kind} ${typed.shown ?? `${shown}${UNIT_OF[kind]}`}`;
+  `${kind === 'ph' ? 'pH' : kind} ${asTyped(typed.shown) ?? `${shown}${UNIT_OF[kind]}`}`;
 
 const short = (text: string) => (text.length > 40 ? `${text.slice(0, 40)}…` : text);
 

@@ -12,6 +12,7 @@ import {
 import { api } from '#shared/api/urls.ts';
 import { newId } from '../app/newId.ts';
 import { KEPT } from '../kept/meta.ts';
+import { asTyped } from '../outbox/asTyped.ts';
 import { queueOrSend } from '../outbox/queueOrSend.ts';
 import { useOutbox } from '../outbox/useOutbox.ts';
 import { boardQuery } from './board.ts';
@@ -105,7 +106,7 @@ function wordsOf(command: PourCommand, name: string): string {
     case 'step':
       return `Pour of ${name}: ${STEPS[command.body.step]}`;
     case 'read':
-      return `Pour of ${name}: wort at ${command.body.typed.c ?? `${command.body.c} °C`}`;
+      return `Pour of ${name}: wort at ${asTyped(command.body.typed.c) ?? `${command.body.c} °C`}`;
     case 'withdraw':
       return `Pour of ${name}: a reading taken back`;
     case 'pour':

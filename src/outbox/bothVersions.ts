@@ -1,3 +1,4 @@
+import { asTyped } from './asTyped.ts';
 import type { Entry } from './entry.ts';
 import { isRecord } from './queue.ts';
 
@@ -49,7 +50,8 @@ function spaced(key: string): string {
 }
 
 function wordsOf(value: unknown, typed: unknown): string {
-  if (typeof typed === 'string' && typed !== '') return typed;
+  const text = asTyped(typed);
+  if (text !== null) return text;
   if (value === null || value === undefined || value === '') return '–';
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
   if (Array.isArray(value)) return value.map((one) => wordsOf(one, undefined)).join(', ') || '–';

@@ -39,10 +39,12 @@ export function NewRelease() {
 /** Once the page itself is there: the worker loads every other page for later. */
 function useRegistered() {
   useEffect(() => {
-    const timer = window.setTimeout(async () => {
+    const register = async () => {
       const { registerWorker } = await import('./registerWorker.ts');
       await registerWorker();
-    }, 2_000);
+    };
+    // Where the connection is gone by then, the next visit will do.
+    const timer = window.setTimeout(() => void register().catch(() => undefined), 2_000);
     return () => window.clearTimeout(timer);
   }, []);
 }

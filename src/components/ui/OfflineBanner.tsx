@@ -1,5 +1,5 @@
-import { useQueryClient } from '@tanstack/react-query';
-import { useEffect } from 'react';
+import { useQueryClient, type QueryCache } from '@tanstack/react-query';
+import { useEffect, useSyncExternalStore } from 'react';
 import { setReachable } from '../../api/connection.ts';
 import { api } from '#shared/api/urls.ts';
 import { useOnline } from '../../app/useOnline.ts';
@@ -10,34 +10,45 @@ export const OFFLINE_SENTENCE =
 
 const LATER = 'Brew-day entries are kept and sent later; the plan waits.';
 
-/** How old the oldest thing is that the page shows; null: it is not kept here. */
-function useAge(online: boolean): string | null {
-  const client = useQueryClient();
-  if (online) return null;
-  const shown = client.getQueryCache().findAll({
+/** When the oldest thing was read that the page shows, ms since 1970; null: it is not kept here. */
+function readAt(cache: QueryCache): number | null {
+  const shown = cache.findAll({
     type: 'active',
     predicate: ({ meta, queryKey, state }) =>
       meta?.kept === true && queryKey[0] !== 'session' && state.dataUpdatedAt > 0,
   });
-  if (shown.length === 0) return null;
-  return asOf(Math.min(...shown.map(({ state }) => state.dataUpdatedAt)));
+  return shown.length === 0 ? null : Math.min(...shown.map(({ state }) => state.dataUpdatedAt));
+}
+
+/** How old it is, in words. */
+function useAge(): string | null {
+  const cache = useQueryClient().getQueryCache();
+  const at = useSyncExternalStore(
+    (look) => cache.subscribe(look),
+    () => readAt(cache),
+  );
+  return at === null ? null : asOf(at);
 }
 
 /** Says that the connection is gone and looks for it again. */
 export function OfflineBanner() {
   const online = useOnline();
   useComeBack(online);
-  const age = useAge(online);
   return (
     <div aria-live="polite" className="max-tablet:sticky max-tablet:top-0 max-tablet:z-20">
-      {!online && (
-        <p className="bg-mind-l px-7 py-2 text-center font-semibold text-mind max-tablet:px-4">
-          {age === null
-            ? OFFLINE_SENTENCE
-            : `No connection. You can read what is here, as it was ${age}. ${LATER}`}
-        </p>
-      )}
+      {!online && <Offline />}
     </div>
+  );
+}
+
+function Offline() {
+  const age = useAge();
+  return (
+    <p className="bg-mind-l px-7 py-2 text-center font-semibold text-mind max-tablet:px-4">
+      {age === null
+        ? OFFLINE_SENTENCE
+        : `No connection. You can read what is here, as it was ${age}. ${LATER}`}
+    </p>
   );
 }
 

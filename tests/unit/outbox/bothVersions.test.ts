@@ -17,10 +17,15 @@ const stopped = (body: object, current: unknown): Entry => ({
 });
 
 test('both versions are shown where they differ, as they were typed', () => {
-  const mine = { shown: 1.012, notes: '', typed: { shown: '3.1 °P' }, judged: 'fit' };
+  const mine = {
+    shown: 1.012,
+    notes: '',
+    typed: { shown: { text: '3,1', unit: '°P' } },
+    judged: 'fit',
+  };
   const theirs = { id: 'r', version: 2, shown: 1.02, notes: 'Hazy', typed: {}, judged: 'fit' };
   expect(bothVersions(stopped(mine, theirs))).toEqual([
-    { label: 'Reading', mine: '3.1 °P', theirs: '1.02' },
+    { label: 'Reading', mine: '3,1 °P', theirs: '1.02' },
     { label: 'Notes', mine: '–', theirs: 'Hazy' },
   ]);
 });
