@@ -1,0 +1,39 @@
+import type { Page } from '@playwright/test';
+import { expect } from './test.ts';
+
+/** Waits until the pages are on the device, as they are a moment after the first visit. */
+export async function pagesAreKept(page: Page): Promise<void> {
+  await page.evaluate(async () => {
+    const { active } = await navigator.serviceWorker.ready;
+    if (!active) throw new Error('The service worker is not at work');
+    if (active.state !== 'activated')
+      await new Promise((done) => active.addEventListener('statechange', done, { once: true }));
+  });
+}
+
+/** Keys of what a store of this device holds. */
+export const keptKeys = (page: Page, database: string, store: string): Promise<string[]> =>
+  page.evaluate(
+    ([name, of]) =>
+      new Promise<string[]>((resolve, reject) => {
+        const opening = indexedDB.open(name);
+        opening.onerror = () => reject(opening.error);
+        opening.onsuccess = () => {
+          const db = opening.result;
+          if (!db.objectStoreNames.contains(of)) return resolve([]);
+          const asked = db.transaction(of).objectStore(of).getAllKeys();
+          asked.onsuccess = () => {
+            db.close();
+            resolve(asked.result.map(String));
+          };
+        };
+      }),
+    [database, store] as const,
+  );
+
+/** The mark at the top of the page that tells how much waits. */
+export const waiting = (page: Page) =>
+  page.getByRole('banner').getByRole('button', { name: /^\d+ (waiting|not taken)$/ });
+
+export const nothingWaits = (page: Page) =>
+  expect(waiting(page), 'everything is sent').toHaveCount(0, { timeout: 30_000 });
