@@ -1,4 +1,5 @@
 import { cpus, loadavg } from 'node:os';
+import { batchPage } from './batchPage.ts';
 import { board } from './board.ts';
 import { cooling } from './cooling.ts';
 import { drag } from './drag.ts';
@@ -9,7 +10,7 @@ import { pages } from './pages.ts';
 import type { Part, Row } from './row.ts';
 
 /** Each part of the bench; one may be asked for by name. */
-const PARTS: readonly Part[] = [engine, cooling, board, moves, pages, drag, live];
+const PARTS: readonly Part[] = [engine, cooling, board, moves, pages, drag, batchPage, live];
 
 async function main(names: readonly string[]): Promise<void> {
   const unknown = names.filter((name) => !PARTS.some((part) => part.name === name));

@@ -1,9 +1,19 @@
 import clsx from 'clsx';
 import type { ReactNode } from 'react';
 
-export function Card({ children, className }: { children: ReactNode; className?: string }) {
+interface CardProps {
+  children: ReactNode;
+  className?: string;
+  /** Makes it a place that one can go to by name. */
+  label?: string;
+}
+
+export function Card({ children, className, label }: CardProps) {
   return (
-    <section className={clsx('rounded-card border-[1.5px] border-line bg-paper p-5', className)}>
+    <section
+      {...(label !== undefined && { 'aria-label': label })}
+      className={clsx('rounded-card border-[1.5px] border-line bg-paper p-5', className)}
+    >
       {children}
     </section>
   );

@@ -34,7 +34,9 @@ export function CakeCheckPanel({ batch, record }: CakeCheckPanelProps) {
       aria-label="Racking and cake check"
       className="w-[404px] shrink-0 border-l border-line bg-paper px-6 pt-5 pb-10 max-wide:w-auto max-wide:border-t max-wide:border-l-0 max-tablet:px-[18px] print:hidden"
     >
-      <h2 className="font-display text-shelf font-bold tracking-[-.02em]">Racking and cake check</h2>
+      <h2 className="font-display text-shelf font-bold tracking-[-.02em]">
+        Racking and cake check
+      </h2>
       <p className="mt-0.5 mb-4 text-small text-ink2">
         {batch.cake === null
           ? 'There is no cake to judge until it is brewed.'

@@ -70,7 +70,10 @@ function Colour({ value }: { value: (typeof CAKE_COLOURS)[number] }) {
   const { label, ground } = COLOUR_WORDS[value];
   return (
     <>
-      <i aria-hidden className={clsx('size-5 rounded-[5px] border-[1.5px] border-ink/40', ground)} />
+      <i
+        aria-hidden
+        className={clsx('size-5 rounded-[5px] border-[1.5px] border-ink/40', ground)}
+      />
       {label}
     </>
   );

@@ -36,7 +36,9 @@ function useFacts(check: CakeCheck): Fact[] {
   const faults = check.faults.map((one) => FAULT_WORDS[one]).join(', ');
   const all: (Fact | null)[] = [
     { term: 'Beer', value: check.tasted === 'clean' ? 'clean' : `off${faults && `: ${faults}`}` },
-    check.volumeL === null ? null : { term: 'Volume', value: format('volume', check.volumeL, units) },
+    check.volumeL === null
+      ? null
+      : { term: 'Volume', value: format('volume', check.volumeL, units) },
     mass === null ? null : { term: 'Mass', value: format('mass', mass, units) },
     check.layers && { term: 'Layers', value: LAYER_WORDS[check.layers] },
     check.colour && { term: 'Colour', value: COLOUR_WORDS[check.colour].label },

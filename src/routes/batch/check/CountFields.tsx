@@ -36,7 +36,8 @@ function Counted() {
   const { count } = useWatch() as Values;
   const [living, dead] = [count.living.value, count.dead.value];
   const [squares, dilution] = [count.squares.value, count.dilution.value];
-  if (living === null || dead === null || living < 0 || dead < 0 || living + dead === 0) return null;
+  if (living === null || dead === null || living < 0 || dead < 0 || living + dead === 0)
+    return null;
   const cells =
     squares !== null && squares > 0 && dilution !== null && dilution > 0
       ? cellsPerMl(living + dead, squares, dilution)
@@ -49,7 +50,8 @@ function Counted() {
       alone, 95 %)
       {cells !== null && (
         <>
-          , <b>{billions(cells)} billion cells/mL</b> ± {percent(1.96 * countError(living + dead))} %
+          , <b>{billions(cells)} billion cells/mL</b> ± {percent(1.96 * countError(living + dead))}{' '}
+          %
         </>
       )}
       .{isExcluded && ' Large breweries use none with 5 % dead or more (MEBAK M-350.18.518).'}

@@ -1,4 +1,4 @@
-import { useMemo } from 'react';
+import { useMemo, useState } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import type { BatchRecord } from '#shared/api/reading.ts';
 import { BAND_BASIS } from '#shared/fermentation/band.ts';
@@ -25,9 +25,10 @@ export function FermentationCard({ batch, record }: FermentationCardProps) {
   const { timeZone } = board.brewery;
   const chain = index.chain(batch.chainId ?? '');
   const yeast = index.yeasts.get(chain?.yeastId ?? batch.yeastId ?? '');
+  const [now] = useState(() => Date.now());
   const drawn = useMemo(
-    () => drawnOf({ batch, record, yeast, timeZone, now: Date.now() }),
-    [batch, record, yeast, timeZone],
+    () => drawnOf({ batch, record, yeast, timeZone, now }),
+    [batch, record, yeast, timeZone, now],
   );
   const warnings = warningsOf(batch, yeast, sayIn(units));
   return (

@@ -12,7 +12,10 @@ export function axisOf(values: readonly number[], step: number, least: number): 
   const high = Math.max(Math.ceil(highest(values) / step - 1e-9) * step, low + least);
   const count = Math.round((high - low) / step);
   const every = Math.ceil(count / 6);
-  const ticks = Array.from({ length: Math.floor(count / every) + 1 }, (_, at) => low + at * every * step);
+  const ticks = Array.from(
+    { length: Math.floor(count / every) + 1 },
+    (_, at) => low + at * every * step,
+  );
   return { low, high, ticks };
 }
 

@@ -105,13 +105,20 @@ function marksOf(batch: Batch, record: BatchRecord, when: When): Mark[] {
   const marks: Mark[] = record.events.flatMap(({ kind, doneAt, text }) =>
     doneAt === null ? [] : [{ day: dayAt(doneAt), words: eventWords(kind, text), kind: 'event' }],
   );
-  if (record.pouredAt !== null) marks.push({ day: dayAt(record.pouredAt), words: 'poured', kind: 'pour' });
+  if (record.pouredAt !== null)
+    marks.push({ day: dayAt(record.pouredAt), words: 'poured', kind: 'pour' });
   if (racked !== null) marks.push({ day: dayOf(racked), words: 'racked', kind: 'rack' });
-  else if (batch.stage === 'fermenting') marks.push({ day: dayOf(now), words: 'now', kind: 'today' });
+  else if (batch.stage === 'fermenting')
+    marks.push({ day: dayOf(now), words: 'now', kind: 'today' });
   return marks.filter(({ day }) => day >= 0 && day <= days + 0.01);
 }
 
-const EVENTS = { 'dry-hop': 'dry hops in', addition: 'added', 'yeast-taken': 'yeast taken', other: '' };
+const EVENTS = {
+  'dry-hop': 'dry hops in',
+  addition: 'added',
+  'yeast-taken': 'yeast taken',
+  other: '',
+};
 
 const eventWords = (kind: keyof typeof EVENTS, text: string): string =>
   [EVENTS[kind], text].filter(Boolean).join(', ');

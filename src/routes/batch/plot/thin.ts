@@ -8,7 +8,8 @@ export function thinned(points: readonly Point[], most = 400): readonly Point[] 
   if (points.length <= most) return points;
   const size = Math.ceil(points.length / (most / 4));
   const kept: Point[] = [];
-  for (let at = 0; at < points.length; at += size) kept.push(...extremes(points.slice(at, at + size)));
+  for (let at = 0; at < points.length; at += size)
+    kept.push(...extremes(points.slice(at, at + size)));
   return kept;
 }
 

@@ -41,7 +41,11 @@ export function ReadingDialog({ batch, reading, like, instruments, onClose }: Re
   const { timeZone } = useBoardView().board.brewery;
   const { add, edit } = useReadings(slug, batch.id);
   const [deleting, setDeleting] = useState(false);
-  const start = like ?? { kind: 'gravity' as const, method: 'hydrometer' as const, instrumentId: null };
+  const start = like ?? {
+    kind: 'gravity' as const,
+    method: 'hydrometer' as const,
+    instrumentId: null,
+  };
   const [values] = useState(() =>
     readingValues(reading, start, { at: new Date().toISOString(), timeZone }, units),
   );

@@ -26,7 +26,7 @@ export function ReadingsCard({ batch, record }: ReadingsCardProps) {
   const [edited, setEdited] = useState<Reading | 'new' | null>(null);
   const { readings, instruments } = record;
   return (
-    <Card>
+    <Card label="Readings">
       <div className="mb-3 flex flex-wrap items-center gap-3">
         <CardTitle>Readings</CardTitle>
         <span className="grow text-small text-ink2">

@@ -9,7 +9,13 @@ import { VerdictPill } from '../../../components/drawn/VerdictPill.tsx';
 import { TextLink } from '../../../components/ui/TextLink.tsx';
 import { useBoardView } from '../../board/view/BoardView.tsx';
 import { drawnVessel, vesselOf } from '../../board/view/drawing.ts';
-import { countedFindings, gravityStep, shortReason, stageLine, volumeOf } from '../../board/view/words.ts';
+import {
+  countedFindings,
+  gravityStep,
+  shortReason,
+  stageLine,
+  volumeOf,
+} from '../../board/view/words.ts';
 
 /** The batch itself: its vessel large on the shelf, what it came from and what comes after. */
 export function BatchSide({ batch }: { batch: Batch }) {
@@ -91,8 +97,10 @@ function useCakeWords(batch: Batch): { name: string; more: string } {
   const measured = batch.cake?.measured;
   const generation = judged.generation.get(batch.id) ?? null;
   const more = generation === null ? '' : `gen ${generation}`;
-  if (measured?.volumeL) return { name: `${format('volume', measured.volumeL, units)} cake`, more: `${more}, measured` };
-  if (measured?.massKg) return { name: `${format('mass', measured.massKg, units)} cake`, more: `${more}, weighed` };
+  if (measured?.volumeL)
+    return { name: `${format('volume', measured.volumeL, units)} cake`, more: `${more}, measured` };
+  if (measured?.massKg)
+    return { name: `${format('mass', measured.massKg, units)} cake`, more: `${more}, weighed` };
   const mates = batch.chainId === null ? [] : index.batchesOf(batch.chainId);
   const next = mates[mates.findIndex(({ id }) => id === batch.id) + 1];
   const litres = next ? (judged.links.get(next.id)?.cake.volumeL ?? null) : null;
@@ -121,7 +129,9 @@ function PouredOnto({ batch }: { batch: Batch }) {
         findings={countedFindings(link)}
         unchecked={link.unchecked.length}
       />
-      <p className="mt-1 text-small text-ink2">{shortReason(link, gravityStep(before, batch, units))}</p>
+      <p className="mt-1 text-small text-ink2">
+        {shortReason(link, gravityStep(before, batch, units))}
+      </p>
     </div>
   );
 }
@@ -152,7 +162,9 @@ function NextOnIt({ batch }: { batch: Batch }) {
         findings={countedFindings(link)}
         unchecked={link.unchecked.length}
       />
-      <p className="mt-1 text-small text-ink2">{shortReason(link, gravityStep(batch, next, units))}</p>
+      <p className="mt-1 text-small text-ink2">
+        {shortReason(link, gravityStep(batch, next, units))}
+      </p>
     </div>
   );
 }

@@ -69,13 +69,24 @@ function Plot({ figure, points }: { figure: Figure; points: readonly DriftPoint[
                 className="fill-white stroke-ink"
                 strokeWidth="2.2"
               />
-              <text x={x(at)} y={y(value) - 9} textAnchor="middle" className="fill-ink text-[13px] font-bold">
+              <text
+                x={x(at)}
+                y={y(value) - 9}
+                textAnchor="middle"
+                className="fill-ink text-[13px] font-bold"
+              >
                 {Math.round(value)}
               </text>
             </g>
           ))}
           {points.map(({ generation }, at) => (
-            <text key={at} x={x(at)} y={HEIGHT - 2} textAnchor="middle" className="fill-ink2 text-[12px]">
+            <text
+              key={at}
+              x={x(at)}
+              y={HEIGHT - 2}
+              textAnchor="middle"
+              className="fill-ink2 text-[12px]"
+            >
               {generation === null ? '?' : `gen ${generation}`}
             </text>
           ))}
@@ -99,7 +110,11 @@ function Table({ points }: { points: readonly DriftPoint[] }) {
               Generation
             </th>
             {FIGURES.map(({ title }) => (
-              <th key={title} scope="col" className="border-b border-edge px-3 py-1.5 font-semibold">
+              <th
+                key={title}
+                scope="col"
+                className="border-b border-edge px-3 py-1.5 font-semibold"
+              >
                 {title}
               </th>
             ))}
