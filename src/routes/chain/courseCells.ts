@@ -47,7 +47,13 @@ export function cellsOf(
     known(fg, (sg) => gravityText(sg, units) + read(point.isFgRead)),
     known(point.srm, (srm) => format('colour', srm, units)),
     known(point.ibu, (ibu) => format('bitterness', ibu, units)),
-    ofCake(known(alive, ({ cells }) => `${cellsText(cells.likely)} (${cellsSpan(cells)})`)),
+    ofCake(
+      known(
+        alive,
+        ({ cells }) =>
+          `${cellsText(cells.likely)} (${cellsSpan(cells)})${step?.link.cake.measured ? ', measured' : ''}`,
+      ),
+    ),
     ofCake(known(alive, ({ need }) => cellsText(need))),
     ofCake(
       known(

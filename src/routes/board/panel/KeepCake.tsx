@@ -8,7 +8,7 @@ import { useBoardView } from '../view/BoardView.tsx';
 import { countedFindings } from '../view/words.ts';
 import { InlineQuantity } from './InlineQuantity.tsx';
 import { KeepBar } from './KeepBar.tsx';
-import { enoughWords, surplusWords, thumbWords } from './keepWords.ts';
+import { enoughWords, measuredWords, surplusWords, thumbWords } from './keepWords.ts';
 import { PanelPart } from './PanelFrame.tsx';
 import type { Kept, LinkDraft } from './useLinkDraft.ts';
 import { useSaveKept, type SaveKept } from './useSaveKept.ts';
@@ -30,7 +30,12 @@ export function KeepCake({ draft }: { draft: LinkDraft }) {
     );
   const kept = answer.keep.keptL ?? whole;
   const mayChange = can.editBatches && later.stage === 'pencilled';
-  const notes = [enoughWords(answer), surplusWords(answer), thumbWords(answer, units)];
+  const notes = [
+    measuredWords(draft.earlier, units),
+    enoughWords(answer),
+    surplusWords(answer),
+    thumbWords(answer, units),
+  ];
   return (
     <PanelPart title="How much cake to keep">
       <KeepBar

@@ -1,3 +1,4 @@
+import type { Batch } from '#shared/api/batch.ts';
 import type { UnitPrefs } from '#shared/api/units.ts';
 import type { Interval, LinkAnswer } from '#shared/rules/answer.ts';
 import { format } from '#shared/units/quantity.ts';
@@ -14,6 +15,22 @@ export function enoughWords({ cake, need, keep }: LinkAnswer): string {
   if (keep.ratio !== null) parts.push(`what is kept has ${times(keep.ratio)} ×`);
   return parts.length > 0 ? `${parts.join('; ')}.` : '';
 }
+
+/** Which figures of the cake were measured, so that nobody takes an estimate for a reading. */
+export function measuredWords({ cake }: Pick<Batch, 'cake'>, units: UnitPrefs): string {
+  const { volumeL, massKg, viability, cellsPerMl } = cake?.measured ?? NOTHING;
+  const parts = [
+    volumeL === null ? [] : format('volume', volumeL, units),
+    massKg === null ? [] : format('mass', massKg, units),
+    viability === null ? [] : `${Math.round(viability * 100)} % alive`,
+    cellsPerMl === null ? [] : `${Number((cellsPerMl / 1e9).toPrecision(2))} billion cells/mL`,
+  ].flat();
+  return parts.length === 0
+    ? 'All of this is estimated; nothing of the cake was measured.'
+    : `Measured: ${parts.join(', ')}. The rest is estimated.`;
+}
+
+const NOTHING = { volumeL: null, massKg: null, viability: null, cellsPerMl: null };
 
 /** What may be done with the rest, as the advice on this link has it. */
 export const surplusWords = ({ advice }: LinkAnswer): string | undefined =>
