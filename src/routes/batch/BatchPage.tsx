@@ -3,6 +3,7 @@ import { useParams } from 'react-router-dom';
 import type { Batch } from '#shared/api/batch.ts';
 import { sentenceOf } from '../../api/errors.ts';
 import { useBatchRecord } from '../../api/batchRecord.ts';
+import { KeptOffline } from '../../app/keptOffline.ts';
 import { useBrewery } from '../../app/useBrewery.ts';
 import { useTitle } from '../../app/useTitle.ts';
 import { Button } from '../../components/ui/Button.tsx';
@@ -66,9 +67,11 @@ function OpenedBatch({ batch }: { batch: Batch }) {
             <>
               <FermentationCard batch={batch} record={record} />
               <PlannedAndRead batch={batch} />
-              <ReadingsCard batch={batch} record={record} />
-              <EventsCard batch={batch} events={record.events} />
-              <NotesCard batch={batch} notes={record.notes} />
+              <KeptOffline value>
+                <ReadingsCard batch={batch} record={record} />
+                <EventsCard batch={batch} events={record.events} />
+                <NotesCard batch={batch} notes={record.notes} />
+              </KeptOffline>
               <HistoryCard batchId={batch.id} />
             </>
           ) : error ? (
@@ -83,7 +86,11 @@ function OpenedBatch({ batch }: { batch: Batch }) {
           )}
         </div>
       </main>
-      {record && <CakeCheckPanel batch={batch} record={record} />}
+      {record && (
+        <KeptOffline value>
+          <CakeCheckPanel batch={batch} record={record} />
+        </KeptOffline>
+      )}
       <BoardForms />
     </div>
   );

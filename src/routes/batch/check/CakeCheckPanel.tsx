@@ -3,6 +3,7 @@ import type { Batch } from '#shared/api/batch.ts';
 import type { BatchRecord } from '#shared/api/reading.ts';
 import { formatDay } from '#shared/units/day.ts';
 import { useCakeCheck } from '../../../api/batchRecord.ts';
+import { KeptOffline } from '../../../app/keptOffline.ts';
 import { lazyPart } from '../../../app/lazyPart.tsx';
 import { Button } from '../../../components/ui/Button.tsx';
 import { ConfirmDialog } from '../../../components/ui/ConfirmDialog.tsx';
@@ -25,10 +26,9 @@ interface CakeCheckPanelProps {
 
 /** Racking, and the judgement of the cake: the form, or what was signed. */
 export function CakeCheckPanel({ batch, record }: CakeCheckPanelProps) {
-  const { board, can } = useBoardView();
+  const { board, can, mayWriteDown: mayWrite } = useBoardView();
   const [isWriting, setWriting] = useState(false);
   const { check } = record;
-  const mayWrite = can.setStages;
   return (
     <aside
       aria-label="Racking and cake check"
@@ -42,7 +42,7 @@ export function CakeCheckPanel({ batch, record }: CakeCheckPanelProps) {
           ? 'There is no cake to judge until it is brewed.'
           : `${formatDay(batch.read.rackedOn ?? board.today)}, as the beer comes off the cake.`}
       </p>
-      {batch.stage === 'fermenting' && mayWrite && <RackButton batch={batch} />}
+      {batch.stage === 'fermenting' && can.setStages && <RackButton batch={batch} />}
       {batch.cake !== null &&
         (check && !isWriting ? (
           <>
@@ -78,7 +78,9 @@ function RackButton({ batch }: { batch: Batch }) {
       </Button>
       {isOpen && (
         <OnWholeBoard>
-          <StageDialog batch={batch} to="racked" onClose={() => setOpen(false)} />
+          <KeptOffline value={false}>
+            <StageDialog batch={batch} to="racked" onClose={() => setOpen(false)} />
+          </KeptOffline>
         </OnWholeBoard>
       )}
     </>

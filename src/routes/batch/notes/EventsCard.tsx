@@ -19,7 +19,7 @@ interface EventsCardProps {
 
 /** Dry hops, additions and yeast taken, planned and done. */
 export function EventsCard({ batch, events }: EventsCardProps) {
-  const { can } = useBoardView();
+  const { mayWriteDown } = useBoardView();
   const [edited, setEdited] = useState<BatchEvent | 'new' | null>(null);
   return (
     <Card>
@@ -32,12 +32,12 @@ export function EventsCard({ batch, events }: EventsCardProps) {
             <Event
               key={event.id}
               event={event}
-              {...(can.setStages && { onEdit: () => setEdited(event) })}
+              {...(mayWriteDown && { onEdit: () => setEdited(event) })}
             />
           ))}
         </ul>
       )}
-      {can.setStages && (
+      {mayWriteDown && (
         <Button look="quiet" size="small" className="mt-3" onClick={() => setEdited('new')}>
           Add something
         </Button>

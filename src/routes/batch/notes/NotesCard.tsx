@@ -21,7 +21,7 @@ interface NotesCardProps {
 
 /** What was seen, smelt and thought while it fermented, newest first. */
 export function NotesCard({ batch, notes }: NotesCardProps) {
-  const { can, board } = useBoardView();
+  const { mayWriteDown, board } = useBoardView();
   const [edited, setEdited] = useState<string | null>(null);
   const done = () => setEdited(null);
   return (
@@ -42,13 +42,13 @@ export function NotesCard({ batch, notes }: NotesCardProps) {
               key={note.id}
               batch={batch}
               note={note}
-              {...(can.setStages &&
+              {...(mayWriteDown &&
                 note.by.personId === board.me.personId && { onEdit: () => setEdited(note.id) })}
             />
           ),
         )}
       </ul>
-      {can.setStages &&
+      {mayWriteDown &&
         (edited === 'new' ? (
           <div className="mt-3">
             <NoteForm batch={batch} note={null} onDone={done} />
@@ -69,10 +69,10 @@ interface NoteProps {
 }
 
 function Note({ batch, note, onEdit }: NoteProps) {
-  const { board, can } = useBoardView();
+  const { board, mayWriteDown } = useBoardView();
   const { timeZone } = board.brewery;
   const [deleting, setDeleting] = useState(false);
-  const mayDelete = onEdit !== undefined || (can.setStages && board.me.role === 'head-brewer');
+  const mayDelete = onEdit !== undefined || (mayWriteDown && board.me.role === 'head-brewer');
   return (
     <li>
       <p className="text-small text-ink2">

@@ -2,6 +2,7 @@ import { Download, Plus } from 'lucide-react';
 import { useState } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import type { BatchRecord, Reading } from '#shared/api/reading.ts';
+import { KeptOffline } from '../../../app/keptOffline.ts';
 import { lazyPart } from '../../../app/lazyPart.tsx';
 import { Button } from '../../../components/ui/Button.tsx';
 import { Card, CardTitle } from '../../../components/ui/Card.tsx';
@@ -22,7 +23,7 @@ interface ReadingsCardProps {
 
 /** Every reading of a batch: written down, put right, handed over as a file. */
 export function ReadingsCard({ batch, record }: ReadingsCardProps) {
-  const { can } = useBoardView();
+  const { can, mayWriteDown } = useBoardView();
   const [edited, setEdited] = useState<Reading | 'new' | null>(null);
   const { readings, instruments } = record;
   return (
@@ -32,14 +33,12 @@ export function ReadingsCard({ batch, record }: ReadingsCardProps) {
         <span className="grow text-small text-ink2">
           {readings.length > 0 && `${readings.length} in all`}
         </span>
-        {can.setStages && (
-          <>
-            <InstrumentsButton batch={batch} record={record} />
-            <Button look="first" size="small" onClick={() => setEdited('new')}>
-              <Plus size={16} aria-hidden />
-              Log a reading
-            </Button>
-          </>
+        {can.setStages && <InstrumentsButton batch={batch} record={record} />}
+        {mayWriteDown && (
+          <Button look="first" size="small" onClick={() => setEdited('new')}>
+            <Plus size={16} aria-hidden />
+            Log a reading
+          </Button>
         )}
         {readings.length > 0 && <ExportButton batch={batch} record={record} />}
       </div>
@@ -48,7 +47,7 @@ export function ReadingsCard({ batch, record }: ReadingsCardProps) {
           Nothing is read yet. Two gravities, 48 hours apart, tell that a beer is done.
         </p>
       ) : (
-        <ReadingsTable record={record} {...(can.setStages && { onEdit: setEdited })} />
+        <ReadingsTable record={record} {...(mayWriteDown && { onEdit: setEdited })} />
       )}
       {edited !== null && (
         <ReadingDialog
@@ -71,11 +70,13 @@ function InstrumentsButton({ batch, record }: ReadingsCardProps) {
         Instruments
       </Button>
       {isOpen && (
-        <InstrumentsDialog
-          batchId={batch.id}
-          instruments={record.instruments}
-          onClose={() => setOpen(false)}
-        />
+        <KeptOffline value={false}>
+          <InstrumentsDialog
+            batchId={batch.id}
+            instruments={record.instruments}
+            onClose={() => setOpen(false)}
+          />
+        </KeptOffline>
       )}
     </>
   );
