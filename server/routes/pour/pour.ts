@@ -9,6 +9,7 @@ import { pourEvent, pourRun } from '../../db/schema/pour.ts';
 import { demandMade } from '../../http/create.ts';
 import { invalidField, problem } from '../../problems.ts';
 import { dayIn } from '../../today.ts';
+import { renewFollowed } from '../batch-record/followed.ts';
 import { setStage } from '../batches/stage.ts';
 import { one } from '../board/find.ts';
 import { holdsAt } from './clearance.ts';
@@ -27,36 +28,15 @@ export const recordPour =
     if (scene.pour?.id === body.id) return null;
     if (scene.pour) throw problem('pour-over', { detail: 'The wort is poured' });
     const batch = one(hand.board.batches, run.batchId);
-    const told = asTold(body, hand.now);
-    const at = happenedAt(told);
+    const at = happenedAt(asTold(body, hand.now));
     const { judged, clearanceId } = judgedAt(scene, at);
-    const reading = countedUntil(scene.readings, at).at(-1);
-    demandMade(
-      await hand.tx
-        .insert(pourEvent)
-        .values({
-          id: body.id,
-          runId: run.id,
-          batchId: run.batchId,
-          cakeBatchId: run.cakeBatchId,
-          ...told,
-          personId: hand.member.person.id,
-          readingId: reading?.id ?? null,
-          clearanceId,
-          volumeL: body.volumeL,
-          og: body.og,
-          typed: body.typed,
-          judged,
-          cleared: clearanceId !== null,
-        })
-        .onConflictDoNothing({ target: pourEvent.id })
-        .returning({ id: pourEvent.id }),
-    );
+    await insertPour(scene, body, at, { judged, clearanceId });
     await hand.tx
       .update(pourRun)
       .set({ state: 'poured', closedAt: at, step: 'after', version: sql`${pourRun.version} + 1` })
       .where(eq(pourRun.id, run.id));
     await brew(scene, batch, body, at);
+    await renewFollowed(hand.tx, run.batchId);
     await putBy(scene, body, at);
     return {
       what: sentence(scene, batch, judged, clearanceId !== null),
@@ -66,7 +46,43 @@ export const recordPour =
     };
   };
 
-function judgedAt(scene: Scene, at: Date): { judged: Judgement; clearanceId: string | null } {
+interface Judged {
+  judged: Judgement;
+  /** The leave that held at that moment; null: there was none. */
+  clearanceId: string | null;
+}
+
+async function insertPour(
+  scene: Scene,
+  body: PourRequest,
+  at: Date,
+  { judged, clearanceId }: Judged,
+): Promise<void> {
+  const { hand, run } = scene;
+  demandMade(
+    await hand.tx
+      .insert(pourEvent)
+      .values({
+        id: body.id,
+        runId: run.id,
+        batchId: run.batchId,
+        cakeBatchId: run.cakeBatchId,
+        ...asTold(body, hand.now),
+        personId: hand.member.person.id,
+        readingId: countedUntil(scene.readings, at).at(-1)?.id ?? null,
+        clearanceId,
+        volumeL: body.volumeL,
+        og: body.og,
+        typed: body.typed,
+        judged,
+        cleared: clearanceId !== null,
+      })
+      .onConflictDoNothing({ target: pourEvent.id })
+      .returning({ id: pourEvent.id }),
+  );
+}
+
+function judgedAt(scene: Scene, at: Date): Judged {
   const standing = standingAt(scene, at);
   const leave = scene.clearances.findLast((row) => holdsAt(scene, row, at, standing));
   return {
