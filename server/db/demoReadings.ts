@@ -60,4 +60,10 @@ function readingsOf({ gravity, temperature }: DemoReadings) {
 const timed = (
   { day, ...row }: ReturnType<typeof readingsOf>[number],
   at: (day: number) => Date,
-) => ({ ...row, id: randomUUID(), value: valueOf(row, null), takenAt: at(day), createdAt: at(day) });
+) => ({
+  ...row,
+  id: randomUUID(),
+  value: valueOf(row, null),
+  takenAt: at(day),
+  createdAt: at(day),
+});

@@ -149,7 +149,12 @@ export const eventCreate = hasDay(z.strictObject({ id: f.id, ...eventFields }));
 export type EventCreate = z.infer<typeof eventCreate>;
 export const eventWrite = hasDay(z.strictObject(eventFields));
 export type EventWrite = z.infer<typeof eventWrite>;
-export const batchEvent = z.strictObject({ id: f.id, version: f.version, ...eventFields, by: author });
+export const batchEvent = z.strictObject({
+  id: f.id,
+  version: f.version,
+  ...eventFields,
+  by: author,
+});
 export type BatchEvent = z.infer<typeof batchEvent>;
 
 /** All that was written down of one batch, beside what its board says of it. */

@@ -1,5 +1,15 @@
 import { sql } from 'drizzle-orm';
-import { check, date, foreignKey, index, integer, jsonb, pgTable, text, uuid } from 'drizzle-orm/pg-core';
+import {
+  check,
+  date,
+  foreignKey,
+  index,
+  integer,
+  jsonb,
+  pgTable,
+  text,
+  uuid,
+} from 'drizzle-orm/pg-core';
 import type { Cake, CakeState } from '#shared/api/batch.ts';
 import type { CakeCheckWrite, CellCount } from '#shared/api/cakeCheck.ts';
 import { batch } from './chain.ts';

@@ -87,14 +87,10 @@ export const reading = pgTable(
 );
 
 /** Words about a batch, in the order in which they were written. */
-export const batchNote = pgTable(
-  'batch_note',
-  { ...ofBatch(), text: text().notNull() },
-  (t) => [
-    index('batch_note_batch').on(t.batchId, t.createdAt),
-    index('batch_note_brewery').on(t.breweryId),
-  ],
-);
+export const batchNote = pgTable('batch_note', { ...ofBatch(), text: text().notNull() }, (t) => [
+  index('batch_note_batch').on(t.batchId, t.createdAt),
+  index('batch_note_brewery').on(t.breweryId),
+]);
 
 /** Something that is done to a batch at a time of its own: planned for a day, then done. */
 export const batchEvent = pgTable(

@@ -18,7 +18,10 @@ const first = makeBatch(1, {
   brewOn: '2027-03-06',
   fg: 1.02,
   read: { volumeL: 23, og: 1.05, fg: 1.01, rackedOn: '2027-03-20' },
-  followed: digestOf([gravity(0, 1.05), gravity(10, 1.05), gravity(18, 1.046)], at(0).toISOString()),
+  followed: digestOf(
+    [gravity(0, 1.05), gravity(10, 1.05), gravity(18, 1.046)],
+    at(0).toISOString(),
+  ),
   cake: {
     state: 'poured',
     check: null,
