@@ -50,7 +50,7 @@ export function CommentItem({ chainId, comment, isNew, showsAbout }: CommentItem
         ) : (
           <p className="leading-snug wrap-anywhere whitespace-pre-line">{comment.text}</p>
         )}
-        {!isEdited && (
+        {!isEdited && !board.season.isArchived && (
           <Actions chainId={chainId} comment={comment} onEdit={() => setEdited(true)} />
         )}
       </div>

@@ -32,7 +32,11 @@ export function Talk({ chainId, about }: TalkProps) {
       ) : (
         <WholeTalk chainId={chainId} talk={data} />
       )}
-      <Say chainId={chainId} about={about ?? { kind: 'chain' }} />
+      {board.season.isArchived ? (
+        <p className="text-ink2">The season is archived, so nothing more is said here.</p>
+      ) : (
+        <Say chainId={chainId} about={about ?? { kind: 'chain' }} />
+      )}
     </>
   );
 }
