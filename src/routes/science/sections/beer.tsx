@@ -5,7 +5,7 @@ import {
   SHARE_APPARENT,
   SHARE_ORIGINAL,
 } from '#shared/units/alcohol.ts';
-import { EXTRACT_FIT, platoFromSg, points, sgFromPlato } from '#shared/units/gravity.ts';
+import { EXTRACT_FIT, platoFromSg, sgFromPlato } from '#shared/units/gravity.ts';
 import { Formula, Over } from '../Formula.tsx';
 import { digits, inBoth, percent, plato, result, signed, type ScienceSection } from '../section.ts';
 
