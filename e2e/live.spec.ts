@@ -144,7 +144,7 @@ test('a drag is not disturbed: what others do appears when it ends', async ({
   );
   // Heard of and read, and not shown.
   await (await read).finished();
-  await expect(board.locator('[data-lifting]')).toHaveCount(1);
+  await expectInHand(board, 'Lantern Stout');
   await expect(standing(board, ale, 'Lamp Amber')).toHaveCount(0);
   await board.keyboard.press('Escape');
   await board.mouse.up();
@@ -167,6 +167,7 @@ test('a drag ends with a word where the batch in the hand is gone', async ({
     'Lantern Stout is no longer on this board',
     SOON,
   );
+  await expect(inHand(board)).toHaveCount(0);
   await expect(board.locator('[data-lifting]')).toHaveCount(0);
   await board.mouse.up();
   await partner.context().close();
@@ -239,5 +240,17 @@ async function lift(page: Page, name: string): Promise<void> {
   await page.mouse.move(x, y);
   await page.mouse.down();
   await page.mouse.move(x + 30, y - 30, { steps: 10 });
-  await expect(page.locator('[data-lifting]')).toHaveCount(1);
+  await expectInHand(page, name);
+}
+
+const inHand = (page: Page) => page.locator('.lifted-card');
+
+/** The batch is carried, and each shelf holds its places open. */
+async function expectInHand(page: Page, name: string): Promise<void> {
+  await expect(inHand(page)).toContainText(name);
+  for (const shelf of ['Clean ale', 'Lantern row'])
+    await expect(page.getByRole('region', { name: shelf, exact: true })).toHaveAttribute(
+      'data-lifting',
+      '',
+    );
 }

@@ -6,7 +6,7 @@ import { parseConfig, type Config } from './config.ts';
 import { connect } from './db/client.ts';
 import { makeReady } from './db/makeReady.ts';
 import { startLive } from './live/live.ts';
-import { createLog, type Log } from './log.ts';
+import { createLastLog, createLog, type Log } from './log.ts';
 import { builtPages, pagesAreBuilt, vitePages, type Pages } from './pages.ts';
 import { explain } from './settings/explain.ts';
 import { stopCleanly } from './stop.ts';
@@ -60,7 +60,7 @@ function listen(server: Server, config: Config): Promise<string> {
 }
 
 function fail(error: unknown): void {
-  const log = createLog('info');
+  const log = createLastLog();
   const sentences = explain(error);
   for (const sentence of sentences) log.error(sentence);
   // Connections that are open by now would keep the process alive.

@@ -24,3 +24,6 @@ export function createLog(level: string, destination?: pino.DestinationStream): 
   };
   return destination === undefined ? pino(options) : pino(options, destination);
 }
+
+/** For last words: each line is out before the next one, and before the process ends. */
+export const createLastLog = (): Log => createLog('info', pino.destination({ sync: true }));

@@ -5,8 +5,8 @@ const PATIENCE_MS = 10_000;
 
 /**
  * Stops cleanly, once, on SIGTERM, SIGINT, or when the launcher that started this process is gone:
- * what stays open by itself is ended, requests under way are answered, then everything is closed in
- * the order given.
+ * the port is given up at once, what stays open by itself is ended, requests under way are answered,
+ * then everything is closed in the order given.
  */
 export function stopCleanly(
   server: Server,
@@ -18,12 +18,13 @@ export function stopCleanly(
     if (stopping) return;
     stopping = true;
     log.info({ why }, 'Stopping');
-    await before();
-    const lastResort = setTimeout(() => server.closeAllConnections(), PATIENCE_MS);
-    await new Promise<void>((done) => {
+    const closed = new Promise<void>((done) => {
       server.close(() => done());
-      server.closeIdleConnections();
     });
+    const lastResort = setTimeout(() => server.closeAllConnections(), PATIENCE_MS);
+    await before();
+    server.closeIdleConnections();
+    await closed;
     clearTimeout(lastResort);
     for (const each of after) await each();
     log.info('Stopped');
@@ -36,5 +37,7 @@ export function stopCleanly(
     });
   process.on('SIGTERM', () => stopOrFail('SIGTERM'));
   process.on('SIGINT', () => stopOrFail('SIGINT'));
-  if (process.connected) process.on('disconnect', () => stopOrFail('the launcher ended'));
+  process.on('disconnect', () => stopOrFail('the launcher ended'));
+  // It was gone before anybody listened. Without a launcher this is undefined.
+  if (process.connected === false) stopOrFail('the launcher ended');
 }

@@ -1,14 +1,16 @@
 import { linkSync, mkdirSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
 import { dirname } from 'node:path';
-import { birthOf } from './processes.mjs';
+import { birthOf, isStill } from './processes.mjs';
 import { pause } from './run.mjs';
 import { Sentence } from './say.mjs';
 
 /**
  * A file that says which process works in a folder. The process's birth stands in it too, so that
  * neither a killed process nor another one that was given its number keeps anybody out.
- * @typedef {{pid: number, birth: string | null, what: string, url?: string, stopping?: boolean}} Holder
- * @typedef {{note: (more: Partial<Holder>) => void, release: () => void}} Lock
+ * @typedef {{pid: number, birth: string | null}} Known
+ * @typedef {Known & {what: string, url?: string, stopping?: boolean, server?: Known}} Holder
+ * @typedef {{note: (more: Partial<Holder>) => void, release: () => void, before: Holder | null}} Lock
+ *   `before`: who had it and was killed
  */
 
 /**
@@ -21,20 +23,23 @@ export function tryLock(path, what) {
   /** @type {Holder} */
   const mine = { pid: process.pid, birth: birthOf(process.pid), what };
   const beside = `${path}.${process.pid}`;
+  /** @type {Holder | null} */
+  let before = null;
   for (;;) {
     writeFileSync(beside, JSON.stringify(mine));
     try {
       // A link appears whole or not at all, and never over another.
       linkSync(beside, path);
-      return lockOf(path, mine);
+      return lockOf(path, mine, before);
     } catch (error) {
       if (/** @type {NodeJS.ErrnoException} */ (error).code !== 'EEXIST') throw error;
     } finally {
       rmSync(beside, { force: true });
     }
     const holder = readHolder(path);
-    if (holder !== null && isHeld(holder)) return holder;
+    if (holder !== null && isStill(holder)) return holder;
     dropStale(path, holder);
+    before = holder ?? before;
   }
 }
 
@@ -75,9 +80,6 @@ export async function waitForLock(path, what, onWait) {
   }
 }
 
-/** @param {Holder} holder */
-const isHeld = (holder) => holder.birth !== null && birthOf(holder.pid) === holder.birth;
-
 /**
  * @param {string} path
  * @returns {Holder | null}
@@ -103,7 +105,7 @@ function dropStale(path, stale) {
     return;
   }
   const taken = readHolder(aside);
-  if (taken !== null && taken.pid !== stale?.pid && isHeld(taken)) {
+  if (taken !== null && taken.pid !== stale?.pid && isStill(taken)) {
     try {
       linkSync(aside, path);
     } catch {
@@ -116,9 +118,10 @@ function dropStale(path, stale) {
 /**
  * @param {string} path
  * @param {Holder} mine
+ * @param {Holder | null} before
  * @returns {Lock}
  */
-function lockOf(path, mine) {
+function lockOf(path, mine, before) {
   const release = () => {
     if (readHolder(path)?.pid === process.pid) rmSync(path, { force: true });
   };
@@ -130,5 +133,6 @@ function lockOf(path, mine) {
       renameSync(beside, path);
     },
     release,
+    before,
   };
 }

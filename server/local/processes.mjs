@@ -30,6 +30,12 @@ export function birthOf(pid) {
 }
 
 /**
+ * Whether a process that was noted is the one that has its id now, and runs.
+ * @param {{pid: number, birth: string | null}} known
+ */
+export const isStill = ({ pid, birth }) => birth !== null && birthOf(pid) === birth;
+
+/**
  * Whether a process works in a folder, as a database server does in its data folder.
  * @param {number} pid
  * @param {string} folder its real path

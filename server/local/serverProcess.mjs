@@ -2,11 +2,14 @@ import { spawn } from 'node:child_process';
 import { openSync, readFileSync, renameSync, statSync, closeSync } from 'node:fs';
 import { join } from 'node:path';
 import { root } from './places.mjs';
+import { isStill } from './processes.mjs';
+import { pause } from './run.mjs';
 import { Sentence } from './say.mjs';
 
 /** @typedef {{url: string, ended: Promise<number>, stop: () => Promise<void>, pid: number}} ServerProcess */
 
 const PATIENCE_MS = 12_000;
+const ORPHAN_PATIENCE_MS = 5_000;
 const LONG_LOG = 10 * 1024 * 1024;
 
 /**
@@ -14,9 +17,10 @@ const LONG_LOG = 10 * 1024 * 1024;
  * It ends by itself when this process does, however that comes about.
  * @param {Record<string, string | undefined>} settings
  * @param {string} logFile
+ * @param {(pid: number) => void} [onBegun] told of the process before it is known to listen
  * @returns {Promise<ServerProcess>}
  */
-export async function startServer(settings, logFile) {
+export async function startServer(settings, logFile, onBegun = () => {}) {
   rotate(logFile);
   const log = openSync(logFile, 'a', 0o600);
   const child = spawn(process.execPath, ['--import', 'tsx', join(root, 'server/index.ts')], {
@@ -27,6 +31,7 @@ export async function startServer(settings, logFile) {
     detached: true,
   });
   closeSync(log);
+  if (child.pid !== undefined) onBegun(child.pid);
   /** @type {Promise<number>} */
   const ended = new Promise((resolve) => child.on('exit', (code) => resolve(code ?? 1)));
   /** @type {string} */
@@ -49,6 +54,17 @@ export async function startServer(settings, logFile) {
     clearTimeout(lastResort);
   };
   return { url, ended, stop, pid: child.pid ?? 0 };
+}
+
+/**
+ * The server of a launcher that was killed ends by itself, and has its port until then. One that is
+ * stuck is ended: it can answer nobody any more.
+ * @param {{pid: number, birth: string | null} | undefined} server as the launcher noted it
+ */
+export async function awaitOrphan(server) {
+  if (server === undefined) return;
+  for (const started = Date.now(); isStill(server); await pause(100))
+    if (Date.now() - started > ORPHAN_PATIENCE_MS) process.kill(server.pid, 'SIGKILL');
 }
 
 /** @param {string} file */

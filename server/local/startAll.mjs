@@ -6,10 +6,10 @@ import { removeCluster, startCluster } from './cluster.mjs';
 import { takeLock } from './lock.mjs';
 import { ensurePackages } from './packages.mjs';
 import { home, root } from './places.mjs';
-import { pause } from './run.mjs';
+import { birthOf } from './processes.mjs';
 import { confirm, readArguments, say, Sentence } from './say.mjs';
 import { sessionKeys } from './secrets.mjs';
-import { lastLines, startServer } from './serverProcess.mjs';
+import { awaitOrphan, lastLines, startServer } from './serverProcess.mjs';
 
 const DEMO = [
   'Sign in, password slack-water-26:',
@@ -32,6 +32,7 @@ export async function start(args) {
       ? `Another ${holder.what} is at work in ${home} (process ${holder.pid}).`
       : `Barmkin already runs here: ${holder.url} (process ${holder.pid}).`,
   );
+  await awaitOrphan(lock.before?.server);
   await refuseTakenPort();
   await ensurePackages();
   if (options.has('--reset')) await reset(options.has('--yes'));
@@ -41,7 +42,9 @@ export async function start(args) {
     if (stopAsked.already()) return 0;
     say('Starting the server');
     const logFile = join(home, 'server.log');
-    const server = await startServer(settings(cluster.url(), dev), logFile);
+    const server = await startServer(settings(cluster.url(), dev), logFile, (pid) =>
+      lock.note({ server: { pid, birth: birthOf(pid) } }),
+    );
     lock.note({ url: server.url });
     announce(server.url);
     const why = await Promise.race([stopAsked.promise, server.ended.then(() => 'ended')]);
@@ -88,17 +91,14 @@ async function reset(yes) {
   say('Deleted; starting anew');
 }
 
-/** Said before the long steps, not after them. The server of a killed start may need a moment to leave. */
+/** Said before the long steps, not after them. */
 async function refuseTakenPort() {
   const port = Number(process.env.PORT || 4600);
   if (!Number.isInteger(port) || port < 0 || port > 65_535) return;
-  for (let tries = 1; await isTaken(port, process.env.HOST || '127.0.0.1'); tries += 1) {
-    if (tries < 15) await pause(200);
-    else
-      throw new Sentence(
-        `Port ${port} is taken by another program: PORT=${port + 1} npm start uses the next one.`,
-      );
-  }
+  if (await isTaken(port, process.env.HOST || '127.0.0.1'))
+    throw new Sentence(
+      `Port ${port} is taken by another program: PORT=${port + 1} npm start uses the next one.`,
+    );
 }
 
 /**

@@ -1,6 +1,6 @@
 import { points } from '../units/gravity.ts';
 import type { LinkState } from './linkState.ts';
-import { missingForCake, missingOf, together } from './missing.ts';
+import { missingForKept, missingOf, together } from './missing.ts';
 import { namesOf } from './names.ts';
 import { hold, measure, mind, PASSED, unchecked, type Rule } from './outcome.ts';
 import { upToTenth } from './remedies.ts';
@@ -72,11 +72,12 @@ function mindLimits({ pointsB, vessel, rules }: LinkState): number[] {
   return vessel?.blowOff === false ? plain : [...plain, rules.freeBlowOff];
 }
 
-function missing({ a, b, vessel, kept }: LinkState): string[] {
+function missing(link: LinkState): string[] {
+  const { b, vessel, kept } = link;
   return together(
     vessel === undefined ? ['vessel'] : vessel.capacityL === undefined ? ['capacityL'] : [],
     missingOf(b, 'volumeL'),
-    kept.freeShare === undefined ? missingForCake(a) : [],
+    kept.freeShare === undefined ? missingForKept(link) : [],
     vessel?.blowOff === true ? [] : missingOf(b, 'og'),
     vessel !== undefined && vessel.blowOff === undefined ? ['blowOff'] : [],
   );

@@ -36,14 +36,16 @@ export interface KeptCake {
   freeShareAtMost: number | undefined;
 }
 
-/** @param keepL part to keep, litres; undefined: all that no other wort gets. */
-export function keptCake(link: Around, keepL: number | undefined): KeptCake {
+/**
+ * @param keepL part to keep, litres; undefined: all that no other wort gets; `unknown`: some part of
+ *   that, which cannot be told yet.
+ */
+export function keptCake(link: Around, keepL: number | 'unknown' | undefined): KeptCake {
   const whole = link.cake?.volumeL.likely;
   const free = freeCakeL(whole, link.pour);
-  const clamped = keepL !== undefined && free !== undefined && keepL > free;
-  const keptL = clamped || keepL === undefined ? free : keepL;
-  const share =
-    keptL === 0 ? 0 : whole === undefined || keptL === undefined ? undefined : keptL / whole;
+  const clamped = typeof keepL === 'number' && free !== undefined && keepL > free;
+  const keptL = partOf(clamped ? undefined : keepL, free);
+  const share = shareOf(keptL, whole);
   const leftL = leftAbove(link);
   return {
     keptL,
@@ -56,9 +58,23 @@ export function keptCake(link: Around, keepL: number | undefined): KeptCake {
           ? undefined
           : retainedBeerL({ keptL, cakeL: whole, leftAboveL: leftL }),
     ratio: share === 0 ? 0 : ratioOf(link.cake?.viableCells, share, link.need),
-    ratioAtMost: ratioOf(link.cake?.freshCells, share, link.need),
+    ratioAtMost: ratioOf(link.cake?.freshCells, share ?? shareOf(free, whole), link.need),
     ...freeSpace(link, keptL, share, leftL),
   };
+}
+
+/** Of a cake of which nothing is free, any part is nothing. */
+function partOf(
+  keepL: number | 'unknown' | undefined,
+  free: number | undefined,
+): number | undefined {
+  if (keepL === 'unknown') return free === 0 ? 0 : undefined;
+  return keepL ?? free;
+}
+
+function shareOf(keptL: number | undefined, whole: number | undefined): number | undefined {
+  if (keptL === 0) return 0;
+  return whole === undefined || keptL === undefined ? undefined : keptL / whole;
 }
 
 /** Beer left above the whole cake, litres. */

@@ -26,7 +26,7 @@ export const lightToDark: Rule<Detail> = {
     const srmB = toHundredth(b.srm);
     if (toHundredth(srmA - srmB) < rules.darkSrm) return PASSED;
     const shift = link.colourShift;
-    if (shift === undefined) return unchecked(missingForBlend(a, b));
+    if (shift === undefined) return unchecked(missingForBlend(link));
     const standing = standingAt(shift, link);
     if (standing === 'passed') return PASSED;
     return (standing === 'hold' ? hold : mind)({ srmA, srmB, shift });

@@ -91,8 +91,10 @@ export class LinkState {
 
   /** The figures of keeping a part, with the cake, the wort and the vessel as they are. */
   keeping(keepL: PourFacts['keepL']): KeptCake {
-    const asked = keepL === 'recommended' ? this.recommended?.litres : keepL;
-    return keptCake(this, asked);
+    return keptCake(
+      this,
+      keepL === 'recommended' ? (this.recommended?.litres ?? 'unknown') : keepL,
+    );
   }
 }
 

@@ -35,7 +35,7 @@ export const mildToBitter: Rule<Detail> = {
     )
       return PASSED;
     const shift = shiftTo(link.blend.ibu, ibuB);
-    if (shift === undefined) return unchecked(missingForBlend(a, b));
+    if (shift === undefined) return unchecked(missingForBlend(link));
     const standing = standingAt(shift, gap, link);
     if (standing === 'passed') return PASSED;
     return (standing === 'hold' ? hold : mind)({ ibuA, ibuB, shift });

@@ -1,6 +1,15 @@
 import type { BatchFacts, PourFacts } from './facts.ts';
+import type { KeptCake } from './keptCake.ts';
 
 /** Names of unknown facts, as the check contract calls them. */
+
+/** The part of a link that says how much of the cake is kept. */
+interface Kept {
+  a: BatchFacts;
+  b: BatchFacts;
+  pour: PourFacts;
+  kept: Pick<KeptCake, 'share'>;
+}
 
 type Key = 'volumeL' | 'og' | 'fg' | 'srm' | 'ibu' | 'fermentC' | 'daysUnderBeer' | 'brewOn';
 
@@ -12,9 +21,18 @@ export function missingOf(facts: BatchFacts, ...keys: Key[]): string[] {
 export const missingForCake = (earlier: BatchFacts): string[] =>
   missingOf(earlier, 'volumeL', 'og', 'fg');
 
+/** What a kept part is worked out from. */
+export const missingForKept = ({ a, b, pour, kept }: Kept): string[] =>
+  together(
+    missingForCake(a),
+    pour.keepL === 'recommended' && kept.share === undefined
+      ? together(missingOf(b, 'volumeL', 'og'), missingForSurvival(a, b, pour))
+      : [],
+  );
+
 /** What a blend is worked out from. */
-export const missingForBlend = (earlier: BatchFacts, later: BatchFacts): string[] =>
-  together(missingForCake(earlier), missingOf(later, 'volumeL'));
+export const missingForBlend = (link: Kept): string[] =>
+  together(missingForKept(link), missingOf(link.b, 'volumeL'));
 
 /** What the day on which the yeast is taken is worked out from. */
 export const missingForTaking = (earlier: BatchFacts, pour: PourFacts): string[] =>

@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { flushSync } from 'react-dom';
 import { sentenceOf } from '../../api/errors.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { useUnsaved } from '../../app/unsaved.ts';
@@ -30,7 +31,9 @@ export function ConflictPanel<Facts>(props: ConflictPanelProps<Facts>) {
     setTheirs(next);
   };
   const save = async () => {
-    setBusy(true);
+    // Where theirs stands everywhere there is nothing to send: the way out is asked for at once, and
+    // must not find anything unsaved.
+    flushSync(() => setBusy(true));
     setFailure(null);
     await onResolve([...theirs]).catch((error: unknown) => setFailure(sentenceOf(error)));
     setBusy(false);

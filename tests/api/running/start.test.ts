@@ -5,6 +5,7 @@ import { join } from 'node:path';
 import { afterEach, beforeEach, expect, test } from 'vitest';
 import { freePort, removeCluster } from '../../../server/local/cluster.mjs';
 import { readHolder } from '../../../server/local/lock.mjs';
+import { isStill } from '../../../server/local/processes.mjs';
 import { runProgram } from '../../support/program.ts';
 
 let home = '';
@@ -63,6 +64,24 @@ test('a start after a killed one takes over the database that outlived it', asyn
   const { code, stdout } = await second.ended;
   expect(code).toBe(0);
   expect(stdout).toContain('still running');
+}, 120_000);
+
+test('a start after a killed one ends the server that hangs and has the port', async () => {
+  const first = start();
+  await first.seen(UP);
+  const server = readHolder(join(home, 'lock'))?.server;
+  if (!server) throw new Error('the lock does not say which process the server is');
+  process.kill(server.pid, 'SIGSTOP');
+  first.stop('SIGKILL');
+  await first.ended;
+  expect(isStill(server)).toBe(true);
+
+  const second = start();
+  await second.seen(UP);
+  expect(isStill(server)).toBe(false);
+  expect(await isUp()).toBe(true);
+  second.stop('SIGTERM');
+  expect((await second.ended).code).toBe(0);
 }, 120_000);
 
 test('a port that another program has is named before the long steps', async () => {

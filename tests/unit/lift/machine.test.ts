@@ -203,6 +203,20 @@ describe('putting down', () => {
     expect(s.said.at(-1)).toBe('Beer 6 put back on the bench.');
   });
 
+  it('refuses a drop where somebody moved the batch while it was carried, and says where to', () => {
+    const s = scene();
+    s.lifting.lift(beer(6), 'pointer');
+    const moved = s
+      .board()
+      .batches.map((row) => (row.id === beer(6) ? { ...row, chainId: LAGER, place: 2 } : row));
+    s.change({ ...s.board(), batches: moved });
+    drop(s.machine, `${ALE}:${beer(3)}`);
+    expect(s.sent).toEqual([]);
+    expect(s.store.get().refusal).toBe(
+      'Beer 6 is now on the shelf Lantern lager. Nothing of yours was lost.',
+    );
+  });
+
   it('uses the yeast that the batch asks for on a new shelf', () => {
     const s = scene();
     dropAt(s, 6, 'new');
@@ -218,7 +232,7 @@ describe('putting down', () => {
     expect(s.said.at(-1)).toBe('Beer 7 put back on the bench.');
     dropAt(s, 7, 'new');
     const gap = s.store.get().yeastFor?.gap;
-    if (gap) s.putting.put(beer(7), gap, s.board().yeasts[1]?.id);
+    if (gap) s.putting.put(beer(7), gap, { yeastId: s.board().yeasts[1]?.id ?? '' });
     expect(s.sent[0]).toMatchObject({ newChain: { yeastId: s.board().yeasts[1]?.id } });
   });
 

@@ -54,14 +54,16 @@ describe('pitch-amount', () => {
     expect(whole.advice.map((one) => one.id)).not.toContain('kept-all-there-is');
   });
 
-  test('the recommended part is enough at the low end, and is the whole where unknown', () => {
+  test('the recommended part is enough at the low end, and is no part at all where unknown', () => {
     const part = check({ a: blonde(), b: paleAle(), pour: { keepL: 'recommended' } });
     expect(part.keep.keptL).toBe(part.keep.recommendedL);
     expect(standing(part, 'pitch-amount')).toBe('passed');
     const { og: _o, ...unknown } = paleAle();
     const open = check({ a: blonde(), b: unknown, pour: { keepL: 'recommended' } });
     expect(open.keep.recommendedL).toBeNull();
-    expect(open.keep.keptL).toBe(open.cake.volumeL);
+    expect(open.cake.volumeL).not.toBeNull();
+    expect(open.keep.keptL).toBeNull();
+    expect(standing(open, 'pitch-amount')).toBe('unchecked');
   });
 
   test('without dates a part that is too small even when fresh is found all the same', () => {

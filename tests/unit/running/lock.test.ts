@@ -52,7 +52,9 @@ test('a lock of a process that was killed is taken over', async () => {
   hold(pid, birthOf(pid));
   child.kill('SIGKILL');
   await new Promise((ended) => child.on('exit', ended));
-  expect(tryLock(path, 'a test')).not.toHaveProperty('pid');
+  const lock = tryLock(path, 'a test');
+  expect(lock).not.toHaveProperty('pid');
+  expect(lock, 'and says whose it was').toMatchObject({ before: { pid, what: 'npm start' } });
 });
 
 test('a process id that was given to another process keeps nobody out', () => {

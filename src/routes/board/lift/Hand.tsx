@@ -54,7 +54,8 @@ function createDrag(machine: LiftMachine) {
       if (!lifted || !gap) return machine.lifting.cancel();
       // The hand opens in this frame, the board changes in the next: both at once would be felt.
       machine.lifting.release();
-      requestAnimationFrame(() => machine.putting.put(lifted.batchId, gap));
+      const from = lifted.chainId;
+      requestAnimationFrame(() => machine.putting.put(lifted.batchId, gap, { from }));
     },
     onDragCancel() {
       watch?.stop();

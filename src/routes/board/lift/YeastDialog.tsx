@@ -16,7 +16,7 @@ export function YeastDialog() {
 function AskYeast({ asked }: { asked: NonNullable<LiftState['yeastFor']> }) {
   const board = useBoard();
   const { putting } = useLiftMachine();
-  const { batchId, gap } = asked;
+  const { batchId, gap, from } = asked;
   const proposed = newShelfFor(board, batchId, 'new')?.yeastId ?? '';
   const [yeastId, setYeastId] = useState(proposed);
   const field = useId();
@@ -30,7 +30,7 @@ function AskYeast({ asked }: { asked: NonNullable<LiftState['yeastFor']> }) {
       <form
         onSubmit={(event) => {
           event.preventDefault();
-          putting.put(batchId, gap, yeastId);
+          putting.put(batchId, gap, { yeastId, from });
         }}
       >
         <label htmlFor={field} className="block font-semibold">

@@ -1,3 +1,4 @@
+import type { MoveRefusal } from '#shared/chain/move.ts';
 import { isProblem, OfflineError, sentenceOf } from '../../../api/errors.ts';
 import { BehindFailure } from '../../../api/moveQueue.ts';
 import { NothingToUndo } from '../../../api/nothingToUndo.ts';
@@ -15,6 +16,12 @@ export function failureWords(error: unknown, name: string | null): string {
       ? `No connection to the server. ${name} is back where it was.`
       : 'No connection to the server. Nothing was changed.';
   const sentence = sentenceOf(error);
-  const isConflict = isProblem(error, 'moved-elsewhere') || isProblem(error, 'place-taken');
-  return isConflict ? `${sentence} Nothing of yours was lost.` : sentence;
+  const conflict = CONFLICTS.find((why) => isProblem(error, why));
+  return conflict ? refusalWords(conflict, sentence) : sentence;
 }
+
+const CONFLICTS = ['moved-elsewhere', 'place-taken'] as const;
+
+/** Why the board itself refuses a move. */
+export const refusalWords = (why: MoveRefusal, detail: string): string =>
+  CONFLICTS.some((each) => each === why) ? `${detail} Nothing of yours was lost.` : detail;

@@ -56,5 +56,5 @@ export function drop({ store, lifting, putting }: LiftMachine, key: string | nul
   const gap = key === null ? undefined : lifted?.gaps.get(key);
   if (!lifted || !gap) return lifting.cancel();
   lifting.release();
-  putting.put(lifted.batchId, gap);
+  putting.put(lifted.batchId, gap, { from: lifted.chainId });
 }

@@ -44,7 +44,7 @@ export interface LiftState {
   /** A batch whose list of places is open. */
   placesFor: string | null;
   /** A drop on a new shelf that waits for its yeast. */
-  yeastFor: { batchId: string; gap: Gap } | null;
+  yeastFor: { batchId: string; gap: Gap; from: string | null } | null;
   change: Change | null;
   /** Why the last move, undo or redo did not happen. */
   refusal: string | null;

@@ -1,7 +1,7 @@
 import type { Moved, MoveRequest } from '#shared/api/move.ts';
 import { moveBatch } from '#shared/chain/move.ts';
 import type { Gap } from '#shared/chain/gaps.ts';
-import { failureWords, OFFLINE_WORDS } from './failure.ts';
+import { failureWords, OFFLINE_WORDS, refusalWords } from './failure.ts';
 import type { Change, LiftStore } from './liftState.ts';
 import { isOpen } from './places.ts';
 import type { LiftPorts } from './ports.ts';
@@ -10,13 +10,20 @@ import { wishOf } from './wish.ts';
 
 export interface Putting {
   /** Puts a batch into a place; asks for the yeast of a new shelf where the batch names none. */
-  put(batchId: string, gap: Gap, yeastId?: string): void;
+  put(batchId: string, gap: Gap, how?: How): void;
   /** No yeast for a new shelf: the batch stays where it was. */
   giveUp(): void;
   /** The same drop once more, with every date as it was before it. */
   keepDates(): void;
   undo(): void;
   redo(): void;
+}
+
+export interface How {
+  /** Of a new shelf. */
+  yeastId?: string;
+  /** Where it was when it was lifted: moved by somebody since, it stays where they put it. */
+  from?: string | null;
 }
 
 interface Scene {
@@ -44,7 +51,7 @@ function send(scene: Scene, request: MoveRequest, gap: Gap, again: boolean) {
   const board = ports.board();
   const name = batchName(board, request.batchId);
   const preview = again ? null : moveBatch(board, request);
-  if (preview && !preview.ok) return refuse(scene, preview.detail);
+  if (preview && !preview.ok) return refuse(scene, refusalWords(preview.why, preview.detail));
   const change = changeOf(request, gap, preview ?? { shifted: [], cleared: [] });
   store.set({ change, refusal: null });
   const answer = again ? ports.moveAgain(request) : ports.move(request);
@@ -64,14 +71,15 @@ function send(scene: Scene, request: MoveRequest, gap: Gap, again: boolean) {
   );
 }
 
-function put(scene: Scene, batchId: string, gap: Gap, yeastId: string | null) {
+function put(scene: Scene, batchId: string, gap: Gap, how: How) {
   const { store, ports } = scene;
   const board = ports.board();
   const batch = board.batches.find((row) => row.id === batchId);
   if (!batch || !isOpen(gap)) return;
   if (!ports.isOnline()) return refuse(scene, OFFLINE_WORDS);
-  const request = wishOf(board, { batch, gap, dates: 'pull', yeastId }, ports.newId);
-  if (!request) return store.set({ yeastFor: { batchId, gap } });
+  const { yeastId = null, from = batch.chainId } = how;
+  const request = wishOf(board, { batch, gap, from, dates: 'pull', yeastId }, ports.newId);
+  if (!request) return store.set({ yeastFor: { batchId, gap, from } });
   store.set({ yeastFor: null, placesFor: null });
   send(scene, request, gap, false);
 }
@@ -111,7 +119,7 @@ function turnBack(scene: Scene, which: 'undo' | 'redo') {
 export function createPutting(store: LiftStore, ports: LiftPorts): Putting {
   const scene = { store, ports };
   return {
-    put: (batchId, gap, yeastId) => put(scene, batchId, gap, yeastId ?? null),
+    put: (batchId, gap, how = {}) => put(scene, batchId, gap, how),
     giveUp: () => giveUp(scene),
     keepDates: () => keepDates(scene),
     undo: () => turnBack(scene, 'undo'),

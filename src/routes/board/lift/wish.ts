@@ -7,6 +7,8 @@ import { newShelfFor } from '#shared/chain/newShelf.ts';
 export interface Drop {
   batch: Batch;
   gap: Pick<Gap, 'key' | 'toChainId' | 'afterBatchId'>;
+  /** Where whoever drops it believes it to be; null: on the bench. */
+  from: string | null;
   dates: MoveRequest['dates'];
   /** The yeast of a new shelf, where the batch itself asks for none. */
   yeastId: string | null;
@@ -20,12 +22,12 @@ function newShelf(board: BoardFacts, batch: Batch, yeastId: string, id: string) 
 
 /** The wish that a drop stands for; null where a new shelf has no yeast yet. */
 export function wishOf(board: BoardFacts, drop: Drop, newId: () => string): MoveRequest | null {
-  const { batch, gap, dates } = drop;
+  const { batch, gap, from, dates } = drop;
   const shared = {
     id: newId(),
     batchId: batch.id,
     afterBatchId: gap.afterBatchId,
-    expectedChainId: batch.chainId,
+    expectedChainId: from,
     dates,
   };
   if (gap.key === 'bench') return { ...shared, toChainId: 'bench' };
