@@ -27,8 +27,9 @@ interface CakeCheckPanelProps {
 /** Racking, and the judgement of the cake: the form, or what was signed. */
 export function CakeCheckPanel({ batch, record }: CakeCheckPanelProps) {
   const { board, can, mayWriteDown: mayWrite } = useBoardView();
-  const [isWriting, setWriting] = useState(false);
   const { check } = record;
+  // A form that is open stays open when somebody else judges the cake.
+  const [isWriting, setWriting] = useState(check === null);
   return (
     <aside
       aria-label="Racking and cake check"
@@ -50,17 +51,20 @@ export function CakeCheckPanel({ batch, record }: CakeCheckPanelProps) {
             {mayWrite && (
               <div className="mt-4 flex flex-wrap gap-3">
                 <Button onClick={() => setWriting(true)}>Judge it anew</Button>
-                <WithdrawButton batch={batch} version={check.version} />
+                <WithdrawButton
+                  batch={batch}
+                  version={check.version}
+                  onDone={() => setWriting(true)}
+                />
               </div>
             )}
           </>
         ) : mayWrite ? (
           <CakeCheckForm
-            key={check?.version ?? 0}
             batch={batch}
             check={check}
             onDone={() => setWriting(false)}
-            {...(isWriting && { onCancel: () => setWriting(false) })}
+            {...(check && { onCancel: () => setWriting(false) })}
           />
         ) : (
           <p className="text-ink2">Nobody has judged its cake yet.</p>
@@ -87,7 +91,13 @@ function RackButton({ batch }: { batch: Batch }) {
   );
 }
 
-function WithdrawButton({ batch, version }: { batch: Batch; version: number }) {
+interface WithdrawButtonProps {
+  batch: Batch;
+  version: number;
+  onDone: () => void;
+}
+
+function WithdrawButton({ batch, version, onDone }: WithdrawButtonProps) {
   const { slug } = useBoardView();
   const { withdraw } = useCakeCheck(slug, batch.id);
   const [isAsking, setAsking] = useState(false);
@@ -103,7 +113,7 @@ function WithdrawButton({ batch, version }: { batch: Batch; version: number }) {
         action="Take it back"
         busy={withdraw.isPending}
         error={withdraw.error}
-        onConfirm={() => withdraw.mutate(version, { onSuccess: () => setAsking(false) })}
+        onConfirm={() => withdraw.mutate(version, { onSuccess: onDone })}
       >
         <p>The cake of {batch.name} is then as if nobody had judged or measured it.</p>
       </ConfirmDialog>

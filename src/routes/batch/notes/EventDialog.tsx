@@ -1,9 +1,10 @@
+import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import { batchEvent, eventCreate, EVENT_KINDS, type BatchEvent } from '#shared/api/reading.ts';
 import { EVENT_WORDS } from '#shared/record/readings.ts';
 import { capital } from '#shared/rules/words.ts';
-import { useEvents } from '../../../api/batchRecord.ts';
+import { batchRecordQuery, useEvents } from '../../../api/batchRecord.ts';
 import { newId } from '../../../app/newId.ts';
 import { fromLocal, toLocal } from '../../../app/zonedTime.ts';
 import { DayField } from '../../../components/form/DayField.tsx';
@@ -33,6 +34,8 @@ export function EventDialog({ batch, event, onClose }: EventDialogProps) {
   const { slug, board } = useBoardView();
   const { timeZone } = board.brewery;
   const { add, edit, remove } = useEvents(slug, batch.id);
+  const client = useQueryClient();
+  const { queryKey } = batchRecordQuery(slug, batch.id);
   const [values] = useState(() => ({
     id: event?.id ?? newId(),
     kind: event?.kind ?? 'dry-hop',
@@ -59,8 +62,10 @@ export function EventDialog({ batch, event, onClose }: EventDialogProps) {
         })}
         create={add.mutateAsync}
         patch={async ({ id, version, patch }) => {
-          if (!event) return;
-          const { kind, text, plannedOn, doneAt } = event;
+          const now = client.getQueryData(queryKey)?.events.find((one) => one.id === id);
+          const base = now ?? event;
+          if (!base) return;
+          const { kind, text, plannedOn, doneAt } = base;
           await edit.mutateAsync({
             id,
             version,

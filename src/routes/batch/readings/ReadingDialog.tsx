@@ -1,8 +1,9 @@
+import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import { reading as contract, type Reading, type Instrument } from '#shared/api/reading.ts';
 import { readingText } from '#shared/record/readings.ts';
-import { useReadings } from '../../../api/batchRecord.ts';
+import { batchRecordQuery, useReadings } from '../../../api/batchRecord.ts';
 import { useBrewery } from '../../../app/useBrewery.ts';
 import { useUnits } from '../../../app/useUnits.ts';
 import { RowForm } from '../../../components/form/RowForm.tsx';
@@ -40,6 +41,8 @@ export function ReadingDialog({ batch, reading, like, instruments, onClose }: Re
   const units = useUnits();
   const { timeZone } = useBoardView().board.brewery;
   const { add, edit } = useReadings(slug, batch.id);
+  const client = useQueryClient();
+  const { queryKey } = batchRecordQuery(slug, batch.id);
   const [deleting, setDeleting] = useState(false);
   const start = like ?? {
     kind: 'gravity' as const,
@@ -60,8 +63,11 @@ export function ReadingDialog({ batch, reading, like, instruments, onClose }: Re
         shape={readingShape(timeZone)}
         create={add.mutateAsync}
         patch={({ id, version, patch }) => {
-          if (!reading) return Promise.resolve();
-          return edit.mutateAsync({ id, version, body: { ...writeOf(reading), ...patch } });
+          // What somebody else wrote in the meantime stands, but for the fields changed here.
+          const now = client.getQueryData(queryKey)?.readings.find((one) => one.id === id);
+          const base = now ?? reading;
+          if (!base) return Promise.resolve();
+          return edit.mutateAsync({ id, version, body: { ...writeOf(base), ...patch } });
         }}
         labelOf={(key) => LABELS[key] ?? key}
         wordsOf={(key, facts) => String(Reflect.get(facts, key) ?? 'nothing')}
