@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useEffect, useEffectEvent, useState } from 'react';
 import { useForm } from 'react-hook-form';
 import type { Batch } from '#shared/api/batch.ts';
 import { cakeCheckWrite, type CakeCheck, type CakeCheckWrite } from '#shared/api/cakeCheck.ts';
@@ -16,6 +16,8 @@ import { checkShape, checkValues } from './checkValues.ts';
 interface CakeCheckFormProps {
   batch: Batch;
   check: CakeCheck | null;
+  /** Something stands in it that is not saved. */
+  onWritten: () => void;
   onDone: () => void;
   onCancel?: () => void;
 }
@@ -23,7 +25,7 @@ interface CakeCheckFormProps {
 type Values = ReturnType<typeof checkValues>;
 
 /** The judgement of a cake as the beer comes off it. What is measured replaces the estimate. */
-export function CakeCheckForm({ batch, check, onDone, onCancel }: CakeCheckFormProps) {
+export function CakeCheckForm({ batch, check, onWritten, onDone, onCancel }: CakeCheckFormProps) {
   const { slug, units, board } = useBoardView();
   const { sign } = useCakeCheck(slug, batch.id);
   // What stood when it was opened: a judgement that came since is not written over unseen.
@@ -35,6 +37,11 @@ export function CakeCheckForm({ batch, check, onDone, onCancel }: CakeCheckFormP
       shape: checkShape,
     }),
   });
+  const { isDirty } = form.formState;
+  const tell = useEffectEvent(onWritten);
+  useEffect(() => {
+    if (isDirty) tell();
+  }, [isDirty]);
   const since = check !== null && check.version !== version ? check : null;
   const me = board.members.find(({ personId }) => personId === board.me.personId);
   return (

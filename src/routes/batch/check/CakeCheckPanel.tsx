@@ -28,8 +28,8 @@ interface CakeCheckPanelProps {
 export function CakeCheckPanel({ batch, record }: CakeCheckPanelProps) {
   const { board, can, mayWriteDown: mayWrite } = useBoardView();
   const { check } = record;
-  // A form that is open stays open when somebody else judges the cake.
-  const [isWriting, setWriting] = useState(check === null);
+  // A form in which something is written stays open when somebody else judges the cake.
+  const [isWriting, setWriting] = useState(false);
   return (
     <aside
       aria-label="Racking and cake check"
@@ -54,7 +54,7 @@ export function CakeCheckPanel({ batch, record }: CakeCheckPanelProps) {
                 <WithdrawButton
                   batch={batch}
                   version={check.version}
-                  onDone={() => setWriting(true)}
+                  onDone={() => setWriting(false)}
                 />
               </div>
             )}
@@ -63,6 +63,7 @@ export function CakeCheckPanel({ batch, record }: CakeCheckPanelProps) {
           <CakeCheckForm
             batch={batch}
             check={check}
+            onWritten={() => setWriting(true)}
             onDone={() => setWriting(false)}
             {...(check && { onCancel: () => setWriting(false) })}
           />
