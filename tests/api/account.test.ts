@@ -21,7 +21,7 @@ afterAll(() => server.close());
 
 async function signedIn(email: string, password = PASSWORD, userAgent?: string) {
   const visitor = new Visitor(server.url);
-  const headers = userAgent ? { 'User-Agent': userAgent } : {};
+  const headers: Record<string, string> = userAgent ? { 'User-Agent': userAgent } : {};
   await good(visitor.ask('POST', api.session, { body: { email, password }, headers }));
   return visitor;
 }
