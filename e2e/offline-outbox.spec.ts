@@ -1,5 +1,7 @@
 import { eq } from 'drizzle-orm';
+import { cakeCheck } from '../server/db/schema/cake.ts';
 import { pourReading, pourRun } from '../server/db/schema/pour.ts';
+import { batchNote, reading } from '../server/db/schema/readings.ts';
 import { expectAccessible } from './support/axe.ts';
 import { keptKeys, nothingWaits, pagesAreKept, waiting } from './support/device.ts';
 import { cakeThatWaits, PourPage } from './support/pour.ts';
@@ -165,4 +167,80 @@ test('it can be installed: a manifest with icons, and a worker that is always as
   const worker = await page.request.get('/sw.js');
   expect(worker.headers()['cache-control']).toBe('no-cache');
   expect(await worker.text()).not.toContain('/api/session');
+});
+
+test('two versions of a note are shown side by side, and one is chosen', async ({
+  board: page,
+  partner,
+  brewery,
+  context,
+  db,
+}) => {
+  const { first } = await cakeThatWaits(brewery, db);
+  const url = `/api/breweries/${brewery.slug}/batches/${first}/notes`;
+  const id = crypto.randomUUID();
+  const head = { 'Sec-Fetch-Site': 'same-origin' };
+  await page.request.post(url, { headers: head, data: { id, text: 'Smells of bread' } });
+  await page.goto(`/b/${brewery.slug}/batches/${first}`);
+  await expect(page.getByText('Smells of bread')).toBeVisible();
+
+  await context.setOffline(true);
+  await page.getByRole('button', { name: 'Change' }).click();
+  const form = page.locator('form').filter({ hasText: 'Save the note' });
+  await form.getByLabel('Note').fill('Smells of pears');
+  await expect(form.getByText('It is kept on this device')).toBeVisible();
+  await page.getByRole('button', { name: 'Save the note' }).click();
+  await expect(page.getByRole('listitem').filter({ hasText: 'Smells of pears' })).toBeVisible();
+  await expect(waiting(page)).toHaveText('1 waiting');
+  const theirs = await partner.request.put(`${url}/${id}`, {
+    headers: { ...head, 'If-Match': '"1"' },
+    data: { text: 'Smells of apples' },
+  });
+  expect(theirs.ok(), await theirs.text()).toBe(true);
+
+  await context.setOffline(false);
+  await expect(waiting(page)).toHaveText('1 not taken', { timeout: 30_000 });
+  await waiting(page).click();
+  const box = page.getByRole('dialog', { name: 'Waiting to be sent' });
+  const row = box.getByRole('row', { name: /^Text/ });
+  await expect(row.getByRole('cell')).toHaveText(['Smells of pears', 'Smells of apples']);
+  await expectAccessible(page);
+  await box.getByRole('button', { name: 'Mine shall stand' }).click();
+  await expect(box.getByText('Everything has been sent.')).toBeVisible();
+  const [note] = await db.select().from(batchNote).where(eq(batchNote.id, id));
+  expect(note).toMatchObject({ text: 'Smells of pears', version: 3 });
+});
+
+test('a reading, and the cake as it was judged, are written down without a connection', async ({
+  board: page,
+  brewery,
+  context,
+  db,
+}) => {
+  const { first } = await cakeThatWaits(brewery, db);
+  await page.goto(`/b/${brewery.slug}/batches/${first}`);
+  await expect(page.getByRole('button', { name: 'Log a reading' })).toBeVisible();
+  await pagesAreKept(page);
+  await context.setOffline(true);
+  await page.getByRole('button', { name: 'Log a reading' }).click();
+  const form = page.getByRole('dialog', { name: 'Read Creek Blonde' });
+  await form.getByLabel('Gravity, as shown').fill('1.012');
+  await form.getByRole('button', { name: 'Write it down' }).click();
+  await expect(form).toBeHidden();
+  await expect(page.getByRole('region', { name: 'Readings' })).toContainText('1.012');
+
+  const panel = page.getByRole('complementary', { name: 'Racking and cake check' });
+  await panel.getByText('Clean', { exact: true }).click();
+  await panel.getByText('Fit', { exact: true }).click();
+  await panel.getByRole('button', { name: 'Save the check' }).click();
+  await expect(waiting(page)).toHaveText('2 waiting');
+  await page.reload();
+  await expect(page.getByRole('region', { name: 'Readings' })).toContainText('1.012');
+
+  await context.setOffline(false);
+  await nothingWaits(page);
+  const readings = await db.select().from(reading).where(eq(reading.batchId, first));
+  expect(readings).toMatchObject([{ shown: 1.012 }]);
+  const checks = await db.select().from(cakeCheck).where(eq(cakeCheck.batchId, first));
+  expect(checks).toMatchObject([{ judged: 'fit', version: 1 }]);
 });

@@ -1,4 +1,5 @@
 import type { ComponentType } from 'react';
+import { isOnline } from '../api/connection.ts';
 
 const KEY = 'barmkin-reloaded-for';
 
@@ -21,6 +22,8 @@ export async function lazyPage<Props extends object = object>(
     sessionStorage.removeItem(KEY);
     return { Component };
   } catch (error) {
+    // Without a connection loading anew would only lose the page that is here.
+    if (!isOnline()) throw error;
     const wanted = new URL(onTheWay() ?? location.href, location.href).href;
     if (sessionStorage.getItem(KEY) === wanted) throw error;
     sessionStorage.setItem(KEY, wanted);

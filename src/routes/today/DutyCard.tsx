@@ -14,10 +14,12 @@ interface DutyCardProps {
   duty: Duty;
   today: Day;
   dated: boolean;
+  /** The first thing to do: a page has one. */
+  isFirst?: boolean;
 }
 
 /** One thing to be done, with the one tap that leads to it. */
-export function DutyCard({ duty, today, dated }: DutyCardProps) {
+export function DutyCard({ duty, today, dated, isFirst = false }: DutyCardProps) {
   const { index, judged, board, units, can } = useBoardView();
   const { path } = useBrewery();
   const batch = index.batch(duty.batchId);
@@ -29,20 +31,22 @@ export function DutyCard({ duty, today, dated }: DutyCardProps) {
       <div className="w-12 shrink-0 pt-1">
         <Vessel {...drawnVessel(batch, index, judged, board.today)} width={44} />
       </div>
-      <div className="min-w-0 flex-1">
-        <When duty={duty} today={today} dated={dated} />
-        <h3 className="text-[1.1875rem] leading-[1.2] font-bold wrap-anywhere">{words.title}</h3>
-        {words.because !== '' && <p className="mt-1 text-ink2">{words.because}</p>}
-        {link && (
-          <p className="mt-2">
-            <VerdictPill verdict={link.verdict} findings={link.findings.length} large />
-          </p>
-        )}
-        {words.caution && <p className="mt-1 text-small text-ink2">{words.caution}</p>}
+      <div className="min-w-0 flex-1 tablet:flex tablet:items-center tablet:gap-6">
+        <div className="min-w-0 flex-1">
+          <When duty={duty} today={today} dated={dated} />
+          <h3 className="text-[1.1875rem] leading-[1.2] font-bold wrap-anywhere">{words.title}</h3>
+          {words.because !== '' && <p className="mt-1 text-ink2">{words.because}</p>}
+          {link && (
+            <p className="mt-2">
+              <VerdictPill verdict={link.verdict} findings={link.findings.length} large />
+            </p>
+          )}
+          {words.caution && <p className="mt-1 text-small text-ink2">{words.caution}</p>}
+        </div>
         <LinkButton
           to={path(words.page)}
-          look={duty.day <= today ? 'first' : 'plain'}
-          className="mt-3 max-tablet:w-full"
+          look={isFirst ? 'first' : 'plain'}
+          className="max-tablet:mt-3 max-tablet:w-full"
         >
           {words.action}
         </LinkButton>

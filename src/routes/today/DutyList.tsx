@@ -19,8 +19,14 @@ export function DutyList({ title, duties, today, dated = false }: DutyListProps)
         {title}
       </h2>
       <ul className="space-y-3">
-        {duties.map((duty) => (
-          <DutyCard key={duty.key} duty={duty} today={today} dated={dated} />
+        {duties.map((duty, at) => (
+          <DutyCard
+            key={duty.key}
+            duty={duty}
+            today={today}
+            dated={dated}
+            isFirst={!dated && at === 0}
+          />
         ))}
       </ul>
     </section>

@@ -1,4 +1,5 @@
 import { Suspense } from 'react';
+import { READING_EVERY_DAYS } from '#shared/today/duties.ts';
 import { todayList } from '#shared/today/today.ts';
 import { dayIn } from '#shared/units/dayIn.ts';
 import { formatDay } from '#shared/units/day.ts';
@@ -64,6 +65,12 @@ function Lists({ list }: { list: ReturnType<typeof todayList> }) {
         <p className="text-lead text-ink2">Nothing is due today.</p>
       )}
       {week.length > 0 && <DutyList title="This week" duties={week} today={today} dated />}
+      {[...due, ...week].some(({ kind }) => kind === 'reading') && (
+        <p className="mt-6 text-small text-ink2">
+          A fermenting beer is read every {READING_EVERY_DAYS} days here: common practice. Near its
+          end two readings 48 hours apart tell that it is done.
+        </p>
+      )}
     </>
   );
 }

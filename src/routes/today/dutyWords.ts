@@ -2,7 +2,6 @@ import type { Abilities } from '#shared/api/people.ts';
 import type { UnitPrefs } from '#shared/api/units.ts';
 import type { BoardIndex } from '#shared/chain/board.ts';
 import type { Day } from '#shared/rules/vocabulary.ts';
-import { READING_EVERY_DAYS } from '#shared/today/duties.ts';
 import type { Duty } from '#shared/today/duty.ts';
 import { HOP_DAYS } from '#shared/today/hops.ts';
 import { daysBetween, formatDay } from '#shared/units/day.ts';
@@ -138,11 +137,10 @@ function rackWords(duty: Duty & { kind: 'rack' }, name: string, { index, today }
 }
 
 function readingWords(duty: Duty & { kind: 'reading' }, name: string, { today }: Sight) {
-  const usual = `Every ${READING_EVERY_DAYS} days is common practice.`;
   if (duty.lastOn === null)
-    return { title: `Read ${name}`, because: `Nothing has been read of it yet. ${usual}` };
+    return { title: `Read ${name}`, because: 'Nothing has been read of it yet.' };
   const ago = daysBetween(duty.lastOn, today);
   const when =
     ago < 1 ? 'today' : ago === 1 ? 'yesterday' : `on ${formatDay(duty.lastOn)}, ${ago} days ago`;
-  return { title: `Read ${name}`, because: `Last read ${when}. ${usual}` };
+  return { title: `Read ${name}`, because: `Last read ${when}.` };
 }
