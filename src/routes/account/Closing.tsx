@@ -30,9 +30,8 @@ function HandOverFirst({ breweries }: { breweries: ClosingPreview['heldBy'] }) {
   return (
     <>
       <Notice kind="hold">
-        A brewery always has a head brewer, and others belong to{' '}
-        {breweries.length === 1 ? 'one' : 'some'} of which you are the only one. Hand over first,
-        then close the account.
+        You are the only head brewer of {breweries.length === 1 ? 'a brewery' : 'breweries'} that
+        others belong to. Hand over first, then close the account.
       </Notice>
       <ul className="mt-4 space-y-1">
         {breweries.map(({ slug, name }) => (

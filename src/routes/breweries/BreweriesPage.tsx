@@ -37,9 +37,9 @@ function Foot({ me }: { me: Person }) {
   const navigate = useNavigate();
   const signOut = useSignOut();
   return (
-    <p className="mt-8 flex flex-wrap items-center gap-x-4 border-t border-line pt-4 text-ink2">
-      <span className="min-w-0 grow wrap-anywhere">Signed in as {me.email}</span>
-      <TextLink to="/account" className="py-2.5">
+    <p className="mt-8 flex flex-wrap items-center gap-x-2 border-t border-line pt-4 text-ink2">
+      <span className="w-full wrap-anywhere">Signed in as {me.email}</span>
+      <TextLink to="/account" className="py-2.5 pr-2 text-ink">
         Account
       </TextLink>
       <Button

@@ -4,7 +4,7 @@ import { guestAddress } from '../../app/guestAddress.ts';
 import { useBrewery } from '../../app/useBrewery.ts';
 import { Menu, MenuLabel, MenuLink, MenuSeparator } from '../../components/ui/Menu.tsx';
 
-/** The brewery that is shown, and the way to the others. */
+/** The brewery that is shown, and the way to the others; where there is no room, one's account menu leads there. */
 export function BreweryMenu() {
   const { brewerySlug, name } = useBrewery();
   const { data: me } = useSession();
@@ -14,7 +14,7 @@ export function BreweryMenu() {
       button={{
         'aria-label': `Brewery: ${name}`,
         className:
-          'flex min-h-9 min-w-0 items-center gap-1.5 rounded-lg px-2 hover:bg-on-bar/8 max-tablet:hidden',
+          'flex min-h-9 min-w-0 items-center gap-1.5 rounded-lg px-2 hover:bg-on-bar/8 max-wide:hidden',
         children: (
           <>
             <span className="truncate">{name}</span>
