@@ -42,8 +42,11 @@ export function useChangeRole(slug: string) {
 
 export function useHandOver(slug: string) {
   return useMutation({
-    mutationFn: ({ personId, version, ...body }: Of & HandOver) =>
-      request(z.array(member), 'POST', api.handOver(slug, personId), { body, ifMatch: version }),
+    mutationFn: ({ personId, version, stepDownTo }: Of & HandOver) =>
+      request(z.array(member), 'POST', api.handOver(slug, personId), {
+        body: { stepDownTo },
+        ifMatch: version,
+      }),
     ...useBoardChanged(slug),
   });
 }
