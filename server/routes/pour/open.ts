@@ -1,6 +1,6 @@
 import { eq, sql } from 'drizzle-orm';
-import type { PourStepRequest } from '#shared/api/pour.ts';
-import { pourFound } from '#shared/api/pour.ts';
+import type { Batch } from '#shared/api/batch.ts';
+import { pourFound, type PourStepRequest } from '#shared/api/pour.ts';
 import { indexBoard } from '#shared/chain/board.ts';
 import { pourRun } from '../../db/schema/pour.ts';
 import { demandMade } from '../../http/create.ts';
@@ -21,13 +21,7 @@ export async function openRun(hand: Hand, batchId: string, id: string): Promise<
     throw problem('pour-held', { detail: `${current.heldBy.name} has it in hand`, current });
   }
   const batch = one(board.batches, batchId);
-  if (batch.stage !== 'pencilled' || batch.chainId === null)
-    throw problem('pour-over', {
-      detail:
-        batch.stage === 'pencilled'
-          ? `Put ${batch.name} on a shelf first`
-          : `${batch.name} is ${batch.stage}: its wort is poured`,
-    });
+  demandPourable(batch);
   const cake = indexBoard(board).predecessor(batchId);
   demandMade(
     await tx
@@ -52,6 +46,12 @@ export async function openRun(hand: Hand, batchId: string, id: string): Promise<
     before: null,
     after: { pourRun: id },
   };
+}
+
+function demandPourable({ name, stage, chainId }: Batch): void {
+  if (stage !== 'pencilled')
+    throw problem('pour-over', { detail: `${name} is ${stage}: its wort is poured` });
+  if (chainId === null) throw problem('pour-over', { detail: `Put ${name} on a shelf first` });
 }
 
 /** To another step, forward or back, with what the steps found. */

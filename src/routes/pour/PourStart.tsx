@@ -5,9 +5,9 @@ import { newId } from '../../app/newId.ts';
 import { VerdictPill } from '../../components/drawn/VerdictPill.tsx';
 import { Button } from '../../components/ui/Button.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
-import { FindingBlock } from '../board/panel/FindingBlock.tsx';
 import { useBoardView } from '../board/view/BoardView.tsx';
 import { countedFindings } from '../board/view/words.ts';
+import { Findings } from './Findings.tsx';
 import { OtherWays } from './ways/OtherWays.tsx';
 
 /** Before a run: what the link says, and the one button that takes it in hand. */
@@ -33,9 +33,7 @@ export function PourStart({ batch, cakeOf }: { batch: Batch; cakeOf: Batch | nul
               unchecked={link.unchecked.length}
             />
           </p>
-          {link.findings.map((finding) => (
-            <FindingBlock key={finding.rule} finding={finding} />
-          ))}
+          <Findings findings={link.findings} laterId={batch.id} />
         </>
       )}
       {!cakeOf && (

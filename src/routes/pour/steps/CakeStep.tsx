@@ -1,9 +1,9 @@
 import type { Batch } from '#shared/api/batch.ts';
 import type { Verdict } from '#shared/rules/vocabulary.ts';
 import { VerdictMark } from '../../../components/drawn/VerdictMark.tsx';
-import { FindingBlock } from '../../board/panel/FindingBlock.tsx';
 import { AcceptHold } from '../../board/panel/AcceptHold.tsx';
 import { Caution } from '../Caution.tsx';
+import { Findings } from '../Findings.tsx';
 import { usePourView } from '../pourView.ts';
 import { StepFoot } from '../StepFoot.tsx';
 import { TONES } from '../words.ts';
@@ -32,9 +32,7 @@ export function CakeStep() {
       {link && others.length > 0 && (
         <div className="mt-4 max-w-xl">
           <h3 className="mb-3 text-h3">What else the link says</h3>
-          {others.map((finding) => (
-            <FindingBlock key={finding.rule} finding={finding} />
-          ))}
+          <Findings findings={others} laterId={batch.id} />
           <AcceptHold later={batch} answer={link} />
         </div>
       )}

@@ -77,35 +77,12 @@ function onNewShelf(
   source: Batch | null,
   units: UnitPrefs,
 ): Way | null {
-  const from = batch.chainId;
-  const mates = from === null ? [] : index.batchesOf(from);
-  const behind = mates.slice(mates.findIndex(({ id }) => id === batch.id) + 1).filter(isPencilled);
+  const moves = movesOnto(index, batch, newChain);
   let board = index.board;
-  let after: string | null = null;
-  const moves: Way['moves'] = [];
-  for (const { id } of [batch, ...behind]) {
-    const move: Way['moves'][number] =
-      after === null
-        ? {
-            batchId: id,
-            toChainId: 'new',
-            afterBatchId: null,
-            expectedChainId: from,
-            dates: 'pull',
-            newChain,
-          }
-        : {
-            batchId: id,
-            toChainId: newChain.id,
-            afterBatchId: after,
-            expectedChainId: from,
-            dates: 'pull',
-          };
+  for (const move of moves) {
     const done = moveBatch(board, move);
     if (!done.ok) return null;
     board = withRows(board, done.batches, done.chains);
-    moves.push(move);
-    after = id;
   }
   return {
     kind,
@@ -116,6 +93,23 @@ function onNewShelf(
     moves,
     days: [],
   };
+}
+
+/** One move for the new shelf, then one after the other onto it. */
+function movesOnto(index: BoardIndex, batch: Batch, newChain: ChainCreate): Way['moves'] {
+  const from = batch.chainId;
+  const mates = from === null ? [] : index.batchesOf(from);
+  const behind = mates.slice(mates.findIndex(({ id }) => id === batch.id) + 1).filter(isPencilled);
+  const rest = { expectedChainId: from, dates: 'pull' } as const;
+  return [
+    { ...rest, batchId: batch.id, toChainId: 'new', afterBatchId: null, newChain },
+    ...behind.map(({ id }, place) => ({
+      ...rest,
+      batchId: id,
+      toChainId: newChain.id,
+      afterBatchId: (behind[place - 1] ?? batch).id,
+    })),
+  ];
 }
 
 /** The next free brew day after today, and the dates behind along with it. */

@@ -62,12 +62,7 @@ export function PourDialog({ at, cleared, onClose }: PourDialogProps) {
   const time = clockTime(Date.parse(at.deviceAt) + at.clockOffsetMs, board.brewery.timeZone);
   return (
     <Dialog open onClose={onClose} title={`${batch.name} is poured`} lead={`At ${time}.`}>
-      {!cleared && (
-        <Notice kind="hold" className="mb-4">
-          There is no leave for this pour. It is recorded as that, and stays red until a head brewer
-          signs a reason.
-        </Notice>
-      )}
+      {!cleared && <WithoutLeave />}
       <form
         noValidate
         className="grid gap-4"
@@ -105,6 +100,13 @@ export function PourDialog({ at, cleared, onClose }: PourDialogProps) {
     </Dialog>
   );
 }
+
+const WithoutLeave = () => (
+  <Notice kind="hold" className="mb-4">
+    There is no leave for this pour. It is recorded as that, and stays red until a head brewer signs
+    a reason.
+  </Notice>
+);
 
 type Field = typeof f.volumeL;
 
