@@ -1,9 +1,7 @@
-import { Upload } from 'lucide-react';
+import { TriangleAlert, Upload } from 'lucide-react';
 import { useState } from 'react';
-import { lazyPart } from '../app/lazyPart.tsx';
+import { OutboxDialog } from './OutboxDialog.tsx';
 import { useOutbox, useSending } from './useOutbox.ts';
-
-const OutboxDialog = lazyPart(async () => (await import('./OutboxDialog.tsx')).OutboxDialog);
 
 /** How much waits to be sent, at the top of every page; nothing where nothing waits. */
 export function OutboxMark() {
@@ -12,17 +10,18 @@ export function OutboxMark() {
   const [isOpen, setOpen] = useState(false);
   const count = entries.length;
   const isStopped = Boolean(entries[0]?.refusal);
-  const words = isStopped ? 'not taken' : 'waiting';
   return (
     <>
       {count > 0 && (
         <button
           type="button"
+          aria-label={isStopped ? '1 not taken' : `${count} waiting`}
           onClick={() => setOpen(true)}
-          className="flex min-h-8 items-center gap-1.5 rounded-full border-[1.5px] border-on-bar px-2.5 font-semibold whitespace-nowrap text-on-bar max-tablet:min-h-11"
+          className="flex min-h-8 items-center gap-1.5 rounded-full border-[1.5px] border-on-bar px-2.5 font-semibold whitespace-nowrap text-on-bar max-tablet:min-h-11 max-tablet:min-w-11 max-tablet:justify-center"
         >
-          <Upload size={16} aria-hidden />
-          {isStopped ? `1 ${words}` : `${count} ${words}`}
+          {isStopped ? <TriangleAlert size={16} aria-hidden /> : <Upload size={16} aria-hidden />}
+          {isStopped ? 1 : count}
+          <span className="max-tablet:hidden">{isStopped ? 'not taken' : 'waiting'}</span>
         </button>
       )}
       <span aria-live="polite" className="sr-only">
