@@ -1,6 +1,8 @@
 /**
- * By how much this device's clock is off: the server's time less the device's, in the middle of the
- * quickest request so far. A brew day's times are the device's, put right by this.
+ * By how much this device's clock is off. The server's time in an answer was the device's at some
+ * moment between asking and hearing, so the truth lies within half of that time of the middle. An
+ * offset that lies there stays, so that times do not jump about; one that cannot be right is
+ * replaced, as when somebody set the clock. A brew day's times are the device's, put right by this.
  */
 export interface ServerClock {
   /** Milliseconds to add to the device's clock. */
@@ -13,24 +15,16 @@ export interface ServerClock {
 
 export function createServerClock(deviceNow: () => number): ServerClock {
   let offset = 0;
-  let quickest = Number.POSITIVE_INFINITY;
-  let last = 0;
   return {
     offsetMs: () => offset,
     now: () => deviceNow() + offset,
     async measured(ask) {
       const sent = deviceNow();
       const answer = await ask();
-      const came = deviceNow();
-      const took = came - sent;
-      const found = Math.round(Date.parse(answer.now) - (sent + took / 2));
-      // A clock that was set in between is believed at once; else the quickest answer is the best.
-      const wasSet = Math.abs(found - offset) > Math.max(took, 0) + Math.max(last, 0) + 1000;
-      if (took >= 0 && (took <= quickest || wasSet)) {
-        offset = found;
-        quickest = took;
-      }
-      last = took;
+      const half = (deviceNow() - sent) / 2;
+      const found = Math.round(Date.parse(answer.now) - (sent + half));
+      // Less than nothing: the clock was set while the answer was on its way.
+      if (half >= 0 && Math.abs(found - offset) > half + 1) offset = found;
       return answer;
     },
   };

@@ -34,7 +34,7 @@ describe('what was typed for a temperature', () => {
 });
 
 describe('the server’s clock', () => {
-  test('is measured in the middle of a request, and the quickest counts', async () => {
+  test('is measured in the middle of a request, and stays while it can be right', async () => {
     let device = 1_000_000;
     const clock = createServerClock(() => device);
     const ask = (took: number, serverAhead: number) =>
@@ -43,12 +43,12 @@ describe('the server’s clock', () => {
         device += took;
         return { now };
       });
+    await ask(4000, 900);
+    expect(clock.offsetMs(), 'a slow answer proves nothing wrong').toBe(0);
     await ask(400, 60_000);
     expect(clock.offsetMs()).toBe(60_000);
     await ask(100, 60_010);
-    expect(clock.offsetMs()).toBe(60_010);
-    await ask(800, 60_200);
-    expect(clock.offsetMs()).toBe(60_010);
+    expect(clock.offsetMs()).toBe(60_000);
     // Somebody set the telephone's clock back an hour.
     await ask(300, 3_660_000);
     expect(clock.offsetMs()).toBe(3_660_000);
