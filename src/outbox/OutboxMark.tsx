@@ -1,5 +1,6 @@
 import { TriangleAlert, Upload } from 'lucide-react';
-import { useState } from 'react';
+import { useEffect, useState } from 'react';
+import { useOnline } from '../app/useOnline.ts';
 import { OutboxDialog } from './OutboxDialog.tsx';
 import { useOutbox, useSending } from './useOutbox.ts';
 
@@ -10,9 +11,10 @@ export function OutboxMark() {
   const [isOpen, setOpen] = useState(false);
   const count = entries.length;
   const isStopped = Boolean(entries[0]?.refusal);
+  const isTold = useTold(count > 0) || isStopped;
   return (
     <>
-      {count > 0 && (
+      {isTold && (
         <button
           type="button"
           aria-label={isStopped ? '1 not taken' : `${count} waiting`}
@@ -25,11 +27,28 @@ export function OutboxMark() {
         </button>
       )}
       <span aria-live="polite" className="sr-only">
-        {count > 0 && spoken(count, isStopped)}
+        {isTold && spoken(count, isStopped)}
       </span>
       {isOpen && <OutboxDialog open onClose={() => setOpen(false)} />}
     </>
   );
+}
+
+const ON_ITS_WAY_MS = 1500;
+
+/** What is on its way is not told of: only what cannot be sent now, or has waited for a while. */
+function useTold(waits: boolean): boolean {
+  const online = useOnline();
+  const [isLong, setLong] = useState(false);
+  useEffect(() => {
+    if (!waits) return;
+    const timer = window.setTimeout(() => setLong(true), ON_ITS_WAY_MS);
+    return () => {
+      window.clearTimeout(timer);
+      setLong(false);
+    };
+  }, [waits]);
+  return waits && (isLong || !online);
 }
 
 function spoken(count: number, isStopped: boolean): string {

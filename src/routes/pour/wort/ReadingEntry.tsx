@@ -27,7 +27,8 @@ export function ReadingEntry() {
         kind: 'read',
         body: { runId: run.id, id: newId(), c: now.value, typed, ...deviceTime() },
       });
-      setDraft(written('temperature', null, units));
+      // The next one may be typed by now.
+      setDraft((then) => (then.text === now.text ? written('temperature', null, units) : then));
     } catch {
       // The sentence stands below; the digits stay in the field.
     }
