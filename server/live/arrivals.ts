@@ -2,7 +2,7 @@ import type { Config } from '../config.ts';
 import type { Db } from '../db/client.ts';
 import type { Log } from '../log.ts';
 import { arrive, depart, hereIn, sweep } from './presence.ts';
-import type { Stream } from './stream.ts';
+import { writeEvent, type Stream } from './stream.ts';
 import type { Streams } from './streams.ts';
 
 /** Who reloads a page does not leave and come again. */
@@ -81,9 +81,10 @@ export function createArrivals({ config, db, log, streams }: Scene): Arrivals {
 
 function tellHere(streams: Iterable<Stream>, people: string[]): void {
   const here = people.join();
+  const event = writeEvent('here', { people });
   for (const stream of streams) {
     if (stream.here === here) continue;
     stream.here = here;
-    stream.send('here', { people });
+    stream.send(event);
   }
 }

@@ -3,7 +3,7 @@ import type { Db } from '../db/client.ts';
 import { loadBoardRows } from '../routes/board/load.ts';
 import { guestView } from '../routes/guests/view.ts';
 import { guestChains, type GuestChain } from './admission.ts';
-import type { Stream } from './stream.ts';
+import { writeEvent, type Stream } from './stream.ts';
 import type { Streams } from './streams.ts';
 
 /**
@@ -22,6 +22,8 @@ export interface GuestNews {
 
 /** Changes that come together are looked at once. */
 const GATHER_MS = 50;
+
+const ELSEWHERE = writeEvent('elsewhere', {});
 
 export function createGuestNews(
   db: Db,
@@ -44,7 +46,7 @@ export function createGuestNews(
       try {
         const here = watched.filter((each) => each.seasonId === seasonId);
         for (const stream of streamsOf(streams, await changedAmong(db, here, looks)))
-          stream.send('elsewhere', {});
+          stream.send(ELSEWHERE);
       } catch (error) {
         // Once more with the next heartbeat.
         dirty.add(seasonId);
@@ -63,7 +65,7 @@ export function createGuestNews(
       if (welcomed.has(stream)) continue;
       // What changed since their page read the chain, and before it was looked at, is read by this.
       welcomed.add(stream);
-      stream.send('elsewhere', {});
+      stream.send(ELSEWHERE);
     }
     await lookAtDirty();
   };

@@ -8,7 +8,7 @@ import { outcasts, revisionsOf } from './admission.ts';
 import { createArrivals } from './arrivals.ts';
 import { createGuestNews } from './guestNews.ts';
 import { listen } from './listener.ts';
-import { openStream, type Stream, type Watcher } from './stream.ts';
+import { openStream, writeEvent, type Stream, type Watcher } from './stream.ts';
 import { createStreams, type Streams } from './streams.ts';
 
 export interface LiveDeps {
@@ -38,6 +38,7 @@ export function startLive(deps: LiveDeps): Live {
   const scene = { ...deps, streams: createStreams() };
   const { streams } = scene;
   const arrivals = createArrivals(scene);
+  const hello = writeEvent('hello', { beatMs: config.heartbeatMs });
   let isClosed = false;
   const tried = (what: string, work: Promise<unknown>) =>
     void work.catch((error: unknown) => {
@@ -49,7 +50,7 @@ export function startLive(deps: LiveDeps): Live {
     onNote(note) {
       if (note.kind === 'here') arrivals.changed(note.seasonId);
       else if (note.kind === 'season') {
-        for (const stream of streams.ofSeason(note.seasonId)) advance(stream, note.revision);
+        advance(streams.ofSeason(note.seasonId), note.revision);
         guests.changed(note.seasonId);
       } else {
         const own = streams.ofPerson(note.personId);
@@ -65,6 +66,8 @@ export function startLive(deps: LiveDeps): Live {
   const beating = setInterval(() => {
     listener.check();
     beat(streams);
+    // A note that came while the database could not be asked is made good here.
+    tried('Streams not caught up', catchUp(scene, streams.seasons()));
     tried('Streams not checked', expel(scene, streams.all()).then(guests.follow));
     tried('Presence not renewed', arrivals.renew());
   }, config.heartbeatMs);
@@ -75,7 +78,7 @@ export function startLive(deps: LiveDeps): Live {
       if (!res.socket || res.socket.destroyed) return;
       const stream = openStream(res, { ...watcher, streamId: randomUUID() });
       stream.revision = since;
-      stream.send('hello', { beatMs: config.heartbeatMs });
+      stream.send(hello);
       // In the hub first, then the revision is read: what comes between is told twice, never missed.
       streams.add(stream);
       arrivals.come(stream);
@@ -104,16 +107,19 @@ function beat(streams: Streams): void {
   }
 }
 
-function advance(stream: Stream, revision: number): void {
-  if (revision <= stream.revision) return;
-  stream.revision = revision;
-  stream.send('revision', { revision });
+function advance(streams: Iterable<Stream>, revision: number): void {
+  const event = writeEvent('revision', { revision });
+  for (const stream of streams) {
+    if (revision <= stream.revision) continue;
+    stream.revision = revision;
+    stream.send(event);
+  }
 }
 
 /** Tells where the seasons are now; nobody who is there already hears of it. */
 async function catchUp({ db, streams }: Scene, seasonIds: string[], only?: Stream): Promise<void> {
   for (const { id, revision } of await revisionsOf(db, seasonIds))
-    for (const stream of only ? [only] : streams.ofSeason(id)) advance(stream, revision);
+    advance(only ? [only] : streams.ofSeason(id), revision);
 }
 
 /** Ends the streams of those who are signed out, or no longer of the brewery. */

@@ -11,6 +11,20 @@ export interface Watcher {
   seasonId: string;
 }
 
+/** An event as it is sent: written once, however many streams it goes to. */
+export interface WrittenEvent {
+  name: LiveEventName;
+  bytes: Buffer;
+}
+
+export function writeEvent<K extends LiveEventName>(name: K, data: LiveEvents[K]): WrittenEvent {
+  const id = 'revision' in data ? `id: ${data.revision}\n` : '';
+  const text = `event: ${name}\n${id}data: ${JSON.stringify(data)}\n\n`;
+  return { name, bytes: Buffer.from(text) };
+}
+
+const BEAT = Buffer.from(':\n\n');
+
 /** One open answer. */
 export interface Stream extends Watcher {
   /** When it began, milliseconds of the process's own clock. */
@@ -19,7 +33,7 @@ export interface Stream extends Watcher {
   revision: number;
   /** Everybody here, as it was told last. */
   here: string;
-  send<K extends LiveEventName>(name: K, data: LiveEvents[K]): void;
+  send(event: WrittenEvent): void;
   beat(): void;
   /** Ends it; with a reason the client does not come back. */
   end(why?: Ended): void;
@@ -42,41 +56,35 @@ export function openStream(res: Response, watcher: Watcher): Stream {
   res.flushHeaders();
   let isFull = false;
   let deaf = 0;
-  const waiting = new Map<LiveEventName, string>();
-  const write = (text: string) => {
-    isFull = !res.write(text);
+  const waiting = new Map<LiveEventName, Buffer>();
+  const write = (bytes: Buffer) => {
+    isFull = !res.write(bytes);
   };
   res.on('drain', () => {
     isFull = false;
     deaf = 0;
     if (waiting.size === 0) return;
-    const text = [...waiting.values()].join('');
+    const bytes = Buffer.concat([...waiting.values()]);
     waiting.clear();
-    write(text);
+    write(bytes);
   });
   return {
     ...watcher,
     since: performance.now(),
     revision: -1,
     here: '',
-    send(name, data) {
-      const text = eventText(name, data);
-      if (isFull) waiting.set(name, text);
-      else write(text);
+    send({ name, bytes }) {
+      if (isFull) waiting.set(name, bytes);
+      else write(bytes);
     },
     beat() {
-      if (!isFull) return write(':\n\n');
+      if (!isFull) return write(BEAT);
       deaf += 1;
       if (deaf >= DEAF_BEATS) res.destroy();
     },
     end(why) {
-      if (why) write(eventText('ended', { why }));
+      if (why) write(writeEvent('ended', { why }).bytes);
       res.end();
     },
   };
-}
-
-function eventText<K extends LiveEventName>(name: K, data: LiveEvents[K]): string {
-  const id = 'revision' in data ? `id: ${data.revision}\n` : '';
-  return `event: ${name}\n${id}data: ${JSON.stringify(data)}\n\n`;
 }

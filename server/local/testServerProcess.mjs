@@ -75,6 +75,8 @@ export async function startTestServer({
     databaseUrl,
     keys: KEYS,
     ended: server.ended,
+    /** Of its first process: it has another after `again`. */
+    pid: server.pid,
     /** Ends the server as a power cut would. */
     kill: async () => {
       process.kill(server.pid, 'SIGKILL');

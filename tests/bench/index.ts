@@ -1,16 +1,29 @@
 import { cpus, loadavg } from 'node:os';
 import { batchPage } from './batchPage.ts';
 import { board } from './board.ts';
+import { breweries } from './breweries.ts';
 import { cooling } from './cooling.ts';
 import { drag } from './drag.ts';
 import { engine } from './engine.ts';
 import { live } from './live.ts';
 import { moves } from './moves.ts';
 import { pages } from './pages.ts';
+import { streams } from './streams.ts';
 import type { Part, Row } from './row.ts';
 
 /** Each part of the bench; one may be asked for by name. */
-const PARTS: readonly Part[] = [engine, cooling, board, moves, pages, drag, batchPage, live];
+const PARTS: readonly Part[] = [
+  engine,
+  cooling,
+  board,
+  breweries,
+  moves,
+  pages,
+  drag,
+  batchPage,
+  live,
+  streams,
+];
 
 async function main(names: readonly string[]): Promise<void> {
   const unknown = names.filter((name) => !PARTS.some((part) => part.name === name));

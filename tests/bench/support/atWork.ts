@@ -14,6 +14,8 @@ export interface AtWork {
   url: string;
   databaseUrl: string;
   keys: string;
+  /** Of the server's process. */
+  pid: number;
   db: Db;
   brewery: TestBrewery;
 }
@@ -25,16 +27,20 @@ const onDisk = () => joinCluster(`${testHome}-bench`, []);
  * A server process of its own on a database of its own, with a season of this size on its board:
  * all on this machine, as `npm start` has it.
  */
-export async function atWork<T>(size: BoardSize, work: (at: AtWork) => Promise<T>): Promise<T> {
+export async function atWork<T>(
+  size: BoardSize,
+  work: (at: AtWork) => Promise<T>,
+  settings: Record<string, string> = {},
+): Promise<T> {
   const folder = mkdtempSync(join(tmpdir(), 'barmkin-bench-'));
   const logFile = join(folder, 'server.log');
-  const server = await startTestServer({ port: 0, logFile, join: onDisk });
+  const server = await startTestServer({ port: 0, logFile, join: onDisk, settings });
   const { db, pool } = connect(server.databaseUrl, { max: 2 });
   try {
     const brewery = await writeBrewery(db);
     await writeBoard(db, brewery, planOf(makeBoard(size)));
-    const { url, databaseUrl, keys } = server;
-    return await work({ url, databaseUrl, keys, db, brewery });
+    const { url, databaseUrl, keys, pid } = server;
+    return await work({ url, databaseUrl, keys, pid, db, brewery });
   } finally {
     await pool.end();
     await server.close();

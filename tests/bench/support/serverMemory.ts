@@ -1,22 +1,30 @@
-import { readdirSync, readFileSync } from 'node:fs';
+import { existsSync, mkdtempSync, readFileSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { setTimeout as pause } from 'node:timers/promises';
+import { fileURLToPath } from 'node:url';
 
-/** Resident memory, in bytes, of the one server process that this process started (Linux). */
-export function serverMemory(): number {
-  const found = readdirSync('/proc').filter((pid) => /^\d+$/.test(pid) && isOurServer(pid));
-  const [pid, ...more] = found;
-  if (pid === undefined || more.length > 0)
-    throw new Error(`${found.length} servers were started from here, not one`);
-  const kb = /^VmRSS:\s+(\d+) kB$/m.exec(readFileSync(`/proc/${pid}/status`, 'utf8'))?.[1];
-  return Number(kb) * 1024;
+export interface MemoryProbe {
+  /** What the server must be started with. */
+  settings: Record<string, string>;
+  /** What the server holds once it has collected its garbage. */
+  look(pid: number): Promise<NodeJS.MemoryUsage>;
+  close(): void;
 }
 
-function isOurServer(pid: string): boolean {
-  try {
-    const parent = /^PPid:\s+(\d+)$/m.exec(readFileSync(`/proc/${pid}/status`, 'utf8'))?.[1];
-    const command = readFileSync(`/proc/${pid}/cmdline`, 'utf8');
-    return Number(parent) === process.pid && command.includes('server/index.ts');
-  } catch {
-    // It ended while it was looked at.
-    return false;
-  }
+/** Looks into the memory of a server process. */
+export function openMemoryProbe(): MemoryProbe {
+  const folder = mkdtempSync(join(tmpdir(), 'barmkin-memory-'));
+  const file = join(folder, 'memory.json');
+  const script = fileURLToPath(new URL('./memoryProbe.mjs', import.meta.url));
+  return {
+    settings: { NODE_OPTIONS: `--import ${script}`, MEMORY_FILE: file },
+    async look(pid) {
+      rmSync(file, { force: true });
+      process.kill(pid, 'SIGUSR2');
+      while (!existsSync(file)) await pause(50);
+      return JSON.parse(readFileSync(file, 'utf8')) as NodeJS.MemoryUsage;
+    },
+    close: () => rmSync(folder, { recursive: true, force: true }),
+  };
 }
