@@ -33,7 +33,7 @@ export function OutboxDialog({ open, onClose }: { open: boolean; onClose: () => 
             Send now
           </Button>
         )}
-        <Button look="first" onClick={onClose}>
+        <Button look={isStopped ? 'quiet' : 'first'} onClick={onClose}>
           Done
         </Button>
       </div>

@@ -19,9 +19,11 @@ export function OutboxEntry({ entry, isBehind }: { entry: Entry; isBehind: boole
       {entry.refusal && <Refused entry={entry} />}
       <div className="mt-2 flex flex-wrap items-center gap-x-4 gap-y-2">
         <TextLink to={entry.page}>To its page</TextLink>
-        <Button look="text" size="small" onClick={() => setAsking(true)}>
-          Discard
-        </Button>
+        {entry.refusal?.kind !== 'changed-since' && (
+          <Button look="text" size="small" onClick={() => setAsking(true)}>
+            Discard
+          </Button>
+        )}
       </div>
       <ConfirmDialog
         open={isAsking}
