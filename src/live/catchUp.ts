@@ -36,10 +36,14 @@ export function createCatchUp(client: QueryClient, slug: string, seasonId: strin
     isWorking = true;
     await atRest(client, slug);
     while (isBehind()) {
+      const wasForced = isForced;
       isForced = false;
       await client.invalidateQueries({ queryKey });
-      // Without a connection the next reads come when it is back.
-      if (client.getQueryState(queryKey)?.status === 'error') break;
+      if (client.getQueryState(queryKey)?.status === 'error') {
+        // What was asked for is still to be read, at the next heartbeat or when the connection is back.
+        isForced ||= wasForced;
+        break;
+      }
       await atRest(client, slug);
     }
     isWorking = false;

@@ -8,6 +8,7 @@ import { keepConnected, type Told } from './connection.ts';
 import { fetchEvents } from './fetchEvents.ts';
 import { liveStore } from './liveStore.ts';
 import { onWake } from './onWake.ts';
+import { readFailedAgain } from './readFailedAgain.ts';
 import { shareStream } from './shareStream.ts';
 
 export const useLive = () => useSyncExternalStore(liveStore.subscribe, liveStore.get);
@@ -40,6 +41,7 @@ export function useLiveSeason(slug: string) {
           return void client.invalidateQueries(sessionQuery);
         case 'beat':
           catchUp.again();
+          readFailedAgain(client);
           return guests.again();
       }
     };

@@ -86,11 +86,11 @@ const LABELS: Record<CommentAbout['kind'], string> = {
   batch: 'Say something about this batch',
 };
 
-/** One id until it is said: sent again, it is said once. */
+/** What had no answer is sent again under its id, and said once; other words are another comment. */
 function Say({ chainId, about }: { chainId: string; about: CommentAbout }) {
   const { slug } = useBoardView();
   const { mutateAsync, isPending, error } = useSay(slug, chainId);
-  const [id, setId] = useState(newId);
+  const [tried, setTried] = useState<{ id: string; text: string } | null>(null);
   return (
     <TalkForm
       label={LABELS[about.kind]}
@@ -98,8 +98,10 @@ function Say({ chainId, about }: { chainId: string; about: CommentAbout }) {
       busy={isPending}
       error={error}
       onSend={async (text) => {
-        await mutateAsync({ id, about, text });
-        setId(newId());
+        const said = tried?.text === text ? tried : { id: newId(), text };
+        setTried(said);
+        await mutateAsync({ ...said, about });
+        setTried(null);
       }}
     />
   );

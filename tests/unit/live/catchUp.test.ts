@@ -105,3 +105,18 @@ it('reads for a chain that is here as a guest, whatever the revision', async () 
   elsewhere();
   await expect.poll(() => server.reads).toBe(1);
 });
+
+it('reads for a guest’s chain at the next heartbeat where the first read failed', async () => {
+  const { elsewhere, again } = createCatchUp(client, SLUG, boardAt(1).season.id);
+  const { fetch } = globalThis;
+  vi.stubGlobal('fetch', () => Promise.reject(new TypeError('lost')));
+  elsewhere();
+  await expect.poll(() => client.getQueryState(boardQuery(SLUG).queryKey)?.status).toBe('error');
+  vi.stubGlobal('fetch', fetch);
+  server.revision = 2;
+  again();
+  await expect.poll(shown).toBe(2);
+  again();
+  await new Promise((resolve) => setTimeout(resolve, 20));
+  expect(server.reads, 'once it was read it is not read again').toBe(1);
+});
