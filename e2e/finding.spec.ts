@@ -65,8 +65,7 @@ test('the board is filtered, its address keeps that, and the keys clear it', asy
   await expect(told).toContainText('1 of 201');
   await expect(board).toHaveURL(/stage=pencilled/);
 
-  await board.getByRole('heading', { level: 1 }).click();
-  await board.goto(`/b/${brewery.slug}?stage=racked`);
+  await page.open(`${brewery.slug}?stage=racked`);
   await expect(told).toContainText('100 of 201 batches, on 100 of 100 shelves');
   await board.keyboard.press('x');
   await expect(filter).toBeHidden();
@@ -111,10 +110,11 @@ test('each key does what the list of keys says, none of them while typing, and a
   await expect(board.getByRole('dialog')).toHaveCount(1);
   await board.keyboard.press('Escape');
   await board.getByRole('button', { name: 'Leave without saving' }).click();
-  await expect(form).toBeHidden();
+  await expect(board.getByRole('dialog')).toHaveCount(0);
   await board.keyboard.press('s');
   await expect(board.getByRole('dialog', { name: 'New shelf' })).toBeVisible();
   await board.keyboard.press('Escape');
+  await expect(board.getByRole('dialog')).toHaveCount(0);
   await board.keyboard.press('r');
   await expect(board).toHaveURL(/\/record$/);
   await expect(board.getByRole('heading', { name: 'Record', level: 1 })).toBeVisible();
@@ -125,6 +125,7 @@ test('each key does what the list of keys says, none of them while typing, and a
   await board.getByRole('menuitem', { name: 'Keys' }).click();
   await keys.getByLabel('Single keys do something, on this device').uncheck();
   await board.keyboard.press('Escape');
+  await expect(keys).toBeHidden();
   await board.reload();
   await expect(page.batch('Ebb Pale')).toBeVisible();
   for (const key of ['n', '/', '?', 'f']) await board.keyboard.press(key);
