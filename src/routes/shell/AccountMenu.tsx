@@ -9,7 +9,6 @@ import { Menu, MenuItem, MenuLabel, MenuLink, MenuSeparator } from '../../compon
 import { say } from '../../components/ui/Toast.tsx';
 import { sentenceOf } from '../../api/errors.ts';
 import { keysStore } from '../../keys/findStore.ts';
-import { useOutbox } from '../../outbox/useOutbox.ts';
 import { initialsOf } from './initials.ts';
 import { SignOutDialog } from './SignOutDialog.tsx';
 
@@ -39,7 +38,7 @@ export function AccountMenu() {
         <MenuItem onSelect={() => keysStore.set(true)}>Keys</MenuItem>
         <MenuLink to="/breweries">Breweries</MenuLink>
         <MenuSeparator />
-        <MenuItem onSelect={ask}>Sign out</MenuItem>
+        <MenuItem onSelect={() => void ask()}>Sign out</MenuItem>
       </Menu>
       {isAsking > 0 && <SignOutDialog waiting={isAsking} onClose={stay} onSignOut={leave} />}
     </>
@@ -50,7 +49,6 @@ export function AccountMenu() {
 function useLeaving() {
   const navigate = useNavigate();
   const signOut = useSignOut();
-  const waiting = useOutbox().length;
   const [isAsking, setAsking] = useState(0);
   const stay = () => setAsking(0);
   const leave = () => {
@@ -60,6 +58,17 @@ function useLeaving() {
       onError: (error) => say(sentenceOf(error)),
     });
   };
-  const ask = () => (waiting > 0 ? setAsking(waiting) : leave());
+  const ask = async () => {
+    const waiting = await waitingHere();
+    if (waiting > 0) setAsking(waiting);
+    else leave();
+  };
   return { isAsking, stay, ask, leave };
+}
+
+/** How much of one's own waits to be sent; the outbox itself comes beside the page. */
+async function waitingHere(): Promise<number> {
+  const { outbox } = await import('../../outbox/outbox.ts');
+  await outbox.look();
+  return outbox.get().length;
 }

@@ -8,7 +8,7 @@ import { Notice } from '../../components/ui/Notice.tsx';
 import { OfflineBanner } from '../../components/ui/OfflineBanner.tsx';
 import { Skeleton } from '../../components/ui/Skeleton.tsx';
 import { Toaster } from '../../components/ui/Toast.tsx';
-import { StoppedStrip } from '../../outbox/StoppedStrip.tsx';
+import { StoppedStrip } from '../../outbox/lazyOutbox.tsx';
 import { NewRelease } from '../../release/NewRelease.tsx';
 import { BottomBar } from './BottomBar.tsx';
 import { KeepSession } from './KeepSession.tsx';
