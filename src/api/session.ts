@@ -10,7 +10,6 @@ import { api } from '#shared/api/urls.ts';
 import { request, requestNothing } from './client.ts';
 import { isProblem, OfflineError } from './errors.ts';
 import { KEPT } from '../kept/meta.ts';
-import { restoreAnswers } from '../kept/restoreAnswers.ts';
 
 /** A weak network may take a request and never answer it: the page then opens with what is kept. */
 const PATIENCE_MS = 10_000;
@@ -36,6 +35,9 @@ export const sessionQuery = queryOptions({
 /** Without a connection: whoever was signed in here last, with what they read then. */
 async function lastKnown(client: QueryClient, error: OfflineError): Promise<Person> {
   if (client.getQueryData(SESSION_KEY)) throw error;
+  const { restoreAnswers } = await import('../kept/restoreAnswers.ts').catch(() => {
+    throw error;
+  });
   const kept = person.safeParse(await restoreAnswers(client, SESSION_KEY));
   if (!kept.success) throw error;
   return kept.data;

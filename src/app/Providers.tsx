@@ -2,8 +2,6 @@ import { QueryClientProvider } from '@tanstack/react-query';
 import { useEffect, type ReactNode } from 'react';
 import { queryClient } from '../api/queryClient.ts';
 import { sessionQuery, useSession } from '../api/session.ts';
-import { keepAnswers } from '../kept/keepAnswers.ts';
-import { keptStore } from '../kept/keptStore.ts';
 import { applyTheme } from './theme.ts';
 
 /** The person's own theme wins over what this browser remembers. */
@@ -15,12 +13,19 @@ function ThemeOfPerson() {
   return null;
 }
 
-/** From the first moment on, whatever is drawn. */
-keepAnswers(queryClient, {
-  store: keptStore,
-  person: () => queryClient.getQueryData(sessionQuery.queryKey)?.id ?? null,
-  isSession: ({ queryKey }) => queryKey[0] === sessionQuery.queryKey[0],
-});
+/** Whatever is drawn: what is read is kept for when there is no connection. It comes beside the page. */
+async function beginKeeping() {
+  const [{ keepAnswers }, { keptStore }] = await Promise.all([
+    import('../kept/keepAnswers.ts'),
+    import('../kept/keptStore.ts'),
+  ]);
+  keepAnswers(queryClient, {
+    store: keptStore,
+    person: () => queryClient.getQueryData(sessionQuery.queryKey)?.id ?? null,
+    isSession: ({ queryKey }) => queryKey[0] === sessionQuery.queryKey[0],
+  });
+}
+void beginKeeping().catch(() => undefined);
 
 export function Providers({ children }: { children: ReactNode }) {
   return (

@@ -29,6 +29,12 @@ export function keepAnswers(client: QueryClient, { store, person, isSession }: P
     await store.put(rows);
     await dropOthers(store, personId, isSession);
   };
+  const keep = (query: Query) => {
+    waiting.set(query.queryHash, query);
+    timer ??= setTimeout(write, BREATH_MS);
+  };
+  // It comes beside the first page: some may have been read before.
+  for (const query of client.getQueryCache().findAll({ predicate: isKept })) keep(query);
   return client.getQueryCache().subscribe((event) => {
     if (event.type !== 'updated' || event.action.type !== 'success') return;
     const { query } = event;
@@ -36,11 +42,12 @@ export function keepAnswers(client: QueryClient, { store, person, isSession }: P
       waiting.clear();
       return void store.clear();
     }
-    if (!query.meta?.kept) return;
-    waiting.set(query.queryHash, query);
-    timer ??= setTimeout(write, BREATH_MS);
+    if (isKept(query)) keep(query);
   });
 }
+
+const isKept = (query: Query): boolean =>
+  query.meta?.kept === true && query.state.status === 'success';
 
 const keptOf = (query: Query, personId: string | null): Kept => ({
   contract: CONTRACT,

@@ -1,7 +1,7 @@
 import clsx from 'clsx';
 import { Link, NavLink } from 'react-router-dom';
 import { useBrewery } from '../../app/useBrewery.ts';
-import { OutboxMark } from '../../outbox/lazyOutbox.tsx';
+import { OutboxMark } from '../../app/besideThePage.tsx';
 import { Wordmark } from '../../components/ui/Wordmark.tsx';
 import { AccountMenu } from './AccountMenu.tsx';
 import { BreweryMenu } from './BreweryMenu.tsx';
