@@ -14,15 +14,15 @@ test('a finding leads to its formula with the figures of its link', async ({ boa
   const colour = await asPoured(/^Colour/);
   const bitterness = await asPoured(/^Bitterness/);
   const gravity = await asPoured(/^Gravity/);
-  const abv = /holds ([\d.]+) % ABV/.exec((await panel.textContent()) ?? '')?.[1] ?? 'no ABV';
+  const abv = /holds ([\d.]+)\s% ABV/.exec((await panel.textContent()) ?? '')?.[1] ?? 'no ABV';
 
   await panel.getByRole('link', { name: /^The science of it.*Tired cake/ }).click();
   await expect(board).toHaveURL(new RegExp(`/science\\?link=${later}#alcohol$`));
   await expect(board.getByRole('heading', { name: 'Alcohol', exact: true })).toBeInViewport();
   await expect(board.getByLabel('Worked with the figures of')).toHaveValue(later);
   const figure = (id: string) => board.locator(`[data-figure="${id}"]`);
-  await expect(figure('abv')).toHaveText(`${abv} % ABV`.replace(' ', '\u00a0'));
-  await expect(figure('kept')).toHaveText(`${kept} mL`.replace(' ', '\u00a0'));
+  await expect(figure('abv')).toHaveText(new RegExp(`^${abv}\\s% ABV$`));
+  await expect(figure('kept')).toHaveText(new RegExp(`^${kept}\\smL$`));
   await expect(figure('colour-poured')).toContainText(colour);
   await expect(figure('bitterness-poured')).toContainText(bitterness);
   await expect(figure('gravity-poured')).toContainText(gravity);
