@@ -24,11 +24,9 @@ export async function openBoard(browser: Browser, at: AtWork, before?: () => voi
   });
   await context.addCookies(sessionCookies(at, at.brewery.members['head-brewer'].token));
   const page = await context.newPage();
-  if (before) {
-    // A function that is sent as text was compiled with calls of this helper.
-    await page.addInitScript('globalThis.__name = (each) => each');
-    await page.addInitScript(before);
-  }
+  // A function that is sent as text was compiled with calls of this helper.
+  await page.addInitScript('globalThis.__name = (each) => each');
+  if (before) await page.addInitScript(before);
   await page.goto(`${at.url}/b/${at.brewery.slug}`);
   await page.locator('[data-batch]').first().waitFor();
   await page.waitForTimeout(LOOK_MS);
