@@ -57,7 +57,7 @@ test('the board is filtered, its address keeps that, and the keys clear it', asy
   await expect(page.batch('First of 50')).toHaveAttribute('data-pale');
 
   // It stays through a reload, and while a batch is opened and closed.
-  await board.reload();
+  await page.open(`${brewery.slug}${new URL(board.url()).search}`);
   await expect(told).toContainText('1 of 201');
   await board.getByRole('button', { name: 'Second of 50', exact: true }).click();
   await expect(board.getByRole('dialog', { name: 'Edit Second of 50' })).toBeVisible();
