@@ -1,10 +1,10 @@
 import { SRM_PER_A430 } from '#shared/units/beerSpectrum.ts';
 import { GLASS_CM, type Lab } from '#shared/units/colour.ts';
-import { Formula, Over } from '../Formula.tsx';
+import { Formula } from '../Formula.tsx';
 import { digits, inBoth, result, type ScienceSection } from '../section.ts';
 
 const labText = (lab: Lab | undefined) =>
-  lab === undefined ? null : lab.map((one) => one.toFixed(1).replace('-', '−')).join(', ');
+  lab === undefined ? null : lab.map((one) => one.toFixed(1).replace('-', '−')).join(',\u00a0');
 
 export const colour: ScienceSection = {
   id: 'colour',
@@ -57,15 +57,7 @@ export const colourDifference: ScienceSection = {
         ΔE<sub>00</sub> = √
         <span className="border-t-[1.5px] border-current pt-0.5">
           (ΔL′ ÷ S<sub>L</sub>)<sup>2</sup> + (ΔC′ ÷ S<sub>C</sub>)<sup>2</sup> + (ΔH′ ÷ S
-          <sub>H</sub>)<sup>2</sup> + R<sub>T</sub>
-          <Over
-            top={<>ΔC′ ΔH′</>}
-            bottom={
-              <>
-                S<sub>C</sub> S<sub>H</sub>
-              </>
-            }
-          />
+          <sub>H</sub>)<sup>2</sup> + R<sub>T</sub> (ΔC′ ÷ S<sub>C</sub>) (ΔH′ ÷ S<sub>H</sub>)
         </span>
       </Formula>
       <p>
