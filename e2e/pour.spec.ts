@@ -107,7 +107,11 @@ test('an unfit cake: fresh yeast in two taps, and the chain comes along', async 
   await pour.button('Do it so').click();
   await expect(board.getByRole('heading', { level: 1 })).toHaveText('Ebb Pale onto fresh yeast');
   await expect(pour.button('Do it so')).toHaveCount(0);
-  const [b, c] = [await stageOf(db, second), await stageOf(db, third)];
-  expect(c?.chainId).toBe(b?.chainId);
-  expect([b?.place, c?.place]).toEqual([0, 1]);
+  // The moves are shown before they have arrived.
+  await expect
+    .poll(async () => {
+      const [b, c] = [await stageOf(db, second), await stageOf(db, third)];
+      return [b?.place, c?.place, c?.chainId === b?.chainId];
+    })
+    .toEqual([0, 1, true]);
 });

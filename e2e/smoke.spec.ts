@@ -13,6 +13,8 @@ test('somebody who signs up stands before an empty board, and finds it again aft
   await expect(page).toHaveURL(/\/b\/[a-z0-9-]+$/);
   const address = page.url();
 
+  // What the page asks for on its own has been answered by then.
+  await expect(page.getByText('Live', { exact: true })).toBeVisible();
   await page.context().clearCookies();
   await page.goto('/sign-in');
   await page.getByLabel('E-mail').fill(email);

@@ -2,7 +2,8 @@ import { lazy, Suspense, type ComponentType } from 'react';
 
 /**
  * The outbox, and the word of a new version, come beside the first page, not before it: what waits
- * is on the device and can be told of a moment later. Where the connection goes before they came, the page is as it was without.
+ * is on the device and can be told of a moment later. Where the connection goes before they came,
+ * the page is as it was without.
  */
 function beside(load: () => Promise<ComponentType>) {
   const Part = lazy(async () => {
