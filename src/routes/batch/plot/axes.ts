@@ -22,13 +22,17 @@ export function axisOf(values: readonly number[], step: number, least: number): 
 const lowest = (values: readonly number[]) => values.reduce((a, b) => Math.min(a, b), Infinity);
 const highest = (values: readonly number[]) => values.reduce((a, b) => Math.max(a, b), -Infinity);
 
+const FOOT_SG = 0.005;
+
 /** Null: no gravity is known, read or expected. */
 export function gravityAxis({ gravity, band }: Drawn): Axis | null {
   const values = [
     ...gravity.map(({ value }) => value),
     ...band.flatMap(({ low, high }) => [low, high]),
   ];
-  return values.length === 0 ? null : axisOf(values, 0.01, 0.02);
+  // Room under the lowest for the words of what was done.
+  const foot = lowest(values) - FOOT_SG;
+  return values.length === 0 ? null : axisOf([...values, foot], 0.01, 0.02);
 }
 
 export function temperatureAxis({ temperature, range }: Drawn): Axis | null {

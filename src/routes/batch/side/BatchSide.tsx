@@ -40,7 +40,9 @@ export function BatchSide({ batch }: { batch: Batch }) {
         {batch.name}
       </h1>
       <p className="text-touch text-ink2">
-        {[batch.style, stageLine(batch, board.today)].filter(Boolean).join(', ')}
+        {batch.style
+          ? `${batch.style}, ${small(stageLine(batch, board.today))}`
+          : stageLine(batch, board.today)}
       </p>
       <Stand batch={batch} />
       <div className="max-wide:grid max-wide:grid-cols-2 max-wide:gap-x-6 max-tablet:grid-cols-1">
@@ -51,16 +53,18 @@ export function BatchSide({ batch }: { batch: Batch }) {
   );
 }
 
+const small = (text: string): string => text.charAt(0).toLowerCase() + text.slice(1);
+
 function Stand({ batch }: { batch: Batch }) {
   const { index, judged, board, units } = useBoardView();
   const vessel = vesselOf(batch, index);
   const volume = volumeOf(batch);
   const notes = [
-    vessel && { name: vessel.name, more: format('volume', vessel.capacityL, units), at: 220 },
+    vessel && { name: vessel.name, more: format('volume', vessel.capacityL, units), at: 206 },
     volume !== null && {
       name: format('volume', volume, units),
       more: batch.srm === null ? 'colour unknown' : format('colour', batch.srm, units),
-      at: 124,
+      at: 116,
     },
     { ...useCakeWords(batch), at: 28 },
   ];
@@ -68,7 +72,7 @@ function Stand({ batch }: { batch: Batch }) {
     <div className="mb-6">
       <div className="relative -ml-7 flex h-[290px] items-end pl-7 after:absolute after:inset-x-0 after:bottom-0 after:h-[11px] after:border-b-[1.5px] after:border-shelf3 after:bg-linear-to-b after:from-shelf1 after:to-shelf2 after:shadow-shelf max-tablet:-ml-[18px] max-tablet:pl-[18px]">
         <div className="relative z-[1] mb-[9px]">
-          <Vessel {...drawnVessel(batch, index, judged, board.today)} width={156} />
+          <Vessel {...drawnVessel(batch, index, judged, board.today)} width={144} />
         </div>
         {notes.map(
           (note) =>
@@ -76,7 +80,7 @@ function Stand({ batch }: { batch: Batch }) {
               <p
                 key={note.at}
                 style={{ bottom: note.at }}
-                className="absolute left-[200px] z-[2] text-small leading-tight text-ink2 before:absolute before:top-2 before:right-[calc(100%+5px)] before:w-[18px] before:border-t-[1.5px] before:border-edge"
+                className="absolute left-[186px] z-[2] text-small leading-tight text-ink2 before:absolute before:top-2 before:right-[calc(100%+5px)] before:w-[14px] before:border-t-[1.5px] before:border-edge"
               >
                 <b className="block text-touch text-ink">{note.name}</b>
                 {note.more}
@@ -104,7 +108,7 @@ function useCakeWords(batch: Batch): { name: string; more: string } {
   const mates = batch.chainId === null ? [] : index.batchesOf(batch.chainId);
   const next = mates[mates.findIndex(({ id }) => id === batch.id) + 1];
   const litres = next ? (judged.links.get(next.id)?.cake.volumeL ?? null) : null;
-  const name = litres === null ? 'Cake' : `about ${format('volume', litres, units)} cake`;
+  const name = litres === null ? 'Cake' : `${format('volume', litres, units)} cake`;
   return { name, more: litres === null ? more : `${more}, estimated` };
 }
 
