@@ -30,17 +30,18 @@ export function FermentationCard({ batch, record }: FermentationCardProps) {
     () => drawnOf({ batch, record, yeast, timeZone, now }),
     [batch, record, yeast, timeZone, now],
   );
+  const isRead = drawn !== null && drawn.gravity.length + drawn.temperature.length > 0;
   const warnings = warningsOf(batch, yeast, sayIn(units));
   return (
     <Card>
       <div className="mb-2 flex flex-wrap items-center gap-x-4 gap-y-1">
         <CardTitle>Fermentation</CardTitle>
-        {drawn && <Legend drawn={drawn} />}
+        {isRead && <Legend drawn={drawn} />}
       </div>
       {warnings.map((notice) => (
         <NoticeBlock key={notice.id} notice={notice} />
       ))}
-      {drawn && (drawn.gravity.length > 0 || drawn.temperature.length > 0) ? (
+      {isRead ? (
         <figure>
           <FermentationPlot drawn={drawn} />
           <figcaption className="mt-1 text-small text-ink2">
