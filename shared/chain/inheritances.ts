@@ -23,14 +23,15 @@ export class Inheritances {
     return number;
   }
 
-  /** What follows after one more beer, made once for each beer. */
-  follower(before: number, beer: number, make: (before: Inheritance) => Inheritance): number {
+  /** What follows after one more beer; undefined until it was told. */
+  follower(before: number, beer: number): number | undefined {
+    return this.#followers[before]?.[beer];
+  }
+
+  /** Tells what follows after one more beer. */
+  follow(before: number, beer: number, is: Inheritance): number {
     const followers = this.#followers[before] ?? [];
-    const known = followers[beer];
-    if (known !== undefined) return known;
-    const was = this.of(before);
-    const is = make(was);
-    return (followers[beer] = isSame(was, is) ? before : this.number(is));
+    return (followers[beer] = isSame(this.of(before), is) ? before : this.number(is));
   }
 }
 

@@ -17,9 +17,8 @@ export const generationRule = {
     const { generation, inherited, rules } = link;
     if (generation === undefined) return unchecked(['firstGeneration']);
     const limit = limitAfter(inherited.strongestOg ?? 1, link);
-    const detail = { generation, limit };
-    if (generation > limit + rules.holdAfter) return hold(detail);
-    if (generation > limit) return mind(detail);
+    if (generation > limit + rules.holdAfter) return hold({ generation, limit });
+    if (generation > limit) return mind({ generation, limit });
     // A beer of unknown gravity may have been a strong one.
     return inherited.ogUnknown && generation > limitAfter(SG_18_PLATO, link)
       ? unchecked(['og'])

@@ -23,7 +23,6 @@ export class LinkState {
   readonly yeast: YeastFacts;
   readonly vessel: VesselFacts | undefined;
   readonly generation: number | undefined;
-  readonly inherited: Inheritance;
   readonly rules: HouseRules;
   readonly board: LinkInput['board'];
   readonly wholeCakeBefore: boolean;
@@ -39,6 +38,8 @@ export class LinkState {
   readonly need: number | undefined;
   readonly kept: KeptCake;
   readonly blend: LinkBlend;
+  readonly #before: Inheritance;
+  #inherited: Inheritance | undefined;
   #shift: number | undefined | null = null;
   #recommended: { litres: number; kg: number } | undefined | null = null;
 
@@ -50,7 +51,7 @@ export class LinkState {
     this.yeast = yeast;
     this.vessel = pour.vessel ?? input.vessel;
     this.generation = input.generation;
-    this.inherited = inherit(input.inherited, a);
+    this.#before = input.inherited;
     this.rules = rules;
     this.board = input.board;
     this.wholeCakeBefore = input.wholeCakeBefore ?? false;
@@ -66,6 +67,11 @@ export class LinkState {
         : pitchNeed({ volumeL: b.volumeL, og: b.og, kind: yeast.kind });
     this.kept = this.keeping(pour.keepL);
     this.blend = linkBlend(a, b, this.kept.retainedL);
+  }
+
+  /** What reaches B from A and all before it; worked out when first asked. */
+  get inherited(): Inheritance {
+    return (this.#inherited ??= inherit(this.#before, this.a));
   }
 
   /** Shift of B's colour in the glass by the retained beer, ΔE00; worked out when first asked. */

@@ -19,7 +19,13 @@ export function undeclared<T>(
   field: string,
 ): Outcome<Undeclared<T>> {
   if (declared === undefined) return inherited.length === 0 && !more ? PASSED : unchecked([field]);
-  const left = inherited.filter((one) => !declared.includes(one));
-  if (left.length > 0) return hold({ left });
-  return more && !all.every((one) => declared.includes(one)) ? unchecked([field]) : PASSED;
+  if (!holdsAll(declared, inherited))
+    return hold({ left: inherited.filter((one) => !declared.includes(one)) });
+  return more && !holdsAll(declared, all) ? unchecked([field]) : PASSED;
+}
+
+/** Asked for every line of every gap: makes nothing that has to be cleared away. */
+function holdsAll<T>(declared: readonly T[], asked: readonly T[]): boolean {
+  for (const one of asked) if (!declared.includes(one)) return false;
+  return true;
 }

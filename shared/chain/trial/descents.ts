@@ -75,10 +75,15 @@ export class Descents {
     this.#set(batch, NONE, this.#unknown);
     this.#trace(cake);
     const generation = at(this.generation, cake);
-    const inherited = this.#inheritances.follower(at(this.inherited, cake), cake, (before) =>
-      inherit(before, this.#facts(cake)),
-    );
-    this.#set(batch, generation === NONE ? NONE : generation + 1, inherited);
+    this.#set(batch, generation === NONE ? NONE : generation + 1, this.#inheritedOf(cake));
+  }
+
+  #inheritedOf(cake: number): number {
+    const before = at(this.inherited, cake);
+    const known = this.#inheritances.follower(before, cake);
+    if (known !== undefined) return known;
+    const after = inherit(this.#inheritances.of(before), this.#facts(cake));
+    return this.#inheritances.follow(before, cake, after);
   }
 
   #start(batch: number): void {

@@ -47,8 +47,8 @@ interface Meeting {
 export class Pairs {
   readonly #trial: Trial;
   readonly #sight: LinkSight;
-  /** By the earlier batch, then by the later. */
-  #known: Pair[][][] = [];
+  /** By both batches' numbers, in one. */
+  #known = new Map<number, Pair[]>();
 
   constructor(trial: Trial, sight: Sight) {
     this.#trial = trial;
@@ -57,7 +57,7 @@ export class Pairs {
 
   /** Lets go of what was judged: other batches' trials seldom meet it again. */
   forget(): void {
-    this.#known = [];
+    this.#known.clear();
   }
 
   /** Null where the yeast is not on the board. */
@@ -78,10 +78,12 @@ export class Pairs {
 
   /** As if nobody else got of the cake. */
   #alone(cake: number, batch: number): Pair | null {
-    const known = ((this.#known[cake] ??= [])[batch] ??= []);
-    for (const pair of known) if (isStill(pair, this.#trial, cake, batch)) return pair;
+    const key = cake * this.#trial.roster.batches.length + batch;
+    const known = this.#known.get(key);
+    for (const pair of known ?? []) if (isStill(pair, this.#trial, cake, batch)) return pair;
     const pair = this.#judged(cake, batch, meetingOf(this.#trial, cake, batch));
-    if (pair) known.push(pair);
+    if (pair && known) known.push(pair);
+    else if (pair) this.#known.set(key, [pair]);
     return pair;
   }
 
