@@ -6,10 +6,11 @@ import type { LinkInput } from '../rules/linkInput.ts';
 import { DEFAULT_HOUSE_RULES, resolveHouseRules, type HouseRules } from '../rules/resolve.ts';
 import { factsOf, pourFactsOf, vesselFactsOf, yeastFactsOf } from './batchFacts.ts';
 import { cakeCheckOf } from './cakeChecked.ts';
-import { indexBoard, type BoardFacts, type BoardIndex, type Layout } from './board.ts';
+import type { BoardFacts, BoardIndex, Layout } from './board.ts';
 import { descents, type Descent } from './descent.ts';
+import { indexedBoard } from './indexedBoard.ts';
 import { inherit } from './inherit.ts';
-import { staysByVessel, useOfVessel, type Stay, type VesselUse } from './vesselUse.ts';
+import { staysByVessel, useOfVessel, vesselIdOf, type Stay, type VesselUse } from './vesselUse.ts';
 
 /** All that the links of one layout of a board are read with. */
 export interface Sight {
@@ -20,21 +21,18 @@ export interface Sight {
   facts(batch: Batch): BatchFacts;
   yeastFacts(yeast: Yeast): YeastFacts;
   descent(batch: Batch): Descent;
-  /** By vessel. */
-  stays: ReadonlyMap<string, readonly Stay[]>;
   use(batchId: string): VesselUse | undefined;
 }
 
 /** What of it one link is read with. */
-export type LinkSight = Omit<Sight, 'layout' | 'stays'> & {
+export type LinkSight = Omit<Sight, 'layout'> & {
   layout: Pick<Layout, 'chain' | 'predecessor'>;
 };
 
 /** The board as it stands, read once. */
 export function sightOf(board: BoardFacts, units?: UnitPrefs): Sight {
-  const index = indexBoard(board);
+  const index = indexedBoard(board);
   const facts = remembered(factsOf);
-  const stays = staysByVessel(index);
   return {
     index,
     layout: index,
@@ -43,8 +41,7 @@ export function sightOf(board: BoardFacts, units?: UnitPrefs): Sight {
     facts,
     yeastFacts: remembered(yeastFactsOf),
     descent: descents(index, (before, earlier) => inherit(before, facts(earlier))),
-    stays,
-    use: usesOf(index, stays),
+    use: usesOf(index),
   };
 }
 
@@ -65,16 +62,23 @@ export function remembered<K extends object, V>(make: (key: K) => V): (key: K) =
   };
 }
 
-function usesOf(
-  index: BoardIndex,
-  byVessel: Sight['stays'],
-): (batchId: string) => VesselUse | undefined {
-  const uses = new Map<string, VesselUse>();
-  for (const [vesselId, stays] of byVessel) {
+/** What batches find in their vessels; a vessel is looked into when one of its batches is asked for. */
+function usesOf(index: BoardIndex): (batchId: string) => VesselUse | undefined {
+  let byVessel: ReadonlyMap<string, readonly Stay[]> | undefined;
+  const looked = new Map<string, ReadonlyMap<string, VesselUse>>();
+  const usesIn = (vesselId: string) => {
+    byVessel ??= staysByVessel(index);
     const cleanedOn = index.vessels.get(vesselId)?.cleanedOn ?? null;
-    for (const [id, use] of useOfVessel(stays, cleanedOn)) uses.set(id, use);
-  }
-  return (batchId) => uses.get(batchId);
+    const uses = useOfVessel(byVessel.get(vesselId) ?? [], cleanedOn);
+    looked.set(vesselId, uses);
+    return uses;
+  };
+  return (batchId) => {
+    const batch = index.batch(batchId);
+    const vesselId = batch ? vesselIdOf(batch, index) : null;
+    if (vesselId === null) return undefined;
+    return (looked.get(vesselId) ?? usesIn(vesselId)).get(batchId);
+  };
 }
 
 /**

@@ -2,8 +2,8 @@ import type { UnitPrefs } from '../api/units.ts';
 import type { LinkAnswer } from '../rules/answer.ts';
 import type { Verdict } from '../rules/vocabulary.ts';
 import type { BoardFacts } from './board.ts';
-import { sightOf } from './boardLink.ts';
-import { checkLink } from './checkLink.ts';
+import { sightOf, type Sight } from './boardLink.ts';
+import { judgeLink } from './checkLink.ts';
 import { judgeBoard } from './judgeBoard.ts';
 import { linkInput } from './linkInput.ts';
 
@@ -29,10 +29,21 @@ export const sayingOf = ({ verdict, findings }: LinkAnswer): LinkSaying => ({
   reason: findings.find((finding) => finding.verdict === verdict)?.title ?? null,
 });
 
+const sights = new WeakMap<BoardFacts, Sight>();
+
+/** A row of moves asks of each board twice: as it is after one, and before the next. */
+function readOnce(board: BoardFacts): Sight {
+  const sight = sights.get(board) ?? sightOf(board);
+  sights.set(board, sight);
+  return sight;
+}
+
 /** What the link into a batch says; null where no cake goes under it. */
 export function linkSaying(board: BoardFacts, batchId: string): LinkSaying | null {
-  const input = linkInput(batchId, sightOf(board));
-  return input && sayingOf(checkLink(input));
+  const input = linkInput(batchId, readOnce(board));
+  if (!input) return null;
+  const { verdict, reason } = judgeLink(input);
+  return { verdict, reason };
 }
 
 const nameIn = (boards: readonly BoardFacts[], id: string): string =>

@@ -1,8 +1,9 @@
 import type { Batch } from '../api/batch.ts';
 import type { Chain } from '../api/chain.ts';
 import type { MoveRequest, ShiftedDate } from '../api/move.ts';
-import { indexBoard, isPencilled, type BoardFacts, type BoardIndex } from './board.ts';
+import { isPencilled, type BoardFacts, type BoardIndex } from './board.ts';
 import { shiftedDates } from './dates.ts';
+import { indexedBoard } from './indexedBoard.ts';
 import { lapses } from './lapses.ts';
 import { asLastShelf } from './newShelf.ts';
 import { isSettled, lockOf, planMove, withoutBatch, type Plan, type Target } from './plan.ts';
@@ -36,7 +37,7 @@ const refuse = (why: MoveRefusal, detail: string): MoveResult => ({ ok: false, w
  * the rows that change. A wish that already stands is granted and changes nothing.
  */
 export function moveBatch(board: BoardFacts, wish: MoveWish): MoveResult {
-  const index = indexBoard(board);
+  const index = indexedBoard(board);
   const batch = index.batch(wish.batchId);
   if (!batch) return refuse('not-found', 'This batch is no longer on the board.');
   const target = targetOf(index, wish);

@@ -93,8 +93,10 @@ export class MoveGroup {
     const batches = withNewVersions(before, result.batches);
     for (const row of batches) this.#rows.set(row.id, row);
     const revision = before.season.revision + 1;
-    const after = { ...before, ...withRows(before, batches, chains) };
-    this.#board = { ...after, season: { ...before.season, revision } };
+    const season = { ...before.season, revision };
+    // One object for the next move's before and this one's after: what is read of it is read once.
+    const after = { ...before, ...withRows(before, batches, chains), season };
+    this.#board = after;
     const sides = sidesOf(before, after, request.batchId);
     this.#entries.push({
       member,

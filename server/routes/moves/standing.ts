@@ -1,6 +1,7 @@
 import type { Batch, Link } from '#shared/api/batch.ts';
 import type { Chain } from '#shared/api/chain.ts';
-import { indexBoard, type BoardFacts, type BoardIndex } from '#shared/chain/board.ts';
+import type { BoardFacts, BoardIndex } from '#shared/chain/board.ts';
+import { indexedBoard } from '#shared/chain/indexedBoard.ts';
 import { isDeepStrictEqual } from 'node:util';
 
 /** How one batch stands: all that a move may change of it. */
@@ -35,7 +36,7 @@ export function sidesOf(before: BoardFacts, after: BoardFacts, movedId: string):
   const shelves = touchedShelves(before, after);
   const [was, is] = [standingsOf(before, shelves), standingsOf(after, shelves)];
   const differs = [...is.values()]
-    .filter((row) => row.id !== movedId && !isDeepStrictEqual(row, was.get(row.id)))
+    .filter((row) => row.id !== movedId && !isSame(row, was.get(row.id)))
     .map(({ id }) => id);
   const ids = [movedId, ...differs];
   return {
@@ -43,6 +44,14 @@ export function sidesOf(before: BoardFacts, after: BoardFacts, movedId: string):
     after: sideOf(after, is, ids, onlyIn(after, before)),
   };
 }
+
+/** A link that a move left alone is the same object on both boards: it need not be read. */
+const isSame = (a: Standing, b: Standing | undefined): boolean =>
+  b !== undefined &&
+  a.chainId === b.chainId &&
+  a.afterId === b.afterId &&
+  a.brewOn === b.brewOn &&
+  (a.link === b.link || isDeepStrictEqual(a.link, b.link));
 
 /** Shelves (null: the bench) of which any row is another one: only there can a standing differ. */
 function touchedShelves(before: BoardFacts, after: BoardFacts): Set<string | null> {
@@ -64,7 +73,7 @@ function sideOf(
   ids: readonly string[],
   chain: Chain | null,
 ): Side {
-  const index = indexBoard(board);
+  const index = indexedBoard(board);
   const moved = index.batch(ids[0] ?? '');
   return {
     batches: ids.flatMap((id) => standings.get(id) ?? []),
@@ -81,7 +90,7 @@ export function standingsOf(
   board: BoardFacts,
   shelves?: ReadonlySet<string | null>,
 ): Map<string, Standing> {
-  const index = indexBoard(board);
+  const index = indexedBoard(board);
   return new Map(
     board.batches
       .filter(({ stage, chainId }) => stage !== 'scrapped' && (shelves?.has(chainId) ?? true))

@@ -11,7 +11,9 @@ export function withNewVersions(board: Pick<BoardFacts, 'batches'>, rows: readon
   const known = new Map(board.batches.map((row) => [row.id, row]));
   return rows.map((row) => {
     const before = known.get(row.id);
-    const changed = row.brewOn !== before?.brewOn || !isDeepStrictEqual(row.link, before.link);
+    const changed =
+      row.brewOn !== before?.brewOn ||
+      (row.link !== before.link && !isDeepStrictEqual(row.link, before.link));
     return changed ? { ...row, version: row.version + 1 } : row;
   });
 }
