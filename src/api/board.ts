@@ -1,9 +1,4 @@
-import {
-  queryOptions,
-  replaceEqualDeep,
-  useSuspenseQuery,
-  type QueryClient,
-} from '@tanstack/react-query';
+import { queryOptions, useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
 import { createContext, use, useMemo, useSyncExternalStore } from 'react';
 import { board as boardContract, type Board } from '#shared/api/board.ts';
 import type { UnitPrefs } from '#shared/api/units.ts';
@@ -13,6 +8,7 @@ import { usePlace } from '../app/useBrewery.ts';
 import { useUnits } from '../app/useUnits.ts';
 import { KEPT } from '../kept/meta.ts';
 import { request } from './client.ts';
+import { equalDeep } from './equalDeep.ts';
 import { withPending } from './pendingMoves.ts';
 import { pendingOf } from './pendingStore.ts';
 import { boardStillness } from './stillness.ts';
@@ -83,8 +79,14 @@ function withEqualKept(now: JudgedBoard, before: JudgedBoard | undefined): Judge
   };
 }
 
-const equalKept = <T>(now: ReadonlyMap<string, T>, before: ReadonlyMap<string, T>) =>
-  new Map([...now].map(([id, one]): [string, T] => [id, replaceEqualDeep(before.get(id), one)]));
+function equalKept<T>(now: ReadonlyMap<string, T>, before: ReadonlyMap<string, T>): Map<string, T> {
+  const kept = new Map<string, T>();
+  for (const [id, one] of now) {
+    const was = before.get(id);
+    kept.set(id, was !== undefined && equalDeep(was, one) ? was : one);
+  }
+  return kept;
+}
 
 /** The slug of another brewery, around a shelf of theirs on which one is a guest. */
 export const OtherBoardSlug = createContext<string | null>(null);
