@@ -249,8 +249,7 @@ const inHand = (page: Page) => page.locator('.lifted-card');
 async function expectInHand(page: Page, name: string): Promise<void> {
   await expect(inHand(page)).toContainText(name);
   for (const shelf of ['Clean ale', 'Lantern row'])
-    await expect(page.getByRole('region', { name: shelf, exact: true })).toHaveAttribute(
-      'data-lifting',
-      '',
-    );
+    await expect(
+      page.getByRole('region', { name: shelf, exact: true }).locator('[data-gap-open]').first(),
+    ).toBeVisible();
 }

@@ -5,7 +5,7 @@ import { shortcutOf, type ShortcutName } from './shortcuts.ts';
 const TYPING =
   'input, textarea, select, [contenteditable]:not([contenteditable="false"]), [role="textbox"], [role="combobox"]';
 /** While one of these is open, or a batch is in the hand, the keys are theirs. */
-const OPEN = 'dialog[open], [role="menu"], [data-lifting]';
+const OPEN = 'dialog[open], [role="menu"], [data-in-hand]';
 
 function isForPage({ target, isComposing, defaultPrevented }: KeyboardEvent): boolean {
   if (isComposing || defaultPrevented) return false;

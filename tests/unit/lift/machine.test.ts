@@ -5,7 +5,7 @@ import { OfflineError, ProblemError } from '../../../src/api/errors.ts';
 import { withPending } from '../../../src/api/pendingMoves.ts';
 import { drop } from '../../../src/routes/board/lift/liftContext.ts';
 import { createLifting } from '../../../src/routes/board/lift/lifting.ts';
-import { createLiftStore } from '../../../src/routes/board/lift/liftState.ts';
+import { createLiftStore } from '../../../src/routes/board/lift/liftStore.ts';
 import { createPutting } from '../../../src/routes/board/lift/putting.ts';
 import type { LiftPorts } from '../../../src/routes/board/lift/ports.ts';
 import { ALE, beer, LAGER, twoShelves } from './board.ts';
@@ -50,6 +50,7 @@ function scene(answer: (request: MoveRequest) => Promise<Moved> = async (r) => a
       return () => (held -= 1);
     },
     say: (words) => said.push(words),
+    sayAtRest: (words) => said.push(words),
     focusBatch: (batchId) => focused.push(batchId),
     newId: () => beer((ids += 1)),
     gapsInSight: () => [],

@@ -89,7 +89,7 @@ it('draws no vessel anew while a batch is lifted, walked about and put back', as
   const handle = screen.getByRole('button', { name: 'Lift Beer 6' });
   handle.focus();
   fireEvent.keyDown(handle, { key: 'Enter' });
-  await frames(6);
+  await frames(12);
   expect(screen.getByRole('status').textContent).toMatch(/^Lifted Beer 6/);
   expect(document.querySelectorAll('[data-gap-open]').length).toBeGreaterThan(1);
 
@@ -104,7 +104,7 @@ it('draws no vessel anew while a batch is lifted, walked about and put back', as
   expect(slots).toBe(3);
 
   fireEvent.keyDown(handle, { key: 'Escape' });
-  await frames(4);
+  await frames(8);
   expect(screen.getByRole('status').textContent).toBe('Beer 6 put back on the bench.');
   expect(document.querySelectorAll('[data-gap-open]')).toHaveLength(0);
   expect(document.activeElement).toBe(handle);

@@ -2,18 +2,30 @@ import { memo, useMemo, useSyncExternalStore } from 'react';
 
 export interface Announcements {
   say(words: string): void;
+  /** Says it unless something else comes soon. */
+  sayAtRest(words: string): void;
   get(): string;
   subscribe(listener: () => void): () => void;
 }
 
+/** As long as a pointer stays on what it has come for. */
+const REST_MS = 150;
+
 /** Words for the live region; the same sentence twice in a row is read twice. */
 function createAnnouncements(): Announcements {
   let words = '';
+  let rest: ReturnType<typeof setTimeout> | undefined;
   const listeners = new Set<() => void>();
+  const say = (next: string) => {
+    clearTimeout(rest);
+    words = next === words ? `${next}\u00a0` : next;
+    for (const listener of listeners) listener();
+  };
   return {
-    say(next) {
-      words = next === words ? `${next}\u00a0` : next;
-      for (const listener of listeners) listener();
+    say,
+    sayAtRest(next) {
+      clearTimeout(rest);
+      rest = setTimeout(() => say(next), REST_MS);
     },
     get: () => words,
     subscribe(listener) {

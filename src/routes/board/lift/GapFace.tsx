@@ -40,11 +40,17 @@ export const GapFace = memo(function GapFace({ gap, isOver, shape }: GapFaceProp
           <Silhouette
             shape={shape}
             width={70}
-            strokeWidth={isMarked ? 2.8 : 2}
+            strokeWidth={gap.best ? 2.8 : 2}
             className={OUTLINE_TONE[gap.verdict]}
           />
-          <span className="absolute top-[52%] left-1/2 -translate-x-1/2">
-            <VerdictMark verdict={gap.verdict} size={isMarked ? 32 : 28} />
+          <span
+            className={clsx(
+              'absolute top-[52%] left-1/2 -translate-x-1/2',
+              // Larger without a layout: the pointer may go from gap to gap in every frame.
+              isMarked && 'scale-[1.14]',
+            )}
+          >
+            <VerdictMark verdict={gap.verdict} size={28} />
           </span>
         </span>
       </div>

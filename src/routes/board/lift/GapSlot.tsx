@@ -1,8 +1,8 @@
-import { memo, useEffect, useRef } from 'react';
+import { memo, useEffect, useLayoutEffect, useRef, type RefObject } from 'react';
 import type { VesselShape } from '#shared/api/vessel.ts';
 import { BarFace } from './BarFace.tsx';
 import { GapFace } from './GapFace.tsx';
-import { useLiftMachine, useLiftState } from './liftContext.ts';
+import { useLiftMachine, useLiftStateOf } from './liftContext.ts';
 import { HereFace, LockedFace } from './LockedFace.tsx';
 import { isOpen } from './places.ts';
 
@@ -18,14 +18,25 @@ interface GapSlotProps {
 }
 
 /** Keys bring the place that they walk to into sight; a pointer scrolls for itself. */
-function useInSight(isOver: boolean) {
+function useInSight(ref: RefObject<HTMLDivElement | null>, isOver: boolean) {
   const { store } = useLiftMachine();
-  const ref = useRef<HTMLDivElement | null>(null);
   useEffect(() => {
     if (isOver && store.get().lifted?.by === 'keys')
       ref.current?.scrollIntoView({ block: 'nearest', inline: 'nearest' });
-  }, [isOver, store]);
-  return ref;
+  }, [ref, isOver, store]);
+}
+
+/**
+ * Marks what gives way to the gap while it is open. Written to that element and to no other, so
+ * that nothing is drawn anew and little is styled anew.
+ */
+function useRoom(ref: RefObject<HTMLDivElement | null>, isOpened: boolean) {
+  useLayoutEffect(() => {
+    const room = isOpened && ref.current?.closest('[data-room]');
+    if (!room) return;
+    room.setAttribute('data-lifting', '');
+    return () => room.removeAttribute('data-lifting');
+  }, [ref, isOpened]);
 }
 
 /**
@@ -33,13 +44,12 @@ function useInSight(isOver: boolean) {
  * batch is lifted, and is drawn anew only when its own judgement or its own turn comes.
  */
 export const GapSlot = memo(function GapSlot({ gapKey, vesselShape, layout }: GapSlotProps) {
-  const gap = useLiftState(({ lifted, opened, over }) =>
-    opened.has(gapKey) || over === gapKey ? lifted?.gaps.get(gapKey) : undefined,
-  );
-  const locked = useLiftState(({ lifted }) => lifted?.locks.get(gapKey));
-  const isOver = useLiftState((state) => state.over === gapKey);
-  const shape = useLiftState(({ lifted }) => lifted?.shape) ?? vesselShape;
-  const ref = useInSight(isOver);
+  const face = useLiftStateOf(gapKey, ({ opened }) => opened.get(gapKey));
+  const isOver = useLiftStateOf(gapKey, ({ over }) => over === gapKey);
+  const ref = useRef<HTMLDivElement | null>(null);
+  useInSight(ref, isOver);
+  useRoom(ref, face !== undefined);
+  const gap = face?.gap;
   const isBar = layout === 'bar' || gapKey === 'bench';
   return (
     <div
@@ -48,10 +58,12 @@ export const GapSlot = memo(function GapSlot({ gapKey, vesselShape, layout }: Ga
       data-gap={gapKey}
       data-gap-open={gap && isOpen(gap) ? gapKey : undefined}
     >
-      {gap?.locked && <LockedFace words={locked ?? ''} isBar={isBar} />}
+      {gap?.locked && <LockedFace words={face?.lock ?? ''} isBar={isBar} />}
       {gap?.here && gap.best && <HereFace />}
       {gap && isOpen(gap) && isBar && <BarFace gap={gap} isOver={isOver} />}
-      {gap && isOpen(gap) && !isBar && <GapFace gap={gap} isOver={isOver} shape={shape} />}
+      {gap && isOpen(gap) && !isBar && (
+        <GapFace gap={gap} isOver={isOver} shape={face?.shape ?? vesselShape} />
+      )}
     </div>
   );
 });

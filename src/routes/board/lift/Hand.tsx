@@ -1,79 +1,68 @@
-import {
-  DndContext,
-  DragOverlay,
-  PointerSensor,
-  useDraggable,
-  useSensor,
-  useSensors,
-} from '@dnd-kit/core';
-import { useImperativeHandle, useMemo, type PointerEvent, type RefObject } from 'react';
+import { useImperativeHandle, useRef, type RefObject } from 'react';
+import { followPress } from './followPress.ts';
+import { glide, leaveBehind } from './glide.ts';
 import { useLiftMachine, type LiftMachine } from './liftContext.ts';
 import { LiftedCard } from './LiftedCard.tsx';
-import { AT_POINTER, POINTER, SILENT } from './pointer.ts';
+import { atPointer, type Point } from './pointer.ts';
 import { watchPointer, type Watch } from './watchPointer.ts';
 
-/** Takes hold of a batch's element when the pointer goes down on it. */
-export type Grab = (event: PointerEvent, node: HTMLElement) => void;
+/** Takes hold of the batch that was pressed. */
+export type Grab = (event: PointerEvent) => void;
 
 /**
- * The pointer's drag and the carried card, by dnd-kit. It stands beside the board, not around it,
- * and is its only draggable: dnd-kit draws all that stands under its context anew at each step of
- * the pointer, and measures every droppable at the start. Which gap the pointer is over is one hit
- * test of the browser, which costs the same on any board and is right while a shelf scrolls.
+ * The pointer's drag and the carried card. A step of the pointer writes the card's transform and
+ * draws nothing anew; only a gap that is reached or left is.
  */
 export function Hand({ grab }: { grab: RefObject<Grab | null> }) {
   const machine = useLiftMachine();
-  const sensors = useSensors(useSensor(PointerSensor, POINTER));
-  const drag = useMemo(() => createDrag(machine), [machine]);
+  const card = useRef<HTMLDivElement>(null);
+  useImperativeHandle(grab, () => createGrab(machine, card), [machine]);
   return (
-    <DndContext sensors={sensors} autoScroll={false} accessibility={SILENT} {...drag}>
-      <Grip grab={grab} />
-      <DragOverlay
-        dropAnimation={null}
-        modifiers={AT_POINTER}
-        className="pointer-events-none will-change-transform"
-      >
-        <LiftedCard />
-      </DragOverlay>
-    </DndContext>
+    <div ref={card} className="pointer-events-none fixed top-0 left-0 z-[999]">
+      <LiftedCard />
+    </div>
   );
 }
 
-/** What the steps of a drag mean for the batch in the hand. */
-function createDrag(machine: LiftMachine) {
-  let watch: Watch | null = null;
-  return {
-    onDragStart({ activatorEvent }: { activatorEvent: Event }) {
-      machine.lifting.liftPressed();
-      watch = watchPointer(activatorEvent, machine.lifting.goOver);
-    },
-    onDragEnd() {
-      const key = watch?.stop() ?? null;
-      const { lifted } = machine.store.get();
-      const gap = key === null ? undefined : lifted?.gaps.get(key);
-      if (!lifted || !gap) return machine.lifting.cancel();
-      // The hand opens in this frame, the board changes in the next: both at once would be felt.
-      machine.lifting.release();
-      const from = lifted.chainId;
-      requestAnimationFrame(() => machine.putting.put(lifted.batchId, gap, { from }));
-    },
-    onDragCancel() {
-      watch?.stop();
-      machine.lifting.cancel();
-    },
+function createGrab(machine: LiftMachine, card: RefObject<HTMLDivElement | null>): Grab {
+  const { lifting, store, putting } = machine;
+  const carry = (at: Point) => {
+    if (card.current) card.current.style.transform = atPointer(at);
   };
-}
+  const nextFrame = (run: () => void) => requestAnimationFrame(run);
 
-/** The one draggable; the board hands it whichever batch was pressed. */
-function Grip({ grab }: { grab: RefObject<Grab | null> }) {
-  const { setNodeRef, listeners } = useDraggable({ id: 'hand' });
-  useImperativeHandle(
-    grab,
-    () => (event, node) => {
-      setNodeRef(node);
-      listeners?.onPointerDown?.(event);
-    },
-    [setNodeRef, listeners],
-  );
-  return null;
+  /** Ends the drag; the card glides from the pointer to where the batch stands after `then`. */
+  const letGo = (batchId: string | undefined, release: () => void, then: () => void) => {
+    const picture = leaveBehind(card.current);
+    release();
+    // The hand opens in this frame, the board changes in the next: both at once would be felt.
+    nextFrame(() => {
+      then();
+      nextFrame(() => nextFrame(() => glide(picture, batchId ?? '')));
+    });
+  };
+
+  return (event) => {
+    let watch: Watch | null = null;
+    const putBack = () => letGo(store.get().lifted?.batchId, lifting.cancel, () => undefined);
+    followPress(event, {
+      lift(at) {
+        lifting.liftPressed();
+        watch = watchPointer(at, { carry, goOver: lifting.goOver });
+      },
+      moved: (step) => watch?.moved(step),
+      drop() {
+        const key = watch?.stop() ?? null;
+        const { lifted } = store.get();
+        const gap = key === null ? undefined : lifted?.gaps.get(key);
+        if (!lifted || !gap) return putBack();
+        const { batchId, chainId: from } = lifted;
+        letGo(batchId, lifting.release, () => putting.put(batchId, gap, { from }));
+      },
+      cancel() {
+        watch?.stop();
+        putBack();
+      },
+    });
+  };
 }

@@ -23,7 +23,7 @@ interface LiftProviderProps {
 export function LiftProvider({ children, takesUndo = true }: LiftProviderProps) {
   const board = useBoard();
   const words = useAnnouncements();
-  const machine = useMachine(board, words.say);
+  const machine = useMachine(board, words);
   const grab = useRef<Grab | null>(null);
   useLiftKeys(machine, takesUndo);
   return (

@@ -18,10 +18,11 @@ export function LiftSurface({ grab, children }: LiftSurfaceProps) {
   const { store, lifting } = useLiftMachine();
 
   const onPointerDown = (event: PointerEvent) => {
-    const press = pressed(event.target, event.pointerType);
-    if (!press || !online || store.get().lifted || whyFixed(board, press.batchId)) return;
-    lifting.press(press.batchId);
-    grab.current?.(event, press.node);
+    if (!event.isPrimary || event.button !== 0) return;
+    const batchId = pressed(event.target, event.pointerType);
+    if (!batchId || !online || store.get().lifted || whyFixed(board, batchId)) return;
+    lifting.press(batchId);
+    grab.current?.(event.nativeEvent);
   };
 
   return (

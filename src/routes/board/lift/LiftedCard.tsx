@@ -16,7 +16,7 @@ export function LiftedCard() {
   return (
     <div
       aria-hidden
-      className="lifted-card absolute top-0 left-0 flex w-[214px] cursor-grabbing items-end gap-3 rounded-card border-2 border-ink bg-white p-3 pr-4 shadow-lifted"
+      className="lifted-card will-change-transform flex w-[214px] cursor-grabbing items-end gap-3 rounded-card border-2 border-ink bg-white p-3 pr-4 shadow-lifted"
     >
       {lifted.shape && volumeOf(batch) !== null ? (
         <Vessel

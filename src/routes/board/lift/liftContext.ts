@@ -1,7 +1,8 @@
-import { createContext, use, useSyncExternalStore } from 'react';
+import { createContext, use, useCallback, useSyncExternalStore } from 'react';
 import type { Gap } from '#shared/chain/gaps.ts';
 import type { Lifting } from './lifting.ts';
-import type { LiftState, LiftStore } from './liftState.ts';
+import type { LiftState } from './liftState.ts';
+import type { LiftStore } from './liftStore.ts';
 import type { Putting } from './putting.ts';
 
 export interface LiftMachine {
@@ -25,8 +26,18 @@ export function useLiftState<T>(select: (state: LiftState) => T): T {
   return useSyncExternalStore(store.subscribe, () => select(store.get()));
 }
 
+/** One fact of one gap or batch; costs nothing while another one's changes. */
+export function useLiftStateOf<T>(gapOrBatch: string, select: (state: LiftState) => T): T {
+  const { store } = useLiftMachine();
+  const subscribe = useCallback(
+    (listener: () => void) => store.subscribeTo(gapOrBatch, listener),
+    [store, gapOrBatch],
+  );
+  return useSyncExternalStore(subscribe, () => select(store.get()));
+}
+
 export const useIsLifted = (batchId: string) =>
-  useLiftState((state) => state.lifted?.batchId === batchId);
+  useLiftStateOf(batchId, (state) => state.lifted?.batchId === batchId);
 
 /** Which of the two panels the board should show beside it, if any. */
 export const useLiftPanel = (): 'places' | 'changes' | null =>

@@ -19,6 +19,19 @@ export interface Lifted {
   walk: Walk;
 }
 
+/** What stands in an open place. */
+export interface Face {
+  gap: Gap;
+  shape: VesselShape | null;
+  /** What a locked place says. */
+  lock: string;
+}
+
+export function faceOf({ gaps, locks, shape }: Lifted, key: string): Face | null {
+  const gap = gaps.get(key);
+  return gap ? { gap, shape, lock: locks.get(key) ?? '' } : null;
+}
+
 /** What the last drop did, for the panel. */
 export interface Change {
   request: MoveRequest;
@@ -35,10 +48,8 @@ export interface LiftState {
   lifted: Lifted | null;
   /** The panel has given way to the places. */
   isUnfolded: boolean;
-  /** Gaps that are drawn by now: they open from the hand outward, a few more in each frame. */
-  opened: ReadonlySet<string>;
-  /** Parts of the board (a chain, `new`, `bench`) that have given way to their gaps. */
-  unfolded: ReadonlySet<string>;
+  /** What is drawn by now in the gaps: they open, and close again, a few in each frame. */
+  opened: ReadonlyMap<string, Face>;
   /** The place under the pointer or under the keys. */
   over: string | null;
   /** A batch whose list of places is open. */
@@ -50,36 +61,15 @@ export interface LiftState {
   refusal: string | null;
 }
 
+export const NOTHING_OPEN: ReadonlyMap<string, Face> = new Map();
+
 export const AT_REST: LiftState = {
   lifted: null,
   isUnfolded: false,
-  opened: new Set(),
-  unfolded: new Set(),
+  opened: NOTHING_OPEN,
   over: null,
   placesFor: null,
   yeastFor: null,
   change: null,
   refusal: null,
 };
-
-export interface LiftStore {
-  get(): LiftState;
-  set(part: Partial<LiftState>): void;
-  subscribe(listener: () => void): () => void;
-}
-
-export function createLiftStore(): LiftStore {
-  let state = AT_REST;
-  const listeners = new Set<() => void>();
-  return {
-    get: () => state,
-    set(part) {
-      state = { ...state, ...part };
-      for (const listener of listeners) listener();
-    },
-    subscribe(listener) {
-      listeners.add(listener);
-      return () => listeners.delete(listener);
-    },
-  };
-}

@@ -2,7 +2,8 @@ import type { Batch } from '#shared/api/batch.ts';
 import type { Board } from '#shared/api/board.ts';
 import { OFFLINE_WORDS } from './failure.ts';
 import type { Intent } from './keys.ts';
-import type { Lifted, LiftStore } from './liftState.ts';
+import { faceOf, NOTHING_OPEN, type Face, type Lifted } from './liftState.ts';
+import type { LiftStore } from './liftStore.ts';
 import { openOutward } from './openOutward.ts';
 import { createForesight } from './judging.ts';
 import { step } from './places.ts';
@@ -24,7 +25,14 @@ export function whyBatchFixed({ me }: Pick<Board, 'me'>, batch: Batch | undefine
   return batch.stage === 'scrapped' ? 'It is scrapped' : null;
 }
 
-const NONE: ReadonlySet<string> = new Set();
+/** What stands open, as it is judged now. */
+const judgedAnew = (opened: ReadonlyMap<string, Face>, lifted: Lifted) =>
+  new Map(
+    [...opened.keys()].flatMap((key) => {
+      const face = faceOf(lifted, key);
+      return face ? [[key, face] as const] : [];
+    }),
+  );
 
 export interface Lifting {
   /** The pointer is down on a batch; it is lifted when the pointer has gone a little. */
@@ -48,7 +56,7 @@ export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
   let fold = () => {};
 
   const release = () => {
-    store.set({ lifted: null, over: null, opened: NONE, isUnfolded: false });
+    store.set({ lifted: null, over: null, isUnfolded: false });
     letGo();
     fold();
     letGo = fold = () => {};
@@ -72,18 +80,23 @@ export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
     if (by === 'pointer') letGo = ports.holdStill(arrived);
     const shape = board.vessels.find((row) => row.id === batch.vesselId)?.shape ?? null;
     const lifted = { batchId, by, name: batch.name, chainId: batch.chainId, shape, ...places };
-    store.set({ lifted, over: null, change: null, refusal: null });
+    store.set({ lifted, opened: NOTHING_OPEN, over: null, change: null, refusal: null });
     fold = openOutward(store, ports, batchId);
     const best = places.ranked.find((gap) => gap.best);
     ports.say(liftedWords(board, batchId, best));
   };
 
   const goOver = (key: string | null) => {
-    const { lifted, over } = store.get();
+    const { lifted, over, opened } = store.get();
     if (!lifted || key === over) return;
-    store.set({ over: key });
+    // The keys may be faster than the gaps open.
+    const face = key !== null && !opened.has(key) && faceOf(lifted, key);
+    store.set({ over: key, opened: face ? new Map([...opened, [key, face]]) : opened });
     const gap = key === null ? undefined : lifted.gaps.get(key);
-    if (gap) ports.say(walkedWords(ports.board(), gap, lifted.batchId));
+    if (!gap) return;
+    const words = walkedWords(ports.board(), gap, lifted.batchId);
+    if (lifted.by === 'keys') ports.say(words);
+    else ports.sayAtRest(words);
   };
 
   const cancel = () => {
@@ -95,7 +108,7 @@ export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
   };
 
   const boardChanged = (board: Board) => {
-    const { lifted, over } = store.get();
+    const { lifted, over, opened } = store.get();
     if (!lifted) return;
     const batch = board.batches.find((row) => row.id === lifted.batchId);
     if (!batch || batch.chainId !== lifted.chainId || whyFixed(board, lifted.batchId)) {
@@ -105,7 +118,8 @@ export function createLifting(store: LiftStore, ports: LiftPorts): Lifting {
     }
     const places = placesOf(board, lifted.batchId);
     const isStillThere = over !== null && places.walk.ranked.includes(over);
-    store.set({ lifted: { ...lifted, ...places }, over: isStillThere ? over : null });
+    const now = { ...lifted, ...places };
+    store.set({ lifted: now, over: isStillThere ? over : null, opened: judgedAnew(opened, now) });
   };
 
   return {

@@ -1,56 +1,66 @@
-import type { LiftStore } from './liftState.ts';
-import { partOf } from './places.ts';
+import { faceOf, type Face } from './liftState.ts';
+import type { LiftStore } from './liftStore.ts';
 import type { LiftPorts } from './ports.ts';
 
-/** Gaps of one frame: a usual shelf. */
-const MOST = 12;
+/** Gaps of one frame: as many as are drawn and styled in a few milliseconds. */
+const OPENED = 2;
+const CLOSED = 4;
 
-/** Closes what was unfolded, a part a frame, unless something is lifted again. */
-function foldBack(store: LiftStore, ports: LiftPorts) {
-  const { lifted, unfolded } = store.get();
-  const [, ...rest] = unfolded;
-  if (lifted || unfolded.size === 0) return;
-  store.set({ unfolded: new Set(rest) });
-  ports.nextFrame(() => foldBack(store, ports));
+/** What opening needs of the page. */
+type Frames = Pick<LiftPorts, 'nextFrame' | 'gapsInSight' | 'onScroll'>;
+
+/** Closes what was opened, a few gaps a frame, unless something is lifted again. */
+function close(store: LiftStore, ports: Frames) {
+  const { lifted, opened } = store.get();
+  if (lifted || opened.size === 0) return;
+  store.set({ opened: new Map([...opened].slice(CLOSED)) });
+  ports.nextFrame(() => close(store, ports));
 }
 
 /**
- * Unfolds a lift frame by frame: first the panel gives way, then the gaps in sight open shelf by
- * shelf from the batch outward, and more of them as shelves scroll into sight. No frame draws them
- * all, and what is out of sight costs nothing. The answer ends it, and folds part after part.
+ * Unfolds a lift frame by frame: first the panel gives way, then the gaps in sight open from the
+ * batch outward, the best of them first, and more as shelves scroll into sight. No frame draws them
+ * all, and what is out of sight costs nothing. The answer ends it, and closes them as slowly.
  */
-export function openOutward(store: LiftStore, ports: LiftPorts, batchId: string): () => void {
+export function openOutward(store: LiftStore, ports: Frames, batchId: string): () => void {
   let hasEnded = false;
-  let isBusy = false;
+  let waiting: string[] | null = null;
 
   const open = () => {
-    if (hasEnded) return;
-    const { opened, unfolded } = store.get();
-    const [first, ...rest] = ports.gapsInSight(batchId).filter((key) => !opened.has(key));
-    isBusy = first !== undefined;
-    if (first === undefined) return;
-    const part = partOf(first);
-    const mates = rest.filter((key) => partOf(key) === part).slice(0, MOST - 1);
-    store.set({
-      opened: new Set([...opened, first, ...mates]),
-      unfolded: new Set([...unfolded, part]),
+    const { lifted, opened } = store.get();
+    const next = waiting?.splice(0, OPENED) ?? [];
+    if (next.length === 0) waiting = null;
+    if (hasEnded || !lifted || waiting === null) return;
+    const faces = next.flatMap((key): [string, Face][] => {
+      const face = faceOf(lifted, key);
+      return face ? [[key, face]] : [];
     });
+    if (faces.length > 0) store.set({ opened: new Map([...opened, ...faces]) });
     ports.nextFrame(open);
+  };
+
+  /** Looks for gaps in sight that are shut; measured once, and again after scrolling. */
+  const look = () => {
+    if (hasEnded) return;
+    const { lifted, opened } = store.get();
+    const isBusy = waiting !== null;
+    const shut = ports.gapsInSight(batchId).filter((key) => !opened.has(key));
+    const best = shut.filter((key) => lifted?.gaps.get(key)?.best);
+    waiting = [...best, ...shut.filter((key) => !best.includes(key))];
+    if (!isBusy) open();
   };
 
   const unfold = () => {
     if (hasEnded) return;
     store.set({ isUnfolded: true });
-    ports.nextFrame(open);
+    ports.nextFrame(look);
   };
 
   ports.nextFrame(() => ports.nextFrame(unfold));
-  const stop = ports.onScroll(() => {
-    if (!isBusy) open();
-  });
+  const stop = ports.onScroll(look);
   return () => {
     hasEnded = true;
     stop();
-    foldBack(store, ports);
+    ports.nextFrame(() => close(store, ports));
   };
 }

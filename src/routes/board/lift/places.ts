@@ -6,9 +6,6 @@ import { indexed } from './indexed.ts';
 export const gapKey = (chainId: string, afterBatchId: string | null) =>
   `${chainId}:${afterBatchId ?? 'first'}`;
 
-/** The part of the board that a place is on: its chain, `new` or `bench`. */
-export const partOf = (key: string) => key.split(':')[0] ?? key;
-
 /** Keys of every place, shelf by shelf from the top, then a new shelf and the bench. */
 function everyKey(board: BoardFacts): string[] {
   const { chains, batchesOf } = indexed(board);

@@ -9,6 +9,8 @@ export interface LiftPorts extends Mover {
   /** Keeps what arrives from elsewhere off the board, but for a look at it; the answer ends it. */
   holdStill(look: (arrived: Board) => void): () => void;
   say(words: string): void;
+  /** Says it unless something else is to be said soon: for a pointer on its way. */
+  sayAtRest(words: string): void;
   /** Gives the focus back to a batch's handle once it is drawn. */
   focusBatch(batchId: string): void;
   newId(): string;

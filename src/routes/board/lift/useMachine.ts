@@ -6,10 +6,11 @@ import { isOnline } from '../../../api/connection.ts';
 import { moverOf } from '../../../api/moves.ts';
 import { boardStillness } from '../../../api/stillness.ts';
 import { newId } from '../../../app/newId.ts';
+import type { Announcements } from './Announcer.tsx';
 import { createLifting } from './lifting.ts';
 import { gapsInSight, handleOf, onScroll } from './inSight.ts';
 import type { LiftMachine } from './liftContext.ts';
-import { createLiftStore } from './liftState.ts';
+import { createLiftStore } from './liftStore.ts';
 import type { LiftPorts } from './ports.ts';
 import { createPutting } from './putting.ts';
 import { useRehearsal } from './useRehearsal.ts';
@@ -20,13 +21,14 @@ function focusBatch(batchId: string) {
   requestAnimationFrame(() => requestAnimationFrame(focus));
 }
 
-function portsOf(client: QueryClient, slug: string, say: (words: string) => void): LiftPorts {
+function portsOf(client: QueryClient, slug: string, words: Announcements): LiftPorts {
   return {
     board: () => readBoard(client, slug),
     ...moverOf(client, slug),
     isOnline,
     holdStill: boardStillness.hold,
-    say,
+    say: words.say,
+    sayAtRest: words.sayAtRest,
     focusBatch,
     newId,
     gapsInSight,
@@ -41,10 +43,10 @@ function createMachine(ports: LiftPorts): LiftMachine {
 }
 
 /** The machine behind the board's gestures, made once; it reads the board as it is shown. */
-export function useMachine(board: Board, say: (words: string) => void): LiftMachine {
+export function useMachine(board: Board, words: Announcements): LiftMachine {
   const client = useQueryClient();
   const slug = useBoardSlug();
-  const machine = useMemo(() => createMachine(portsOf(client, slug, say)), [client, slug, say]);
+  const machine = useMemo(() => createMachine(portsOf(client, slug, words)), [client, slug, words]);
   useEffect(() => machine.lifting.boardChanged(board), [board, machine]);
   useEffect(() => machine.lifting.release, [machine]);
   useRehearsal(board, machine.store);

@@ -1,7 +1,7 @@
 import { useEffect, useRef } from 'react';
 import type { Board } from '#shared/api/board.ts';
 import { rehearsal } from './judging.ts';
-import type { LiftStore } from './liftState.ts';
+import type { LiftStore } from './liftStore.ts';
 
 /** Less than this is left of an idle time for nothing. */
 const LEAST_MS = 4;

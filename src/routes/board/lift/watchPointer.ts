@@ -1,41 +1,50 @@
 import { scrollAt } from './autoScroll.ts';
-import { gapIn, type Point } from './pointer.ts';
+import { gapIn, pointOf, type Point } from './pointer.ts';
 
 export interface Watch {
+  moved(event: PointerEvent): void;
   /** Ends the watch; the answer is the gap under the pointer at the end. */
   stop(): string | null;
 }
 
 const under = ({ x, y }: Point) => document.elementFromPoint(x, y);
 
+interface Steps {
+  carry(at: Point): void;
+  goOver(key: string | null): void;
+}
+
 /**
- * Follows the pointer of a drag: one hit test in a frame, none while neither the pointer nor what
- * lies under it moves.
+ * Follows the pointer of a drag, once in a frame. What lies under a mouse the browser has found out
+ * to send its event; only a finger, or what scrolls under the pointer, needs a hit test of ours.
  */
-export function watchPointer(first: Event, goOver: (key: string | null) => void): Watch {
-  const at: Point = { x: 0, y: 0 };
+export function watchPointer(start: Point, { carry, goOver }: Steps): Watch {
+  let at = start;
+  let target: Element | null = null;
   let hasMoved = true;
-  const follow = (event: Event) => {
-    if (!(event instanceof PointerEvent)) return;
-    at.x = event.clientX;
-    at.y = event.clientY;
-    hasMoved = true;
-  };
+  let hasScrolled = false;
   const look = () => {
-    if (hasMoved) {
-      const element = under(at);
+    if (hasMoved || hasScrolled) {
+      const element = (!hasScrolled && target) || under(at);
+      if (hasMoved) carry(at);
+      hasMoved = false;
       goOver(gapIn(element));
-      hasMoved = scrollAt(at, element);
+      hasScrolled = scrollAt(at, element);
     }
     frame = requestAnimationFrame(look);
   };
-  follow(first);
-  document.addEventListener('pointermove', follow, true);
   let frame = requestAnimationFrame(look);
+  carry(start);
   return {
+    moved(event) {
+      at = pointOf(event);
+      // A finger's events go to where it was put down.
+      const isMouse = event.pointerType === 'mouse' && event.target instanceof Element;
+      target = isMouse ? event.target : null;
+      hasMoved = true;
+    },
     stop() {
       cancelAnimationFrame(frame);
-      document.removeEventListener('pointermove', follow, true);
       return gapIn(under(at));
     },
   };

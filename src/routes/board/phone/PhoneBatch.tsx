@@ -56,7 +56,10 @@ export function PhoneBatch({ batch, next }: PhoneBatchProps) {
       </div>
       <div className="relative min-h-14">
         {next && link && <PhoneLink earlier={batch} later={next} link={link} />}
-        <div className="pointer-events-none absolute inset-y-0 right-[18px] left-[84px] z-[2] lifting:pointer-events-auto">
+        <div
+          data-room
+          className="pointer-events-none absolute inset-y-0 right-[18px] left-[84px] z-[2] data-lifting:pointer-events-auto"
+        >
           <GapSlot
             layout="bar"
             gapKey={`${batch.chainId ?? ''}:${batch.id}`}

@@ -5,7 +5,6 @@ import { TextLink } from '../../../components/ui/TextLink.tsx';
 import { BestMove } from '../head/BestMove.tsx';
 import { UndoButtons } from '../lift/UndoButtons.tsx';
 import { GapSlot } from '../lift/GapSlot.tsx';
-import { useUnfolding } from '../lift/useUnfolding.ts';
 import { Descent } from '../../descent/Descent.tsx';
 import { ChainMenu } from '../shelf/ChainMenu.tsx';
 import { ChainName, UnreadMark } from '../shelf/ChainName.tsx';
@@ -17,7 +16,6 @@ import { PhoneHead } from './PhoneHead.tsx';
 export function PhoneChain({ chain }: { chain: Chain }) {
   const { board, index, judged, units, can } = useBoardView();
   const { path } = useBrewery();
-  const ref = useUnfolding<HTMLDivElement>(chain.id);
   const batches = index.batchesOf(chain.id);
   const verdicts = judged.chains.get(chain.id);
   const yeast = index.yeasts.get(chain.yeastId);
@@ -42,7 +40,7 @@ export function PhoneChain({ chain }: { chain: Chain }) {
           <ChainMenu chain={chain} />
         </div>
       )}
-      <div ref={ref} className="relative mt-3">
+      <div className="relative mt-3">
         <FirstGap chain={chain} />
         <ol className="ml-[18px]" aria-label={`Batches on ${chain.name}`}>
           {batches.map((batch, place) => (
@@ -80,7 +78,10 @@ function FirstGap({ chain }: { chain: Chain }) {
   const { index } = useBoardView();
   const { shape } = index.vessels.get(chain.vesselId ?? '') ?? { shape: 'bucket' as const };
   return (
-    <div className="pointer-events-none absolute inset-x-[18px] -top-14 z-[2] h-14 lifting:pointer-events-auto">
+    <div
+      data-room
+      className="pointer-events-none absolute inset-x-[18px] -top-14 z-[2] h-14 data-lifting:pointer-events-auto"
+    >
       <GapSlot layout="bar" gapKey={`${chain.id}:first`} vesselShape={shape} />
     </div>
   );

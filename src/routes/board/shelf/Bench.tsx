@@ -7,19 +7,17 @@ import { matchesFirst } from '../finding/filter.ts';
 import { useIsPale, useMatching } from '../finding/Matching.tsx';
 import { GapSlot } from '../lift/GapSlot.tsx';
 import { useIsLifted } from '../lift/liftContext.ts';
-import { useUnfolding } from '../lift/useUnfolding.ts';
 import { useBoardView } from '../view/BoardView.tsx';
 import { beerFacts } from '../view/words.ts';
 
 /** Batches that are on no chain yet, along the foot of the page. */
 export function Bench() {
   const { index, can } = useBoardView();
-  const ref = useUnfolding<HTMLElement>('bench');
   const matches = useMatching();
   const bench = matches ? matchesFirst(index.bench, ({ id }) => matches.has(id)) : index.bench;
   return (
     <section
-      ref={ref}
+      data-room
       aria-labelledby="bench"
       className="sticky print:static bottom-0 z-20 mt-auto flex items-center gap-3 border-t-[3px] border-shelf2 bg-bench px-7 pt-2.5 pb-3"
     >

@@ -1,13 +1,11 @@
 import { GapSlot } from '../lift/GapSlot.tsx';
-import { useUnfolding } from '../lift/useUnfolding.ts';
 import { SHELF, SHELF_HEIGHT } from '../view/drawing.ts';
 
 /** The room under the last shelf in which a new one can be begun; only there while a batch is lifted. */
 export function NewShelfRow() {
-  const ref = useUnfolding<HTMLElement>('new');
   return (
     <section
-      ref={ref}
+      data-room
       aria-label="New shelf"
       className="hidden grid-cols-[148px_minmax(0,1fr)] data-lifting:grid"
     >

@@ -1,7 +1,6 @@
 import { memo, useId } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import type { Chain } from '#shared/api/chain.ts';
-import { useUnfolding } from '../lift/useUnfolding.ts';
 import { BoardPartView, type BoardViewValue } from '../view/BoardView.tsx';
 import { ShelfBatch } from './ShelfBatch.tsx';
 import { ShelfLabel } from './ShelfLabel.tsx';
@@ -27,11 +26,9 @@ export const Shelf = memo(function Shelf({ chainId, view }: ShelfProps) {
 
 function ShelfRow({ chain, batches }: { chain: Chain; batches: readonly Batch[] }) {
   const headingId = useId();
-  const ref = useUnfolding<HTMLElement>(chain.id);
   const [first] = batches;
   return (
     <section
-      ref={ref}
       aria-labelledby={headingId}
       data-chain={chain.id}
       className="grid grid-cols-[148px_minmax(0,1fr)] pt-3 [contain-intrinsic-size:auto_230px] [content-visibility:auto] print:break-inside-avoid print:[content-visibility:visible]"

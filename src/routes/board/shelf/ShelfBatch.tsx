@@ -28,6 +28,7 @@ export function ShelfBatch({ batch, next, chainId }: ShelfBatchProps) {
       data-batch={batch.id}
       data-pale={useIsPale(batch.id) || undefined}
       data-in-hand={isLifted || undefined}
+      data-room
       className="relative flex-none"
       style={{ width: SHELF.cell, height: SHELF.top + SHELF.board + SHELF.foot }}
     >

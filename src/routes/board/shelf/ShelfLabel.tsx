@@ -38,7 +38,7 @@ export function ShelfLabel({ chain, headingId }: { chain: Chain; headingId: stri
         </div>
       )}
       {can.editChains && (
-        <div className="lift-fade mt-1 -ml-1.5 print:hidden">
+        <div className="mt-1 -ml-1.5 print:hidden">
           <ChainMenu chain={chain} />
         </div>
       )}

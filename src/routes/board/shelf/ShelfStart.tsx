@@ -9,7 +9,11 @@ export function ShelfStart({ chain }: { chain: Chain }) {
   const { index } = useBoardView();
   const vessel = chain.vesselId === null ? undefined : index.vessels.get(chain.vesselId);
   return (
-    <li className="relative flex-none" style={{ width: SHELF.start, height: SHELF_HEIGHT }}>
+    <li
+      data-room
+      className="relative flex-none"
+      style={{ width: SHELF.start, height: SHELF_HEIGHT }}
+    >
       <div
         className="lift-fade absolute left-1 z-[2] flex items-end gap-2 pr-2"
         style={{ height: SHELF.top + 1 }}
