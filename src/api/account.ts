@@ -64,16 +64,12 @@ export const closingQuery = queryOptions({
   staleTime: 0,
 });
 
-/** @param onClosed also called where the page went away meanwhile: the stream may tell it first */
-export function useCloseAccount(onClosed: () => void | Promise<void>) {
+/** The front page is loaded anew, so that nothing of the account stays in memory. */
+export function useCloseAccount() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (body: AccountClosing) => requestNothing('POST', api.accountClosing, { body }),
-    async onSuccess() {
-      await onClosed();
-      client.clear();
-      client.setQueryData(sessionQuery.queryKey, null);
-    },
+    onSuccess: () => location.replace('/'),
     onError: () => client.invalidateQueries(closingQuery),
   });
 }

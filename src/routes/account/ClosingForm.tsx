@@ -1,5 +1,4 @@
 import { useId, useState, type FormEvent } from 'react';
-import { useNavigate } from 'react-router-dom';
 import { useCloseAccount } from '../../api/account.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { fieldState } from '../../components/form/fieldState.ts';
@@ -16,8 +15,7 @@ interface ClosingFormProps {
 }
 
 export function ClosingForm({ losing, onClose }: ClosingFormProps) {
-  const navigate = useNavigate();
-  const close = useCloseAccount(() => navigate('/', { replace: true }));
+  const close = useCloseAccount();
   const online = useOnline();
   const id = useId();
   const [password, setPassword] = useState('');
