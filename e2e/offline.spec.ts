@@ -91,3 +91,16 @@ test('a connection that breaks under a save loses nothing', async ({ board: page
   await save.click();
   await expect(form).toBeHidden();
 });
+
+test('a page whose parts did not arrive says so, and is loaded as soon as they can be had', async ({
+  board: page,
+  brewery,
+}) => {
+  await brewery.write(SEASON);
+  const parts = /\/assets\/(Shell|BoardPage)-/;
+  await page.route(parts, (route) => route.abort('internetdisconnected'));
+  await page.goto(`/b/${brewery.slug}`);
+  await expect(page.getByRole('heading', { name: 'This page has not arrived.' })).toBeVisible();
+  await page.unroute(parts);
+  await expect(page.getByText('Ebb Pale').first()).toBeVisible({ timeout: 15_000 });
+});

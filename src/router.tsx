@@ -1,5 +1,6 @@
 import { createBrowserRouter, type RouteObject } from 'react-router-dom';
-import { lazyPage, tellTheWay } from './app/lazyPage.ts';
+import { tellTheWay } from './app/lazyPage.ts';
+import { lazyRoute } from './app/lazyRoute.tsx';
 import { Root } from './app/Root.tsx';
 import { ErrorPage } from './routes/error/ErrorPage.tsx';
 import { NotFoundPage } from './routes/error/NotFoundPage.tsx';
@@ -7,82 +8,87 @@ import { WelcomePage } from './routes/welcome/WelcomePage.tsx';
 
 /** Pages of a brewery: in its current season, or in the one that the address names. */
 const ofBrewery = {
-  lazy: () => lazyPage(async () => (await import('./routes/shell/Shell.tsx')).Shell),
+  lazy: () => lazyRoute(async () => (await import('./routes/shell/Shell.tsx')).Shell),
   errorElement: <ErrorPage />,
   children: [
     {
       index: true,
-      lazy: () => lazyPage(async () => (await import('./routes/board/BoardPage.tsx')).BoardPage),
+      lazy: () => lazyRoute(async () => (await import('./routes/board/BoardPage.tsx')).BoardPage),
     },
     {
       path: 'today',
-      lazy: () => lazyPage(async () => (await import('./routes/today/TodayPage.tsx')).TodayPage),
+      lazy: () => lazyRoute(async () => (await import('./routes/today/TodayPage.tsx')).TodayPage),
     },
     {
       path: 'chains/:id',
-      lazy: () => lazyPage(async () => (await import('./routes/chain/ChainPage.tsx')).ChainPage),
+      lazy: () => lazyRoute(async () => (await import('./routes/chain/ChainPage.tsx')).ChainPage),
     },
     {
       path: 'pour/:laterBatchId',
-      lazy: () => lazyPage(async () => (await import('./routes/pour/PourPage.tsx')).PourPage),
+      lazy: () => lazyRoute(async () => (await import('./routes/pour/PourPage.tsx')).PourPage),
     },
     {
       path: 'batches/:id',
-      lazy: () => lazyPage(async () => (await import('./routes/batch/BatchPage.tsx')).BatchPage),
+      lazy: () => lazyRoute(async () => (await import('./routes/batch/BatchPage.tsx')).BatchPage),
     },
     {
       path: 'yeasts',
-      lazy: () => lazyPage(async () => (await import('./routes/yeasts/YeastsPage.tsx')).YeastsPage),
+      lazy: () =>
+        lazyRoute(async () => (await import('./routes/yeasts/YeastsPage.tsx')).YeastsPage),
     },
     {
       path: 'yeasts/:id/family',
-      lazy: () => lazyPage(async () => (await import('./routes/family/FamilyPage.tsx')).FamilyPage),
+      lazy: () =>
+        lazyRoute(async () => (await import('./routes/family/FamilyPage.tsx')).FamilyPage),
     },
     {
       path: 'vessels',
       lazy: () =>
-        lazyPage(async () => (await import('./routes/vessels/VesselsPage.tsx')).VesselsPage),
+        lazyRoute(async () => (await import('./routes/vessels/VesselsPage.tsx')).VesselsPage),
     },
     {
       path: 'people',
-      lazy: () => lazyPage(async () => (await import('./routes/people/PeoplePage.tsx')).PeoplePage),
+      lazy: () =>
+        lazyRoute(async () => (await import('./routes/people/PeoplePage.tsx')).PeoplePage),
     },
     {
       path: 'rules',
-      lazy: () => lazyPage(async () => (await import('./routes/rules/RulesPage.tsx')).RulesPage),
+      lazy: () => lazyRoute(async () => (await import('./routes/rules/RulesPage.tsx')).RulesPage),
     },
     {
       path: 'record',
-      lazy: () => lazyPage(async () => (await import('./routes/record/RecordPage.tsx')).RecordPage),
+      lazy: () =>
+        lazyRoute(async () => (await import('./routes/record/RecordPage.tsx')).RecordPage),
     },
     {
       path: 'season',
-      lazy: () => lazyPage(async () => (await import('./routes/season/SeasonPage.tsx')).SeasonPage),
+      lazy: () =>
+        lazyRoute(async () => (await import('./routes/season/SeasonPage.tsx')).SeasonPage),
     },
     {
       path: 'account',
       lazy: () =>
-        lazyPage(async () => (await import('./routes/account/AccountPage.tsx')).AccountPage),
+        lazyRoute(async () => (await import('./routes/account/AccountPage.tsx')).AccountPage),
     },
     {
       path: 'science',
       lazy: () =>
-        lazyPage(async () => (await import('./routes/science/SciencePage.tsx')).SciencePage),
+        lazyRoute(async () => (await import('./routes/science/SciencePage.tsx')).SciencePage),
     },
     {
       path: 'print/season',
       lazy: () =>
-        lazyPage(async () => (await import('./routes/print/season/SeasonPrint.tsx')).SeasonPrint),
+        lazyRoute(async () => (await import('./routes/print/season/SeasonPrint.tsx')).SeasonPrint),
     },
     {
       path: 'print/chains/:id',
       lazy: () =>
-        lazyPage(async () => (await import('./routes/print/chain/ChainPrint.tsx')).ChainPrint),
+        lazyRoute(async () => (await import('./routes/print/chain/ChainPrint.tsx')).ChainPrint),
     },
     {
       path: 'print/brew-sheets/:id',
       lazy: () =>
-        lazyPage(async () => (await import('./routes/print/sheet/BrewSheet.tsx')).BrewSheet),
+        lazyRoute(async () => (await import('./routes/print/sheet/BrewSheet.tsx')).BrewSheet),
     },
     { path: '*', element: <NotFoundPage /> },
   ],
@@ -99,53 +105,53 @@ export const router = createBrowserRouter([
       {
         path: 'sign-in',
         lazy: () =>
-          lazyPage(async () => (await import('./routes/sign-in/SignInPage.tsx')).SignInPage),
+          lazyRoute(async () => (await import('./routes/sign-in/SignInPage.tsx')).SignInPage),
       },
       {
         path: 'sign-up',
         lazy: () =>
-          lazyPage(async () => (await import('./routes/sign-up/SignUpPage.tsx')).SignUpPage),
+          lazyRoute(async () => (await import('./routes/sign-up/SignUpPage.tsx')).SignUpPage),
       },
       {
         path: 'join/:token',
-        lazy: () => lazyPage(async () => (await import('./routes/join/JoinPage.tsx')).JoinPage),
+        lazy: () => lazyRoute(async () => (await import('./routes/join/JoinPage.tsx')).JoinPage),
       },
       {
         path: 'shared/:token',
         lazy: () =>
-          lazyPage(async () => (await import('./routes/shared/SharedPage.tsx')).SharedPage),
+          lazyRoute(async () => (await import('./routes/shared/SharedPage.tsx')).SharedPage),
       },
       {
         path: 'guest/:token',
-        lazy: () => lazyPage(async () => (await import('./routes/guest/GuestPage.tsx')).GuestPage),
+        lazy: () => lazyRoute(async () => (await import('./routes/guest/GuestPage.tsx')).GuestPage),
       },
       {
         path: 'about/science',
         lazy: () =>
-          lazyPage(
+          lazyRoute(
             async () => (await import('./routes/science/AboutSciencePage.tsx')).AboutSciencePage,
           ),
       },
       {
         path: 'about/checks',
         lazy: () =>
-          lazyPage(async () => (await import('./routes/checks/ChecksPage.tsx')).ChecksPage),
+          lazyRoute(async () => (await import('./routes/checks/ChecksPage.tsx')).ChecksPage),
       },
       {
         path: 'breweries',
         lazy: () =>
-          lazyPage(
+          lazyRoute(
             async () => (await import('./routes/breweries/BreweriesPage.tsx')).BreweriesPage,
           ),
       },
       {
         path: 'start',
-        lazy: () => lazyPage(async () => (await import('./routes/today/ToStart.tsx')).ToStart),
+        lazy: () => lazyRoute(async () => (await import('./routes/today/ToStart.tsx')).ToStart),
       },
       {
         path: 'account',
         lazy: () =>
-          lazyPage(async () => (await import('./routes/account/ToAccount.tsx')).ToAccount),
+          lazyRoute(async () => (await import('./routes/account/ToAccount.tsx')).ToAccount),
       },
       { path: 'b/:brewery', ...ofBrewery },
       { path: 'b/:brewery/seasons/:season', ...ofBrewery },
