@@ -195,7 +195,7 @@ async function addChain(
 
 async function addBatch(
   { tx, breweryId, seasonId, first, now }: Place,
-  { plan, brewDay, stage, read, dumped = false }: DemoBatch,
+  { plan, brewDay, stage, read, dumped }: DemoBatch,
   chainId: string | null,
   at: number,
   poured: boolean,

@@ -14,6 +14,8 @@ const READINGS = 5000;
 const MOST_MS = 300;
 const OPENINGS = 5;
 const MINUTES_APART = 5;
+/** For what comes behind the readings, such as the history; the live stream never ends. */
+const SETTLE_MS = 2500;
 
 /** A batch whose fermentation a probe wrote down, opened in a fresh browser profile. */
 export const batchPage: Part = {
@@ -88,7 +90,7 @@ async function scripting(browser: Browser, at: AtWork, batchId: string): Promise
   await session.send('Performance.enable');
   await page.goto(`${at.url}/b/${at.brewery.slug}/batches/${batchId}`);
   await page.getByText(`${READINGS} in all`).waitFor();
-  await page.waitForLoadState('networkidle');
+  await page.waitForTimeout(SETTLE_MS);
   const { metrics } = await session.send('Performance.getMetrics');
   await context.close();
   const script = metrics.find(({ name }) => name === 'ScriptDuration');

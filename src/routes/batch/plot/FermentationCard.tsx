@@ -91,7 +91,7 @@ function Legend({ drawn }: { drawn: Drawn }) {
       {drawn.temperature.length > 0 && range && (
         <li className="flex items-center gap-1.5">
           <svg width="22" height="12">
-            <rect width="22" height="12" rx="3" className="fill-cake" opacity="0.6" />
+            <rect width="22" height="12" rx="3" className="fill-cake opacity-60 dark:opacity-25" />
           </svg>
           {range}
         </li>

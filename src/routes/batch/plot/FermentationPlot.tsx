@@ -43,8 +43,7 @@ function Warm({ drawn, frame, y }: { drawn: Drawn; frame: Frame; y: ToY }) {
       y={top}
       width={frame.right - frame.left}
       height={Math.max(0, foot - top)}
-      className="fill-cake"
-      opacity="0.45"
+      className="fill-cake opacity-45 dark:opacity-20"
     />
   );
 }
