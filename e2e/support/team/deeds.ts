@@ -178,10 +178,10 @@ export const GUEST_DEEDS = {
   undo: { deed: undoAsGuest, weight: 3 },
 } as const;
 
-/** Closes whatever is open, as somebody does who changed their mind. */
+/** Closes whatever is open and puts back what is lifted, as somebody does who changed their mind. */
 export async function closeAll(page: Page): Promise<void> {
   for (let tries = 0; tries < 4; tries += 1) {
-    const open = page.locator('dialog[open]');
+    const open = page.locator('dialog[open], [data-lifting]');
     if ((await open.count()) === 0) return;
     const leave = page.getByRole('button', { name: 'Leave without saving', exact: true });
     if (await leave.first().isVisible())
