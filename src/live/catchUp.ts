@@ -29,6 +29,8 @@ export function createCatchUp(client: QueryClient, slug: string, seasonId: strin
     if (board === undefined || board.season.id !== seasonId) return false;
     return isForced || board.season.revision < wanted;
   };
+  /** A board that no page shows is not read, only marked as old: to wait for that read would never end. */
+  const isShown = () => client.getQueryCache().find({ queryKey })?.isActive() ?? false;
   const work = async () => {
     // A read that waits for the end of a drag is older than what was heard since.
     if (isWorking && boardStillness.isHeld()) void client.invalidateQueries({ queryKey });
@@ -39,6 +41,7 @@ export function createCatchUp(client: QueryClient, slug: string, seasonId: strin
       const wasForced = isForced;
       isForced = false;
       await client.invalidateQueries({ queryKey });
+      if (!isShown()) break;
       if (client.getQueryState(queryKey)?.status === 'error') {
         // What was asked for is still to be read, at the next heartbeat or when the connection is back.
         isForced ||= wasForced;

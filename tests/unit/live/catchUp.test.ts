@@ -120,3 +120,16 @@ it('reads for a guest’s chain at the next heartbeat where the first read faile
   await new Promise((resolve) => setTimeout(resolve, 20));
   expect(server.reads, 'once it was read it is not read again').toBe(1);
 });
+
+it('comes to rest where the page with the board has gone, and leaves it marked as old', async () => {
+  const { heard } = createCatchUp(client, SLUG, boardAt(1).season.id);
+  const { queryKey } = boardQuery(SLUG);
+  stop();
+  server.revision = 2;
+  heard(2);
+  await new Promise((resolve) => setTimeout(resolve, 20));
+  expect(server.reads).toBe(0);
+  expect(client.getQueryState(queryKey)?.isInvalidated).toBe(true);
+  stop = new QueryObserver(client, boardQuery(SLUG)).subscribe(() => undefined);
+  await expect.poll(shown).toBe(2);
+});
