@@ -1,11 +1,12 @@
 import type { Batch } from '../api/batch.ts';
 import { noticesOf, watchedOf } from '../fermentation/notices.ts';
 import { isStuck } from '../fermentation/stuck.ts';
+import type { UnitPrefs } from '../api/units.ts';
 import type { BoardContext } from '../rules/facts.ts';
 import { sayIn } from '../rules/say.ts';
 import { daysBetween } from '../units/day.ts';
 import { DEFAULT_UNITS } from '../units/quantity.ts';
-import type { LinkSight } from './boardLink.ts';
+import type { BoardIndex } from './board.ts';
 
 /** A pour that is due today, tomorrow, or was due: its cake wants judging. */
 const DUE_DAYS = 1;
@@ -17,7 +18,7 @@ const DUE_DAYS = 1;
 export function cakeCheckOf(
   earlier: Batch,
   later: Batch,
-  { index, units }: LinkSight,
+  { index, units }: { index: BoardIndex; units: UnitPrefs | undefined },
 ): BoardContext['cakeCheck'] | null {
   const { cake, chainId } = earlier;
   if (cake === null) return null;

@@ -298,7 +298,8 @@ describe('the end', () => {
   it('comes at once with a closed account', async () => {
     const { there, streams } = await twice();
     await good(there.post(api.accountClosing, { password: PASSWORD, losing: [] }));
-    for (const each of streams) await each.heard('ended', undefined, 1_000);
+    for (const each of streams)
+      expect(await each.heard('ended', undefined, 1_000)).toHaveProperty('why');
   });
 
   it('is not reached by somebody else’s season', async () => {

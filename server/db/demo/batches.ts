@@ -1,17 +1,7 @@
-import type { BatchCreate, Stage } from '#shared/api/batch.ts';
 import type { ChainStart } from '#shared/api/chain.ts';
+import type { DemoBatch } from './demoBatch.ts';
 import { plan } from './plan.ts';
 import type { VesselKey, YeastKey } from './stock.ts';
-
-/** A batch of the demo; days count from the season's first brew day. */
-export interface DemoBatch {
-  plan: Omit<BatchCreate, 'id' | 'brewOn' | 'wantedOn' | 'vesselId' | 'yeastId' | 'typed'>;
-  brewDay: number | null;
-  stage: Exclude<Stage, 'scrapped'>;
-  /** What became of its cake, where that was not poured. */
-  dumped?: true;
-  read?: { volumeL?: number; og?: number; fg?: number; rackDay?: number };
-}
 
 export interface DemoChain {
   name: string;

@@ -1,4 +1,5 @@
-import type { DemoBatch, DemoChain } from './batches.ts';
+import type { DemoChain } from './batches.ts';
+import type { DemoBatch } from './demoBatch.ts';
 import { plan } from './plan.ts';
 
 /** The season before, brewed to its end and archived. Days count from its first brew day. */

@@ -1,4 +1,4 @@
-import type { DemoBatch } from './batches.ts';
+import type { DemoBatch } from './demoBatch.ts';
 
 type Figures = [og: number, fg: number, srm: number, ibu: number, fermentC: number, days: number];
 

@@ -8,7 +8,7 @@ import { demandMade } from '../../http/create.ts';
 import { canAcceptHolds } from '../../policies.ts';
 import { notFound, problem } from '../../problems.ts';
 import { one } from '../board/find.ts';
-import type { ClearanceRow } from './load.ts';
+import type { ClearanceRow } from './rows.ts';
 import { countedUntil, demandOpenRun, standingAt, type RunCommand, type Scene } from './scene.ts';
 import { happenedAt } from './times.ts';
 

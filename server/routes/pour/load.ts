@@ -5,20 +5,7 @@ import { person } from '../../db/schema/people.ts';
 import { pourClearance, pourEvent, pourReading, pourRun } from '../../db/schema/pour.ts';
 import { problem } from '../../problems.ts';
 import { presentRun } from './present.ts';
-
-export type RunRow = typeof pourRun.$inferSelect;
-export type ReadingRow = typeof pourReading.$inferSelect;
-export type ClearanceRow = typeof pourClearance.$inferSelect;
-export type EventRow = typeof pourEvent.$inferSelect;
-
-/** A run with all that belongs to it, as the rows are. */
-export interface RunRows {
-  run: RunRow;
-  /** By the device's clock, which is nearly their own order. */
-  readings: ReadingRow[];
-  clearances: ClearanceRow[];
-  pour: EventRow | null;
-}
+import type { RunRow, RunRows } from './rows.ts';
 
 /** The newest run of a batch: the open one, else the last that was closed. Null: none. */
 export async function newestRun(db: Db | Tx, batchId: string): Promise<RunRows | null> {

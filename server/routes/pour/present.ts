@@ -10,7 +10,7 @@ import {
   type WortReading,
 } from '#shared/api/pour.ts';
 import { VERDICTS } from '#shared/rules/vocabulary.ts';
-import type { ClearanceRow, EventRow, ReadingRow, RunRows } from './load.ts';
+import type { ClearanceRow, EventRow, ReadingRow, RunRows } from './rows.ts';
 import { happenedAt } from './times.ts';
 
 /** What a pour was judged as, at its own time. */

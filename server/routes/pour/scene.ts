@@ -9,7 +9,8 @@ import { dayIn } from '../../today.ts';
 import type { Said } from '../../record/recordEdit.ts';
 import { changeBoard } from '../board/changeBoard.ts';
 import type { Hand } from '../board/hand.ts';
-import { newestRun, presented, runOf, type RunRows } from './load.ts';
+import { newestRun, presented, runOf } from './load.ts';
+import type { RunRows } from './rows.ts';
 import { happenedAt } from './times.ts';
 
 /** A run under the season's lock, with the board that it is on. */

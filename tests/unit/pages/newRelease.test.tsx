@@ -21,7 +21,7 @@ test('a new version is asked about, and never loads an open form away', () => {
   );
   expect(screen.queryByRole('region', { name: 'New version' })).toBeNull();
 
-  const take = vi.fn();
+  const take = vi.fn<() => void>();
   releaseStore.ready(take);
   rerender(
     <>

@@ -1,7 +1,7 @@
 import { unitOf } from '#shared/units/quantity.ts';
 import { useBoardView } from '../../board/view/BoardView.tsx';
 import { fgOf, gravityText } from '../../board/view/words.ts';
-import type { SheetOf } from './BrewSheet.tsx';
+import type { SheetOf } from './sheetOf.ts';
 import { Blank, Box, SheetPart, Tick } from './SheetPart.tsx';
 
 /** The brew day in its order, each step with a box to tick and room for what was read. */

@@ -1,8 +1,6 @@
 import { useMemo } from 'react';
-import type { Batch } from '#shared/api/batch.ts';
 import { sightOf } from '#shared/chain/boardLink.ts';
 import { inherit } from '#shared/chain/inherit.ts';
-import type { JudgedLink } from '#shared/chain/judgeBoard.ts';
 import { linkInput } from '#shared/chain/linkInput.ts';
 import { formatDay } from '#shared/units/day.ts';
 import { useBrewery } from '../../../app/useBrewery.ts';
@@ -16,6 +14,7 @@ import { Poured } from './Poured.tsx';
 import { SheetCarries } from './SheetCarries.tsx';
 import { SheetCautions } from './SheetCautions.tsx';
 import { SheetFindings } from './SheetFindings.tsx';
+import type { SheetOf } from './sheetOf.ts';
 import { Blank } from './SheetPart.tsx';
 import { PourWindowPart } from './PourWindowPart.tsx';
 
@@ -38,13 +37,6 @@ function FoundLink() {
   if (!later || !earlier || !link || !input)
     return <NothingToPrint title="There is no such link any more" />;
   return <Sheet {...{ earlier, later, link, input }} />;
-}
-
-export interface SheetOf {
-  earlier: Batch;
-  later: Batch;
-  link: JudgedLink;
-  input: NonNullable<ReturnType<typeof linkInput>>;
 }
 
 function Sheet(of: SheetOf) {

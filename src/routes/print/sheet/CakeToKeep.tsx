@@ -5,7 +5,7 @@ import { format } from '#shared/units/quantity.ts';
 import { unbroken } from '../../../app/unbroken.ts';
 import { spanWords, thumbWords } from '../../board/panel/keepWords.ts';
 import { useBoardView } from '../../board/view/BoardView.tsx';
-import type { SheetOf } from './BrewSheet.tsx';
+import type { SheetOf } from './sheetOf.ts';
 import { SheetPart } from './SheetPart.tsx';
 
 /** How much of the cake stays, by volume and by weight, and where the rest goes. */

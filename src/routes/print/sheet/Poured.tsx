@@ -4,7 +4,7 @@ import { unbroken } from '../../../app/unbroken.ts';
 import { useBoardView } from '../../board/view/BoardView.tsx';
 import { vesselOf } from '../../board/view/drawing.ts';
 import { beerFacts, fgOf, gravityText, volumeOf } from '../../board/view/words.ts';
-import type { SheetOf } from './BrewSheet.tsx';
+import type { SheetOf } from './sheetOf.ts';
 import { SheetPart } from './SheetPart.tsx';
 
 /** Which wort goes onto which cake, in which vessel, and what the two make together. */
