@@ -1,5 +1,6 @@
 import { addDays } from '#shared/units/day.ts';
-import { DEMO_BENCH, DEMO_CHAINS, type DemoBatch } from '../../server/db/demo/batches.ts';
+import { DEMO_BENCH, DEMO_CHAINS } from '../../server/db/demo/batches.ts';
+import type { DemoBatch } from '../../server/db/demo/demoBatch.ts';
 import type { BoardPlan } from './board.ts';
 
 const FIRST_DAY = '2027-03-06';
