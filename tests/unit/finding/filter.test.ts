@@ -26,9 +26,21 @@ const board = boardOf({
     makeChain(2, { yeastId: lager.id, vesselId: null, position: 1 }),
   ],
   batches: [
-    makeBatch(1, { chainId: idOf('chain', 1), place: 0, stage: 'racked', srm: 40 }),
+    makeBatch(1, {
+      chainId: idOf('chain', 1),
+      place: 0,
+      stage: 'racked',
+      srm: 40,
+      brewOn: '2027-03-06',
+    }),
     // A pale beer on the cake of a black one.
-    makeBatch(2, { chainId: idOf('chain', 1), place: 1, srm: 3, vesselId: cone.id }),
+    makeBatch(2, {
+      chainId: idOf('chain', 1),
+      place: 1,
+      srm: 3,
+      vesselId: cone.id,
+      brewOn: '2027-03-20',
+    }),
     makeBatch(3, { chainId: idOf('chain', 2), place: 0 }),
     makeBatch(4, { chainId: null, place: 0, yeastId: lager.id }),
   ],
@@ -43,7 +55,7 @@ describe('a filter', () => {
     ['a vessel, the batch’s own before its shelf’s', `vessel=${bucket.id}`, ids(1)],
     ['a batch’s own vessel', `vessel=${cone.id}`, ids(2)],
     ['a stage', 'stage=racked', ids(1)],
-    ['a verdict, of the link before', 'verdict=hold', ids(2)],
+    ['a verdict, of the link before', 'verdict=mind', ids(2)],
     ['two at once', `stage=pencilled&yeast=${ale.id}`, ids(2)],
     ['a yeast that is gone', 'yeast=gone', ids()],
   ])('lets through %s', (_, query, found) => {
