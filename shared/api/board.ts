@@ -10,24 +10,28 @@ import { abilities, member, role } from './people.ts';
 import { vessel } from './vessel.ts';
 import { yeast } from './yeast.ts';
 
-const keys = Object.keys(HOUSE_RULES) as HouseRuleKey[];
+/** The one rule that can be switched off: null. */
+type Switched = 'jumpHold';
+type Limit = Exclude<HouseRuleKey, Switched>;
+
+const within = (key: HouseRuleKey) =>
+  z.number().min(HOUSE_RULES[key].min).max(HOUSE_RULES[key].max);
+
+const limits = Object.fromEntries(
+  Object.keys(HOUSE_RULES)
+    .filter((key): key is Limit => key !== ('jumpHold' satisfies Switched))
+    .map((key) => [key, within(key).optional()]),
+) as { [K in Limit]: z.ZodOptional<z.ZodNumber> };
+
 /** Only what differs from the default. Bounds and the order of limits: `shared/rules/houseRules`. */
-export const houseRuleChanges = z.strictObject({
-  ...Object.fromEntries(
-    keys.map((key) => [
-      key,
-      (key === 'jumpHold'
-        ? z.number().min(HOUSE_RULES[key].min).max(HOUSE_RULES[key].max).nullable()
-        : z.number().min(HOUSE_RULES[key].min).max(HOUSE_RULES[key].max)
-      ).optional(),
-    ]),
-  ),
+export const houseRuleChanges: z.ZodType<HouseRuleChanges> = z.strictObject({
+  ...limits,
+  jumpHold: within('jumpHold').nullable().optional(),
   softened: z.array(z.enum(RULE_IDS)).optional(),
-}) as unknown as z.ZodType<HouseRuleChanges>;
-export type HouseRuleChanges = { [K in Exclude<HouseRuleKey, 'jumpHold'>]?: number } & {
-  jumpHold?: number | null;
-  softened?: (typeof RULE_IDS)[number][];
-};
+});
+export type HouseRuleChanges = { [K in Limit]?: number } & {
+  [K in Switched]?: number | null;
+} & { softened?: (typeof RULE_IDS)[number][] };
 
 /** A season's board, whole: one request. The verdicts are computed from it by `shared/chain`. */
 export const board = z.strictObject({

@@ -23,9 +23,9 @@ afterAll(() => server.close());
 /** Statements that reached the database while something ran. */
 async function statementsOf(run: () => Promise<unknown>): Promise<string[]> {
   const seen: string[] = [];
-  const client = (await server.pool.connect()) as unknown as { constructor: { prototype: Client } };
-  (client as unknown as { release(): void }).release();
-  const { prototype } = client.constructor;
+  const client = await server.pool.connect();
+  client.release();
+  const prototype: Client = Object.getPrototypeOf(client);
   const query = prototype.query;
   prototype.query = function (...args: unknown[]) {
     const [first] = args;

@@ -1,70 +1,42 @@
-import { yeast, yeastCreate, yeastPatch } from '#shared/api/yeast.ts';
+import { and, eq, sql } from 'drizzle-orm';
+import {
+  yeast as contract,
+  yeastCreate,
+  yeastPatch,
+  type Yeast,
+  type YeastCreate,
+} from '#shared/api/yeast.ts';
 import { api } from '#shared/api/urls.ts';
+import { tellYeast } from '#shared/record/sentences.ts';
+import { yeast, yeastLine } from '../../db/schema/stock.ts';
 import { pathOf } from '../../http/pathOf.ts';
-import { forMember } from '../../http/route.ts';
-import { canEditYeastsAndVessels } from '../../policies.ts';
-import { changeBoard } from '../board/changeBoard.ts';
-import { one } from '../board/find.ts';
-import { addYeast, editYeast, removeYeast } from './commands.ts';
+import type { Where } from '../stock/kind.ts';
+import { stockRoutes } from '../stock/routes.ts';
 
-const all = pathOf(api.yeasts(':brewery'));
-const single = pathOf(api.yeast(':brewery', ':id'));
+const isRow = ({ breweryId, id }: Where) => and(eq(yeast.breweryId, breweryId), eq(yeast.id, id));
 
-const add = forMember(
-  {
-    name: 'addYeast',
-    method: 'post',
-    path: all,
-    summary: 'Add a yeast',
-    body: yeastCreate,
-    answer: yeast,
-    status: 201,
-    problems: ['already-exists'],
+export const yeastRoutes = stockRoutes<Yeast, YeastCreate>({
+  word: 'yeast',
+  field: 'yeastId',
+  addresses: {
+    all: pathOf(api.yeasts(':brewery')),
+    single: pathOf(api.yeast(':brewery', ':id')),
   },
-  canEditYeastsAndVessels,
-  async (asked, member) => {
-    const board = await changeBoard(asked, member, [], addYeast(asked.body));
-    const row = one(board.yeasts, asked.body.id);
-    return { body: row, version: row.version };
+  row: contract,
+  create: yeastCreate,
+  patch: yeastPatch,
+  rowsOf: ({ yeasts }) => yeasts,
+  insert: (tx, values) =>
+    tx.insert(yeast).values(values).onConflictDoNothing().returning({ id: yeast.id }),
+  update: (tx, where, fields) =>
+    tx
+      .update(yeast)
+      .set({ ...fields, version: sql`${yeast.version} + 1` })
+      .where(isRow(where)),
+  async remove(tx, where) {
+    // Lines of shelves that are gone; one that is still used would have been named before.
+    await tx.delete(yeastLine).where(eq(yeastLine.yeastId, where.id));
+    await tx.delete(yeast).where(isRow(where));
   },
-);
-
-const edit = forMember(
-  {
-    name: 'editYeast',
-    method: 'patch',
-    path: single,
-    summary: 'Change a yeast',
-    body: yeastPatch,
-    answer: yeast,
-    status: 200,
-    ifMatch: true,
-  },
-  canEditYeastsAndVessels,
-  async (asked, member) => {
-    const { id = '' } = asked.params;
-    const board = await changeBoard(asked, member, [], editYeast(id, asked.version, asked.body));
-    const row = one(board.yeasts, id);
-    return { body: row, version: row.version };
-  },
-);
-
-const remove = forMember(
-  {
-    name: 'deleteYeast',
-    method: 'delete',
-    path: single,
-    summary: 'Delete a yeast that nothing uses',
-    answer: null,
-    status: 204,
-    ifMatch: true,
-    problems: ['in-use'],
-  },
-  canEditYeastsAndVessels,
-  async (asked, member) => {
-    await changeBoard(asked, member, [], removeYeast(asked.params.id ?? '', asked.version));
-    return {};
-  },
-);
-
-export const yeastRoutes = [add, edit, remove];
+  tell: tellYeast,
+});
