@@ -33,9 +33,10 @@ test('a chosen theme stands from the first paint on', async ({ board: page, brew
   });
   await page.goto(`/b/${brewery.slug}`);
   await expect(page.locator('[data-batch]').first()).toBeVisible();
-  const seen = await page.evaluate(() => [
-    ...(window as unknown as { seenGrounds: Set<string> }).seenGrounds,
-  ]);
+  const seen = await page.evaluate(() => {
+    const grounds: unknown = Reflect.get(window, 'seenGrounds');
+    return grounds instanceof Set ? [...grounds].map(String) : [];
+  });
   expect(seen.length).toBeGreaterThan(0);
   for (const colour of seen) expect(lightness(colour), colour).toBeLessThan(80);
 });

@@ -71,6 +71,7 @@ test('two who move the same batch in the same moment end with one place for it',
   const answers = [page, partner].map((on) =>
     on.waitForResponse((answer) => answer.url().endsWith('/moves')),
   );
+  await sendTogether([page, partner]);
   await Promise.all([here.click(), there.click()]);
   const statuses = (await Promise.all(answers)).map((answer) => answer.status());
   expect(statuses.toSorted(), 'one moved it, the other was refused').toEqual([200, 409]);
@@ -142,3 +143,17 @@ test('a form that both edited shows both values and keeps what only one of them 
   await expect(field(page, 'Colour')).toHaveValue('8');
   await expect(field(page, 'Style')).toHaveValue('Hazy pale');
 });
+
+/** Holds moves back until each page has asked for one, so that none sees the other's beforehand. */
+async function sendTogether(pages: readonly Page[]): Promise<void> {
+  let asked = 0;
+  let sendAll = () => {};
+  const all = new Promise<void>((resolve) => (sendAll = resolve));
+  for (const on of pages)
+    await on.route(/\/moves$/, async (route) => {
+      asked += 1;
+      if (asked === pages.length) sendAll();
+      await all;
+      await route.continue();
+    });
+}

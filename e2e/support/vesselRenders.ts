@@ -23,7 +23,7 @@ interface Counting {
 export function countVessels(): void {
   const PERFORMED_WORK = 1;
   const seen = new Map<unknown, Fiber>();
-  const counting = window as unknown as Counting;
+  const counting = window as Window & Counting;
   counting.vesselRenders = 0;
   const isVessel = (node: unknown) =>
     node instanceof SVGElement &&
@@ -54,7 +54,7 @@ export function countVessels(): void {
 /** Renders since the last time that this was asked. */
 export const vesselRenders = (page: Page): Promise<number> =>
   page.evaluate(() => {
-    const counting = window as unknown as Counting;
+    const counting = window as Window & Counting;
     const count = counting.vesselRenders ?? Number.NaN;
     counting.vesselRenders = 0;
     return count;

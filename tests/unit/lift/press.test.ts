@@ -76,6 +76,19 @@ describe('a press', () => {
     expect(told.at(-1)).toBe('cancel');
   });
 
+  it('that Escape ended presses nothing when the button is let go', () => {
+    press();
+    let clicks = 0;
+    const count = () => (clicks += 1);
+    document.body.addEventListener('click', count);
+    const escape = new KeyboardEvent('keydown', { key: 'Escape', bubbles: true, cancelable: true });
+    send(at('pointermove', 120, 100), escape, at('pointerup', 120, 100));
+    fireEvent.click(document.body);
+    fireEvent.click(document.body);
+    document.body.removeEventListener('click', count);
+    expect(clicks).toBe(1);
+  });
+
   it('is none of another finger’s business', () => {
     const told = press();
     send(at('pointermove', 150, 100, 2), at('pointerup', 150, 100, 2));

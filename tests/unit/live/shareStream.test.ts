@@ -46,24 +46,27 @@ function fakeLocks() {
       } else if (holder) queue.push(made);
       else give(made);
     });
-  return { request } as unknown as LockManager;
+  return { request } as Pick<LockManager, 'request'>;
 }
 
 interface Bus {
   onmessage: ((event: MessageEvent) => void) | null;
+  postMessage(data: unknown): void;
+  close(): void;
 }
 
 function fakeChannels() {
   const open = new Set<Bus>();
   return () => {
-    const mine: Bus = { onmessage: null };
-    open.add(mine);
-    return Object.assign(mine, {
+    const mine: Bus = {
+      onmessage: null,
       postMessage(data: unknown) {
         for (const other of open) if (other !== mine) other.onmessage?.({ data } as MessageEvent);
       },
       close: () => void open.delete(mine),
-    }) as unknown as BroadcastChannel;
+    };
+    open.add(mine);
+    return mine;
   };
 }
 
@@ -75,8 +78,8 @@ interface Tab {
 }
 
 function openTab(
-  locks: LockManager | null,
-  channel: BroadcastChannel | null,
+  locks: Pick<LockManager, 'request'> | null,
+  channel: Bus | null,
   isVisible = true,
 ): Tab {
   const tab: Tab = { heard: [], say: null, close: () => {} };

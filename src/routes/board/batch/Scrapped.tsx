@@ -6,6 +6,7 @@ import { Swatch } from '../../../components/drawn/Swatch.tsx';
 import { Button } from '../../../components/ui/Button.tsx';
 import { Dialog } from '../../../components/ui/Dialog.tsx';
 import { Notice } from '../../../components/ui/Notice.tsx';
+import { focusBatch } from '../lift/inSight.ts';
 import { useBoardView } from '../view/BoardView.tsx';
 
 /** The batches that went wrong, folded away behind how many they are. */
@@ -26,7 +27,7 @@ export function Scrapped() {
       >
         <ul className="divide-y divide-line border-t border-line">
           {scrapped.map((batch) => (
-            <ScrappedBatch key={batch.id} batch={batch} />
+            <ScrappedBatch key={batch.id} batch={batch} isLast={scrapped.length === 1} />
           ))}
         </ul>
       </Dialog>
@@ -34,11 +35,15 @@ export function Scrapped() {
   );
 }
 
-function ScrappedBatch({ batch }: { batch: Batch }) {
+function ScrappedBatch({ batch, isLast }: { batch: Batch; isLast: boolean }) {
   const { slug, can } = useBoardView();
   const stage = useStage(slug);
-  const putBack = () =>
-    stage.mutate({ id: batch.id, version: batch.version, change: { stage: 'pencilled' } });
+  const putBack = () => {
+    const wish = { id: batch.id, version: batch.version, change: { stage: 'pencilled' as const } };
+    // With the last one this list and its button go: the focus follows the batch to the bench.
+    const follow = () => isLast && focusBatch(batch.id);
+    stage.mutateAsync(wish).then(follow, () => undefined);
+  };
   return (
     <li className="flex flex-wrap items-center gap-x-3 gap-y-2 py-3">
       <Swatch srm={batch.srm} size="glass" />

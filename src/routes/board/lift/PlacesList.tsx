@@ -5,7 +5,8 @@ import type { BoardFacts } from '#shared/chain/board.ts';
 import { VerdictPill } from '../../../components/drawn/VerdictPill.tsx';
 import { Button } from '../../../components/ui/Button.tsx';
 import { isOpen } from './places.ts';
-import { gapDay, gapWord, placeTitle, placeWords, reasonWords } from './words.ts';
+import { runsOf } from './runs.ts';
+import { gapDay, gapWord, placeTitle, placeWords, reasonWords, shelfName } from './words.ts';
 
 interface PlacesListProps {
   board: BoardFacts;
@@ -28,21 +29,29 @@ export function PlacesList(props: PlacesListProps) {
   const walkedTo = !follow ? 0 : ranked.findIndex((gap) => gap.key === over) + 1;
   const length = all ? ranked.length : Math.min(ranked.length, Math.max(SHOWN, walkedTo));
   const rest = ranked.length - length;
-  const rows = useMemo(
-    () => ranked.slice(0, length).map((gap) => rowOf(board, gap, batchId)),
+  const runs = useMemo(
+    () => runsOf(ranked.slice(0, length).map((gap) => rowOf(board, gap, batchId))),
     [board, ranked, batchId, length],
   );
+  const drawn = (rows: readonly Row[]) =>
+    rows.map((row) => (
+      <PlaceRow key={row.gap.key} {...row} {...{ onPut, follow }} isOver={row.gap.key === over} />
+    ));
   return (
     <>
       <ol className="-mx-3.5 list-none">
-        {rows.map((row) => (
-          <PlaceRow
-            key={row.gap.key}
-            {...row}
-            {...{ onPut, follow }}
-            isOver={row.gap.key === over}
-          />
-        ))}
+        {runs.map(({ shelf, rows }) =>
+          rows.length === 1 ? (
+            drawn(rows)
+          ) : (
+            <li key={rows[0]?.gap.key} className="border-b border-line last:border-b-0">
+              <h3 className="px-3.5 pt-3 text-h3 [overflow-wrap:anywhere]">{shelf}</h3>
+              <ol aria-label={`Places on ${shelf}`} className="list-none">
+                {drawn(rows)}
+              </ol>
+            </li>
+          ),
+        )}
       </ol>
       {rest > 0 && (
         <Button look="text" size="small" className="mt-1" onClick={() => setAll(true)}>
@@ -55,16 +64,15 @@ export function PlacesList(props: PlacesListProps) {
 
 const rowOf = (board: BoardFacts, gap: Gap, batchId: string) => ({
   gap,
+  shelf: shelfName(board, gap),
   title: placeTitle(board, gap),
   where: placeWords(board, gap, batchId),
   reason: reasonWords(board, gap),
 });
 
-interface PlaceRowProps {
-  gap: Gap;
-  title: string;
-  where: string;
-  reason: string;
+type Row = ReturnType<typeof rowOf>;
+
+interface PlaceRowProps extends Omit<Row, 'shelf'> {
   isOver: boolean;
   follow: boolean;
   onPut: (gap: Gap) => void;

@@ -56,6 +56,7 @@ export function followPress(first: PointerEvent, steps: PressSteps): void {
     if (event.key !== 'Escape' || !isLifted) return;
     event.preventDefault();
     event.stopPropagation();
+    document.addEventListener('pointerup', swallowClick, { capture: true, once: true });
     cancel();
   };
 

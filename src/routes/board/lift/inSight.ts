@@ -4,6 +4,12 @@ const MARGIN = 240;
 export const handleOf = (batchId: string) =>
   document.querySelector<HTMLElement>(`[data-lift-handle="${CSS.escape(batchId)}"]`);
 
+/** Gives the focus to a batch's handle. Waits for the drawing, and for a closing dialog that would give the focus elsewhere. */
+export function focusBatch(batchId: string) {
+  const focus = () => handleOf(batchId)?.focus();
+  requestAnimationFrame(() => requestAnimationFrame(focus));
+}
+
 /** Height of a box above or below a line; 0 where the line crosses it. */
 const away = ({ top, bottom }: DOMRect, y: number) => Math.max(top - y, y - bottom, 0);
 

@@ -8,18 +8,12 @@ import { boardStillness } from '../../../api/stillness.ts';
 import { newId } from '../../../app/newId.ts';
 import type { Announcements } from './Announcer.tsx';
 import { createLifting } from './lifting.ts';
-import { gapsInSight, handleOf, onScroll } from './inSight.ts';
+import { focusBatch, gapsInSight, onScroll } from './inSight.ts';
 import type { LiftMachine } from './liftContext.ts';
 import { createLiftStore } from './liftStore.ts';
 import type { LiftPorts } from './ports.ts';
 import { createPutting } from './putting.ts';
 import { useRehearsal } from './useRehearsal.ts';
-
-/** Waits for the drawing, and for a closing dialog that would give the focus elsewhere. */
-function focusBatch(batchId: string) {
-  const focus = () => handleOf(batchId)?.focus();
-  requestAnimationFrame(() => requestAnimationFrame(focus));
-}
 
 function portsOf(client: QueryClient, slug: string, words: Announcements): LiftPorts {
   return {

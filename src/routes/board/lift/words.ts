@@ -25,6 +25,10 @@ export function gapWord(gap: Pick<Gap, 'verdict' | 'holds' | 'minds'>): string {
   }
 }
 
+/** The shelf that a place is on; null: a new one, or the bench. */
+export const shelfName = (board: BoardFacts, gap: Gap): string | null =>
+  gap.key === 'new' || gap.key === 'bench' ? null : nameOf(board.chains, gap.toChainId);
+
 /** The place as the list names it. */
 export function placeTitle(board: BoardFacts, gap: Gap): string {
   if (gap.key === 'new') return 'New shelf, fresh pack';
