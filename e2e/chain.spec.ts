@@ -32,8 +32,9 @@ const open = async (page: Page, slug: string) => {
 test('a chain opened from its name tells its course in figures', async ({ board, brewery }) => {
   await brewery.write(SHELF);
   await open(board, brewery.slug);
+  const figures = board.getByRole('region', { name: 'Figures' });
   const row = (name: string) =>
-    board.getByRole('row').filter({ has: board.getByRole('rowheader', { name }) });
+    figures.getByRole('row').filter({ has: board.getByRole('rowheader', { name }) });
   await expect(row('Creek Blonde')).toContainText('1.045');
   await expect(row('Creek Blonde')).not.toContainText('planned');
   await expect(row('Ebb Pale')).toContainText('1.078, planned');
