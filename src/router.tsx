@@ -4,7 +4,6 @@ import { lazyRoute } from './app/lazyRoute.tsx';
 import { Root } from './app/Root.tsx';
 import { ErrorPage } from './routes/error/ErrorPage.tsx';
 import { NotFoundPage } from './routes/error/NotFoundPage.tsx';
-import { WelcomePage } from './routes/welcome/WelcomePage.tsx';
 
 /** Pages of a brewery: in its current season, or in the one that the address names. */
 const ofBrewery = {
@@ -94,14 +93,18 @@ const ofBrewery = {
   ],
 } satisfies RouteObject;
 
-/** Every page but the first is a chunk of its own, so that the front page stays light. */
+/** Every page is a chunk of its own, so that none pays for another. */
 export const router = createBrowserRouter([
   {
     element: <Root />,
     errorElement: <ErrorPage />,
     HydrateFallback: () => null,
     children: [
-      { index: true, element: <WelcomePage /> },
+      {
+        index: true,
+        lazy: () =>
+          lazyRoute(async () => (await import('./routes/welcome/WelcomePage.tsx')).WelcomePage),
+      },
       {
         path: 'sign-in',
         lazy: () =>

@@ -5,7 +5,7 @@ import { useOnline } from '../../app/useOnline.ts';
 import { Button } from './Button.tsx';
 import { Dialog } from './Dialog.tsx';
 import { Notice } from './Notice.tsx';
-import { OFFLINE_SENTENCE } from './OfflineBanner.tsx';
+import { OFFLINE_SENTENCE } from './offlineSentence.ts';
 
 export interface ConfirmDialogProps {
   open: boolean;

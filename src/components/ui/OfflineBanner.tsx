@@ -4,9 +4,7 @@ import { setReachable } from '../../api/connection.ts';
 import { api } from '#shared/api/urls.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { asOf } from '../../kept/asOf.ts';
-
-export const OFFLINE_SENTENCE =
-  'No connection. You can read what is here; nothing can be changed until it is back.';
+import { OFFLINE_SENTENCE } from './offlineSentence.ts';
 
 const LATER = 'Brew-day entries are kept and sent later; the plan waits.';
 

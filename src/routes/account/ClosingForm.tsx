@@ -6,7 +6,7 @@ import { PasswordBox } from '../../components/form/PasswordBox.tsx';
 import { sortErrors } from '../../components/form/sortErrors.ts';
 import { Button } from '../../components/ui/Button.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
-import { OFFLINE_SENTENCE } from '../../components/ui/OfflineBanner.tsx';
+import { OFFLINE_SENTENCE } from '../../components/ui/offlineSentence.ts';
 
 interface ClosingFormProps {
   /** Ids of the breweries of which it was said that they go. */

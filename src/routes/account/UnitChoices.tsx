@@ -3,7 +3,7 @@ import type { UnitPrefs } from '#shared/api/units.ts';
 import { sentenceOf } from '../../api/errors.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { Notice } from '../../components/ui/Notice.tsx';
-import { OFFLINE_SENTENCE } from '../../components/ui/OfflineBanner.tsx';
+import { OFFLINE_SENTENCE } from '../../components/ui/offlineSentence.ts';
 import { Choice } from './Choice.tsx';
 import { useAccountChange } from './useAccountChange.ts';
 

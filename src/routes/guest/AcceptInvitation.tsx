@@ -7,7 +7,7 @@ import { useOnline } from '../../app/useOnline.ts';
 import { BreweryChoice } from '../../components/form/BreweryChoice.tsx';
 import { Button } from '../../components/ui/Button.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
-import { OFFLINE_SENTENCE } from '../../components/ui/OfflineBanner.tsx';
+import { OFFLINE_SENTENCE } from '../../components/ui/offlineSentence.ts';
 
 /** On which of one's boards the shelf is to stand. */
 export function AcceptInvitation({ token, me }: { token: string; me: Person }) {

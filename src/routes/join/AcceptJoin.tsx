@@ -6,7 +6,7 @@ import { useSignOut } from '../../api/session.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { Button } from '../../components/ui/Button.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
-import { OFFLINE_SENTENCE } from '../../components/ui/OfflineBanner.tsx';
+import { OFFLINE_SENTENCE } from '../../components/ui/offlineSentence.ts';
 
 /** Somebody is signed in: one press joins. */
 export function AcceptJoin({ token, me }: { token: string; me: Person }) {

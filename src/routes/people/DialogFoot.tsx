@@ -2,7 +2,7 @@ import { sentenceOf } from '../../api/errors.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { Button } from '../../components/ui/Button.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
-import { OFFLINE_SENTENCE } from '../../components/ui/OfflineBanner.tsx';
+import { OFFLINE_SENTENCE } from '../../components/ui/offlineSentence.ts';
 
 export interface DialogFootProps {
   action: string;

@@ -7,7 +7,7 @@ import { useBrewery } from '../../app/useBrewery.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { Button } from '../../components/ui/Button.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
-import { OFFLINE_SENTENCE } from '../../components/ui/OfflineBanner.tsx';
+import { OFFLINE_SENTENCE } from '../../components/ui/offlineSentence.ts';
 import { MadeLink } from './MadeLink.tsx';
 import { RoleChoice } from './RoleChoice.tsx';
 

@@ -1,7 +1,7 @@
 import { useOnline } from '../../app/useOnline.ts';
 import { Button } from '../../components/ui/Button.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
-import { OFFLINE_SENTENCE } from '../../components/ui/OfflineBanner.tsx';
+import { OFFLINE_SENTENCE } from '../../components/ui/offlineSentence.ts';
 import type { RulesEdit } from './useRulesDraft.ts';
 
 interface SaveBarProps {

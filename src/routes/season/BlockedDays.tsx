@@ -9,7 +9,7 @@ import { fieldClass } from '../../components/form/fieldClass.ts';
 import { Button } from '../../components/ui/Button.tsx';
 import { Card, CardTitle } from '../../components/ui/Card.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
-import { OFFLINE_SENTENCE } from '../../components/ui/OfflineBanner.tsx';
+import { OFFLINE_SENTENCE } from '../../components/ui/offlineSentence.ts';
 import { useBlockedDays } from './useBlockedDays.ts';
 
 /** Days on which nobody brews, whatever the weekday. */

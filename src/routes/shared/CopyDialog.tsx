@@ -9,7 +9,7 @@ import { BreweryChoice } from '../../components/form/BreweryChoice.tsx';
 import { Button } from '../../components/ui/Button.tsx';
 import { Dialog } from '../../components/ui/Dialog.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
-import { OFFLINE_SENTENCE } from '../../components/ui/OfflineBanner.tsx';
+import { OFFLINE_SENTENCE } from '../../components/ui/offlineSentence.ts';
 import { say } from '../../components/ui/Toast.tsx';
 
 interface CopyDialogProps {

@@ -9,7 +9,7 @@ import { ROLE_WORDS } from '../../../app/words.ts';
 import { Button } from '../../../components/ui/Button.tsx';
 import { LinkOnce } from '../../../components/ui/LinkOnce.tsx';
 import { Notice } from '../../../components/ui/Notice.tsx';
-import { OFFLINE_SENTENCE } from '../../../components/ui/OfflineBanner.tsx';
+import { OFFLINE_SENTENCE } from '../../../components/ui/offlineSentence.ts';
 import { endOf } from '../../people/endOf.ts';
 import { useBoardView } from '../view/BoardView.tsx';
 import { GUEST_WORDS } from './guestWords.ts';
