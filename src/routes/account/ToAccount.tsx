@@ -1,5 +1,6 @@
 import { Navigate } from 'react-router-dom';
 import { useSession } from '../../api/session.ts';
+import { wayToSignIn } from '../../app/leaving.ts';
 import { Toaster } from '../../components/ui/Toast.tsx';
 import { homeOf } from '../public/home.ts';
 import { PublicHeader } from '../public/PublicHeader.tsx';
@@ -9,7 +10,7 @@ import { AccountPage } from './AccountPage.tsx';
 export function ToAccount() {
   const { data: me, isPending } = useSession();
   if (isPending) return null;
-  if (!me) return <Navigate to="/sign-in?next=/account" replace />;
+  if (!me) return <Navigate to={wayToSignIn('/account')} replace />;
   const home = homeOf(me);
   const [first] = me.breweries;
   if (first) {

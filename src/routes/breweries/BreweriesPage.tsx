@@ -1,6 +1,8 @@
-import { Navigate, useNavigate } from 'react-router-dom';
+import { Navigate } from 'react-router-dom';
 import type { Person } from '#shared/api/people.ts';
-import { useSession, useSignOut } from '../../api/session.ts';
+import { useSession } from '../../api/session.ts';
+import { wayToSignIn } from '../../app/leaving.ts';
+import { useLeave } from '../../app/useLeave.ts';
 import { useTitle } from '../../app/useTitle.ts';
 import { Button } from '../../components/ui/Button.tsx';
 import { TextLink } from '../../components/ui/TextLink.tsx';
@@ -14,7 +16,7 @@ export function BreweriesPage() {
   useTitle('Your breweries');
   const { data: me, isPending } = useSession();
   if (isPending) return null;
-  if (!me) return <Navigate to="/sign-in?next=/breweries" replace />;
+  if (!me) return <Navigate to={wayToSignIn('/breweries')} replace />;
   const hasNone = me.breweries.length === 0;
   return (
     <PublicForm
@@ -34,18 +36,14 @@ export function BreweriesPage() {
 }
 
 function Foot({ me }: { me: Person }) {
-  const navigate = useNavigate();
-  const signOut = useSignOut();
+  const leave = useLeave();
   return (
     <p className="mt-8 flex flex-wrap items-center gap-x-2 border-t border-line pt-4 text-ink2">
       <span className="w-full wrap-anywhere">Signed in as {me.email}</span>
       <TextLink to="/account" className="py-2.5 pr-2 text-ink">
         Account
       </TextLink>
-      <Button
-        look="text"
-        onClick={() => signOut.mutate(undefined, { onSuccess: () => navigate('/') })}
-      >
+      <Button look="text" onClick={leave}>
         Sign out
       </Button>
     </p>

@@ -1,13 +1,11 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { useNavigate } from 'react-router-dom';
 import { boardQuery } from '../../api/board.ts';
-import { useSession, useSignOut } from '../../api/session.ts';
+import { useSession } from '../../api/session.ts';
 import { useBrewery } from '../../app/useBrewery.ts';
+import { useLeave } from '../../app/useLeave.ts';
 import { Avatar } from '../../components/drawn/Avatar.tsx';
 import { Menu, MenuItem, MenuLabel, MenuLink, MenuSeparator } from '../../components/ui/Menu.tsx';
-import { say } from '../../components/ui/Toast.tsx';
-import { sentenceOf } from '../../api/errors.ts';
 import { keysStore } from '../../keys/findStore.ts';
 import { initialsOf } from './initials.ts';
 import { SignOutDialog } from './SignOutDialog.tsx';
@@ -47,16 +45,12 @@ export function AccountMenu() {
 
 /** Signing out; where something waits to be sent, only after asking. */
 function useLeaving() {
-  const navigate = useNavigate();
-  const signOut = useSignOut();
+  const signOut = useLeave();
   const [isAsking, setAsking] = useState(0);
   const stay = () => setAsking(0);
   const leave = () => {
     stay();
-    signOut.mutate(undefined, {
-      onSuccess: () => navigate('/'),
-      onError: (error) => say(sentenceOf(error)),
-    });
+    signOut();
   };
   const ask = async () => {
     const waiting = await waitingHere();

@@ -3,6 +3,7 @@ import { Navigate, Outlet, useLocation, useParams } from 'react-router-dom';
 import { sentenceOf } from '../../api/errors.ts';
 import { useSession } from '../../api/session.ts';
 import { LeaveGuard } from '../../app/LeaveGuard.tsx';
+import { wayToSignIn } from '../../app/leaving.ts';
 import { Keys } from '../../keys/Keys.tsx';
 import { Notice } from '../../components/ui/Notice.tsx';
 import { OfflineBanner } from '../../components/ui/OfflineBanner.tsx';
@@ -29,8 +30,7 @@ export function Shell() {
       </main>
     );
   if (!session.data) {
-    const next = encodeURIComponent(location.pathname + location.search);
-    return <Navigate to={`/sign-in?next=${next}`} replace />;
+    return <Navigate to={wayToSignIn(location.pathname + location.search)} replace />;
   }
   // Somebody else's brewery looks like one that does not exist.
   if (!session.data.breweries.some((m) => m.brewery.slug === brewery))

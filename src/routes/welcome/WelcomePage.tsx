@@ -1,4 +1,6 @@
+import { useEffect } from 'react';
 import { useSession } from '../../api/session.ts';
+import { leaving } from '../../app/leaving.ts';
 import { useTitle } from '../../app/useTitle.ts';
 import { LinkButton } from '../../components/ui/LinkButton.tsx';
 import { firstPageOf, firstPageWords } from '../public/home.ts';
@@ -10,6 +12,7 @@ import { WelcomeFoot } from './WelcomeFoot.tsx';
 
 export function WelcomePage() {
   useTitle('Barmkin');
+  useEffect(() => leaving.end(), []);
   return (
     <div className="flex min-h-dvh flex-col">
       <PublicHeader />
