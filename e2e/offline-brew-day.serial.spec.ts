@@ -67,6 +67,8 @@ test('a brew day in a cold garage: the network cut twice, the server killed befo
     await expect(page.getByText('Ebb Pale is poured')).toBeVisible();
     await expect(page.getByText('Not sent yet. It waits on this device')).toBeVisible();
     await page.getByRole('checkbox', { name: /Lid on/ }).tap();
+    // It shows once it is stored: the page is left at once.
+    await expect(page.getByRole('checkbox', { name: /Lid on/ })).toBeChecked();
   });
 
   await test.step('the network is back and the server is not: it goes on waiting', async () => {
