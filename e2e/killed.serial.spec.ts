@@ -16,7 +16,7 @@ const SEASON = {
 // While the server is away the browser calls every request an error, and the open stream a cut one.
 test.use({
   expectedErrors:
-    /ERR_CONNECTION_(REFUSED|RESET|CLOSED)|ERR_EMPTY_RESPONSE|ERR_INCOMPLETE_CHUNKED_ENCODING/,
+    /ERR_CONNECTION_(REFUSED|RESET|CLOSED)|ERR_EMPTY_RESPONSE|ERR_SOCKET_NOT_CONNECTED|ERR_INCOMPLETE_CHUNKED_ENCODING/,
 });
 
 for (const killAfter of [5, 11, 17])

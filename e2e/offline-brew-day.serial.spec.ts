@@ -11,7 +11,7 @@ test.use({
   isMobile: true,
   serviceWorkers: 'allow',
   expectedErrors:
-    /ERR_INTERNET_DISCONNECTED|ERR_CONNECTION_(REFUSED|RESET|CLOSED)|ERR_EMPTY_RESPONSE|ERR_INCOMPLETE_CHUNKED_ENCODING/,
+    /ERR_INTERNET_DISCONNECTED|ERR_CONNECTION_(REFUSED|RESET|CLOSED)|ERR_EMPTY_RESPONSE|ERR_SOCKET_NOT_CONNECTED|ERR_INCOMPLETE_CHUNKED_ENCODING/,
 });
 
 test('a brew day in a cold garage: the network cut twice, the server killed before the pour, and everything arrives once', async ({
