@@ -8,7 +8,7 @@ import { demandVersion } from '../../http/etag.ts';
 import { notFound } from '../../problems.ts';
 import { eventOf } from './find.ts';
 import { presentEvent } from './present.ts';
-import { onBatch, type Scene, type Writing } from './scene.ts';
+import { onBatch, type LineNamed, type Scene, type Writing } from './scene.ts';
 
 const doneAt = (body: EventWrite) => (body.doneAt === null ? null : new Date(body.doneAt));
 
@@ -42,20 +42,14 @@ export const addEvent = (
     return said(writing, null, await one(writing, body.id));
   });
 
-interface Named {
-  batchId: string | undefined;
-  eventId: string | undefined;
-  version: number;
-}
-
 export const editEvent = (
   scene: Scene,
   member: Member,
-  { batchId, eventId = '', version }: Named,
+  { batchId, id, version }: LineNamed,
   body: EventWrite,
 ): Promise<BatchEvent> =>
   onBatch(scene, member, batchId, async (writing) => {
-    const before = await one(writing, eventId);
+    const before = await one(writing, id);
     demandVersion(version, before.version, before);
     const done = doneAt(body);
     await writing.tx
@@ -67,19 +61,19 @@ export const editEvent = (
         editedAt: writing.now,
         version: sql`${batchEvent.version} + 1`,
       })
-      .where(eq(batchEvent.id, eventId));
-    return said(writing, before, await one(writing, eventId));
+      .where(eq(batchEvent.id, id));
+    return said(writing, before, await one(writing, id));
   });
 
 export const removeEvent = (
   scene: Scene,
   member: Member,
-  { batchId, eventId = '', version }: Named,
+  { batchId, id, version }: LineNamed,
 ): Promise<null> =>
   onBatch(scene, member, batchId, async (writing) => {
-    const before = await one(writing, eventId);
+    const before = await one(writing, id);
     demandVersion(version, before.version, before);
-    await writing.tx.delete(batchEvent).where(eq(batchEvent.id, eventId));
+    await writing.tx.delete(batchEvent).where(eq(batchEvent.id, id));
     const what = tellEvent(writing.batch.name, before, null);
     return { result: null, said: { what, before, after: null } };
   });

@@ -8,7 +8,7 @@ import { notFound, problem } from '../../problems.ts';
 import { canRemoveComments } from '../../policies.ts';
 import { noteOf } from './find.ts';
 import { presentNote } from './present.ts';
-import { onBatch, type Scene, type Writing } from './scene.ts';
+import { onBatch, type LineNamed, type Scene, type Writing } from './scene.ts';
 
 export const addNote = (
   scene: Scene,
@@ -38,27 +38,21 @@ export const addNote = (
     return { result: after, said: { what, before: null, after: after.text } };
   });
 
-interface Named {
-  batchId: string | undefined;
-  noteId: string | undefined;
-  version: number;
-}
-
 export const editNote = (
   scene: Scene,
   member: Member,
-  { batchId, noteId = '', version }: Named,
+  { batchId, id, version }: LineNamed,
   { text }: { text: string },
 ): Promise<BatchNote> =>
   onBatch(scene, member, batchId, async (writing) => {
-    const before = await one(writing, noteId);
+    const before = await one(writing, id);
     demandOwn(member, before, false);
     demandVersion(version, before.version, before);
     await writing.tx
       .update(batchNote)
       .set({ text, editedAt: writing.now, version: sql`${batchNote.version} + 1` })
-      .where(eq(batchNote.id, noteId));
-    const result = await one(writing, noteId);
+      .where(eq(batchNote.id, id));
+    const result = await one(writing, id);
     const what = `Changed a note on ${writing.batch.name}`;
     return { result, said: { what, before: before.text, after: text } };
   });
@@ -66,13 +60,13 @@ export const editNote = (
 export const removeNote = (
   scene: Scene,
   member: Member,
-  { batchId, noteId = '', version }: Named,
+  { batchId, id, version }: LineNamed,
 ): Promise<null> =>
   onBatch(scene, member, batchId, async (writing) => {
-    const before = await one(writing, noteId);
+    const before = await one(writing, id);
     demandOwn(member, before, canRemoveComments(member));
     demandVersion(version, before.version, before);
-    await writing.tx.delete(batchNote).where(eq(batchNote.id, noteId));
+    await writing.tx.delete(batchNote).where(eq(batchNote.id, id));
     const what = `Deleted a note on ${writing.batch.name}`;
     return { result: null, said: { what, before: before.text, after: null } };
   });

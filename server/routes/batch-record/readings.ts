@@ -11,7 +11,7 @@ import { dayIn } from '../../today.ts';
 import { readingOf } from './find.ts';
 import { renewFollowed } from './followed.ts';
 import { presentReading } from './present.ts';
-import { onBatch, type Scene, type Writing } from './scene.ts';
+import { onBatch, type LineNamed, type Scene, type Writing } from './scene.ts';
 
 export const addReading = (
   scene: Scene,
@@ -42,41 +42,35 @@ export const addReading = (
     return said(writing, null, await one(writing, body.id));
   });
 
-interface Named {
-  batchId: string | undefined;
-  readingId: string | undefined;
-  version: number;
-}
-
 export const editReading = (
   scene: Scene,
   member: Member,
-  { batchId, readingId = '', version }: Named,
+  { batchId, id, version }: LineNamed,
   body: ReadingWrite,
 ): Promise<Reading> =>
   onBatch(scene, member, batchId, async (writing) => {
     const { tx, batch, now } = writing;
-    const before = await one(writing, readingId);
+    const before = await one(writing, id);
     demandVersion(version, before.version, before);
     const columns = await columnsOf(writing, body);
     await tx
       .update(reading)
       .set({ ...columns, editedAt: now, version: sql`${reading.version} + 1` })
-      .where(eq(reading.id, readingId));
+      .where(eq(reading.id, id));
     await renewFollowed(tx, batch.id);
-    return said(writing, before, await one(writing, readingId));
+    return said(writing, before, await one(writing, id));
   });
 
 export const removeReading = (
   scene: Scene,
   member: Member,
-  { batchId, readingId = '', version }: Named,
+  { batchId, id, version }: LineNamed,
 ): Promise<null> =>
   onBatch(scene, member, batchId, async (writing) => {
     const { tx, batch } = writing;
-    const before = await one(writing, readingId);
+    const before = await one(writing, id);
     demandVersion(version, before.version, before);
-    await tx.delete(reading).where(eq(reading.id, readingId));
+    await tx.delete(reading).where(eq(reading.id, id));
     await renewFollowed(tx, batch.id);
     const what = tellReading(member.brewery.units, batch.name, before, null);
     return { result: null, said: { what, before, after: null } };

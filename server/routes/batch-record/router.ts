@@ -1,25 +1,20 @@
 import { cakeCheck, cakeCheckWrite } from '#shared/api/cakeCheck.ts';
-import { batchRecord, reading, readingCreate, readingWrite } from '#shared/api/reading.ts';
+import { batchRecord } from '#shared/api/reading.ts';
 import { api } from '#shared/api/urls.ts';
 import type { Asked } from '../../http/operation.ts';
 import { pathOf } from '../../http/pathOf.ts';
 import { forMember } from '../../http/route.ts';
 import { canRead, canWriteRecords } from '../../policies.ts';
 import { signCheck, withdrawCheck } from './cakeChecks.ts';
-import { eventRoutes } from './eventsRouter.ts';
 import { instrumentRoutes } from './instrumentsRouter.ts';
-import { noteRoutes } from './notesRouter.ts';
+import { linesOfARecord } from './lines.ts';
 import { readBatchRecord } from './read.ts';
-import { addReading, editReading, removeReading } from './readings.ts';
 
 const whole = pathOf(api.batchRecord(':brewery', ':id'));
-const all = pathOf(api.readings(':brewery', ':id'));
-const single = pathOf(api.reading(':brewery', ':id', ':readingId'));
 const check = pathOf(api.cakeCheck(':brewery', ':id'));
 
 const named = ({ params, version }: Asked<unknown>) => ({
   batchId: params.id,
-  readingId: params.readingId,
   version,
 });
 
@@ -34,61 +29,6 @@ const read = forMember(
   },
   canRead,
   async ({ db, params }, member) => ({ body: await readBatchRecord(db, member, params.id) }),
-);
-
-const add = forMember(
-  {
-    name: 'addReading',
-    method: 'post',
-    path: all,
-    summary: 'Write a reading of a batch down',
-    body: readingCreate,
-    answer: reading,
-    status: 201,
-    problems: ['already-exists', 'in-use', 'season-archived'],
-  },
-  canWriteRecords,
-  async (asked, member) => {
-    const body = await addReading(asked, member, asked.params.id, asked.body);
-    return { body, version: body.version };
-  },
-);
-
-const edit = forMember(
-  {
-    name: 'editReading',
-    method: 'put',
-    path: single,
-    summary: 'Change a reading',
-    body: readingWrite,
-    answer: reading,
-    status: 200,
-    ifMatch: true,
-    problems: ['in-use', 'season-archived'],
-  },
-  canWriteRecords,
-  async (asked, member) => {
-    const body = await editReading(asked, member, named(asked), asked.body);
-    return { body, version: body.version };
-  },
-);
-
-const remove = forMember(
-  {
-    name: 'deleteReading',
-    method: 'delete',
-    path: single,
-    summary: 'Delete a reading',
-    answer: null,
-    status: 204,
-    ifMatch: true,
-    problems: ['in-use', 'season-archived'],
-  },
-  canWriteRecords,
-  async (asked, member) => {
-    await removeReading(asked, member, named(asked));
-    return {};
-  },
 );
 
 const sign = forMember(
@@ -128,14 +68,4 @@ const withdraw = forMember(
   },
 );
 
-export const batchRecordRoutes = [
-  read,
-  add,
-  edit,
-  remove,
-  sign,
-  withdraw,
-  ...noteRoutes,
-  ...eventRoutes,
-  ...instrumentRoutes,
-];
+export const batchRecordRoutes = [read, ...linesOfARecord, sign, withdraw, ...instrumentRoutes];

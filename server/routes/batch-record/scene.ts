@@ -15,6 +15,13 @@ export interface Scene {
   clock: Clock;
 }
 
+/** A line of a batch's record, in the version that was seen. */
+export interface LineNamed {
+  batchId: string | undefined;
+  id: string;
+  version: number;
+}
+
 /** The batch whose record is written, in whatever season of this brewery. */
 export async function findBatch(db: Db | Tx, { brewery }: Member, id: string | undefined) {
   const [row] = await db
