@@ -5,7 +5,7 @@ import { TextLink } from '../../components/ui/TextLink.tsx';
 import { PublicHeader } from '../public/PublicHeader.tsx';
 import { Cautions } from './Cautions.tsx';
 import { RuleBlock } from './RuleBlock.tsx';
-import { RULES_EXPLAINED } from './rulesExplained.ts';
+import { POUR_EXPLAINED, RULES_EXPLAINED } from './rulesExplained.ts';
 
 export function ChecksPage() {
   useTitle('How the checks work');
@@ -40,6 +40,8 @@ export function ChecksPage() {
             <RuleBlock key={rule.id} rule={rule} />
           ))}
         </div>
+        <h2 className="mt-12 mb-5 text-[1.75rem] leading-tight">On the brew day</h2>
+        <RuleBlock rule={POUR_EXPLAINED} />
         <Cautions />
       </main>
     </>

@@ -1,8 +1,8 @@
 import type { Verdict } from '#shared/rules/vocabulary.ts';
 import { VerdictMark } from '../../components/drawn/VerdictMark.tsx';
-import type { RuleExplained } from './rulesExplained.ts';
+import type { Explained } from './rulesExplained.ts';
 
-export function RuleBlock({ rule }: { rule: RuleExplained }) {
+export function RuleBlock({ rule }: { rule: Explained }) {
   return (
     <article
       id={rule.id}

@@ -12,6 +12,13 @@ export interface RuleExplained {
   basis: string;
 }
 
+/** The pour check: what a reading of the wort is held against, a card beside those of the rules. */
+export interface PourExplained extends Omit<RuleExplained, 'id'> {
+  id: 'wort-temperature';
+}
+
+export type Explained = RuleExplained | PourExplained;
+
 const percent = (share: number) => `${Math.round(share * 100)} %`;
 const sg = (value: number) => value.toFixed(3);
 const d = <K extends keyof typeof H>(key: K): (typeof H)[K]['default'] => H[key].default;
@@ -187,3 +194,16 @@ export const RULES_EXPLAINED: readonly RuleExplained[] = [
     basis: 'Common practice; plants aim below 2 % dead and exclude from 5 % (MEBAK M-350.18.518).',
   },
 ];
+
+export const POUR_EXPLAINED: PourExplained = {
+  id: 'wort-temperature',
+  title: 'Wort temperature',
+  looks: 'Each reading of the wort on the brew day, against the window of its yeast.',
+  minds: `Up to ${d('pourAboveMind')} °C above the window or ${d('pourBelowMind')} °C below it, or a cake more than ${d('warmerCakeMind')} °C warmer than the wort.`,
+  holds: `Further out, no reading of the last ${d('readingMinutes')} minutes, or so warm that it kills the yeast, which nobody can override.`,
+  basis:
+    "The yeast's own range, else the usual range of its kind. Where growth ends: Handbook of Brewing, 3rd ed. The other limits are common practice.",
+};
+
+/** Every card of limits, in the order in which a link and then its pour are looked at. */
+export const ALL_EXPLAINED: readonly Explained[] = [...RULES_EXPLAINED, POUR_EXPLAINED];

@@ -2,15 +2,15 @@ import { NEVER_SOFTENED } from '#shared/rules/resolve.ts';
 import { Button } from '../../components/ui/Button.tsx';
 import { CHECK_BOX, CHECK_LABEL } from '../../components/form/CheckField.tsx';
 import { Card } from '../../components/ui/Card.tsx';
-import type { RuleExplained } from '../checks/rulesExplained.ts';
+import type { Explained, RuleExplained } from '../checks/rulesExplained.ts';
 import { isDefault } from './draft.ts';
 import { LimitField } from './LimitField.tsx';
 import { RULE_SENTENCES } from './ruleSentences.ts';
 import { Sentences, PlainWords } from './Sentences.tsx';
 import type { RulesEdit } from './useRulesDraft.ts';
 
-interface RuleCardProps {
-  rule: RuleExplained;
+interface RuleCardProps<Shown = Explained> {
+  rule: Shown;
   edit: RulesEdit;
 }
 
@@ -49,14 +49,14 @@ export function RuleCard({ rule, edit }: RuleCardProps) {
       ) : (
         <PlainWords rule={rule} />
       )}
-      <Softening rule={rule} edit={edit} />
+      {rule.id !== 'wort-temperature' && <Softening rule={rule} edit={edit} />}
       <p className="mt-3 text-small text-ink2">{rule.basis}</p>
     </Card>
   );
 }
 
 /** A hold that is shown as a mind, where a rule may be softened. */
-function Softening({ rule, edit }: RuleCardProps) {
+function Softening({ rule, edit }: RuleCardProps<RuleExplained>) {
   if (NEVER_SOFTENED.includes(rule.id))
     return (
       <p className="mt-3 text-small font-medium">

@@ -1,6 +1,6 @@
 import type { HouseRulesRow } from '#shared/api/houseRules.ts';
 import { useUnsaved } from '../../app/unsaved.ts';
-import { RULES_EXPLAINED } from '../checks/rulesExplained.ts';
+import { ALL_EXPLAINED } from '../checks/rulesExplained.ts';
 import { Preview } from './Preview.tsx';
 import { RuleCard } from './RuleCard.tsx';
 import { SaveBar } from './SaveBar.tsx';
@@ -22,7 +22,7 @@ export function RulesForm({ row }: { row: HouseRulesRow }) {
     >
       <div className="grid items-start gap-5 wide:grid-cols-[minmax(0,1fr)_22rem]">
         <div className="space-y-3">
-          {RULES_EXPLAINED.map((rule) => (
+          {ALL_EXPLAINED.map((rule) => (
             <RuleCard key={rule.id} rule={rule} edit={edit} />
           ))}
         </div>

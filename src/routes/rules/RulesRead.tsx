@@ -3,7 +3,7 @@ import { HOUSE_RULES, type HouseRuleKey } from '#shared/rules/houseRules.ts';
 import { houseRuleValue } from '#shared/rules/houseRuleWords.ts';
 import { useUnits } from '../../app/useUnits.ts';
 import { Card, CardTitle } from '../../components/ui/Card.tsx';
-import { RULES_EXPLAINED } from '../checks/rulesExplained.ts';
+import { ALL_EXPLAINED } from '../checks/rulesExplained.ts';
 import { RULE_SENTENCES } from './ruleSentences.ts';
 import { PlainWords, Sentences } from './Sentences.tsx';
 
@@ -12,7 +12,7 @@ export function RulesRead({ row }: { row: HouseRulesRow }) {
   const { softened = [] } = row.changes;
   return (
     <div className="max-w-4xl space-y-3">
-      {RULES_EXPLAINED.map((rule) => {
+      {ALL_EXPLAINED.map((rule) => {
         const sentences = RULE_SENTENCES[rule.id];
         return (
           <Card key={rule.id}>
@@ -25,7 +25,7 @@ export function RulesRead({ row }: { row: HouseRulesRow }) {
             ) : (
               <PlainWords rule={rule} />
             )}
-            {softened.includes(rule.id) && (
+            {softened.some((each) => each === rule.id) && (
               <p className="mt-2 font-medium">Its hold is shown as a Mind in this brewery.</p>
             )}
             <p className="mt-3 text-small text-ink2">{rule.basis}</p>

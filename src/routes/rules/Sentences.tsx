@@ -1,6 +1,6 @@
 import { Fragment, type ReactNode } from 'react';
 import type { HouseRuleKey } from '#shared/rules/houseRules.ts';
-import type { RuleExplained } from '../checks/rulesExplained.ts';
+import type { Explained } from '../checks/rulesExplained.ts';
 import type { Sentence } from './ruleSentences.ts';
 
 interface SentencesProps {
@@ -28,7 +28,7 @@ export function Sentences({ sentences, field }: SentencesProps) {
 }
 
 /** A rule without numbers. */
-export const PlainWords = ({ rule }: { rule: RuleExplained }) => (
+export const PlainWords = ({ rule }: { rule: Explained }) => (
   <p className="mt-1">
     {rule.looks} {rule.minds && <>A Mind: {lower(rule.minds)} </>}
     {rule.holds && <>A Hold: {lower(rule.holds)}</>}

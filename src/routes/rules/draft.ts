@@ -4,6 +4,7 @@ import { HOUSE_RULES, type HouseRuleKey } from '#shared/rules/houseRules.ts';
 import { RULE_IDS, type RuleId } from '#shared/rules/vocabulary.ts';
 import { written, type Written } from '../../components/form/written.ts';
 import { boundFault, kindOf, orderFaults } from './limitWords.ts';
+import type { Explained } from '../checks/rulesExplained.ts';
 import { RULE_SENTENCES } from './ruleSentences.ts';
 
 const KEYS = Object.keys(HOUSE_RULES) as HouseRuleKey[];
@@ -58,21 +59,21 @@ export function faultsOf(draft: Draft, units: UnitPrefs): Faults {
 }
 
 /** The limits that stand in a rule's sentences. */
-export const limitsOf = (rule: RuleId): HouseRuleKey[] =>
+export const limitsOf = (rule: Explained['id']): HouseRuleKey[] =>
   (RULE_SENTENCES[rule] ?? [])
     .flat()
     .flatMap((part) => (typeof part === 'string' ? [] : part.limit));
 
 /** True where a rule stands as it does without house rules. */
-export const isDefault = (draft: Draft, rule: RuleId): boolean =>
-  !draft.softened.includes(rule) &&
+export const isDefault = (draft: Draft, rule: Explained['id']): boolean =>
+  !draft.softened.some((each) => each === rule) &&
   limitsOf(rule).every((key) => {
     const { value, why } = draft.limits[key];
     return why === null && value === HOUSE_RULES[key].default;
   });
 
 /** A rule put back to its default, the others as they are. */
-export function backToDefault(draft: Draft, rule: RuleId, units: UnitPrefs): Draft {
+export function backToDefault(draft: Draft, rule: Explained['id'], units: UnitPrefs): Draft {
   const fresh = draftOf({}, units);
   const limits = { ...draft.limits };
   for (const key of limitsOf(rule)) limits[key] = fresh.limits[key];

@@ -40,6 +40,7 @@ const PLAIN_UNITS: Partial<Record<(typeof HOUSE_RULES)[HouseRuleKey]['unit'], st
   points: 'points',
   ΔE00: 'ΔE',
   '× need': 'times the need',
+  minutes: 'minutes',
 };
 
 export const unitWord = (key: HouseRuleKey, unit: string): string =>

@@ -1,5 +1,5 @@
 import type { HouseRuleKey } from '#shared/rules/houseRules.ts';
-import type { RuleId } from '#shared/rules/vocabulary.ts';
+import type { Explained } from '../checks/rulesExplained.ts';
 
 /** A sentence of a rule: words, and the limits that stand among them. */
 export type Sentence = readonly (string | { limit: HouseRuleKey; empty?: string })[];
@@ -7,7 +7,7 @@ export type Sentence = readonly (string | { limit: HouseRuleKey; empty?: string 
 const n = (limit: HouseRuleKey) => ({ limit });
 
 /** The rules whose numbers a brewery may change, each in the words of its own. */
-export const RULE_SENTENCES: Partial<Record<RuleId, readonly Sentence[]>> = {
+export const RULE_SENTENCES: Partial<Record<Explained['id'], readonly Sentence[]>> = {
   'light-to-dark': [
     [
       'A beer darker by',
@@ -123,5 +123,11 @@ export const RULE_SENTENCES: Partial<Record<RuleId, readonly Sentence[]>> = {
   ],
   'unwashed-vessel': [
     ['A vessel is a Mind at beer number', n('beersSinceCleaning'), 'since it was cleaned'],
+  ],
+  'wort-temperature': [
+    ['Wort above its window is a Mind up to', n('pourAboveMind'), 'and a Hold further up'],
+    ['Wort below it is a Mind up to', n('pourBelowMind'), 'and a Hold further down'],
+    ['A cake warmer than the wort by more than', n('warmerCakeMind'), 'is a Mind'],
+    ['A reading counts for', n('readingMinutes')],
   ],
 };

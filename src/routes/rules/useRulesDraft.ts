@@ -9,6 +9,7 @@ import { useBrewery } from '../../app/useBrewery.ts';
 import { useUnits } from '../../app/useUnits.ts';
 import { rewrite } from '../../components/form/written.ts';
 import { say } from '../../components/ui/Toast.tsx';
+import type { Explained } from '../checks/rulesExplained.ts';
 import { backToDefault, changesOf, draftOf, faultsOf, type Draft, type Faults } from './draft.ts';
 
 export interface RulesEdit {
@@ -25,7 +26,7 @@ export interface RulesEdit {
   theirs: HouseRulesRow | null;
   type(key: HouseRuleKey, text: string): void;
   soften(rule: RuleId, on: boolean): void;
-  reset(rule: RuleId): void;
+  reset(rule: Explained['id']): void;
   resetAll(): void;
   leave(): void;
   save(): void;
