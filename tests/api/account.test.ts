@@ -239,9 +239,9 @@ describe('closing the account', () => {
     for (const statement of [
       'delete from change',
       "update change set what = ''",
-      'truncate change',
+      'truncate change cascade',
     ])
-      await expect(server.pool.query(statement)).rejects.toThrow(/append-only|foreign key/);
+      await expect(server.pool.query(statement)).rejects.toThrow('append-only');
   });
 });
 

@@ -7,7 +7,7 @@ import { routes } from '../../server/routes/routes.ts';
 import { guestOn, invited } from '../support/guests.ts';
 import { boardOf, good, joined, shelve, testSeason, type TestSeason } from '../support/season.ts';
 import { startTestServer, type TestServer } from '../support/server.ts';
-import { newcomer, Visitor } from '../support/visitor.ts';
+import { newcomer, Visitor, type Reply } from '../support/visitor.ts';
 
 type Role = 'head-brewer' | 'brewer' | 'taster';
 /** Everybody who may come by. Only the first three belong to the brewery. */
@@ -239,6 +239,20 @@ function refusalOf(name: string, who: Who): number {
   return 403;
 }
 
+const KIND: Readonly<Record<number, string>> = {
+  401: '/problems/not-signed-in',
+  403: '/problems/not-allowed',
+  404: '/problems/not-found',
+};
+
+/** Refused for what it is, not by a border before it or an address that leads nowhere. */
+function expectRefusal(reply: Reply, status: number): void {
+  expect([reply.status, reply.body]).toEqual([
+    status,
+    expect.objectContaining({ type: KIND[status] }),
+  ]);
+}
+
 it('lists every operation', () => {
   const listed = [MAY, SIGNED_IN, OPEN].flatMap((table) => Object.keys(table));
   expect(operations.map(({ name }) => name).toSorted()).toEqual(listed.toSorted());
@@ -246,15 +260,17 @@ it('lists every operation', () => {
 
 describe.each(Object.entries(MAY))('%s', (name, allowed) => {
   it.each(WHO)(`is for ${allowed.join(', ')}: %s`, async (who) => {
-    const { status } = await ask(people[who], name);
-    expect(status).toBe(allowed.includes(who) ? answerOf(name) : refusalOf(name, who));
+    const reply = await ask(people[who], name);
+    if (allowed.includes(who)) expect(reply.status).toBe(answerOf(name));
+    else expectRefusal(reply, refusalOf(name, who));
   });
 });
 
 describe.each(Object.entries(SIGNED_IN))('%s needs a person and no brewery', (name, answer) => {
   it.each(WHO)('%s', async (who) => {
-    const isNobody = who === 'stranger' || who === 'link visitor';
-    expect((await ask(people[who], name)).status).toBe(isNobody ? 401 : answer);
+    const reply = await ask(people[who], name);
+    if (who === 'stranger' || who === 'link visitor') expectRefusal(reply, 401);
+    else expect(reply.status).toBe(answer);
   });
 });
 

@@ -46,6 +46,12 @@ export class Watching {
     return this.#until(() => this.isEnded || undefined, 'the end', patienceMs);
   }
 
+  /** Until two more heartbeats: what was gathered for this stream before has come by then. */
+  quiet(patienceMs = 5_000): Promise<true> {
+    const enough = this.beats + 2;
+    return this.#until(() => this.beats >= enough || undefined, 'a heartbeat', patienceMs);
+  }
+
   all<K extends LiveEventName>(name: K): LiveEvents[K][] {
     return this.told.flatMap((one) => (one.name === name ? [one.data as LiveEvents[K]] : []));
   }
