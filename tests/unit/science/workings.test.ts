@@ -97,6 +97,8 @@ describe('sections', () => {
   it('say that a figure is not known where facts are missing', () => {
     const bare = linkOf({ id: 'a' }, { id: 'b' });
     const work = { ...workingsOf(bare), earlier: 'A', later: 'B', units: DEFAULT_UNITS };
+    for (const working of ['alcohol', 'need', 'mixing'] as const)
+      expect(work[working], working).toBeUndefined();
     for (const { id, figures } of SECTIONS)
       for (const figure of figures(work))
         expect(figure.value ?? '', id).not.toMatch(/NaN|undefined/);
