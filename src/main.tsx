@@ -5,6 +5,7 @@ import { reportClientError } from './api/clientErrors.ts';
 import { Providers } from './app/Providers.tsx';
 import { router } from './router.tsx';
 import './styles.css';
+import './board.css';
 
 window.addEventListener('error', (event) => reportClientError(event.error, location.pathname));
 window.addEventListener('unhandledrejection', (event) =>
