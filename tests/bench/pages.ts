@@ -16,6 +16,8 @@ const PUBLIC = [
   'join/JoinPage',
   'checks/ChecksPage',
 ];
+/** Open to anybody too, but they judge a chain, and so bring the engine along. */
+const JUDGING = ['shared/SharedPage', 'guest/GuestPage', 'science/AboutSciencePage'];
 const BOARD = ['board/BoardPage'];
 
 /** How much JavaScript a page needs before it stands there. */
@@ -28,6 +30,7 @@ export const pages: Part = {
     ) as Manifest;
     return [
       row('JavaScript of the public pages', 155, heaviest(dist, manifest, PUBLIC)),
+      row('JavaScript of the public pages that judge', 155, heaviest(dist, manifest, JUDGING)),
       row('JavaScript of the signed-in board', 260, heaviest(dist, manifest, BOARD)),
     ];
   },
