@@ -62,13 +62,11 @@ test.describe('name, address and password', () => {
 test('a sign-in elsewhere is seen and ended, and its page asks to sign in', async ({
   board: page,
   brewery,
-  browser,
+  another,
   db,
-  server,
 }) => {
   await givePassword(db, brewery.members['head-brewer']);
-  const context = await browser.newContext({ baseURL: server.url });
-  const other = await context.newPage();
+  const other = await another(null);
   await other.goto('/sign-in');
   await other.getByLabel('E-mail').fill(brewery.members['head-brewer'].email);
   await other.getByLabel('Password', { exact: true }).fill(PASSWORD);
@@ -82,7 +80,6 @@ test('a sign-in elsewhere is seen and ended, and its page asks to sign in', asyn
   await where.getByRole('button', { name: /^Sign out: Chrome on Linux/ }).click();
   await expect(where.getByRole('listitem')).toHaveCount(1);
   await expect(other).toHaveURL(/\/sign-in\?next=/, { timeout: 3_000 });
-  await context.close();
 });
 
 test.describe('closing the account', () => {

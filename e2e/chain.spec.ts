@@ -52,7 +52,7 @@ test('a chain opened from its name tells its course in figures', async ({ board,
 test('what is said of a link keeps what the link said, and is marked unread for others', async ({
   board,
   brewery,
-  browser,
+  another,
 }) => {
   await brewery.write(SHELF);
   await open(board, brewery.slug);
@@ -66,9 +66,7 @@ test('what is said of a link keeps what the link said, and is marked unread for 
   await expect(said).toContainText('said of');
   await expect(said).toContainText(/Hold \d/);
 
-  const context = await browser.newContext();
-  await brewery.signIn(context, 'taster');
-  const taster = await context.newPage();
+  const taster = await another(brewery.members.taster);
   await taster.goto(`/b/${brewery.slug}`);
   await taster.getByRole('link', { name: '1 new comment on Clean ale' }).click();
   const talk = taster.getByRole('list', { name: 'Talk' });
@@ -80,7 +78,6 @@ test('what is said of a link keeps what the link said, and is marked unread for 
   await taster.getByRole('link', { name: 'Board', exact: true }).first().click();
   await expect(taster.getByRole('link', { name: 'Clean ale', exact: true })).toBeVisible();
   await expect(taster.getByText(/\d new$/)).toHaveCount(0);
-  await context.close();
 });
 
 test('a removed comment can be put back, and an empty one is not sent', async ({

@@ -4,6 +4,8 @@ import { findByTyping, HUNDRED_SHELVES } from './support/finding.ts';
 import { SAMPLE } from './support/sampleSeason.ts';
 import { expect, test } from './support/test.ts';
 
+const HUNDRED_MS = 20_000;
+
 test('something is found by its name with the keys alone, on a board of a hundred shelves', async ({
   board,
   brewery,
@@ -11,7 +13,7 @@ test('something is found by its name with the keys alone, on a board of a hundre
   // A hundred shelves take their time on a machine that does other things too.
   test.slow();
   await brewery.write(HUNDRED_SHELVES);
-  await new BoardPage(board).open(brewery.slug);
+  await new BoardPage(board).open(brewery.slug, HUNDRED_MS);
   await board.keyboard.press('/');
   const dialog = board.getByRole('dialog', { name: 'Find' });
   await expect(dialog.getByText('301 have it; the first 40 are listed.')).toBeVisible();
@@ -45,7 +47,7 @@ test('the board is filtered, its address keeps that, and the keys clear it', asy
   test.slow();
   await brewery.write(HUNDRED_SHELVES);
   const page = new BoardPage(board);
-  await page.open(brewery.slug);
+  await page.open(brewery.slug, HUNDRED_MS);
   await board.keyboard.press('f');
   const filter = board.getByRole('region', { name: 'Filter' });
   await filter.getByLabel('Yeast').selectOption({ label: 'Yeast of Shelf 50' });
@@ -57,7 +59,7 @@ test('the board is filtered, its address keeps that, and the keys clear it', asy
   await expect(page.batch('First of 50')).toHaveAttribute('data-pale');
 
   // It stays through a reload, and while a batch is opened and closed.
-  await page.open(`${brewery.slug}${new URL(board.url()).search}`);
+  await page.open(`${brewery.slug}${new URL(board.url()).search}`, HUNDRED_MS);
   await expect(told).toContainText('1 of 201');
   await board.getByRole('button', { name: 'Second of 50', exact: true }).click();
   await expect(board.getByRole('dialog', { name: 'Edit Second of 50' })).toBeVisible();

@@ -42,7 +42,7 @@ test('a batch is dragged over a large season, and no vessel is drawn anew for it
   await page.addInitScript(countVessels);
   const { batches } = await brewery.write(largeSeason());
   const board = new BoardPage(page);
-  await board.open(brewery.slug);
+  await board.open(brewery.slug, 20_000);
   const names = Object.keys(batches);
   const [carried = '', target = '', other = ''] = [names[200], names[0], names[9]];
   await expect(page.locator('[data-chain] [data-batch] svg[role="img"]')).toHaveCount(200);

@@ -1,10 +1,9 @@
-import type { Browser, Page } from '@playwright/test';
+import type { Page } from '@playwright/test';
 import { eq } from 'drizzle-orm';
-import type { Role } from '#shared/api/people.ts';
 import { api } from '#shared/api/urls.ts';
 import { session } from '../server/db/schema/people.ts';
 import { expectAccessible } from './support/axe.ts';
-import { expect, test, watchErrors, type Brewing } from './support/test.ts';
+import { expect, test, type Brewing } from './support/test.ts';
 
 /** What another does is to be seen within this time. */
 const SOON = { timeout: 1_000 };
@@ -22,17 +21,6 @@ const SEASON = {
   ],
   bench: [{ name: 'Lantern Stout', og: 1.054, fg: 1.014, srm: 33, ibu: 32 }],
 } as const;
-
-/** Somebody else of the brewery, with a browser of their own that has the board open. */
-async function somebody(browser: Browser, brewery: Brewing, role: Role): Promise<Page> {
-  const context = await browser.newContext();
-  const errors = watchErrors(context);
-  await brewery.signIn(context, role);
-  const page = await context.newPage();
-  page.on('close', () => expect(errors, `errors on the console of the ${role}`).toEqual([]));
-  await openBoard(page, brewery);
-  return page;
-}
 
 async function openBoard(page: Page, brewery: Brewing): Promise<void> {
   await page.goto(`/b/${brewery.slug}`);
@@ -65,11 +53,11 @@ const moveOf = (batchId: string, from: string | null, toChainId: string, after: 
 test('a move of one appears to the other within a second, and says who is here', async ({
   board,
   brewery,
-  browser,
+  partner,
 }) => {
   const { batches, chains } = await brewery.write(SEASON);
   await openBoard(board, brewery);
-  const partner = await somebody(browser, brewery, 'brewer');
+  await openBoard(partner, brewery);
   await expect(board.getByRole('img', { name: 'Ned Quill, brewer, here now' })).toBeVisible();
   await expect(
     partner.getByRole('img', { name: 'Orla Finch, head brewer, here now' }),
@@ -87,7 +75,6 @@ test('a move of one appears to the other within a second, and says who is here',
   await expect(standing(board, target, 'Lantern Stout')).toBeVisible(SOON);
   await expectAccessible(board);
 
-  await partner.context().close();
   await expect(board.getByRole('img', { name: 'Ned Quill, brewer', exact: true })).toBeVisible();
 });
 
@@ -97,11 +84,11 @@ test.describe(() => {
   test('an open form keeps what is written in it and the focus, and says quietly who changed what', async ({
     board,
     brewery,
-    browser,
+    partner,
   }) => {
     const { batches } = await brewery.write(SEASON);
     const pale = batches['Ebb Pale'] ?? '';
-    const partner = await somebody(browser, brewery, 'brewer');
+    await openBoard(partner, brewery);
     await board.goto(`/b/${brewery.slug}?batch=${pale}`);
     const form = board.getByRole('dialog', { name: 'Edit Ebb Pale' });
     const bitterness = form.getByLabel(/^Bitterness/);
@@ -120,18 +107,17 @@ test.describe(() => {
     await form.getByRole('radio', { name: /^Theirs/ }).check();
     await form.getByRole('button', { name: 'Save what I chose' }).click();
     await expect(form).toBeHidden();
-    await partner.context().close();
   });
 });
 
 test('a drag is not disturbed: what others do appears when it ends', async ({
   board,
   brewery,
-  browser,
+  partner,
 }) => {
   const { batches, chains } = await brewery.write(SEASON);
   await openBoard(board, brewery);
-  const partner = await somebody(browser, brewery, 'brewer');
+  await openBoard(partner, brewery);
   await lift(board, 'Lantern Stout');
   const ale = chains['Clean ale'] ?? '';
   const amber = batches['Lamp Amber'] ?? '';
@@ -149,17 +135,16 @@ test('a drag is not disturbed: what others do appears when it ends', async ({
   await board.keyboard.press('Escape');
   await board.mouse.up();
   await expect(standing(board, ale, 'Lamp Amber')).toBeVisible(SOON);
-  await partner.context().close();
 });
 
 test('a drag ends with a word where the batch in the hand is gone', async ({
   board,
   brewery,
-  browser,
+  partner,
 }) => {
   const { batches } = await brewery.write(SEASON);
   await openBoard(board, brewery);
-  const partner = await somebody(browser, brewery, 'brewer');
+  await openBoard(partner, brewery);
   await lift(board, 'Lantern Stout');
   const stout = batches['Lantern Stout'] ?? '';
   await ask(partner, 'DELETE', api.batch(brewery.slug, stout), undefined, 1);
@@ -170,10 +155,9 @@ test('a drag ends with a word where the batch in the hand is gone', async ({
   await expect(inHand(board)).toHaveCount(0);
   await expect(board.locator('[data-lifting]')).toHaveCount(0);
   await board.mouse.up();
-  await partner.context().close();
 });
 
-test('two tabs share one stream, and both are told', async ({ board, brewery, browser }) => {
+test('two tabs share one stream, and both are told', async ({ board, brewery, partner }) => {
   const { batches } = await brewery.write(SEASON);
   const streams: string[] = [];
   board.context().on('request', (request) => {
@@ -182,7 +166,7 @@ test('two tabs share one stream, and both are told', async ({ board, brewery, br
   await openBoard(board, brewery);
   const second = await board.context().newPage();
   await openBoard(second, brewery);
-  const partner = await somebody(browser, brewery, 'brewer');
+  await openBoard(partner, brewery);
   const blonde = batches['Creek Blonde'] ?? '';
   await ask(partner, 'PATCH', api.batch(brewery.slug, blonde), { name: 'Creek Kölsch' }, 1);
   for (const page of [board, second])
@@ -194,7 +178,6 @@ test('two tabs share one stream, and both are told', async ({ board, brewery, br
   await ask(partner, 'PATCH', api.batch(brewery.slug, blonde), { name: 'Creek Golden' }, 2);
   await expect(second.getByText('Creek Golden').first()).toBeVisible({ timeout: 3_000 });
   expect(streams).toHaveLength(2);
-  await partner.context().close();
 });
 
 test.describe(() => {
@@ -203,11 +186,11 @@ test.describe(() => {
   test('a lost network is told, and what was missed is there when it is back', async ({
     board,
     brewery,
-    browser,
+    partner,
   }) => {
     const { batches } = await brewery.write(SEASON);
     await openBoard(board, brewery);
-    const partner = await somebody(browser, brewery, 'brewer');
+    await openBoard(partner, brewery);
     await board.context().setOffline(true);
     await expect(board.getByText(/No connection/).first()).toBeVisible();
     const blonde = batches['Creek Blonde'] ?? '';
@@ -215,7 +198,6 @@ test.describe(() => {
     await board.context().setOffline(false);
     await expect(board.getByText('Creek Golden').first()).toBeVisible({ timeout: 3_000 });
     await expect(board.getByRole('banner').getByText('Live', { exact: true })).toBeVisible();
-    await partner.context().close();
   });
 });
 

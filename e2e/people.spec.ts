@@ -2,8 +2,7 @@ import type { Page } from '@playwright/test';
 import { expectAccessible } from './support/axe.ts';
 import { writeBrewery } from './support/brewery.ts';
 import { press, tabTo } from './support/keys.ts';
-import { sessionCookies } from './support/server.ts';
-import { expect, test, watchErrors } from './support/test.ts';
+import { expect, test } from './support/test.ts';
 
 const card = (page: Page, name: string) =>
   page.getByRole('list', { name: 'People' }).getByRole('listitem').filter({ hasText: name });
@@ -117,9 +116,8 @@ test('another brewery is made and switched to; the device keeps the last one', a
 test('a join link takes in who is signed in, and says when they are in already', async ({
   board: page,
   brewery,
-  browser,
+  another,
   db,
-  server,
 }) => {
   await page.goto(`/b/${brewery.slug}/people`);
   await page.getByRole('button', { name: 'Make a join link' }).click();
@@ -130,15 +128,10 @@ test('a join link takes in who is signed in, and says when they are in already',
   ).toBeVisible();
 
   const other = await writeBrewery(db, 'Far Shore');
-  const context = await browser.newContext({ baseURL: server.url });
-  const errors = watchErrors(context);
-  await context.addCookies(sessionCookies(server, other.members['head-brewer'].token));
-  const guest = await context.newPage();
+  const guest = await another(other.members['head-brewer']);
   await guest.goto(link);
   await guest.getByRole('button', { name: 'Join the brewery' }).click();
   await expect(guest).toHaveURL(new RegExp(`/b/${brewery.slug}$`));
   await guest.getByRole('button', { name: /^Brewery: Reedbed/ }).click();
   await expect(guest.getByRole('menuitem', { name: /^Far Shore/ })).toBeVisible();
-  await context.close();
-  expect(errors).toEqual([]);
 });

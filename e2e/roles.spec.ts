@@ -24,8 +24,7 @@ test.describe('a join link', () => {
   test('lets one person in, in the role that it was made for', async ({
     board: page,
     brewery,
-    browser,
-    baseURL,
+    another,
   }) => {
     await brewery.write(SEASON);
     await page.goto(`/b/${brewery.slug}/people`);
@@ -33,8 +32,7 @@ test.describe('a join link', () => {
     await page.getByRole('button', { name: 'Make a join link' }).click();
     const link = await page.getByLabel('Link for one taster').inputValue();
 
-    const context = await browser.newContext({ baseURL: baseURL ?? '' });
-    const guest = await context.newPage();
+    const guest = await another(null);
     await guest.goto(link);
     await expect(guest.getByRole('heading', { name: /^Join Reedbed Brewing/ })).toBeVisible();
     await expect(guest.getByText('Orla Finch asks you in as taster')).toBeVisible();
@@ -44,7 +42,6 @@ test.describe('a join link', () => {
     await guest.getByRole('button', { name: 'Join the brewery' }).click();
     await expect(new BoardPage(guest).namesOn('Clean ale')).toHaveCount(3);
     await expect(guest.getByRole('button', { name: 'New batch' })).toHaveCount(0);
-    await context.close();
 
     await page.context().clearCookies();
     await page.goto(link);

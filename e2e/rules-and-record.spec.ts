@@ -81,13 +81,11 @@ test.describe(() => {
   test('rules that somebody else saved meanwhile are shown, and nothing typed is lost', async ({
     board,
     brewery,
-    browser,
+    another,
   }) => {
     await season(brewery);
     const rules = `/b/${brewery.slug}/rules`;
-    const other = await browser.newContext();
-    await brewery.signIn(other, 'head-brewer');
-    const second = await other.newPage();
+    const second = await another(brewery.members['head-brewer']);
     await board.goto(rules);
     await second.goto(rules);
     const darker = 'Colour gap that counts, SRM';
@@ -102,7 +100,6 @@ test.describe(() => {
     await expect(
       board.getByText('Set the colour gap that counts of the house rules from 4 to 6 SRM'),
     ).toBeVisible();
-    await other.close();
   });
 });
 

@@ -3,8 +3,7 @@ import { api } from '#shared/api/urls.ts';
 import { addDays, formatDay } from '#shared/units/day.ts';
 import { expectAccessible } from './support/axe.ts';
 import { writeBrewery } from './support/brewery.ts';
-import { sessionCookies } from './support/server.ts';
-import { expect, test, watchErrors, type Brewing } from './support/test.ts';
+import { expect, test, type Brewing } from './support/test.ts';
 
 const PLAN = {
   shelves: [
@@ -45,12 +44,11 @@ async function makeLink(page: Page, brewery: Brewing, name = 'For the festival')
 test('a link shows one chain to somebody without an account', async ({
   board,
   brewery,
-  browser,
+  another,
 }) => {
   await brewery.write(PLAN);
   const address = await makeLink(board, brewery);
-  const visitor = await browser.newContext();
-  const page = await visitor.newPage();
+  const page = await another(null);
   await page.goto(address);
   await expect(page.getByRole('heading', { level: 1, name: 'Harbour ale' })).toBeVisible();
   const batches = page.getByRole('list', { name: 'Batches' });
@@ -63,19 +61,17 @@ test('a link shows one chain to somebody without an account', async ({
   await expect(page.getByRole('heading', { name: 'Hold: Undeclared allergen' })).toBeVisible();
   await expect(page.getByText(/no dilution removes an allergen/)).toBeVisible();
   await expectAccessible(page);
-  expect(await visitor.cookies()).toEqual([]);
-  await visitor.close();
+  expect(await page.context().cookies()).toEqual([]);
 });
 
 test('a link that was withdrawn says so, and the list says how often it was opened', async ({
   board,
   brewery,
-  browser,
+  another,
 }) => {
   await brewery.write(PLAN);
   const address = await makeLink(board, brewery);
-  const visitor = await browser.newContext();
-  const page = await visitor.newPage();
+  const page = await another(null);
   await page.goto(address);
   await expect(page.getByRole('heading', { level: 1, name: 'Harbour ale' })).toBeVisible();
   const links = board.getByRole('list', { name: 'Links' });
@@ -89,22 +85,18 @@ test('a link that was withdrawn says so, and the list says how often it was open
   await page.reload();
   await expect(page.getByRole('heading', { name: 'This link is no longer good' })).toBeVisible();
   await expectAccessible(page);
-  await visitor.close();
 });
 
 test('somebody of another brewery copies a chain onto their own board', async ({
   board,
   brewery,
-  browser,
+  another,
   db,
-  server,
 }) => {
   await brewery.write(PLAN);
   const address = await makeLink(board, brewery);
   const own = await writeBrewery(db, 'Estuary Ales');
-  const context = await browser.newContext();
-  await context.addCookies(sessionCookies(server, own.members.brewer.token));
-  const page = await context.newPage();
+  const page = await another(own.members.brewer);
   await page.goto(address);
   await page.getByRole('button', { name: 'Copy into my brewery' }).click();
   await expectAccessible(page);
@@ -112,15 +104,13 @@ test('somebody of another brewery copies a chain onto their own board', async ({
   await expect(page).toHaveURL(new RegExp(`/b/${own.slug}$`));
   const shelf = page.getByRole('list', { name: 'Batches on Harbour ale' });
   await expect(shelf.getByRole('heading')).toHaveText(['Low Tide', 'Jetty Pale', 'Spring Tide']);
-  await context.close();
 });
 
 test('a guest brewer moves and edits on their own board what belongs to another brewery', async ({
   board,
   brewery,
-  browser,
+  another,
   db,
-  server,
 }) => {
   await brewery.write(PLAN);
   await board.goto(`/b/${brewery.slug}`);
@@ -129,9 +119,7 @@ test('a guest brewer moves and edits on their own board what belongs to another 
   await board.getByRole('button', { name: 'Invite a guest' }).click();
   const invitation = await board.getByLabel('Invitation for a guest brewer').inputValue();
   const own = await writeBrewery(db, 'Estuary Ales');
-  const context = await browser.newContext();
-  await context.addCookies(sessionCookies(server, own.members['head-brewer'].token));
-  const page = await context.newPage();
+  const page = await another(own.members['head-brewer']);
   await page.goto(invitation);
   await expectAccessible(page);
   await page.getByRole('button', { name: 'Put it on my board' }).click();
@@ -168,7 +156,6 @@ test('a guest brewer moves and edits on their own board what belongs to another 
   await board.getByRole('button', { name: 'End the access' }).click();
   await expect(board.getByRole('list', { name: 'Guests' })).toContainText('ended');
   await expect(shelf).toHaveCount(0);
-  await context.close();
 });
 
 test('a link is given another name and another end, and its address stays', async ({
@@ -200,7 +187,7 @@ test('a link is given another name and another end, and its address stays', asyn
 test('a guest hears of a change at once, finds the chain from any page, and leaves it', async ({
   board,
   brewery,
-  browser,
+  another,
   db,
   server,
 }) => {
@@ -213,11 +200,8 @@ test('a guest hears of a change at once, finds the chain from any page, and leav
   });
   const { token } = (await made.json()) as { token: string };
   const own = await writeBrewery(db, 'Estuary Ales');
-  const context = await browser.newContext({ baseURL: server.url });
-  const errors = watchErrors(context);
-  await context.addCookies(sessionCookies(server, own.members['head-brewer'].token));
-  const page = await context.newPage();
-  await context.request.post(api.guestInvitation(token), {
+  const page = await another(own.members['head-brewer']);
+  await page.context().request.post(api.guestInvitation(token), {
     headers: origin,
     data: { brewerySlug: own.slug },
   });
@@ -238,6 +222,4 @@ test('a guest hears of a change at once, finds the chain from any page, and leav
   await expectAccessible(page);
   await page.getByRole('button', { name: 'Leave the chain' }).click();
   await expect(shelf).toHaveCount(0);
-  await context.close();
-  expect(errors).toEqual([]);
 });

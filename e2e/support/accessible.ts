@@ -6,7 +6,14 @@ import { expect, type Brewing } from './test.ts';
 type Check = (page: Page) => Promise<void>;
 
 /** What nobody has to sign in for. */
-const PUBLIC_PAGES = ['/', '/sign-in', '/sign-up', '/about/checks', '/about/science', '/no-such-page'];
+const PUBLIC_PAGES = [
+  '/',
+  '/sign-in',
+  '/sign-up',
+  '/about/checks',
+  '/about/science',
+  '/no-such-page',
+];
 
 /** The pages of a brewery, beside its board. */
 const BREWERY_PAGES = ['yeasts', 'vessels', 'people', 'season', 'account'];

@@ -18,9 +18,10 @@ export class BoardPage {
     this.newShelf = page.locator('[data-gap="new"]');
   }
 
-  async open(slug: string): Promise<void> {
+  /** @param patienceMs more than usual for a board of hundreds */
+  async open(slug: string, patienceMs = 7_000): Promise<void> {
     await this.page.goto(`/b/${slug}`);
-    await expect(this.page.locator('[data-batch]').first()).toBeVisible({ timeout: 20_000 });
+    await expect(this.page.locator('[data-batch]').first()).toBeVisible({ timeout: patienceMs });
   }
 
   shelf(name: string): Locator {

@@ -18,6 +18,8 @@ export interface Fixtures {
   brewery: Brewing;
   /** The page, signed in as the brewery's head brewer. */
   board: Page;
+  /** One more browser, watched like the first, in which a member is signed in; null: nobody. */
+  another: (member: { token: string } | null) => Promise<Page>;
   /** A second browser, in which the brewer is signed in. */
   partner: Page;
   watch: void;
@@ -62,14 +64,20 @@ export const test = base.extend<Fixtures, WorkerFixtures>({
     await brewery.signIn(context, 'head-brewer');
     await use(page);
   },
-  partner: async ({ brewery, browser, expectedErrors, contextOptions, baseURL }, use) => {
-    const context = await browser.newContext({ ...contextOptions, baseURL: baseURL ?? '' });
-    const errors = watchErrors(context);
-    await brewery.signIn(context, 'brewer');
-    await use(await context.newPage());
-    await context.close();
-    expect(others(errors, expectedErrors), "errors on the partner's console").toEqual([]);
+  another: async ({ browser, server, expectedErrors, contextOptions, baseURL }, use) => {
+    const opened: { context: BrowserContext; errors: string[] }[] = [];
+    await use(async (member) => {
+      const context = await browser.newContext({ ...contextOptions, baseURL: baseURL ?? '' });
+      opened.push({ context, errors: watchErrors(context) });
+      if (member) await context.addCookies(sessionCookies(server, member.token));
+      return context.newPage();
+    });
+    for (const { context, errors } of opened) {
+      await context.close();
+      expect(others(errors, expectedErrors), 'errors on the console of another').toEqual([]);
+    }
   },
+  partner: async ({ brewery, another }, use) => use(await another(brewery.members.brewer)),
 });
 
 const others = (errors: readonly string[], expected: RegExp | null) =>
