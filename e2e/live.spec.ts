@@ -75,6 +75,7 @@ test('a move of one appears to the other within a second, and says who is here',
   await expect(standing(board, target, 'Lantern Stout')).toBeVisible(SOON);
   await expectAccessible(board);
 
+  await partner.close();
   await expect(board.getByRole('img', { name: 'Ned Quill, brewer', exact: true })).toBeVisible();
 });
 
