@@ -1,4 +1,9 @@
-/** Instants as a brewery's clock shows them, for fields and tables. */
+import { formatDay } from '#shared/units/day.ts';
+
+/** Instants as a brewery's clock shows them. */
+
+/** ISO 8601, or ms since 1970. */
+type Instant = string | number;
 
 const formats = new Map<string, Intl.DateTimeFormat>();
 
@@ -16,8 +21,8 @@ function partsIn(timeZone: string, at: Date): string {
 }
 
 /** `2027-03-20T14:05`, as a date and time field wants it. */
-export const toLocal = (iso: string, timeZone: string): string =>
-  partsIn(timeZone, new Date(iso)).replace(' ', 'T').slice(0, 16);
+export const toLocal = (at: Instant, timeZone: string): string =>
+  partsIn(timeZone, new Date(at)).replace(' ', 'T').slice(0, 16);
 
 /** The instant that a brewery's clock shows so; null where the text is no time. */
 export function fromLocal(text: string, timeZone: string): string | null {
@@ -33,5 +38,9 @@ const asIfUtc = (at: number, timeZone: string): number =>
   Date.parse(`${partsIn(timeZone, new Date(at)).replace(' ', 'T')}Z`);
 
 /** The clock's day, `YYYY-MM-DD`, and its time, `14:05`. */
-export const dayOf = (iso: string, timeZone: string): string => toLocal(iso, timeZone).slice(0, 10);
-export const timeOf = (iso: string, timeZone: string): string => toLocal(iso, timeZone).slice(11);
+export const dayOf = (at: Instant, timeZone: string): string => toLocal(at, timeZone).slice(0, 10);
+export const timeOf = (at: Instant, timeZone: string): string => toLocal(at, timeZone).slice(11);
+
+/** "Tue 8 December, 16:05". */
+export const dayAndTime = (at: Instant, timeZone: string): string =>
+  `${formatDay(dayOf(at, timeZone))}, ${timeOf(at, timeZone)}`;

@@ -1,6 +1,6 @@
 import type { SignInPlace } from '#shared/api/account.ts';
+import { dayAndTime } from '../../app/zonedTime.ts';
 import { Button } from '../../components/ui/Button.tsx';
-import { endOf } from '../people/endOf.ts';
 
 interface SignInRowProps {
   place: SignInPlace;
@@ -16,8 +16,8 @@ export function SignInRow({ place, busy, onEnd }: SignInRowProps) {
       <div className="min-w-0 grow">
         <p className="font-medium wrap-anywhere">{place.device || 'A browser'}</p>
         <p className="text-small text-ink2">
-          {place.isThisOne ? 'This one' : `Last seen ${endOf(place.seenAt, timeZone)}`} · signed in{' '}
-          {endOf(place.since, timeZone)}
+          {place.isThisOne ? 'This one' : `Last seen ${dayAndTime(place.seenAt, timeZone)}`} ·
+          signed in {dayAndTime(place.since, timeZone)}
         </p>
       </div>
       {!place.isThisOne && (

@@ -1,4 +1,5 @@
 import type { Kin } from '#shared/chain/family.ts';
+import { lowered } from '../../app/lowered.ts';
 import { useBrewery } from '../../app/useBrewery.ts';
 import { VerdictPill } from '../../components/drawn/VerdictPill.tsx';
 import { TextLink } from '../../components/ui/TextLink.tsx';
@@ -17,8 +18,6 @@ export function FamilyList({ family }: { family: readonly Kin[] }) {
   );
 }
 
-const lowerFirst = (text: string): string => text.charAt(0).toLowerCase() + text.slice(1);
-
 function KinItem({ kin }: { kin: Kin }) {
   const { board } = useBoardView();
   const { path } = useBrewery();
@@ -33,7 +32,7 @@ function KinItem({ kin }: { kin: Kin }) {
             ? startWords(kin.chain)
             : [
                 ...(kin.generation === null ? [] : [`generation ${kin.generation}`]),
-                lowerFirst(stageLine(kin.batch, board.today)),
+                lowered(stageLine(kin.batch, board.today)),
               ].join(', ')}
         </span>
         {kin.kind === 'batch' && kin.link && (

@@ -4,9 +4,9 @@ import { useBoard } from '../../api/board.ts';
 import { useWithdrawJoinLink } from '../../api/members.ts';
 import { useBrewery } from '../../app/useBrewery.ts';
 import { ROLE_WORDS } from '../../app/words.ts';
+import { dayAndTime } from '../../app/zonedTime.ts';
 import { Button } from '../../components/ui/Button.tsx';
 import { ConfirmDialog } from '../../components/ui/ConfirmDialog.tsx';
-import { endOf } from './endOf.ts';
 
 export function OpenJoinLink({ link }: { link: JoinLink }) {
   const { slug } = useBrewery();
@@ -20,7 +20,8 @@ export function OpenJoinLink({ link }: { link: JoinLink }) {
       <div className="min-w-0 grow">
         <p className="font-medium">For a {ROLE_WORDS[link.role].toLowerCase()}</p>
         <p className="text-small text-ink2">
-          Made by {link.createdBy}; {ended ? 'ended' : 'ends'} {endOf(link.expiresAt, timeZone)}
+          Made by {link.createdBy}; {ended ? 'ended' : 'ends'}{' '}
+          {dayAndTime(link.expiresAt, timeZone)}
         </p>
       </div>
       <Button size="small" look="quiet" onClick={() => setAsking(true)}>

@@ -1,14 +1,13 @@
 import type { JudgedLink } from '#shared/chain/judgeBoard.ts';
+import { lowered } from '../../app/lowered.ts';
 import { VerdictMark } from '../../components/drawn/VerdictMark.tsx';
 import { uncheckedWord, verdictWord } from '../../components/drawn/verdictWords.ts';
 import { countedFindings } from '../board/view/words.ts';
 
-const lowerFirst = (text: string) => text.charAt(0).toLowerCase() + text.slice(1);
-
 /** Shape, word, and every reason: what is printed cannot be opened to see more. */
 export function PaperVerdict({ link }: { link: JudgedLink }) {
   const reasons = [
-    ...link.findings.map(({ title }) => lowerFirst(title)),
+    ...link.findings.map(({ title }) => lowered(title)),
     ...(link.accepted ? ['accepted'] : []),
     ...(link.unchecked.length > 0 ? [uncheckedWord(link.unchecked.length)] : []),
   ];

@@ -3,6 +3,7 @@ import type { RecordEntry } from '#shared/api/record.ts';
 import { fromTo } from '#shared/record/facts.ts';
 import { capital } from '#shared/rules/words.ts';
 import { useBoard } from '../../api/board.ts';
+import { timeOf } from '../../app/zonedTime.ts';
 import { Avatar } from '../../components/drawn/Avatar.tsx';
 import { TextLink } from '../../components/ui/TextLink.tsx';
 import { SayingPill } from '../rules/SayingPill.tsx';
@@ -27,7 +28,7 @@ export function Entry({ entry }: { entry: RecordEntry }) {
       </span>
       <div className="min-w-0 grow">
         <p className="text-small text-ink2">
-          {person.name}, <time dateTime={at}>{timeIn(brewery.timeZone, at)}</time>
+          {person.name}, <time dateTime={at}>{timeOf(at, brewery.timeZone)}</time>
           {undone && <span className="ml-2 font-semibold">undone since</span>}
         </p>
         <p className={clsx('wrap-anywhere', undone ? 'text-ink2 line-through' : 'font-medium')}>
@@ -86,15 +87,4 @@ function Where({ entry }: { entry: RecordEntry }) {
       <TextLink to={place.to}>{place.words}</TextLink>
     </p>
   );
-}
-
-const formats = new Map<string, Intl.DateTimeFormat>();
-
-/** Time of day in the brewery's time zone: "14:05". */
-function timeIn(timeZone: string, at: string): string {
-  const known = formats.get(timeZone);
-  const format =
-    known ?? new Intl.DateTimeFormat('en-GB', { timeZone, hour: '2-digit', minute: '2-digit' });
-  formats.set(timeZone, format);
-  return format.format(new Date(at));
 }

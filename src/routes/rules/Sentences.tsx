@@ -1,5 +1,6 @@
 import { Fragment, type ReactNode } from 'react';
 import type { HouseRuleKey } from '#shared/rules/houseRules.ts';
+import { lowered } from '../../app/lowered.ts';
 import type { Explained } from '../checks/rulesExplained.ts';
 import type { Sentence } from './ruleSentences.ts';
 
@@ -30,9 +31,7 @@ export function Sentences({ sentences, field }: SentencesProps) {
 /** A rule without numbers. */
 export const PlainWords = ({ rule }: { rule: Explained }) => (
   <p className="mt-1">
-    {rule.looks} {rule.minds && <>A Mind: {lower(rule.minds)} </>}
-    {rule.holds && <>A Hold: {lower(rule.holds)}</>}
+    {rule.looks} {rule.minds && <>A Mind: {lowered(rule.minds)} </>}
+    {rule.holds && <>A Hold: {lowered(rule.holds)}</>}
   </p>
 );
-
-const lower = (text: string) => text.charAt(0).toLowerCase() + text.slice(1);

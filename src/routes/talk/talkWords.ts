@@ -1,6 +1,7 @@
 import type { CommentAbout, SaidVerdict } from '#shared/api/comment.ts';
 import type { Day } from '#shared/rules/vocabulary.ts';
 import { formatDayShort } from '#shared/units/day.ts';
+import { lowered } from '../../app/lowered.ts';
 import { verdictWord } from '../../components/drawn/verdictWords.ts';
 
 /** "today, 09:12", "27 Mar": by the clock of whoever reads. */
@@ -15,7 +16,7 @@ export function whenSaid(at: string, today: Day): string {
 /** "Hold: tired cake". */
 export function saidWords({ verdict, findings, reason }: SaidVerdict): string {
   const word = verdictWord(verdict, findings);
-  return reason === '' ? word : `${word}: ${reason.charAt(0).toLowerCase()}${reason.slice(1)}`;
+  return reason === '' ? word : `${word}: ${lowered(reason)}`;
 }
 
 export const sameAbout = (a: CommentAbout, b: CommentAbout): boolean =>

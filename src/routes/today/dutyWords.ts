@@ -6,6 +6,7 @@ import type { Duty } from '#shared/today/duty.ts';
 import { HOP_DAYS } from '#shared/today/hops.ts';
 import { daysBetween, formatDay } from '#shared/units/day.ts';
 import { format } from '#shared/units/quantity.ts';
+import { lowered } from '../../app/lowered.ts';
 import { unbroken } from '../../app/unbroken.ts';
 
 export interface DutyWords {
@@ -101,8 +102,6 @@ export function dutyWords(duty: Duty, sight: Sight): DutyWords {
       };
   }
 }
-
-const lowered = (text: string) => text.charAt(0).toLowerCase() + text.slice(1);
 
 function hopWords(
   duty: Duty & { kind: 'dry-hop' },

@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { RULE_IDS } from '#shared/rules/vocabulary.ts';
+import { dayAndTime } from '../../../src/app/zonedTime.ts';
 import { usualFg } from '../../../src/routes/batch-form/usual.ts';
 import { RULES_EXPLAINED } from '../../../src/routes/checks/rulesExplained.ts';
-import { endOf } from '../../../src/routes/people/endOf.ts';
 import { safeNext } from '../../../src/routes/public/home.ts';
 import { initialsOf } from '../../../src/routes/shell/initials.ts';
 
@@ -36,10 +36,12 @@ describe('the usual final gravity', () => {
   });
 });
 
-describe('the end of a join link', () => {
-  it('is told in the time of the brewery', () => {
-    expect(endOf('2026-12-08T23:30:00.000Z', 'Europe/Berlin')).toBe('Wed 9 December, 00:30');
-    expect(endOf('2026-12-08T23:30:00.000Z', 'America/New_York')).toBe('Tue 8 December, 18:30');
+describe('a day and a time', () => {
+  it('are told by the clock of the brewery', () => {
+    expect(dayAndTime('2026-12-08T23:30:00.000Z', 'Europe/Berlin')).toBe('Wed 9 December, 00:30');
+    expect(dayAndTime('2026-12-08T23:30:00.000Z', 'America/New_York')).toBe(
+      'Tue 8 December, 18:30',
+    );
   });
 });
 

@@ -1,9 +1,8 @@
 import type { CakeCheck } from '#shared/api/cakeCheck.ts';
 import { massOf } from '#shared/cake/measured.ts';
-import { formatDay } from '#shared/units/day.ts';
 import { format } from '#shared/units/quantity.ts';
 import { cellsPerMl, viability, viabilityInterval } from '#shared/yeast/counting.ts';
-import { dayOf, timeOf } from '../../../app/zonedTime.ts';
+import { dayAndTime } from '../../../app/zonedTime.ts';
 import { VerdictPill } from '../../../components/drawn/VerdictPill.tsx';
 import { Facts, type Fact } from '../../../components/ui/Facts.tsx';
 import { useBoardView } from '../../board/view/BoardView.tsx';
@@ -18,8 +17,7 @@ export function CheckSummary({ check }: { check: CakeCheck }) {
     <div className="space-y-4">
       <VerdictPill verdict={verdict} word={word} large />
       <p className="text-small text-ink2">
-        Signed by {check.signedBy.name}, {formatDay(dayOf(check.signedAt, timeZone))},{' '}
-        {timeOf(check.signedAt, timeZone)}
+        Signed by {check.signedBy.name}, {dayAndTime(check.signedAt, timeZone)}
       </p>
       <Facts facts={useFacts(check)} />
       {check.notes && <p className="wrap-anywhere whitespace-pre-wrap">{check.notes}</p>}

@@ -5,7 +5,7 @@ import { EVENT_WORDS } from '#shared/record/readings.ts';
 import { capital } from '#shared/rules/words.ts';
 import { formatDay } from '#shared/units/day.ts';
 import { lazyPart } from '../../../app/lazyPart.tsx';
-import { dayOf, timeOf } from '../../../app/zonedTime.ts';
+import { dayAndTime } from '../../../app/zonedTime.ts';
 import { Button } from '../../../components/ui/Button.tsx';
 import { Card, CardTitle } from '../../../components/ui/Card.tsx';
 import { useBoardView } from '../../board/view/BoardView.tsx';
@@ -57,7 +57,7 @@ function Event({ event, onEdit }: { event: BatchEvent; onEdit?: () => void }) {
   const { timeZone } = useBoardView().board.brewery;
   const { kind, text, plannedOn, doneAt } = event;
   const when = doneAt
-    ? `${formatDay(dayOf(doneAt, timeZone))}, ${timeOf(doneAt, timeZone)}`
+    ? dayAndTime(doneAt, timeZone)
     : plannedOn && `planned for ${formatDay(plannedOn)}`;
   return (
     <li className="flex items-baseline gap-3 py-2">

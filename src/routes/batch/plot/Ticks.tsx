@@ -30,7 +30,7 @@ export function WarmthTicks({ axis, y, frame }: { axis: Axis; y: ToY; frame: Fra
 
 export function DayTicks({ drawn, x, frame }: { drawn: Drawn; x: ToX; frame: Frame }) {
   const { timeZone } = useBoardView().board.brewery;
-  const first = formatDayShort(dayOf(new Date(drawn.start).toISOString(), timeZone));
+  const first = formatDayShort(dayOf(drawn.start, timeZone));
   return dayTicks(drawn.days, frame === NARROW ? 4 : 8).map((day) => (
     <g key={day}>
       <path d={`M${x(day)} ${frame.bottom}v5`} className="stroke-edge" />

@@ -2,6 +2,7 @@ import type { Batch } from '#shared/api/batch.ts';
 import { takenDay } from '#shared/chain/dates.ts';
 import { formatDay, formatDayShort } from '#shared/units/day.ts';
 import { format } from '#shared/units/quantity.ts';
+import { lowered } from '../../../app/lowered.ts';
 import { useBrewery } from '../../../app/useBrewery.ts';
 import { DateTag } from '../../../components/drawn/DateTag.tsx';
 import { Vessel } from '../../../components/drawn/Vessel.tsx';
@@ -41,7 +42,7 @@ export function BatchSide({ batch }: { batch: Batch }) {
       </h1>
       <p className="text-touch text-ink2">
         {batch.style
-          ? `${batch.style}, ${small(stageLine(batch, board.today))}`
+          ? `${batch.style}, ${lowered(stageLine(batch, board.today))}`
           : stageLine(batch, board.today)}
       </p>
       <Stand batch={batch} />
@@ -52,8 +53,6 @@ export function BatchSide({ batch }: { batch: Batch }) {
     </div>
   );
 }
-
-const small = (text: string): string => text.charAt(0).toLowerCase() + text.slice(1);
 
 function Stand({ batch }: { batch: Batch }) {
   const { index, judged, board, units } = useBoardView();

@@ -1,5 +1,4 @@
 import { createContext, use, useCallback, useSyncExternalStore } from 'react';
-import type { Gap } from '#shared/chain/gaps.ts';
 import type { Lifting } from './lifting.ts';
 import type { LiftState } from './liftState.ts';
 import type { LiftStore } from './liftStore.ts';
@@ -45,21 +44,6 @@ export const useLiftPanel = (): 'places' | 'changes' | null =>
     if (state.isUnfolded) return 'places';
     return state.change || state.refusal ? 'changes' : null;
   });
-
-const NO_GAPS: ReadonlyMap<string, Gap> = new Map();
-
-/** Everything of a lift. For the parts of the board that are many, take `useIsLifted`. */
-export function useLift() {
-  const machine = useLiftMachine();
-  const lifted = useLiftState((state) => state.lifted);
-  return {
-    lifted: lifted?.batchId ?? null,
-    gaps: lifted?.gaps ?? NO_GAPS,
-    lift: machine.lifting.lift,
-    cancel: machine.lifting.cancel,
-    drop: (key: string) => drop(machine, key),
-  };
-}
 
 /** Puts the lifted batch into a place, or back where that place is not open. */
 export function drop({ store, lifting, putting }: LiftMachine, key: string | null) {

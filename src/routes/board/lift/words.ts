@@ -1,5 +1,6 @@
 import type { BoardFacts } from '#shared/chain/board.ts';
 import type { Gap } from '#shared/chain/gaps.ts';
+import { capital } from '#shared/rules/words.ts';
 import { formatDay, formatDayShort } from '#shared/units/day.ts';
 import { indexed } from './indexed.ts';
 
@@ -7,8 +8,6 @@ const nameOf = (rows: readonly { id: string; name: string }[], id: string | null
   rows.find((row) => row.id === id)?.name ?? '';
 
 export const batchName = (board: BoardFacts, id: string) => nameOf(board.batches, id);
-
-const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
 
 export const plural = (count: number, one: string, many: string) =>
   `${count} ${count === 1 ? one : many}`;

@@ -1,4 +1,5 @@
 import type { Finding } from '#shared/rules/answer.ts';
+import { lowered } from '../../../app/lowered.ts';
 import { scienceSectionOf } from '../../../app/scienceSections.ts';
 import { unbroken } from '../../../app/unbroken.ts';
 import { VerdictMark } from '../../../components/drawn/VerdictMark.tsx';
@@ -29,7 +30,7 @@ export function FindingBlock({ finding, science }: FindingBlockProps) {
     >
       <p className="mt-1 text-ink2">{unbroken(finding.because)}</p>
       <p className="mt-1 text-ink2">
-        <b className="text-ink">Do:</b> {unbroken(lowerFirst(finding.do))}
+        <b className="text-ink">Do:</b> {unbroken(lowered(finding.do))}
       </p>
       <MeasureList measures={finding.measures} />
       <p className="mt-1.5 text-label text-ink2">
@@ -45,7 +46,3 @@ export function FindingBlock({ finding, science }: FindingBlockProps) {
     </PanelPart>
   );
 }
-
-/** The remedy follows "Do:"; a trade abbreviation keeps its capitals. */
-const lowerFirst = (text: string): string =>
-  /^[A-Z][a-z ]/.test(text) ? text.charAt(0).toLowerCase() + text.slice(1) : text;

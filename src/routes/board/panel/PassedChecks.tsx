@@ -1,4 +1,5 @@
 import type { RuleId } from '#shared/rules/vocabulary.ts';
+import { capital } from '#shared/rules/words.ts';
 import { PanelPart } from './PanelFrame.tsx';
 import { RULE_WORDS } from './ruleWords.ts';
 
@@ -7,7 +8,7 @@ export function PassedChecks({ passed }: { passed: readonly RuleId[] }) {
   const words = passed.map((rule) => RULE_WORDS[rule]).join(' · ');
   return (
     <PanelPart tone="text-pour" title="Also checked, all good">
-      <p className="mt-1 text-ink2">{words.charAt(0).toUpperCase() + words.slice(1)}</p>
+      <p className="mt-1 text-ink2">{capital(words)}</p>
     </PanelPart>
   );
 }

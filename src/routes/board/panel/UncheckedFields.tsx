@@ -1,5 +1,6 @@
 import type { Batch } from '#shared/api/batch.ts';
 import type { Unchecked } from '#shared/rules/answer.ts';
+import { capital } from '#shared/rules/words.ts';
 import { useBatchPatch } from '../../../api/batches.ts';
 import { sentenceOf } from '../../../api/errors.ts';
 import { Button } from '../../../components/ui/Button.tsx';
@@ -31,7 +32,7 @@ export function UncheckedFields({ earlier, later, unchecked }: UncheckedFieldsPr
   const words = unchecked.map((rule) => RULE_QUESTIONS[rule.rule]).join(' · ');
   return (
     <PanelPart title={`Not checked: ${unchecked.length}`}>
-      <p className="mt-1 text-ink2">{words.charAt(0).toUpperCase() + words.slice(1)}</p>
+      <p className="mt-1 text-ink2">{capital(words)}</p>
       {can.editBatches ? (
         <div className="mt-2 grid gap-3">
           {fields.map((field) => (

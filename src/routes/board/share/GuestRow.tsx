@@ -1,16 +1,16 @@
 import { useState } from 'react';
 import type { ChainGuest } from '#shared/api/guest.ts';
 import { useWithdrawGuest } from '../../../api/guests.ts';
+import { dayAndTime } from '../../../app/zonedTime.ts';
 import { Button } from '../../../components/ui/Button.tsx';
 import { ConfirmDialog } from '../../../components/ui/ConfirmDialog.tsx';
-import { endOf } from '../../people/endOf.ts';
 import { useBoardView } from '../view/BoardView.tsx';
 import { guestName } from './guestWords.ts';
 
 function stateWords(guest: ChainGuest, timeZone: string): string {
-  if (guest.withdrawnAt !== null) return `ended ${endOf(guest.withdrawnAt, timeZone)}`;
-  if (guest.joinedAt !== null) return `since ${endOf(guest.joinedAt, timeZone)}`;
-  return `good until ${endOf(guest.expiresAt, timeZone)}`;
+  if (guest.withdrawnAt !== null) return `ended ${dayAndTime(guest.withdrawnAt, timeZone)}`;
+  if (guest.joinedAt !== null) return `since ${dayAndTime(guest.joinedAt, timeZone)}`;
+  return `good until ${dayAndTime(guest.expiresAt, timeZone)}`;
 }
 
 export function GuestRow({ guest, chainId }: { guest: ChainGuest; chainId: string }) {

@@ -6,11 +6,11 @@ import { useInviteGuest } from '../../../api/guests.ts';
 import { newId } from '../../../app/newId.ts';
 import { useOnline } from '../../../app/useOnline.ts';
 import { ROLE_WORDS } from '../../../app/words.ts';
+import { dayAndTime } from '../../../app/zonedTime.ts';
 import { Button } from '../../../components/ui/Button.tsx';
 import { LinkOnce } from '../../../components/ui/LinkOnce.tsx';
 import { Notice } from '../../../components/ui/Notice.tsx';
 import { OFFLINE_SENTENCE } from '../../../components/ui/offlineSentence.ts';
-import { endOf } from '../../people/endOf.ts';
 import { useBoardView } from '../view/BoardView.tsx';
 import { GUEST_WORDS } from './guestWords.ts';
 
@@ -29,7 +29,7 @@ export function InviteGuest({ chain }: { chain: Chain }) {
           onDone={() => invite.reset()}
         >
           It is shown this once, is good for one person and ends on{' '}
-          {endOf(invite.data.expiresAt, board.brewery.timeZone)}.
+          {dayAndTime(invite.data.expiresAt, board.brewery.timeZone)}.
         </LinkOnce>
       </div>
     );

@@ -6,6 +6,7 @@ import type { Day } from '#shared/rules/vocabulary.ts';
 import { daysBetween, formatDayShort } from '#shared/units/day.ts';
 import { points } from '#shared/units/gravity.ts';
 import { format, formatBare } from '#shared/units/quantity.ts';
+import { lowered } from '../../../app/lowered.ts';
 
 export const count = (n: number, one: string, many = `${one}s`): string =>
   `${n} ${n === 1 ? one : many}`;
@@ -106,7 +107,7 @@ export const countedFindings = (link: Pick<LinkAnswer, 'verdict' | 'findings'>):
 export function shortReason(link: LinkAnswer, step: string): string {
   const worst = link.findings.find((f) => f.verdict === 'hold') ?? link.findings[0];
   if (!worst) return step;
-  return worst.title.charAt(0).toLowerCase() + worst.title.slice(1);
+  return lowered(worst.title);
 }
 
 /** "1.052 · 7 SRM · 38 IBU"; what is unknown is left out. */
