@@ -1,5 +1,5 @@
 import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
-import { useEffect, useMemo, useRef } from 'react';
+import { useMemo } from 'react';
 import { z } from 'zod';
 import { cakeCheck, type CakeCheckWrite } from '#shared/api/cakeCheck.ts';
 import {
@@ -8,6 +8,7 @@ import {
   batchRecord,
   instrument,
   reading,
+  type BatchRecord,
   type EventCreate,
   type EventWrite,
   type InstrumentCreate,
@@ -16,17 +17,21 @@ import {
   type ReadingCreate,
   type ReadingWrite,
 } from '#shared/api/reading.ts';
+import type { Person } from '#shared/api/people.ts';
 import { api } from '#shared/api/urls.ts';
 import { EVENT_WORDS, JUDGED_WORDS } from '#shared/record/readings.ts';
 import { newId } from '../app/newId.ts';
 import { KEPT } from '../kept/meta.ts';
 import { asTyped } from '../outbox/asTyped.ts';
+import { outbox } from '../outbox/outbox.ts';
+import type { Entries } from '../outbox/queue.ts';
 import { useOutbox } from '../outbox/useOutbox.ts';
 import { boardQuery } from './board.ts';
 import { request } from './client.ts';
 import { useKeptForBatch } from './keepForBatch.ts';
 import { withRecordWaiting } from './recordWaiting.ts';
 import { useSession } from './session.ts';
+import { useReadAnew } from './useReadAnew.ts';
 
 /** All that was written down of one batch. The only owner of its key. */
 export const batchRecordQuery = (slug: string, batchId: string) =>
@@ -34,47 +39,57 @@ export const batchRecordQuery = (slug: string, batchId: string) =>
     queryKey: ['batch-record', slug, batchId] as const,
     queryFn: ({ signal }) =>
       request(batchRecord, 'GET', api.batchRecord(slug, batchId), { signal }),
-    meta: KEPT,
+    ...KEPT,
   });
 
-/**
- * The record with what still waits to be sent laid over it, read anew whenever anything on the board
- * changed: the revision is raised by it too.
- */
+/** The record with what still waits to be sent laid over it; a change raises the board's revision too. */
 export function useBatchRecord(slug: string, batchId: string, revision: number) {
-  const client = useQueryClient();
-  const known = useRef(revision);
-  useEffect(() => {
-    if (known.current === revision) return;
-    known.current = revision;
-    void client.invalidateQueries({ queryKey: batchRecordQuery(slug, batchId).queryKey });
-  }, [client, slug, batchId, revision]);
-  const found = useQuery(batchRecordQuery(slug, batchId));
+  const query = batchRecordQuery(slug, batchId);
+  useReadAnew(query.queryKey, revision);
+  const { data, error, refetch } = useQuery(query);
   const entries = useOutbox();
   const me = useSession().data;
-  const { data } = found;
-  const shown = useMemo(() => {
-    if (!data || !me) return data;
-    return withRecordWaiting(data, entries, {
-      slug,
-      batchId,
-      me: { personId: me.id, name: me.name },
-    });
-  }, [data, entries, me, slug, batchId]);
-  return { ...found, data: shown };
+  const shown = useMemo(
+    () => (data && me ? shownRecord(data, entries, me, { slug, batchId }) : data),
+    [data, entries, me, slug, batchId],
+  );
+  return { data: shown, error, refetch };
 }
 
-/** After any change the record is read anew, and the board: its verdicts hang on the readings. */
-function useRecordChanged(slug: string, batchId: string) {
+const shownRecord = (
+  record: BatchRecord,
+  entries: Entries,
+  { id, name }: Person,
+  where: { slug: string; batchId: string },
+): BatchRecord => withRecordWaiting(record, entries, { ...where, me: { personId: id, name } });
+
+/**
+ * The record as the page shows it at the moment of asking: what is written on top of a row is made
+ * from the row with what waits in it, or from what somebody else has made of it by then.
+ */
+export function useRecordNow(slug: string, batchId: string): () => BatchRecord | undefined {
   const client = useQueryClient();
-  return {
-    onSettled: () =>
-      Promise.all([
-        client.invalidateQueries({ queryKey: batchRecordQuery(slug, batchId).queryKey }),
-        client.invalidateQueries({ queryKey: boardQuery(slug).queryKey }),
-      ]),
+  const me = useSession().data;
+  return () => {
+    const record = client.getQueryData(batchRecordQuery(slug, batchId).queryKey);
+    return record && me ? shownRecord(record, outbox.get(), me, { slug, batchId }) : record;
   };
 }
+
+/** The record is read anew, and the board: its verdicts hang on the readings. */
+function useReadAll(slug: string, batchId: string) {
+  const client = useQueryClient();
+  return () =>
+    Promise.all([
+      client.invalidateQueries({ queryKey: batchRecordQuery(slug, batchId).queryKey }),
+      client.invalidateQueries({ queryKey: boardQuery(slug).queryKey }),
+    ]);
+}
+
+/** What is taken is laid in by the outbox; what is refused may be so for what is not known here yet. */
+const useRecordChanged = (slug: string, batchId: string) => ({
+  onError: useReadAll(slug, batchId),
+});
 
 interface Which {
   id: string;
@@ -191,7 +206,7 @@ export function useEvents(slug: string, batchId: string) {
 }
 
 export function useInstruments(slug: string, batchId: string) {
-  const changed = useRecordChanged(slug, batchId);
+  const changed = { onSettled: useReadAll(slug, batchId) };
   return {
     add: useMutation({
       mutationFn: (body: InstrumentCreate) =>

@@ -27,7 +27,7 @@ export function boardQuery(slug: string) {
     staleTime: 30_000,
     refetchOnWindowFocus: 'always',
     networkMode: 'always',
-    meta: KEPT,
+    ...KEPT,
   });
 }
 

@@ -26,7 +26,7 @@ export async function request<T>(
   options: RequestOptions = {},
 ): Promise<T> {
   const response = await send(method, url, options);
-  const content = await contentOf(response);
+  const content = await contentOf(response, method);
   if (!response.ok) throw problemOf(response, content);
   const parsed = schema.safeParse(content);
   if (!parsed.success)
@@ -38,7 +38,7 @@ export async function request<T>(
 export async function requestNothing(method: Method, url: string, options: RequestOptions = {}) {
   const response = await send(method, url, options);
   if (response.ok) return;
-  throw problemOf(response, await contentOf(response));
+  throw problemOf(response, await contentOf(response, method));
 }
 
 /** The bare answer, whatever it says. Throws `OfflineError` when none came. */
@@ -64,24 +64,24 @@ export async function send(
     setReachable(true);
     return response;
   } catch (error) {
-    throw lost(error);
+    throw lost(error, method);
   }
 }
 
 /** Undefined where it is no JSON. The connection may be lost in the middle of an answer too. */
-async function contentOf(response: Response): Promise<unknown> {
+async function contentOf(response: Response, method: Method): Promise<unknown> {
   try {
     return await response.json();
   } catch (error) {
     if (error instanceof SyntaxError) return undefined;
-    throw lost(error);
+    throw lost(error, method);
   }
 }
 
-function lost(error: unknown): unknown {
+function lost(error: unknown, method: Method): unknown {
   if (error instanceof DOMException && error.name === 'AbortError') return error;
   setReachable(false);
-  return new OfflineError();
+  return new OfflineError(method === 'GET' ? 'to-read' : 'to-write');
 }
 
 /** What an answer that is not good says. */

@@ -1,5 +1,4 @@
 import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
-import { useEffect, useRef } from 'react';
 import type { Board } from '#shared/api/board.ts';
 import {
   comment,
@@ -12,6 +11,7 @@ import {
 import { api } from '#shared/api/urls.ts';
 import { boardQuery } from './board.ts';
 import { request, requestNothing } from './client.ts';
+import { useReadAnew } from './useReadAnew.ts';
 
 /** The talk of a chain. The only owner of its key. */
 export const talkQuery = (slug: string, chainId: string) =>
@@ -20,16 +20,11 @@ export const talkQuery = (slug: string, chainId: string) =>
     queryFn: ({ signal }) => request(talk, 'GET', api.comments(slug, chainId), { signal }),
   });
 
-/** The talk, read anew whenever anything on the board changed: the revision is raised by it too. */
+/** The talk; what is said raises the board's revision too. */
 export function useTalk(slug: string, chainId: string, revision: number) {
-  const client = useQueryClient();
-  const known = useRef(revision);
-  useEffect(() => {
-    if (known.current === revision) return;
-    known.current = revision;
-    void client.invalidateQueries({ queryKey: talkQuery(slug, chainId).queryKey });
-  }, [client, slug, chainId, revision]);
-  return useQuery(talkQuery(slug, chainId));
+  const query = talkQuery(slug, chainId);
+  useReadAnew(query.queryKey, revision);
+  return useQuery(query);
 }
 
 /** After a change the answer stands in the talk at once. */

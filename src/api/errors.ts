@@ -20,8 +20,12 @@ export class ProblemError extends Error {
 /** No answer came: the connection is gone, or the server is. */
 export class OfflineError extends Error {
   override readonly name = 'OfflineError';
-  constructor() {
-    super('No connection to the server. Nothing was saved; what you typed is still here.');
+  constructor(asked: 'to-read' | 'to-write' = 'to-write') {
+    super(
+      asked === 'to-read'
+        ? 'No connection to the server, and this is not kept on this device.'
+        : 'No connection to the server. Nothing was saved; what you typed is still here.',
+    );
   }
 }
 

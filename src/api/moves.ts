@@ -77,12 +77,8 @@ export function moverOf(client: QueryClient, slug: string): Mover {
   };
 }
 
-function useMover(): Mover {
+export function useMove(): Mover['move'] {
   const client = useQueryClient();
   const slug = useBoardSlug();
-  return useMemo(() => moverOf(client, slug), [client, slug]);
+  return useMemo(() => moverOf(client, slug).move, [client, slug]);
 }
-
-export const useMove = () => useMover().move;
-export const useUndo = () => useMover().undo;
-export const useRedo = () => useMover().redo;

@@ -1,5 +1,5 @@
 import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
-import { useEffect, useMemo, useRef } from 'react';
+import { useMemo } from 'react';
 import {
   pourState,
   type OverrideAnswer,
@@ -21,6 +21,7 @@ import { ofPour, withWaiting } from './pourWaiting.ts';
 import { serverClock } from './serverClock.ts';
 import { useSession } from './session.ts';
 import { todayQuery } from './today.ts';
+import { useReadAnew } from './useReadAnew.ts';
 
 /** The newest pour run of a batch. The only owner of its key. */
 export const pourQuery = (slug: string, batchId: string) =>
@@ -28,27 +29,19 @@ export const pourQuery = (slug: string, batchId: string) =>
     queryKey: ['pour', slug, batchId] as const,
     queryFn: ({ signal }) =>
       serverClock.measured(() => request(pourState, 'GET', api.pour(slug, batchId), { signal })),
-    meta: KEPT,
+    ...KEPT,
   });
 
-/**
- * The run with what still waits to be sent laid over it, read anew whenever anything on the board
- * changed: each of its commands raises the revision.
- */
+/** The run with what still waits to be sent laid over it; each command raises the board's revision. */
 export function usePour(
   slug: string,
   batchId: string,
   revision: number,
   cakeBatchId: string | null,
 ) {
-  const client = useQueryClient();
-  const known = useRef(revision);
-  useEffect(() => {
-    if (known.current === revision) return;
-    known.current = revision;
-    void client.invalidateQueries({ queryKey: pourQuery(slug, batchId).queryKey });
-  }, [client, slug, batchId, revision]);
-  const { data, error } = useQuery(pourQuery(slug, batchId));
+  const query = pourQuery(slug, batchId);
+  useReadAnew(query.queryKey, revision);
+  const { data, error } = useQuery(query);
   const entries = useOutbox();
   const me = useSession().data;
   const isWaiting = ofPour(entries, { slug, batchId }).length > 0;
@@ -151,11 +144,16 @@ export function usePourCommand(slug: string, batchId: string) {
       );
       return sent.kind === 'sent' ? sent.answer : null;
     },
-    onSuccess: (state: PourState | null) => state && client.setQueryData(queryKey, state),
-    onSettled: (_state, error) =>
+    // What is kept is laid in by the outbox, once the server has taken it.
+    onSuccess: (state: PourState | null, { kind }) => {
+      if (KEEPS.has(kind) || !state) return undefined;
+      client.setQueryData(queryKey, state);
+      return client.invalidateQueries({ queryKey: boardQuery(slug).queryKey });
+    },
+    onError: () =>
       Promise.all([
         client.invalidateQueries({ queryKey: boardQuery(slug).queryKey }),
-        error ? client.invalidateQueries({ queryKey }) : undefined,
+        client.invalidateQueries({ queryKey }),
       ]),
   });
 }

@@ -12,7 +12,7 @@ import {
 } from '#shared/api/pour.ts';
 import { api } from '#shared/api/urls.ts';
 import { leaveAt } from '#shared/pour/leave.ts';
-import type { Entries } from '../outbox/queue.ts';
+import { pathOf, type Entries } from '../outbox/queue.ts';
 
 interface Where {
   slug: string;
@@ -26,8 +26,7 @@ interface Where {
 export const ofPour = (
   entries: Entries,
   { slug, batchId }: Pick<Where, 'slug' | 'batchId'>,
-): Entries =>
-  entries.filter(({ url }) => url.startsWith(api.pour(slug, batchId).split('?')[0] ?? ''));
+): Entries => entries.filter(({ url }) => url.startsWith(pathOf(api.pour(slug, batchId))));
 
 /**
  * The pour as it will stand once everything that waits has arrived. What the server would say of a
@@ -49,25 +48,26 @@ function after(
   where: Where,
 ): PourRun | null {
   const { slug, batchId, me } = where;
-  if (url === api.pour(slug, batchId)) return opened(run, body, madeAt, where);
+  const path = pathOf(url);
+  if (path === pathOf(api.pour(slug, batchId))) return opened(run, body, madeAt, where);
   if (!run) return null;
-  switch (url) {
-    case api.pourStep(slug, batchId): {
+  switch (path) {
+    case pathOf(api.pourStep(slug, batchId)): {
       const { step, found } = pourStepRequest.parse(body);
       return { ...run, step, found: { ...run.found, ...found } };
     }
-    case api.pourReadings(slug, batchId):
+    case pathOf(api.pourReadings(slug, batchId)):
       return withReading(run, wortReadingRequest.parse(body), me);
-    case api.pourWithdrawals(slug, batchId): {
+    case pathOf(api.pourWithdrawals(slug, batchId)): {
       const { readingId } = withdrawalRequest.parse(body);
       const readings = run.readings.map((one) =>
         one.id === readingId ? { ...one, withdrawn: true } : one,
       );
       return { ...run, readings };
     }
-    case api.pourDone(slug, batchId):
+    case pathOf(api.pourDone(slug, batchId)):
       return poured(run, pourRequest.parse(body), me);
-    case api.pourLeaving(slug, batchId):
+    case pathOf(api.pourLeaving(slug, batchId)):
       return { ...run, state: 'left', closedAt: madeAt };
     default:
       return run;

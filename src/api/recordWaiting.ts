@@ -1,9 +1,13 @@
-import { cakeCheckWrite } from '#shared/api/cakeCheck.ts';
+import type { z } from 'zod';
+import { cakeCheck, cakeCheckWrite, type CakeCheck } from '#shared/api/cakeCheck.ts';
 import {
+  batchEvent,
+  batchNote,
   eventCreate,
   eventWrite,
   noteCreate,
   noteWrite,
+  reading,
   readingCreate,
   readingWrite,
   type BatchRecord,
@@ -13,7 +17,7 @@ import {
 import { api } from '#shared/api/urls.ts';
 import { valueOf } from '#shared/fermentation/correct.ts';
 import type { Entry } from '../outbox/entry.ts';
-import type { Entries } from '../outbox/queue.ts';
+import { isRecord, pathOf, type Entries } from '../outbox/queue.ts';
 
 interface Where {
   slug: string;
@@ -26,11 +30,12 @@ type List = 'readings' | 'notes' | 'events';
 
 /** Where an entry of the outbox belongs in a batch's record; null: nowhere in it. */
 function placeOf({ url }: Entry, { slug, batchId }: Pick<Where, 'slug' | 'batchId'>) {
-  if (url === api.cakeCheck(slug, batchId)) return { list: 'check' as const, id: null };
+  const path = pathOf(url);
+  if (path === pathOf(api.cakeCheck(slug, batchId))) return { list: 'check' as const, id: null };
   for (const list of ['readings', 'notes', 'events'] as const) {
-    const all = api[list](slug, batchId);
-    if (url === all) return { list, id: null };
-    if (url.startsWith(`${all}/`)) return { list, id: url.slice(all.length + 1) };
+    const all = pathOf(api[list](slug, batchId));
+    if (path === all) return { list, id: null };
+    if (path.startsWith(`${all}/`)) return { list, id: path.slice(all.length + 1) };
   }
   return null;
 }
@@ -48,6 +53,51 @@ export const withRecordWaiting = (
   where: Where,
 ): BatchRecord =>
   ofRecord(entries, where).reduce((standing, entry) => after(standing, entry, where), record);
+
+/**
+ * A record that was read before the server took an entry, with the entry in it and what the server
+ * made of it: its version, and the figures that are its to work out.
+ */
+export function withTaken(
+  record: BatchRecord,
+  entry: Entry,
+  answer: unknown,
+  where: Where,
+): BatchRecord {
+  const place = placeOf(entry, where);
+  if (!place) return record;
+  const laid = after(record, entry, where);
+  if (entry.method === 'DELETE' || !isRecord(answer)) return laid;
+  if (place.list === 'check') {
+    const check = cakeCheck.safeParse(answer).data;
+    return check ? newerCheck(record, check) : laid;
+  }
+  switch (place.list) {
+    case 'readings':
+      return { ...laid, readings: withAnswer(record.readings, laid.readings, reading, answer) };
+    case 'notes':
+      return { ...laid, notes: withAnswer(record.notes, laid.notes, batchNote, answer) };
+    case 'events':
+      return { ...laid, events: withAnswer(record.events, laid.events, batchEvent, answer) };
+  }
+}
+
+const newerCheck = (record: BatchRecord, check: CakeCheck): BatchRecord =>
+  record.check && record.check.version > check.version ? record : { ...record, check };
+
+/** The answer's row in its place; where a newer one was read by now, that one. */
+function withAnswer<Row extends { id: string; version: number }>(
+  before: readonly Row[],
+  laid: Row[],
+  contract: z.ZodType<Row>,
+  answer: unknown,
+): Row[] {
+  const row = contract.safeParse(answer).data;
+  if (!row) return laid;
+  const known = before.find(({ id }) => id === row.id);
+  const newest = known && known.version > row.version ? known : row;
+  return laid.map((one) => (one.id === row.id ? newest : one));
+}
 
 function after(record: BatchRecord, entry: Entry, where: Where): BatchRecord {
   const place = placeOf(entry, where);

@@ -29,7 +29,7 @@ export const sessionQuery = queryOptions({
     }
   },
   staleTime: 60_000,
-  meta: KEPT,
+  ...KEPT,
 });
 
 /** Without a connection: whoever was signed in here last, with what they read then. */

@@ -16,6 +16,8 @@ interface Ports {
 /** Keeps the last answer of each query that is marked so, for the person who is signed in alone. */
 export function keepAnswers(client: QueryClient, { store, person, isSession }: Ports): () => void {
   const waiting = new Map<string, Query>();
+  // Whose answers this page has put in, and which: only one more can make them too many.
+  let known = { personId: '', hashes: new Set<string>() };
   let timer: ReturnType<typeof setTimeout> | null = null;
   const write = async () => {
     timer = null;
@@ -27,13 +29,18 @@ export function keepAnswers(client: QueryClient, { store, person, isSession }: P
     waiting.clear();
     if (personId === null) return;
     await store.put(rows);
-    await dropOthers(store, personId, isSession);
+    if (known.personId !== personId) known = { personId, hashes: new Set() };
+    if (rows.every(([hash]) => known.hashes.has(hash))) return;
+    for (const [hash] of rows) known.hashes.add(hash);
+    for (const hash of await dropOthers(store, personId, isSession)) known.hashes.delete(hash);
   };
   const keep = (query: Query) => {
     waiting.set(query.queryHash, query);
     timer ??= setTimeout(write, BREATH_MS);
   };
-  // It comes beside the first page: some may have been read before.
+  // It comes beside the first page: some may have been read before, and nobody may be signed in.
+  const sessions = client.getQueryCache().findAll({ predicate: isSession });
+  if (sessions.some(({ state }) => state.data === null)) void store.clear();
   for (const query of client.getQueryCache().findAll({ predicate: isKept })) keep(query);
   return client.getQueryCache().subscribe((event) => {
     if (event.type !== 'updated' || event.action.type !== 'success') return;
@@ -57,12 +64,15 @@ const keptOf = (query: Query, personId: string | null): Kept => ({
   readAt: query.state.dataUpdatedAt,
 });
 
-/** What is somebody else's, and what was read longest ago where there is too much. */
+/**
+ * Drops what is somebody else's, and what was read longest ago where there is too much.
+ * @returns the hashes of what is gone
+ */
 async function dropOthers(
   store: Ports['store'],
   personId: string,
   isSession: Ports['isSession'],
-): Promise<void> {
+): Promise<string[]> {
   const all = await store.all();
   const others = all.filter(([, kept]) => kept.personId !== personId);
   const own = all.filter(([, kept]) => kept.personId === personId);
@@ -73,4 +83,5 @@ async function dropOthers(
     .slice(MOST_KEPT);
   const gone = [...others, ...tooMany].map(([hash]) => hash);
   if (gone.length > 0) await store.drop(gone);
+  return gone;
 }

@@ -9,5 +9,8 @@ declare module '@tanstack/react-query' {
   }
 }
 
-/** `meta` of a query whose last answer is kept on this device. */
-export const KEPT = { kept: true } as const;
+/**
+ * Options of a query whose last answer is kept on this device. It stays in the open page too, for as
+ * long as that is open: a page that nobody looks at is not given up after a while.
+ */
+export const KEPT = { meta: { kept: true }, gcTime: Infinity } as const;

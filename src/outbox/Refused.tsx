@@ -1,6 +1,8 @@
+import { Fragment } from 'react';
+import { CONTRACT } from '#shared/api/contract.ts';
 import { Button } from '../components/ui/Button.tsx';
 import { Notice } from '../components/ui/Notice.tsx';
-import { bothVersions } from './bothVersions.ts';
+import { asWritten, bothVersions } from './bothVersions.ts';
 import type { Entry } from './entry.ts';
 import { outbox } from './outbox.ts';
 
@@ -8,10 +10,13 @@ import { outbox } from './outbox.ts';
 export function Refused({ entry }: { entry: Entry }) {
   const rows = bothVersions(entry);
   const isChanged = entry.refusal?.kind === 'changed-since';
+  const hasEnded = entry.refusal?.kind === 'contract-ended';
   return (
     <div className="mt-3 space-y-3">
       <Notice kind="mind" alert>
-        {entry.refusal?.sentence}
+        {hasEnded
+          ? 'This was written with an earlier version of the page. The server takes nothing from it any more.'
+          : entry.refusal?.sentence}
         {entry.refusal?.errors.map(({ detail, pointer }) => (
           <span key={pointer} className="block">
             {detail}
@@ -19,12 +24,9 @@ export function Refused({ entry }: { entry: Entry }) {
         ))}
       </Notice>
       {rows.length > 0 && <Versions rows={rows} />}
+      {hasEnded && <WriteAgain entry={entry} />}
       <div className="flex flex-wrap gap-3">
-        {entry.refusal?.kind === 'contract-ended' ? (
-          <Button look="first" size="small" onClick={() => location.reload()}>
-            Reload the page
-          </Button>
-        ) : (
+        {!hasEnded && (
           <Button
             look="first"
             size="small"
@@ -40,6 +42,34 @@ export function Refused({ entry }: { entry: Entry }) {
         )}
       </div>
     </div>
+  );
+}
+
+/** What an old page wrote is never taken, however often it is sent: what it was, to write it anew. */
+function WriteAgain({ entry }: { entry: Entry }) {
+  return (
+    <>
+      <dl className="grid grid-cols-[auto_1fr] gap-x-4 gap-y-1 text-small">
+        {asWritten(entry).map(({ label, mine }) => (
+          <Fragment key={label}>
+            <dt className="text-ink2">{label}</dt>
+            <dd className="wrap-anywhere whitespace-pre-wrap">{mine}</dd>
+          </Fragment>
+        ))}
+      </dl>
+      {entry.contract === CONTRACT ? (
+        <>
+          <p>Reload the page, write it again there, then discard it here.</p>
+          <Button look="first" size="small" onClick={() => location.reload()}>
+            Reload the page
+          </Button>
+        </>
+      ) : (
+        <p>
+          Write it again on its page, then discard it here. What was written after it goes on then.
+        </p>
+      )}
+    </>
   );
 }
 

@@ -1,3 +1,4 @@
+import { capital } from '#shared/rules/words.ts';
 import { asTyped } from './asTyped.ts';
 import type { Entry } from './entry.ts';
 import { isRecord } from './queue.ts';
@@ -43,10 +44,23 @@ export function bothVersions({ body, refusal }: Entry): BothVersions[] {
     .filter(({ mine, theirs }) => mine !== theirs);
 }
 
+/** Field by field what one wrote. */
+export function asWritten({ body }: Entry): Pick<BothVersions, 'label' | 'mine'>[] {
+  if (!isRecord(body)) return [];
+  const { typed } = body;
+  return Object.keys(body)
+    .filter((key) => !UNSHOWN.has(key))
+    .map((key) => ({
+      label: LABELS[key] ?? spaced(key),
+      mine: wordsOf(body[key], isRecord(typed) ? typed[key] : undefined),
+    }))
+    .filter(({ mine }) => mine !== '–');
+}
+
 /** "daysUnderBeer" → "Days under beer". */
 function spaced(key: string): string {
   const words = key.replace(/([A-Z])/g, (letter) => ` ${letter.toLowerCase()}`);
-  return words.charAt(0).toUpperCase() + words.slice(1);
+  return capital(words);
 }
 
 function wordsOf(value: unknown, typed: unknown): string {

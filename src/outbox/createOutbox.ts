@@ -23,8 +23,6 @@ export interface OutboxPorts {
 export type Fate =
   { kind: 'sent'; answer: unknown } | { kind: 'waiting' } | { kind: 'refused'; entry: Entry };
 
-export type Outbox = ReturnType<typeof createOutbox>;
-
 /** Entries of this device, sent in order; pages see those of the person who is signed in. */
 export function createOutbox(ports: OutboxPorts) {
   const { storage } = ports;
@@ -83,6 +81,8 @@ export function createOutbox(ports: OutboxPorts) {
       const left = known.find(({ id }) => id === entry.id);
       if (left?.refusal) return { kind: 'refused', entry: left };
       if (left) return { kind: 'waiting' };
+      // Another tab has sent it, and has the answer: this one's pages still lack what it changed.
+      if (!outcome) ports.taken(entry, undefined);
       return { kind: 'sent', answer: outcome?.kind === 'done' ? outcome.answer : undefined };
     },
     discard: async (id: string) => {

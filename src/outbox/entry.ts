@@ -20,7 +20,7 @@ export interface Entry {
   page: string;
   /** Queries whose answer it changes. */
   touches: QueryKey[];
-  /** The query whose data the server's answer is, where it is a whole one. */
+  /** The one of them whose data the server's answer is, where it is a whole one. */
   answers?: QueryKey;
   /** Why the server did not take it; null: it has not been asked, or gave no answer. */
   refusal: Refusal | null;

@@ -1,4 +1,5 @@
 import { isOnline, onConnectionChange } from '../api/connection.ts';
+import { layIn } from '../api/layIn.ts';
 import { queryClient } from '../api/queryClient.ts';
 import { sessionQuery } from '../api/session.ts';
 import { createOutbox } from './createOutbox.ts';
@@ -25,9 +26,12 @@ export const outbox = createOutbox({
   send: sendEntry,
   person: () => queryClient.getQueryData(sessionQuery.queryKey)?.id ?? null,
   alone,
-  taken: ({ touches, answers }, answer) => {
-    if (answers && answer !== undefined) queryClient.setQueryData(answers, answer);
-    for (const queryKey of touches) void queryClient.invalidateQueries({ queryKey });
+  taken: (entry, answer) => {
+    const name = queryClient.getQueryData(sessionQuery.queryKey)?.name ?? '';
+    for (const queryKey of entry.touches) {
+      const isThere = layIn(queryClient, queryKey, { entry, answer, name });
+      void queryClient.invalidateQueries({ queryKey, refetchType: isThere ? 'none' : 'active' });
+    }
   },
   isHopeful: isOnline,
   patience: () => new Promise((resolve) => window.setTimeout(resolve, PATIENCE_MS)),

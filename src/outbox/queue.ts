@@ -53,7 +53,8 @@ function rebased(entries: Entries, sent: Entry, answer: unknown): Entries {
   );
 }
 
-const pathOf = (url: string) => url.split('?')[0] ?? url;
+/** Without the season that it was written in: the row is the same at each of its addresses. */
+export const pathOf = (url: string) => url.split('?')[0] ?? url;
 
 /**
  * A refusal that only says that it was done before: the answer of the first time was lost. A row

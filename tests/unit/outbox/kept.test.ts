@@ -25,7 +25,7 @@ function page(store: ReturnType<typeof device>) {
   const person = () => client.getQueryData<{ id: string } | null>(SESSION)?.id ?? null;
   keepAnswers(client, { store, person, isSession: ({ queryKey }) => queryKey[0] === 'session' });
   const read = (key: string[], data: unknown, kept = true) =>
-    client.fetchQuery({ queryKey: key, queryFn: () => data, ...(kept && { meta: KEPT }) });
+    client.fetchQuery({ queryKey: key, queryFn: () => data, ...(kept && KEPT) });
   return { client, read };
 }
 

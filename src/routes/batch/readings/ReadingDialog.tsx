@@ -1,9 +1,8 @@
-import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import { reading as contract, type Reading, type Instrument } from '#shared/api/reading.ts';
 import { readingText } from '#shared/record/readings.ts';
-import { batchRecordQuery, useReadings } from '../../../api/batchRecord.ts';
+import { useReadings, useRecordNow } from '../../../api/batchRecord.ts';
 import { useBrewery } from '../../../app/useBrewery.ts';
 import { useUnits } from '../../../app/useUnits.ts';
 import { RowForm } from '../../../components/form/RowForm.tsx';
@@ -41,8 +40,7 @@ export function ReadingDialog({ batch, reading, like, instruments, onClose }: Re
   const units = useUnits();
   const { timeZone } = useBoardView().board.brewery;
   const { add, edit } = useReadings(slug, batch.id);
-  const client = useQueryClient();
-  const { queryKey } = batchRecordQuery(slug, batch.id);
+  const recordNow = useRecordNow(slug, batch.id);
   const [deleting, setDeleting] = useState(false);
   const start = like ?? {
     kind: 'gravity' as const,
@@ -63,8 +61,8 @@ export function ReadingDialog({ batch, reading, like, instruments, onClose }: Re
         shape={readingShape(timeZone)}
         create={add.mutateAsync}
         patch={({ id, version, patch }) => {
-          // What somebody else wrote in the meantime stands, but for the fields changed here.
-          const now = client.getQueryData(queryKey)?.readings.find((one) => one.id === id);
+          // What was written in the meantime stands, but for the fields changed here.
+          const now = recordNow()?.readings.find((one) => one.id === id);
           const base = now ?? reading;
           if (!base) return Promise.resolve();
           return edit.mutateAsync({ id, version, body: { ...writeOf(base), ...patch } });
