@@ -3,11 +3,13 @@ import type { Batch } from '#shared/api/batch.ts';
 import type { BatchRecord } from '#shared/api/reading.ts';
 import { formatDay } from '#shared/units/day.ts';
 import { useCakeCheck } from '../../../api/batchRecord.ts';
+import { sentenceOf } from '../../../api/errors.ts';
 import { KeptOffline } from '../../../app/keptOffline.ts';
 import { lazyPart } from '../../../app/lazyPart.tsx';
 import { Button } from '../../../components/ui/Button.tsx';
 import { ConfirmDialog } from '../../../components/ui/ConfirmDialog.tsx';
 import { Skeleton } from '../../../components/ui/Skeleton.tsx';
+import { say } from '../../../components/ui/Toast.tsx';
 import { OnWholeBoard, useBoardView } from '../../board/view/BoardView.tsx';
 import { CheckSummary } from './CheckSummary.tsx';
 
@@ -113,8 +115,12 @@ function WithdrawButton({ batch, version, onDone }: WithdrawButtonProps) {
         title="Take the judgement back"
         action="Take it back"
         busy={withdraw.isPending}
-        error={withdraw.error}
-        onConfirm={() => withdraw.mutate(version, { onSuccess: onDone })}
+        // The judgement goes from the page at once, and this with it: a refusal is told all the same.
+        onConfirm={() =>
+          void withdraw
+            .mutateAsync(version)
+            .then(onDone, (error: unknown) => say(sentenceOf(error)))
+        }
       >
         <p>The cake of {batch.name} is then as if nobody had judged or measured it.</p>
       </ConfirmDialog>

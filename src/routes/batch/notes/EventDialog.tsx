@@ -1,10 +1,9 @@
-import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import { batchEvent, eventCreate, EVENT_KINDS, type BatchEvent } from '#shared/api/reading.ts';
 import { EVENT_WORDS } from '#shared/record/readings.ts';
 import { capital } from '#shared/rules/words.ts';
-import { batchRecordQuery, useEvents } from '../../../api/batchRecord.ts';
+import { useEvents, useRecordNow } from '../../../api/batchRecord.ts';
 import { newId } from '../../../app/newId.ts';
 import { fromLocal, toLocal } from '../../../app/zonedTime.ts';
 import { DayField } from '../../../components/form/DayField.tsx';
@@ -13,6 +12,7 @@ import { SelectField } from '../../../components/form/SelectField.tsx';
 import { TextField } from '../../../components/form/TextField.tsx';
 import { TimeField } from '../../../components/form/TimeField.tsx';
 import { Button } from '../../../components/ui/Button.tsx';
+import { ConfirmDialog } from '../../../components/ui/ConfirmDialog.tsx';
 import { Dialog } from '../../../components/ui/Dialog.tsx';
 import { useBoardView } from '../../board/view/BoardView.tsx';
 
@@ -33,9 +33,9 @@ const LABELS: Record<string, string> = {
 export function EventDialog({ batch, event, onClose }: EventDialogProps) {
   const { slug, board } = useBoardView();
   const { timeZone } = board.brewery;
-  const { add, edit, remove } = useEvents(slug, batch.id);
-  const client = useQueryClient();
-  const { queryKey } = batchRecordQuery(slug, batch.id);
+  const { add, edit } = useEvents(slug, batch.id);
+  const recordNow = useRecordNow(slug, batch.id);
+  const [deleting, setDeleting] = useState(false);
   const [values] = useState(() => ({
     id: event?.id ?? newId(),
     kind: event?.kind ?? 'dry-hop',
@@ -62,7 +62,7 @@ export function EventDialog({ batch, event, onClose }: EventDialogProps) {
         })}
         create={add.mutateAsync}
         patch={async ({ id, version, patch }) => {
-          const now = client.getQueryData(queryKey)?.events.find((one) => one.id === id);
+          const now = recordNow()?.events.find((one) => one.id === id);
           const base = now ?? event;
           if (!base) return;
           const { kind, text, plannedOn, doneAt } = base;
@@ -78,10 +78,7 @@ export function EventDialog({ batch, event, onClose }: EventDialogProps) {
         onCancel={onClose}
         onDone={onClose}
         aside={
-          <Button
-            look="danger"
-            onClick={() => event && remove.mutate(event, { onSuccess: onClose })}
-          >
+          <Button look="danger" onClick={() => setDeleting(true)}>
             Delete
           </Button>
         }
@@ -97,6 +94,43 @@ export function EventDialog({ batch, event, onClose }: EventDialogProps) {
           <TimeField name="doneAt" label="Done" hint="Empty: still to do" />
         </div>
       </RowForm>
+      {deleting && event && (
+        <DeleteEvent
+          batch={batch}
+          event={event}
+          onClose={() => setDeleting(false)}
+          onDone={onClose}
+        />
+      )}
     </Dialog>
+  );
+}
+
+interface DeleteEventProps {
+  batch: Batch;
+  event: BatchEvent;
+  onClose: () => void;
+  onDone: () => void;
+}
+
+function DeleteEvent({ batch, event, onClose, onDone }: DeleteEventProps) {
+  const { slug } = useBoardView();
+  const { remove } = useEvents(slug, batch.id);
+  return (
+    <ConfirmDialog
+      open
+      onClose={onClose}
+      title="Delete what was done"
+      action="Delete"
+      busy={remove.isPending}
+      error={remove.error}
+      onConfirm={() => remove.mutate(event, { onSuccess: onDone })}
+    >
+      <p>
+        {capital(EVENT_WORDS[event.kind])}
+        {event.text && `, ${event.text}`} goes from {batch.name}. The record keeps that it was
+        there.
+      </p>
+    </ConfirmDialog>
   );
 }

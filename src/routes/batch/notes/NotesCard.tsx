@@ -2,16 +2,17 @@ import { useState } from 'react';
 import { useForm } from 'react-hook-form';
 import type { Batch } from '#shared/api/batch.ts';
 import { noteCreate, type BatchNote, type NoteCreate } from '#shared/api/reading.ts';
-import { formatDay } from '#shared/units/day.ts';
 import { useNotes } from '../../../api/batchRecord.ts';
+import { sentenceOf } from '../../../api/errors.ts';
 import { newId } from '../../../app/newId.ts';
-import { dayOf, timeOf } from '../../../app/zonedTime.ts';
+import { dayAndTime } from '../../../app/zonedTime.ts';
 import { contractResolver } from '../../../components/form/contractResolver.ts';
 import { Form } from '../../../components/form/Form.tsx';
 import { NoteField } from '../../../components/form/NoteField.tsx';
 import { Button } from '../../../components/ui/Button.tsx';
 import { Card, CardTitle } from '../../../components/ui/Card.tsx';
 import { ConfirmDialog } from '../../../components/ui/ConfirmDialog.tsx';
+import { say } from '../../../components/ui/Toast.tsx';
 import { useBoardView } from '../../board/view/BoardView.tsx';
 
 interface NotesCardProps {
@@ -76,7 +77,7 @@ function Note({ batch, note, onEdit }: NoteProps) {
   return (
     <li>
       <p className="text-small text-ink2">
-        {note.by.name}, {formatDay(dayOf(note.at, timeZone))}, {timeOf(note.at, timeZone)}
+        {note.by.name}, {dayAndTime(note.at, timeZone)}
         {note.editedAt && ', changed since'}
       </p>
       <p className="wrap-anywhere whitespace-pre-wrap">{note.text}</p>
@@ -111,8 +112,10 @@ function DeleteNote({ batch, note, onClose }: NoteProps & { onClose: () => void 
       title="Delete this note"
       action="Delete"
       busy={remove.isPending}
-      error={remove.error}
-      onConfirm={() => remove.mutate(note, { onSuccess: onClose })}
+      // The note goes from the page at once, and this with it: a refusal is told wherever one is then.
+      onConfirm={() =>
+        void remove.mutateAsync(note).then(onClose, (error: unknown) => say(sentenceOf(error)))
+      }
     >
       <p className="line-clamp-3">{note.text}</p>
     </ConfirmDialog>

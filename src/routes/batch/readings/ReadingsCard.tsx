@@ -6,6 +6,7 @@ import { KeptOffline } from '../../../app/keptOffline.ts';
 import { lazyPart } from '../../../app/lazyPart.tsx';
 import { Button } from '../../../components/ui/Button.tsx';
 import { Card, CardTitle } from '../../../components/ui/Card.tsx';
+import { say } from '../../../components/ui/Toast.tsx';
 import { useBoardView } from '../../board/view/BoardView.tsx';
 import { readingsCsv, saveFile } from './csv.ts';
 import { ReadingsTable } from './ReadingsTable.tsx';
@@ -84,14 +85,14 @@ function InstrumentsButton({ batch, record }: ReadingsCardProps) {
 
 function ExportButton({ batch, record }: ReadingsCardProps) {
   const { timeZone } = useBoardView().board.brewery;
+  const hand = (text: string) => saveFile(`${batch.name} readings.csv`, text);
   return (
     <Button
       look="quiet"
       size="small"
-      onClick={async () =>
-        saveFile(
-          `${batch.name} readings.csv`,
-          await readingsCsv(record.readings, record.instruments, timeZone),
+      onClick={() =>
+        void readingsCsv(record.readings, record.instruments, timeZone).then(hand, () =>
+          say('The file could not be made. Try again once the connection is back.'),
         )
       }
     >
