@@ -20,16 +20,6 @@ export const TONES: Record<Verdict, string> = {
   hold: 'border-hold bg-hold-l text-hold',
 };
 
-/** "15:42", in the brewery's time zone. */
-export function clockTime(at: number | string, timeZone: string): string {
-  return new Intl.DateTimeFormat('en-GB', {
-    timeZone,
-    hour: '2-digit',
-    minute: '2-digit',
-    hourCycle: 'h23',
-  }).format(new Date(at));
-}
-
 const MINUTE = 60_000;
 
 /** "in 12 minutes", "now", "in 3 hours 10 minutes". */

@@ -5,8 +5,9 @@ import type { PourRun } from '#shared/api/pour.ts';
 import { DEFAULT_HOUSE_RULES } from '#shared/rules/resolve.ts';
 import { DEFAULT_UNITS } from '#shared/units/quantity.ts';
 import { createServerClock } from '../../../src/api/serverClock.ts';
+import { timeOf } from '../../../src/app/zonedTime.ts';
 import { rewrite, written } from '../../../src/components/form/written.ts';
-import { ago, clockTime, inTime } from '../../../src/routes/pour/words.ts';
+import { ago, inTime } from '../../../src/routes/pour/words.ts';
 import { PLOT, plotOf, roundMarks } from '../../../src/routes/pour/wort/plot.ts';
 import { readingFault } from '../../../src/routes/pour/wort/readingFault.ts';
 import { sayVerdict } from '../../../src/routes/pour/wort/verdictWords.ts';
@@ -58,8 +59,8 @@ describe('the server’s clock', () => {
 
 describe('words', () => {
   test('times in the brewery’s zone, over a change to summer time', () => {
-    expect(clockTime('2027-03-28T00:59:00Z', 'Europe/London')).toBe('00:59');
-    expect(clockTime('2027-03-28T01:01:00Z', 'Europe/London')).toBe('02:01');
+    expect(timeOf('2027-03-28T00:59:00Z', 'Europe/London')).toBe('00:59');
+    expect(timeOf('2027-03-28T01:01:00Z', 'Europe/London')).toBe('02:01');
   });
   test.each([
     [-1, 'by now'],

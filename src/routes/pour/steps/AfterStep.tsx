@@ -1,4 +1,3 @@
-import { useState } from 'react';
 import { useBrewery } from '../../../app/useBrewery.ts';
 import { LinkButton } from '../../../components/ui/LinkButton.tsx';
 import { Advice } from '../../board/panel/Advice.tsx';
@@ -13,14 +12,14 @@ const AFTER = ['oxygen', 'second-oxygen', 'blow-off'];
 
 /** The wort is on the cake: air, lid, blow-off; the record; the dates behind. */
 export function AfterStep() {
-  const { batch, run, standing, mine } = usePourView();
+  const { batch, standing, mine } = usePourView();
   const { path } = useBrewery();
   const advice = standing.link?.advice.filter(({ id }) => AFTER.includes(id));
   return (
     <div className="max-w-xl">
       <PouredNow />
       <h3 className="mt-6 text-h2">Now close it up</h3>
-      <AirAndLid key={run.id} />
+      <AirAndLid />
       {advice && advice.length > 0 && <Advice advice={advice} />}
       <Caution>
         Never block an airlock or a blow-off tube: the gas of a strong start lifts lids and bursts
@@ -36,8 +35,6 @@ export function AfterStep() {
 
 function AirAndLid() {
   const { run, mine, send, error } = usePourView();
-  const [aerated, setAerated] = useState(run.found.aerated ?? false);
-  const [lidOn, setLidOn] = useState(run.found.lidOn ?? false);
   const keep = (found: { aerated?: boolean; lidOn?: boolean }) =>
     void send({ kind: 'step', body: { runId: run.id, step: 'after', found } }).catch(
       () => undefined,
@@ -45,22 +42,16 @@ function AirAndLid() {
   return (
     <div className="mt-3 grid gap-2.5">
       <Tick
-        checked={aerated}
+        checked={run.found.aerated ?? false}
         disabled={!mine}
-        onChange={(done) => {
-          setAerated(done);
-          keep({ aerated: done });
-        }}
+        onChange={(aerated) => keep({ aerated })}
       >
         Air or oxygen given
       </Tick>
       <Tick
-        checked={lidOn}
+        checked={run.found.lidOn ?? false}
         disabled={!mine}
-        onChange={(done) => {
-          setLidOn(done);
-          keep({ lidOn: done });
-        }}
+        onChange={(lidOn) => keep({ lidOn })}
       >
         Lid on, airlock or blow-off fitted
       </Tick>

@@ -1,10 +1,11 @@
 import { format } from '#shared/units/quantity.ts';
+import { timeOf } from '../../../app/zonedTime.ts';
 import { VerdictMark } from '../../../components/drawn/VerdictMark.tsx';
 import { useBoardView } from '../../board/view/BoardView.tsx';
 import { usePourView } from '../pourView.ts';
 import { useOutbox } from '../../../outbox/useOutbox.ts';
 import { ReasonForm } from '../wort/ReasonForm.tsx';
-import { clockTime, TONES } from '../words.ts';
+import { TONES } from '../words.ts';
 
 /** What the record says of this pour. One without leave stays red until a head brewer signs. */
 export function PouredNow() {
@@ -17,7 +18,7 @@ export function PouredNow() {
   const isSent = !waiting.some(({ id }) => id === pour.id);
   const verdict = open ? 'hold' : pour.cleared ? 'pour' : 'mind';
   const facts = [
-    `${clockTime(pour.at, board.brewery.timeZone)}`,
+    timeOf(pour.at, board.brewery.timeZone),
     ...(pour.readingC === null ? [] : [format('temperature', pour.readingC, units)]),
     ...(pour.volumeL === null ? [] : [format('volume', pour.volumeL, units)]),
     ...(pour.og === null ? [] : [format('gravity', pour.og, units)]),

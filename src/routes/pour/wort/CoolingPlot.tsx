@@ -2,9 +2,9 @@ import { useId } from 'react';
 import type { PourAnswer } from '#shared/pour/check.ts';
 import { celsiusFromFahrenheit, fahrenheitFromCelsius } from '#shared/units/temperature.ts';
 import { format } from '#shared/units/quantity.ts';
+import { timeOf } from '../../../app/zonedTime.ts';
 import { useBoardView } from '../../board/view/BoardView.tsx';
 import { usePourView } from '../pourView.ts';
-import { clockTime } from '../words.ts';
 import { PLOT, plotOf, roundMarks, type Plot } from './plot.ts';
 
 /** Readings, the window as a band, the forecast and the time it comes in, kept current with the clock. */
@@ -169,7 +169,7 @@ function Times({ plot, readings, ready, now, zone }: TimesProps) {
       textAnchor="middle"
       className={bold ? 'fill-ink font-bold' : 'fill-ink2'}
     >
-      {clockTime(at, zone)}
+      {timeOf(at, zone)}
     </text>
   ));
 }

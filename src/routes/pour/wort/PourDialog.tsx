@@ -4,6 +4,8 @@ import type { Typed } from '#shared/api/units.ts';
 import { format } from '#shared/units/quantity.ts';
 import { newId } from '../../../app/newId.ts';
 import { sentenceOf } from '../../../api/errors.ts';
+import { useUnsaved } from '../../../app/unsaved.ts';
+import { timeOf } from '../../../app/zonedTime.ts';
 import { Button } from '../../../components/ui/Button.tsx';
 import { Dialog } from '../../../components/ui/Dialog.tsx';
 import { Notice } from '../../../components/ui/Notice.tsx';
@@ -11,7 +13,6 @@ import { rewrite, written, type Written } from '../../../components/form/written
 import { useBoardView } from '../../board/view/BoardView.tsx';
 import { usePourView } from '../pourView.ts';
 import { restOf } from '../steps/rest.ts';
-import { clockTime } from '../words.ts';
 import type { DeviceTime } from './deviceTime.ts';
 import { ReadBox } from './ReadBox.tsx';
 
@@ -24,14 +25,27 @@ interface PourDialogProps {
 
 /** The pour goes on the record, with what is read of the wort. Readings may be left empty. */
 export function PourDialog({ at, cleared, onClose }: PourDialogProps) {
+  const { batch } = usePourView();
+  const { board } = useBoardView();
+  const time = timeOf(Date.parse(at.deviceAt) + at.clockOffsetMs, board.brewery.timeZone);
+  return (
+    <Dialog open onClose={onClose} title={`${batch.name} is poured`} lead={`At ${time}.`}>
+      {!cleared && <WithoutLeave />}
+      <PourForm at={at} onDone={onClose} />
+    </Dialog>
+  );
+}
+
+function PourForm({ at, onDone }: { at: DeviceTime; onDone: () => void }) {
   const { run, batch, busy, standing, send } = usePourView();
-  const { board, units } = useBoardView();
+  const { units } = useBoardView();
   const [id] = useState(newId);
   const [surplusId] = useState(newId);
   const [volume, setVolume] = useState(() => written('volume', null, units));
   const [gravity, setGravity] = useState(() => written('gravity', null, units));
   const [failure, setFailure] = useState<string | null>(null);
   const [tried, setTried] = useState(false);
+  useUnsaved((volume.text !== '' || gravity.text !== '') && !busy);
   const faults = {
     volume: faultOf(volume, f.volumeL),
     gravity: faultOf(gravity, f.originalGravity),
@@ -54,50 +68,46 @@ export function PourDialog({ at, cleared, onClose }: PourDialogProps) {
           surplus: rest && left > 0 ? { id: surplusId, what: rest, volumeL: left } : null,
         },
       });
-      onClose();
+      onDone();
     } catch (error) {
       setFailure(sentenceOf(error));
     }
   };
-  const time = clockTime(Date.parse(at.deviceAt) + at.clockOffsetMs, board.brewery.timeZone);
   return (
-    <Dialog open onClose={onClose} title={`${batch.name} is poured`} lead={`At ${time}.`}>
-      {!cleared && <WithoutLeave />}
-      <form
-        noValidate
-        className="grid gap-4"
-        onSubmit={(event) => {
-          event.preventDefault();
-          void record();
-        }}
-      >
-        <ReadBox
-          label="Volume in the vessel"
-          hint={
-            batch.volumeL === null ? undefined : `Planned ${format('volume', batch.volumeL, units)}`
-          }
-          now={volume}
-          fault={tried ? faults.volume : null}
-          onText={(text) => setVolume(rewrite(volume, text, units))}
-        />
-        <ReadBox
-          label="Original gravity, as read"
-          hint={batch.og === null ? undefined : `Planned ${format('gravity', batch.og, units)}`}
-          now={gravity}
-          fault={tried ? faults.gravity : null}
-          onText={(text) => setGravity(rewrite(gravity, text, units))}
-        />
-        <p className="text-body text-ink2">Leave a reading empty if you did not take it.</p>
-        {failure && (
-          <Notice kind="hold" alert>
-            {failure}
-          </Notice>
-        )}
-        <Button type="submit" look="first" size="large" disabled={busy}>
-          Record the pour
-        </Button>
-      </form>
-    </Dialog>
+    <form
+      noValidate
+      className="grid gap-4"
+      onSubmit={(event) => {
+        event.preventDefault();
+        void record();
+      }}
+    >
+      <ReadBox
+        label="Volume in the vessel"
+        hint={
+          batch.volumeL === null ? undefined : `Planned ${format('volume', batch.volumeL, units)}`
+        }
+        now={volume}
+        fault={tried ? faults.volume : null}
+        onText={(text) => setVolume(rewrite(volume, text, units))}
+      />
+      <ReadBox
+        label="Original gravity, as read"
+        hint={batch.og === null ? undefined : `Planned ${format('gravity', batch.og, units)}`}
+        now={gravity}
+        fault={tried ? faults.gravity : null}
+        onText={(text) => setGravity(rewrite(gravity, text, units))}
+      />
+      <p className="text-body text-ink2">Leave a reading empty if you did not take it.</p>
+      {failure && (
+        <Notice kind="hold" alert>
+          {failure}
+        </Notice>
+      )}
+      <Button type="submit" look="first" size="large" disabled={busy}>
+        Record the pour
+      </Button>
+    </form>
   );
 }
 

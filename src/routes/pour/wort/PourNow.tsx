@@ -2,11 +2,11 @@ import { useState } from 'react';
 import { format } from '#shared/units/quantity.ts';
 import { askedOverride } from '#shared/pour/leave.ts';
 import { newId } from '../../../app/newId.ts';
+import { timeOf } from '../../../app/zonedTime.ts';
 import { Button } from '../../../components/ui/Button.tsx';
 import { Notice } from '../../../components/ui/Notice.tsx';
 import { useBoardView } from '../../board/view/BoardView.tsx';
 import { usePourView } from '../pourView.ts';
-import { clockTime } from '../words.ts';
 import { deviceTime, type DeviceTime } from './deviceTime.ts';
 import { PourDialog } from './PourDialog.tsx';
 import { ReasonForm } from './ReasonForm.tsx';
@@ -15,34 +15,28 @@ import { ReasonForm } from './ReasonForm.tsx';
 export function PourNow() {
   const { leave, mine } = usePourView();
   const { board } = useBoardView();
-  const [pouredAt, setPouredAt] = useState<DeviceTime | null>(null);
+  const [pressed, setPressed] = useState<{ at: DeviceTime; cleared: boolean } | null>(null);
+  // Leave may end while the form stands open: what counts is the moment of the pour.
+  const press = () => setPressed({ at: deviceTime(), cleared: leave !== null });
   if (!mine) return null;
   return (
     <div className="mt-3">
       {leave ? (
         <>
-          <Button
-            look="first"
-            size="large"
-            className="min-h-15 w-full text-lead!"
-            onClick={() => setPouredAt(deviceTime())}
-          >
+          <Button look="first" size="large" className="min-h-15 w-full text-lead!" onClick={press}>
             Pour now
           </Button>
           <p className="mt-1.5 text-body text-ink2">
             {leave.kind === 'override' && leave.answeredBy
               ? `${leave.answeredBy.name} lets it: ${leave.reason}. `
               : ''}
-            Leave holds until{' '}
-            {leave.expiresAt && clockTime(leave.expiresAt, board.brewery.timeZone)}.
+            Leave holds until {leave.expiresAt && timeOf(leave.expiresAt, board.brewery.timeZone)}.
           </p>
         </>
       ) : (
-        <Locked onPoured={() => setPouredAt(deviceTime())} />
+        <Locked onPoured={press} />
       )}
-      {pouredAt && (
-        <PourDialog at={pouredAt} cleared={leave !== null} onClose={() => setPouredAt(null)} />
-      )}
+      {pressed && <PourDialog {...pressed} onClose={() => setPressed(null)} />}
     </div>
   );
 }

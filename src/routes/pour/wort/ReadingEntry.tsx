@@ -1,5 +1,6 @@
 import { useId, useRef, useState } from 'react';
 import type { Typed } from '#shared/api/units.ts';
+import { sentenceOf } from '../../../api/errors.ts';
 import { newId } from '../../../app/newId.ts';
 import { FieldError } from '../../../components/form/FieldError.tsx';
 import { rewrite, written } from '../../../components/form/written.ts';
@@ -10,7 +11,7 @@ import { readingFault } from './readingFault.ts';
 
 /** A reading: a few digits and one tap. What was typed stays until the server has it. */
 export function ReadingEntry() {
-  const { run, busy, error, send } = usePourView();
+  const { run, busy, send } = usePourView();
   const { units } = useBoardView();
   const id = useId();
   const input = useRef<HTMLInputElement>(null);
@@ -29,11 +30,11 @@ export function ReadingEntry() {
       });
       // The next one may be typed by now.
       setDraft((then) => (then.text === now.text ? written('temperature', null, units) : then));
-    } catch {
-      // The sentence stands below; the digits stay in the field.
+    } catch (error) {
+      // The digits stay in the field.
+      setFault(sentenceOf(error));
     }
   };
-  const message = fault ?? error;
   return (
     <form
       noValidate
@@ -56,13 +57,13 @@ export function ReadingEntry() {
             enterKeyHint="done"
             autoComplete="off"
             value={now.text}
-            aria-invalid={message !== null}
+            aria-invalid={fault !== null}
             aria-describedby={`${id}-unit ${id}-why`}
             onChange={(event) => {
               setFault(null);
               setDraft(rewrite(now, event.target.value, units));
             }}
-            className={`min-h-15 w-full min-w-0 rounded-xl border-2 bg-white pr-24 pl-4 text-big font-bold tabular-nums ${message ? 'border-hold' : 'border-ink'}`}
+            className={`min-h-15 w-full min-w-0 rounded-xl border-2 bg-white pr-24 pl-4 text-big font-bold tabular-nums ${fault ? 'border-hold' : 'border-ink'}`}
             style={{ fontSize: '1.6rem' }}
           />
           <span
@@ -80,7 +81,7 @@ export function ReadingEntry() {
           Log
         </button>
       </div>
-      <FieldError id={`${id}-why`} message={message ?? undefined} />
+      <FieldError id={`${id}-why`} message={fault ?? undefined} />
     </form>
   );
 }

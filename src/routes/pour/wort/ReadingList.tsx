@@ -1,8 +1,8 @@
 import { format } from '#shared/units/quantity.ts';
+import { timeOf } from '../../../app/zonedTime.ts';
 import { Button } from '../../../components/ui/Button.tsx';
 import { useBoardView } from '../../board/view/BoardView.tsx';
 import { usePourView } from '../pourView.ts';
-import { clockTime } from '../words.ts';
 
 /** Every reading, newest first; a slip of the thumb is taken back. */
 export function ReadingList() {
@@ -18,7 +18,7 @@ export function ReadingList() {
         {run.readings.toReversed().map((reading) => (
           <li key={reading.id} className="flex items-center gap-3 text-touch">
             <span className={reading.withdrawn ? 'text-ink2 line-through' : ''}>
-              {clockTime(reading.at, board.brewery.timeZone)} ·{' '}
+              {timeOf(reading.at, board.brewery.timeZone)} ·{' '}
               {format('temperature', reading.c, units)} · {reading.by.name}
             </span>
             {mine && !reading.withdrawn && run.state === 'open' && (

@@ -2,7 +2,9 @@ import type { UnitPrefs } from '#shared/api/units.ts';
 import type { PourStanding } from '#shared/pour/standing.ts';
 import type { Verdict } from '#shared/rules/vocabulary.ts';
 import { format } from '#shared/units/quantity.ts';
-import { clockTime, inTime } from '../words.ts';
+import { lowered } from '../../../app/lowered.ts';
+import { timeOf } from '../../../app/zonedTime.ts';
+import { inTime } from '../words.ts';
 
 export interface SaidVerdict {
   verdict: Verdict;
@@ -24,13 +26,13 @@ export function sayVerdict(
   if (wort.verdict !== 'hold' && linkHolds[0])
     return {
       verdict: 'hold',
-      title: `Hold: ${lower(linkHolds[0].title)}`,
+      title: `Hold: ${lowered(linkHolds[0].title)}`,
       next: linkHolds[0].because,
     };
   if (!worst) return { verdict: 'pour', title: 'Pour: inside the window', next: null };
   return {
     verdict: wort.verdict,
-    title: `${TITLES[wort.verdict]}: ${lower(worst.title)}`,
+    title: `${TITLES[wort.verdict]}: ${lowered(worst.title)}`,
     next: readyWords(wort, now, timeZone) ?? worst.because,
   };
 }
@@ -42,7 +44,7 @@ export function readyWords(
   timeZone: string,
 ): string | null {
   if (!ready) return whyNot;
-  const time = (at: number) => clockTime(at, timeZone);
+  const time = (at: number) => timeOf(at, timeZone);
   const span = `${time(ready.earliest)} to ${time(ready.latest)}`;
   if (ready.at <= now)
     return `It should be in the window by now (${span}): stir, and read it again.`;
@@ -54,6 +56,3 @@ export const mixedWords = ({ wort }: PourStanding, units: UnitPrefs): string | n
   wort.mixedC === null
     ? null
     : `Together with the cake about ${format('temperature', wort.mixedC, units)}; the first cells meet the wort’s own temperature.`;
-
-const lower = (title: string) =>
-  /^[A-Z][a-z]/.test(title) ? title.charAt(0).toLowerCase() + title.slice(1) : title;
