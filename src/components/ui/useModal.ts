@@ -3,6 +3,15 @@ import { useEffect, useLayoutEffect, useRef } from 'react';
 /** Whether the page has a scrollbar, whose room is to stay while the page is held. */
 const hasGutter = () => window.innerWidth > document.documentElement.clientWidth;
 
+/** Back to where one was; where that is gone, to the page, not to its very beginning. */
+function focusAfter(opener: Element | null) {
+  const hasOpener = opener instanceof HTMLElement && opener.isConnected && opener !== document.body;
+  const next = hasOpener ? opener : document.getElementById('main');
+  if (!next) return;
+  if (!hasOpener && !next.hasAttribute('tabindex')) next.setAttribute('tabindex', '-1');
+  next.focus({ preventScroll: true });
+}
+
 /**
  * Opens the browser's own modal dialog over everything else, with the focus on its title. Every
  * way that the browser has to close it (Escape, back on a phone) asks `onLeave` instead.
@@ -31,8 +40,7 @@ export function useModal(onLeave: () => void) {
     return () => {
       modal.removeEventListener('close', reopen);
       modal.close();
-      if (opener instanceof HTMLElement && opener.isConnected)
-        opener.focus({ preventScroll: true });
+      focusAfter(opener);
     };
   }, []);
   return { dialog, title };

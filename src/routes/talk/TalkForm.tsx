@@ -1,6 +1,7 @@
 import { useId, useState } from 'react';
 import { LONGEST_COMMENT } from '#shared/api/comment.ts';
 import { sentenceOf } from '../../api/errors.ts';
+import { useUnsaved } from '../../app/unsaved.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { FieldError } from '../../components/form/FieldError.tsx';
 import { fieldClass } from '../../components/form/fieldClass.ts';
@@ -24,6 +25,7 @@ export function TalkForm(props: TalkFormProps) {
   const online = useOnline();
   const [text, setText] = useState(first);
   const [isTried, setTried] = useState(false);
+  useUnsaved(text.trim() !== '' && text !== first && !busy);
   const why = isTried ? whyNot(text) : null;
   const message = why ?? (error ? sentenceOf(error) : undefined);
   const send = () => {

@@ -8,6 +8,7 @@ import { VerdictPill } from '../../components/drawn/VerdictPill.tsx';
 import { LinkButton } from '../../components/ui/LinkButton.tsx';
 import { useBoardView } from '../board/view/BoardView.tsx';
 import { drawnVessel } from '../board/view/drawing.ts';
+import { countedFindings } from '../board/view/words.ts';
 import { dutyWords } from './dutyWords.ts';
 
 interface DutyCardProps {
@@ -38,7 +39,12 @@ export function DutyCard({ duty, today, dated, isFirst = false }: DutyCardProps)
           {words.because !== '' && <p className="mt-1 text-ink2">{words.because}</p>}
           {link && (
             <p className="mt-2">
-              <VerdictPill verdict={link.verdict} findings={link.findings.length} large />
+              <VerdictPill
+                verdict={link.verdict}
+                findings={countedFindings(link)}
+                unchecked={link.unchecked.length}
+                large
+              />
             </p>
           )}
           {words.caution && <p className="mt-1 text-small text-ink2">{words.caution}</p>}

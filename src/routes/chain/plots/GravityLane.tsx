@@ -1,5 +1,6 @@
 import type { Course, CoursePoint } from '#shared/chain/course.ts';
 import { flatBeer } from '../../../components/drawn/beerPaint.ts';
+import { VerdictMark } from '../../../components/drawn/VerdictMark.tsx';
 import { useBoardView } from '../../board/view/BoardView.tsx';
 import { gravityStep, gravityText } from '../../board/view/words.ts';
 import { betweenOf, middleOf } from '../columns.ts';
@@ -8,6 +9,7 @@ import { Lane, type LaneOf } from './Lane.tsx';
 import { scaleOf, type Scale } from './scales.ts';
 
 const HEIGHT = 120;
+const MARK = 14;
 
 /** From original to final gravity, a bar of the beer's colour for each batch. */
 export function GravityLane({ course, whole = course }: LaneOf) {
@@ -65,11 +67,25 @@ function Steps({ course: { points, steps } }: { course: Course }) {
     const jumps = link.findings.find(
       ({ rule }) => rule === 'gravity-jump' || rule === 'strong-before-weak',
     );
+    const x = betweenOf(place - 1) + 9;
     const tone = jumps ? (jumps.verdict === 'hold' ? 'fill-hold' : 'fill-mind') : 'fill-ink2';
     return (
-      <Label key={laterId} x={betweenOf(place - 1) + 9} y={20} className={tone}>
-        {gravityStep(earlier, later, units)}
-      </Label>
+      <g key={laterId}>
+        {jumps && <StepMark x={x} verdict={jumps.verdict} />}
+        <Label x={jumps ? x + MARK + 4 : x} y={20} className={tone}>
+          {gravityStep(earlier, later, units)}
+        </Label>
+      </g>
     );
   });
 }
+
+/** The verdict by its shape too, for whoever does not see the colour. */
+const StepMark = ({ x, verdict }: { x: number; verdict: 'mind' | 'hold' }) => (
+  <g
+    transform={`translate(${x} ${20 - MARK + 1})`}
+    className={verdict === 'hold' ? 'text-hold' : 'text-mind'}
+  >
+    <VerdictMark verdict={verdict} size={MARK} />
+  </g>
+);
