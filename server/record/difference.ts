@@ -12,6 +12,8 @@ export interface EditSide {
   shelves?: readonly string[];
   /** By batch: which link it was that was accepted. */
   accepted?: Readonly<Record<string, string>>;
+  /** It happened, and is not undone. */
+  stays?: true;
 }
 
 export interface Difference {

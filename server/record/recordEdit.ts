@@ -16,6 +16,8 @@ export interface Said {
   /** Each fact that changed, for the record page. */
   facts?: readonly FactChange[];
   touches: readonly string[];
+  /** It happened, and is not undone. */
+  stays?: true;
   /** Where something changed that is no row of the board. */
   before?: unknown;
   after?: unknown;
@@ -33,7 +35,7 @@ export async function recordEdit(
   before: Stage,
   after: Stage,
 ): Promise<void> {
-  const { facts, ...entry } = said;
+  const { facts, stays, ...entry } = said;
   const difference = differenceOf(before.rows, after.rows);
   if (difference.isEmpty && said.before === undefined && said.after === undefined) return;
   const sides = difference.isEmpty
@@ -45,6 +47,7 @@ export async function recordEdit(
           ...accepted(difference.after, after.board),
           links: linkChanges(before.board, after.board, member.brewery.units),
           ...(facts && facts.length > 0 && { facts }),
+          ...(stays && { stays }),
         },
       };
   const shelves = shelvesOf(difference.touches, before.board, after.board);

@@ -8,16 +8,21 @@ export const newestReading = (
   run.readings.findLast((one) => !one.withdrawn && Date.parse(one.at) <= at);
 
 /**
- * The leave that holds at a moment, or null: of the newest reading, or a head brewer's. A temperature
- * that kills ends every leave.
+ * The leave that holds at a moment, or null: of the newest reading, or a head brewer's.
+ * @param ended whether something holds that ends every leave (`endsLeave`).
  */
-export function leaveAt(run: PourRun, at: number, kills: boolean): PourClearance | null {
+export function leaveAt(
+  run: Pick<PourRun, 'readings' | 'clearances'>,
+  at: number,
+  ended: boolean,
+): PourClearance | null {
+  if (ended) return null;
   const newest = newestReading(run, at);
   const holds = ({ kind, answer, answeredAt, expiresAt, readingId }: PourClearance): boolean => {
     if (answer !== 'granted' || answeredAt === null || expiresAt === null) return false;
     if (at > Date.parse(expiresAt)) return false;
     if (kind === 'reading') return newest !== undefined && newest.id === readingId;
-    return !kills && Date.parse(answeredAt) <= at;
+    return Date.parse(answeredAt) <= at;
   };
   return run.clearances.findLast(holds) ?? null;
 }

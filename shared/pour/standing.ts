@@ -65,6 +65,15 @@ export function pourStanding(moment: PourMoment): PourStanding | null {
   };
 }
 
+/**
+ * True of what ends every leave, also one that was given before it was there: a temperature that
+ * kills, or a hold of the link that nobody may take on. A reading that grew old does not: leave has
+ * a time of its own.
+ */
+export const endsLeave = ({ wort, linkHolds }: Pick<PourStanding, 'wort' | 'linkHolds'>): boolean =>
+  wort.findings.some(({ rule }) => rule === 'kills-yeast') ||
+  linkHolds.some(({ rule }) => NEVER_ACCEPTED.includes(rule));
+
 const linkVerdict = (link: JudgedLink | null, holds: readonly Finding[]): Verdict =>
   holds.length > 0 ? 'hold' : link && link.verdict !== 'pour' ? 'mind' : 'pour';
 

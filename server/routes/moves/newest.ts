@@ -11,7 +11,7 @@ const REACH = 200;
 
 /**
  * The newest of somebody's own moves and edits that stands (to be undone), and the one that was undone last
- * (to be redone). A new change of one's own ends the redoing.
+ * (to be redone). A new change of one's own ends the redoing. What happened stays: a pour is neither.
  */
 export async function newestOwn(
   db: Db | Tx,
@@ -26,7 +26,7 @@ export async function newestOwn(
         select u.kind, u.seq from change u where u.of_change = c.id order by u.seq desc limit 1
       ) last on true
       where c.season_id = ${seasonId} and c.person_id = ${personId}
-        and (c.kind = 'move' or (c.kind = 'edit' and c.after ? 'rows'))
+        and (c.kind = 'move' or (c.kind = 'edit' and c.after ? 'rows' and not c.after ? 'stays'))
       order by c.seq desc limit ${REACH}
     ), newest as (
       select max(seq) as seq from change

@@ -1,16 +1,13 @@
 import { and, eq, sql } from 'drizzle-orm';
 import type { OverrideAnswer, OverrideRequest } from '#shared/api/pour.ts';
 import { rulesOf } from '#shared/chain/boardLink.ts';
-import { NEVER_OVERRIDDEN } from '#shared/pour/vocabulary.ts';
 import { objectionsOf, type PourStanding } from '#shared/pour/standing.ts';
 import { pourClearance } from '../../db/schema/pour.ts';
 import { demandMade } from '../../http/create.ts';
 import { canAcceptHolds } from '../../policies.ts';
 import { notFound, problem } from '../../problems.ts';
 import { one } from '../board/find.ts';
-import type { ClearanceRow } from './rows.ts';
 import { countedUntil, demandOpenRun, standingAt, type RunCommand, type Scene } from './scene.ts';
-import { happenedAt } from './times.ts';
 
 const MINUTE = 60_000;
 
@@ -98,29 +95,6 @@ function demandOverridable(standing: PourStanding): void {
     detail: `Nobody can override this: ${hold?.because ?? 'something holds'}`,
     current,
   });
-}
-
-/** Whether a clearance gives leave at a moment, as things stood then. */
-export function holdsAt(
-  scene: Scene,
-  row: ClearanceRow,
-  at: Date,
-  standing: PourStanding,
-): boolean {
-  const until = row.expiresAt;
-  if (row.answer !== 'granted' || row.answeredAt === null || until === null || at > until)
-    return false;
-  const newest = countedUntil(scene.readings, at).at(-1);
-  if (row.kind === 'reading') return newest !== undefined && newest.id === row.readingId;
-  const since = happenedAt({
-    deviceAt: row.answeredAt,
-    clockOffsetMs: 0,
-    arrivedAt: row.answeredAt,
-  });
-  const never = standing.wort.findings.some(
-    ({ rule }) => rule === 'kills-yeast' && NEVER_OVERRIDDEN.includes(rule),
-  );
-  return since <= at && !never;
 }
 
 const nameIn = ({ hand, run }: Scene): string => one(hand.board.batches, run.batchId).name;

@@ -2,7 +2,8 @@ import { eq, sql } from 'drizzle-orm';
 import type { PourRequest } from '#shared/api/pour.ts';
 import type { Batch } from '#shared/api/batch.ts';
 import { judgeBoard } from '#shared/chain/judgeBoard.ts';
-import { objectionsOf } from '#shared/pour/standing.ts';
+import { leaveAt } from '#shared/pour/leave.ts';
+import { endsLeave, objectionsOf } from '#shared/pour/standing.ts';
 import { format } from '#shared/units/quantity.ts';
 import { surplus } from '../../db/schema/cake.ts';
 import { pourEvent, pourRun } from '../../db/schema/pour.ts';
@@ -12,8 +13,7 @@ import { dayIn } from '../../today.ts';
 import { renewFollowed } from '../batch-record/followed.ts';
 import { setStage } from '../batches/stage.ts';
 import { one } from '../board/find.ts';
-import { holdsAt } from './clearance.ts';
-import type { Judgement } from './present.ts';
+import { presentRun, type Judgement } from './present.ts';
 import { countedUntil, standingAt, type RunCommand, type Scene } from './scene.ts';
 import { asTold, happenedAt } from './times.ts';
 
@@ -39,6 +39,7 @@ export const recordPour =
     await renewFollowed(hand.tx, run.batchId);
     await putBy(scene, body, at);
     return {
+      stays: true,
       what: sentence(scene, batch, judged, clearanceId !== null),
       touches: [run.batchId, ...(run.cakeBatchId ? [run.cakeBatchId] : [])],
       before: null,
@@ -84,7 +85,8 @@ async function insertPour(
 
 function judgedAt(scene: Scene, at: Date): Judged {
   const standing = standingAt(scene, at);
-  const leave = scene.clearances.findLast((row) => holdsAt(scene, row, at, standing));
+  const run = presentRun(scene, (personId) => personId);
+  const leave = leaveAt(run, at.getTime(), endsLeave(standing));
   return {
     judged: {
       verdict: standing.verdict,
@@ -99,7 +101,9 @@ function judgedAt(scene: Scene, at: Date): Judged {
 async function brew({ hand }: Scene, batch: Batch, body: PourRequest, at: Date): Promise<void> {
   if (batch.stage !== 'pencilled' && batch.stage !== 'fermenting') return;
   const brewedOn = dayIn(hand.member.brewery.timeZone, at);
-  const { volumeL, og } = body;
+  // What was read by hand meanwhile stands where the pour says nothing of it.
+  const volumeL = body.volumeL ?? batch.read.volumeL;
+  const og = body.og ?? batch.read.og;
   await setStage(batch.id, batch.version, { stage: 'fermenting', brewedOn, volumeL, og })(hand);
 }
 
