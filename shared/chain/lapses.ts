@@ -43,13 +43,21 @@ function gist(input: LinkInput): string {
     pour: pourFacts,
     shared: sharedWith.map(({ litres }) => litres),
     taken: board?.vesselTakenBy !== undefined,
-    cakeCheck: board?.cakeCheck,
+    cakeCheck: spoken(board?.cakeCheck),
     untilTaken: between(brewedOn, takenOn),
     untilBrewed: between(brewedOn, brewOn),
     // With no day to count from, the day itself is the fact.
     days: brewedOn === undefined ? [takenOn, brewOn] : [],
   });
 }
+
+/** Readings of which none warns say no more than none. */
+const spoken = (check: NonNullable<LinkInput['board']>['cakeCheck']) =>
+  check && {
+    ...check,
+    fermentationStuck: check.fermentationStuck || undefined,
+    noticed: check.noticed?.length ? check.noticed : undefined,
+  };
 
 const between = (from: string | undefined, to: string | undefined): number | null =>
   from === undefined || to === undefined ? null : daysBetween(from, to);

@@ -57,7 +57,8 @@ export const editEvent = (
       .set({
         ...body,
         doneAt: done,
-        doneBy: done && member.person.id,
+        // Whoever did it stays who did it, whoever mends its words.
+        doneBy: done && sql`coalesce(${batchEvent.doneBy}, ${member.person.id})`,
         editedAt: writing.now,
         version: sql`${batchEvent.version} + 1`,
       })

@@ -8,6 +8,8 @@ import { demandMade, isRepeated } from '../../http/create.ts';
 import { demandVersion } from '../../http/etag.ts';
 import { invalidField, notFound } from '../../problems.ts';
 import { dayIn } from '../../today.ts';
+import { readBoard } from '../board/changeBoard.ts';
+import { withoutLapsed } from '../board/lapsed.ts';
 import { readingOf } from './find.ts';
 import { renewFollowed } from './followed.ts';
 import { presentReading } from './present.ts';
@@ -25,21 +27,20 @@ export const addReading = (
     if (isRepeated(known, { ...body, takenAt: iso(body.takenAt) }))
       return { result: known, said: null };
     const columns = await columnsOf(writing, body);
-    const made = await tx
-      .insert(reading)
-      .values({
-        ...columns,
-        id: body.id,
-        breweryId: member.brewery.id,
-        batchId: batch.id,
-        personId: member.person.id,
-        createdAt: now,
-      })
-      .onConflictDoNothing({ target: reading.id })
-      .returning({ id: reading.id });
-    demandMade(made);
-    await renewFollowed(tx, batch.id);
-    return said(writing, null, await one(writing, body.id));
+    const row = {
+      ...columns,
+      id: body.id,
+      breweryId: member.brewery.id,
+      batchId: batch.id,
+      personId: member.person.id,
+      createdAt: now,
+    };
+    const lapsed = await follow(writing, async () => {
+      const insert = tx.insert(reading).values(row);
+      const made = await insert.onConflictDoNothing({ target: reading.id }).returning();
+      demandMade(made);
+    });
+    return said(writing, null, await one(writing, body.id), lapsed);
   });
 
 export const editReading = (
@@ -49,16 +50,17 @@ export const editReading = (
   body: ReadingWrite,
 ): Promise<Reading> =>
   onBatch(scene, member, batchId, async (writing) => {
-    const { tx, batch, now } = writing;
+    const { tx, now } = writing;
     const before = await one(writing, id);
     demandVersion(version, before.version, before);
-    const columns = await columnsOf(writing, body);
-    await tx
-      .update(reading)
-      .set({ ...columns, editedAt: now, version: sql`${reading.version} + 1` })
-      .where(eq(reading.id, id));
-    await renewFollowed(tx, batch.id);
-    return said(writing, before, await one(writing, id));
+    const columns = await columnsOf(writing, body, before);
+    const lapsed = await follow(writing, () =>
+      tx
+        .update(reading)
+        .set({ ...columns, editedAt: now, version: sql`${reading.version} + 1` })
+        .where(eq(reading.id, id)),
+    );
+    return said(writing, before, await one(writing, id), lapsed);
   });
 
 export const removeReading = (
@@ -70,10 +72,9 @@ export const removeReading = (
     const { tx, batch } = writing;
     const before = await one(writing, id);
     demandVersion(version, before.version, before);
-    await tx.delete(reading).where(eq(reading.id, id));
-    await renewFollowed(tx, batch.id);
+    const touches = await follow(writing, () => tx.delete(reading).where(eq(reading.id, id)));
     const what = tellReading(member.brewery.units, batch.name, before, null);
-    return { result: null, said: { what, before, after: null } };
+    return { result: null, said: { what, before, after: null, touches } };
   });
 
 const iso = (at: string) => new Date(at).toISOString();
@@ -89,22 +90,53 @@ async function one(writing: Writing, id: string): Promise<Reading> {
   return row;
 }
 
-function said({ member, batch }: Writing, before: Reading | null, after: Reading) {
+function said(
+  { member, batch }: Writing,
+  before: Reading | null,
+  after: Reading,
+  touches: readonly string[],
+) {
   const what = tellReading(member.brewery.units, batch.name, before, after);
-  return { result: after, said: { what, before, after } };
+  return { result: after, said: { what, before, after, touches } };
 }
 
-/** The row's columns, the corrected value worked out here: nobody's word is taken for it. */
-async function columnsOf(writing: Writing, body: ReadingWrite) {
+/**
+ * Writes a reading, with what the batch's readings come to. The next link rests on that: an
+ * acceptance of it as it was lapses.
+ * @returns the batches whose acceptance lapsed.
+ */
+async function follow({ tx, member, batch, now }: Writing, write: () => Promise<unknown>) {
+  const where = { ...member, seasonId: batch.seasonId };
+  const before = await readBoard(tx, where, now);
+  await write();
+  await renewFollowed(tx, batch.id);
+  const after = await readBoard(tx, where, now);
+  const left = await withoutLapsed(tx, before, after);
+  return left.batches.flatMap(({ id }, at) => (left.batches[at] === after.batches[at] ? [] : [id]));
+}
+
+/**
+ * The row's columns, the corrected value worked out here: nobody's word is taken for it. A reading
+ * that says the same keeps its value: an instrument's correction counts for what is read with it
+ * from then on.
+ */
+async function columnsOf(writing: Writing, body: ReadingWrite, before: Reading | null = null) {
   demandTime(writing, body);
   const fault = sampleFault(body.sampleC);
   if (fault) throw invalidField('/sampleC', fault);
   const used = await instrumentOf(writing, body);
   const { kind, method, shown, sampleC, instrumentId, notes, typed } = body;
-  const value = corrected(body, used);
+  const value = before && saysTheSame(before, body) ? before.value : corrected(body, used);
   const takenAt = new Date(body.takenAt);
   return { kind, method, shown, sampleC, instrumentId, notes, typed, value, takenAt };
 }
+
+const saysTheSame = (a: ReadingWrite, b: ReadingWrite): boolean =>
+  a.kind === b.kind &&
+  a.method === b.method &&
+  a.shown === b.shown &&
+  a.sampleC === b.sampleC &&
+  a.instrumentId === b.instrumentId;
 
 function corrected(body: ReadingWrite, used: typeof instrument.$inferSelect | null): number {
   try {

@@ -53,7 +53,13 @@ export interface Writing {
 /** What was written, and the line of the change record that says so; null: it stood already. */
 export interface Written<T> {
   result: T;
-  said: { what: string; before: unknown; after: unknown } | null;
+  said: {
+    what: string;
+    before: unknown;
+    after: unknown;
+    /** Rows that it changed beside the batch. */
+    touches?: readonly string[];
+  } | null;
 }
 
 /**
@@ -78,7 +84,8 @@ export function onBatch<T>(
     const { result, said } = await write({ tx, member, batch: row, now });
     if (!said) return result;
     await raiseRevision(tx, row.seasonId);
-    const touches = [row.id, ...(row.chainId === null ? [] : [row.chainId])];
+    const shelf = row.chainId === null ? [] : [row.chainId];
+    const touches = [row.id, ...shelf, ...(said.touches ?? [])];
     const where = { ...member, seasonId: row.seasonId };
     await writeEntry(tx, where, now, { kind: 'edit', ...said, touches });
     return result;
