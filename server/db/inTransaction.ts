@@ -9,6 +9,11 @@ const TRIES = 6;
 /** Thrown by a command that finds its rows changed under it: it is run again. */
 export class RowsMoved extends Error {}
 
+/** Of a write that names the version it was made from: somebody else may have been first. */
+export function demandWritten(rows: readonly unknown[]): void {
+  if (rows.length === 0) throw new RowsMoved();
+}
+
 function met(error: unknown): boolean {
   if (error instanceof RowsMoved) return true;
   const cause = error instanceof Error && error.cause instanceof Error ? error.cause : error;

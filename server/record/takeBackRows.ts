@@ -13,7 +13,7 @@ export type TakenBack = { ok: true; next: Snapshot } | Refused;
  * something of later date could not stand any more.
  */
 export function takeBackRows(now: Snapshot, from: EditSide, to: EditSide): TakenBack {
-  const changed = changedSince(now, from) ?? readSince(now, to);
+  const changed = changedSince(now, from);
   if (changed) return changed;
   const rows = Object.fromEntries(
     TABLE_NAMES.map((name) => [name, tableWith(now.rows[name], name, to)]),
@@ -39,16 +39,6 @@ function changedSince(now: Snapshot, from: EditSide): Refused | null {
       const about = OF_BATCH.has(name) ? now.rows.batch.get(id) : (is ?? was);
       if (!sameRow(was, is)) return refuse(sinceWords(name, about ?? null, was, is), id);
     }
-  return null;
-}
-
-/** A batch that would go with what was read of it. */
-function readSince(now: Snapshot, to: EditSide): Refused | null {
-  for (const [id, row] of Object.entries(to.rows.batch ?? {})) {
-    const is = now.rows.batch.get(id);
-    if (row === null && is?.followed)
-      return refuse(`${nameOf('batch', is)} has readings since`, id);
-  }
   return null;
 }
 

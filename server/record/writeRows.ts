@@ -1,6 +1,7 @@
 import { eq, sql, type SQL } from 'drizzle-orm';
 import { isDeepStrictEqual } from 'node:util';
 import type { Tx } from '../db/client.ts';
+import { RowsMoved } from '../db/inTransaction.ts';
 import { blockedDay } from '../db/schema/season.ts';
 import { differenceOf } from './difference.ts';
 import type { Row, Snapshot } from './snapshot.ts';
@@ -21,7 +22,7 @@ export async function writeRows(tx: Tx, now: Snapshot, next: Snapshot): Promise<
   await writePlaces(tx, now, next);
   for (const name of TABLE_NAMES.toReversed())
     for (const [id, row] of Object.entries(after.rows[name] ?? {}))
-      if (!row) await deleteRow(tx, name, id);
+      if (!row) await deleteRow(tx, name, id, now.rows[name].get(id));
 }
 
 /** Written with the rest: a check says that the scrapped stand nowhere, and only they. */
@@ -49,8 +50,11 @@ async function writeRow(
     const sets: SQL[] = columns.map((c) => sql`${sql.identifier(c)} = r.${sql.identifier(c)}`);
     if (known.has('version')) sets.push(sql`version = ${sql.identifier(name)}.version + 1`);
     if (sets.length > 0)
-      await tx.execute(sql`update ${sql.identifier(name)} set ${sql.join(sets, sql`, `)}
-        from ${values} r where ${keyIs(name, id)}`);
+      await demandSeen(
+        tx,
+        sql`update ${sql.identifier(name)} set ${sql.join(sets, sql`, `)}
+          from ${values} r where ${keyIs(name, id)}${versionIs(name, was)}`,
+      );
   }
   if (name === 'season' && Array.isArray(changes.blocked_days))
     await writeBlockedDays(tx, id, changes.blocked_days.map(String));
@@ -64,13 +68,27 @@ const asRecord = (name: TableName, row: Row) =>
 const keyIs = (name: TableName, id: string) =>
   sql`${sql.identifier(name)}.${sql.identifier(TABLES[name].key)} = ${id}::uuid`;
 
+/** Of a table with versions: the row as the snapshot has it. */
+const versionIs = (name: TableName, row: Row | undefined) =>
+  columnsOf(name).has('version')
+    ? sql` and ${sql.identifier(name)}.version = ${Number(row?.version)}`
+    : sql``;
+
+/** What all seasons share may be edited from another one, under other locks. */
+async function demandSeen(tx: Tx, write: SQL): Promise<void> {
+  const { rowCount } = await tx.execute(write);
+  if (rowCount === 0) throw new RowsMoved();
+}
+
 /** A line that another shelf took over stays. */
-async function deleteRow(tx: Tx, name: TableName, id: string): Promise<void> {
+async function deleteRow(tx: Tx, name: TableName, id: string, was: Row | undefined): Promise<void> {
   const spare =
     name === 'yeast_line'
       ? sql` and not exists (select 1 from chain where line_id = ${id}::uuid)`
       : sql``;
-  await tx.execute(sql`delete from ${sql.identifier(name)} where ${keyIs(name, id)}${spare}`);
+  const gone = sql`delete from ${sql.identifier(name)} where ${keyIs(name, id)}${spare}${versionIs(name, was)}`;
+  if (name === 'yeast_line') await tx.execute(gone);
+  else await demandSeen(tx, gone);
 }
 
 async function writeBlockedDays(tx: Tx, seasonId: string, days: readonly string[]) {

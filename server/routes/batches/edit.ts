@@ -14,7 +14,9 @@ import { merged } from '../../http/patch.ts';
 import { problem } from '../../problems.ts';
 import type { Command } from '../board/changeBoard.ts';
 import { demandStock, one } from '../board/find.ts';
+import { demandNothingHangs } from '../board/hanging.ts';
 import { sayerOf } from '../board/sayer.ts';
+import { demandNoPour } from '../pour/onRecord.ts';
 import { demandPart } from './part.ts';
 import { closeUp, endOf, linkColumns, writeBatch } from './rows.ts';
 
@@ -77,7 +79,7 @@ export const editLink =
     return { ...tellLink(sayerOf(hand), row.name, row.link, link), touches: [id] };
   };
 
-/** Only what was never brewed can be deleted; the rest is scrapped, and stays on the record. */
+/** Only what was never brewed, and of which nothing was written, can be deleted; the rest is scrapped. */
 export const removeBatch =
   (id: string, version: number): Command =>
   async (hand) => {
@@ -86,8 +88,8 @@ export const removeBatch =
     demandVersion(version, row.version, row);
     if (row.stage === 'fermenting' || row.stage === 'racked')
       throw problem('in-use', { detail: `${row.name} has been brewed: scrap it instead` });
-    if (row.followed)
-      throw problem('in-use', { detail: `${row.name} has readings, which would go with it` });
+    await demandNoPour(tx, [id]);
+    await demandNothingHangs(hand, [id]);
     demandNoBranch(board.chains, row);
     if (row.stage !== 'scrapped') await closeUp(hand, row);
     await tx.delete(batch).where(and(eq(batch.seasonId, board.season.id), eq(batch.id, id)));

@@ -7,6 +7,7 @@ import type { Command } from '../board/changeBoard.ts';
 import type { Hand } from '../board/hand.ts';
 import { one } from '../board/find.ts';
 import { sayerOf } from '../board/sayer.ts';
+import { demandNoPour } from '../pour/onRecord.ts';
 import { dropCake, setCake } from './cakes.ts';
 import { demandNoBranch } from './edit.ts';
 import { closeUp, endOf, linkColumns, writeBatch } from './rows.ts';
@@ -78,6 +79,7 @@ async function rack(hand: Hand, row: Batch, wish: Racked): Promise<void> {
 async function pencil(hand: Hand, row: Batch): Promise<void> {
   const index = indexBoard(hand.board);
   demandNothingPoured(index, row);
+  await demandNoPour(hand.tx, [row.id]);
   const before = index.predecessor(row.id);
   await writeBatch(hand.tx, hand.board, row.id, {
     stage: 'pencilled',

@@ -1,22 +1,23 @@
-import { and, eq, inArray, sql } from 'drizzle-orm';
 import type { Member } from '../../auth/whoAsks.ts';
 import type { Tx } from '../../db/client.ts';
 import { inTransaction } from '../../db/inTransaction.ts';
-import { batch } from '../../db/schema/chain.ts';
 import type { Deps } from '../../deps.ts';
-import { lapses } from '#shared/chain/lapses.ts';
 import { notFound, problem } from '../../problems.ts';
 import { recordEdit, type Said } from '../../record/recordEdit.ts';
 import { takeSnapshot } from '../../record/snapshot.ts';
 import { dayIn } from '../../today.ts';
+import { demandNotInHand, poursInHand } from '../pour/inHand.ts';
 import type { BoardNow, Hand } from './hand.ts';
+import { withoutLapsed } from './lapsed.ts';
 import { loadBoardRows } from './load.ts';
-import { lockSeason, lockShelves } from './locks.ts';
-import { isOfAllSeasons, tellOtherSeasons } from './otherSeasons.ts';
+import { lockFor, type Reach } from './locks.ts';
+import { isOfAllSeasons, settleOtherSeasons } from './otherSeasons.ts';
 import { raiseRevision } from './record.ts';
 
 /** Null: there was nothing to change. */
 export type Command = (hand: Hand) => Promise<Said | null>;
+
+type Scene = Pick<Deps, 'db' | 'clock'>;
 
 /**
  * Runs an edit of anything on a season's board: under the locks, with the acceptances that it made
@@ -25,39 +26,64 @@ export type Command = (hand: Hand) => Promise<Said | null>;
  * @param may whether it may be of a season that is put away.
  * @returns the board as the edit left it.
  */
-export async function changeBoard(
-  deps: Pick<Deps, 'db' | 'clock'>,
+export function changeBoard(
+  deps: Scene,
   member: Member,
   shelves: readonly string[] | 'all',
   command: Command,
   may: 'open' | 'archived-too' = 'open',
 ): Promise<BoardNow> {
-  const { before, after } = await inTransaction(deps.db, async (tx) => {
-    await lockShelves(tx, member.seasonId, shelves);
-    await lockSeason(tx, member.seasonId);
-    const now = deps.clock.now();
+  return change(deps, member, { shelves, may, reach: 'season' }, command);
+}
+
+/**
+ * Runs an edit of what the boards of all seasons show: yeasts, vessels, house rules and the brewery
+ * itself. All seasons are locked, so that two who edit from different ones see each other.
+ */
+export function changeShared(
+  deps: Scene,
+  member: Member,
+  command: Command,
+  shelves: readonly string[] | 'all' = [],
+): Promise<BoardNow> {
+  return change(deps, member, { shelves, may: 'open', reach: 'all-seasons' }, command);
+}
+
+interface Scope {
+  shelves: readonly string[] | 'all';
+  may: 'open' | 'archived-too';
+  reach: Reach;
+}
+
+function change(
+  { db, clock }: Scene,
+  member: Member,
+  { shelves, may, reach }: Scope,
+  command: Command,
+): Promise<BoardNow> {
+  const where = { breweryId: member.brewery.id, seasonId: member.seasonId };
+  return inTransaction(db, async (tx) => {
+    await lockFor(tx, where, shelves, reach);
+    const now = clock.now();
     const board = await readBoard(tx, member, now);
     if (may === 'open') demandOpen(board);
-    return { before: board, after: await carryOut({ tx, member, board, now }, command) };
+    return carryOut({ tx, member, board, now }, command);
   });
-  if (isOfAllSeasons(before, after)) await tellOtherSeasons(deps.db, member);
-  return after;
 }
 
 async function carryOut(hand: Hand, command: Command): Promise<BoardNow> {
   const { tx, member, board, now } = hand;
   const where = { breweryId: member.brewery.id, seasonId: member.seasonId };
   const rows = await takeSnapshot(tx, where);
+  const inHand = await poursInHand(tx, board);
   const said = await command(hand);
   if (!said) return board;
   await raiseRevision(tx, member.seasonId);
   const after = await withoutLapsed(tx, board, await readBoard(tx, member, now));
-  await recordEdit(
-    { tx, member, now },
-    { kind: 'edit', ...said },
-    { board, rows },
-    { board: after, rows: await takeSnapshot(tx, where) },
-  );
+  demandNotInHand(hand, inHand, after);
+  const left = { board: after, rows: await takeSnapshot(tx, where) };
+  await recordEdit({ tx, member, now }, { kind: 'edit', ...said }, { board, rows }, left);
+  if (isOfAllSeasons(rows, left.rows)) await settleOtherSeasons(hand, after, said.what);
   return after;
 }
 
@@ -73,28 +99,4 @@ export function demandOpen({ season }: { season: { isArchived: boolean } }): voi
     throw problem('season-archived', {
       detail: 'Take it out of the archive to change something on it',
     });
-}
-
-/**
- * An acceptance speaks of the link as it was; where that changed it is taken away.
- * @param kept batches whose acceptance was just given back, and speaks of the link as it is.
- */
-export async function withoutLapsed(
-  tx: Tx,
-  before: BoardNow,
-  after: BoardNow,
-  kept: ReadonlySet<string> = new Set(),
-): Promise<BoardNow> {
-  const lapsed = lapses(before, after).filter((id) => !kept.has(id));
-  if (lapsed.length === 0) return after;
-  await tx
-    .update(batch)
-    .set({ acceptance: null, version: sql`${batch.version} + 1` })
-    .where(and(eq(batch.seasonId, after.season.id), inArray(batch.id, lapsed)));
-  const batches = after.batches.map((row) =>
-    lapsed.includes(row.id)
-      ? { ...row, version: row.version + 1, link: { ...row.link, acceptance: null } }
-      : row,
-  );
-  return { ...after, batches };
 }

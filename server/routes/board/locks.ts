@@ -1,5 +1,6 @@
 import { and, asc, eq, inArray } from 'drizzle-orm';
 import type { Tx } from '../../db/client.ts';
+import { brewery } from '../../db/schema/brewery.ts';
 import { chain } from '../../db/schema/chain.ts';
 import { season } from '../../db/schema/season.ts';
 
@@ -28,5 +29,38 @@ export async function lockSeason(tx: Tx, seasonId: string): Promise<void> {
     .select({ id: season.id })
     .from(season)
     .where(eq(season.id, seasonId))
+    .for('no key update');
+}
+
+/** Locks what every change of a membership, and of what all seasons share, takes first. */
+export async function lockBrewery(tx: Tx, breweryId: string): Promise<void> {
+  await tx
+    .select({ id: brewery.id })
+    .from(brewery)
+    .where(eq(brewery.id, breweryId))
+    .for('no key update');
+}
+
+/** What a change reaches: one season's board, or also what the boards of all seasons show. */
+export type Reach = 'season' | 'all-seasons';
+
+/**
+ * The locks of a change, in the one order in which all take them: brewery, shelves, then seasons by
+ * their ids.
+ */
+export async function lockFor(
+  tx: Tx,
+  { breweryId, seasonId }: { breweryId: string; seasonId: string },
+  shelves: readonly string[] | 'all',
+  reach: Reach,
+): Promise<void> {
+  if (reach === 'all-seasons') await lockBrewery(tx, breweryId);
+  await lockShelves(tx, seasonId, shelves);
+  if (reach === 'season') return lockSeason(tx, seasonId);
+  await tx
+    .select({ id: season.id })
+    .from(season)
+    .where(eq(season.breweryId, breweryId))
+    .orderBy(asc(season.id))
     .for('no key update');
 }

@@ -6,8 +6,7 @@ import { pathOf } from '../../http/pathOf.ts';
 import { forMember } from '../../http/route.ts';
 import { canEditSeason, canRead } from '../../policies.ts';
 import { notFound } from '../../problems.ts';
-import { changeBoard } from '../board/changeBoard.ts';
-import { tellOtherSeasons } from '../board/otherSeasons.ts';
+import { changeShared } from '../board/changeBoard.ts';
 import { editBrewery } from './edit.ts';
 import { makeBreweryRoute } from './make.ts';
 import { presentBrewery } from './present.ts';
@@ -45,8 +44,7 @@ const edit = forMember(
   canEditSeason,
   async (asked, member) => {
     const { body, version } = asked;
-    await changeBoard(asked, member, [], editBrewery(version, body));
-    await tellOtherSeasons(asked.db, member);
+    await changeShared(asked, member, editBrewery(version, body));
     const [row] = await asked.db.select().from(brewery).where(eq(brewery.id, member.brewery.id));
     if (!row) throw notFound();
     return { body: presentBrewery(row), version: row.version };

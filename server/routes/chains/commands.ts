@@ -12,6 +12,7 @@ import { endOf, linkColumns, matesOn, writeBatch } from '../batches/rows.ts';
 import type { Command } from '../board/changeBoard.ts';
 import type { Hand } from '../board/hand.ts';
 import { demandStock, one } from '../board/find.ts';
+import { demandNothingHangs } from '../board/hanging.ts';
 import { sayerOf } from '../board/sayer.ts';
 import { startColumns } from './present.ts';
 import { demandStart, lineFor } from './start.ts';
@@ -116,7 +117,7 @@ async function unsettleFirst({ tx, board }: Hand, was: Chain, is: Chain): Promis
     await writeBatch(tx, board, first.id, linkColumns(UNSETTLED_LINK));
 }
 
-/** Its pencilled batches go back to the bench; one that was brewed keeps its shelf. */
+/** Its pencilled batches go back to the bench; one that was brewed keeps its shelf, and so does its talk. */
 export const removeChain =
   (id: string, version: number): Command =>
   async (hand) => {
@@ -125,6 +126,7 @@ export const removeChain =
     demandVersion(version, row.version, row);
     const mates = matesOn(board, id);
     demandOnlyPencilled(hand, mates);
+    await demandNothingHangs(hand, [id]);
     let place = endOf(board, null);
     for (const mate of mates) {
       const columns = { chainId: null, place, ...linkColumns(UNSETTLED_LINK) };

@@ -47,6 +47,16 @@ export function withCurrent(error: unknown, row: Batch): unknown {
   return new ProblemError(error.kind, { ...error.options, current: row });
 }
 
+/**
+ * Why something cannot be taken back may lie on shelves that a guest does not see, and names who
+ * did it: they hear that it is so, and no more.
+ */
+export function untold(error: unknown): unknown {
+  if (!(error instanceof ProblemError) || !['not-undoable', 'in-use'].includes(error.kind))
+    return error;
+  return problem('not-undoable', { detail: 'Something that it hangs on was changed since' });
+}
+
 /** What a change did, as far as it is on the guest's chains. Shelves are read anew with the board. */
 export function seenMoved({ guestOf, brewery }: Member, moved: Moved): Moved {
   if (!guestOf) return moved;

@@ -2,7 +2,6 @@ import { and, desc, eq, inArray, sql } from 'drizzle-orm';
 import { isDeepStrictEqual } from 'node:util';
 import type { HouseRuleChanges } from '#shared/api/board.ts';
 import type { HouseRulesRow } from '#shared/api/houseRules.ts';
-import { linkChanges } from '#shared/chain/linkChanges.ts';
 import { tellHouseRules } from '#shared/record/houseRules.ts';
 import { HOUSE_RULES, type HouseRuleKey } from '#shared/rules/houseRules.ts';
 import type { Db, Tx } from '../../db/client.ts';
@@ -10,10 +9,9 @@ import { houseRules, type brewery } from '../../db/schema/brewery.ts';
 import { change } from '../../db/schema/change.ts';
 import { person } from '../../db/schema/people.ts';
 import { season } from '../../db/schema/season.ts';
+import { demandWritten } from '../../db/inTransaction.ts';
 import { demandVersion } from '../../http/etag.ts';
-import { writeBatch } from '../batches/rows.ts';
 import type { Command } from '../board/changeBoard.ts';
-import type { Hand } from '../board/hand.ts';
 import { presentEntry } from '../record/present.ts';
 
 type Brewery = Pick<typeof brewery.$inferSelect, 'id' | 'timeZone'>;
@@ -72,29 +70,21 @@ export function withoutDefaults(wish: HouseRuleChanges): HouseRuleChanges {
 /** The brewery's id stands for its house rules in the record. */
 export const changeHouseRules =
   (version: number, wish: HouseRuleChanges): Command =>
-  async (hand) => {
-    const { tx, board, member } = hand;
+  async ({ tx, board, member }) => {
     const { id, timeZone, units } = member.brewery;
     const current = await readHouseRules(tx, { id, timeZone });
     demandVersion(version, current.version, current);
     const changes = withoutDefaults(wish);
     if (isDeepStrictEqual(changes, current.changes)) return null;
-    await tx
+    const written = await tx
       .insert(houseRules)
       .values({ breweryId: id, changes, version: 2 })
       .onConflictDoUpdate({
         target: houseRules.breweryId,
         set: { changes, version: sql`${houseRules.version} + 1` },
-      });
-    await lapseChanged(hand, changes);
+        setWhere: eq(houseRules.version, current.version),
+      })
+      .returning({ version: houseRules.version });
+    demandWritten(written);
     return { ...tellHouseRules(board.houseRules, changes, units), touches: [id] };
   };
-
-/** Somebody took a hold on as the rules were: where the link says something else now, that ends. */
-async function lapseChanged({ tx, board }: Hand, changes: HouseRuleChanges): Promise<void> {
-  const changed = linkChanges(board, { ...board, houseRules: changes });
-  for (const { batchId } of changed) {
-    const row = board.batches.find(({ id }) => id === batchId);
-    if (row?.link.acceptance) await writeBatch(tx, board, batchId, { acceptance: null });
-  }
-}

@@ -3,7 +3,7 @@ import { api } from '#shared/api/urls.ts';
 import { pathOf } from '../../http/pathOf.ts';
 import { forMember } from '../../http/route.ts';
 import { canEditSeason, canRead } from '../../policies.ts';
-import { changeBoard } from '../board/changeBoard.ts';
+import { changeShared } from '../board/changeBoard.ts';
 import { changeHouseRules, readHouseRules } from './commands.ts';
 
 const path = pathOf(api.houseRules(':brewery'));
@@ -37,7 +37,7 @@ export const houseRulesRoutes = [
     },
     canEditSeason,
     async (asked, member) => {
-      await changeBoard(asked, member, [], changeHouseRules(asked.version, asked.body));
+      await changeShared(asked, member, changeHouseRules(asked.version, asked.body));
       const body = await readHouseRules(asked.db, member.brewery);
       return { body, version: body.version };
     },

@@ -8,6 +8,7 @@ import type { Db, Tx } from '../../db/client.ts';
 import type { Deps } from '../../deps.ts';
 import { demandOpen, readBoard } from '../board/changeBoard.ts';
 import { lockSeason, lockShelves } from '../board/locks.ts';
+import { poursInHand } from '../pour/inHand.ts';
 import { createLane, type Lane, type Outcome } from './lane.ts';
 import { MoveGroup } from './moveGroup.ts';
 
@@ -57,7 +58,11 @@ async function grant(group: readonly Wish[]): Promise<Outcome<Moved>[]> {
     const now = deps.clock.now();
     const board = await readBoard(tx, member, now);
     demandOpen(board);
-    const made = new MoveGroup({ tx, board, now }, await madeBefore(tx, group));
+    const made = new MoveGroup(
+      { tx, board, now },
+      await madeBefore(tx, group),
+      await poursInHand(tx, board),
+    );
     for (const wish of group) await made.add(wish);
     return made.store();
   });

@@ -16,7 +16,7 @@ const makeMove = forMember(
     body: moveRequest,
     answer: moved,
     status: 200,
-    problems: ['moved-elsewhere', 'place-taken', 'already-exists', 'season-archived'],
+    problems: ['moved-elsewhere', 'place-taken', 'in-use', 'already-exists', 'season-archived'],
   },
   canMoveBatches,
   async (asked, member) => ({ body: seenMoved(member, await move(asked, member, asked.body)) }),
@@ -32,7 +32,7 @@ const undo = forMember(
     body: undoRequest,
     answer: moved,
     status: 200,
-    problems: ['not-undoable', 'season-archived'],
+    problems: ['not-undoable', 'in-use', 'season-archived'],
   },
   canMoveBatches,
   async (asked, member) => ({
@@ -50,7 +50,7 @@ const redo = forMember(
     body: undoRequest,
     answer: moved,
     status: 200,
-    problems: ['not-undoable', 'season-archived'],
+    problems: ['not-undoable', 'in-use', 'season-archived'],
   },
   canMoveBatches,
   async (asked, member) => ({

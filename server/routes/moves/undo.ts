@@ -9,11 +9,15 @@ import type { Deps } from '../../deps.ts';
 import { problem } from '../../problems.ts';
 import { demandOpen, readBoard } from '../board/changeBoard.ts';
 import type { Hand } from '../board/hand.ts';
-import { lockSeason, lockShelves } from '../board/locks.ts';
+import { demandNothingHangs } from '../board/hanging.ts';
+import { lockFor } from '../board/locks.ts';
+import { reachOf } from '../board/otherSeasons.ts';
 import { raiseRevision, writeEntry } from '../board/record.ts';
 import { insertChainRow } from '../chains/commands.ts';
 import { demandOwnTouches } from '../guests/move.ts';
+import { untold } from '../guests/seen.ts';
 import { answerAgain, answerMove, shiftedBetween } from './answer.ts';
+import { demandNotInHand, poursInHand } from '../pour/inHand.ts';
 import { takeEditBack } from './undoEdit.ts';
 import { newestOwn } from './newest.ts';
 import { notUndoable, type ChangeRow, type Way } from './notUndoable.ts';
@@ -29,8 +33,8 @@ export function takeBack(
   changeId: string,
 ): Promise<Moved> {
   return inTransaction(deps.db, async (tx) => {
-    await lockShelves(tx, member.seasonId, 'all');
-    await lockSeason(tx, member.seasonId);
+    const where = { breweryId: member.brewery.id, seasonId: member.seasonId };
+    await lockFor(tx, where, 'all', await reachOf(tx, changeId));
     const now = deps.clock.now();
     const hand = { tx, member, board: await readBoard(tx, member, now), now };
     demandOpen(hand.board);
@@ -64,8 +68,20 @@ async function doneAlready({ tx, member }: Hand, way: Way, changeId: string) {
 
 async function carryOut(hand: Hand, way: Way, row: ChangeRow): Promise<Moved> {
   const { guestOf } = hand.member;
-  if (guestOf) demandOwnTouches(guestOf, hand.board, row.touches);
-  if (row.kind === 'edit') return takeEditBack(hand, way, row);
+  if (!guestOf) return turn(hand, way, row);
+  demandOwnTouches(guestOf, hand.board, row.touches);
+  try {
+    return await turn(hand, way, row);
+  } catch (error) {
+    throw untold(error);
+  }
+}
+
+function turn(hand: Hand, way: Way, row: ChangeRow): Promise<Moved> {
+  return row.kind === 'edit' ? takeEditBack(hand, way, row) : takeMoveBack(hand, way, row);
+}
+
+async function takeMoveBack(hand: Hand, way: Way, row: ChangeRow): Promise<Moved> {
   const [before, after] = [row.before as Side, row.after as Side];
   const [from, to] = way === 'undo' ? [after, before] : [before, after];
   const result = revert(hand.board, from, to);
@@ -78,12 +94,14 @@ type Granted = Extract<Reverted, { ok: true }>;
 async function store(hand: Hand, way: Way, row: ChangeRow, result: Granted): Promise<Moved> {
   const { tx, member, board, now } = hand;
   const { rows, added, removedChainId } = result;
+  const withAdded = withRows(board, rows, added ? [added] : []);
+  demandNotInHand(hand, await poursInHand(tx, board), withAdded);
+  if (removedChainId !== null) await demandNothingHangs(hand, [removedChainId], 'not-undoable');
   const revision = await raiseRevision(tx, member.seasonId);
   if (added) await insertChainRow(hand, added);
   const batches = withNewVersions(board, rows);
   await storeRows(hand, batches);
   if (removedChainId !== null) await dropChain(hand, removedChainId);
-  const withAdded = withRows(board, rows, added ? [added] : []);
   const after = {
     ...withAdded,
     chains: withAdded.chains.filter(({ id }) => id !== removedChainId),

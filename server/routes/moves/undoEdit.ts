@@ -8,9 +8,14 @@ import { gistOf, recordEdit } from '../../record/recordEdit.ts';
 import { takeSnapshot } from '../../record/snapshot.ts';
 import { takeBackRows } from '../../record/takeBackRows.ts';
 import { writeRows } from '../../record/writeRows.ts';
-import { readBoard, withoutLapsed } from '../board/changeBoard.ts';
+import { readBoard } from '../board/changeBoard.ts';
 import type { BoardNow, Hand } from '../board/hand.ts';
+import { demandNothingHangs } from '../board/hanging.ts';
+import { withoutLapsed } from '../board/lapsed.ts';
+import { isOfAllSeasons, settleOtherSeasons } from '../board/otherSeasons.ts';
 import { raiseRevision } from '../board/record.ts';
+import { demandNotInHand, poursInHand } from '../pour/inHand.ts';
+import { demandNoPour } from '../pour/onRecord.ts';
 import { answerMove } from './answer.ts';
 import { demandMayWrite } from './mayWrite.ts';
 import { notUndoable, type ChangeRow, type Way } from './notUndoable.ts';
@@ -25,19 +30,33 @@ export async function takeEditBack(hand: Hand, way: Way, row: ChangeRow): Promis
   const rows = await takeSnapshot(tx, where);
   const result = takeBackRows(rows, from, to);
   if (!result.ok) throw await notUndoable(hand, row, result);
+  await demandNoPour(tx, plannedAnew(to), 'not-undoable');
+  await demandNothingHangs(hand, gone(to), 'not-undoable');
+  const inHand = await poursInHand(tx, board);
   await writeRows(tx, rows, result.next);
   const revision = await raiseRevision(tx, member.seasonId);
   const left = await withAcceptances(hand, to, await readBoard(tx, member, now));
+  demandNotInHand(hand, inHand, left);
   demandSound(left, row.touches);
   const what = `${way === 'undo' ? 'Undone' : 'Redone'}: ${row.what}`;
-  await recordEdit(
-    { tx, member, now },
-    { kind: way, what, touches: [], ofChange: row.id },
-    { board, rows },
-    { board: left, rows: await takeSnapshot(tx, where) },
-  );
+  const done = { board: left, rows: await takeSnapshot(tx, where) };
+  const said = { kind: way, what, touches: [], ofChange: row.id };
+  await recordEdit({ tx, member, now }, said, { board, rows }, done);
+  if (isOfAllSeasons(rows, done.rows)) await settleOtherSeasons(hand, left, what);
   return answerMove(hand, { changeId: row.id, what, revision, ...rowsBetween(board, left) });
 }
+
+/** Batches that would be pencilled again, or gone. */
+const plannedAnew = ({ rows }: EditSide): string[] =>
+  Object.entries(rows.batch ?? {}).flatMap(([id, row]) =>
+    row === null || row.stage === 'pencilled' ? [id] : [],
+  );
+
+/** Batches and shelves that would be gone. */
+const gone = ({ rows }: EditSide): string[] =>
+  Object.entries({ ...rows.batch, ...rows.chain }).flatMap(([id, row]) =>
+    row === null ? [id] : [],
+  );
 
 /** An acceptance that comes back must speak of the same link still; one that is changed by this lapses. */
 function withAcceptances({ tx, board }: Hand, to: EditSide, left: BoardNow): Promise<BoardNow> {

@@ -21,8 +21,8 @@ export async function openRun(hand: Hand, batchId: string, id: string): Promise<
     throw problem('pour-held', { detail: `${current.heldBy.name} has it in hand`, current });
   }
   const batch = one(board.batches, batchId);
-  demandPourable(batch);
   const cake = indexBoard(board).predecessor(batchId);
+  demandPourable(batch, cake);
   demandMade(
     await tx
       .insert(pourRun)
@@ -48,10 +48,14 @@ export async function openRun(hand: Hand, batchId: string, id: string): Promise<
   };
 }
 
-function demandPourable({ name, stage, chainId }: Batch): void {
+function demandPourable({ name, stage, chainId }: Batch, cake: Batch | null): void {
   if (stage !== 'pencilled')
     throw problem('pour-over', { detail: `${name} is ${stage}: its wort is poured` });
   if (chainId === null) throw problem('pour-over', { detail: `Put ${name} on a shelf first` });
+  if (cake?.stage === 'pencilled')
+    throw problem('pour-over', {
+      detail: `${cake.name} comes before it and is not brewed yet: say first when it was brewed`,
+    });
 }
 
 /** To another step, forward or back, with what the steps found. */

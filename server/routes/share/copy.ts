@@ -11,7 +11,7 @@ import type { Deps } from '../../deps.ts';
 import { notFound } from '../../problems.ts';
 import { dayIn } from '../../today.ts';
 import { linkColumns } from '../batches/rows.ts';
-import { changeBoard } from '../board/changeBoard.ts';
+import { changeShared, type Command } from '../board/changeBoard.ts';
 import type { Hand } from '../board/hand.ts';
 import { one } from '../board/find.ts';
 import { loadBoardRows } from '../board/load.ts';
@@ -24,7 +24,7 @@ export async function copyChain(
   member: Member,
   { id, token }: CopyRequest,
 ): Promise<Chain> {
-  const board = await changeBoard(deps, member, 'all', async (hand) => {
+  const copy: Command = async (hand) => {
     if (hand.board.chains.some((each) => each.id === id)) return null;
     const { alone, breweryName } = await readShared(hand, token);
     const yeastId = await ownYeast(hand, alone);
@@ -41,7 +41,8 @@ export async function copyChain(
       after: made,
       touches: [id, ...batchIds],
     };
-  });
+  };
+  const board = await changeShared(deps, member, copy, 'all');
   return one(board.chains, id);
 }
 

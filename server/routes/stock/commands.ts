@@ -1,3 +1,4 @@
+import { demandWritten } from '../../db/inTransaction.ts';
 import { demandMade, isRepeated } from '../../http/create.ts';
 import { demandVersion } from '../../http/etag.ts';
 import { merged } from '../../http/patch.ts';
@@ -30,7 +31,8 @@ export function stockCommands<Row extends Named & { version: number }, Create ex
       demandVersion(version, row.version, row);
       const whole = merged(kind.create, Object.keys(kind.create.shape), row, patch);
       const { id: _, ...fields } = whole;
-      await kind.update(hand.tx, { breweryId: hand.member.brewery.id, id }, fields);
+      const where = { breweryId: hand.member.brewery.id, id, version };
+      demandWritten(await kind.update(hand.tx, where, fields));
       return { ...kind.tell(sayerOf(hand), row, fields), touches: [id] };
     };
 
@@ -42,7 +44,7 @@ export function stockCommands<Row extends Named & { version: number }, Create ex
       const users = usersOf(board, kind.field, id);
       if (users.length > 0)
         throw problem('in-use', { detail: `${row.name} is used by ${users.join(', ')}` });
-      await kind.remove(tx, { breweryId: member.brewery.id, id });
+      demandWritten(await kind.remove(tx, { breweryId: member.brewery.id, id, version }));
       return { what: `Deleted the ${word} ${row.name}`, touches: [id] };
     };
 

@@ -15,6 +15,9 @@ export interface Where {
   id: string;
 }
 
+/** As it was seen: another season's board may have changed it meanwhile. */
+export type WhereSeen = Where & { version: number };
+
 /** What a brewery keeps in stock for all its seasons, used by shelves and batches. */
 export interface Kind<Row extends Named & { version: number }, Create extends Named> {
   /** As sentences, and the names of operations, have it. */
@@ -28,7 +31,8 @@ export interface Kind<Row extends Named & { version: number }, Create extends Na
   rowsOf(board: BoardNow): readonly Row[];
   /** Nothing is inserted where the id is taken. */
   insert(tx: Tx, values: Create & { breweryId: string }): Promise<readonly unknown[]>;
-  update(tx: Tx, where: Where, fields: Omit<Create, 'id'>): Promise<unknown>;
-  remove(tx: Tx, where: Where): Promise<unknown>;
+  /** Nothing is written where the version is another one by now; so with `remove`. */
+  update(tx: Tx, where: WhereSeen, fields: Omit<Create, 'id'>): Promise<readonly unknown[]>;
+  remove(tx: Tx, where: WhereSeen): Promise<readonly unknown[]>;
   tell(sayer: Sayer, before: Row, after: Omit<Create, 'id'>): Told;
 }

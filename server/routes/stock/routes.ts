@@ -1,6 +1,6 @@
 import { forMember } from '../../http/route.ts';
 import { canEditYeastsAndVessels } from '../../policies.ts';
-import { changeBoard } from '../board/changeBoard.ts';
+import { changeShared } from '../board/changeBoard.ts';
 import { one } from '../board/find.ts';
 import type { BoardNow } from '../board/hand.ts';
 import { stockCommands } from './commands.ts';
@@ -31,7 +31,7 @@ export function stockRoutes<Row extends Named & { version: number }, Create exte
     },
     canEditYeastsAndVessels,
     async (asked, member) =>
-      answered(await changeBoard(asked, member, [], commands.add(asked.body)), asked.body.id),
+      answered(await changeShared(asked, member, commands.add(asked.body)), asked.body.id),
   );
 
   const edit = forMember<Partial<Omit<Create, 'id'>>>(
@@ -48,7 +48,7 @@ export function stockRoutes<Row extends Named & { version: number }, Create exte
     canEditYeastsAndVessels,
     async ({ params: { id = '' }, ...asked }, member) => {
       const command = commands.edit(id, asked.version, asked.body);
-      return answered(await changeBoard(asked, member, [], command), id);
+      return answered(await changeShared(asked, member, command), id);
     },
   );
 
@@ -65,7 +65,7 @@ export function stockRoutes<Row extends Named & { version: number }, Create exte
     },
     canEditYeastsAndVessels,
     async (asked, member) => {
-      await changeBoard(asked, member, [], commands.remove(asked.params.id ?? '', asked.version));
+      await changeShared(asked, member, commands.remove(asked.params.id ?? '', asked.version));
       return {};
     },
   );

@@ -10,10 +10,11 @@ import { api } from '#shared/api/urls.ts';
 import { tellVessel } from '#shared/record/sentences.ts';
 import { vessel } from '../../db/schema/stock.ts';
 import { pathOf } from '../../http/pathOf.ts';
-import type { Where } from '../stock/kind.ts';
+import type { WhereSeen } from '../stock/kind.ts';
 import { stockRoutes } from '../stock/routes.ts';
 
-const isRow = ({ breweryId, id }: Where) => and(eq(vessel.breweryId, breweryId), eq(vessel.id, id));
+const isRow = ({ breweryId, id, version }: WhereSeen) =>
+  and(eq(vessel.breweryId, breweryId), eq(vessel.id, id), eq(vessel.version, version));
 
 export const vesselRoutes = stockRoutes<Vessel, VesselCreate>({
   word: 'vessel',
@@ -32,7 +33,8 @@ export const vesselRoutes = stockRoutes<Vessel, VesselCreate>({
     tx
       .update(vessel)
       .set({ ...fields, version: sql`${vessel.version} + 1` })
-      .where(isRow(where)),
-  remove: (tx, where) => tx.delete(vessel).where(isRow(where)),
+      .where(isRow(where))
+      .returning({ id: vessel.id }),
+  remove: (tx, where) => tx.delete(vessel).where(isRow(where)).returning({ id: vessel.id }),
   tell: tellVessel,
 });

@@ -10,10 +10,11 @@ import { api } from '#shared/api/urls.ts';
 import { tellYeast } from '#shared/record/sentences.ts';
 import { yeast, yeastLine } from '../../db/schema/stock.ts';
 import { pathOf } from '../../http/pathOf.ts';
-import type { Where } from '../stock/kind.ts';
+import type { WhereSeen } from '../stock/kind.ts';
 import { stockRoutes } from '../stock/routes.ts';
 
-const isRow = ({ breweryId, id }: Where) => and(eq(yeast.breweryId, breweryId), eq(yeast.id, id));
+const isRow = ({ breweryId, id, version }: WhereSeen) =>
+  and(eq(yeast.breweryId, breweryId), eq(yeast.id, id), eq(yeast.version, version));
 
 export const yeastRoutes = stockRoutes<Yeast, YeastCreate>({
   word: 'yeast',
@@ -32,11 +33,12 @@ export const yeastRoutes = stockRoutes<Yeast, YeastCreate>({
     tx
       .update(yeast)
       .set({ ...fields, version: sql`${yeast.version} + 1` })
-      .where(isRow(where)),
+      .where(isRow(where))
+      .returning({ id: yeast.id }),
   async remove(tx, where) {
     // Lines of shelves that are gone; one that is still used would have been named before.
     await tx.delete(yeastLine).where(eq(yeastLine.yeastId, where.id));
-    await tx.delete(yeast).where(isRow(where));
+    return tx.delete(yeast).where(isRow(where)).returning({ id: yeast.id });
   },
   tell: tellYeast,
 });
