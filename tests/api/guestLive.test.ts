@@ -39,9 +39,10 @@ async function scene() {
   return { ...season, shared, hidden, benched, guest };
 }
 
-/** The guest's own stream, after the word that everybody gets who comes with a chain on their board. */
+/** The guest's own stream, after what everybody is told who comes with a chain on their board. */
 async function watchAsGuest({ visitor, slug }: TestGuest): Promise<Watching> {
   const watching = await watch(visitor, slug);
+  await watching.heard('revision');
   await watching.heard('elsewhere');
   watching.told.length = 0;
   return watching;

@@ -3,6 +3,7 @@ import { afterAll, beforeAll, expect, it } from 'vitest';
 import type { Batch } from '#shared/api/batch.ts';
 import type { ChainGuest } from '#shared/api/guest.ts';
 import type { Moved } from '#shared/api/move.ts';
+import type { RecordPage } from '#shared/api/record.ts';
 import { api } from '#shared/api/urls.ts';
 import { testClock } from '../support/clock.ts';
 import { guestOn, invited } from '../support/guests.ts';
@@ -255,9 +256,53 @@ it('does not outlast the guest’s own brewery: who left it is no guest', async 
   await good(brewer.post(api.guestInvitation(token), { brewerySlug: own }));
   expect((await boardOf(owner, own)).guests).toEqual([]);
   expect((await brewer.get(api.board(s.slug))).status).toBe(200);
-  await server.pool.query(
-    'delete from membership where person_id = (select person_id from chain_guest where guest_brewery_id = (select id from brewery where slug = $1)) and role = $2',
-    [own, 'brewer'],
-  );
+  await good(brewer.ask('DELETE', api.membership(own), { version: 1 }));
   expect((await brewer.get(api.board(s.slug))).status).toBe(404);
+  const listed = await good<ChainGuest[]>(s.head.get(api.guests(s.slug, s.chainA)));
+  expect(listed.find(({ name }) => name === 'The brewer')?.withdrawnAt).toEqual(expect.any(String));
+  const { season } = await boardOf(s.head, s.slug);
+  const { changes } = await good<RecordPage>(s.head.get(api.changes(s.slug, season.id)));
+  expect(changes[0]).toMatchObject({
+    what: 'Left Shelf A, as its guest',
+    person: { name: 'The brewer' },
+  });
+});
+
+it('begins anew for who left the brewery with the shelf, and has another one', async () => {
+  const s = await scene();
+  const { visitor: owner, slug: own } = await newcomer(server.url);
+  const brewer = await joined({ head: owner, slug: own }, 'brewer');
+  const first = await invited(s, s.chainA);
+  await good(brewer.post(api.guestInvitation(first.token), { brewerySlug: own }));
+  await good(brewer.ask('DELETE', api.membership(own), { version: 1 }));
+  const { brewerySlug } = await good<{ brewerySlug: string }>(
+    brewer.post(api.breweries, { id: randomUUID(), name: 'Sandbar' }),
+  );
+  const second = await invited(s, s.chainA);
+  const accepted = brewer.post(api.guestInvitation(second.token), { brewerySlug });
+  expect((await accepted).status).toBe(201);
+  expect((await boardOf(brewer, brewerySlug)).guests).toMatchObject([{ chainId: s.chainA }]);
+  expect((await brewer.get(api.board(s.slug))).status).toBe(200);
+});
+
+it('tells a guest whose undo is refused nothing of what they do not see', async () => {
+  const s = await scene();
+  const { visitor } = s.guest;
+  const moved = await good<Moved>(visitor.post(api.moves(s.slug), behind(s)));
+  const { version } = await batchOf(s.head, s.slug, s.chandler);
+  await good(s.head.patch(api.batch(s.slug, s.chandler), { og: 1.095, fg: 1.024 }, version));
+  const accept = {
+    body: { reason: 'Our own business' },
+    version: (await batchOf(s.head, s.slug, s.jetty)).version,
+  };
+  await good(s.head.ask('PUT', api.acceptance(s.slug, s.jetty), accept));
+  const refused = await visitor.post(api.undo(s.slug), { changeId: moved.changeId });
+  expect(refused).toMatchObject({
+    status: 409,
+    body: {
+      type: '/problems/not-undoable',
+      detail: 'Something that it hangs on was changed since',
+    },
+  });
+  expect(refused.body).not.toHaveProperty('current');
 });

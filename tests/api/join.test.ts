@@ -1,9 +1,10 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, expect, it } from 'vitest';
-import type { JoinLinkMade } from '#shared/api/people.ts';
+import type { JoinLink, JoinLinkMade, Person } from '#shared/api/people.ts';
 import { api } from '#shared/api/urls.ts';
 import { testClock } from '../support/clock.ts';
-import { boardOf, good } from '../support/season.ts';
+import { whileHeld } from '../support/held.ts';
+import { boardOf, good, joined } from '../support/season.ts';
 import { startTestServer, type TestServer } from '../support/server.ts';
 import { newcomer, PASSWORD, Visitor } from '../support/visitor.ts';
 
@@ -80,6 +81,40 @@ it('runs out after seven days, and ends when it is withdrawn', async () => {
   );
   expect((await head.ask('DELETE', api.joinLink(slug, other.id))).status).toBe(204);
   expect((await new Visitor(server.url).get(api.join(other.token))).status).toBe(404);
+});
+
+/** Two head brewers, one of whom removes the other. */
+async function twoHeads() {
+  const { visitor: head, slug } = await newcomer(server.url, 'Estuary');
+  const other = await joined({ head, slug }, 'head-brewer');
+  const { id } = await good<Person>(other.get(api.session));
+  const remove = () => head.ask('DELETE', api.member(slug, id), { version: 1 });
+  const invite = (role: string) => other.post(api.joinLinks(slug), { id: randomUUID(), role });
+  return { head, slug, otherId: id, remove, invite };
+}
+
+it('that a head brewer makes as they are removed is good for nobody', async () => {
+  const { head, slug, otherId, remove, invite } = await twoHeads();
+  const lock = ['select 1 from person where id = $1 for update', [otherId]] as const;
+  const [, removed] = await whileHeld(server.pool, lock, 2, () =>
+    Promise.all([invite('head-brewer'), remove()]),
+  );
+  expect(removed.status).toBe(204);
+  const links = await good<JoinLink[]>(head.get(api.joinLinks(slug)));
+  expect(links.filter(({ usedAt }) => usedAt === null)).toEqual([]);
+});
+
+it('of a head brewer who is being removed is used before that, or no more', async () => {
+  const { slug, remove, invite } = await twoHeads();
+  const { token } = await good<JoinLinkMade>(invite('brewer'));
+  const lock = ['select 1 from brewery where slug = $1 for no key update', [slug]] as const;
+  const replies = await whileHeld(server.pool, lock, 2, () =>
+    Promise.all([new Visitor(server.url).post(api.join(token), account()), remove()]),
+  );
+  expect([
+    [201, 204],
+    [404, 204],
+  ]).toContainEqual(replies.map(({ status }) => status));
 });
 
 it('stores the token’s hash alone; a repeated request gives a new token for the same link', async () => {

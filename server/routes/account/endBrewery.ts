@@ -3,7 +3,7 @@ import type { Tx } from '../../db/client.ts';
 import { brewery } from '../../db/schema/brewery.ts';
 import { chainGuest } from '../../db/schema/sharing.ts';
 import { tell } from '../../live/note.ts';
-import { tellBrewery } from '../guests/accept.ts';
+import { tellBrewery } from '../board/record.ts';
 
 /** What the brewery does not take along by itself, or is held by what goes later: in this order. */
 const FIRST = ['change', 'jar', 'season', 'yeast_line'];

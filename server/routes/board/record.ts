@@ -19,7 +19,11 @@ export interface Entry {
 }
 
 /** Who did it, and in which season's record it stands. */
-type Where = Pick<Member, 'brewery' | 'seasonId' | 'person'>;
+interface Where {
+  brewery: Pick<Member['brewery'], 'id'>;
+  seasonId: string;
+  person: Pick<Member['person'], 'id'>;
+}
 
 /**
  * Raises the season's revision, and tells all processes of each revision once this is committed. It
@@ -41,6 +45,16 @@ export async function raiseRevision(tx: Tx, seasonId: string, by = 1): Promise<n
     ...revisions.map((each) => ({ kind: 'season' as const, seasonId, revision: each })),
   );
   return revision;
+}
+
+/** For what the boards of all seasons show: members, and shelves of which somebody is a guest. */
+export async function tellBrewery(tx: Tx, breweryId: string): Promise<void> {
+  const seasons = await tx
+    .select({ id: season.id })
+    .from(season)
+    .where(eq(season.breweryId, breweryId))
+    .orderBy(season.id);
+  for (const { id } of seasons) await raiseRevision(tx, id);
 }
 
 export async function writeEntry(tx: Tx, member: Where, at: Date, entry: Entry): Promise<void> {

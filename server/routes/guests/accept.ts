@@ -2,11 +2,10 @@ import { and, eq, isNotNull, isNull } from 'drizzle-orm';
 import type { PersonRow } from '../../auth/sessions.ts';
 import type { Tx } from '../../db/client.ts';
 import { brewery, membership } from '../../db/schema/brewery.ts';
-import { season } from '../../db/schema/season.ts';
 import { chainGuest } from '../../db/schema/sharing.ts';
 import { invalidField, problem } from '../../problems.ts';
 import { tell } from '../../live/note.ts';
-import { raiseRevision } from '../board/record.ts';
+import { raiseRevision, tellBrewery } from '../board/record.ts';
 import { belongs } from '../join/commands.ts';
 import { findInvitation } from './find.ts';
 
@@ -36,16 +35,6 @@ export async function acceptInvitation(
   await tellBrewery(tx, own);
   await tell(tx, { kind: 'person', personId: who.id });
   return row.id;
-}
-
-/** The boards on which the shelf now stands, or no longer. */
-export async function tellBrewery(tx: Tx, breweryId: string): Promise<void> {
-  const seasons = await tx
-    .select({ id: season.id })
-    .from(season)
-    .where(eq(season.breweryId, breweryId))
-    .orderBy(season.id);
-  for (const { id } of seasons) await raiseRevision(tx, id);
 }
 
 async function isGuest(tx: Tx, who: PersonRow, chainId: string): Promise<boolean> {

@@ -13,7 +13,7 @@ import { notFound, problem } from '../../problems.ts';
 import { changeBoard } from '../board/changeBoard.ts';
 import { one } from '../board/find.ts';
 import { demandChain } from '../chains/demandChain.ts';
-import { tellBrewery } from './accept.ts';
+import { tellBrewery } from '../board/record.ts';
 
 type Hands = Pick<Deps, 'db' | 'clock'>;
 

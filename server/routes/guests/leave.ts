@@ -1,4 +1,4 @@
-import { and, eq, isNotNull, isNull } from 'drizzle-orm';
+import { and, eq, isNotNull, isNull, type SQL } from 'drizzle-orm';
 import { api } from '#shared/api/urls.ts';
 import type { PersonRow } from '../../auth/sessions.ts';
 import type { Tx } from '../../db/client.ts';
@@ -10,37 +10,55 @@ import { pathOf } from '../../http/pathOf.ts';
 import { forSignedIn } from '../../http/route.ts';
 import { tell } from '../../live/note.ts';
 import { notFound } from '../../problems.ts';
-import { raiseRevision, writeEntry } from '../board/record.ts';
-import { tellBrewery } from './accept.ts';
+import { raiseRevision, tellBrewery, writeEntry } from '../board/record.ts';
+
+type Guest = Pick<PersonRow, 'id'>;
 
 /** The guest goes of their own accord; what they did stays, and stays in the record. */
-export async function leaveChain(
+export async function leaveChain(tx: Tx, who: Guest, guestId: string, now: Date): Promise<void> {
+  const [left] = await end(tx, who, eq(chainGuest.id, guestId), now);
+  if (!left) throw notFound();
+  // One's own board first, as everywhere: a guest's change locks the season that it is made in last.
+  if (left.guestBreweryId !== null) await tellBrewery(tx, left.guestBreweryId);
+  await recordLeft(tx, who, left, now);
+  await tell(tx, { kind: 'person', personId: who.id });
+}
+
+/** Who leaves a brewery leaves the chains of others that stood on its boards for them. */
+export async function leaveChainsOn(
   tx: Tx,
-  who: PersonRow,
-  guestId: string,
+  who: Guest,
+  breweryId: string,
   now: Date,
 ): Promise<void> {
-  const [left] = await tx
+  const left = await end(tx, who, eq(chainGuest.guestBreweryId, breweryId), now);
+  for (const row of left) await recordLeft(tx, who, row, now);
+}
+
+type GuestRow = typeof chainGuest.$inferSelect;
+
+const end = (tx: Tx, who: Guest, which: SQL, now: Date): Promise<GuestRow[]> =>
+  tx
     .update(chainGuest)
     .set({ withdrawnAt: now })
     .where(
       and(
-        eq(chainGuest.id, guestId),
+        which,
         eq(chainGuest.personId, who.id),
         isNotNull(chainGuest.joinedAt),
         isNull(chainGuest.withdrawnAt),
       ),
     )
     .returning();
-  if (!left) throw notFound();
+
+/** In the record of those whose chain it is. */
+async function recordLeft(tx: Tx, who: Guest, left: GuestRow, now: Date): Promise<void> {
   const [place] = await tx
     .select({ brewery, seasonId: chain.seasonId, name: chain.name })
     .from(chain)
     .innerJoin(brewery, eq(brewery.id, chain.breweryId))
     .where(eq(chain.id, left.chainId));
   if (!place) throw notFound();
-  // One's own board first, as everywhere: a guest's change locks the season that it is made in last.
-  if (left.guestBreweryId !== null) await tellBrewery(tx, left.guestBreweryId);
   await raiseRevision(tx, place.seasonId);
   await writeEntry(tx, { ...place, person: who }, now, {
     kind: 'edit',
@@ -49,7 +67,6 @@ export async function leaveChain(
     after: null,
     touches: [left.chainId],
   });
-  await tell(tx, { kind: 'person', personId: who.id });
 }
 
 export const leaveChainRoute = forSignedIn(

@@ -5,9 +5,9 @@ import type { PersonRow } from '../../auth/sessions.ts';
 import type { Db, Tx } from '../../db/client.ts';
 import { brewery, joinLink, membership } from '../../db/schema/brewery.ts';
 import { person } from '../../db/schema/people.ts';
-import { season } from '../../db/schema/season.ts';
 import { notFound, problem } from '../../problems.ts';
-import { raiseRevision } from '../board/record.ts';
+import { lockBrewery } from '../board/locks.ts';
+import { tellBrewery } from '../board/record.ts';
 
 type Found = {
   link: typeof joinLink.$inferSelect;
@@ -56,8 +56,13 @@ export async function belongs(
   return found.length > 0;
 }
 
-/** Uses the link up: of two at once, one joins. */
+/**
+ * Uses the link up: of two at once, one joins. Under the lock of every change of a membership, so
+ * that nobody comes in by the link of a head brewer who is gone by then.
+ */
 export async function join(tx: Tx, token: string, who: PersonRow, now: Date): Promise<string> {
+  const { brewery: asked } = await findJoinLink(tx, token, now);
+  await lockBrewery(tx, asked.id);
   const { link, brewery: itsBrewery } = await findJoinLink(tx, token, now);
   const used = await tx
     .update(joinLink)
@@ -74,11 +79,7 @@ export async function join(tx: Tx, token: string, who: PersonRow, now: Date): Pr
     throw problem('already-exists', {
       detail: `You belong to ${itsBrewery.name} already; the link stays good for somebody else.`,
     });
-  const seasons = await tx
-    .select({ id: season.id })
-    .from(season)
-    .where(eq(season.breweryId, itsBrewery.id));
-  for (const { id } of seasons) await raiseRevision(tx, id);
+  await tellBrewery(tx, itsBrewery.id);
   return itsBrewery.slug;
 }
 

@@ -4,10 +4,12 @@ import type { JoinLink, JoinLinkMade, Role } from '#shared/api/people.ts';
 import { hashToken, newToken } from '../../auth/tokens.ts';
 import type { Member } from '../../auth/whoAsks.ts';
 import type { Clock } from '../../clock.ts';
-import type { Db } from '../../db/client.ts';
+import type { Db, Tx } from '../../db/client.ts';
+import { inTransaction } from '../../db/inTransaction.ts';
 import { joinLink } from '../../db/schema/brewery.ts';
 import { person } from '../../db/schema/people.ts';
 import { problem } from '../../problems.ts';
+import { demandStillHead, membersUnderLock } from './underLock.ts';
 
 const GOOD_FOR_MS = 7 * 24 * 60 * 60 * 1000;
 
@@ -34,18 +36,42 @@ export async function listJoinLinks(db: Db, { brewery }: Member): Promise<JoinLi
 
 /**
  * Asked again under the same id (the answer was lost), it gives a new token for the same link: the
- * first one cannot be told again, since only its hash is stored.
+ * first one cannot be told again, since only its hash is stored. Whoever makes it is still head
+ * brewer: of one who is not, the open links were taken away with the role.
  */
-export async function makeJoinLink(
+export function makeJoinLink(
   db: Db,
   clock: Clock,
   { brewery, person: head }: Member,
-  { id, role }: { id: string; role: Role },
+  wish: { id: string; role: Role },
 ): Promise<JoinLinkMade> {
-  const token = newToken();
-  const now = clock.now();
-  const expiresAt = new Date(now.getTime() + GOOD_FOR_MS);
-  const [made] = await db
+  return inTransaction(db, async (tx) => {
+    demandStillHead(await membersUnderLock(tx, brewery.id), head.id);
+    const token = newToken();
+    const expiresAt = await store(tx, { ...wish, token, brewery, head, now: clock.now() });
+    return {
+      ...wish,
+      createdBy: head.name,
+      expiresAt: expiresAt.toISOString(),
+      usedAt: null,
+      usedBy: null,
+      token,
+    };
+  });
+}
+
+interface NewLink {
+  id: string;
+  role: Role;
+  token: string;
+  brewery: Member['brewery'];
+  head: Member['person'];
+  now: Date;
+}
+
+/** @returns when it runs out */
+async function store(tx: Tx, { id, role, token, brewery, head, now }: NewLink): Promise<Date> {
+  const [made] = await tx
     .insert(joinLink)
     .values({
       id,
@@ -54,7 +80,7 @@ export async function makeJoinLink(
       tokenHash: hashToken(token),
       createdBy: head.id,
       createdAt: now,
-      expiresAt,
+      expiresAt: new Date(now.getTime() + GOOD_FOR_MS),
     })
     .onConflictDoUpdate({
       target: joinLink.id,
@@ -66,17 +92,9 @@ export async function makeJoinLink(
         isNull(joinLink.usedAt),
       ),
     })
-    .returning();
+    .returning({ expiresAt: joinLink.expiresAt });
   if (!made) throw problem('already-exists', { detail: 'This id is in use: make a new one' });
-  return {
-    id,
-    role,
-    createdBy: head.name,
-    expiresAt: made.expiresAt.toISOString(),
-    usedAt: null,
-    usedBy: null,
-    token,
-  };
+  return made.expiresAt;
 }
 
 export async function withdrawJoinLink(db: Db, { brewery }: Member, id: string): Promise<boolean> {

@@ -6,7 +6,8 @@ import { membership } from '../../db/schema/brewery.ts';
 import type { Deps } from '../../deps.ts';
 import { demandVersion } from '../../http/etag.ts';
 import { tell } from '../../live/note.ts';
-import { tellBrewery } from '../guests/accept.ts';
+import { leaveChainsOn } from '../guests/leave.ts';
+import { tellBrewery } from '../board/record.ts';
 import { recordMembership, WHOM } from './entry.ts';
 import { withdrawOpenLinks } from './openLinks.ts';
 import { presentMember, type MemberRow } from './present.ts';
@@ -27,7 +28,7 @@ export function removeMember(
     const row = memberAmong(members, personId);
     demandVersion(version, row.version, presentMember(row));
     demandHeadLeft(members, personId, null);
-    await endMembership(tx, head.brewery.id, row);
+    await endMembership(tx, head.brewery.id, row, clock.now());
     const what = `Removed ${WHOM} from the brewery`;
     await recordMembership(tx, head, clock.now(), {
       what,
@@ -56,16 +57,22 @@ export async function leaveUnderLock(
 ): Promise<void> {
   const row = memberAmong(members, member.person.id);
   demandHeadLeft(members, row.personId, null);
-  await endMembership(tx, member.brewery.id, row);
+  await endMembership(tx, member.brewery.id, row, at);
   const told = { personId: row.personId, before: row.role, after: null };
   await recordMembership(tx, member, at, { what: 'Left the brewery', ...told });
 }
 
-async function endMembership(tx: Tx, breweryId: string, { personId }: MemberRow): Promise<void> {
+async function endMembership(
+  tx: Tx,
+  breweryId: string,
+  { personId }: MemberRow,
+  at: Date,
+): Promise<void> {
   await tx
     .delete(membership)
     .where(and(eq(membership.breweryId, breweryId), eq(membership.personId, personId)));
   await withdrawOpenLinks(tx, breweryId, personId);
   await tellBrewery(tx, breweryId);
+  await leaveChainsOn(tx, { id: personId }, breweryId, at);
   await tell(tx, { kind: 'person', personId });
 }

@@ -7,7 +7,7 @@ import { inTransaction } from '../../db/inTransaction.ts';
 import { membership } from '../../db/schema/brewery.ts';
 import type { Deps } from '../../deps.ts';
 import { demandVersion } from '../../http/etag.ts';
-import { tellBrewery } from '../guests/accept.ts';
+import { tellBrewery } from '../board/record.ts';
 import { recordMembership, WHOM } from './entry.ts';
 import { withdrawOpenLinks } from './openLinks.ts';
 import { presentMember, type MemberRow } from './present.ts';

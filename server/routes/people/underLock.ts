@@ -1,9 +1,10 @@
 import { asc, eq } from 'drizzle-orm';
 import type { Role } from '#shared/api/people.ts';
 import type { Tx } from '../../db/client.ts';
-import { brewery, membership } from '../../db/schema/brewery.ts';
+import { membership } from '../../db/schema/brewery.ts';
 import { person } from '../../db/schema/people.ts';
 import { notFound, problem } from '../../problems.ts';
+import { lockBrewery } from '../board/locks.ts';
 import type { MemberRow } from './present.ts';
 
 /**
@@ -11,11 +12,7 @@ import type { MemberRow } from './present.ts';
  * head brewers who step down at once the second finds that there is no other left.
  */
 export async function membersUnderLock(tx: Tx, breweryId: string): Promise<MemberRow[]> {
-  await tx
-    .select({ id: brewery.id })
-    .from(brewery)
-    .where(eq(brewery.id, breweryId))
-    .for('no key update');
+  await lockBrewery(tx, breweryId);
   return tx
     .select({
       personId: person.id,
