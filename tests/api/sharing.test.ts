@@ -110,6 +110,20 @@ it('stores the token’s hash alone; a repeated request gives a new token for th
   expect(await good<ShareLink[]>(head.get(api.shareLinks(slug, chainA)))).toHaveLength(1);
 });
 
+it('is another link where it is asked for otherwise under the same id', async () => {
+  const { head, slug, chainA, link, body } = await shared();
+  const path = api.shareLinks(slug, chainA);
+  for (const change of [{ name: 'Mine' }, { expiresOn: '2027-05-30' }, { showPrices: true }])
+    expect(await head.post(path, { ...body, ...change })).toMatchObject({
+      status: 409,
+      body: { type: '/problems/already-exists' },
+    });
+  const [listed] = await good<ShareLink[]>(head.get(path));
+  const { id: _, ...facts } = body;
+  expect(listed).toMatchObject({ ...facts, version: 1 });
+  expect((await look(link.token)).status).toBe(200);
+});
+
 it('counts those who look, but not the brewery’s own people', async () => {
   const { head, slug, chainA, link, ...season } = await shared();
   const brewer = await joined({ head, slug, ...season }, 'brewer');

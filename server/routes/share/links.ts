@@ -86,40 +86,51 @@ export async function makeShareLink(
     [],
     async ({ tx, board, now }) => {
       const { name: chainName } = one(board.chains, chainId);
-      const facts = {
-        name,
-        showPrices,
-        tokenHash: hashToken(token),
-        expiresAt: endOf(member, expiresOn, now),
-      };
+      const facts = { name, showPrices, expiresAt: endOf(member, expiresOn, now) };
       const place = { breweryId: member.brewery.id, chainId, createdBy: member.person.id };
-      const [made] = await tx
+      const wished = { id, ...facts, ...place, tokenHash: hashToken(token) };
+      const made = await tx
         .insert(shareLink)
-        .values({ id, ...facts, ...place, createdAt: now })
-        .onConflictDoUpdate({
-          target: shareLink.id,
-          set: { ...facts, version: sql`${shareLink.version} + 1` },
-          setWhere: and(
-            eq(shareLink.breweryId, place.breweryId),
-            eq(shareLink.chainId, chainId),
-            eq(shareLink.createdBy, place.createdBy),
-            isNull(shareLink.withdrawnAt),
-          ),
-        })
-        .returning({ version: shareLink.version });
-      if (!made) throw problem('already-exists', { detail: 'This id is in use: make a new one' });
-      if (made.version > 1) return null;
+        .values({ ...wished, createdAt: now })
+        .onConflictDoNothing({ target: shareLink.id })
+        .returning({ id: shareLink.id });
+      if (made.length === 0) {
+        await renewToken(tx, wished);
+        return null;
+      }
       const after = { name, expiresOn, showPrices };
-      return {
-        what: `Shared ${chainName} by a link: ${name}`,
-        before: null,
-        after,
-        touches: [chainId],
-      };
+      const what = `Shared ${chainName} by a link: ${name}`;
+      return { what, before: null, after, touches: [chainId] };
     },
     'archived-too',
   );
   return { ...(await readShareLink(hands.db, member, id)), token };
+}
+
+/** Of a link that stands as it was wished for; one of the same id that does not is another one. */
+async function renewToken(
+  tx: Tx,
+  { tokenHash, ...wished }: typeof shareLink.$inferInsert,
+): Promise<void> {
+  const { id, breweryId, chainId, createdBy, name, showPrices = false, expiresAt } = wished;
+  const renewed = await tx
+    .update(shareLink)
+    .set({ tokenHash })
+    .where(
+      and(
+        eq(shareLink.id, id),
+        eq(shareLink.breweryId, breweryId),
+        eq(shareLink.chainId, chainId),
+        eq(shareLink.createdBy, createdBy),
+        eq(shareLink.name, name),
+        eq(shareLink.showPrices, showPrices),
+        eq(shareLink.expiresAt, expiresAt),
+        isNull(shareLink.withdrawnAt),
+      ),
+    )
+    .returning({ id: shareLink.id });
+  if (renewed.length === 0)
+    throw problem('already-exists', { detail: 'This id is in use: make a new one' });
 }
 
 export async function editShareLink(
