@@ -23,7 +23,7 @@ const rowsOf = (watchers: readonly Watcher[]) =>
 /** Writes the rows of these watchers, new or renewed. Where one is new, its season is told. */
 export async function arrive(db: Db, watchers: readonly Watcher[]): Promise<void> {
   if (watchers.length === 0) return;
-  // A season or a person that was deleted meanwhile takes its watchers along at the next admission.
+  // Joined, so that one whose season or person was deleted meanwhile does not cost the others theirs.
   await db.execute(sql`
     with written as (
       insert into presence (stream_id, season_id, person_id, seen_at)

@@ -4,7 +4,8 @@ import { cakeCheck } from '../../db/schema/cake.ts';
 import { person } from '../../db/schema/people.ts';
 import { batchEvent, batchNote, reading } from '../../db/schema/readings.ts';
 
-const author = { name: person.name, closedAt: person.closedAt };
+/** Whoever closed the account has another name in its row. */
+const author = person.name;
 
 const readings = (db: Db | Tx, where: SQL | undefined) =>
   db

@@ -3,22 +3,9 @@ import type { BatchEvent, BatchNote, Instrument, Reading } from '#shared/api/rea
 import type { cakeCheck } from '../../db/schema/cake.ts';
 import type { batchEvent, batchNote, instrument, reading } from '../../db/schema/readings.ts';
 
-/** Whoever closed the account is not named any more. */
-const FORMER = 'A former brewer';
-
-export interface Author {
-  name: string;
-  closedAt: Date | null;
-}
-
-const by = (personId: string, { name, closedAt }: Author) => ({
-  personId,
-  name: closedAt === null ? name : FORMER,
-});
-
 const text = (at: Date | null): string | null => at?.toISOString() ?? null;
 
-export const presentReading = (row: typeof reading.$inferSelect, author: Author): Reading => ({
+export const presentReading = (row: typeof reading.$inferSelect, author: string): Reading => ({
   id: row.id,
   version: row.version,
   kind: row.kind,
@@ -30,26 +17,26 @@ export const presentReading = (row: typeof reading.$inferSelect, author: Author)
   instrumentId: row.instrumentId,
   notes: row.notes,
   typed: row.typed,
-  by: by(row.personId, author),
+  by: { personId: row.personId, name: author },
 });
 
-export const presentNote = (row: typeof batchNote.$inferSelect, author: Author): BatchNote => ({
+export const presentNote = (row: typeof batchNote.$inferSelect, author: string): BatchNote => ({
   id: row.id,
   version: row.version,
   text: row.text,
-  by: by(row.personId, author),
+  by: { personId: row.personId, name: author },
   at: row.createdAt.toISOString(),
   editedAt: text(row.editedAt),
 });
 
-export const presentEvent = (row: typeof batchEvent.$inferSelect, author: Author): BatchEvent => ({
+export const presentEvent = (row: typeof batchEvent.$inferSelect, author: string): BatchEvent => ({
   id: row.id,
   version: row.version,
   kind: row.kind,
   plannedOn: row.plannedOn,
   doneAt: text(row.doneAt),
   text: row.text,
-  by: by(row.personId, author),
+  by: { personId: row.personId, name: author },
 });
 
 export const presentInstrument = (row: typeof instrument.$inferSelect): Instrument => ({
@@ -64,7 +51,7 @@ export const presentInstrument = (row: typeof instrument.$inferSelect): Instrume
   retired: row.retiredAt !== null,
 });
 
-export const presentCheck = (row: typeof cakeCheck.$inferSelect, author: Author): CakeCheck => ({
+export const presentCheck = (row: typeof cakeCheck.$inferSelect, author: string): CakeCheck => ({
   batchId: row.batchId,
   version: row.version,
   tasted: row.tasted,
@@ -80,6 +67,6 @@ export const presentCheck = (row: typeof cakeCheck.$inferSelect, author: Author)
   judged: row.judged,
   notes: row.notes,
   typed: row.typed,
-  signedBy: by(row.signedBy, author),
+  signedBy: { personId: row.signedBy, name: author },
   signedAt: row.signedAt.toISOString(),
 });

@@ -27,7 +27,7 @@ export type TalkedChain = Awaited<ReturnType<typeof findChain>>;
 /** Comments with who wrote them. */
 export const selectComments = (db: Db | Tx) =>
   db
-    .select({ row: comment, name: person.name, closedAt: person.closedAt })
+    .select({ row: comment, name: person.name })
     .from(comment)
     .innerJoin(person, eq(person.id, comment.personId));
 export type CommentRow = Awaited<ReturnType<typeof selectComments>>[number];

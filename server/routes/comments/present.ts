@@ -2,11 +2,7 @@ import type { Comment, CommentAbout } from '#shared/api/comment.ts';
 import { initialsOf } from '../people/present.ts';
 import type { CommentRow } from './find.ts';
 
-/** Whoever closed the account is not named any more. */
-const FORMER = 'A former brewer';
-
-export function presentComment({ row, name, closedAt }: CommentRow): Comment {
-  const known = closedAt === null ? name : FORMER;
+export function presentComment({ row, name }: CommentRow): Comment {
   const isRemoved = row.deletedAt !== null;
   return {
     id: row.id,
@@ -14,7 +10,7 @@ export function presentComment({ row, name, closedAt }: CommentRow): Comment {
     seq: row.seq,
     about: presentAbout(row),
     said: row.verdict,
-    by: { personId: row.personId, name: known, initials: initialsOf(known) },
+    by: { personId: row.personId, name, initials: initialsOf(name) },
     text: isRemoved ? null : row.text,
     at: row.createdAt.toISOString(),
     editedAt: isRemoved ? null : (row.editedAt?.toISOString() ?? null),

@@ -4,6 +4,7 @@ import type { Db, Tx } from '../../db/client.ts';
 import { person } from '../../db/schema/people.ts';
 import { pourClearance, pourEvent, pourReading, pourRun } from '../../db/schema/pour.ts';
 import { problem } from '../../problems.ts';
+import { FORMER } from '../account/redact.ts';
 import { presentRun } from './present.ts';
 import type { RunRow, RunRows } from './rows.ts';
 
@@ -51,11 +52,9 @@ export async function presented(db: Db | Tx, rows: RunRows): Promise<PourRun> {
     for (const id of [askedBy, answeredBy]) if (id) ids.add(id);
   if (rows.pour) for (const id of [rows.pour.personId, rows.pour.signedBy]) if (id) ids.add(id);
   const people = await db
-    .select({ id: person.id, name: person.name, closedAt: person.closedAt })
+    .select({ id: person.id, name: person.name })
     .from(person)
     .where(inArray(person.id, [...ids]));
-  const names = new Map(
-    people.map(({ id, name, closedAt }) => [id, closedAt === null ? name : 'A former brewer']),
-  );
-  return presentRun(rows, (id) => names.get(id) ?? 'A former brewer');
+  const names = new Map(people.map(({ id, name }) => [id, name]));
+  return presentRun(rows, (id) => names.get(id) ?? FORMER);
 }

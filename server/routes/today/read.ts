@@ -1,4 +1,4 @@
-import { and, eq, isNull, sql } from 'drizzle-orm';
+import { and, eq, isNull } from 'drizzle-orm';
 import { z } from 'zod';
 import { pourObjection } from '#shared/api/pour.ts';
 import type { TodayFacts } from '#shared/api/today.ts';
@@ -32,12 +32,9 @@ const inSeason = ({ breweryId, seasonId }: Where) =>
 const ofSeason = ({ breweryId, seasonId }: Where) =>
   and(eq(batch.breweryId, breweryId), eq(batch.seasonId, seasonId));
 
-/** Somebody who closed their account has no name any more. */
-const name = sql<string>`case when ${person.closedAt} is null then ${person.name} else 'A former brewer' end`;
-
 async function askedOverrides(db: Db, where: Where) {
   const rows = await db
-    .select({ clearance: pourClearance, batchId: pourRun.batchId, name })
+    .select({ clearance: pourClearance, batchId: pourRun.batchId, name: person.name })
     .from(pourClearance)
     .innerJoin(pourRun, eq(pourRun.id, pourClearance.runId))
     .innerJoin(person, eq(person.id, pourClearance.askedBy))
@@ -68,7 +65,7 @@ const holdIn = (findings: unknown): string =>
 
 async function openRuns(db: Db, where: Where) {
   const rows = await db
-    .select({ batchId: pourRun.batchId, heldBy: name, openedAt: pourRun.openedAt })
+    .select({ batchId: pourRun.batchId, heldBy: person.name, openedAt: pourRun.openedAt })
     .from(pourRun)
     .innerJoin(person, eq(person.id, pourRun.openedBy))
     .where(and(inSeason(where), eq(pourRun.state, 'open')))
