@@ -24,7 +24,10 @@ export default defineConfig({
     serviceWorkers: 'block',
     locale: 'en-GB',
     timezoneId: 'Europe/London',
-    trace: 'retain-on-failure',
+    // A quarter of all work would be the recording: `npx playwright test --trace on` asks for it.
+    trace: 'off',
+    // Where motion matters a test asks for it (`MOVING`): the rest is as quick without.
+    contextOptions: { reducedMotion: 'reduce' },
     launchOptions: {
       ...(existsSync(chromium) ? { executablePath: chromium } : {}),
       args: [

@@ -1,7 +1,9 @@
 import type { Page } from '@playwright/test';
 import { BoardPage } from './support/boardPage.ts';
 import { carryOver, lift, putDown } from './support/drag.ts';
-import { expect, test } from './support/test.ts';
+import { expect, MOVING, test } from './support/test.ts';
+
+test.use(MOVING);
 
 const SEASON = {
   shelves: [

@@ -2,7 +2,9 @@ import { typeBeer } from './support/batchForm.ts';
 import { BoardPage } from './support/boardPage.ts';
 import { carryOver, lift, putDown } from './support/drag.ts';
 import { DOZEN } from './support/season.ts';
-import { expect, test } from './support/test.ts';
+import { expect, MOVING, test } from './support/test.ts';
+
+test.use(MOVING);
 
 test('a newcomer signs up, writes a dozen beers down, drags them onto shelves and mends a Hold', async ({
   page,

@@ -1,6 +1,8 @@
 import { BoardPage } from './support/boardPage.ts';
-import { expect, test } from './support/test.ts';
+import { expect, MOVING, test } from './support/test.ts';
 import { Finger } from './support/touch.ts';
+
+test.use(MOVING);
 
 const SEASON = {
   shelves: [

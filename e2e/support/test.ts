@@ -80,6 +80,9 @@ export const test = base.extend<Fixtures, WorkerFixtures>({
   partner: async ({ brewery, another }, use) => use(await another(brewery.members.brewer)),
 });
 
+/** For tests of what moves: `test.use(MOVING)`. */
+export const MOVING = { contextOptions: { reducedMotion: 'no-preference' } } as const;
+
 const others = (errors: readonly string[], expected: RegExp | null) =>
   errors.filter((text) => !expected?.test(text));
 
