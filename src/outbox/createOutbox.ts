@@ -78,10 +78,12 @@ export function createOutbox(ports: OutboxPorts) {
       if (ports.isHopeful()) await Promise.race([flush(), ports.patience()]);
       const outcome = outcomes.get(entry.id);
       outcomes.delete(entry.id);
+      // Another tab may have sent it in the meantime, or been refused.
+      if (!outcome) show(await storage.read());
       const left = known.find(({ id }) => id === entry.id);
       if (left?.refusal) return { kind: 'refused', entry: left };
       if (left) return { kind: 'waiting' };
-      // Another tab has sent it, and has the answer: this one's pages still lack what it changed.
+      // The other tab has the answer: this one's pages still lack what it changed.
       if (!outcome) ports.taken(entry, undefined);
       return { kind: 'sent', answer: outcome?.kind === 'done' ? outcome.answer : undefined };
     },

@@ -69,46 +69,47 @@ function open(board: Board) {
 }
 
 const frames = (count: number) =>
-  act(async () => {
-    for (let frame = 0; frame < count; frame += 1)
-      await new Promise((resolve) => requestAnimationFrame(resolve));
+  act(() => {
+    for (let frame = 0; frame < count; frame += 1) vi.advanceTimersToNextFrame();
   });
 
 beforeEach(() => {
+  vi.useFakeTimers();
   vi.stubGlobal('CSS', { escape: (text: string) => text });
   Element.prototype.scrollIntoView = () => undefined;
 });
 afterEach(() => {
   cleanup();
+  vi.useRealTimers();
   vi.unstubAllGlobals();
 });
 
-// It waits for many frames, and finding buttons by name takes its time on a busy machine.
+// Finding buttons by name takes its time on a busy machine.
 it(
   'draws no vessel anew while a batch is lifted, walked about and put back',
   { timeout: 30_000 },
-  async () => {
+  () => {
     open(twoShelves());
     expect(vessels).toBe(7);
     const handle = screen.getByRole('button', { name: 'Lift Beer 6' });
     handle.focus();
     fireEvent.keyDown(handle, { key: 'Enter' });
-    await frames(12);
+    frames(12);
     expect(screen.getByRole('status').textContent).toMatch(/^Lifted Beer 6/);
     expect(document.querySelectorAll('[data-gap-open]').length).toBeGreaterThan(1);
 
     slots = 0;
     fireEvent.keyDown(handle, { key: 'ArrowRight' });
-    await frames(2);
+    frames(2);
     expect(screen.getByRole('status').textContent).toContain('Harbour ale, place 2 of 4');
     expect(slots).toBe(1);
     fireEvent.keyDown(handle, { key: 'ArrowRight' });
-    await frames(2);
+    frames(2);
     // The place that is left, and the one that is reached.
     expect(slots).toBe(3);
 
     fireEvent.keyDown(handle, { key: 'Escape' });
-    await frames(8);
+    frames(8);
     expect(screen.getByRole('status').textContent).toBe('Beer 6 put back on the bench.');
     expect(document.querySelectorAll('[data-gap-open]')).toHaveLength(0);
     expect(document.activeElement).toBe(handle);

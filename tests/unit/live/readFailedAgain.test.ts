@@ -14,7 +14,8 @@ async function failed(key: string, error: Error) {
   const stop = new QueryObserver(client, { queryKey: [key], queryFn }).subscribe(() => undefined);
   await expect.poll(() => client.getQueryState([key])?.status).toBe('error');
   readFailedAgain(client);
-  await new Promise((resolve) => setTimeout(resolve, 10));
+  // A read begins before this returns, or not at all.
+  await expect.poll(() => client.isFetching()).toBe(0);
   stop();
   return { reads, data: client.getQueryData([key]) };
 }

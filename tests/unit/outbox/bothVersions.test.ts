@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest';
-import { bothVersions } from '../../../src/outbox/bothVersions.ts';
+import { asWritten, bothVersions } from '../../../src/outbox/bothVersions.ts';
 import type { Entry } from '../../../src/outbox/entry.ts';
 
 const stopped = (body: object, current: unknown): Entry => ({
@@ -32,4 +32,12 @@ test('both versions are shown where they differ, as they were typed', () => {
 
 test('without a row on the server there is nothing to lay beside it', () => {
   expect(bothVersions(stopped({ text: 'a' }, undefined))).toEqual([]);
+});
+
+test('what is never taken is told field by field, to be written anew', () => {
+  const body = { id: 'r', text: '', daysUnderBeer: 4, typed: {}, judged: 'fit', volumeL: null };
+  expect(asWritten(stopped(body, undefined))).toEqual([
+    { label: 'Days under beer', mine: '4' },
+    { label: 'Judged', mine: 'fit' },
+  ]);
 });

@@ -8,6 +8,13 @@ import { restoreAnswers } from '../../../src/kept/restoreAnswers.ts';
 
 const SESSION = ['session'];
 
+const isSession = ({ queryKey }: { queryKey: readonly unknown[] }) => queryKey[0] === 'session';
+const OF_ORLA = { contract: CONTRACT, personId: 'orla', readAt: 1 };
+
+/** As in a browser, where what nobody looks at is given up after five minutes. */
+const browserClient = () =>
+  new QueryClient({ defaultOptions: { queries: { gcTime: 5 * 60_000 } } });
+
 /** Storage of a device, in memory. */
 function device() {
   const rows = new Map<string, Kept>();
@@ -21,9 +28,9 @@ function device() {
 }
 
 function page(store: ReturnType<typeof device>) {
-  const client = new QueryClient();
+  const client = browserClient();
   const person = () => client.getQueryData<{ id: string } | null>(SESSION)?.id ?? null;
-  keepAnswers(client, { store, person, isSession: ({ queryKey }) => queryKey[0] === 'session' });
+  keepAnswers(client, { store, person, isSession });
   const read = (key: string[], data: unknown, kept = true) =>
     client.fetchQuery({ queryKey: key, queryFn: () => data, ...(kept && KEPT) });
   return { client, read };
@@ -96,6 +103,58 @@ describe('what is kept for when there is no connection', () => {
     later.setQueryData(['board', 'reedbed'], { beers: 4 });
     await restoreAnswers(later, SESSION, store);
     expect(later.getQueryData(['board', 'reedbed'])).toEqual({ beers: 4 });
+  });
+
+  it('goes on the start of a page for which nobody is signed in', async () => {
+    const store = device();
+    store.rows.set('b', { ...OF_ORLA, key: ['board', 'reedbed'], data: { beers: 3 } });
+    const client = new QueryClient();
+    client.setQueryData(SESSION, null);
+    keepAnswers(client, { store, person: () => null, isSession });
+    await breath();
+    expect(store.rows.size).toBe(0);
+  });
+
+  it('comes back into an open page, for whoever is signed in there alone', async () => {
+    const store = device();
+    store.rows.set('s', { ...OF_ORLA, key: SESSION, data: { id: 'orla' } });
+    store.rows.set('b', { ...OF_ORLA, key: ['board', 'reedbed'], data: { beers: 3 } });
+    const shows = async (person: unknown) => {
+      const client = browserClient();
+      client.setQueryData(SESSION, person);
+      await restoreAnswers(client, SESSION, store);
+      // Long after what nobody looks at is given up.
+      await vi.advanceTimersByTimeAsync(60 * 60_000);
+      return client.getQueryData(['board', 'reedbed']);
+    };
+    expect(await shows({ id: 'orla' })).toEqual({ beers: 3 });
+    expect(await shows({ id: 'ned' })).toBeUndefined();
+    expect(await shows(null)).toBeUndefined();
+  });
+
+  it('stays in an open page that looks at something else for long', async () => {
+    const { read, client } = page(device());
+    await read(['board', 'reedbed'], { beers: 3 });
+    await read(['people', 'reedbed'], ['Orla'], false);
+    await vi.advanceTimersByTimeAsync(60 * 60_000);
+    expect(client.getQueryData(['board', 'reedbed'])).toEqual({ beers: 3 });
+    expect(client.getQueryData(['people', 'reedbed'])).toBeUndefined();
+  });
+
+  it('is looked over where something new came in, not at each read', async () => {
+    const store = device();
+    const all = vi.spyOn(store, 'all');
+    const { read } = page(store);
+    await read(SESSION, { id: 'orla' });
+    for (const beers of [3, 4, 5]) {
+      await read(['board', 'reedbed'], { beers });
+      await breath();
+    }
+    expect(all).toHaveBeenCalledOnce();
+    expect([...store.rows.values()].map(({ data }) => data)).toContainEqual({ beers: 5 });
+    await read(['batch', 'creek'], 1);
+    await breath();
+    expect(all).toHaveBeenCalledTimes(2);
   });
 
   it('keeps to what was read last', async () => {

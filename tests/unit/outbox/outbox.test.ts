@@ -26,6 +26,7 @@ const REFUSED: Outcome = {
 function browser(answers: (entry: Entry) => Outcome) {
   let stored: Entries = [];
   let last: Promise<void> = Promise.resolve();
+  let held: Promise<void> = Promise.resolve();
   const sent: string[] = [];
   const taken: string[] = [];
   const state = { person: 'orla' as string | null, hope: true, weary: false };
@@ -37,6 +38,7 @@ function browser(answers: (entry: Entry) => Outcome) {
       },
       send: async (one) => {
         sent.push(one.id);
+        await held;
         return answers(one);
       },
       person: () => state.person,
@@ -46,7 +48,13 @@ function browser(answers: (entry: Entry) => Outcome) {
       patience: () => (state.weary ? Promise.resolve() : new Promise<void>(() => {})),
       tell: () => {},
     });
-  return { tab, sent, taken, state, stored: () => stored };
+  /** No answer comes until the returned function is called. */
+  const hold = () => {
+    let release = () => {};
+    held = new Promise((resolve) => (release = resolve));
+    return () => release();
+  };
+  return { tab, sent, taken, state, hold, stored: () => stored };
 }
 
 const done: Outcome = { kind: 'done', answer: { version: 1 } };
@@ -81,6 +89,20 @@ describe('the outbox of a device', () => {
     sent.length = 0;
     await Promise.all([left.flush(), right.flush()]);
     expect(sent).toEqual(['a']);
+  });
+
+  it('tells a tab what another one sent for it', async () => {
+    const { tab, sent, taken, hold } = browser(() => done);
+    const release = hold();
+    const first = tab().add(entry('a'));
+    await expect.poll(() => sent).toEqual(['a']);
+    const second = tab().add(entry('b'));
+    release();
+    expect(await first).toEqual({ kind: 'sent', answer: { version: 1 } });
+    // The first tab had not done yet, and sent this too: the second has no answer of its own.
+    expect(await second).toEqual({ kind: 'sent', answer: undefined });
+    expect(sent).toEqual(['a', 'b']);
+    expect(taken).toEqual(['a', 'b', 'b']);
   });
 
   it('stops at a refusal until somebody chose, and loses nothing behind it', async () => {

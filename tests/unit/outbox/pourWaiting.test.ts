@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { PourState } from '#shared/api/pour.ts';
-import { api } from '#shared/api/urls.ts';
-import { withWaiting } from '../../../src/api/pourWaiting.ts';
+import { api, placeOf } from '#shared/api/urls.ts';
+import { ofPour, withWaiting } from '../../../src/api/pourWaiting.ts';
 import type { Entry } from '../../../src/outbox/entry.ts';
 
 const uuid = (last: number) => `f0000000-0000-4000-8000-${String(last).padStart(12, '0')}`;
@@ -61,6 +61,13 @@ describe('a pour that waits to be sent', () => {
       readings: [{ c: 24, at: '2027-04-03T13:06:00.000Z' }],
       pour: { at: '2027-04-03T13:10:00.000Z', volumeL: 22, readingC: 24 },
     });
+  });
+
+  it('shows what was written at the address of a season, too', () => {
+    const ofSeason = api.pour(placeOf('reedbed', uuid(8)), BATCH);
+    expect(ofSeason).toContain('?season=');
+    expect(withWaiting(NOTHING, [entry(ofSeason, { id: RUN })], where).run?.id).toBe(RUN);
+    expect(ofPour([entry(ofSeason, { id: RUN })], where)).toHaveLength(1);
   });
 
   it('has no leave that the server never gave', () => {

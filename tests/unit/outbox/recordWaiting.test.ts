@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { BatchRecord } from '#shared/api/reading.ts';
-import { api } from '#shared/api/urls.ts';
-import { withRecordWaiting } from '../../../src/api/recordWaiting.ts';
+import { api, placeOf } from '#shared/api/urls.ts';
+import { withRecordWaiting, withTaken } from '../../../src/api/recordWaiting.ts';
 import type { Entry } from '../../../src/outbox/entry.ts';
 
 const uuid = (last: number) => `f0000000-0000-4000-8000-${String(last).padStart(12, '0')}`;
@@ -125,8 +125,55 @@ describe('a batch’s record that waits to be sent', () => {
     expect(after(shown, entry('DELETE', api.cakeCheck('reedbed', BATCH))).check).toBeNull();
   });
 
+  it('shows what was written at the address of a season at any other address of the same batch', () => {
+    const ofSeason = api.readings(placeOf('reedbed', uuid(8)), BATCH);
+    expect(ofSeason).toContain('?season=');
+    const made = entry('POST', ofSeason, read(20, 1.012, late));
+    expect(after(EMPTY, made).readings).toHaveLength(1);
+    const { id: _, ...write } = read(20, 1.013, late);
+    const one = api.reading(placeOf('reedbed', uuid(8)), BATCH, uuid(20));
+    expect(after(EMPTY, made, entry('PUT', one, write)).readings).toMatchObject([{ shown: 1.013 }]);
+  });
+
   it('of another batch is left alone', () => {
     const other = entry('POST', api.readings('reedbed', uuid(7)), read(20, 1.012, late));
     expect(after(EMPTY, other)).toBe(EMPTY);
+  });
+});
+
+describe('a batch’s record once the server has taken an entry', () => {
+  const notes = api.notes('reedbed', BATCH);
+  const made = entry('POST', notes, { id: uuid(30), text: 'Bready' });
+  const note = (version: number, text: string) => ({
+    id: uuid(30),
+    version,
+    text,
+    by: me,
+    at: '2027-04-03T13:00:05.000Z',
+    editedAt: null,
+  });
+  const changed = entry('PUT', api.note('reedbed', BATCH, uuid(30)), { text: 'Pears' });
+
+  it('has the row as the server answered it', () => {
+    expect(withTaken(EMPTY, made, note(1, 'Bready'), where).notes).toEqual([note(1, 'Bready')]);
+    const before = { ...EMPTY, notes: [note(1, 'Bready')] };
+    expect(withTaken(before, changed, note(2, 'Pears'), where).notes).toEqual([note(2, 'Pears')]);
+  });
+
+  it('keeps a row that was read anew since', () => {
+    const newer = { ...EMPTY, notes: [note(3, 'Apples')] };
+    expect(withTaken(newer, changed, note(2, 'Pears'), where).notes).toEqual([note(3, 'Apples')]);
+  });
+
+  it('has it as it was written where the answer went to another tab', () => {
+    const before = { ...EMPTY, notes: [note(1, 'Bready')] };
+    expect(withTaken(before, changed, undefined, where).notes).toMatchObject([{ text: 'Pears' }]);
+  });
+
+  it('is without what was deleted', () => {
+    const gone = entry('DELETE', api.note('reedbed', BATCH, uuid(30)));
+    expect(withTaken({ ...EMPTY, notes: [note(1, 'Bready')] }, gone, undefined, where)).toEqual(
+      EMPTY,
+    );
   });
 });
