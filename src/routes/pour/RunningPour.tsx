@@ -2,7 +2,7 @@ import { useMemo } from 'react';
 import type { Batch } from '#shared/api/batch.ts';
 import type { PourRun } from '#shared/api/pour.ts';
 import { leaveAt } from '#shared/pour/leave.ts';
-import { pourStanding } from '#shared/pour/standing.ts';
+import { endsLeave, pourStanding } from '#shared/pour/standing.ts';
 import { sentenceOf } from '../../api/errors.ts';
 import { usePourCommand } from '../../api/pour.ts';
 import { Notice } from '../../components/ui/Notice.tsx';
@@ -67,14 +67,13 @@ function useView({ run, batch, cakeOf }: RunningPourProps): PourView | null {
     [board, batch.id, run, now, units],
   );
   if (!standing) return null;
-  const kills = standing.wort.findings.some(({ rule }) => rule === 'kills-yeast');
   return {
     run,
     batch,
     cakeOf,
     now,
     standing,
-    leave: leaveAt(run, now, kills),
+    leave: leaveAt(run, now, endsLeave(standing)),
     // Also without a connection: what is written down then is kept and sent later.
     mine: run.heldBy.personId === board.me.personId && board.me.can.setStages,
     send: command.mutateAsync,
