@@ -1,7 +1,8 @@
 import type { Page } from '@playwright/test';
 import { readFileSync } from 'node:fs';
 import { expectAccessible } from './support/axe.ts';
-import { BREWED, dayAgo, fill } from './support/batchPage.ts';
+import { BREWED, fill } from './support/batchPage.ts';
+import { dayFromToday } from './support/days.ts';
 import { expect, test } from './support/test.ts';
 
 const table = (page: Page) => page.getByRole('region', { name: 'Readings' }).getByRole('table');
@@ -20,14 +21,14 @@ test('a fermentation is followed with the mouse, from the board to the signed ca
   await board.getByRole('button', { name: 'Log a reading' }).click();
   await fill(board, { 'Gravity, as shown': '1,018', 'Sample temperature': '26' });
   await expect(board.getByText(/Corrected: 1\.019/)).toBeVisible();
-  await fill(board, { When: `${dayAgo(7)}T09:00` });
+  await fill(board, { When: `${dayFromToday(-7)}T09:00` });
   await board.getByRole('button', { name: 'Write it down' }).click();
   await expect(table(board)).toContainText('1.019');
   await expect(table(board)).toContainText('1.018 at 26 °C');
 
   await board.getByRole('button', { name: 'Log a reading' }).click();
   await board.getByText('Temperature', { exact: true }).click();
-  await fill(board, { 'Temperature of the beer': '19,4', When: `${dayAgo(7)}T09:05` });
+  await fill(board, { 'Temperature of the beer': '19,4', When: `${dayFromToday(-7)}T09:05` });
   await board.getByRole('button', { name: 'Write it down' }).click();
   await expect(table(board).getByRole('row')).toHaveCount(3);
   await expectAccessible(board);
@@ -35,7 +36,7 @@ test('a fermentation is followed with the mouse, from the board to the signed ca
   const download = board.waitForEvent('download');
   await board.getByRole('button', { name: 'Export' }).click();
   const file = await (await download).path();
-  expect(readFileSync(file, 'utf8')).toContain(`${dayAgo(7)} 09:05,`);
+  expect(readFileSync(file, 'utf8')).toContain(`${dayFromToday(-7)} 09:05,`);
 
   await board.getByRole('button', { name: /^Change 19\.4 °C/ }).click();
   await expect(board.getByLabel('Temperature of the beer')).toHaveValue('19,4');
@@ -99,6 +100,30 @@ test('a reading is written down by keyboard alone, and its faults are said at th
   await board.keyboard.press('Enter');
   await expect(table(board)).toContainText('1.021');
   await expect(board.getByRole('dialog')).toHaveCount(0);
+});
+
+test('what was done is deleted only when asked, and the focus then stays on the page', async ({
+  board,
+  brewery,
+}) => {
+  const { batches } = await brewery.write(BREWED);
+  await board.goto(`/b/${brewery.slug}/batches/${batches['Ebb Pale'] ?? ''}`);
+  const done = board.getByRole('listitem').filter({ hasText: 'Citrus peel' });
+  await board.getByRole('button', { name: 'Add something' }).click();
+  await fill(board, { 'What and how much': 'Citrus peel' });
+  await board.getByRole('button', { name: 'Write it down' }).click();
+  await expect(done).toBeVisible();
+
+  await done.getByRole('button').click();
+  await board.getByRole('button', { name: 'Delete', exact: true }).click();
+  const asking = board.getByRole('dialog', { name: 'Delete what was done' });
+  await asking.getByRole('button', { name: 'Leave it' }).click();
+  await expect(asking).toHaveCount(0);
+  await board.getByRole('button', { name: 'Delete', exact: true }).click();
+  await asking.getByRole('button', { name: 'Delete', exact: true }).click();
+  await expect(board.getByRole('dialog')).toHaveCount(0);
+  await expect(done).toHaveCount(0);
+  await expect(board.locator('#main')).toBeFocused();
 });
 
 test('a partner sees a reading as it is written down', async ({ board, partner, brewery }) => {

@@ -1,7 +1,7 @@
-import { addDays } from '#shared/units/day.ts';
 import { hashToken, newToken } from '../server/auth/tokens.ts';
 import { shareLink } from '../server/db/schema/sharing.ts';
 import { expectAccessible } from './support/axe.ts';
+import { dayFromToday } from './support/days.ts';
 import { expect, test } from './support/test.ts';
 
 test('a shared chain runs down a phone’s page', async ({ brewery, db, page }) => {
@@ -17,7 +17,6 @@ test('a shared chain runs down a phone’s page', async ({ brewery, db, page }) 
     ],
   });
   const token = newToken();
-  const today = new Date().toISOString().slice(0, 10);
   await db.insert(shareLink).values({
     id: crypto.randomUUID(),
     breweryId: brewery.id,
@@ -25,7 +24,7 @@ test('a shared chain runs down a phone’s page', async ({ brewery, db, page }) 
     name: 'For a phone',
     tokenHash: hashToken(token),
     createdBy: brewery.members['head-brewer'].id,
-    expiresAt: new Date(`${addDays(today, 30)}T00:00:00Z`),
+    expiresAt: new Date(`${dayFromToday(30)}T00:00:00Z`),
   });
   await page.goto(`/shared/${token}`);
   await expect(page.getByRole('heading', { level: 1, name: 'Harbour ale' })).toBeVisible();

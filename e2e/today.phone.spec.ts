@@ -1,8 +1,7 @@
 import { expectAccessible } from './support/axe.ts';
+import { dayFromToday } from './support/days.ts';
 import { cakeThatWaits } from './support/pour.ts';
 import { expect, test } from './support/test.ts';
-
-const day = (ahead: number) => new Date(Date.now() + ahead * 86_400_000).toISOString().slice(0, 10);
 
 test('what is due stands first, each one tap from doing it', async ({
   board: page,
@@ -52,7 +51,7 @@ test('an empty week says what comes next, and when', async ({ board: page, brewe
   await page.goto(`/b/${brewery.slug}/today`);
   await expect(page.getByRole('heading', { name: 'Nothing is due' })).toBeVisible();
   await brewery.write({
-    shelves: [{ name: 'Clean ale', batches: [{ name: 'Creek Blonde', brewOn: day(30) }] }],
+    shelves: [{ name: 'Clean ale', batches: [{ name: 'Creek Blonde', brewOn: dayFromToday(30) }] }],
   });
   await page.reload();
   await expect(page.getByText(/^Next: Brew Creek Blonde, \w{3} \d+ \w+\.$/)).toBeVisible();

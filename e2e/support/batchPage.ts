@@ -1,9 +1,6 @@
 import type { Page } from '@playwright/test';
 import type { BoardPlan } from './board.ts';
-
-/** A calendar day so long before today. */
-export const dayAgo = (days: number): string =>
-  new Date(Date.now() - days * 86_400_000).toISOString().slice(0, 10);
+import { dayFromToday } from './days.ts';
 
 /** A pale ale that ferments, with the next wort planned for its cake. */
 export const BREWED: BoardPlan = {
@@ -17,7 +14,7 @@ export const BREWED: BoardPlan = {
           og: 1.05,
           fg: 1.012,
           srm: 7,
-          brewOn: dayAgo(11),
+          brewOn: dayFromToday(-11),
           stage: 'fermenting',
           readOg: 1.05,
           readVolumeL: 22,

@@ -5,12 +5,12 @@ import { api } from '#shared/api/urls.ts';
 import { cake } from '../../server/db/schema/cake.ts';
 import { batch } from '../../server/db/schema/chain.ts';
 import type { Db } from '../../server/db/client.ts';
+import { dayFromToday } from './days.ts';
 import { expect, type Brewing } from './test.ts';
 
-/** A blonde that was racked today and whose cake waits, a pale ale for it, and one behind that. */
-export async function cakeThatWaits(brewery: Brewing, db: Db, change: object = {}) {
-  const day = (ahead: number) =>
-    new Date(Date.now() + ahead * 86_400_000).toISOString().slice(0, 10);
+/** A blonde that was racked on the day and whose cake waits, a pale ale for it, and one behind that. */
+export async function cakeThatWaits(brewery: Brewing, db: Db, { on = new Date() } = {}) {
+  const day = (ahead: number) => dayFromToday(ahead, on);
   const { batches } = await brewery.write({
     shelves: [
       {
@@ -22,7 +22,6 @@ export async function cakeThatWaits(brewery: Brewing, db: Db, change: object = {
             stage: 'racked',
             rackedOn: day(0),
             readFg: 1.011,
-            ...change,
           },
           { name: 'Ebb Pale', og: 1.052, fg: 1.013, srm: 7, ibu: 38, brewOn: day(0) },
           { name: 'Jetty Amber', og: 1.054, fg: 1.013, srm: 9, ibu: 40, brewOn: day(20) },
@@ -87,6 +86,7 @@ export class PourPage {
     await dialog.getByLabel('Volume in the vessel').fill(volume);
     await dialog.getByLabel('Original gravity').fill(gravity);
     await this.press(dialog.getByRole('button', { name: 'Record the pour' }));
+    await expect(dialog).toBeHidden();
   }
 
   /** A reading that was taken a while ago, as a telephone would send it late. */
