@@ -24,7 +24,7 @@ const part = (page: Page, title: string) =>
 
 // A wrong password and a common one are refused, and the browser calls a refusal an error.
 test.describe('name, address and password', () => {
-  test.use({ expectedErrors: /status of 422/ });
+  test.use({ expectedErrors: /status of 422 .*\/api\/account\/(email|password)\)$/ });
 
   test('are changed by keyboard, each fault told at its field', async ({
     board: page,
@@ -83,7 +83,7 @@ test('a sign-in elsewhere is seen and ended, and its page asks to sign in', asyn
 });
 
 test.describe('closing the account', () => {
-  test.use({ expectedErrors: /status of 422/ });
+  test.use({ expectedErrors: /status of 422 .*\/api\/account\/closing\)$/ });
 
   test('is refused to the only head brewer, and offers to hand over', async ({
     board: page,

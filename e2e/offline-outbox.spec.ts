@@ -9,7 +9,8 @@ import { expect, test } from './support/test.ts';
 
 test.use({
   serviceWorkers: 'allow',
-  expectedErrors: /ERR_INTERNET_DISCONNECTED|status of (401|409|412)/,
+  expectedErrors:
+    /ERR_INTERNET_DISCONNECTED|status of (409 .*\/pour\/readings|412 .*\/notes\/[^/]+)\)$/,
 });
 
 const readingsOf = (db: Parameters<typeof cakeThatWaits>[1], batchId: string) =>
@@ -210,6 +211,55 @@ test('two versions of a note are shown side by side, and one is chosen', async (
   await expect(box.getByText('Everything has been sent.')).toBeVisible();
   const [note] = await db.select().from(batchNote).where(eq(batchNote.id, id));
   expect(note).toMatchObject({ text: 'Smells of pears', version: 3 });
+});
+
+test('a second correction without a connection leaves the first in place', async ({
+  board: page,
+  brewery,
+  context,
+  db,
+}) => {
+  const { first } = await cakeThatWaits(brewery, db);
+  const url = `/api/breweries/${brewery.slug}/batches/${first}/readings`;
+  const made = await page.request.post(url, {
+    headers: { 'Sec-Fetch-Site': 'same-origin' },
+    data: {
+      id: crypto.randomUUID(),
+      kind: 'gravity',
+      takenAt: new Date().toISOString(),
+      shown: 1.02,
+      method: 'hydrometer',
+      sampleC: null,
+      instrumentId: null,
+      notes: '',
+      typed: {},
+    },
+  });
+  expect(made.ok(), await made.text()).toBe(true);
+  await page.goto(`/b/${brewery.slug}/batches/${first}`);
+  const readings = page.getByRole('region', { name: 'Readings' });
+  const form = page.getByRole('dialog');
+  const correct = async (label: string, text: string) => {
+    await readings.getByRole('button', { name: /^Change 1\./ }).click();
+    await form.getByLabel(label).fill(text);
+    await form.getByRole('button', { name: 'Save', exact: true }).click();
+    await expect(form).toBeHidden();
+  };
+  await expect(readings).toContainText('1.020');
+  await pagesAreKept(page);
+
+  await context.setOffline(true);
+  await correct('Gravity, as shown', '1.012');
+  await expect(readings).toContainText('1.012');
+  await correct('Note', 'Bready');
+  await expect(readings).toContainText('1.012');
+  await expect(waiting(page)).toHaveAccessibleName('2 waiting');
+
+  await context.setOffline(false);
+  await nothingWaits(page);
+  await expect(readings).toContainText('1.012');
+  const rows = await db.select().from(reading).where(eq(reading.batchId, first));
+  expect(rows).toMatchObject([{ shown: 1.012, notes: 'Bready', version: 3 }]);
 });
 
 test('a reading, and the cake as it was judged, are written down without a connection', async ({
