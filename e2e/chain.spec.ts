@@ -68,7 +68,10 @@ test('what is said of a link keeps what the link said, and is marked unread for 
 
   const taster = await another(brewery.members.taster);
   await taster.goto(`/b/${brewery.slug}`);
-  await taster.getByRole('link', { name: '1 new comment on Clean ale' }).click();
+  const unread = taster.getByRole('link', { name: '1 new comment on Clean ale' });
+  await expect(unread).toBeVisible();
+  await expectAccessible(taster);
+  await unread.click();
   const talk = taster.getByRole('list', { name: 'Talk' });
   await expect(talk).toContainText('Count the cells before we decide.');
   await expect(talk).toContainText('new');

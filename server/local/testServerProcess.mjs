@@ -47,7 +47,7 @@ export async function startTestServer({
     );
   await sql(`create database ${name}`);
   const databaseUrl = cluster.url(name);
-  const start = (/** @type {number} */ on) =>
+  const start = (/** @type {number} */ on, /** @type {Record<string, string>} */ changed = {}) =>
     startServer(
       {
         BARMKIN_MODE: 'test',
@@ -61,6 +61,7 @@ export async function startTestServer({
         PUBLIC_URL: '',
         NODE_ENV: 'production',
         ...settings,
+        ...changed,
       },
       logFile,
     );
@@ -82,9 +83,9 @@ export async function startTestServer({
       process.kill(server.pid, 'SIGKILL');
       await server.ended;
     },
-    /** Starts it again at the same address, after a kill. */
-    again: async () => {
-      server = await start(Number(new URL(server.url).port));
+    /** Starts it again at the same address, after a kill, with some settings changed. */
+    again: async (/** @type {Record<string, string>} */ changed = {}) => {
+      server = await start(Number(new URL(server.url).port), changed);
     },
     close,
   };

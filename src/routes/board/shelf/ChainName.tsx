@@ -31,7 +31,7 @@ export function UnreadMark({ chain }: { chain: Chain }) {
     <Link
       to={path(`chains/${chain.id}`)}
       aria-label={`${count(unread, 'new comment')} on ${chain.name}`}
-      className="mt-1 inline-flex items-center gap-1 rounded-verdict bg-bottle px-2 text-label font-bold text-on-bottle max-tablet:min-h-11 max-tablet:px-3"
+      className="mt-1 inline-flex min-h-6 items-center gap-1 rounded-verdict bg-bottle px-2 text-label font-bold text-on-bottle max-tablet:min-h-11 max-tablet:px-3"
     >
       <MessageSquare size={14} aria-hidden />
       {unread} new
