@@ -57,13 +57,40 @@ const MS_A_DAY = 24 * 60 * 60 * 1000;
 /** When somebody was last seen is known to within this time, so that hardly any request writes it. */
 const SEEN_WITHIN_MS = 10 * 60 * 1000;
 
-/** Who is signed in. The 30 days start again with use, written at most once a day. */
+/** What tells of a sign-in who it is, and whether it is to be prolonged. */
+export const SESSION = {
+  person,
+  expiresAt: session.expiresAt,
+  createdAt: session.createdAt,
+  seenAt: session.seenAt,
+};
+type SessionRow = Pick<typeof session.$inferSelect, 'expiresAt' | 'createdAt' | 'seenAt'>;
+
+export interface SessionKey extends Record<string, unknown> {
+  tokenHash: string;
+  now: Date;
+}
+
+/** Who is signed in. */
 export async function findSignedIn(db: Db, clock: Clock, req: Request): Promise<SignedIn | null> {
+  return findSession(db, clock, req, async (key) => (await sessionQuery(db).execute(key))[0]);
+}
+
+/**
+ * The request's session, with whatever else `ask` reads beside it. The 30 days start again with use,
+ * written at most once a day.
+ */
+export async function findSession<Found extends SessionRow>(
+  db: Db,
+  clock: Clock,
+  req: Request,
+  ask: (key: SessionKey) => Promise<Found | undefined>,
+): Promise<(Found & { tokenHash: string }) | null> {
   const token = tokenIn(req);
   if (token === null) return null;
   const tokenHash = hashToken(token);
   const now = clock.now();
-  const [found] = await sessionQuery(db).execute({ tokenHash, now });
+  const found = await ask({ tokenHash, now });
   if (!found) return null;
   const isOld = found.expiresAt.getTime() < now.getTime() + SESSION_MS - MS_A_DAY;
   const seenAt = found.seenAt ?? found.createdAt;
@@ -75,7 +102,7 @@ export async function findSignedIn(db: Db, clock: Clock, req: Request): Promise<
       .where(eq(session.tokenHash, tokenHash));
   }
   if (isOld) giveCookie(req, token);
-  return { person: found.person, tokenHash };
+  return { ...found, tokenHash };
 }
 
 /** Who is signed in, asked in passing: the session is not prolonged and no cookie is given. */
@@ -86,21 +113,18 @@ export async function personOf(db: Db, now: Date, req: Request): Promise<string 
   return found?.person.id ?? null;
 }
 
+/** The session that a token's hash opens, while it lasts. */
+export const isOpen = () =>
+  and(
+    eq(session.tokenHash, sql.placeholder('tokenHash')),
+    gt(session.expiresAt, sql.placeholder('now')),
+  );
+
 const sessionQuery = oncePer((db: Db) =>
   db
-    .select({
-      person,
-      expiresAt: session.expiresAt,
-      createdAt: session.createdAt,
-      seenAt: session.seenAt,
-    })
+    .select(SESSION)
     .from(session)
     .innerJoin(person, eq(person.id, session.personId))
-    .where(
-      and(
-        eq(session.tokenHash, sql.placeholder('tokenHash')),
-        gt(session.expiresAt, sql.placeholder('now')),
-      ),
-    )
+    .where(isOpen())
     .prepare('session'),
 );

@@ -6,10 +6,18 @@ import type { Deps } from '../deps.ts';
 import type { Db } from '../db/client.ts';
 import { oncePer } from '../db/oncePer.ts';
 import { brewery, membership } from '../db/schema/brewery.ts';
+import { person, session } from '../db/schema/people.ts';
 import { season } from '../db/schema/season.ts';
 import { notFound, problem } from '../problems.ts';
 import { findGuest, type GuestChains } from './guests.ts';
-import { findSignedIn, type PersonRow, type SignedIn } from './sessions.ts';
+import {
+  findSession,
+  findSignedIn,
+  isOpen,
+  SESSION,
+  type PersonRow,
+  type SignedIn,
+} from './sessions.ts';
 
 export type { SignedIn } from './sessions.ts';
 
@@ -34,35 +42,54 @@ export async function whoAsks(
   req: Request,
 ): Promise<{ signedIn: SignedIn | null; member: Member | null }> {
   if (who === 'anyone') return { signedIn: null, member: null };
+  const place = who === 'member' ? placeAsked(req) : null;
+  if (place) return findMember(deps, req, place);
   const signedIn = await findSignedIn(deps.db, deps.clock, req);
   if (!signedIn) throw problem('not-signed-in');
-  if (who === 'signed-in') return { signedIn, member: null };
-  return { signedIn, member: await findMember(deps, req, signedIn.person) };
+  if (who === 'member') throw notFound();
+  return { signedIn, member: null };
 }
 
-/** Another's brewery does not exist: the answer is the same as for a name that nobody has. */
+/**
+ * Session and membership in one statement: it is asked before every request. Another's brewery does
+ * not exist: the answer is the same as for a name that nobody has.
+ */
 async function findMember(
-  { db }: Pick<Deps, 'db'>,
+  { db, clock }: Pick<Deps, 'db' | 'clock'>,
   req: Request,
-  person: PersonRow,
-): Promise<Member> {
-  const slug = req.params.brewery;
-  if (typeof slug !== 'string' || slug.length > 80 || slug.includes('\0')) throw notFound();
-  const asked = seasonAsked(req);
-  const [found] = await memberQuery(db).execute({ slug, personId: person.id, asked });
-  if (found) return { person, guestOf: null, ...found };
-  return findGuestOr404(db, slug, asked, person);
+  { slug, asked }: PlaceAsked,
+): Promise<{ signedIn: SignedIn; member: Member }> {
+  const found = await findSession(
+    db,
+    clock,
+    req,
+    async (key) => (await memberQuery(db).execute({ ...key, slug, asked }))[0],
+  );
+  if (!found) throw problem('not-signed-in');
+  const { person, tokenHash, brewery, role, seasonId, isArchived } = found;
+  const member =
+    brewery && role && seasonId
+      ? { person, guestOf: null, brewery, role, seasonId, isArchived }
+      : await findGuestOr404(db, slug, asked, person);
+  return { signedIn: { person, tokenHash }, member };
+}
+
+interface PlaceAsked {
+  slug: string;
+  /** The season; null: the current one. */
+  asked: string | null;
 }
 
 const uuid = z.uuid().toLowerCase();
 
-/** Null: the current one. What cannot be a season is none. */
-function seasonAsked({ params, query }: Request): string | null {
+/** The brewery and season that an address names; null where it cannot name any. */
+function placeAsked({ params, query }: Request): PlaceAsked | null {
+  const slug = params.brewery;
+  if (typeof slug !== 'string' || slug.length > 80 || slug.includes('\0')) return null;
   const asked = params.season ?? query.season;
-  if (asked === undefined) return null;
+  if (asked === undefined) return { slug, asked: null };
   const id = uuid.safeParse(asked);
-  if (!id.success) throw notFound();
-  return id.data;
+  return id.success ? { slug, asked: id.data } : null;
 }
 
 /** A guest has the strongest of the roles that they have on a chain; each chain is asked again. */
@@ -79,24 +106,31 @@ async function findGuestOr404(
   return { person, role, ...where, guestOf: chains };
 }
 
+/** The brewery is null where there is none of this name, role and season for who is no member. */
 const memberQuery = oncePer((db: Db) =>
   db
     .select({
+      ...SESSION,
       brewery,
       role: membership.role,
       seasonId: season.id,
       isArchived: sql<boolean>`${season.archivedAt} is not null`,
     })
-    .from(brewery)
-    .innerJoin(membership, eq(membership.breweryId, brewery.id))
-    .innerJoin(season, eq(season.breweryId, brewery.id))
-    .where(
+    .from(session)
+    .innerJoin(person, eq(person.id, session.personId))
+    .leftJoin(brewery, eq(brewery.slug, sql.placeholder('slug')))
+    .leftJoin(
+      membership,
+      and(eq(membership.breweryId, brewery.id), eq(membership.personId, person.id)),
+    )
+    .leftJoin(
+      season,
       and(
-        eq(brewery.slug, sql.placeholder('slug')),
-        eq(membership.personId, sql.placeholder('personId')),
+        eq(season.breweryId, membership.breweryId),
         sql`(${sql.placeholder('asked')}::uuid is null or ${season.id} = ${sql.placeholder('asked')}::uuid)`,
       ),
     )
+    .where(isOpen())
     .orderBy(sql`(${season.id} = ${brewery.currentSeasonId}) desc nulls last`, season.createdAt)
     .limit(1)
     .prepare('member'),
