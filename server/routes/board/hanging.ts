@@ -1,5 +1,5 @@
-import { and, count, exists, gt, inArray, isNotNull, isNull, eq, sql, type SQL } from 'drizzle-orm';
-import { unionAll, type PgColumn } from 'drizzle-orm/pg-core';
+import { and, count, eq, exists, gt, inArray, isNotNull, isNull, sql, type SQL } from 'drizzle-orm';
+import type { PgColumn } from 'drizzle-orm/pg-core';
 import { listed } from '#shared/rules/say.ts';
 import type { Tx } from '../../db/client.ts';
 import { pourReading, pourRun } from '../../db/schema/pour.ts';
@@ -21,46 +21,62 @@ export async function demandNothingHangs(
   kind: 'in-use' | 'not-undoable' = 'in-use',
 ): Promise<void> {
   if (ids.length === 0) return;
-  const hanging = await hangingOn(hand, ids);
-  const [first] = hanging;
+  const rows = await hangingOn(hand, ids);
+  const [first] = rows;
   if (!first) return;
   const { name } = one([...hand.board.chains, ...hand.board.batches], first.id);
-  const has = hanging.filter(({ id }) => id === first.id).map(({ n, what }) => counted(n, what));
+  const has = rows.filter(({ id }) => id === first.id).map(({ words }) => words);
   throw problem(kind, { detail: `${name} has ${listed(has)}, which would go with it` });
 }
 
-const counted = (n: number, what: string) => `${n} ${what}${n === 1 ? '' : 's'}`;
-
-function hangingOn({ tx, now }: Hand, ids: readonly string[]) {
-  const of = counting(tx, ids);
-  const isSaid = isNull(comment.deletedAt);
-  const isBegun = exists(
-    tx.select({ id: pourReading.id }).from(pourReading).where(eq(pourReading.runId, pourRun.id)),
-  );
-  const isOpen = and(isNull(chainGuest.withdrawnAt), isNull(chainGuest.joinedAt));
-  return unionAll(
-    of('reading', reading.batchId),
-    of('note', batchNote.batchId),
-    of('event', batchEvent.batchId),
-    of('begun pour', pourRun.batchId, isBegun),
-    of('begun pour', pourRun.cakeBatchId, isBegun),
-    of('comment', comment.batchId, isSaid),
-    of('comment', comment.chainId, isSaid),
-    of('link', shareLink.chainId, and(isNull(shareLink.withdrawnAt), gt(shareLink.expiresAt, now))),
-    of(
-      'guest',
-      chainGuest.chainId,
-      and(isNull(chainGuest.withdrawnAt), isNotNull(chainGuest.joinedAt)),
-    ),
-    of('open invitation', chainGuest.chainId, and(isOpen, gt(chainGuest.expiresAt, now))),
-  );
-}
-
-/** How many rows of a table refer to each of these. */
-const counting =
-  (tx: Tx, ids: readonly string[]) => (what: string, column: PgColumn, which?: SQL) =>
-    tx
-      .select({ id: sql<string>`${column}`, what: sql<string>`${what}::text`, n: count() })
+/** By batch or shelf: what there is of each kind, in words. */
+async function hangingOn({ tx, now }: Hand, ids: readonly string[]) {
+  const rows: { id: string; words: string }[] = [];
+  for (const { of: column, kind, which } of kindsOf(tx, now)) {
+    const found = await tx
+      .select({ id: sql<string>`${column}`, n: count() })
       .from(column.table)
       .where(and(inArray(column, [...ids]), which))
       .groupBy(column);
+    const [single, several] = kind;
+    rows.push(...found.map(({ id, n }) => ({ id, words: `${n} ${n === 1 ? single : several}` })));
+  }
+  return rows;
+}
+
+interface Kind {
+  /** The column that names the batch or the shelf. */
+  of: PgColumn;
+  kind: readonly [single: string, several: string];
+  which?: SQL | undefined;
+}
+
+function kindsOf(tx: Tx, now: Date): readonly Kind[] {
+  const isBegun = exists(
+    tx.select({ id: pourReading.id }).from(pourReading).where(eq(pourReading.runId, pourRun.id)),
+  );
+  const isSaid = isNull(comment.deletedAt);
+  const isGood = and(isNull(shareLink.withdrawnAt), gt(shareLink.expiresAt, now));
+  const isGuest = and(isNull(chainGuest.withdrawnAt), isNotNull(chainGuest.joinedAt));
+  const isOpen = and(
+    isNull(chainGuest.withdrawnAt),
+    isNull(chainGuest.joinedAt),
+    gt(chainGuest.expiresAt, now),
+  );
+  return [
+    { of: reading.batchId, kind: ['reading', 'readings'] },
+    { of: batchNote.batchId, kind: ['note', 'notes'] },
+    { of: batchEvent.batchId, kind: ['event', 'events'] },
+    { of: pourRun.batchId, kind: ['begun pour', 'begun pours'], which: isBegun },
+    {
+      of: pourRun.cakeBatchId,
+      kind: ['pour begun onto it', 'pours begun onto it'],
+      which: isBegun,
+    },
+    { of: comment.batchId, kind: ['comment', 'comments'], which: isSaid },
+    { of: comment.chainId, kind: ['comment', 'comments'], which: isSaid },
+    { of: shareLink.chainId, kind: ['link', 'links'], which: isGood },
+    { of: chainGuest.chainId, kind: ['guest', 'guests'], which: isGuest },
+    { of: chainGuest.chainId, kind: ['open invitation', 'open invitations'], which: isOpen },
+  ];
+}
