@@ -110,7 +110,7 @@ function responsesOf(route: Route, problem: z.ZodType) {
 }
 
 /** What can go wrong follows from what the operation asks for. */
-function problemsOf({ operation, who }: Route): ProblemKind[] {
+export function problemsOf({ operation, who }: Route): ProblemKind[] {
   const { body, query, ifMatch, method, path, problems = [] } = operation;
   return [
     ...(who === 'anyone' ? [] : (['not-signed-in'] as const)),

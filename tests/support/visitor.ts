@@ -1,4 +1,5 @@
 import type { Person } from '#shared/api/people.ts';
+import { demandDeclared } from './declared.ts';
 
 export interface Reply {
   status: number;
@@ -15,7 +16,10 @@ interface Options {
   headers?: Record<string, string>;
 }
 
-/** Somebody with a browser: keeps the cookies, sends what a browser would send. */
+/**
+ * Somebody with a browser: keeps the cookies, sends what a browser would send. A problem that the
+ * API's document does not name fails the test.
+ */
 export class Visitor {
   readonly #cookies: Map<string, string>;
 
@@ -44,7 +48,9 @@ export class Visitor {
     });
     this.#take(response);
     const text = await textOf(response);
-    return { status: response.status, headers: response.headers, body: parsed(text) };
+    const reply = { status: response.status, headers: response.headers, body: parsed(text) };
+    demandDeclared(method.toUpperCase(), path, reply.body);
+    return reply;
   }
 
   get(path: string) {

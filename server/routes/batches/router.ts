@@ -51,7 +51,7 @@ const add = forMember(
     body: batchCreate,
     answer: batch,
     status: 201,
-    problems: ['already-exists'],
+    problems: ['already-exists', 'season-archived'],
   },
   canEditBatches,
   (asked, member) => answerBatch(asked, member, asked.body.id, addBatch(asked.body)),
@@ -65,6 +65,7 @@ const edit = forMember(
     path: single,
     summary: 'Change what is planned of a batch',
     body: batchPatch,
+    problems: ['season-archived'],
   },
   canEditBatches,
   (asked, member) => {
@@ -84,7 +85,7 @@ const remove = forMember(
     answer: null,
     status: 204,
     ifMatch: true,
-    problems: ['in-use'],
+    problems: ['in-use', 'season-archived'],
   },
   canEditBatches,
   async (asked, member) => {
@@ -101,7 +102,7 @@ const changeStage = forMember(
     path: stage,
     summary: 'Brewed, racked, scrapped, or back to pencilled, with what was read',
     body: stageRequest,
-    problems: ['in-use'],
+    problems: ['in-use', 'season-archived'],
   },
   canEditBatches,
   (asked, member) => {
@@ -118,6 +119,7 @@ const changeLink = forMember(
     path: link,
     summary: 'Change how the cake of the batch before goes under this one',
     body: linkPatch,
+    problems: ['season-archived'],
   },
   canEditBatches,
   (asked, member) => {
@@ -136,7 +138,7 @@ const accept = forMember(
     path: acceptance,
     summary: 'Accept a link’s hold, with a reason',
     body: acceptanceRequest,
-    problems: ['not-acceptable'],
+    problems: ['not-acceptable', 'season-archived'],
   },
   canAcceptHolds,
   (asked, member) => {
@@ -152,6 +154,7 @@ const withdraw = forMember(
     method: 'delete',
     path: acceptance,
     summary: 'Take an acceptance back',
+    problems: ['season-archived'],
   },
   canAcceptHolds,
   (asked, member) =>

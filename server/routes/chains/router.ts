@@ -20,7 +20,7 @@ const add = forMember(
     body: chainCreate,
     answer: chain,
     status: 201,
-    problems: ['already-exists'],
+    problems: ['already-exists', 'season-archived'],
   },
   canEditChains,
   async (asked, member) => {
@@ -40,7 +40,7 @@ const edit = forMember(
     answer: chain,
     status: 200,
     ifMatch: true,
-    problems: ['in-use'],
+    problems: ['in-use', 'season-archived'],
   },
   canEditChains,
   async (asked, member) => {
@@ -60,7 +60,7 @@ const remove = forMember(
     answer: null,
     status: 204,
     ifMatch: true,
-    problems: ['in-use'],
+    problems: ['in-use', 'season-archived'],
   },
   canEditChains,
   async (asked, member) => {
@@ -77,6 +77,7 @@ const pull = forMember(
     summary: 'Brew every pencilled batch of a chain on the day the yeast before it is taken',
     answer: datesPulled,
     status: 200,
+    problems: ['season-archived'],
   },
   canEditBatches,
   async (asked, member) => {

@@ -34,6 +34,7 @@ export const houseRulesRoutes = [
       answer: contract,
       status: 200,
       ifMatch: true,
+      problems: ['season-archived'],
     },
     canEditSeason,
     async (asked, member) => {

@@ -13,6 +13,14 @@ import { answerPour, byHolder, byHolderToTheEnd, onRun, readPour } from './scene
 
 const path = (of: (slug: string, batchId: string) => string) => pathOf(of(':brewery', ':id'));
 
+const PROBLEMS = [
+  'pour-held',
+  'pour-over',
+  'not-cleared',
+  'already-exists',
+  'season-archived',
+] as const;
+
 /** Every command answers the run as it stands after it. */
 function command<Body>(
   what: Pick<Operation<Body>, 'name' | 'path' | 'summary' | 'body'>,
@@ -20,8 +28,7 @@ function command<Body>(
   handle: (asked: Asked<Body>, member: Member) => Promise<Answer>,
 ) {
   const rest = { method: 'post', answer: contract.pourState, status: 200 } as const;
-  const problems = ['pour-held', 'pour-over', 'not-cleared', 'already-exists'] as const;
-  return forMember({ ...what, ...rest, problems }, may, handle);
+  return forMember({ ...what, ...rest, problems: PROBLEMS }, may, handle);
 }
 
 const read = forMember(

@@ -124,7 +124,7 @@ const copy = forMember(
     body: copyRequest,
     answer: chain,
     status: 201,
-    problems: ['link-used', 'already-exists'],
+    problems: ['link-used', 'already-exists', 'season-archived'],
   },
   canEditChains,
   async (asked, member) => {

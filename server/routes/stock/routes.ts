@@ -27,7 +27,7 @@ export function stockRoutes<Row extends Named & { version: number }, Create exte
       body: kind.create,
       answer,
       status: 201,
-      problems: ['already-exists'],
+      problems: ['already-exists', 'season-archived'],
     },
     canEditYeastsAndVessels,
     async (asked, member) =>
@@ -44,6 +44,7 @@ export function stockRoutes<Row extends Named & { version: number }, Create exte
       answer,
       status: 200,
       ifMatch: true,
+      problems: ['season-archived'],
     },
     canEditYeastsAndVessels,
     async ({ params: { id = '' }, ...asked }, member) => {
@@ -61,7 +62,7 @@ export function stockRoutes<Row extends Named & { version: number }, Create exte
       answer: null,
       status: 204,
       ifMatch: true,
-      problems: ['in-use'],
+      problems: ['in-use', 'season-archived'],
     },
     canEditYeastsAndVessels,
     async (asked, member) => {
