@@ -1,6 +1,9 @@
 import { describe, expect, test } from 'vitest';
 import { checkPour, type PourCheck } from '#shared/pour/check.ts';
+import { endsLeave } from '#shared/pour/standing.ts';
+import type { Finding } from '#shared/rules/answer.ts';
 import { DEFAULT_HOUSE_RULES } from '#shared/rules/resolve.ts';
+import type { RuleId } from '#shared/rules/vocabulary.ts';
 import { minutes } from '../../support/cooling.ts';
 
 /** A clean ale with a window of 18 to 22 °C, one reading at the moment that is judged. */
@@ -14,6 +17,27 @@ const at = (c: number, change: Partial<PourCheck> = {}) =>
   });
 const found = (answer: ReturnType<typeof at>) =>
   answer.findings.map(({ rule, verdict }) => `${verdict} ${rule}`);
+
+describe('what ends every leave', () => {
+  const hold = (rule: RuleId): Finding => ({
+    rule,
+    verdict: 'hold',
+    title: '',
+    because: '',
+    do: '',
+    measures: [],
+    basis: '',
+  });
+  test.each<[string, number, RuleId[], boolean]>([
+    ['a temperature that kills', 38, [], true],
+    ['not one that is merely too warm', 37.9, [], false],
+    ['an allergen that is not declared', 20, ['tired-cake', 'allergen'], true],
+    ['an overfull vessel', 20, ['headspace'], true],
+    ['not a hold that somebody may take on', 20, ['tired-cake'], false],
+  ])('%s', (_, c, holds, expected) => {
+    expect(endsLeave({ wort: at(c), linkHolds: holds.map(hold) })).toBe(expected);
+  });
+});
 
 describe('the window, its ends and its limits', () => {
   test.each([

@@ -159,6 +159,9 @@ describe('leave', () => {
       leaveAt(run({ readings: [reading('a', minutes(0), true)] }), minutes(1), false),
     ).toBeNull();
   });
+  test('a reading’s ends with what ends every leave', () => {
+    expect(leaveAt(run({}), minutes(3), true)).toBeNull();
+  });
   test('a head brewer’s ends where the wort kills', () => {
     const override = { ...leave, kind: 'override' as const };
     expect(leaveAt(run({ clearances: [override] }), minutes(3), false)?.id).toBe('c');
