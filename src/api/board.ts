@@ -9,6 +9,7 @@ import { useUnits } from '../app/useUnits.ts';
 import { KEPT } from '../kept/meta.ts';
 import { request } from './client.ts';
 import { equalDeep } from './equalDeep.ts';
+import { keepEqualRows } from './keepEqualRows.ts';
 import { withPending } from './pendingMoves.ts';
 import { pendingOf } from './pendingStore.ts';
 import { boardStillness } from './stillness.ts';
@@ -27,6 +28,7 @@ export function boardQuery(slug: string) {
     staleTime: 30_000,
     refetchOnWindowFocus: 'always',
     networkMode: 'always',
+    structuralSharing: keepEqualRows,
     ...KEPT,
   });
 }
