@@ -5,7 +5,7 @@ import { lazyPart } from '../../../app/lazyPart.tsx';
 import { useBrewery } from '../../../app/useBrewery.ts';
 import { Menu, MenuItem, MenuLink, MenuSeparator } from '../../../components/ui/Menu.tsx';
 import { OnWholeBoard, useBoardView } from '../view/BoardView.tsx';
-import { useBoardPanel } from '../view/useBoardPanel.ts';
+import { useOpenPanel } from '../view/useBoardPanel.ts';
 import { DeleteBatch } from './DeleteBatch.tsx';
 import { nextStages, STAGE_ACTIONS, type NextStage } from './stages.ts';
 
@@ -19,10 +19,6 @@ const BranchDialog = lazyPart(async () => (await import('./BranchDialog.tsx')).B
 /** Edit, duplicate, divide the cake, the stages that come next, scrap, delete. */
 export function BatchMenu({ batch }: { batch: Batch }) {
   const [asked, setAsked] = useState<Asked | null>(null);
-  const { open } = useBoardPanel();
-  const { can } = useBoardView();
-  const { path } = useBrewery();
-  const close = () => setAsked(null);
   return (
     <>
       <Menu
@@ -33,44 +29,53 @@ export function BatchMenu({ batch }: { batch: Batch }) {
           children: <Ellipsis size={18} aria-hidden />,
         }}
       >
-        <MenuItem onSelect={() => open({ kind: 'batch', batchId: batch.id })}>Edit</MenuItem>
-        <MenuLink to={path(`batches/${batch.id}`)}>Readings and cake</MenuLink>
-        {can.setStages && (
-          <>
-            <MenuItem onSelect={() => open({ kind: 'new', what: 'batch', likeId: batch.id })}>
-              Duplicate
-            </MenuItem>
-            {batch.chainId !== null && can.editChains && (
-              <MenuItem onSelect={() => setAsked('branch')}>
-                Pour part of this cake onto another wort
-              </MenuItem>
-            )}
-            <MenuSeparator />
-            {batch.stage === 'pencilled' && batch.chainId !== null && <ToPour batch={batch} />}
-            {nextStages(batch.stage).map((stage) => (
-              <MenuItem key={stage} onSelect={() => setAsked(stage)}>
-                {STAGE_ACTIONS[stage].menu}
-              </MenuItem>
-            ))}
-            <MenuSeparator />
-            <MenuItem danger onSelect={() => setAsked('delete')}>
-              Delete
-            </MenuItem>
-          </>
-        )}
+        <Items batch={batch} onAsk={setAsked} />
       </Menu>
       {asked !== null && (
         <OnWholeBoard>
-          <AskedDialog batch={batch} asked={asked} onClose={close} />
+          <AskedDialog batch={batch} asked={asked} onClose={() => setAsked(null)} />
         </OnWholeBoard>
       )}
     </>
   );
 }
 
-function ToPour({ batch }: { batch: Batch }) {
+/** Its own part, so that what the items need is not asked for by each of hundreds of closed menus. */
+function Items({ batch, onAsk }: { batch: Batch; onAsk: (asked: Asked) => void }) {
+  const open = useOpenPanel();
+  const { can } = useBoardView();
   const { path } = useBrewery();
-  return <MenuLink to={path(`pour/${batch.id}`)}>Pour check</MenuLink>;
+  return (
+    <>
+      <MenuItem onSelect={() => open({ kind: 'batch', batchId: batch.id })}>Edit</MenuItem>
+      <MenuLink to={path(`batches/${batch.id}`)}>Readings and cake</MenuLink>
+      {can.setStages && (
+        <>
+          <MenuItem onSelect={() => open({ kind: 'new', what: 'batch', likeId: batch.id })}>
+            Duplicate
+          </MenuItem>
+          {batch.chainId !== null && can.editChains && (
+            <MenuItem onSelect={() => onAsk('branch')}>
+              Pour part of this cake onto another wort
+            </MenuItem>
+          )}
+          <MenuSeparator />
+          {batch.stage === 'pencilled' && batch.chainId !== null && (
+            <MenuLink to={path(`pour/${batch.id}`)}>Pour check</MenuLink>
+          )}
+          {nextStages(batch.stage).map((stage) => (
+            <MenuItem key={stage} onSelect={() => onAsk(stage)}>
+              {STAGE_ACTIONS[stage].menu}
+            </MenuItem>
+          ))}
+          <MenuSeparator />
+          <MenuItem danger onSelect={() => onAsk('delete')}>
+            Delete
+          </MenuItem>
+        </>
+      )}
+    </>
+  );
 }
 
 interface AskedDialogProps {

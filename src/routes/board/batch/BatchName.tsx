@@ -1,10 +1,10 @@
 import clsx from 'clsx';
 import type { Batch } from '#shared/api/batch.ts';
-import { useBoardPanel } from '../view/useBoardPanel.ts';
+import { useOpenPanel } from '../view/useBoardPanel.ts';
 
 /** A batch's name; opens its panel. */
 export function BatchName({ batch, className }: { batch: Batch; className?: string }) {
-  const { open } = useBoardPanel();
+  const open = useOpenPanel();
   return (
     <button
       type="button"

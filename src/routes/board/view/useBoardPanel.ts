@@ -1,5 +1,5 @@
 import { useCallback, useMemo } from 'react';
-import { useSearchParams } from 'react-router-dom';
+import { useNavigate, useSearchParams } from 'react-router-dom';
 import { paramsNow } from '../../../app/paramsNow.ts';
 import { filterParams } from '../finding/filter.ts';
 
@@ -31,6 +31,20 @@ const search = (panel: BoardPanel): Record<string, string> => {
   }
 };
 
+/** Opens something beside the shelves. Who only opens is not drawn anew when the address changes. */
+export function useOpenPanel(): (next: BoardPanel) => void {
+  const navigate = useNavigate();
+  return useCallback(
+    (next) => {
+      const params = paramsNow();
+      const opened = new URLSearchParams({ ...filterParams(params), ...search(next) });
+      const isOpen = panelOf(params) !== null;
+      void navigate(`?${opened}`, { replace: isOpen, preventScrollReset: true });
+    },
+    [navigate],
+  );
+}
+
 /**
  * What stands open beside the shelves lives in the address: it can be linked to and the browser's
  * back closes it. Another panel takes the place of the one that is open.
@@ -38,18 +52,7 @@ const search = (panel: BoardPanel): Record<string, string> => {
 export function useBoardPanel() {
   const [params, setParams] = useSearchParams();
   const panel = useMemo(() => panelOf(params), [params]);
-  const isOpen = panel !== null;
-  const open = useCallback(
-    (next: BoardPanel) =>
-      setParams(
-        { ...filterParams(paramsNow()), ...search(next) },
-        {
-          replace: isOpen,
-          preventScrollReset: true,
-        },
-      ),
-    [setParams, isOpen],
-  );
+  const open = useOpenPanel();
   const close = useCallback(
     () => setParams(filterParams(paramsNow()), { replace: true, preventScrollReset: true }),
     [setParams],
