@@ -35,11 +35,14 @@ function createGrab(machine: LiftMachine, card: RefObject<HTMLDivElement | null>
   const letGo = (batchId: string | undefined, release: () => void, then: () => void) => {
     const picture = leaveBehind(card.current);
     release();
-    // The hand opens in this frame, the board changes in the next: both at once would be felt.
-    nextFrame(() => {
-      then();
-      nextFrame(() => nextFrame(() => glide(picture, batchId ?? '')));
-    });
+    // The hand opens in this frame, the board changes after it and is laid out in the next: all at
+    // once would be felt.
+    nextFrame(() =>
+      setTimeout(() => {
+        then();
+        nextFrame(() => nextFrame(() => glide(picture, batchId ?? '')));
+      }),
+    );
   };
 
   return (event) => {
