@@ -100,6 +100,14 @@ test('signing out asks where something waits, keeps it, and clears what was read
   await asking.getByRole('button', { name: 'Stay signed in' }).click();
   await expect(waiting(page)).toBeVisible();
 
+  await page.getByRole('button', { name: 'Account of Orla Finch' }).click();
+  await page.getByRole('menuitem', { name: 'Account and units' }).click();
+  await page.getByRole('button', { name: 'Close the account' }).click();
+  const closing = page.getByRole('dialog', { name: 'Close your account?' });
+  await expect(closing).toContainText('One entry has not been sent yet, and is lost with');
+  await page.keyboard.press('Escape');
+  await expect(closing).toHaveCount(0);
+
   await signOut();
   await asking.getByRole('button', { name: 'Sign out, send it later' }).click();
   await expect(page).toHaveURL('/');

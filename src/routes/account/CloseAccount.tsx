@@ -2,6 +2,7 @@ import { useState } from 'react';
 import { Button } from '../../components/ui/Button.tsx';
 import { Dialog } from '../../components/ui/Dialog.tsx';
 import { Closing } from './Closing.tsx';
+import { Unsent } from './Unsent.tsx';
 
 export function CloseAccount() {
   const [isOpen, setOpen] = useState(false);
@@ -20,6 +21,7 @@ export function CloseAccount() {
         title="Close your account?"
         lead="This cannot be taken back."
       >
+        <Unsent />
         <Closing onClose={() => setOpen(false)} />
       </Dialog>
     </>
