@@ -123,6 +123,7 @@ function dropStale(path, stale) {
  */
 function lockOf(path, mine, before) {
   const release = () => {
+    process.off('exit', release);
     if (readHolder(path)?.pid === process.pid) rmSync(path, { force: true });
   };
   process.on('exit', release);

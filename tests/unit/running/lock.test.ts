@@ -33,6 +33,14 @@ test('a free lock is taken, says who has it, and is given back', async () => {
   expect(readdirSync(folder)).toEqual([]);
 });
 
+test('a lock that was given back keeps no hold of the process', async () => {
+  const before = process.listenerCount('exit');
+  const lock = await takeLock(path, 'a test', () => 'taken');
+  expect(process.listenerCount('exit')).toBe(before + 1);
+  lock.release();
+  expect(process.listenerCount('exit')).toBe(before);
+});
+
 test('a lock of a process at work is refused with what it said', async () => {
   const child = spawn(process.execPath, ['-e', 'setTimeout(() => {}, 60_000)']);
   try {
