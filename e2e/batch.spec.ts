@@ -110,7 +110,7 @@ test('what was done is deleted only when asked, and the focus then stays on the 
   await board.goto(`/b/${brewery.slug}/batches/${batches['Ebb Pale'] ?? ''}`);
   const done = board.getByRole('listitem').filter({ hasText: 'Citrus peel' });
   await board.getByRole('button', { name: 'Add something' }).click();
-  await fill(board, { 'What and how much': 'Citrus peel' });
+  await fill(board, { 'What and how much': 'Citrus peel', 'Planned for': dayFromToday(3) });
   await board.getByRole('button', { name: 'Write it down' }).click();
   await expect(done).toBeVisible();
 

@@ -3,8 +3,19 @@ import { useEffect, useLayoutEffect, useRef } from 'react';
 /** Whether the page has a scrollbar, whose room is to stay while the page is held. */
 const hasGutter = () => window.innerWidth > document.documentElement.clientWidth;
 
+/** Where the focus was before each dialog. */
+const openers = new WeakMap<Element, Element | null>();
+
+/** Where it was before a dialog, and before those around it that are closed by now. */
+function openerOf(modal: Element): Element | null {
+  const opener = openers.get(modal) ?? null;
+  const closed = opener?.closest('dialog:not([open])');
+  return closed ? openerOf(closed) : opener;
+}
+
 /** Back to where one was; where that is gone, to the page, not to its very beginning. */
-function focusAfter(opener: Element | null) {
+function focusAfter(modal: Element) {
+  const opener = openerOf(modal);
   const hasOpener = opener instanceof HTMLElement && opener.isConnected && opener !== document.body;
   const next = hasOpener ? opener : document.getElementById('main');
   if (!next) return;
@@ -26,7 +37,7 @@ export function useModal(onLeave: () => void) {
   useLayoutEffect(() => {
     const modal = dialog.current;
     if (!modal) return;
-    const opener = document.activeElement;
+    openers.set(modal, document.activeElement);
     if (hasGutter()) modal.dataset.gutter = '';
     modal.showModal();
     title.current?.focus({ preventScroll: true });
@@ -40,7 +51,7 @@ export function useModal(onLeave: () => void) {
     return () => {
       modal.removeEventListener('close', reopen);
       modal.close();
-      focusAfter(opener);
+      focusAfter(modal);
     };
   }, []);
   return { dialog, title };
