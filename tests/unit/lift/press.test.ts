@@ -1,6 +1,6 @@
 // @vitest-environment jsdom
 import { fireEvent } from '@testing-library/react';
-import { afterEach, describe, expect, it } from 'vitest';
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { followPress } from '../../../src/routes/board/lift/followPress.ts';
 
 const at = (type: string, x: number, y: number, pointerId = 1) => {
@@ -21,10 +21,13 @@ function press() {
 }
 const send = (...events: Event[]) => events.forEach((event) => document.body.dispatchEvent(event));
 
+beforeEach(() => void vi.useFakeTimers());
 // Whatever a test left: a press that is followed, a click that is to be swallowed.
 afterEach(() => {
   send(at('pointerup', 0, 0));
   fireEvent.click(document.body);
+  vi.runAllTimers();
+  vi.useRealTimers();
 });
 
 describe('a press', () => {
