@@ -47,3 +47,13 @@ test('a head brewer sees the shelves of the season, with a verdict on the link',
   await expect(board.getByText('Pour', { exact: true }).first()).toBeVisible();
   await expectAccessible(board);
 });
+
+test('a page tries nothing that its content policy forbids', async ({ page }) => {
+  const forbidden: string[] = [];
+  await page.exposeFunction('tellForbidden', (what: string) => forbidden.push(what));
+  await page.addInitScript(`document.addEventListener('securitypolicyviolation',
+    ({ effectiveDirective, blockedURI }) => tellForbidden(effectiveDirective + ' ' + blockedURI))`);
+  await page.goto('/sign-in');
+  await expect(page.getByLabel('E-mail')).toBeVisible();
+  expect(forbidden).toEqual([]);
+});

@@ -1,3 +1,5 @@
+// Before any contract is made.
+import './app/contentPolicy.ts';
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
 import { RouterProvider } from 'react-router-dom';
