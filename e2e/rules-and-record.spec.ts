@@ -76,7 +76,7 @@ test('a hold is softened, but never one that can hurt', async ({ board, brewery 
 });
 
 test.describe(() => {
-  test.use({ expectedErrors: /status of 412/ });
+  test.use({ expectedErrors: /status of 412 .*\/house-rules\)$/ });
 
   test('rules that somebody else saved meanwhile are shown, and nothing typed is lost', async ({
     board,

@@ -85,8 +85,6 @@ test('a season is copied, shown beside the current one, and becomes it', async (
 });
 
 test.describe('an archived season', () => {
-  test.use({ expectedErrors: /status of 409/ });
-
   test('asks first, is read and not changed, and comes out again', async ({ board, brewery }) => {
     const { batches } = await write(brewery);
     await board.goto(`/b/${brewery.slug}/season`);
