@@ -1,5 +1,6 @@
 import { existsSync } from 'node:fs';
 import { defineConfig } from '@playwright/test';
+import { CHROMIUM_ARGS } from './e2e/support/chromium.ts';
 import { testPort } from './server/local/places.mjs';
 
 const url = `http://127.0.0.1:${testPort}`;
@@ -30,12 +31,7 @@ export default defineConfig({
     contextOptions: { reducedMotion: 'reduce' },
     launchOptions: {
       ...(existsSync(chromium) ? { executablePath: chromium } : {}),
-      args: [
-        '--no-sandbox',
-        '--disable-dev-shm-usage',
-        '--disable-gpu',
-        '--disable-background-networking',
-      ],
+      args: CHROMIUM_ARGS,
     },
   },
   projects: [

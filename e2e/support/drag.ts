@@ -13,8 +13,9 @@ export async function middle(of: Locator): Promise<{ x: number; y: number }> {
   return { x: x + width / 2, y: y + height / 2 };
 }
 
-/** Takes a batch by its handle with the mouse. */
+/** Takes a batch by its handle with the mouse, once the board around it has come to rest. */
 export async function lift(page: Page, handle: Locator): Promise<void> {
+  await handle.hover();
   const { x, y } = await middle(handle);
   await page.mouse.move(x, y);
   await page.mouse.down();

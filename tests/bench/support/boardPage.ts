@@ -1,18 +1,12 @@
 import { existsSync } from 'node:fs';
 import { chromium, type Browser, type Page } from '@playwright/test';
+import { CHROMIUM_ARGS } from '../../../e2e/support/chromium.ts';
 import { sessionCookies } from '../../../e2e/support/server.ts';
 import type { AtWork } from './atWork.ts';
 
-const ARGS = [
-  '--no-sandbox',
-  '--disable-dev-shm-usage',
-  '--disable-gpu',
-  '--disable-background-networking',
-];
-
 export function openBrowser(): Promise<Browser> {
   const path = process.env.CHROMIUM ?? '/usr/bin/chromium';
-  return chromium.launch({ args: ARGS, ...(existsSync(path) ? { executablePath: path } : {}) });
+  return chromium.launch({ args: CHROMIUM_ARGS, ...(existsSync(path) ? { executablePath: path } : {}) });
 }
 
 /** The board as a head brewer sees it, in a fresh browser profile, after a moment's look at it. */
