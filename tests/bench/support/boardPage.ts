@@ -6,7 +6,10 @@ import type { AtWork } from './atWork.ts';
 
 export function openBrowser(): Promise<Browser> {
   const path = process.env.CHROMIUM ?? '/usr/bin/chromium';
-  return chromium.launch({ args: CHROMIUM_ARGS, ...(existsSync(path) ? { executablePath: path } : {}) });
+  return chromium.launch({
+    args: CHROMIUM_ARGS,
+    ...(existsSync(path) ? { executablePath: path } : {}),
+  });
 }
 
 /** The board as a head brewer sees it, in a fresh browser profile, after a moment's look at it. */
