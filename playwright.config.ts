@@ -8,7 +8,8 @@ const chromium = process.env.CHROMIUM ?? '/usr/bin/chromium';
 
 /**
  * `*.spec.ts` runs at desktop size, `*.phone.spec.ts` with touch at a phone's,
- * `*.serial.spec.ts` alone, with a server of its own that it may kill.
+ * `*.serial.spec.ts` one after the other, each with a server of its own that it may kill; they take
+ * longest, so they come first.
  */
 export default defineConfig({
   testDir: 'e2e',
@@ -36,6 +37,14 @@ export default defineConfig({
   },
   projects: [
     {
+      name: 'serial',
+      testMatch: /\.serial\.spec\.ts$/,
+      fullyParallel: false,
+      workers: 1,
+      timeout: 120_000,
+      use: { viewport: { width: 1440, height: 900 } },
+    },
+    {
       name: 'desktop',
       testIgnore: /\.(phone|serial)\.spec\.ts$/,
       use: { viewport: { width: 1440, height: 900 } },
@@ -44,14 +53,6 @@ export default defineConfig({
       name: 'phone',
       testMatch: /\.phone\.spec\.ts$/,
       use: { viewport: { width: 390, height: 844 }, hasTouch: true, isMobile: true },
-    },
-    {
-      name: 'serial',
-      testMatch: /\.serial\.spec\.ts$/,
-      fullyParallel: false,
-      workers: 1,
-      timeout: 120_000,
-      use: { viewport: { width: 1440, height: 900 } },
     },
   ],
   webServer: {
