@@ -4,7 +4,7 @@ import type { Day } from '../rules/vocabulary.ts';
 import { isPencilled, indexBoard, type BoardFacts } from './board.ts';
 import { costsAsMade } from './cost.ts';
 import { judgeBoard, type JudgedBoard, type JudgedLink } from './judgeBoard.ts';
-import { takersOf } from './shares.ts';
+import { takersOf } from './takers.ts';
 
 /** What of the cake under a batch lives, against what its wort needs; cells. */
 export interface Alive {

@@ -1,8 +1,9 @@
 import type { Batch } from '../api/batch.ts';
 import { LinkState } from '../rules/linkState.ts';
 import type { SharedPart } from '../rules/facts.ts';
-import { isPencilled, type BoardFacts, type Layout } from './board.ts';
+import { isPencilled, type BoardFacts } from './board.ts';
 import { sightOf, unsharedLink, type Sight } from './boardLink.ts';
+import { takersOf } from './takers.ts';
 
 /** A part of a cake: litres, the recommended part of that wort, or all that others leave. */
 export type AskedPart = number | 'recommended' | 'rest';
@@ -34,16 +35,6 @@ export function sharesOf(board: BoardFacts, batchId: string): CakeShares {
   const sight = sightOf(board);
   const source = sight.layout.batch(batchId);
   return source ? sharesIn(sight, source) : { batchId, wholeL: null, takers: [], leftL: null };
-}
-
-/** The batches that a cake goes under: the next in its chain, and the first of each branch. */
-export function takersOf(layout: Layout, source: Batch): Batch[] {
-  if (source.chainId === null) return [];
-  const mates = layout.batchesOf(source.chainId);
-  const next = mates[mates.findIndex(({ id }) => id === source.id) + 1];
-  const firsts = layout.branchesOf(source.id).map(({ id }) => layout.batchesOf(id)[0]);
-  const takers = [next, ...firsts].filter((taker) => taker !== undefined);
-  return takers.toSorted((a, b) => Number(isPencilled(a)) - Number(isPencilled(b)));
 }
 
 export function sharesIn(sight: Sight, source: Batch): CakeShares {

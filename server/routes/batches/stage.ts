@@ -1,5 +1,6 @@
 import type { Batch, StageRequest } from '#shared/api/batch.ts';
 import { indexBoard, UNSETTLED_LINK, type BoardIndex } from '#shared/chain/board.ts';
+import { takersOf } from '#shared/chain/takers.ts';
 import { tellStage } from '#shared/record/stages.ts';
 import { demandVersion } from '../../http/etag.ts';
 import { invalidField, problem } from '../../problems.ts';
@@ -110,19 +111,10 @@ async function scrap(hand: Hand, row: Batch, reason: string): Promise<void> {
   if (row.cake) await setCake(hand, row.id, 'dumped');
 }
 
-/** Batches that go, or went, on this one's cake. */
-function followers(index: BoardIndex, row: Batch): Batch[] {
-  if (row.chainId === null) return [];
-  const mates = index.batchesOf(row.chainId);
-  const next = mates[mates.findIndex(({ id }) => id === row.id) + 1];
-  const firsts = index.branchesOf(row.id).map(({ id }) => index.batchesOf(id)[0]);
-  return [next, ...firsts].flatMap((each) => (each ? [each] : []));
-}
-
 const othersOnCake = (index: BoardIndex, before: Batch, except: Batch) =>
-  followers(index, before).some((each) => each.id !== except.id && each.stage !== 'pencilled');
+  takersOf(index, before).some((each) => each.id !== except.id && each.stage !== 'pencilled');
 
 function demandNothingPoured(index: BoardIndex, row: Batch): void {
-  const poured = followers(index, row).find(({ stage }) => stage !== 'pencilled');
+  const poured = takersOf(index, row).find(({ stage }) => stage !== 'pencilled');
   if (poured) throw problem('in-use', { detail: `${poured.name} was poured on its cake` });
 }
