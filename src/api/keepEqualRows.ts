@@ -1,3 +1,4 @@
+import { isRecord } from '../app/isRecord.ts';
 import { equalDeep } from './equalDeep.ts';
 
 /**
@@ -13,9 +14,6 @@ export function keepEqualRows(before: unknown, now: unknown): unknown {
     kept.every(([key, value]) => Object.is(value, before[String(key)]));
   return isAsBefore ? before : Object.fromEntries(kept);
 }
-
-const isRecord = (value: unknown): value is Record<string, unknown> =>
-  typeof value === 'object' && value !== null && !Array.isArray(value);
 
 function keepEqual(before: unknown, now: unknown): unknown {
   if (Array.isArray(before) && Array.isArray(now)) return keepRows(before, now);

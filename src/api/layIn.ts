@@ -1,7 +1,7 @@
 import { hashKey, type QueryClient, type QueryKey } from '@tanstack/react-query';
 import type { BatchRecord } from '#shared/api/reading.ts';
+import { isRecord } from '../app/isRecord.ts';
 import type { Entry } from '../outbox/entry.ts';
-import { isRecord } from '../outbox/queue.ts';
 import { withTaken } from './recordWaiting.ts';
 
 /** An entry that the server took, what it answered (undefined: not known here), and who wrote it. */

@@ -16,8 +16,9 @@ import {
 } from '#shared/api/reading.ts';
 import { api } from '#shared/api/urls.ts';
 import { valueOf } from '#shared/fermentation/correct.ts';
+import { isRecord } from '../app/isRecord.ts';
 import type { Entry } from '../outbox/entry.ts';
-import { isRecord, pathOf, type Entries } from '../outbox/queue.ts';
+import { pathOf, type Entries } from '../outbox/queue.ts';
 
 interface Where {
   slug: string;

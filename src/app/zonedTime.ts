@@ -1,4 +1,5 @@
 import { formatDay } from '#shared/units/day.ts';
+import { dayIn } from '#shared/units/dayIn.ts';
 
 /** Instants as a brewery's clock shows them. */
 
@@ -38,7 +39,7 @@ const asIfUtc = (at: number, timeZone: string): number =>
   Date.parse(`${partsIn(timeZone, new Date(at)).replace(' ', 'T')}Z`);
 
 /** The clock's day, `YYYY-MM-DD`, and its time, `14:05`. */
-export const dayOf = (at: Instant, timeZone: string): string => toLocal(at, timeZone).slice(0, 10);
+export const dayOf = (at: Instant, timeZone: string): string => dayIn(timeZone, new Date(at));
 export const timeOf = (at: Instant, timeZone: string): string => toLocal(at, timeZone).slice(11);
 
 /** "Tue 8 December, 16:05". */

@@ -1,7 +1,7 @@
 import { capital } from '#shared/rules/words.ts';
+import { isRecord } from '../app/isRecord.ts';
 import { asTyped } from './asTyped.ts';
 import type { Entry } from './entry.ts';
-import { isRecord } from './queue.ts';
 
 export interface BothVersions {
   label: string;

@@ -1,3 +1,4 @@
+import { isRecord } from '../app/isRecord.ts';
 import type { Entry, Outcome, Refusal } from './entry.ts';
 
 /** The outbox as plain data: entries in the order in which they were written, oldest first. */
@@ -79,9 +80,6 @@ function sameValue(a: unknown, b: unknown): boolean {
   }
   return a === b;
 }
-
-export const isRecord = (value: unknown): value is Record<string, unknown> =>
-  typeof value === 'object' && value !== null && !Array.isArray(value);
 
 const versionIn = (answer: unknown): number | null =>
   isRecord(answer) && typeof answer.version === 'number' ? answer.version : null;
