@@ -40,6 +40,11 @@ test('a chain opened from its name tells its course in figures', async ({ board,
   await expect(row('Ebb Pale')).toContainText('1.078, planned');
   await expect(row('Withy Bitter')).toContainText('Hold');
   await expect(row('Ebb Pale')).toContainText(/[\d.]+ × \([\d.]+ × to [\d.]+ ×\)/);
+  // Wider than its place, it fades where it goes on, and no longer at its end.
+  const table = board.getByRole('region', { name: 'The same in figures' });
+  await expect(table).toHaveCSS('mask-image', /^linear-gradient/);
+  await table.evaluate((region) => region.scrollTo({ left: region.scrollWidth }));
+  await expect(table).toHaveCSS('mask-image', 'none');
   await expectAccessible(board);
 
   await board.getByRole('button', { name: 'Withy Bitter onto Ebb Pale' }).click();

@@ -1,20 +1,23 @@
 import type { Course, CoursePoint } from '#shared/chain/course.ts';
+import { useHiddenEdges } from '../../app/useHiddenEdges.ts';
 import { useBoardView } from '../board/view/BoardView.tsx';
 import { cellsOf, COLUMNS } from './courseCells.ts';
 
 /** The figures of the plots, to be read, heard or copied. */
 export function CourseTable({ course }: { course: Course }) {
+  const scroller = useHiddenEdges();
   return (
     <section className="mt-6 pr-7 max-tablet:pr-0">
       <h2 id="figures" className="text-shelf">
         The same in figures
       </h2>
       <div
+        ref={scroller}
         role="region"
         aria-labelledby="figures"
         // oxlint-disable-next-line jsx-a11y/no-noninteractive-tabindex -- what scrolls must be reached by the keyboard
         tabIndex={0}
-        className="thumb-slim mt-2 overflow-x-auto print:overflow-visible print:[zoom:0.62]"
+        className="goes-on thumb-slim mt-2 overflow-x-auto print:[zoom:0.62]"
       >
         <table className="border-collapse text-small">
           <thead>
