@@ -9,6 +9,7 @@ import { person, type Person, type SignInRequest, type SignUpRequest } from '#sh
 import { api } from '#shared/api/urls.ts';
 import { request, requestNothing } from './client.ts';
 import { isProblem, OfflineError } from './errors.ts';
+import { forgetAnswers } from './forgetAnswers.ts';
 import { KEPT } from '../kept/meta.ts';
 
 /** A weak network may take a request and never answer it: the page then opens with what is kept. */
@@ -72,8 +73,9 @@ export function useSignOut() {
   return useMutation({
     mutationFn: () => requestNothing('DELETE', api.session),
     onSuccess: () => {
-      client.clear();
+      // Whoever shows what was read sees this first, and goes.
       client.setQueryData(sessionQuery.queryKey, null);
+      forgetAnswers(client, { but: SESSION_KEY });
     },
   });
 }

@@ -4,11 +4,14 @@ import { queryClient } from '../api/queryClient.ts';
 import { sessionQuery } from '../api/session.ts';
 import { createOutbox } from './createOutbox.ts';
 import { sendEntry } from './sendEntry.ts';
+import { spaced } from './spaced.ts';
 import { deviceStorage } from './storage.ts';
 
 const NAME = 'barmkin outbox';
 const AGAIN_MS = 15_000;
 const PATIENCE_MS = 4_000;
+/** Where reading goes through and sending does not, the connection seems to come back all the time. */
+const PAUSE_MS = 3_000;
 
 const channel = 'BroadcastChannel' in globalThis ? new BroadcastChannel(NAME) : null;
 
@@ -41,8 +44,9 @@ export const outbox = createOutbox({
 /** Shows what waits, and sends it whenever there is hope. The answer stops it. */
 export function watchOutbox(): () => void {
   const quietly = (work: Promise<void>) => void work.catch(() => undefined);
+  const tries = spaced(PAUSE_MS, () => quietly(outbox.flush()));
   const tryNow = () => {
-    if (isOnline() && outbox.get().length > 0) quietly(outbox.flush());
+    if (isOnline() && outbox.get().length > 0) tries.ask();
   };
   const begin = async () => {
     await outbox.look();
@@ -54,6 +58,7 @@ export function watchOutbox(): () => void {
   const stop = onConnectionChange(tryNow);
   return () => {
     stop();
+    tries.stop();
     window.clearInterval(timer);
     if (channel) channel.onmessage = null;
   };

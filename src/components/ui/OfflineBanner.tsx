@@ -1,6 +1,6 @@
 import { useQueryClient, type QueryCache } from '@tanstack/react-query';
 import { useEffect, useSyncExternalStore } from 'react';
-import { setReachable } from '../../api/connection.ts';
+import { isOnline, setReachable } from '../../api/connection.ts';
 import { api } from '#shared/api/urls.ts';
 import { useOnline } from '../../app/useOnline.ts';
 import { asOf } from '../../kept/asOf.ts';
@@ -63,7 +63,8 @@ function useComeBack(online: boolean) {
     return () => {
       window.removeEventListener('online', look);
       window.clearInterval(timer);
-      void client.invalidateQueries();
+      // It may also be the page that goes: there is nothing to read anew then.
+      if (isOnline()) void client.invalidateQueries();
     };
   }, [online, client]);
 }
