@@ -17,16 +17,19 @@ interface Taken {
  * @returns whether nothing is left to be asked at once; the board's next revision brings the rest
  */
 export function layIn(client: QueryClient, key: QueryKey, taken: Taken): boolean {
-  const { entry, answer } = taken;
-  if (entry.answers && hashKey(entry.answers) === hashKey(key)) {
-    if (answer === undefined) return false;
-    client.setQueryData(key, answer);
-    return true;
-  }
-  return layIntoRecord(client, key, taken);
+  const isLaid = isAnswered(client, key, taken) || isRecorded(client, key, taken);
+  // A read that began before the server took it would put everything back as it was.
+  return isLaid && client.isFetching({ queryKey: key }) === 0;
 }
 
-function layIntoRecord(client: QueryClient, key: QueryKey, { entry, answer, name }: Taken) {
+function isAnswered(client: QueryClient, key: QueryKey, { entry, answer }: Taken): boolean {
+  if (!entry.answers || hashKey(entry.answers) !== hashKey(key) || answer === undefined)
+    return false;
+  client.setQueryData(key, answer);
+  return true;
+}
+
+function isRecorded(client: QueryClient, key: QueryKey, { entry, answer, name }: Taken): boolean {
   const [what, slug, batchId] = key;
   if (what !== 'batch-record' || typeof slug !== 'string' || typeof batchId !== 'string')
     return false;
@@ -34,7 +37,5 @@ function layIntoRecord(client: QueryClient, key: QueryKey, { entry, answer, name
   if (!record) return false;
   const me = { personId: entry.personId, name };
   client.setQueryData(key, withTaken(record, entry, answer, { slug, batchId, me }));
-  // A read that began before the server took it would put the record back as it was.
-  const isBeingRead = client.isFetching({ queryKey: key }) > 0;
-  return !isBeingRead && (entry.method === 'DELETE' || isRecord(answer));
+  return entry.method === 'DELETE' || isRecord(answer);
 }

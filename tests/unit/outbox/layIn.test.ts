@@ -84,6 +84,18 @@ it('takes a whole answer as the data of its query, and leaves all others to be r
   expect(layIn(client, ['board', 'reedbed'], taken(ANSWER))).toBe(false);
 });
 
+it('has a run read anew where a read had begun before: it may still show the step before', async () => {
+  const { client } = page();
+  const state = { run: null, now: '2027-04-03T13:00:00.000Z' };
+  let arrive = (_: typeof state) => {};
+  const queryFn = () => new Promise<typeof state>((resolve) => (arrive = resolve));
+  const reading = client.fetchQuery({ queryKey: POUR, queryFn });
+  expect(layIn(client, POUR, taken(state, { answers: POUR }))).toBe(false);
+  expect(client.getQueryData(POUR)).toEqual(state);
+  arrive(state);
+  await reading;
+});
+
 it('makes no record where none was read', () => {
   const client = new QueryClient();
   expect(layIn(client, RECORD, taken(ANSWER))).toBe(false);
