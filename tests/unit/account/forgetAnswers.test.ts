@@ -23,7 +23,7 @@ test('what nobody shows is forgotten at once, all but the one', () => {
 
 test('what a page shows is not asked for anew as it is drawn again, and goes with the page', async () => {
   const it = client();
-  const ask = vi.fn(async () => 'read');
+  const ask = vi.fn<() => Promise<string>>(async () => 'read');
   const options = { queryKey: ['board'], queryFn: ask, staleTime: Infinity };
   const board = new QueryObserver(it, options);
   const leave = board.subscribe(() => {});

@@ -5,7 +5,7 @@ beforeEach(() => vi.useFakeTimers());
 afterEach(() => vi.useRealTimers());
 
 test('what is asked for at once is done once now, and once after the pause', () => {
-  const work = vi.fn();
+  const work = vi.fn<() => void>();
   const tries = spaced(3_000, work);
   tries.ask();
   tries.ask();
@@ -20,7 +20,7 @@ test('what is asked for at once is done once now, and once after the pause', () 
 });
 
 test('work that asks for itself, as a request does that is lost again, goes at the pace of the pause', () => {
-  const work = vi.fn(() => tries.ask());
+  const work = vi.fn<() => void>(() => tries.ask());
   const tries = spaced(3_000, work);
   tries.ask();
   vi.advanceTimersByTime(30_000);
@@ -28,7 +28,7 @@ test('work that asks for itself, as a request does that is lost again, goes at t
 });
 
 test('what is called off does not come, and the next asking is served at once', () => {
-  const work = vi.fn();
+  const work = vi.fn<() => void>();
   const tries = spaced(3_000, work);
   tries.ask();
   tries.ask();
