@@ -1,4 +1,4 @@
-import { sql } from 'drizzle-orm';
+import { sql, type SQL } from 'drizzle-orm';
 import type { Db, Tx } from '../db/client.ts';
 
 /** The one channel of the database on which all processes tell each other what changed. */
@@ -12,10 +12,8 @@ export type Note =
   /** A sign-in or a membership of this person may have ended. */
   | { kind: 'person'; personId: string };
 
-function write(note: Note): string {
+function write(note: Exclude<Note, { kind: 'season' }>): string {
   switch (note.kind) {
-    case 'season':
-      return `season ${note.seasonId} ${note.revision}`;
     case 'here':
       return `here ${note.seasonId}`;
     case 'person':
@@ -40,9 +38,10 @@ export function readNote(payload: string): Note | null {
 }
 
 /** Told when the transaction is committed, and not at all if it is not. */
-export async function tell(db: Db | Tx, ...notes: readonly Note[]): Promise<void> {
-  const texts = JSON.stringify(notes.map(write));
-  await db.execute(
-    sql`select pg_notify(${CHANNEL}, said) from jsonb_array_elements_text(${texts}::jsonb) said`,
-  );
+export async function tell(db: Db | Tx, note: Exclude<Note, { kind: 'season' }>): Promise<void> {
+  await db.execute(sql`select pg_notify(${CHANNEL}, ${write(note)})`);
 }
+
+/** Tells of a season's revision, as a column of the statement that raises it. */
+export const tellRevision = (seasonId: string, revision: SQL): SQL =>
+  sql`pg_notify(${CHANNEL}, format('season %s %s', ${seasonId}::text, ${revision}))`;

@@ -2,7 +2,7 @@ import { createHash } from 'node:crypto';
 import type { FactChange } from '#shared/record/facts.ts';
 import { linkChanges } from '#shared/chain/linkChanges.ts';
 import { linkGist } from '#shared/chain/lapses.ts';
-import type { BoardNow, Hand } from '../routes/board/hand.ts';
+import type { BoardNow, Writer } from '../routes/board/hand.ts';
 import { writeEntry, type Entry } from '../routes/board/record.ts';
 import { differenceOf, type EditSide } from './difference.ts';
 import type { Snapshot } from './snapshot.ts';
@@ -30,7 +30,7 @@ interface Stage {
 
 /** Writes an edit, an undo or a redo of one into the change record. Nothing changed: no entry. */
 export async function recordEdit(
-  { tx, member, now }: Omit<Hand, 'board'>,
+  { tx, member, now }: Writer,
   said: Said & Pick<Entry, 'ofChange'> & { kind: Entry['kind'] },
   before: Stage,
   after: Stage,

@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, expect, it } from 'vitest';
-import { boardQuery } from '../../server/routes/board/load.ts';
+import { boardQuery, sceneQuery } from '../../server/routes/board/load.ts';
 import { boardOf, testSeason, type TestSeason } from '../support/season.ts';
 import { startTestServer, type TestServer } from '../support/server.ts';
 
@@ -36,16 +36,25 @@ interface Plan {
 }
 const nodes = (plan: Plan): Plan[] => [plan, ...(plan.Plans ?? []).flatMap(nodes)];
 
-it('finds a board among 50,000 batches by an index', async () => {
-  const count = await server.pool.query<{ n: number }>('select count(*)::int as n from batch');
-  expect(count.rows[0]?.n).toBeGreaterThanOrEqual(BREWERIES * BATCHES_EACH);
-  const { brewery, season: row } = await boardOf(season.head, season.slug);
-  const { rows } = await server.pool.query<{ 'QUERY PLAN': [{ Plan: Plan }] }>(
-    `explain (format json) ${boardQuery(server.db).getQuery().sql}`,
-    [brewery.id, row.id],
-  );
-  const plan = rows[0]?.['QUERY PLAN'][0].Plan;
-  const onBatch = plan ? nodes(plan).filter((node) => node['Relation Name'] === 'batch') : [];
-  expect(onBatch.length).toBeGreaterThan(0);
-  expect(onBatch.map((node) => node['Node Type'])).not.toContain('Seq Scan');
-});
+const QUERIES = {
+  board: { query: boardQuery, first: [] },
+  'board under the locks of a command': { query: sceneQuery, first: [[]] },
+} as const;
+
+it.each(Object.keys(QUERIES) as (keyof typeof QUERIES)[])(
+  'finds a %s among 50,000 batches by an index',
+  async (name) => {
+    const { query, first } = QUERIES[name];
+    const count = await server.pool.query<{ n: number }>('select count(*)::int as n from batch');
+    expect(count.rows[0]?.n).toBeGreaterThanOrEqual(BREWERIES * BATCHES_EACH);
+    const { brewery, season: row } = await boardOf(season.head, season.slug);
+    const { rows } = await server.pool.query<{ 'QUERY PLAN': [{ Plan: Plan }] }>(
+      `explain (format json) ${query(server.db).getQuery().sql}`,
+      [...first, brewery.id, row.id],
+    );
+    const plan = rows[0]?.['QUERY PLAN'][0].Plan;
+    const onBatch = plan ? nodes(plan).filter((node) => node['Relation Name'] === 'batch') : [];
+    expect(onBatch.length).toBeGreaterThan(0);
+    expect(onBatch.map((node) => node['Node Type'])).not.toContain('Seq Scan');
+  },
+);

@@ -46,6 +46,18 @@ interface Client {
 }
 
 describe('the board', () => {
+  it('is sent packed once it is large; an answer that fits into the first flight goes bare', async () => {
+    const season = await testSeason(server.url);
+    const packed = async (url: string) => {
+      const { headers } = await season.head.get(url);
+      return headers.get('content-encoding');
+    };
+    expect(await packed(api.session)).toBeNull();
+    const many = Array.from({ length: 25 }, (_, nth) => ({ name: `Large ${nth}` }));
+    await shelve(season, null, many);
+    expect(await packed(api.board(season.slug))).toBe('gzip');
+  });
+
   it('answers by its contract, in at most four statements whatever its size', async () => {
     const season = await testSeason(server.url);
     const names = Array.from({ length: 12 }, (_, each) => ({ name: `Batch ${each}` }));

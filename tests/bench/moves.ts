@@ -7,6 +7,7 @@ import { seeded } from '../support/boards.ts';
 import { atWork, type AtWork } from './support/atWork.ts';
 import { signInBrewers } from './support/movers.ts';
 import { percentile } from './support/percentile.ts';
+import { createSender, textOf, type Answer } from './support/sender.ts';
 import type { Part } from './row.ts';
 
 const SIZE = { chains: 12, perChain: 8, bench: 4, seed: 2 };
@@ -17,21 +18,28 @@ const MOST_MS = 100;
 
 type Standing = Pick<typeof batch.$inferSelect, 'id' | 'chainId' | 'place'>;
 
-/** Twenty people who move batches of one season at once, each as soon as the last move is answered. */
+/** Twenty people who move batches of one season at once. */
 export const moves: Part = {
   name: 'moves',
   run: () =>
     atWork(SIZE, async (at) => {
       const before = await standings(at);
       const cookies = await signInBrewers(at, MOVERS);
-      const times = await Promise.all(
+      const sender = createSender(`${at.url}${api.moves(at.brewery.slug)}`, MOVERS);
+      const answers = await Promise.all(
         cookies.map((cookie, number) => {
           const own = before.filter((_, place) => place % MOVERS === number);
-          return keepMoving({ at, cookie, own, shelves: shelvesOf(before), seed: number + 1 });
+          const post = (wish: MoveRequest) => sender.post(cookie, wish);
+          return keepMoving({ post, own, shelves: shelvesOf(before), seed: number + 1 });
         }),
       );
+      sender.close();
+      answers.flat().forEach(demandGranted);
       demandWhole(before, await standings(at));
-      const p95 = percentile(times.flat(), 0.95);
+      const p95 = percentile(
+        answers.flatMap((each) => each.slice(WARM).map(({ ms }) => ms)),
+        0.95,
+      );
       return [
         {
           what: `a move, ${MOVERS} concurrent movers on one season, fsync on; ${MOVERS * EACH} moves, no batch lost or doubled`,
@@ -44,16 +52,15 @@ export const moves: Part = {
 };
 
 interface Mover {
-  at: AtWork;
-  cookie: string;
+  post(wish: MoveRequest): Promise<Answer>;
   /** Nobody else moves these, so every wish of this mover can be granted. */
   own: readonly Standing[];
   shelves: readonly string[];
   seed: number;
 }
 
-/** Moves own batches first onto a shelf, or after another own one; the times without the first few. */
-async function keepMoving({ at, cookie, own, shelves, seed }: Mover): Promise<number[]> {
+/** Moves own batches first onto a shelf, or after another own one, each as soon as the last was answered. */
+async function keepMoving({ post, own, shelves, seed }: Mover): Promise<Answer[]> {
   const random = seeded(seed);
   const pick = <T>(from: readonly T[]): T => {
     const one = from[Math.floor(random() * from.length)];
@@ -61,12 +68,12 @@ async function keepMoving({ at, cookie, own, shelves, seed }: Mover): Promise<nu
     return one;
   };
   const chainOf = new Map(own.map(({ id, chainId }) => [id, chainId]));
-  const times: number[] = [];
+  const answers: Answer[] = [];
   for (let made = 0; made < WARM + EACH; made += 1) {
     const { id } = pick(own);
     const mate = pick([null, ...own.filter((other) => other.id !== id && chainOf.get(other.id))]);
     const toChainId = (mate && chainOf.get(mate.id)) ?? pick(shelves);
-    const took = await post(at, cookie, {
+    const answer = await post({
       id: randomUUID(),
       batchId: id,
       toChainId,
@@ -75,24 +82,16 @@ async function keepMoving({ at, cookie, own, shelves, seed }: Mover): Promise<nu
       dates: random() < 0.5 ? 'pull' : 'keep',
     });
     chainOf.set(id, toChainId);
-    if (made >= WARM) times.push(took);
+    answers.push(answer);
   }
-  return times;
+  return answers;
 }
 
-/** Milliseconds until the whole answer was there; anything but a granted move is a fault. */
-async function post(at: AtWork, cookie: string, wish: MoveRequest): Promise<number> {
-  const start = performance.now();
-  const answer = await fetch(`${at.url}${api.moves(at.brewery.slug)}`, {
-    method: 'POST',
-    headers: { cookie, origin: at.url, 'content-type': 'application/json' },
-    body: JSON.stringify(wish),
-  });
-  const text = await answer.text();
-  const took = performance.now() - start;
+/** Anything but a granted move is a fault. */
+function demandGranted(answer: Answer): void {
+  const text = textOf(answer);
   if (answer.status !== 200) throw new Error(`a move was answered ${answer.status}: ${text}`);
   moved.parse(JSON.parse(text));
-  return took;
 }
 
 const standings = ({ db, brewery }: AtWork): Promise<Standing[]> =>

@@ -7,7 +7,7 @@ import { batch } from '../../db/schema/chain.ts';
 import { season } from '../../db/schema/season.ts';
 import { notFound, problem } from '../../problems.ts';
 import { demandOpen } from '../board/changeBoard.ts';
-import { lockSeason, lockShelves } from '../board/locks.ts';
+import { lockBoard } from '../board/locks.ts';
 import { raiseRevision, writeEntry } from '../board/record.ts';
 
 export interface Scene {
@@ -74,8 +74,7 @@ export function onBatch<T>(
 ): Promise<T> {
   return inTransaction(db, async (tx) => {
     const known = await findBatch(tx, member, batchId);
-    await lockShelves(tx, known.seasonId, known.chainId === null ? [] : [known.chainId]);
-    await lockSeason(tx, known.seasonId);
+    await lockBoard(tx, known.seasonId, known.chainId === null ? [] : [known.chainId]);
     const row = await findBatch(tx, member, batchId);
     demandOpen({ season: { isArchived: row.archivedAt !== null } });
     if (row.stage === 'scrapped')

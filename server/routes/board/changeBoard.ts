@@ -6,10 +6,10 @@ import { notFound, problem } from '../../problems.ts';
 import { recordEdit, type Said } from '../../record/recordEdit.ts';
 import { takeSnapshot } from '../../record/snapshot.ts';
 import { dayIn } from '../../today.ts';
-import { demandNotInHand, poursInHand } from '../pour/inHand.ts';
+import { demandNotInHand } from '../pour/inHand.ts';
 import type { BoardNow, Hand } from './hand.ts';
 import { withoutLapsed } from './lapsed.ts';
-import { loadBoardRows } from './load.ts';
+import { loadBoardRows, loadScene, type SceneRows } from './load.ts';
 import { lockFor, type Reach } from './locks.ts';
 import { isOfAllSeasons, settleOtherSeasons } from './otherSeasons.ts';
 import { raiseRevision } from './record.ts';
@@ -65,9 +65,9 @@ function change(
   return inTransaction(db, async (tx) => {
     await lockFor(tx, where, shelves, reach);
     const now = clock.now();
-    const board = await readBoard(tx, member, now);
+    const { board, inHand } = await readScene(tx, member, now);
     if (may === 'open') demandOpen(board);
-    return carryOut({ tx, member, board, now }, command);
+    return carryOut({ tx, member, board, inHand, now }, command);
   });
 }
 
@@ -75,12 +75,11 @@ async function carryOut(hand: Hand, command: Command): Promise<BoardNow> {
   const { tx, member, board, now } = hand;
   const where = { breweryId: member.brewery.id, seasonId: member.seasonId };
   const rows = await takeSnapshot(tx, where);
-  const inHand = await poursInHand(tx, board);
   const said = await command(hand);
   if (!said) return board;
   await raiseRevision(tx, member.seasonId);
   const after = await withoutLapsed(tx, board, await readBoard(tx, member, now));
-  demandNotInHand(hand, inHand, after);
+  demandNotInHand(hand, after);
   const left = { board: after, rows: await takeSnapshot(tx, where) };
   await recordEdit({ tx, member, now }, { kind: 'edit', ...said }, { board, rows }, left);
   if (isOfAllSeasons(rows, left.rows)) await settleOtherSeasons(hand, after, said.what);
@@ -91,6 +90,18 @@ export async function readBoard(tx: Tx, member: Member, now: Date): Promise<Boar
   const rows = await loadBoardRows(tx, member.brewery.id, member.seasonId);
   if (!rows) throw notFound();
   return { ...rows, today: dayIn(member.brewery.timeZone, now) };
+}
+
+/** The board under the locks, with what else a command asks beforehand. */
+export async function readScene(
+  tx: Tx,
+  { brewery, seasonId }: Pick<Member, 'brewery' | 'seasonId'>,
+  now: Date,
+  changeIds: readonly string[] = [],
+): Promise<Pick<Hand, 'board' | 'inHand'> & Pick<SceneRows, 'made'>> {
+  const scene = await loadScene(tx, brewery.id, seasonId, changeIds);
+  if (!scene) throw notFound();
+  return { ...scene, board: { ...scene.board, today: dayIn(brewery.timeZone, now) } };
 }
 
 /** Said under the locks, so that nobody archives the season in between. */

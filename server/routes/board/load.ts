@@ -1,9 +1,10 @@
-import { getTableColumns, sql, type SQL } from 'drizzle-orm';
+import { and, eq, getTableColumns, sql, type SQL } from 'drizzle-orm';
 import type { Board, HouseRuleChanges } from '#shared/api/board.ts';
 import type { Db, Tx } from '../../db/client.ts';
 import { jsonList, jsonObject } from '../../db/jsonRows.ts';
 import { oncePer } from '../../db/oncePer.ts';
 import { cake } from '../../db/schema/cake.ts';
+import { change } from '../../db/schema/change.ts';
 import { batch, chain } from '../../db/schema/chain.ts';
 import { season } from '../../db/schema/season.ts';
 import { vessel, yeast } from '../../db/schema/stock.ts';
@@ -26,7 +27,36 @@ export async function loadBoardRows(
   seasonId: string,
 ): Promise<BoardRows | null> {
   const [found] = await boardQuery(db).execute({ breweryId, seasonId });
+  return found ? presentRows(found) : null;
+}
+
+/** A pour that somebody is at, and who. */
+export interface PourInHand {
+  batchId: string;
+  heldBy: string;
+}
+
+/** A board under a command's locks. */
+export interface SceneRows {
+  board: BoardRows;
+  inHand: PourInHand[];
+  /** Of the changes asked for, those that were made already: the requests are repeated ones. */
+  made: string[];
+}
+
+/** All that a command reads before it changes anything, in one query too. */
+export async function loadScene(
+  tx: Tx,
+  breweryId: string,
+  seasonId: string,
+  changeIds: readonly string[],
+): Promise<SceneRows | null> {
+  const [found] = await sceneQuery(tx).execute({ breweryId, seasonId, changeIds });
   if (!found) return null;
+  return { board: presentRows(found), inHand: found.inHand, made: found.made };
+}
+
+function presentRows(found: FoundBoard): BoardRows {
   return {
     season: presentSeason(found.season, found.blockedDays),
     houseRules: found.houseRules ?? {},
@@ -77,17 +107,41 @@ const LISTS = {
   ),
 };
 
-const houseRules = sql.raw(
-  '(select h.changes from house_rules h where h.brewery_id = season.brewery_id)',
-) as SQL<HouseRuleChanges | null>;
+const SHOWN = {
+  season: getTableColumns(season),
+  houseRules: sql.raw(
+    '(select h.changes from house_rules h where h.brewery_id = season.brewery_id)',
+  ) as SQL<HouseRuleChanges | null>,
+  ...LISTS,
+};
+
+const UNDER_LOCKS = {
+  inHand: jsonList<PourInHand>(
+    "json_build_object('batchId', r.batch_id, 'heldBy', p.name)",
+    `pour_run r join person p on p.id = r.opened_by
+      where r.brewery_id = season.brewery_id and r.season_id = season.id and r.state = 'open'`,
+    'r.id',
+  ),
+  made: sql<string[]>`(select coalesce(json_agg(made.id), '[]'::json) from ${change} made
+    where made.id = any(${sql.placeholder('changeIds')}::uuid[]))`,
+};
+
+const isAsked = () =>
+  and(
+    eq(season.breweryId, sql.placeholder('breweryId')),
+    eq(season.id, sql.placeholder('seasonId')),
+  );
 
 /** Prepared; tests read its plan. */
 export const boardQuery = oncePer((db: Db | Tx) =>
-  db
-    .select({ season: getTableColumns(season), houseRules, ...LISTS })
-    .from(season)
-    .where(
-      sql`${season.breweryId} = ${sql.placeholder('breweryId')} and ${season.id} = ${sql.placeholder('seasonId')}`,
-    )
-    .prepare('board'),
+  db.select(SHOWN).from(season).where(isAsked()).prepare('board'),
 );
+type FoundBoard = Awaited<ReturnType<ReturnType<typeof boardQuery>['execute']>>[number];
+
+/** Prepared; tests read its plan. */
+export const sceneQuery = (db: Db | Tx) =>
+  db
+    .select({ ...SHOWN, ...UNDER_LOCKS })
+    .from(season)
+    .where(isAsked())
+    .prepare('scene');

@@ -1,21 +1,32 @@
-import { and, asc, eq, inArray } from 'drizzle-orm';
+import { and, asc, eq, inArray, sql } from 'drizzle-orm';
 import type { Tx } from '../../db/client.ts';
 import { brewery } from '../../db/schema/brewery.ts';
 import { chain } from '../../db/schema/chain.ts';
 import { season } from '../../db/schema/season.ts';
 
 /**
- * Locks shelves, always in the order of their ids and before the season, so that no two commands
- * wait for each other. Readers, and writers of other shelves, go on.
+ * Locks shelves, always in the order of their ids, and then the season, so that no two commands wait
+ * for each other. Readers, and writers of other shelves, go on.
  */
-export async function lockShelves(
+export async function lockBoard(
   tx: Tx,
   seasonId: string,
   chainIds: readonly string[] | 'all',
 ): Promise<void> {
-  if (chainIds.length === 0) return;
-  const which = chainIds === 'all' ? undefined : inArray(chain.id, [...chainIds]);
+  if (chainIds.length === 0) return lockSeason(tx, seasonId);
+  const shelves = tx.$with('shelves').as(shelvesLocked(tx, seasonId, chainIds));
   await tx
+    .with(shelves)
+    .select({ id: season.id })
+    .from(season)
+    // The season is looked for only once they have all been counted, so they are locked by then.
+    .where(and(eq(season.id, seasonId), sql`(select count(*) from ${shelves}) >= 0`))
+    .for('no key update');
+}
+
+function shelvesLocked(tx: Tx, seasonId: string, chainIds: readonly string[] | 'all') {
+  const which = chainIds === 'all' ? undefined : inArray(chain.id, [...chainIds]);
+  return tx
     .select({ id: chain.id })
     .from(chain)
     .where(and(eq(chain.seasonId, seasonId), which))
@@ -55,8 +66,8 @@ export async function lockFor(
   reach: Reach,
 ): Promise<void> {
   if (reach === 'all-seasons') await lockBrewery(tx, breweryId);
-  await lockShelves(tx, seasonId, shelves);
-  if (reach === 'season') return lockSeason(tx, seasonId);
+  if (reach === 'season') return lockBoard(tx, seasonId, shelves);
+  if (shelves.length > 0) await shelvesLocked(tx, seasonId, shelves);
   await tx
     .select({ id: season.id })
     .from(season)

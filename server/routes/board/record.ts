@@ -4,7 +4,7 @@ import type { Member } from '../../auth/whoAsks.ts';
 import type { Tx } from '../../db/client.ts';
 import { change, type ChangeKind } from '../../db/schema/change.ts';
 import { season } from '../../db/schema/season.ts';
-import { tell } from '../../live/note.ts';
+import { tellRevision } from '../../live/note.ts';
 
 /** A line of the change record, in the product's words, with what was before and what is now. */
 export interface Entry {
@@ -32,19 +32,14 @@ interface Where {
  * @returns the last of these revisions.
  */
 export async function raiseRevision(tx: Tx, seasonId: string, by = 1): Promise<number> {
-  const [raised] = await tx
-    .update(season)
-    .set({ revision: sql`${season.revision} + ${by}` })
-    .where(eq(season.id, seasonId))
-    .returning({ revision: season.revision });
+  const { rows } = await tx.execute<{ revision: number }>(sql`
+    with raised as (
+      update ${season} set revision = revision + ${by} where id = ${seasonId} returning revision)
+    select raised.revision, ${tellRevision(seasonId, sql`each`)}
+    from raised, generate_series(raised.revision - ${by}::int + 1, raised.revision) each`);
+  const [raised] = rows;
   if (!raised) throw new Error('The season went away under its own change');
-  const { revision } = raised;
-  const revisions = Array.from({ length: by }, (_, at) => revision - by + 1 + at);
-  await tell(
-    tx,
-    ...revisions.map((each) => ({ kind: 'season' as const, seasonId, revision: each })),
-  );
-  return revision;
+  return raised.revision;
 }
 
 /** For what the boards of all seasons show: members, and shelves of which somebody is a guest. */

@@ -6,9 +6,8 @@ import { oncePer } from '../../db/oncePer.ts';
 import { change } from '../../db/schema/change.ts';
 import type { Db, Tx } from '../../db/client.ts';
 import type { Deps } from '../../deps.ts';
-import { demandOpen, readBoard } from '../board/changeBoard.ts';
-import { lockSeason, lockShelves } from '../board/locks.ts';
-import { poursInHand } from '../pour/inHand.ts';
+import { demandOpen, readScene } from '../board/changeBoard.ts';
+import { lockBoard } from '../board/locks.ts';
 import { createLane, type Lane, type Outcome } from './lane.ts';
 import { MoveGroup } from './moveGroup.ts';
 
@@ -53,18 +52,14 @@ async function grant(group: readonly Wish[]): Promise<Outcome<Moved>[]> {
   if (!first) return [];
   const { deps, member } = first;
   return inTransaction(deps.db, async (tx) => {
-    await lockShelves(tx, member.seasonId, shelvesOf(group));
-    await lockSeason(tx, member.seasonId);
+    await lockBoard(tx, member.seasonId, shelvesOf(group));
     const now = deps.clock.now();
-    const board = await readBoard(tx, member, now);
+    const ids = group.map(({ request }) => request.id);
+    const { board, inHand, made } = await readScene(tx, member, now, ids);
     demandOpen(board);
-    const made = new MoveGroup(
-      { tx, board, now },
-      await madeBefore(tx, group),
-      await poursInHand(tx, board),
-    );
-    for (const wish of group) await made.add(wish);
-    return made.store();
+    const moves = new MoveGroup({ tx, board, inHand, now }, await madeBefore(tx, made));
+    for (const wish of group) await moves.add(wish);
+    return moves.store();
   });
 }
 
@@ -76,14 +71,11 @@ const shelvesOf = (group: readonly Wish[]): string[] => [
   ),
 ];
 
-/** Changes that have one of these ids already: the requests are repeated ones. */
-const madeBefore = (tx: Tx, group: readonly Wish[]) =>
-  tx
-    .select()
-    .from(change)
-    .where(
-      inArray(
-        change.id,
-        group.map(({ request }) => request.id),
-      ),
-    );
+/** Changes of requests that are repeated: mostly there are none. */
+const madeBefore = async (tx: Tx, ids: readonly string[]) =>
+  ids.length === 0
+    ? []
+    : tx
+        .select()
+        .from(change)
+        .where(inArray(change.id, [...ids]));

@@ -9,7 +9,7 @@ import type { Hand } from '../board/hand.ts';
 import { raiseRevision, writeEntries } from '../board/record.ts';
 import { insertChain } from '../chains/commands.ts';
 import { moveAsGuest } from '../guests/move.ts';
-import { demandNotInHand, type PourInHand } from '../pour/inHand.ts';
+import { demandNotInHand } from '../pour/inHand.ts';
 import { answerAgain, answerMove } from './answer.ts';
 import type { Outcome } from './lane.ts';
 import { refused, type MadeMove } from './refused.ts';
@@ -28,7 +28,6 @@ interface Asked {
 export class MoveGroup {
   readonly #hand: Omit<Hand, 'member'>;
   readonly #madeBefore: readonly Change[];
-  readonly #inHand: readonly PourInHand[];
   readonly #outcomes: Outcome<Moved>[] = [];
   readonly #entries: MadeMove[] = [];
   /** Rows as the moves so far leave them, with their new versions. */
@@ -36,15 +35,10 @@ export class MoveGroup {
   /** The board after the moves so far. */
   #board: Hand['board'];
 
-  constructor(
-    hand: Omit<Hand, 'member'>,
-    madeBefore: readonly Change[],
-    inHand: readonly PourInHand[],
-  ) {
+  constructor(hand: Omit<Hand, 'member'>, madeBefore: readonly Change[]) {
     this.#hand = hand;
     this.#board = hand.board;
     this.#madeBefore = madeBefore;
-    this.#inHand = inHand;
   }
 
   /** A refusal is one wish's own; anything else that is thrown undoes the whole group. */
@@ -82,7 +76,7 @@ export class MoveGroup {
       const own = this.#newestOf(member);
       return answerMove(hand, { changeId: request.id, what, revision, ...(own && { own }) });
     }
-    demandNotInHand(hand, this.#inHand, withRows(board, result.batches, result.chains));
+    demandNotInHand(hand, withRows(board, result.batches, result.chains));
     if (request.newChain && result.chains.length > 0)
       await insertChain(hand, request.newChain, '/newChain');
     return answerMove(hand, this.#take({ member, request }, result));

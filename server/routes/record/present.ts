@@ -18,7 +18,10 @@ export interface EntryRow {
   lastKind: string | null;
 }
 
-export function presentEntry({ change, name, whom, lastKind }: EntryRow, timeZone: string): RecordEntry {
+export function presentEntry(
+  { change, name, whom, lastKind }: EntryRow,
+  timeZone: string,
+): RecordEntry {
   const { id, at, personId, kind, what, touches } = change;
   const { facts, links } = kept.catch({ facts: [], links: [] }).parse(change.after ?? {});
   return {

@@ -7,15 +7,13 @@ import { batch, chain } from '../../db/schema/chain.ts';
 import { yeastLine } from '../../db/schema/stock.ts';
 import { invalidField } from '../../problems.ts';
 import { linkColumns } from '../batches/rows.ts';
-import type { Hand } from '../board/hand.ts';
+import type { Writer } from '../board/hand.ts';
 import type { BoardRows } from '../board/load.ts';
 import { startColumns } from '../chains/present.ts';
 
-type Making = Omit<Hand, 'board'>;
-
 /** Writes the plan of one season into another, which is new and empty. */
 export async function copyInto(
-  making: Making,
+  making: Writer,
   from: BoardRows,
   copy: SeasonCopy,
   { brewWeekdays }: Pick<SeasonCreate, 'brewWeekdays'>,
@@ -50,7 +48,7 @@ class Copies {
 }
 
 async function insertShelf(
-  making: Making,
+  making: Writer,
   copies: Copies,
   { chain: old, batches }: CopiedShelf,
 ): Promise<void> {
@@ -77,7 +75,7 @@ async function insertShelf(
 }
 
 async function insertBatches(
-  { tx, member, now }: Making,
+  { tx, member, now }: Writer,
   copies: Copies,
   batches: readonly Batch[],
   shelf: { id: string; lineId: string } | null,

@@ -7,7 +7,7 @@ import type { Member } from '../../auth/whoAsks.ts';
 import { inTransaction } from '../../db/inTransaction.ts';
 import type { Deps } from '../../deps.ts';
 import { changeBoard, demandOpen, readBoard, type Command } from '../board/changeBoard.ts';
-import { lockSeason, lockShelves } from '../board/locks.ts';
+import { lockBoard, lockSeason } from '../board/locks.ts';
 import { raiseRevision, writeEntry } from '../board/record.ts';
 import { listedSeason, listSeasons } from './list.ts';
 
@@ -76,8 +76,7 @@ export function deleteSeason({ db, clock }: Scene, member: Member, version: numb
   return inTransaction(db, async (tx) => {
     const { seasonId: id, brewery: owner } = member;
     await tx.select({ id: brewery.id }).from(brewery).where(eq(brewery.id, owner.id)).for('update');
-    await lockShelves(tx, id, 'all');
-    await lockSeason(tx, id);
+    await lockBoard(tx, id, 'all');
     const { season: row, chains, batches } = await readBoard(tx, member, clock.now());
     demandVersion(version, row.version, row);
     const all = await listSeasons(tx, owner.id);
