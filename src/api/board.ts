@@ -1,10 +1,12 @@
 import { queryOptions, useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
 import { createContext, use, useMemo, useSyncExternalStore } from 'react';
 import { board as boardContract, type Board } from '#shared/api/board.ts';
+import type { MoveRequest } from '#shared/api/move.ts';
 import type { UnitPrefs } from '#shared/api/units.ts';
 import { api } from '#shared/api/urls.ts';
 import { judgeBoard, type JudgedBoard } from '#shared/chain/judgeBoard.ts';
 import { usePlace } from '../app/useBrewery.ts';
+import { METRIC } from '../app/units.ts';
 import { useUnits } from '../app/useUnits.ts';
 import { KEPT } from '../kept/meta.ts';
 import { request } from './client.ts';
@@ -12,6 +14,7 @@ import { equalDeep } from './equalDeep.ts';
 import { keepEqualRows } from './keepEqualRows.ts';
 import { withPending } from './pendingMoves.ts';
 import { pendingOf } from './pendingStore.ts';
+import { sessionQuery } from './session.ts';
 import { boardStillness } from './stillness.ts';
 
 /** A season's board as the server tells it. The only owner of its key. */
@@ -43,18 +46,8 @@ function newest(before: Board | undefined, now: Board | undefined, fresh: Board)
   return isOvertaken ? now : fresh;
 }
 
-/** Results for one board, kept for as long as that board is: many components ask for the same. */
-const shown = new WeakMap<Board, { pending: readonly unknown[]; board: Board }>();
+/** Verdicts of one board, kept for as long as that board is: many components ask for the same. */
 const judged = new WeakMap<Board, Map<string, JudgedBoard>>();
-
-function shownBoard(board: Board, pending: Parameters<typeof withPending>[1]): Board {
-  if (pending.length === 0) return board;
-  const known = shown.get(board);
-  if (known && known.pending === pending) return known.board;
-  const result = withPending(board, pending);
-  shown.set(board, { pending, board: result });
-  return result;
-}
 
 function judgedBoard(board: Board, units: UnitPrefs): JudgedBoard {
   const byUnits = judged.get(board) ?? new Map<string, JudgedBoard>();
@@ -111,15 +104,24 @@ export function useBoard(): Board {
   const { data } = useSuspenseQuery(boardQuery(slug));
   const { get, subscribe } = pendingOf(slug);
   const pending = useSyncExternalStore(subscribe, get);
-  return shownBoard(data, pending);
+  return withPending(data, pending);
 }
 
 /** The same board outside of drawing: what the page shows, or is about to show. */
 export function readBoard(client: QueryClient, slug: string): Board {
   const board = client.getQueryData(boardQuery(slug).queryKey);
   if (!board) throw new Error('The board has not arrived yet');
-  return shownBoard(board, pendingOf(slug).get());
+  return withPending(board, pendingOf(slug).get());
 }
+
+/** Judges a board that is to be shown next, so that it is only drawn then. */
+export function judgeAhead(client: QueryClient, board: Board): void {
+  judgedBoard(board, client.getQueryData(sessionQuery.queryKey)?.units ?? METRIC);
+}
+
+/** Works out and judges the board as a wish will leave it. */
+export const foresee = (client: QueryClient, slug: string, wish: MoveRequest): void =>
+  judgeAhead(client, withPending(readBoard(client, slug), [wish]));
 
 /** Every verdict of the board, in the person's units. */
 export function useJudged(): JudgedBoard {

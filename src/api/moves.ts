@@ -3,7 +3,7 @@ import { useMemo } from 'react';
 import type { Board } from '#shared/api/board.ts';
 import { moved, type Moved, type MoveRequest } from '#shared/api/move.ts';
 import { api } from '#shared/api/urls.ts';
-import { boardQuery, useBoardSlug } from './board.ts';
+import { boardQuery, judgeAhead, useBoardSlug } from './board.ts';
 import { request } from './client.ts';
 import { createMoveQueue, type Job, type MoveQueue } from './moveQueue.ts';
 import { NothingToUndo } from './nothingToUndo.ts';
@@ -24,16 +24,33 @@ function urlAndBody(slug: string, job: Job, board: Board | undefined): [string, 
   }
 }
 
+const takenIn = new WeakMap<Moved, { board: Board; result: Board }>();
+
+/** The board with the server's answer, the same object each time: it is judged in a task, and drawn in another. */
+function taken(board: Board, answer: Moved): Board {
+  const known = takenIn.get(answer);
+  if (known?.board === board) return known.result;
+  const result = withMoved(board, answer);
+  takenIn.set(answer, { board, result });
+  return result;
+}
+
+const nextTask = () => new Promise<void>((resolve) => setTimeout(resolve));
+
 function createQueue(client: QueryClient, slug: string): MoveQueue {
   const { queryKey } = boardQuery(slug);
   return createMoveQueue({
     async send(job) {
       const [url, body] = urlAndBody(slug, job, client.getQueryData(queryKey));
-      return request(moved, 'POST', url, { body });
+      const answer = await request(moved, 'POST', url, { body });
+      const board = client.getQueryData(queryKey);
+      if (board) judgeAhead(client, taken(board, answer));
+      await nextTask();
+      return answer;
     },
     quiet: boardStillness.quiet,
     take(answer) {
-      client.setQueryData<Board>(queryKey, (board) => board && withMoved(board, answer));
+      client.setQueryData<Board>(queryKey, (board) => board && taken(board, answer));
     },
     show: pendingOf(slug).set,
     idle() {

@@ -1,21 +1,26 @@
 import type { Board } from '#shared/api/board.ts';
 import type { Moved, MoveRequest } from '#shared/api/move.ts';
 import { moveBatch } from '#shared/chain/move.ts';
+import { equalDeep } from './equalDeep.ts';
 
 interface Row {
   id: string;
 }
 
-/** The rows with the given ones in the place of their namesakes; new ones come last. */
+/**
+ * The rows with the given ones in the place of their namesakes; new ones come last. A row that says
+ * the same stays the same object, and so do the rows where that holds for all.
+ */
 function withRows<T extends Row>(rows: T[], changed: readonly T[]): T[] {
   if (changed.length === 0) return rows;
   const left = new Map(changed.map((row) => [row.id, row]));
   const kept = rows.map((row) => {
     const next = left.get(row.id);
     left.delete(row.id);
-    return next ?? row;
+    return next === undefined || equalDeep(row, next) ? row : next;
   });
-  return left.size === 0 ? kept : [...kept, ...left.values()];
+  if (left.size > 0) return [...kept, ...left.values()];
+  return kept.every((row, at) => row === rows[at]) ? rows : kept;
 }
 
 /** The board as one wish would leave it, or as it is where the wish no longer fits. */
@@ -31,13 +36,24 @@ function withWish(board: Board, wish: MoveRequest): Board {
   };
 }
 
+const overlaid = new WeakMap<Board, WeakMap<MoveRequest, Board>>();
+
+/** The same board for the same wish: many parts of a page ask, and a drop is worked out beforehand. */
+function withWishOnce(board: Board, wish: MoveRequest): Board {
+  const known = overlaid.get(board) ?? new WeakMap<MoveRequest, Board>();
+  overlaid.set(board, known);
+  const result = known.get(wish) ?? withWish(board, wish);
+  known.set(wish, result);
+  return result;
+}
+
 /**
  * What the page shows: the board as the server last told it, with the wishes that are on their way
  * laid over it in order. A wish that fails is left out the next time, so that nobody else's change
  * is ever rolled back with it.
  */
 export function withPending(board: Board, pending: readonly MoveRequest[]): Board {
-  return pending.reduce(withWish, board);
+  return pending.reduce(withWishOnce, board);
 }
 
 /** The board after the server's answer to a move, an undo or a redo. */

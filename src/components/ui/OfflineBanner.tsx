@@ -33,7 +33,11 @@ export function OfflineBanner() {
   const online = useOnline();
   useComeBack(online);
   return (
-    <div aria-live="polite" className="max-tablet:sticky max-tablet:top-0 max-tablet:z-20">
+    <div
+      aria-live="polite"
+      data-cover
+      className="max-tablet:sticky max-tablet:top-0 max-tablet:z-20"
+    >
       {!online && <Offline />}
     </div>
   );

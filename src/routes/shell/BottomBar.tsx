@@ -15,6 +15,7 @@ export function BottomBar() {
   return (
     <nav
       aria-label="Pages"
+      data-cover
       className="fixed inset-x-0 bottom-0 z-30 flex border-t border-line bg-paper px-2 pt-1 pb-[max(.5rem,env(safe-area-inset-bottom))] tablet:hidden print:hidden"
     >
       <Tab to={brewery.path('today')} icon={<CalendarCheck size={22} aria-hidden />} name="Today" />

@@ -30,6 +30,7 @@ function scene(answer: (request: MoveRequest) => Promise<Moved> = async (r) => a
   const said: string[] = [];
   const focused: string[] = [];
   const sent: MoveRequest[] = [];
+  const foreseen: MoveRequest[] = [];
   let held = 0;
   let arrive = (_board: Board) => {};
   const move = (request: MoveRequest) => {
@@ -39,6 +40,7 @@ function scene(answer: (request: MoveRequest) => Promise<Moved> = async (r) => a
   };
   const ports: LiftPorts = {
     board: () => board,
+    foresee: (request) => void foreseen.push(request),
     move,
     moveAgain: move,
     undo: () => Promise.reject(new OfflineError()),
@@ -55,7 +57,7 @@ function scene(answer: (request: MoveRequest) => Promise<Moved> = async (r) => a
     newId: () => beer((ids += 1)),
     gapsInSight: () => [],
     onScroll: () => () => undefined,
-    nextFrame: (run) => run(),
+    nextFrame: (run) => run(0),
   };
   const store = createLiftStore();
   const machine = {
@@ -69,6 +71,7 @@ function scene(answer: (request: MoveRequest) => Promise<Moved> = async (r) => a
     said,
     focused,
     sent,
+    foreseen,
     ports,
     held: () => held,
     arrive: (next: Board) => arrive(next),

@@ -5,15 +5,17 @@ import { createLiftStore } from '../../../src/routes/board/lift/liftStore.ts';
 import { openOutward } from '../../../src/routes/board/lift/openOutward.ts';
 import { ALE, beer, LAGER, twoShelves } from './board.ts';
 
-/** Frames that pass when they are told to. */
-function clock() {
-  let waiting: (() => void)[] = [];
+/** Frames that pass when they are told to, so many milliseconds after each other. */
+function clock(frameMs = 16) {
+  let waiting: ((at: number) => void)[] = [];
+  let at = 0;
   return {
-    nextFrame: (run: () => void) => void waiting.push(run),
+    nextFrame: (run: (at: number) => void) => void waiting.push(run),
     pass() {
       const now = waiting;
       waiting = [];
-      for (const run of now) run();
+      at += frameMs;
+      for (const run of now) run(at);
     },
   };
 }
@@ -28,16 +30,16 @@ const KEYS = [
   'new',
 ];
 
-function scene() {
+function scene(frameMs?: number) {
   const board = twoShelves();
   const store = createLiftStore();
-  const frames = clock();
-  let scroll = () => {};
+  const frames = clock(frameMs);
+  let scroll = (_at: number) => {};
   let inSight = KEYS;
   const ports = {
     nextFrame: frames.nextFrame,
     gapsInSight: () => [...inSight],
-    onScroll: (run: () => void) => {
+    onScroll: (run: (at: number) => void) => {
       scroll = run;
       return () => undefined;
     },
@@ -57,7 +59,7 @@ function scene() {
     frames,
     ports,
     places,
-    scroll: () => scroll(),
+    scroll: () => scroll(0),
     see: (keys: string[]) => (inSight = keys),
   };
 }
@@ -79,6 +81,15 @@ describe('a lift', () => {
     const sizes = course(one, 12);
     const steps = sizes.map((size, at) => size - (sizes[at - 1] ?? 0));
     expect(Math.max(...steps)).toBeLessThanOrEqual(2);
+    expect([...one.store.get().opened.keys()].toSorted()).toEqual(KEYS.toSorted());
+  });
+
+  it('opens one by one where frames are slow', () => {
+    const one = scene(40);
+    openUp(one);
+    const sizes = course(one, 16);
+    const steps = sizes.map((size, at) => size - (sizes[at - 1] ?? 0));
+    expect(Math.max(...steps.slice(steps.findIndex((step) => step > 0) + 1))).toBe(1);
     expect([...one.store.get().opened.keys()].toSorted()).toEqual(KEYS.toSorted());
   });
 

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import type { MoveRequest } from '#shared/api/move.ts';
 import { indexBoard } from '#shared/chain/board.ts';
 import { newShelfFor } from '#shared/chain/newShelf.ts';
+import { keepEqualRows } from '../../../src/api/keepEqualRows.ts';
 import { withMoved, withPending } from '../../../src/api/pendingMoves.ts';
 import { ALE, beer, LAGER, twoShelves } from './board.ts';
 import { idOf, makeBatch } from '../../support/boards.ts';
@@ -90,6 +91,20 @@ describe('the server’s answer', () => {
     expect(board.season.revision).toBe(2);
     expect(rowOf(board, LAGER)).toEqual([4, 5, 6].map(beer));
     expect(board.chains.map((chain) => chain.id)).toEqual([LAGER]);
+  });
+
+  it('is the very board that is kept, so that what is judged of it beforehand still counts', () => {
+    const before = twoShelves();
+    const same = before.batches.find(({ id }) => id === beer(5)) ?? expect.unreachable();
+    const board = withMoved(before, {
+      ...said,
+      revision: 2,
+      batches: [makeBatch(6, { version: 2, chainId: LAGER, place: 2 }), structuredClone(same)],
+      chains: structuredClone(before.chains),
+      removedChainIds: [],
+    });
+    expect(board.batches).toContain(same);
+    expect(keepEqualRows(before, board)).toBe(board);
   });
 
   it('is left alone where the board is newer', () => {

@@ -1,6 +1,9 @@
 /** A step begins only where the page has this much to spare, ms; a step of a full board takes it. */
 const STEP_MS = 8;
 
+/** A moment is left early, ms: who presses something in it waits for its end. */
+const LONGEST_MS = 28;
+
 /** Where a browser does not tell of idle moments: one step, then a pause for the page. */
 const PAUSE_MS = 16;
 
@@ -31,7 +34,10 @@ export function stepWhenIdle<T>(
 
 function soon(run: (timeLeft: () => number) => void): () => void {
   if ('requestIdleCallback' in window) {
-    const handle = requestIdleCallback((deadline) => run(() => deadline.timeRemaining()));
+    const handle = requestIdleCallback((deadline) => {
+      const end = performance.now() + LONGEST_MS;
+      run(() => Math.min(deadline.timeRemaining(), end - performance.now()));
+    });
     return () => cancelIdleCallback(handle);
   }
   const spare = [STEP_MS];

@@ -31,12 +31,13 @@ function useInSight(ref: RefObject<HTMLDivElement | null>, isOver: boolean) {
  * that nothing is drawn anew and little is styled anew.
  */
 function useRoom(ref: RefObject<HTMLDivElement | null>, isOpened: boolean) {
+  const { store } = useLiftMachine();
   useLayoutEffect(() => {
     const room = isOpened && ref.current?.closest('[data-room]');
     if (!room) return;
-    room.setAttribute('data-lifting', '');
+    room.setAttribute('data-lifting', store.get().lifted?.by ?? '');
     return () => room.removeAttribute('data-lifting');
-  }, [ref, isOpened]);
+  }, [ref, isOpened, store]);
 }
 
 /**

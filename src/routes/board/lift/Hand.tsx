@@ -18,7 +18,7 @@ export function Hand({ grab }: { grab: RefObject<Grab | null> }) {
   const card = useRef<HTMLDivElement>(null);
   useImperativeHandle(grab, () => createGrab(machine, card), [machine]);
   return (
-    <div ref={card} className="pointer-events-none fixed top-0 left-0 z-[999]">
+    <div ref={card} className="pointer-events-none fixed top-0 left-0 z-[999] cursor-grabbing">
       <LiftedCard />
     </div>
   );
@@ -31,27 +31,33 @@ function createGrab(machine: LiftMachine, card: RefObject<HTMLDivElement | null>
   };
   const nextFrame = (run: () => void) => requestAnimationFrame(run);
 
-  /** Ends the drag; the card glides from the pointer to where the batch stands after `then`. */
-  const letGo = (batchId: string | undefined, release: () => void, then: () => void) => {
+  /** Ends the drag; the card glides from the pointer to where the batch stands then. */
+  const letGo = (batchId: string | undefined, release: () => void, ready: () => () => void) => {
     const picture = leaveBehind(card.current);
     release();
-    // The hand opens in this frame, the board changes after it and is laid out in the next: all at
-    // once would be felt.
+    // The hand opens in this frame. The board is worked out after it, drawn after that, and laid out
+    // in the next: all at once would be felt.
     nextFrame(() =>
       setTimeout(() => {
-        then();
-        nextFrame(() => nextFrame(() => glide(picture, batchId ?? '')));
+        const put = ready();
+        setTimeout(() => {
+          put();
+          nextFrame(() => nextFrame(() => glide(picture, batchId ?? '')));
+        });
       }),
     );
   };
 
   return (event) => {
     let watch: Watch | null = null;
-    const putBack = () => letGo(store.get().lifted?.batchId, lifting.cancel, () => undefined);
+    const putBack = () => letGo(store.get().lifted?.batchId, lifting.cancel, () => () => {});
     followPress(event, {
       lift(at) {
+        // Without it the browser would look through the whole board at every step of the pointer.
+        card.current?.setPointerCapture(event.pointerId);
         lifting.liftPressed();
-        watch = watchPointer(at, { carry, goOver: lifting.goOver });
+        const opened = () => store.get().opened;
+        watch = watchPointer(at, { carry, goOver: lifting.goOver, opened });
       },
       moved: (step) => watch?.moved(step),
       drop() {
@@ -60,7 +66,7 @@ function createGrab(machine: LiftMachine, card: RefObject<HTMLDivElement | null>
         const gap = key === null ? undefined : lifted?.gaps.get(key);
         if (!lifted || !gap) return putBack();
         const { batchId, chainId: from } = lifted;
-        letGo(batchId, lifting.release, () => putting.put(batchId, gap, { from }));
+        letGo(batchId, lifting.release, () => putting.ready(batchId, gap, { from }));
       },
       cancel() {
         watch?.stop();

@@ -35,7 +35,7 @@ export function gapsInSight(batchId: string): string[] {
 }
 
 /** Scrolling of the page, told at most once in a frame. */
-export function onScroll(run: () => void): () => void {
+export function onScroll(run: (at: number) => void): () => void {
   let frame = 0;
   const listen = () => {
     cancelAnimationFrame(frame);

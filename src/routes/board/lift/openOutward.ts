@@ -5,6 +5,8 @@ import type { LiftPorts } from './ports.ts';
 /** Gaps of one frame: as many as are drawn and styled in a few milliseconds. */
 const OPENED = 2;
 const CLOSED = 4;
+/** A page whose frames take longer than this, ms, opens them one by one. */
+const SLOW_MS = 20;
 
 /** What opening needs of the page. */
 type Frames = Pick<LiftPorts, 'nextFrame' | 'gapsInSight' | 'onScroll'>;
@@ -25,10 +27,12 @@ function close(store: LiftStore, ports: Frames) {
 export function openOutward(store: LiftStore, ports: Frames, batchId: string): () => void {
   let hasEnded = false;
   let waiting: string[] | null = null;
+  let last = Infinity;
 
-  const open = () => {
+  const open = (at: number) => {
     const { lifted, opened } = store.get();
-    const next = waiting?.splice(0, OPENED) ?? [];
+    const next = waiting?.splice(0, at - last > SLOW_MS ? 1 : OPENED) ?? [];
+    last = at;
     if (next.length === 0) waiting = null;
     if (hasEnded || !lifted || waiting === null) return;
     const faces = next.flatMap((key): [string, Face][] => {
@@ -40,14 +44,14 @@ export function openOutward(store: LiftStore, ports: Frames, batchId: string): (
   };
 
   /** Looks for gaps in sight that are shut; measured once, and again after scrolling. */
-  const look = () => {
+  const look = (at: number) => {
     if (hasEnded) return;
     const { lifted, opened } = store.get();
     const isBusy = waiting !== null;
     const shut = ports.gapsInSight(batchId).filter((key) => !opened.has(key));
     const best = shut.filter((key) => lifted?.gaps.get(key)?.best);
     waiting = [...best, ...shut.filter((key) => !best.includes(key))];
-    if (!isBusy) open();
+    if (!isBusy) open(at);
   };
 
   const unfold = () => {

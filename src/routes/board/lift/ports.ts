@@ -1,10 +1,13 @@
 import type { Board } from '#shared/api/board.ts';
+import type { MoveRequest } from '#shared/api/move.ts';
 import type { Mover } from '../../../api/moves.ts';
 
 /** What lifting needs of the page around it. */
 export interface LiftPorts extends Mover {
   /** The board as it is shown now. */
   board(): Board;
+  /** Works out what the board will be after a wish, before it is shown. */
+  foresee(wish: MoveRequest): void;
   isOnline(): boolean;
   /** Keeps what arrives from elsewhere off the board, but for a look at it; the answer ends it. */
   holdStill(look: (arrived: Board) => void): () => void;
@@ -17,6 +20,7 @@ export interface LiftPorts extends Mover {
   /** Keys of the gaps on shelves in sight, those of the nearest shelf to the batch first. */
   gapsInSight(batchId: string): string[];
   /** Calls when shelves may have come into sight; the answer ends it. */
-  onScroll(run: () => void): () => void;
-  nextFrame(run: () => void): void;
+  onScroll(run: (at: number) => void): () => void;
+  /** Calls once, with the time of that frame in milliseconds. */
+  nextFrame(run: (at: number) => void): void;
 }

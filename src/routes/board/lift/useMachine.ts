@@ -1,7 +1,7 @@
 import { useQueryClient, type QueryClient } from '@tanstack/react-query';
 import { useEffect, useMemo } from 'react';
 import type { Board } from '#shared/api/board.ts';
-import { readBoard, useBoardSlug } from '../../../api/board.ts';
+import { foresee, readBoard, useBoardSlug } from '../../../api/board.ts';
 import { isOnline } from '../../../api/connection.ts';
 import { moverOf } from '../../../api/moves.ts';
 import { boardStillness } from '../../../api/stillness.ts';
@@ -18,6 +18,7 @@ import { useRehearsal } from './useRehearsal.ts';
 function portsOf(client: QueryClient, slug: string, words: Announcements): LiftPorts {
   return {
     board: () => readBoard(client, slug),
+    foresee: (wish) => foresee(client, slug, wish),
     ...moverOf(client, slug),
     isOnline,
     holdStill: boardStillness.hold,

@@ -1,5 +1,6 @@
 import { scrollAt } from './autoScroll.ts';
 import { gapIn, pointOf, type Point } from './pointer.ts';
+import { createUnderPointer } from './underPointer.ts';
 
 export interface Watch {
   moved(event: PointerEvent): void;
@@ -7,45 +8,39 @@ export interface Watch {
   stop(): string | null;
 }
 
-const under = ({ x, y }: Point) => document.elementFromPoint(x, y);
-
 interface Steps {
   carry(at: Point): void;
   goOver(key: string | null): void;
+  /** Changes whenever a gap opens or closes. */
+  opened(): unknown;
 }
 
-/**
- * Follows the pointer of a drag, once in a frame. What lies under a mouse the browser has found out
- * to send its event; only a finger, or what scrolls under the pointer, needs a hit test of ours.
- */
-export function watchPointer(start: Point, { carry, goOver }: Steps): Watch {
+/** Follows the pointer of a drag, once in a frame. */
+export function watchPointer(start: Point, { carry, goOver, opened }: Steps): Watch {
+  const under = createUnderPointer(opened);
   let at = start;
-  let target: Element | null = null;
   let hasMoved = true;
-  let hasScrolled = false;
   const look = () => {
-    if (hasMoved || hasScrolled) {
-      const element = (!hasScrolled && target) || under(at);
-      if (hasMoved) carry(at);
-      hasMoved = false;
-      goOver(gapIn(element));
-      hasScrolled = scrollAt(at, element);
-    }
+    if (hasMoved) carry(at);
+    hasMoved = false;
+    const { gap, run } = under.at(at);
+    goOver(gap);
+    scrollAt(at, run);
     frame = requestAnimationFrame(look);
   };
   let frame = requestAnimationFrame(look);
+  document.addEventListener('scroll', under.forget, { capture: true, passive: true });
   carry(start);
   return {
     moved(event) {
       at = pointOf(event);
-      // A finger's events go to where it was put down.
-      const isMouse = event.pointerType === 'mouse' && event.target instanceof Element;
-      target = isMouse ? event.target : null;
       hasMoved = true;
     },
     stop() {
       cancelAnimationFrame(frame);
-      return gapIn(under(at));
+      document.removeEventListener('scroll', under.forget, { capture: true });
+      // What is put down goes where the eye sees it, whatever was measured.
+      return gapIn(document.elementFromPoint(at.x, at.y));
     },
   };
 }

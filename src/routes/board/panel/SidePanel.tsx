@@ -38,6 +38,7 @@ export function SidePanel() {
   if (wide)
     return (
       <aside
+        data-cover
         aria-label="Beside the shelves"
         className="thumb-slim print:hidden sticky top-0 h-dvh w-[372px] shrink-0 overflow-y-auto border-l border-line bg-paper"
       >
@@ -47,6 +48,7 @@ export function SidePanel() {
   if (link)
     return (
       <aside
+        data-cover
         aria-label="Opened link"
         className="print:hidden fixed inset-y-0 right-0 z-40 w-full overflow-y-auto overscroll-contain border-l border-line bg-paper shadow-card tablet:w-[404px]"
       >
@@ -56,12 +58,14 @@ export function SidePanel() {
   return <Below lift={lift} />;
 }
 
+/** What to look at only gives way to a lift: to make it anew as the batch is put down would be felt. */
 function AtRest({ lift }: { lift: ReturnType<typeof useLiftPanel> }) {
-  if (lift === 'places') return <Lifting lift={lift} />;
   return (
     <>
-      {lift === 'changes' && <Lifting lift={lift} />}
-      <AttentionPanel />
+      {lift && <Lifting lift={lift} />}
+      <div hidden={lift === 'places'}>
+        <AttentionPanel />
+      </div>
     </>
   );
 }
@@ -73,6 +77,7 @@ function Below({ lift }: { lift: ReturnType<typeof useLiftPanel> }) {
   if (lift === null || (lift === 'places' && by === 'pointer')) return null;
   return (
     <aside
+      data-cover
       aria-label="Lifting"
       className="thumb-slim print:hidden fixed inset-x-0 bottom-0 z-30 max-h-[38dvh] overflow-y-auto overscroll-contain rounded-t-2xl border-t border-line bg-paper shadow-card max-tablet:bottom-[72px] tablet:right-4 tablet:left-auto tablet:w-[404px] tablet:rounded-2xl tablet:border"
     >

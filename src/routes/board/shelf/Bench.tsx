@@ -18,6 +18,7 @@ export function Bench() {
   return (
     <section
       data-room
+      data-cover
       aria-labelledby="bench"
       className="sticky print:static bottom-0 z-20 mt-auto flex items-center gap-3 border-t-[3px] border-shelf2 bg-bench px-7 pt-2.5 pb-3"
     >

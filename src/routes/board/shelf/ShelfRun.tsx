@@ -11,6 +11,7 @@ export function ShelfRun({ label, children }: { label: string; children: ReactNo
   return (
     <div
       ref={ref}
+      data-run
       className="shelf-run thumb-slim relative -mt-4 -ml-10 pt-4 overflow-x-auto overflow-y-hidden overscroll-x-contain"
     >
       <div
