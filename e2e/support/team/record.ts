@@ -44,15 +44,18 @@ export async function expectAllStandsOnce(stand: Stand): Promise<void> {
   await expectComments(stand);
 }
 
+const movedNothing = ({ answer }: Answered) =>
+  (answer as { batches?: readonly unknown[] } | null)?.batches?.length === 0;
 const changeIdOf = ({ answer }: Answered) => (answer as { changeId?: string } | null)?.changeId;
 
 function expectMoves(rows: readonly ChangeRow[], answered: readonly Answered[]): void {
   for (const one of answered.filter(({ path }) => path.endsWith('/moves'))) {
     const { id } = one.body as { id: string };
+    // Somebody else may have put it there just before: then there was nothing to move, and no line.
     expect(
       rows.filter((row) => row.id === id),
       'an answered move stands once',
-    ).toHaveLength(1);
+    ).toHaveLength(movedNothing(one) ? 0 : 1);
   }
   for (const one of answered.filter(({ path }) => /\/(undo|redo)$/.test(path))) {
     const kind = one.path.endsWith('undo') ? 'undo' : 'redo';
