@@ -1,9 +1,11 @@
 import { asc, eq } from 'drizzle-orm';
 import { comment as commentContract } from '#shared/api/comment.ts';
+import type { MoveRequest } from '#shared/api/move.ts';
 import type { Db } from '../../../server/db/client.ts';
 import { batch } from '../../../server/db/schema/chain.ts';
 import { change } from '../../../server/db/schema/change.ts';
 import { comment } from '../../../server/db/schema/talk.ts';
+import type { Side } from '../../../server/routes/moves/standing.ts';
 import { expect } from '../test.ts';
 import type { Answered } from './ledger.ts';
 
@@ -46,16 +48,28 @@ export async function expectAllStandsOnce(stand: Stand): Promise<void> {
 
 const movedNothing = ({ answer }: Answered) =>
   (answer as { batches?: readonly unknown[] } | null)?.batches?.length === 0;
+
+/** Whether the record tells of a batch where a move wished to have it. */
+function stoodThere(rows: readonly ChangeRow[], wish: MoveRequest): boolean {
+  const chainId = wish.toChainId === 'bench' ? null : wish.toChainId;
+  const afterId = chainId === null ? null : wish.afterBatchId;
+  return rows
+    .flatMap(({ before, after }) => [before, after] as Partial<Side>[])
+    .flatMap((side) => side.batches ?? [])
+    .some((is) => is.id === wish.batchId && is.chainId === chainId && is.afterId === afterId);
+}
+
 const changeIdOf = ({ answer }: Answered) => (answer as { changeId?: string } | null)?.changeId;
 
 function expectMoves(rows: readonly ChangeRow[], answered: readonly Answered[]): void {
   for (const one of answered.filter(({ path }) => path.endsWith('/moves'))) {
-    const { id } = one.body as { id: string };
-    // Somebody else may have put it there just before: then there was nothing to move, and no line.
-    expect(
-      rows.filter((row) => row.id === id),
-      'an answered move stands once',
-    ).toHaveLength(movedNothing(one) ? 0 : 1);
+    const wish = one.body as MoveRequest;
+    const lines = rows.filter(({ id }) => id === wish.id);
+    if (movedNothing(one)) {
+      // Somebody else had put it there just before.
+      expect(lines, 'a move that found nothing to move writes no line').toEqual([]);
+      expect(stoodThere(rows, wish), 'what was not moved stood where it was wanted').toBe(true);
+    } else expect(lines, 'an answered move stands once').toHaveLength(1);
   }
   for (const one of answered.filter(({ path }) => /\/(undo|redo)$/.test(path))) {
     const kind = one.path.endsWith('undo') ? 'undo' : 'redo';
