@@ -3,8 +3,9 @@ import { equalDeep } from './equalDeep.ts';
 
 /**
  * What was read anew, with everything that is as it was still the same object, so that it is not
- * drawn anew; where that is so already, what was read itself. Rows are known by their ids: one that was moved changes the place of all behind it,
- * and compared place by place every one of those would be another.
+ * drawn anew; where that is so already, what was read itself. Rows are known by their ids: one that
+ * was moved changes the place of all behind it, and compared place by place every one of those would
+ * be another.
  */
 export function keepEqualRows(before: unknown, now: unknown): unknown {
   if (!isRecord(before) || !isRecord(now)) return keepEqual(before, now);

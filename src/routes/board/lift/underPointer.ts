@@ -49,12 +49,14 @@ export function createUnderPointer(opened: () => unknown): UnderPointer {
   let seen: unknown = null;
   let age = 0;
 
-  const isGood = () => {
+  const keepUp = () => {
     const now = opened();
     const isChanging = now !== seen;
     seen = now;
     age += 1;
-    return measured === now || (measured !== null && isChanging && age < OLDEST_FRAMES);
+    if (measured === now) return;
+    const mayWait = measured !== null && isChanging && age < OLDEST_FRAMES;
+    if (!mayWait) measure();
   };
   const measure = () => {
     measured = opened();
@@ -70,7 +72,7 @@ export function createUnderPointer(opened: () => unknown): UnderPointer {
   };
   return {
     at(point) {
-      if (!isGood()) measure();
+      keepUp();
       const isHere = holds(point);
       const cover = covers.find(isHere)?.element;
       const gap = gaps.filter(isHere).find(({ element }) => !cover || cover.contains(element));
