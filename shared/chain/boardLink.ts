@@ -92,21 +92,19 @@ export function unsharedLink(earlier: Batch, later: Batch, sight: LinkSight): Li
   const { generation, inherited } = sight.descent(later);
   const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
   const vessel = chain?.vesselId ? index.vessels.get(chain.vesselId) : undefined;
-  const pour = pourOf(earlier, later, sight);
-  const input: LinkInput = {
+  return {
     earlier: sight.facts(earlier),
     later: sight.facts(later),
-    pour,
+    pour: pourOf(earlier, later, sight),
     yeast,
+    vessel: vessel && vesselFactsOf(vessel),
+    generation: generation ?? undefined,
     inherited,
     rules: sight.rules,
     board: boardContext(earlier, later, sight),
+    units: sight.units,
+    wholeCakeBefore: earlier.link.keepWhole && layout.predecessor(earlier.id) !== null,
   };
-  if (vessel) input.vessel = vesselFactsOf(vessel);
-  if (generation !== null) input.generation = generation;
-  if (sight.units) input.units = sight.units;
-  if (earlier.link.keepWhole && layout.predecessor(earlier.id)) input.wholeCakeBefore = true;
-  return input;
 }
 
 /** The yeast of the cake that goes under a batch: its source's, which is its chain's but for branches. */
@@ -121,34 +119,26 @@ function cakeYeastId(earlier: Batch, later: Batch, { layout }: LinkSight): strin
 }
 
 /** The yeast that the later batch asks for where that is not the cake's. */
-function otherYeastOf(
-  earlier: Batch,
-  later: Batch,
-  sight: LinkSight,
-): PourFacts['otherYeast'] | null {
+function otherYeastOf(earlier: Batch, later: Batch, sight: LinkSight): PourFacts['otherYeast'] {
   const { index, layout } = sight;
   const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
   const wanted = index.yeasts.get(later.yeastId ?? chain?.yeastId ?? '');
-  if (!wanted || wanted.id === cakeYeastId(earlier, later, sight)) return null;
+  if (!wanted || wanted.id === cakeYeastId(earlier, later, sight)) return undefined;
   return { kind: wanted.kind, character: wanted.character };
 }
 
 function pourOf(earlier: Batch, later: Batch, sight: LinkSight): PourFacts {
-  const otherYeast = otherYeastOf(earlier, later, sight);
   const own = later.vesselId ? sight.index.vessels.get(later.vesselId) : undefined;
-  const beersSinceCleaning = sight.use(later.id)?.beersSinceCleaning;
   const pour = pourFactsOf(later, earlier);
-  if (otherYeast) pour.otherYeast = otherYeast;
-  if (own) pour.vessel = vesselFactsOf(own);
-  if (beersSinceCleaning !== undefined) pour.beersSinceCleaning = beersSinceCleaning;
+  pour.otherYeast = otherYeastOf(earlier, later, sight);
+  pour.vessel = own && vesselFactsOf(own);
+  pour.beersSinceCleaning = sight.use(later.id)?.beersSinceCleaning;
   return pour;
 }
 
 function boardContext(earlier: Batch, later: Batch, sight: LinkSight): BoardContext {
-  const context: BoardContext = {};
-  const taken = sight.use(later.id)?.takenBy;
-  if (taken !== undefined) context.vesselTakenBy = taken;
-  const cakeCheck = cakeCheckOf(earlier, later, sight);
-  if (cakeCheck) context.cakeCheck = cakeCheck;
-  return context;
+  return {
+    vesselTakenBy: sight.use(later.id)?.takenBy,
+    cakeCheck: cakeCheckOf(earlier, later, sight) ?? undefined,
+  };
 }

@@ -72,8 +72,11 @@ export function broughtAlong({
   allergens,
   cultures,
 }: Extract<ChainStart, { kind: 'outside' }>): Inheritance {
-  const inherited: Inheritance = { allergens: allergens ?? [], cultures: cultures ?? [] };
-  if (allergens === null) inherited.allergensUnknown = true;
-  if (cultures === null) inherited.culturesUnknown = true;
-  return inherited;
+  return {
+    ...NOTHING_INHERITED,
+    allergens: allergens ?? [],
+    cultures: cultures ?? [],
+    allergensUnknown: allergens === null,
+    culturesUnknown: cultures === null,
+  };
 }

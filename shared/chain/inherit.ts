@@ -1,23 +1,28 @@
 import type { BatchFacts, Inheritance } from '../rules/facts.ts';
 
 /** A fresh yeast hands nothing down. */
-export const NOTHING_INHERITED: Inheritance = { allergens: [], cultures: [] };
+export const NOTHING_INHERITED: Inheritance = {
+  allergens: [],
+  cultures: [],
+  strongestOg: undefined,
+  ogUnknown: false,
+  allergensUnknown: false,
+  culturesUnknown: false,
+};
 
 /**
  * What a yeast hands down after one more beer: allergens and cultures travel with it for ever.
  * Taking in the same batch twice changes nothing.
  */
 export function inherit(before: Inheritance, batch: BatchFacts): Inheritance {
-  const after: Inheritance = {
+  return {
     allergens: union(before.allergens, batch.allergens),
     cultures: union(before.cultures, batch.cultures),
+    strongestOg: higher(before.strongestOg, batch.og),
+    ogUnknown: before.ogUnknown === true || batch.og === undefined,
+    allergensUnknown: before.allergensUnknown === true || batch.allergens === undefined,
+    culturesUnknown: before.culturesUnknown === true || batch.cultures === undefined,
   };
-  const strongest = higher(before.strongestOg, batch.og);
-  if (strongest !== undefined) after.strongestOg = strongest;
-  if (before.ogUnknown || batch.og === undefined) after.ogUnknown = true;
-  if (before.allergensUnknown || batch.allergens === undefined) after.allergensUnknown = true;
-  if (before.culturesUnknown || batch.cultures === undefined) after.culturesUnknown = true;
-  return after;
 }
 
 function union<T>(before: readonly T[], more: readonly T[] = []): readonly T[] {

@@ -47,6 +47,7 @@ export function keptCake(link: Around, keepL: number | 'unknown' | undefined): K
   const keptL = partOf(clamped ? undefined : keepL, free);
   const share = shareOf(keptL, whole);
   const leftL = leftAbove(link);
+  const { freeShare, freeShareAtMost } = freeSpace(link, keptL, share, leftL);
   return {
     keptL,
     share,
@@ -59,7 +60,8 @@ export function keptCake(link: Around, keepL: number | 'unknown' | undefined): K
           : retainedBeerL({ keptL, cakeL: whole, leftAboveL: leftL }),
     ratio: share === 0 ? 0 : ratioOf(link.cake?.viableCells, share, link.need),
     ratioAtMost: ratioOf(link.cake?.freshCells, share ?? shareOf(free, whole), link.need),
-    ...freeSpace(link, keptL, share, leftL),
+    freeShare,
+    freeShareAtMost,
   };
 }
 

@@ -21,13 +21,12 @@ export const tiredCake: Rule<Detail> = {
 
   judge(link) {
     const { a, rules, abvA: abv } = link;
-    const detail = { og: a.og, abv };
     if (above(link, rules.tiredOgHold, rules.tiredAbvHold)) {
       const counted = (a.measuredCake?.viability ?? 0) >= ENOUGH_ALIVE;
-      return (counted ? mind : hold)({ ...detail, over: 'hold' });
+      return (counted ? mind : hold)({ og: a.og, abv, over: 'hold' });
     }
     if (above(link, rules.tiredOgMind, rules.tiredAbvMind))
-      return mind({ ...detail, over: 'mind' });
+      return mind({ og: a.og, abv, over: 'mind' });
     return abv === undefined ? unchecked(missingOf(a, 'og', 'fg')) : PASSED;
   },
 
