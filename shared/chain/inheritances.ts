@@ -1,4 +1,5 @@
 import type { Inheritance } from '../rules/facts.ts';
+import { ALLERGENS, CULTURES } from '../rules/vocabulary.ts';
 
 /** Inheritances kept once each, so that equal ones bear one number. */
 export class Inheritances {
@@ -44,13 +45,16 @@ const isSame = (was: Inheritance, is: Inheritance): boolean =>
   was.allergensUnknown === is.allergensUnknown &&
   was.culturesUnknown === is.culturesUnknown;
 
-/** The order in which allergens and cultures came in does not matter. */
-const contentOf = ({ allergens, cultures, ...rest }: Inheritance): string =>
-  JSON.stringify([
-    allergens.toSorted(),
-    cultures.toSorted(),
-    rest.strongestOg ?? null,
-    rest.ogUnknown ?? false,
-    rest.allergensUnknown ?? false,
-    rest.culturesUnknown ?? false,
-  ]);
+/** The order in which allergens and cultures came in does not matter: a bit stands for each. */
+function contentOf(inheritance: Inheritance): string {
+  const { allergens, cultures, strongestOg, ogUnknown, allergensUnknown, culturesUnknown } =
+    inheritance;
+  const unknown = (ogUnknown ? 1 : 0) + (allergensUnknown ? 2 : 0) + (culturesUnknown ? 4 : 0);
+  return `${bits(allergens, ALLERGENS)} ${bits(cultures, CULTURES)} ${unknown} ${strongestOg}`;
+}
+
+function bits<T>(some: readonly T[], all: readonly T[]): number {
+  let found = 0;
+  for (const one of some) found |= 1 << all.indexOf(one);
+  return found;
+}

@@ -6,8 +6,8 @@ import type { Judgement } from './trial/judgement.ts';
 import type { ChangedLink } from './weigh.ts';
 
 /** A link that the brewer is told of at the gap: it comes about by the drop, or gets worse by it. */
-const countsAtGap = ({ relinked, before, after }: ChangedLink): boolean =>
-  after !== null && (relinked || after.counts > (before?.counts ?? -1));
+const countsAtGap = (after: Judgement, { relinked, before }: ChangedLink): boolean =>
+  relinked || after.counts > (before?.counts ?? -1);
 
 /** A place and what putting the batch there would change. */
 export interface WeighedPlace {
@@ -19,8 +19,9 @@ export interface WeighedPlace {
 }
 
 /**
- * A gap with the worst over the links that it is judged by. The short reasons and the colour shift
- * are worked out when they are asked for: a lifted batch has hundreds of gaps, and few are read.
+ * A gap with the worst over the links that it is judged by. What changes, the short reasons and the
+ * colour shift are worked out when they are asked for: a lifted batch has hundreds of gaps, and few
+ * are read.
  */
 export class JudgedGap implements Gap {
   readonly key: string;
@@ -34,25 +35,39 @@ export class JudgedGap implements Gap {
   readonly brewOn: Day | null;
   best = false;
   readonly generation: number | null;
-  readonly changes: Gap['changes'];
+  readonly #changed: readonly ChangedLink[];
   readonly #links: readonly Judgement[];
   #colourShift: number | null | undefined;
 
   constructor({ place, changed, brewOn, generation }: WeighedPlace) {
     const links: Judgement[] = [];
-    for (const link of changed) if (link.after && countsAtGap(link)) links.push(link.after);
+    let holds = 0;
+    let minds = 0;
+    for (const link of changed) {
+      if (link.after === null || !countsAtGap(link.after, link)) continue;
+      links.push(link.after);
+      holds += link.after.holds;
+      minds += link.after.minds;
+    }
     this.key = place.key;
     this.toChainId = place.toChainId;
     this.afterBatchId = place.afterId;
     this.here = place.here;
     this.locked = place.locked;
-    this.holds = sum(links, 'holds');
-    this.minds = sum(links, 'minds');
-    this.verdict = this.holds > 0 ? 'hold' : this.minds > 0 ? 'mind' : 'pour';
+    this.holds = holds;
+    this.minds = minds;
+    this.verdict = holds > 0 ? 'hold' : minds > 0 ? 'mind' : 'pour';
     this.brewOn = brewOn;
     this.generation = generation;
-    this.changes = place.here ? [] : changesOf(changed);
+    this.#changed = place.here ? [] : changed;
     this.#links = links;
+  }
+
+  get changes(): Gap['changes'] {
+    return this.#changed.map(({ laterId, after }) => ({
+      laterId,
+      verdict: after?.verdict ?? 'pour',
+    }));
   }
 
   /** Titles, worst first. */
@@ -68,9 +83,6 @@ export class JudgedGap implements Gap {
   }
 }
 
-const changesOf = (changed: readonly ChangedLink[]): Gap['changes'] =>
-  changed.map(({ laterId, after }) => ({ laterId, verdict: after?.verdict ?? 'pour' }));
-
 function largestShift(links: readonly Judgement[]): number | null {
   let largest = 0;
   for (const { deltaE00 } of links) {
@@ -79,6 +91,3 @@ function largestShift(links: readonly Judgement[]): number | null {
   }
   return largest;
 }
-
-const sum = (links: readonly Judgement[], figure: 'holds' | 'minds'): number =>
-  links.reduce((total, link) => total + link[figure], 0);

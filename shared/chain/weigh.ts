@@ -9,7 +9,7 @@ import { isStill, Pairs, type Pair } from './trial/pairs.ts';
 import { eachSharer, startsChains } from './trial/parts.ts';
 import { rosterOf, type Roster } from './trial/roster.ts';
 import { Trial, type TrialPlace } from './trial/trial.ts';
-import { findIn, membersOf, vesselsChanged } from './trial/vesselDays.ts';
+import { findIn, staysIn, vesselsChanged, type Stay } from './trial/vesselDays.ts';
 
 /** One link of a board that a move changes. */
 export interface ChangedLink {
@@ -53,6 +53,8 @@ export class Scales {
   readonly #baseFinds: Int32Array;
   readonly #finds: Int32Array;
   readonly #standing: Standing[] = [];
+  /** As each link was last tried: the gaps of one shelf do the same to most of those behind them. */
+  readonly #tried: Standing[] = [];
   /** The trial in which a batch was last reached. */
   readonly #reached: Int32Array;
   #trials = 0;
@@ -64,10 +66,10 @@ export class Scales {
     this.#trial = new Trial(this.roster);
     this.#descents = new Descents(this.#trial, (batch) => this.#factsOf(batch));
     this.#pairs = new Pairs(this.#trial, this.sight);
-    this.#baseFinds = Int32Array.from(batches, (_, batch) => this.#findOf(batch));
+    this.#baseFinds = this.#findAll();
     this.#finds = this.#baseFinds.slice();
     this.#reached = column(batches.length);
-    batches.forEach((_, batch) => this.#standing.push(this.#judge(batch, undefined)));
+    batches.forEach((_, batch) => this.#standing.push(this.#judge(batch)));
   }
 
   /** A link as it stands; null where no cake goes under the batch. */
@@ -128,20 +130,20 @@ export class Scales {
   #findAnew(reached: number[]): number[] {
     const trial = this.#trial;
     const found: number[] = [];
-    const mates = membersOf(trial, at(trial.now.vessel, trial.moved));
+    const mates = staysIn(trial, at(trial.now.vessel, trial.moved));
     if (this.#find(trial.moved, mates)) found.push(trial.moved);
     for (const vessel of vesselsChanged(trial)) {
-      const members = membersOf(trial, vessel);
-      for (const batch of members)
-        if (batch !== trial.moved && this.#find(batch, members)) found.push(batch);
+      const stays = staysIn(trial, vessel);
+      for (const batch of this.roster.inVessel[vessel] ?? [])
+        if (batch !== trial.moved && this.#find(batch, stays)) found.push(batch);
     }
     for (const batch of found) this.#take(batch, reached);
     return found;
   }
 
   /** True where the batch finds its vessel otherwise than on the board. */
-  #find(batch: number, members: readonly number[]): boolean {
-    const find = findIn(this.#trial, members, batch);
+  #find(batch: number, stays: readonly Stay[]): boolean {
+    const find = findIn(this.#trial, stays, batch);
     this.#finds[batch] = find;
     return find !== this.#baseFinds[batch];
   }
@@ -150,7 +152,9 @@ export class Scales {
     const changes: ChangedLink[] = [];
     for (const batch of reached) {
       const was = this.#standing[batch];
-      const { judgement: after } = this.#judge(batch, was);
+      const tried = this.#judge(batch, was, this.#tried[batch]);
+      if (tried !== was) this.#tried[batch] = tried;
+      const after = tried.judgement;
       const before = was?.judgement ?? null;
       const relinked = this.#trial.relinked.includes(batch);
       if (relinked ? before !== after : before?.counts !== after?.counts)
@@ -159,8 +163,8 @@ export class Scales {
     return changes;
   }
 
-  /** Judges a link as the trial stands; the known standing where nothing of it differs. */
-  #judge(batch: number, known: Standing | undefined): Standing {
+  /** Judges a link as the trial stands; a known standing where nothing of it differs. */
+  #judge(batch: number, known?: Standing, tried?: Standing): Standing {
     const cake = at(this.#trial.now.before, batch);
     const pair = cake === NONE ? null : this.#pairOf(cake, batch, known?.pair);
     if (!pair) return NO_LINK;
@@ -169,6 +173,8 @@ export class Scales {
     const find = at(this.#finds, batch);
     const isOld = known?.pair === pair && known.inherited === inherited;
     if (isOld && known.generation === generation && known.find === find) return known;
+    if (tried?.pair === pair && tried.inherited === inherited)
+      if (tried.generation === generation && tried.find === find) return tried;
     const around = { generation, inherited: this.#descents.inheritance(inherited), find };
     const counts = pair.counts + countDescent(pair, around) + countVessel(pair, around);
     if (isOld && known.judgement?.counts === counts) return known;
@@ -184,8 +190,14 @@ export class Scales {
       : this.#pairs.judge(cake, batch);
   }
 
-  #findOf(batch: number): number {
-    return findIn(this.#trial, membersOf(this.#trial, at(this.#trial.now.vessel, batch)), batch);
+  /** What each batch finds as the board stands. */
+  #findAll(): Int32Array {
+    const finds = new Int32Array(this.roster.batches.length);
+    this.roster.inVessel.forEach((batches, vessel) => {
+      const stays = staysIn(this.#trial, vessel);
+      for (const batch of batches) finds[batch] = findIn(this.#trial, stays, batch);
+    });
+    return finds;
   }
 
   #factsOf(batch: number) {

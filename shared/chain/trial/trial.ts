@@ -106,7 +106,8 @@ export class Trial {
     const { roster, now } = this;
     const read = at(roster.rackedDay, batch);
     if (read !== NONE) return read;
-    const [day, count] = [at(now.brewDay, batch), at(roster.daysUnderBeer, batch)];
+    const day = at(now.brewDay, batch);
+    const count = at(roster.daysUnderBeer, batch);
     return day === NONE || count === NONE ? NONE : day + count;
   }
 

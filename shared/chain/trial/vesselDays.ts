@@ -10,19 +10,29 @@ export type VesselFind = number;
 export const isTaken = (find: VesselFind): boolean => find % 2 === 1;
 export const beersSinceCleaning = (find: VesselFind): number => Math.floor(find / 2);
 
-/** What `useOfVessel` says of one batch, as the trial stands. 0 for a batch that is in no vessel. */
-export function findIn(trial: Trial, members: readonly number[], batch: number): VesselFind {
+/** A batch lies in a vessel from its brew day until it is racked; `NONE`: not known. */
+export interface Stay {
+  batch: number;
+  from: number;
+  until: number;
+}
+
+/**
+ * What `useOfVessel` says of one batch, as the trial stands. 0 for a batch that is in no vessel.
+ * @param stays all that lie in its vessel
+ */
+export function findIn(trial: Trial, stays: readonly Stay[], batch: number): VesselFind {
   const { now, roster } = trial;
-  const [vessel, day] = [at(now.vessel, batch), at(now.brewDay, batch)];
+  const vessel = at(now.vessel, batch);
   if (!lies(trial, batch, vessel)) return 0;
+  const day = at(now.brewDay, batch);
   const cleaned = at(roster.cleanedDay, vessel);
   let taken = 0;
   let beers = 1;
-  for (const other of members) {
-    if (other === batch || !lies(trial, other, vessel)) continue;
-    const from = at(now.brewDay, other);
+  for (const { batch: other, from, until } of stays) {
+    if (from > day || other === batch) continue;
     if (from < day && from >= cleaned) beers += 1;
-    if (from <= day && trial.rackDay(other) > day) taken = 1;
+    if (until > day) taken = 1;
   }
   return (cleaned === NONE || day < cleaned ? 0 : 2 * beers) + taken;
 }
@@ -33,11 +43,17 @@ function lies({ now, roster, moved }: Trial, batch: number, vessel: number): boo
   return batch === moved ? now.shelf[batch] !== NONE : roster.scheduled[batch] === true;
 }
 
-/** The batches that may lie in a vessel: the board's, and the moved one. */
-export function membersOf({ roster, now, moved }: Trial, vessel: number): readonly number[] {
-  const members = roster.inVessel[vessel] ?? [];
-  const isGuest = now.vessel[moved] === vessel && roster.standing.vessel[moved] !== vessel;
-  return isGuest ? [...members, moved] : members;
+/** What lies in a vessel: of the board's batches, and the moved one. */
+export function staysIn(trial: Trial, vessel: number): Stay[] {
+  const { roster, now, moved } = trial;
+  const stays: Stay[] = [];
+  const add = (batch: number) => {
+    if (!lies(trial, batch, vessel)) return;
+    stays.push({ batch, from: at(now.brewDay, batch), until: trial.rackDay(batch) });
+  };
+  for (const batch of roster.inVessel[vessel] ?? []) add(batch);
+  if (now.vessel[moved] === vessel && roster.standing.vessel[moved] !== vessel) add(moved);
+  return stays;
 }
 
 /** The vessels whose days a trial changes. */
