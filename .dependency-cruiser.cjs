@@ -7,8 +7,18 @@ module.exports = {
       from: { path: '^shared' },
       to: { pathNot: '^(shared|node_modules/zod)' },
     },
-    { name: 'pages-not-server', severity: 'error', from: { path: '^src' }, to: { path: '^server' } },
-    { name: 'server-not-pages', severity: 'error', from: { path: '^server' }, to: { path: '^src' } },
+    {
+      name: 'pages-not-server',
+      severity: 'error',
+      from: { path: '^src' },
+      to: { path: '^server' },
+    },
+    {
+      name: 'server-not-pages',
+      severity: 'error',
+      from: { path: '^server' },
+      to: { path: '^src' },
+    },
     { name: 'no-circles', severity: 'error', from: {}, to: { circular: true } },
   ],
   options: {
