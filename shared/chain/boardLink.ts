@@ -87,16 +87,23 @@ function usesOf(index: BoardIndex): (batchId: string) => VesselUse | undefined {
  */
 export function unsharedLink(earlier: Batch, later: Batch, sight: LinkSight): LinkInput | null {
   const { index, layout } = sight;
-  const yeast = cakeYeastOf(earlier, later, sight);
+  const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
+  // The yeast of the cake is its source's, which is the chain's but for branches.
+  const source = earlier.chainId === null ? chain : layout.chain(earlier.chainId);
+  const yeast = index.yeasts.get(source?.yeastId ?? '');
   if (!yeast) return null;
   const { generation, inherited } = sight.descent(later);
-  const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
   const vessel = chain?.vesselId ? index.vessels.get(chain.vesselId) : undefined;
+  const pour = pourFactsOf(later, earlier);
+  const own = later.vesselId ? index.vessels.get(later.vesselId) : undefined;
+  pour.vessel = own && vesselFactsOf(own);
+  pour.otherYeast = otherYeast(index.yeasts.get(later.yeastId ?? chain?.yeastId ?? ''), yeast);
+  pour.beersSinceCleaning = sight.use(later.id)?.beersSinceCleaning;
   return {
     earlier: sight.facts(earlier),
     later: sight.facts(later),
-    pour: pourOf(earlier, later, sight),
-    yeast,
+    pour,
+    yeast: sight.yeastFacts(yeast),
     vessel: vessel && vesselFactsOf(vessel),
     generation: generation ?? undefined,
     inherited,
@@ -107,34 +114,11 @@ export function unsharedLink(earlier: Batch, later: Batch, sight: LinkSight): Li
   };
 }
 
-/** The yeast of the cake that goes under a batch: its source's, which is its chain's but for branches. */
-function cakeYeastOf(earlier: Batch, later: Batch, sight: LinkSight): YeastFacts | null {
-  const yeast = sight.index.yeasts.get(cakeYeastId(earlier, later, sight) ?? '');
-  return yeast ? sight.yeastFacts(yeast) : null;
-}
-
-function cakeYeastId(earlier: Batch, later: Batch, { layout }: LinkSight): string | undefined {
-  const chainId = earlier.chainId ?? later.chainId;
-  return chainId === null ? undefined : layout.chain(chainId)?.yeastId;
-}
-
 /** The yeast that the later batch asks for where that is not the cake's. */
-function otherYeastOf(earlier: Batch, later: Batch, sight: LinkSight): PourFacts['otherYeast'] {
-  const { index, layout } = sight;
-  const chain = later.chainId === null ? undefined : layout.chain(later.chainId);
-  const wanted = index.yeasts.get(later.yeastId ?? chain?.yeastId ?? '');
-  if (!wanted || wanted.id === cakeYeastId(earlier, later, sight)) return undefined;
-  return { kind: wanted.kind, character: wanted.character };
-}
-
-function pourOf(earlier: Batch, later: Batch, sight: LinkSight): PourFacts {
-  const own = later.vesselId ? sight.index.vessels.get(later.vesselId) : undefined;
-  const pour = pourFactsOf(later, earlier);
-  pour.otherYeast = otherYeastOf(earlier, later, sight);
-  pour.vessel = own && vesselFactsOf(own);
-  pour.beersSinceCleaning = sight.use(later.id)?.beersSinceCleaning;
-  return pour;
-}
+const otherYeast = (wanted: Yeast | undefined, yeast: Yeast): PourFacts['otherYeast'] =>
+  wanted === undefined || wanted.id === yeast.id
+    ? undefined
+    : { kind: wanted.kind, character: wanted.character };
 
 function boardContext(earlier: Batch, later: Batch, sight: LinkSight): BoardContext {
   return {
