@@ -15,7 +15,7 @@ test('on a phone the figures come first, and talk is at the foot', async ({ boar
   });
   await board.goto(`/b/${brewery.slug}`);
   await board.getByRole('link', { name: 'Clean ale', exact: true }).tap();
-  const figures = board.getByRole('heading', { name: 'The same in figures' });
+  const figures = board.getByRole('heading', { name: 'In figures' });
   await expect(figures).toBeVisible();
   const [table, gravity] = await Promise.all([
     figures.boundingBox(),

@@ -41,7 +41,7 @@ test('a chain opened from its name tells its course in figures', async ({ board,
   await expect(row('Withy Bitter')).toContainText('Hold');
   await expect(row('Ebb Pale')).toContainText(/[\d.]+ × \([\d.]+ × to [\d.]+ ×\)/);
   // Wider than its place, it fades where it goes on, and no longer at its end.
-  const table = board.getByRole('region', { name: 'The same in figures' });
+  const table = board.getByRole('region', { name: 'In figures' });
   await expect(table).toHaveCSS('mask-image', /^linear-gradient/);
   await table.evaluate((region) => region.scrollTo({ left: region.scrollWidth }));
   await expect(table).toHaveCSS('mask-image', 'none');
