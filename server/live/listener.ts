@@ -29,6 +29,8 @@ export function listen(url: string, ports: ListenerPorts): Listener {
     for (let tries = 0; !isClosed; tries += 1) {
       try {
         current = await openConnection(url, ports.onNote);
+        // Closed while it was being opened: nobody else would end it.
+        if (isClosed) return current.end();
         tries = 0;
         ports.onListening();
         await current.lost;

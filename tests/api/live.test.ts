@@ -8,7 +8,9 @@ import { api } from '#shared/api/urls.ts';
 import { membership } from '../../server/db/schema/brewery.ts';
 import { presence } from '../../server/db/schema/live.ts';
 import { session } from '../../server/db/schema/people.ts';
+import { listen } from '../../server/live/listener.ts';
 import { startServer } from '../../server/local/serverProcess.mjs';
+import { createLog } from '../../server/log.ts';
 import {
   boardOf,
   good,
@@ -321,5 +323,16 @@ describe('the end', () => {
     await third.close();
     await watching.ended();
     expect(watching.all('ended')).toEqual([]);
+  });
+
+  it('comes to a process that does not listen yet', async () => {
+    const noted: unknown[] = [];
+    const listener = listen(one.databaseUrl, {
+      log: createLog('error'),
+      onNote: (note) => noted.push(note),
+      onListening: () => noted.push('listening'),
+    });
+    await listener.close();
+    expect(noted).toEqual([]);
   });
 });
