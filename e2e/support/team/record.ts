@@ -54,8 +54,8 @@ function stoodThere(rows: readonly ChangeRow[], wish: MoveRequest): boolean {
   const chainId = wish.toChainId === 'bench' ? null : wish.toChainId;
   const afterId = chainId === null ? null : wish.afterBatchId;
   return rows
-    .flatMap(({ before, after }) => [before, after] as Partial<Side>[])
-    .flatMap((side) => side.batches ?? [])
+    .flatMap(({ before, after }) => [before, after] as (Partial<Side> | null)[])
+    .flatMap((side) => side?.batches ?? [])
     .some((is) => is.id === wish.batchId && is.chainId === chainId && is.afterId === afterId);
 }
 
