@@ -26,7 +26,7 @@ export function CourseTable({ course }: { course: Course }) {
                 <th
                   key={name}
                   scope="col"
-                  className="max-w-40 border-b border-edge px-2.5 py-1.5 text-left align-bottom font-semibold text-ink2 first:sticky first:left-0 first:bg-stone first:pl-0"
+                  className="max-w-40 min-w-28 border-b border-edge px-2.5 py-1.5 text-left align-bottom font-semibold text-ink2 first:sticky first:left-0 first:bg-stone first:pl-0"
                 >
                   {name}
                 </th>
