@@ -56,8 +56,10 @@ export class Scales {
   /** As each link was last tried: the gaps of one shelf do the same to most of those behind them. */
   readonly #tried: Standing[] = [];
   /** The trial in which a batch was last reached. */
-  readonly #reached: Int32Array;
+  readonly #lastReached: Int32Array;
   #trials = 0;
+  /** Those that the trial at hand reaches, in the order in which they were found. */
+  #reached: number[] = [];
 
   constructor(board: BoardFacts) {
     this.sight = sightOf(board);
@@ -68,7 +70,7 @@ export class Scales {
     this.#pairs = new Pairs(this.#trial, this.sight);
     this.#baseFinds = this.#findAll();
     this.#finds = this.#baseFinds.slice();
-    this.#reached = column(batches.length);
+    this.#lastReached = column(batches.length);
     batches.forEach((_, batch) => this.#standing.push(this.#judge(batch)));
   }
 
@@ -92,7 +94,7 @@ export class Scales {
     this.#trial.put(batch, place);
     const reached = this.#reach(batch);
     this.#descents.trace(reached);
-    const found = this.#findAnew(reached);
+    const found = this.#findAnew();
     const changed = this.#changes(reached);
     const brewDay = at(this.#trial.now.brewDay, batch);
     const generation = at(this.#descents.generation, batch);
@@ -108,26 +110,26 @@ export class Scales {
    */
   #reach(batch: number): number[] {
     this.#trials += 1;
-    const reached: number[] = [];
-    const take = (one: number) => this.#take(one, reached);
-    take(batch);
-    for (const one of this.#trial.relinked) take(one);
+    const reached: number[] = (this.#reached = []);
+    this.#take(batch);
+    for (const one of this.#trial.relinked) this.#take(one);
     for (let next = 0; next < reached.length; next += 1)
-      this.#trial.eachFollower(reached[next] ?? NONE, take);
+      this.#trial.eachFollower(reached[next] ?? NONE, this.#take);
     const changed = reached.length;
     for (let next = 0; next < changed; next += 1)
-      eachSharer(this.#trial, reached[next] ?? NONE, take);
+      eachSharer(this.#trial, reached[next] ?? NONE, this.#take);
     return reached;
   }
 
-  #take(batch: number, reached: number[]): void {
-    if (this.#reached[batch] === this.#trials) return;
-    this.#reached[batch] = this.#trials;
-    reached.push(batch);
-  }
+  /** One function for all trials: it is handed on thousands of times for one lift. */
+  readonly #take = (batch: number): void => {
+    if (this.#lastReached[batch] === this.#trials) return;
+    this.#lastReached[batch] = this.#trials;
+    this.#reached.push(batch);
+  };
 
   /** Looks into the vessels whose days changed; what is found otherwise there is reached too. */
-  #findAnew(reached: number[]): number[] {
+  #findAnew(): number[] {
     const trial = this.#trial;
     const found: number[] = [];
     const mates = staysIn(trial, at(trial.now.vessel, trial.moved));
@@ -137,7 +139,7 @@ export class Scales {
       for (const batch of this.roster.inVessel[vessel] ?? [])
         if (batch !== trial.moved && this.#find(batch, stays)) found.push(batch);
     }
-    for (const batch of found) this.#take(batch, reached);
+    for (const batch of found) this.#take(batch);
     return found;
   }
 

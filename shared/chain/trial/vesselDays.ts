@@ -46,13 +46,12 @@ function lies({ now, roster, moved }: Trial, batch: number, vessel: number): boo
 /** What lies in a vessel: of the board's batches, and the moved one. */
 export function staysIn(trial: Trial, vessel: number): Stay[] {
   const { roster, now, moved } = trial;
+  const own = roster.inVessel[vessel] ?? [];
+  const comes = now.vessel[moved] === vessel && roster.standing.vessel[moved] !== vessel;
   const stays: Stay[] = [];
-  const add = (batch: number) => {
-    if (!lies(trial, batch, vessel)) return;
-    stays.push({ batch, from: at(now.brewDay, batch), until: trial.rackDay(batch) });
-  };
-  for (const batch of roster.inVessel[vessel] ?? []) add(batch);
-  if (now.vessel[moved] === vessel && roster.standing.vessel[moved] !== vessel) add(moved);
+  for (const batch of comes ? [...own, moved] : own)
+    if (lies(trial, batch, vessel))
+      stays.push({ batch, from: at(now.brewDay, batch), until: trial.rackDay(batch) });
   return stays;
 }
 
