@@ -45,10 +45,16 @@ export function sightOf(board: BoardFacts, units?: UnitPrefs): Sight {
   };
 }
 
+const rulesMade = new WeakMap<BoardFacts['houseRules'], HouseRules>();
+
 /** The brewery's house rules; the defaults where what is stored cannot stand. */
-export function rulesOf(board: Pick<BoardFacts, 'houseRules'>): HouseRules {
-  const resolved = resolveHouseRules(board.houseRules);
-  return resolved.ok ? resolved.rules : DEFAULT_HOUSE_RULES;
+export function rulesOf({ houseRules }: Pick<BoardFacts, 'houseRules'>): HouseRules {
+  const known = rulesMade.get(houseRules);
+  if (known) return known;
+  const resolved = resolveHouseRules(houseRules);
+  const rules = resolved.ok ? resolved.rules : DEFAULT_HOUSE_RULES;
+  rulesMade.set(houseRules, rules);
+  return rules;
 }
 
 export function remembered<K extends object, V>(make: (key: K) => V): (key: K) => V {

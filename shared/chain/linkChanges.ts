@@ -4,6 +4,7 @@ import type { Verdict } from '../rules/vocabulary.ts';
 import type { BoardFacts } from './board.ts';
 import { sightOf, type Sight } from './boardLink.ts';
 import { judgeLink } from './checkLink.ts';
+import { indexedBoard } from './indexedBoard.ts';
 import { judgeBoard } from './judgeBoard.ts';
 import { linkInput } from './linkInput.ts';
 
@@ -46,13 +47,14 @@ export function linkSaying(board: BoardFacts, batchId: string): LinkSaying | nul
   return { verdict, reason };
 }
 
-const nameIn = (boards: readonly BoardFacts[], id: string): string =>
-  boards.flatMap(({ batches }) => batches).find((batch) => batch.id === id)?.name ?? '';
+/** On the later board, or on the earlier one where it is there no longer. */
+const nameOn = (before: BoardFacts, after: BoardFacts, id: string): string =>
+  (indexedBoard(after).batch(id) ?? indexedBoard(before).batch(id))?.name ?? '';
 
 /** What the link into one batch said before and says now, whether or not that differs. */
 export const linkChange = (before: BoardFacts, after: BoardFacts, batchId: string): LinkChange => ({
   batchId,
-  name: nameIn([after, before], batchId),
+  name: nameOn(before, after, batchId),
   from: linkSaying(before, batchId),
   to: linkSaying(after, batchId),
 });
@@ -69,6 +71,6 @@ export function linkChanges(
     const from = old ? sayingOf(old) : null;
     const to = now ? sayingOf(now) : null;
     const same = from?.verdict === to?.verdict && from?.reason === to?.reason;
-    return same ? [] : [{ batchId, name: nameIn([after, before], batchId), from, to }];
+    return same ? [] : [{ batchId, name: nameOn(before, after, batchId), from, to }];
   });
 }
