@@ -19,6 +19,7 @@ export function connect(url: string, options: ConnectOptions = {}): { db: Db; po
   const pool = new pg.Pool({
     connectionString: url,
     max: options.max ?? 10,
+    pipeline: true,
     connectionTimeoutMillis: 10_000,
     statement_timeout: 15_000,
     idle_in_transaction_session_timeout: 15_000,

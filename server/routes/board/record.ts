@@ -56,26 +56,32 @@ export async function writeEntry(tx: Tx, member: Where, at: Date, entry: Entry):
   await writeEntries(tx, at, [{ member, entry }]);
 }
 
-/** In the order in which they are given. */
+/** In the order in which they are given, in one statement. */
 export async function writeEntries(
   tx: Tx,
   at: Date,
   entries: readonly { member: Where; entry: Entry }[],
 ): Promise<void> {
-  await tx.insert(change).values(
-    entries.map(({ member, entry: { id = randomUUID(), touches, before, after, ...rest } }) => ({
-      id,
-      ...rest,
-      before: stored(before),
-      after: stored(after),
-      touches: [...touches],
-      breweryId: member.brewery.id,
-      seasonId: member.seasonId,
-      personId: member.person.id,
-      at,
-    })),
-  );
+  const values = entries.map(({ member, entry }) => ({
+    id: entry.id ?? randomUUID(),
+    brewery_id: member.brewery.id,
+    season_id: member.seasonId,
+    person_id: member.person.id,
+    kind: entry.kind,
+    what: entry.what,
+    before: entry.before,
+    after: entry.after,
+    touches: entry.touches,
+    of_change: entry.ofChange,
+  }));
+  // What was not there, or is no longer, is JSON's null: the record has no gaps.
+  await tx.execute(sql`
+    insert into ${change} (
+      id, brewery_id, season_id, person_id, at, kind, what, before, after, touches, of_change)
+    select id, brewery_id, season_id, person_id, ${at.toISOString()}::timestamptz, kind, what,
+      coalesce(before, 'null'), coalesce(after, 'null'), touches, of_change
+    from rows from (jsonb_to_recordset(${JSON.stringify(values)}::jsonb) as (
+      id uuid, brewery_id uuid, season_id uuid, person_id uuid, kind text, what text,
+      before jsonb, after jsonb, touches uuid[], of_change uuid)) with ordinality
+    order by ordinality`);
 }
-
-/** What was not there, or is no longer: JSON's null, since the record has no gaps. */
-const stored = (side: unknown) => side ?? sql`'null'::jsonb`;

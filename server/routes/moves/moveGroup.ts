@@ -19,6 +19,12 @@ import { storeRows, withNewVersions } from './store.ts';
 type Granted = Extract<MoveResult, { ok: true }>;
 type Change = typeof change.$inferSelect;
 
+interface After {
+  board: Hand['board'];
+  /** Rows that the move changes, with their new versions. */
+  batches: Batch[];
+}
+
 interface Asked {
   member: Member;
   request: MoveRequest;
@@ -55,9 +61,11 @@ export class MoveGroup {
   async store(): Promise<Outcome<Moved>[]> {
     if (this.#entries.length === 0) return this.#outcomes;
     const { tx, board, now } = this.#hand;
-    await raiseRevision(tx, board.season.id, this.#entries.length);
-    await storeRows(this.#hand, [...this.#rows.values()]);
-    await writeEntries(tx, now, this.#entries);
+    await Promise.all([
+      raiseRevision(tx, board.season.id, this.#entries.length),
+      storeRows(this.#hand, [...this.#rows.values()]),
+      writeEntries(tx, now, this.#entries),
+    ]);
     return this.#outcomes;
   }
 
@@ -76,10 +84,11 @@ export class MoveGroup {
       const own = this.#newestOf(member);
       return answerMove(hand, { changeId: request.id, what, revision, ...(own && { own }) });
     }
-    demandNotInHand(hand, withRows(board, result.batches, result.chains));
+    const after = afterMove(board, result);
+    demandNotInHand(hand, after.board);
     if (request.newChain && result.chains.length > 0)
       await insertChain(hand, request.newChain, '/newChain');
-    return answerMove(hand, this.#take({ member, request }, result));
+    return answerMove(hand, this.#take({ member, request }, result, after));
   }
 
   /** What somebody can undo next, where they made a move of this group. */
@@ -89,15 +98,10 @@ export class MoveGroup {
   }
 
   /** Takes a granted move into the board and the record. */
-  #take({ member, request }: Asked, result: Granted) {
+  #take({ member, request }: Asked, result: Granted, { board: after, batches }: After) {
     const { what, chains, shifted, cleared } = result;
     const before = this.#board;
-    const batches = withNewVersions(before, result.batches);
     for (const row of batches) this.#rows.set(row.id, row);
-    const revision = before.season.revision + 1;
-    const season = { ...before.season, revision };
-    // One object for the next move's before and this one's after: what is read of it is read once.
-    const after = { ...before, ...withRows(before, batches, chains), season };
     this.#board = after;
     const sides = sidesOf(before, after, request.batchId);
     this.#entries.push({
@@ -112,6 +116,14 @@ export class MoveGroup {
       },
     });
     const own = { undo: { id: request.id, what }, redo: null };
+    const { revision } = after.season;
     return { changeId: request.id, what, revision, batches, chains, shifted, cleared, own };
   }
+}
+
+/** One object for the next move's before and this one's after: what is read of it is read once. */
+function afterMove(before: Hand['board'], { batches, chains }: Granted): After {
+  const rows = withNewVersions(before, batches);
+  const season = { ...before.season, revision: before.season.revision + 1 };
+  return { board: { ...before, ...withRows(before, rows, chains), season }, batches: rows };
 }
