@@ -114,7 +114,7 @@ export async function personOf(db: Db, now: Date, req: Request): Promise<string 
 }
 
 /** The session that a token's hash opens, while it lasts. */
-export const isOpen = () =>
+const isOpen = () =>
   and(
     eq(session.tokenHash, sql.placeholder('tokenHash')),
     gt(session.expiresAt, sql.placeholder('now')),

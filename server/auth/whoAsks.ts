@@ -1,23 +1,13 @@
-import { and, eq, sql } from 'drizzle-orm';
 import type { Request } from 'express';
 import { z } from 'zod';
 import type { Role } from '#shared/api/people.ts';
 import type { Deps } from '../deps.ts';
 import type { Db } from '../db/client.ts';
-import { oncePer } from '../db/oncePer.ts';
-import { brewery, membership } from '../db/schema/brewery.ts';
-import { person, session } from '../db/schema/people.ts';
-import { season } from '../db/schema/season.ts';
+import type { brewery } from '../db/schema/brewery.ts';
 import { notFound, problem } from '../problems.ts';
 import { findGuest, type GuestChains } from './guests.ts';
-import {
-  findSession,
-  findSignedIn,
-  isOpen,
-  SESSION,
-  type PersonRow,
-  type SignedIn,
-} from './sessions.ts';
+import { lookUpMember, type PlaceAsked } from './lookUpMember.ts';
+import { findSession, findSignedIn, type PersonRow, type SignedIn } from './sessions.ts';
 
 export type { SignedIn } from './sessions.ts';
 
@@ -50,20 +40,14 @@ export async function whoAsks(
   return { signedIn, member: null };
 }
 
-/**
- * Session and membership in one statement: it is asked before every request. Another's brewery does
- * not exist: the answer is the same as for a name that nobody has.
- */
+/** Another's brewery does not exist: the answer is the same as for a name that nobody has. */
 async function findMember(
   { db, clock }: Pick<Deps, 'db' | 'clock'>,
   req: Request,
   { slug, asked }: PlaceAsked,
 ): Promise<{ signedIn: SignedIn; member: Member }> {
-  const found = await findSession(
-    db,
-    clock,
-    req,
-    async (key) => (await memberQuery(db).execute({ ...key, slug, asked }))[0],
+  const found = await findSession(db, clock, req, (key) =>
+    lookUpMember(db, { ...key, slug, asked }),
   );
   if (!found) throw problem('not-signed-in');
   const { person, tokenHash, brewery, role, seasonId, isArchived } = found;
@@ -72,12 +56,6 @@ async function findMember(
       ? { person, guestOf: null, brewery, role, seasonId, isArchived }
       : await findGuestOr404(db, slug, asked, person);
   return { signedIn: { person, tokenHash }, member };
-}
-
-interface PlaceAsked {
-  slug: string;
-  /** The season; null: the current one. */
-  asked: string | null;
 }
 
 const uuid = z.uuid().toLowerCase();
@@ -105,33 +83,3 @@ async function findGuestOr404(
   const role = [...chains.values()].includes('brewer') ? 'brewer' : 'taster';
   return { person, role, ...where, guestOf: chains };
 }
-
-/** The brewery is null where there is none of this name, role and season for who is no member. */
-const memberQuery = oncePer((db: Db) =>
-  db
-    .select({
-      ...SESSION,
-      brewery,
-      role: membership.role,
-      seasonId: season.id,
-      isArchived: sql<boolean>`${season.archivedAt} is not null`,
-    })
-    .from(session)
-    .innerJoin(person, eq(person.id, session.personId))
-    .leftJoin(brewery, eq(brewery.slug, sql.placeholder('slug')))
-    .leftJoin(
-      membership,
-      and(eq(membership.breweryId, brewery.id), eq(membership.personId, person.id)),
-    )
-    .leftJoin(
-      season,
-      and(
-        eq(season.breweryId, membership.breweryId),
-        sql`(${sql.placeholder('asked')}::uuid is null or ${season.id} = ${sql.placeholder('asked')}::uuid)`,
-      ),
-    )
-    .where(isOpen())
-    .orderBy(sql`(${season.id} = ${brewery.currentSeasonId}) desc nulls last`, season.createdAt)
-    .limit(1)
-    .prepare('member'),
-);
