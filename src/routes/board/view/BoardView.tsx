@@ -1,4 +1,12 @@
-import { createContext, use, useMemo, type ReactNode } from 'react';
+import {
+  createContext,
+  use,
+  useLayoutEffect,
+  useMemo,
+  useState,
+  useSyncExternalStore,
+  type ReactNode,
+} from 'react';
 import type { Board } from '#shared/api/board.ts';
 import type { Abilities } from '#shared/api/people.ts';
 import type { UnitPrefs } from '#shared/api/units.ts';
@@ -7,6 +15,7 @@ import type { JudgedBoard } from '#shared/chain/judgeBoard.ts';
 import { useBoard, useBoardSlug, useJudged } from '../../../api/board.ts';
 import { useOnline } from '../../../app/useOnline.ts';
 import { useUnits } from '../../../app/useUnits.ts';
+import { createViewSource, type ViewSource } from './viewSource.ts';
 
 export interface BoardViewValue {
   board: Board;
@@ -21,8 +30,9 @@ export interface BoardViewValue {
   online: boolean;
 }
 
-const BoardView = createContext<BoardViewValue | null>(null);
-const WholeBoardView = createContext<BoardViewValue | null>(null);
+const WholeBoard = createContext<ViewSource<BoardViewValue> | null>(null);
+/** Null: what is drawn here shows the whole board. */
+const BoardPart = createContext<BoardViewValue | null>(null);
 
 export const NOTHING: Abilities = {
   editBatches: false,
@@ -61,25 +71,36 @@ export function BoardViewProvider({ children }: { children: ReactNode }) {
 
 /** The same parts for a board that comes from elsewhere, such as behind a link. */
 export function BoardViewOf({ value, children }: { value: BoardViewValue; children: ReactNode }) {
+  const [source] = useState(createViewSource<BoardViewValue>);
+  // Shown while drawing, so that what is drawn below in the same pass finds it; told once that is done.
+  source.show(value);
+  useLayoutEffect(() => source.tell(), [source, value]);
   return (
-    <WholeBoardView value={value}>
-      <BoardView value={value}>{children}</BoardView>
-    </WholeBoardView>
+    <WholeBoard value={source}>
+      <BoardPart value={null}>{children}</BoardPart>
+    </WholeBoard>
   );
 }
 
 /** For a part of the board: the view that it is drawn from. */
 export function BoardPartView({ view, children }: { view: BoardViewValue; children: ReactNode }) {
-  return <BoardView value={view}>{children}</BoardView>;
+  return <BoardPart value={view}>{children}</BoardPart>;
 }
 
 /** For what a part of the board opens and what looks beyond that part: the whole board, as it is now. */
 export function OnWholeBoard({ children }: { children: ReactNode }) {
-  return <BoardView value={use(WholeBoardView)}>{children}</BoardView>;
+  return <BoardPart value={null}>{children}</BoardPart>;
 }
 
 export function useBoardView(): BoardViewValue {
-  const value = use(BoardView);
-  if (!value) throw new Error('Only inside the board');
-  return value;
+  const part = use(BoardPart);
+  const whole = use(WholeBoard);
+  const view = useSyncExternalStore(
+    part || !whole ? neverChanges : whole.subscribe,
+    () => part ?? whole?.get() ?? null,
+  );
+  if (!view) throw new Error('Only inside the board');
+  return view;
 }
+
+const neverChanges = () => () => {};
