@@ -1,5 +1,6 @@
 import { useEffect } from 'react';
 import { lazyPart } from '../../../app/lazyPart.tsx';
+import { useFrameLater } from '../../../app/useFrameLater.ts';
 import { OnBoardOf } from '../guest/OnBoardOf.tsx';
 import { ChangesPanel } from '../lift/ChangesPanel.tsx';
 import { useLiftMachine, useLiftPanel, useLiftState } from '../lift/liftContext.ts';
@@ -22,10 +23,17 @@ function useOneAtATime(openLink: string | null, isLifted: boolean, close: () => 
   }, [isLifted, openLink, close]);
 }
 
+/** What a drop changed is told a frame after the shelves show it: in one frame both would be felt. */
+function useToldLift() {
+  const lift = useLiftPanel();
+  const before = useFrameLater(lift);
+  return lift === 'changes' && before !== 'changes' ? null : lift;
+}
+
 /** Beside the shelves where there is room; over them, from the side or the foot, where not. */
 export function SidePanel() {
   const wide = useWide();
-  const lift = useLiftPanel();
+  const lift = useToldLift();
   const { panel, close } = useBoardPanel();
   const openLink = panel?.kind === 'link' ? panel.laterId : null;
   useOneAtATime(openLink, lift === 'places', close);
