@@ -73,6 +73,8 @@ export function useSignOut() {
   return useMutation({
     mutationFn: () => requestNothing('DELETE', api.session),
     onSuccess: () => {
+      // An answer after a silence has all that is shown read anew: nobody may read it any more.
+      void client.cancelQueries();
       // Whoever shows what was read sees this first, and goes.
       client.setQueryData(sessionQuery.queryKey, null);
       forgetAnswers(client, { but: SESSION_KEY });
